@@ -1,0 +1,21 @@
+// Long work as a generator: the work says where it may pause; whoever drives it owns the clock and the cancellation.
+
+/** A computation that yields at its resting points and returns its result. It reads no clock. */
+export type Work<T> = Generator<void, T, void>;
+
+/** Runs the work to its end without a pause. */
+export function finish<T>(work: Work<T>): T {
+  for (;;) {
+    const step = work.next();
+    if (step.done === true) return step.value;
+  }
+}
+
+/** Work that rests after every `stride` items of a list. */
+export function* inStrides<T>(items: Iterable<T>, stride: number, each: (item: T, index: number) => void): Work<void> {
+  let index = 0;
+  for (const item of items) {
+    each(item, index++);
+    if (index % stride === 0) yield;
+  }
+}

@@ -1,0 +1,61 @@
+// A question: terms that may name one concept, with the evidence for it.
+
+/** What kind of mix a question is about. */
+export type QuestionKind =
+  'variant' | 'abbreviation' | 'ambiguous-abbreviation' | 'synonym' | 'verb-object' | 'look-alike';
+
+/** The kinds that are asked unless a caller selects others. */
+export const DEFAULT_KINDS: readonly QuestionKind[] = [
+  'variant',
+  'abbreviation',
+  'ambiguous-abbreviation',
+  'synonym',
+  'verb-object',
+];
+
+/** One spelling of a term as it stands in the documents, with its number of uses. */
+export interface TermForm {
+  readonly text: string;
+  readonly uses: number;
+}
+
+/** One of the names that a question is about. `text` is its most used form (lower case unless it is always capitalised). */
+export interface QuestionTerm {
+  readonly text: string;
+  readonly uses: number;
+  readonly documents: number;
+  readonly forms: readonly TermForm[];
+  /** `noun` or `verb` where usage says so. */
+  readonly partOfSpeech?: 'noun' | 'verb' | 'adjective' | 'other';
+}
+
+/** Why a question is asked: a plain sentence fragment for a writer, with the figure behind it. */
+export interface Reason {
+  /** A stable short name of the evidence, such as `spelling`, `shared-frames`, `component`, `definition`. */
+  readonly kind: string;
+  readonly text: string;
+  readonly value: number;
+}
+
+/** A place where one of the terms is used: document index in the corpus and token range in that document. */
+export interface UsePlace {
+  /** Index into the question's terms. */
+  readonly term: number;
+  readonly document: number;
+  readonly firstToken: number;
+  readonly lastToken: number;
+}
+
+/** An undecided mix. Ids are stable: they depend on the kind and the terms' texts alone. */
+export interface Question {
+  readonly id: string;
+  readonly kind: QuestionKind;
+  /** From 0 to 1: how sure the evidence is that the terms name one concept. */
+  readonly confidence: number;
+  /** What answering settles: confidence × uses outside the leading term. Orders the questions. */
+  readonly worth: number;
+  /** Most used first, ties by code units. */
+  readonly terms: readonly QuestionTerm[];
+  readonly reasons: readonly Reason[];
+  readonly places: readonly UsePlace[];
+}
