@@ -1,0 +1,119 @@
+// The corpus: all documents' facts added up in whole numbers; an immutable snapshot, from which a change makes the next.
+import { compareCodeUnits } from '../base/order.js';
+import { PagedColumn } from '../base/pagedColumn.js';
+import type { Work } from '../base/work.js';
+import type { DocumentFacts } from '../facts/documentFacts.js';
+import { countBlock } from './counting.js';
+import { GramTable } from './grams.js';
+import { makeStream } from './stream.js';
+import type { TokenStream } from './stream.js';
+import { Vocabulary } from './vocabulary.js';
+
+/** One document in a corpus: its facts, and the corpus's number of each of its words. */
+export interface CorpusDocument {
+  readonly uri: string;
+  readonly facts: DocumentFacts;
+  /** From an index into `facts.words` to a word of the vocabulary. */
+  readonly ids: Uint32Array;
+  /** The corpus's number of each block's prose. */
+  readonly blocks: Uint32Array;
+}
+
+/** A document to put in, or to take out where `facts` is undefined. */
+export interface DocumentChange {
+  readonly uri: string;
+  readonly facts: DocumentFacts | undefined;
+}
+
+/** Tables that only grow: shared by all snapshots of one corpus, and written by its one writer alone. */
+interface Tables {
+  readonly vocabulary: Vocabulary;
+  readonly grams: GramTable;
+  readonly blockIds: Map<number, number>;
+}
+
+/**
+ * Counts over a set of documents. Blocks with the same prose count once, however many documents hold them; only words in
+ * open zones count. Every count is a function of the set of documents alone, whatever the order of changes was.
+ */
+export class Corpus {
+  static create(): Corpus {
+    const tables = { vocabulary: new Vocabulary(), grams: new GramTable(), blockIds: new Map<number, number>() };
+    return new Corpus(tables, [], PagedColumn.empty, PagedColumn.empty, PagedColumn.empty);
+  }
+
+  private cachedStream: TokenStream | undefined;
+
+  private constructor(
+    private readonly tables: Tables,
+    /** In order of their URIs' code units. */
+    readonly documents: readonly CorpusDocument[],
+    private readonly blockUses: PagedColumn,
+    private readonly wordUses: PagedColumn,
+    private readonly gramUses: PagedColumn,
+  ) {}
+
+  get vocabulary(): Vocabulary {
+    return this.tables.vocabulary;
+  }
+
+  get grams(): GramTable {
+    return this.tables.grams;
+  }
+
+  /** Uses of a spelling, as written. */
+  usesOfWord(id: number): number {
+    return this.wordUses.get(id);
+  }
+
+  /** Uses of an n-gram of lower-case words that begins and ends with a content word. */
+  usesOfGram(id: number): number {
+    return this.gramUses.get(id);
+  }
+
+  /** All tokens in one row of columns, in document order; made when first asked for. */
+  get stream(): TokenStream {
+    this.cachedStream ??= makeStream(this.documents, this.vocabulary);
+    return this.cachedStream;
+  }
+
+  /** The next snapshot; this one stays as it is. A later change of the same URI in one list wins. */
+  *apply(changes: readonly DocumentChange[]): Work<Corpus> {
+    const changed = new Map(changes.map((change) => [change.uri, change.facts]));
+    const blockUses = this.blockUses.edit();
+    const columns = { words: this.wordUses.edit(), grams: this.gramUses.edit() };
+    const count = (document: CorpusDocument, sign: 1 | -1): void => {
+      document.blocks.forEach((block, index) => {
+        const uses = blockUses.add(block, sign);
+        if (uses === (sign === 1 ? 1 : 0)) countBlock(document, index, sign, this.tables, columns);
+      });
+    };
+    const documents: CorpusDocument[] = [];
+    for (const document of this.documents) {
+      if (changed.has(document.uri)) count(document, -1);
+      else documents.push(document);
+    }
+    for (const [uri, facts] of changed) {
+      if (facts === undefined) continue;
+      const document = this.number(uri, facts);
+      count(document, 1);
+      documents.push(document);
+      yield;
+    }
+    documents.sort((a, b) => compareCodeUnits(a.uri, b.uri));
+    return new Corpus(this.tables, documents, blockUses.finish(), columns.words.finish(), columns.grams.finish());
+  }
+
+  private number(uri: string, facts: DocumentFacts): CorpusDocument {
+    const { vocabulary, blockIds } = this.tables;
+    const ids = Uint32Array.from(facts.words, (word) => vocabulary.idOf(word));
+    const words = Array.from(ids, (id) => vocabulary.textOf(id));
+    const blocks = new Uint32Array(facts.blockHash.length);
+    facts.blockHash.forEach((hash, index) => {
+      let id = blockIds.get(hash);
+      if (id === undefined) blockIds.set(hash, (id = blockIds.size));
+      blocks[index] = id;
+    });
+    return { uri, facts: { ...facts, words }, ids, blocks };
+  }
+}

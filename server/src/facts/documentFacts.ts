@@ -1,0 +1,159 @@
+// What is known of one document by its text alone: its tokens and blocks as columns.
+import { hashText } from '../base/hash.js';
+import { isFunctionWord } from '../lexicon/functionWords.js';
+import { BLOCK_KINDS, sourceEnd, sourceStart } from '../prose/prose.js';
+import type { BlockContent, Prose, ProseBlock } from '../prose/prose.js';
+import type { BlockTokens, LanguageProfile } from '../tokens/tokens.js';
+import { FactFlag } from './flags.js';
+
+/** A link of the document: the tokens of its text and its target as written. */
+export interface LinkFact {
+  readonly firstToken: number;
+  /** One after the last token. */
+  readonly endToken: number;
+  readonly target: string;
+}
+
+/**
+ * The facts of one document, a function of its text, format, language and the engine's version alone.
+ * One row a token; `word` and `lemma` are indexes into `words`; `start` and `end` are UTF-16 offsets into the source.
+ * Block `b` holds the tokens `[blockFirst[b], blockFirst[b + 1])`.
+ */
+export interface DocumentFacts {
+  readonly language: string;
+  readonly words: readonly string[];
+  readonly word: Uint32Array;
+  readonly lemma: Uint32Array;
+  readonly tag: Uint8Array;
+  readonly flags: Uint8Array;
+  readonly zones: Uint16Array;
+  readonly start: Uint32Array;
+  readonly end: Uint32Array;
+  readonly blockFirst: Uint32Array;
+  readonly blockKind: Uint8Array;
+  readonly blockLevel: Uint8Array;
+  /** Identity of the block's prose: equal texts in equal zones have equal hashes, wherever they stand. */
+  readonly blockHash: Float64Array;
+  readonly links: readonly LinkFact[];
+}
+
+/** Gathers the facts of a document that a reader has read. */
+export function gatherFacts(prose: Prose, profile: LanguageProfile): DocumentFacts {
+  const tokens = profile.tokens(prose.blocks.map((block) => block.content));
+  const facts = new FactsBuilder(
+    tokens.reduce((sum, block) => sum + block.start.length, 0),
+    prose.blocks.length,
+  );
+  prose.blocks.forEach((block, index) => facts.add(block, tokens[index]!));
+  return facts.finish(profile.language);
+}
+
+class FactsBuilder {
+  private readonly localIds = new Map<string, number>();
+  private readonly words: string[] = [];
+  private readonly isFunction: boolean[] = [];
+  private readonly word: Uint32Array;
+  private readonly lemma: Uint32Array;
+  private readonly tag: Uint8Array;
+  private readonly flags: Uint8Array;
+  private readonly zones: Uint16Array;
+  private readonly start: Uint32Array;
+  private readonly end: Uint32Array;
+  private readonly blockFirst: Uint32Array;
+  private readonly blockKind: Uint8Array;
+  private readonly blockLevel: Uint8Array;
+  private readonly blockHash: Float64Array;
+  private readonly links: LinkFact[] = [];
+  private row = 0;
+  private block = 0;
+
+  constructor(tokenCount: number, blockCount: number) {
+    this.word = new Uint32Array(tokenCount);
+    this.lemma = new Uint32Array(tokenCount);
+    this.tag = new Uint8Array(tokenCount);
+    this.flags = new Uint8Array(tokenCount);
+    this.zones = new Uint16Array(tokenCount);
+    this.start = new Uint32Array(tokenCount);
+    this.end = new Uint32Array(tokenCount);
+    this.blockFirst = new Uint32Array(blockCount + 1);
+    this.blockKind = new Uint8Array(blockCount);
+    this.blockLevel = new Uint8Array(blockCount);
+    this.blockHash = new Float64Array(blockCount);
+  }
+
+  add(block: ProseBlock, tokens: BlockTokens): void {
+    const { content } = block;
+    const first = this.row;
+    this.tag.set(tokens.tag, first);
+    this.flags.set(tokens.flags, first);
+    let mark = 0;
+    for (let i = 0; i < tokens.start.length; i++) {
+      const start = tokens.start[i]!;
+      const end = tokens.end[i]!;
+      while (mark < content.marks.length && content.marks[mark]!.end <= start) mark++;
+      const marked = content.marks[mark];
+      const row = this.row++;
+      this.zones[row] = content.zones | (marked !== undefined && marked.start < end ? marked.zones : 0);
+      const word = this.localId(content.text.slice(start, end));
+      if (this.isFunction[word]) this.flags[row]! |= FactFlag.functionWord;
+      this.word[row] = word;
+      this.lemma[row] = this.localId(tokens.lemma[i]!);
+      this.start[row] = sourceStart(block, start);
+      this.end[row] = sourceEnd(block, end);
+    }
+    this.addLinks(content, tokens, first);
+    this.blockKind[this.block] = BLOCK_KINDS.indexOf(content.kind);
+    this.blockLevel[this.block] = content.level;
+    this.blockHash[this.block] = hashOf(content);
+    this.blockFirst[++this.block] = this.row;
+  }
+
+  finish(language: string): DocumentFacts {
+    const { words, word, lemma, tag, flags, zones, start, end, blockFirst, blockKind, blockLevel, blockHash, links } =
+      this;
+    return {
+      language,
+      words,
+      word,
+      lemma,
+      tag,
+      flags,
+      zones,
+      start,
+      end,
+      blockFirst,
+      blockKind,
+      blockLevel,
+      blockHash,
+      links,
+    };
+  }
+
+  private addLinks(content: BlockContent, tokens: BlockTokens, first: number): void {
+    for (const link of content.links) {
+      const from = tokens.start.findIndex((start) => start >= link.start);
+      const past = tokens.start.findIndex((start) => start >= link.end);
+      const until = past < 0 ? tokens.start.length : past;
+      if (from >= 0 && from < until) {
+        this.links.push({ firstToken: first + from, endToken: first + until, target: link.target });
+      }
+    }
+  }
+
+  private localId(text: string): number {
+    let id = this.localIds.get(text);
+    if (id === undefined) {
+      id = this.words.length;
+      this.localIds.set(text, id);
+      this.words.push(text);
+      this.isFunction.push(isFunctionWord(text.toLowerCase()));
+    }
+    return id;
+  }
+}
+
+function hashOf(content: BlockContent): number {
+  let zones = content.zones;
+  for (const mark of content.marks) zones = Math.imul(zones ^ (mark.start * 31 + mark.end), 0x01000193) ^ mark.zones;
+  return hashText(content.text, zones);
+}

@@ -1,0 +1,16 @@
+// All engines of questions over one corpus, in one order of worth.
+import { compareCodeUnits } from '../base/order.js';
+import type { Work } from '../base/work.js';
+import type { Corpus } from '../corpus/corpus.js';
+import { askAbbreviations } from './abbreviations/ask.js';
+import type { Question } from './question.js';
+import { askSynonyms } from './synonyms/ask.js';
+import { askVariants } from './variants/ask.js';
+
+/** Asks every kind of question of a corpus. The result depends on the set of documents alone. */
+export function* mine(corpus: Corpus): Work<readonly Question[]> {
+  const variants = yield* askVariants(corpus);
+  const abbreviations = yield* askAbbreviations(corpus);
+  const synonyms = yield* askSynonyms(corpus);
+  return [...variants, ...abbreviations, ...synonyms].sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
+}
