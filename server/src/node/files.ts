@@ -1,0 +1,190 @@
+// Finding the documents of a folder and reading them, with a reason for everything that is left out.
+import { readdir, readFile, realpath, stat } from 'node:fs/promises';
+import { basename, extname, join, relative, sep } from 'node:path';
+import { pathToFileURL } from 'node:url';
+import ignore from 'ignore';
+import type { Ignore } from 'ignore';
+import type { Format, SourceText } from '../text/sourceText.js';
+
+/** Files larger than this are left out: prose is never so long, data often is. In bytes. */
+export const LARGEST_FILE = 4 * 1024 * 1024;
+
+const FORMATS: Readonly<Record<string, Format>> = {
+  '.md': 'markdown',
+  '.markdown': 'markdown',
+  '.mdx': 'markdown',
+  '.txt': 'plaintext',
+  '.text': 'plaintext',
+  '.rst': 'plaintext',
+  '.adoc': 'plaintext',
+};
+
+/** Folders that hold no documentation of the project's own. */
+const NEVER_ENTERED = new Set(['node_modules', '.git', '.hg', '.svn', '.venv', '__pycache__', '.vscode-test', '.idea']);
+
+/** A file or folder that was not read, and why, in words for a person. */
+export interface LeftOut {
+  readonly path: string;
+  readonly reason: string;
+}
+
+/** What was found under a folder. Paths are absolute and in order of their code units. */
+export interface FoundFiles {
+  readonly documents: readonly string[];
+  readonly termbases: readonly string[];
+  readonly leftOut: readonly LeftOut[];
+}
+
+/** A folder or file that was named cannot be read. */
+export class CannotRead extends Error {
+  override readonly name = 'CannotRead';
+}
+
+/** The format of a file by its extension, or undefined for other files. */
+export function formatOf(path: string): Format | undefined {
+  return FORMATS[extname(path).toLowerCase()];
+}
+
+/**
+ * Lists the documents under a folder (or the one file named), in order. Honours `.gitignore` files, follows no link out of
+ * a loop and enters no dependency folder.
+ * @throws CannotRead where the path does not exist or cannot be listed.
+ */
+export async function findFiles(path: string): Promise<FoundFiles> {
+  const found = { documents: [] as string[], termbases: [] as string[], leftOut: [] as LeftOut[] };
+  const status = await stat(path).catch((error: unknown) => {
+    throw new CannotRead(`${path}: ${plainReason(error)}`);
+  });
+  if (!status.isDirectory()) {
+    if (formatOf(path) === undefined)
+      throw new CannotRead(`${path}: no format that Evenword reads (${Object.keys(FORMATS).join(' ')})`);
+    return { ...found, documents: [path] };
+  }
+  await walk(path, [], new Set(), found);
+  found.documents.sort(byCodeUnits);
+  found.termbases.sort(byCodeUnits);
+  return found;
+}
+
+/** A file's text, or why it cannot be had. */
+export type ReadFile = { readonly source: SourceText } | { readonly leftOut: LeftOut };
+
+/** Reads one document. Only UTF-8 (with or without a byte order mark) is taken: a wrong guess would spoil every offset. */
+export async function readDocument(path: string): Promise<ReadFile> {
+  try {
+    const bytes = await readFile(path);
+    const reason = unreadable(bytes);
+    if (reason !== undefined) return { leftOut: { path, reason } };
+    const text = new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes);
+    return { source: { uri: pathToFileURL(path).href, format: formatOf(path) ?? 'plaintext', text } };
+  } catch (error) {
+    if (error instanceof TypeError) return { leftOut: { path, reason: await encodingReason(path) } };
+    return { leftOut: { path, reason: plainReason(error) } };
+  }
+}
+
+interface Rules {
+  readonly folder: string;
+  readonly rules: Ignore;
+}
+
+async function walk(
+  folder: string,
+  outer: readonly Rules[],
+  visited: Set<string>,
+  found: { documents: string[]; termbases: string[]; leftOut: LeftOut[] },
+): Promise<void> {
+  const real = await realpath(folder);
+  if (visited.has(real)) {
+    found.leftOut.push({ path: folder, reason: 'a link to a folder that was read already' });
+    return;
+  }
+  visited.add(real);
+  const entries = await readdir(folder, { withFileTypes: true }).catch((error: unknown) => {
+    if (outer.length === 0 && visited.size === 1) throw new CannotRead(`${folder}: ${plainReason(error)}`);
+    found.leftOut.push({ path: folder, reason: plainReason(error) });
+    return [];
+  });
+  const rules = [
+    ...outer,
+    ...(await rulesOf(
+      folder,
+      entries.some((entry) => entry.name === '.gitignore'),
+    )),
+  ];
+  for (const entry of entries.sort((a, b) => byCodeUnits(a.name, b.name))) {
+    const path = join(folder, entry.name);
+    const kind = entry.isSymbolicLink() ? await stat(path).catch(() => undefined) : entry;
+    if (kind === undefined) {
+      found.leftOut.push({ path, reason: 'a link that leads nowhere' });
+    } else if (kind.isDirectory()) {
+      if (NEVER_ENTERED.has(entry.name)) found.leftOut.push({ path, reason: 'a folder of dependencies or tools' });
+      else if (isIgnored(path, true, rules)) found.leftOut.push({ path, reason: 'ignored by .gitignore' });
+      else await walk(path, rules, visited, found);
+    } else if (kind.isFile()) {
+      if (basename(path) === 'termbase.yaml') found.termbases.push(path);
+      else if (formatOf(path) === undefined) continue;
+      else if (isIgnored(path, false, rules)) found.leftOut.push({ path, reason: 'ignored by .gitignore' });
+      else if ((await stat(path)).size > LARGEST_FILE) found.leftOut.push({ path, reason: 'larger than 4 MiB' });
+      else found.documents.push(path);
+    }
+  }
+}
+
+async function rulesOf(folder: string, present: boolean): Promise<Rules[]> {
+  if (!present) return [];
+  const text = await readFile(join(folder, '.gitignore'), 'utf8').catch(() => '');
+  return [{ folder, rules: ignore().add(text) }];
+}
+
+function isIgnored(path: string, folder: boolean, rules: readonly Rules[]): boolean {
+  let ignored = false;
+  for (const { folder: base, rules: own } of rules) {
+    const name = relative(base, path).split(sep).join('/') + (folder ? '/' : '');
+    const verdict = own.test(name);
+    if (verdict.ignored) ignored = true;
+    else if (verdict.unignored) ignored = false;
+  }
+  return ignored;
+}
+
+function unreadable(bytes: Uint8Array): string | undefined {
+  if ((bytes[0] === 0xff && bytes[1] === 0xfe) || (bytes[0] === 0xfe && bytes[1] === 0xff)) {
+    return 'is in UTF-16; save it as UTF-8 to have it read';
+  }
+  if (bytes.subarray(0, 8192).includes(0)) return 'is a binary file';
+  return undefined;
+}
+
+/** Names the line of the first byte that is no UTF-8. */
+async function encodingReason(path: string): Promise<string> {
+  const bytes = await readFile(path);
+  let line = 1;
+  let start = 0;
+  const decoder = new TextDecoder('utf-8', { fatal: true });
+  for (let i = 0; i <= bytes.length; i++) {
+    if (i < bytes.length && bytes[i] !== 10) continue;
+    try {
+      decoder.decode(bytes.subarray(start, i));
+    } catch {
+      break;
+    }
+    start = i + 1;
+    line++;
+  }
+  return `is not in UTF-8 (line ${line}; perhaps Latin-1); save it as UTF-8 to have it read`;
+}
+
+/** The system's reason for a failed call, in plain words. */
+export function plainReason(error: unknown): string {
+  const code = (error as NodeJS.ErrnoException).code;
+  if (code === 'ENOENT') return 'there is no such file or folder';
+  if (code === 'EACCES' || code === 'EPERM') return 'permission denied';
+  if (code === 'ENOTDIR') return 'a part of the path is no folder';
+  if (code === 'ELOOP') return 'a link leads back to itself';
+  return error instanceof Error ? error.message : String(error);
+}
+
+function byCodeUnits(a: string, b: string): number {
+  return a < b ? -1 : a > b ? 1 : 0;
+}
