@@ -1,0 +1,38 @@
+// From termbases and mined questions to what is decided and what is still asked.
+import { compareCodeUnits } from '../base/order.js';
+import type { Question } from '../mining/question.js';
+import type { Termbase } from '../termbase/termbase.js';
+import { Decisions } from './decisions.js';
+import { narrow, type Settlement } from './narrow.js';
+
+/** A question that the termbase answers. */
+export interface SettledQuestion {
+  readonly question: Question;
+  readonly settled: Settlement;
+}
+
+/** The questions of a corpus, sorted by the decisions. */
+export interface Agenda {
+  readonly decisions: Decisions;
+  /** Still asked, reduced to what is undecided; by worth, ties by id. */
+  readonly open: readonly Question[];
+  /** No longer asked, in the order given. */
+  readonly settled: readonly SettledQuestion[];
+}
+
+/**
+ * Sorts questions by the termbases in force.
+ * @param chain nearest first, as `scopeOf` gives it.
+ */
+export function decide(chain: readonly Termbase[], questions: readonly Question[]): Agenda {
+  const decisions = new Decisions(chain);
+  const open: Question[] = [];
+  const settled: SettledQuestion[] = [];
+  for (const question of questions) {
+    const rest = narrow(question, decisions);
+    if (rest.settled === undefined) open.push(...rest.open);
+    else settled.push({ question, settled: rest.settled });
+  }
+  open.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
+  return { decisions, open, settled };
+}
