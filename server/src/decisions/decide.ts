@@ -3,6 +3,7 @@ import { compareCodeUnits } from '../base/order.js';
 import type { Question } from '../mining/question.js';
 import type { Termbase } from '../termbase/termbase.js';
 import { Decisions } from './decisions.js';
+import { Precedents } from './precedents.js';
 import { narrow, type Settlement } from './narrow.js';
 
 /** A question that the termbase answers. */
@@ -14,6 +15,8 @@ export interface SettledQuestion {
 /** The questions of a corpus, sorted by the decisions. */
 export interface Agenda {
   readonly decisions: Decisions;
+  /** What earlier decisions have in common, for suggesting an answer. */
+  readonly precedents: Precedents;
   /** Still asked, reduced to what is undecided; by worth, ties by id. */
   readonly open: readonly Question[];
   /** No longer asked, in the order given. */
@@ -34,5 +37,5 @@ export function decide(chain: readonly Termbase[], questions: readonly Question[
     else settled.push({ question, settled: rest.settled });
   }
   open.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
-  return { decisions, open, settled };
+  return { decisions, precedents: new Precedents(decisions.concepts), open, settled };
 }

@@ -1,0 +1,113 @@
+// Which of a question's terms to suggest, and why; and which answers the termbase would accept.
+import { compareCodeUnits } from '../base/order.js';
+import type { Question, QuestionTerm, Reason } from '../mining/question.js';
+import { termText } from '../termbase/termKey.js';
+import type { Decisions } from './decisions.js';
+import type { Precedents } from './precedents.js';
+
+/** The term to suggest. It need not be one of the question's: a deprecated term brings its preferred one with it. */
+export interface Preference {
+  readonly text: string;
+  readonly reason: Reason;
+}
+
+/** The answers that contradict nothing decided. */
+export interface Choices {
+  /** The terms that can be preferred, the suggested one first. */
+  readonly prefer: readonly string[];
+  /** Whether *either is fine* can be said: not where one of the terms is deprecated. */
+  readonly either: boolean;
+}
+
+/** Decisions of one kind that must agree before they count as a habit, and how far they must outnumber the opposite. */
+const HABIT_COUNT = 2;
+const HABIT_RATIO = 2;
+
+/**
+ * Suggests a term: the preferred term of a concept that the question touches; else the one that earlier decisions speak for,
+ * by a word within it or by its manner of writing; else the most used; ties by documents, then by code units.
+ */
+export function preferenceOf(question: Question, decisions: Decisions, precedents: Precedents): Preference {
+  return (
+    decidedPreference(question, decisions) ??
+    partPreference(question, precedents) ??
+    habitPreference(question, precedents) ??
+    mostUsed(question)
+  );
+}
+
+/** The answers to offer for a question. */
+export function choicesOf(question: Question, decisions: Decisions, precedents: Precedents): Choices {
+  const { text } = preferenceOf(question, decisions, precedents);
+  const decided = question.terms.flatMap((term) => decisions.termsOfQuestionTerm(term));
+  const either = !decided.some(({ entry }) => entry.status === 'deprecated');
+  // Where a concept is touched, any other preferred term would contradict it.
+  if (decided.length > 0) return { prefer: [text], either };
+  const others = question.terms.map((term) => term.text).filter((other) => termText(other) !== termText(text));
+  return { prefer: [text, ...others], either };
+}
+
+function decidedPreference(question: Question, decisions: Decisions): Preference | undefined {
+  for (const term of question.terms) {
+    const decided = decisions.termsOfQuestionTerm(term)[0];
+    if (decided === undefined) continue;
+    const { preferred, entry } = decided;
+    const text =
+      preferred === entry
+        ? `“${preferred.text}” is already the preferred term`
+        : `the termbase prefers “${preferred.text}” to “${entry.text}”`;
+    return { text: preferred.text, reason: { kind: 'termbase', text, value: 1 } };
+  }
+  return undefined;
+}
+
+function partPreference({ terms }: Question, precedents: Precedents): Preference | undefined {
+  return winner(terms, (term, rival) => {
+    const part = precedents.partChoice(term.text, rival.text);
+    if (part === undefined) return undefined;
+    return { kind: 'part', text: `you prefer “${part.preferred}” to “${part.deprecated}”`, value: 1 };
+  });
+}
+
+function habitPreference({ terms }: Question, precedents: Precedents): Preference | undefined {
+  return winner(terms, (term, rival) => {
+    const tally = precedents.tallyOf(term.text, rival.text);
+    if (tally === undefined || tally.chosen < HABIT_COUNT || tally.chosen < HABIT_RATIO * tally.against)
+      return undefined;
+    const { contrast, chosen, against } = tally;
+    const text = `${chosen} of ${chosen + against} earlier decisions prefer ${contrast.chosen} to ${contrast.rival}`;
+    return { kind: 'habit', text, value: chosen };
+  });
+}
+
+/** The one term for which there is a reason against every rival; the reason against the most used rival speaks for it. */
+function winner(
+  terms: readonly QuestionTerm[],
+  reasonOver: (term: QuestionTerm, rival: QuestionTerm) => Reason | undefined,
+): Preference | undefined {
+  for (const term of terms) {
+    const reasons = terms.filter((rival) => rival !== term).map((rival) => reasonOver(term, rival));
+    const [first] = reasons;
+    if (first !== undefined && !reasons.includes(undefined)) return { text: term.text, reason: first };
+  }
+  return undefined;
+}
+
+function mostUsed({ terms }: Question): Preference {
+  const [first, second] = [...terms].sort(
+    (a, b) => b.uses - a.uses || b.documents - a.documents || compareCodeUnits(a.text, b.text),
+  );
+  const { text, uses, documents } = first!;
+  if (second === undefined || second.uses < uses) {
+    return { text, reason: { kind: 'uses', text: `it is the most used (${times(uses)})`, value: uses } };
+  }
+  if (second.documents < documents) {
+    const reason = `as often used as the other (${times(uses)}), but in more documents (${documents})`;
+    return { text, reason: { kind: 'documents', text: reason, value: documents } };
+  }
+  return { text, reason: { kind: 'tie', text: `used as often as the other (${times(uses)})`, value: uses } };
+}
+
+function times(uses: number): string {
+  return uses === 1 ? 'once' : `${uses} times`;
+}
