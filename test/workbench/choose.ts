@@ -2,6 +2,7 @@
 import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { downloadAndUnzipVSCode, SilentReporter } from '@vscode/test-electron';
+import { findBrowser } from './host/browser.js';
 import { packagedVsCode } from './host/packagedVsCode.js';
 import { projectRoot } from './host/places.js';
 
@@ -21,7 +22,7 @@ const downloadLimit = 180_000;
 
 /**
  * Takes `VSCODE_EXECUTABLE`, else a download of VS Code, else the packaged VS Code.
- * @throws when not even the packaged one can be had.
+ * @throws when not even the packaged one, with a browser to show it in, can be had.
  */
 export async function chooseVsCode(say: (line: string) => void): Promise<Choice> {
   const named = process.env['VSCODE_EXECUTABLE'];
@@ -35,8 +36,9 @@ export async function chooseVsCode(say: (line: string) => void): Promise<Choice>
     if (executable !== undefined) return { executable, name: `desktop VS Code ${desktopVersion} (downloaded)` };
   } else say(`no desktop VS Code: ${hindrance}`);
   const packaged = await packagedVsCode(say);
+  const browser = await findBrowser(say);
   const executable = path.join(import.meta.dirname, 'host/code.js');
-  return { executable, name: `packaged VS Code ${packaged.version}` };
+  return { executable, name: `packaged VS Code ${packaged.version}, shown by ${browser.name}` };
 }
 
 async function whyNoDesktop(): Promise<string | undefined> {

@@ -5,7 +5,7 @@ import path from 'node:path';
 import { runTests, TestRunFailedError } from '@vscode/test-electron';
 import { chooseVsCode } from './choose.js';
 import { needed } from './host/noWorkbench.js';
-import { projectRoot, temporaryFolder } from './host/places.js';
+import { failureFolder, projectRoot, temporaryFolder } from './host/places.js';
 import { writeUserSettings } from './host/settings.js';
 import { grepVariable, readTally, tallyVariable, type Tally } from './tally.js';
 import { writeWorkspace } from './workspace.js';
@@ -27,12 +27,16 @@ export async function runHostTests(say: (line: string) => void, grep?: string): 
       extensionDevelopmentPath: projectRoot,
       extensionTestsPath: path.join(import.meta.dirname, 'host-tests/index.cjs'),
       launchArgs: [workspace, `--user-data-dir=${userData}`, `--extensions-dir=${path.join(folder, 'extensions')}`],
-      extensionTestsEnv: { [tallyVariable]: tally, ...(grep !== undefined && { [grepVariable]: grep }) },
+      extensionTestsEnv: {
+        VSCODE_HOST_LOGS: failureFolder,
+        [tallyVariable]: tally,
+        ...(grep !== undefined && { [grepVariable]: grep }),
+      },
     });
     return readTally(tally);
   } catch (error) {
     if (!(error instanceof TestRunFailedError)) throw error;
-    say(error.message);
+    say(`${error.message}; see ${path.relative(projectRoot, failureFolder)}/`);
     const { passed, failed } = readTally(tally);
     return { passed, failed: Math.max(failed, 1) };
   } finally {

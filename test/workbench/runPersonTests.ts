@@ -10,7 +10,7 @@ import { needed } from './host/noWorkbench.js';
 import { packagedVsCode } from './host/packagedVsCode.js';
 import { projectRoot, temporaryFolder } from './host/places.js';
 import { installExtension } from './host/server.js';
-import { setStage } from './person/stage.js';
+import { keepScreenshots, setStage } from './person/stage.js';
 import { requireBuild } from './runHostTests.js';
 import type { Tally } from './tally.js';
 
@@ -37,7 +37,18 @@ export async function runPersonTests(say: (line: string) => void, grep?: string)
 }
 
 async function runSuites(grep?: string): Promise<Mocha.Stats> {
-  const mocha = new Mocha({ ui: 'bdd', timeout: 180_000, color: false, ...(grep !== undefined && { fgrep: grep }) });
+  const mocha = new Mocha({
+    ui: 'bdd',
+    timeout: 180_000,
+    color: false,
+    ...(grep !== undefined && { fgrep: grep }),
+    rootHooks: {
+      async afterEach(this: Mocha.Context) {
+        const test = this.currentTest;
+        if (test?.state === 'failed') await keepScreenshots(test.fullTitle());
+      },
+    },
+  });
   const suites = path.join(import.meta.dirname, 'person');
   for (const name of readdirSync(suites).sort()) {
     if (name.endsWith('.suite.js')) mocha.addFile(path.join(suites, name));

@@ -1,6 +1,5 @@
 // Entry of the tests in the extension host: VS Code calls run(), mocha runs the suites beside this file.
-import { writeFileSync } from 'node:fs';
-import { readdirSync } from 'node:fs';
+import { readdirSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import Mocha from 'mocha';
 import { grepVariable, tallyVariable } from '../tally.js';

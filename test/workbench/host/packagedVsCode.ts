@@ -2,7 +2,7 @@
 import { execFile } from 'node:child_process';
 import { createHash } from 'node:crypto';
 import { existsSync, readFileSync } from 'node:fs';
-import { readFile, rm, symlink, writeFile } from 'node:fs/promises';
+import { mkdir, readFile, rm, symlink, writeFile } from 'node:fs/promises';
 import path from 'node:path';
 import { promisify } from 'node:util';
 import { replaceNativeModules } from './nativeModules.js';
@@ -14,6 +14,7 @@ const run = promisify(execFile);
 /** The releases that these tests know, with the checksums that the npm registry publishes for them. */
 const releases: Readonly<Record<string, string>> = {
   '4.100.3': 'sha512-q/Fh2DOxCRNhC/WiG/6sAhSKnj7ZACTVBaeeZ+rWjol//0FCbl/qg1ln5ecZ99jYcfqMxZZAyWcN+YBIo0DgpA==',
+  '4.139.1': 'sha512-fUYvJVdz4ZoVJfakGiGWXFMpF8K1ObsrpGvX17ZxNpKOzdNHs7lANT670JTr4ZhA8DnWqyvvmFG/d3HV9Yy6ew==',
 };
 
 /** A VS Code that is ready to be served. */
@@ -44,7 +45,7 @@ export async function packagedVsCode(say: (line: string) => void): Promise<Packa
 }
 
 async function unpack(release: string, root: string): Promise<void> {
-  await run('npm', ['pack', '--silent', '--pack-destination', root, `code-server@${release}`], { cwd: root });
+  await run('npm', ['pack', '--loglevel=error', '--pack-destination', root, `code-server@${release}`], { cwd: root });
   const archive = path.join(root, `code-server-${release}.tgz`);
   const checksum = `sha512-${createHash('sha512')
     .update(await readFile(archive))
@@ -68,7 +69,7 @@ async function installMatchingNode(root: string): Promise<void> {
   const wanted = wantedNode(root);
   if (wanted <= ownNode()) return;
   const own = path.join(root, 'node');
-  await run('mkdir', ['-p', own]);
+  await mkdir(own);
   await writeFile(path.join(own, 'package.json'), '{"private":true}');
   const name = `node-${process.platform}-${process.arch}@${String(wanted)}`;
   await run('npm', ['install', '--ignore-scripts', '--no-audit', '--no-fund', '--loglevel=error', name], { cwd: own });

@@ -1,9 +1,8 @@
 // Where the harness keeps what it prepares: one cache folder at the project root, temporary folders elsewhere.
-import { mkdtempSync } from 'node:fs';
+import { existsSync, mkdtempSync } from 'node:fs';
 import { mkdir, rename, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
-import { existsSync } from 'node:fs';
 
 /** The project root. The compiled files lie as deep as their sources, so this holds for both. */
 export const projectRoot = path.resolve(import.meta.dirname, '../../..');
@@ -13,6 +12,9 @@ export const cacheFolder = path.join(projectRoot, '.vscode-host');
 
 /** The folder of the screenshots (git-ignored). */
 export const screenshotFolder = path.join(projectRoot, 'out/screenshots');
+
+/** The folder of what a failure leaves behind: screenshots and logs (git-ignored). */
+export const failureFolder = path.join(projectRoot, 'out/workbench-failures');
 
 /** A new temporary folder; its name is short because VS Code makes sockets in it. */
 export function temporaryFolder(name: string): string {
