@@ -39,6 +39,10 @@ export const TokenFlag = {
   word: 1 << 3,
   /** Looks like an identifier, path or file name (snake_case, camelCase, dots inside, slashes, digits among letters). */
   identifier: 1 << 4,
+  /** A ™, ® or © sign follows the token without a space. */
+  trademark: 1 << 5,
+  /** Soft hyphens or zero-width characters stand inside: {@link tokenText} leaves them out. */
+  invisible: 1 << 6,
 } as const;
 
 /**
@@ -53,6 +57,14 @@ export interface BlockTokens {
   readonly flags: Uint8Array;
   /** Dictionary form in lower case by the tagger (never the identity of a term: it maps behaviour to behavior). */
   readonly lemma: readonly string[];
+}
+
+const INVISIBLE_CHARACTERS = /[\p{Cf}]+/gu;
+
+/** The text of one token as it reads, without soft hyphens and zero-width characters. */
+export function tokenText(text: string, tokens: BlockTokens, row: number): string {
+  const slice = text.slice(tokens.start[row], tokens.end[row]);
+  return (tokens.flags[row]! & TokenFlag.invisible) === 0 ? slice : slice.replace(INVISIBLE_CHARACTERS, '');
 }
 
 /** How the words of a language are read. */

@@ -1,0 +1,387 @@
+// Reads one word from its first unit to its last: which signs join its parts, and what kind of word it makes.
+import { CharClass, classAt, pairClassAt } from './charClass.js';
+import { IS_CONTRACTIONS, UNITS } from './closedWords.js';
+import { TokenKind } from './tokenColumns.js';
+import { TokenFlag } from './tokens.js';
+
+const COLON = 0x3a;
+const COMMA = 0x2c;
+const PLUS = 0x2b;
+const HASH = 0x23;
+const AT = 0x40;
+const AMPERSAND = 0x26;
+const EQUALS = 0x3d;
+const BACKSLASH = 0x5c;
+const LEFT_PARENTHESIS = 0x28;
+const RIGHT_PARENTHESIS = 0x29;
+
+/** Reads words of the text it was given; the result of a reading stands in its fields until the next. */
+export class WordReader {
+  /** The offset after the word. */
+  end = 0;
+  /** The offset after the word and a possessive ending. */
+  next = 0;
+  /** Token flags, all but the sentence's and the space's. */
+  flags = 0;
+  kind: number = TokenKind.word;
+
+  private text = '';
+  /** Slashes before this offset are known to separate words. */
+  private plainSlashesUntil = 0;
+
+  private letters = false;
+  private digits = false;
+  /** A sign was met that words of prose do not have inside: the whole is an identifier. */
+  private code = false;
+  private invisible = false;
+
+  /** Takes a new text. */
+  begin(text: string): void {
+    this.text = text;
+    this.plainSlashesUntil = 0;
+  }
+
+  /** Reads the word that starts at an offset of an unbroken run which ends at `to`. */
+  read(from: number, to: number, quoteOpen: boolean): void {
+    this.letters = this.digits = this.code = this.invisible = false;
+    this.flags = 0;
+    let at = this.skipPrefix(from, to);
+    while (at < to) {
+      const step = this.advance(from, at, to);
+      if (step === 0) break;
+      at += step;
+    }
+    this.end = this.next = at;
+    if (this.isDottedAbbreviation(from, at, to)) {
+      this.code = false;
+      this.end = this.next = at + 1;
+    } else this.takePossessive(from, at, to, quoteOpen);
+    this.settle(from, to);
+  }
+
+  /** Passes the signs that open an identifier or a signed number. */
+  private skipPrefix(from: number, to: number): number {
+    const { text } = this;
+    let at = from;
+    while (at < to && isPrefixSign(text, at)) at++;
+    if (at > from) this.code = at - from > 1 || !isSign(text.charCodeAt(from)) || classAt(text, at) !== CharClass.digit;
+    return at;
+  }
+
+  /** How many units from `at` on belong to the word: 0 where it ends. */
+  private advance(from: number, at: number, to: number): number {
+    const { text } = this;
+    let found = classAt(text, at);
+    let width = 1;
+    if (found === CharClass.pair) {
+      found = pairClassAt(text, at);
+      width = 2;
+    }
+    switch (found) {
+      case CharClass.letter:
+        this.letters = true;
+        return width;
+      case CharClass.digit:
+        this.digits = true;
+        return width;
+      case CharClass.mark:
+        return width;
+      case CharClass.invisible:
+        return this.overInvisible(at, to);
+      case CharClass.underscore:
+        this.code = true;
+        return 1;
+      case CharClass.hyphen:
+        return this.wordFollows(at + 1, to) ? 1 : 0;
+      case CharClass.apostrophe:
+        return this.overApostrophe(from, at, to);
+      case CharClass.dot:
+        if (!this.wordFollows(at + 1, to)) return 0;
+        if (this.letters || classAt(text, at + 1) !== CharClass.digit) this.code = true;
+        return 1;
+      case CharClass.slash:
+        return this.overSlash(from, at, to);
+      case CharClass.punctuation:
+      case CharClass.symbol:
+        return this.overSign(from, at, to);
+      default:
+        return 0;
+    }
+  }
+
+  /** Soft hyphens and zero-width characters count only between units of the word. */
+  private overInvisible(at: number, to: number): number {
+    const { text } = this;
+    let end = at + 1;
+    while (end < to && classAt(text, end) === CharClass.invisible) end++;
+    if (end >= to) return 0;
+    const found = classAt(text, end);
+    const inside =
+      found === CharClass.pair || (found >= CharClass.letter && found <= CharClass.mark) || found === CharClass.hyphen;
+    if (!inside || !this.wordFollows(found === CharClass.hyphen ? end + 1 : end, to)) return 0;
+    this.invisible = true;
+    return end - at;
+  }
+
+  private overApostrophe(from: number, at: number, to: number): number {
+    if (at + 1 >= to || classAt(this.text, at + 1) !== CharClass.letter) return 0;
+    if (!this.isPossessiveEnding(at, to)) return 1;
+    return IS_CONTRACTIONS.has(this.text.slice(from, at).toLowerCase()) ? 2 : 0;
+  }
+
+  /** True where `'s` stands at the offset and no unit of a word after it. */
+  private isPossessiveEnding(at: number, to: number): boolean {
+    const { text } = this;
+    if (at + 1 >= to || (text.charCodeAt(at + 1) | 0x20) !== 0x73) return false;
+    return at + 2 >= to || !isWordUnit(classAt(text, at + 2));
+  }
+
+  /** A slash joins a path (`a/b.txt`, `src/`), and single letters (`I/O`, `A/B`); elsewhere it separates. */
+  private overSlash(from: number, at: number, to: number): number {
+    const { text } = this;
+    if (this.code && at > from && this.isPathFrom(from)) return 1;
+    if (at < this.plainSlashesUntil) return 0;
+    if (at - from === 1 && this.letters && at + 1 < to && classAt(text, at + 1) === CharClass.letter) {
+      const after = at + 2 < to ? classAt(text, at + 2) : CharClass.space;
+      if (!isWordUnit(after) && after !== CharClass.slash) return 1;
+    }
+    if (!this.letters && this.wordFollows(at + 1, to)) return 0;
+    const end = pathEnd(text, at, to);
+    if (isPath(text, from, at, end)) {
+      this.code = true;
+      return end - at;
+    }
+    this.plainSlashesUntil = end;
+    return 0;
+  }
+
+  private isPathFrom(from: number): boolean {
+    const found = classAt(this.text, from);
+    return found === CharClass.slash || found === CharClass.dot || this.text.charCodeAt(from) === 0x7e;
+  }
+
+  private overSign(from: number, at: number, to: number): number {
+    const { text } = this;
+    const next = at + 1 < to ? classAt(text, at + 1) : CharClass.space;
+    switch (text.charCodeAt(at)) {
+      case COMMA:
+        return !this.letters && next === CharClass.digit && this.digits ? 1 : 0;
+      case COLON:
+        return this.overColon(from, at, to, next);
+      case AT:
+        if (next !== CharClass.letter && next !== CharClass.digit) return 0;
+        this.code = true;
+        return 1;
+      case EQUALS:
+        return classAt(text, from) === CharClass.hyphen && this.code && isWordUnit(next) ? 1 : 0;
+      case BACKSLASH:
+        if (next !== CharClass.letter && next !== CharClass.digit) return 0;
+        this.code = true;
+        return 1;
+      case AMPERSAND:
+        return next === CharClass.letter && at - from <= 3 && isUpper(text, from) && isUpper(text, at + 1) ? 1 : 0;
+      case PLUS: {
+        const twice = at + 1 < to && text.charCodeAt(at + 1) === PLUS;
+        return twice && this.letters && !(at + 2 < to && isWordUnit(classAt(text, at + 2))) ? 2 : 0;
+      }
+      case HASH:
+        return at - from === 1 && isUpper(text, from) && !isWordUnit(next) ? 1 : 0;
+      default:
+        return 0;
+    }
+  }
+
+  /** A colon joins times (`10:30`), ports (`host:80`), scopes (`a::b`) and addresses (`https://…`). */
+  private overColon(from: number, at: number, to: number, next: number): number {
+    const { text } = this;
+    if (next === CharClass.digit) {
+      if (this.letters) this.code = true;
+      return 1;
+    }
+    if (!this.letters) return 0;
+    const after = at + 2 < to ? classAt(text, at + 2) : CharClass.space;
+    if (next === CharClass.slash && after === CharClass.slash) {
+      this.code = true;
+      return trimmedEnd(text, at + 3, to) - at;
+    }
+    if (at - from === 1 && at + 2 < to && text.charCodeAt(at + 1) === BACKSLASH) {
+      this.code = true;
+      return trimmedEnd(text, at + 2, to) - at;
+    }
+    if (at + 1 < to && text.charCodeAt(at + 1) === COLON && after === CharClass.letter) {
+      this.code = true;
+      return 2;
+    }
+    return 0;
+  }
+
+  private wordFollows(at: number, to: number): boolean {
+    return at < to && isWordUnit(classAt(this.text, at));
+  }
+
+  /** `e.g.`, `U.S.`: single letters with a stop after each, the last stop included. */
+  private isDottedAbbreviation(from: number, at: number, to: number): boolean {
+    const { text } = this;
+    const length = at - from;
+    if (length < 3 || length > 9 || length % 2 === 0 || at >= to || classAt(text, at) !== CharClass.dot) return false;
+    for (let k = from; k < at; k++) {
+      if (classAt(text, k) !== ((k - from) % 2 === 0 ? CharClass.letter : CharClass.dot)) return false;
+    }
+    return true;
+  }
+
+  private takePossessive(from: number, at: number, to: number, quoteOpen: boolean): void {
+    const { text } = this;
+    if (at >= to || classAt(text, at) !== CharClass.apostrophe || at === from) return;
+    if (this.isPossessiveEnding(at, to)) {
+      this.next = at + 2;
+      this.flags |= TokenFlag.possessive;
+    } else if (!quoteOpen && this.letters && (text.charCodeAt(at - 1) | 0x20) === 0x73) {
+      this.next = at + 1;
+      this.flags |= TokenFlag.possessive;
+    }
+  }
+
+  private settle(from: number, to: number): void {
+    const { text, end } = this;
+    if (this.invisible) this.flags |= TokenFlag.invisible;
+    if (this.code) {
+      this.kind = TokenKind.identifier;
+      this.flags |= TokenFlag.identifier;
+    } else if (!this.letters || isQuantity(text, from, end)) {
+      this.kind = TokenKind.number;
+    } else {
+      this.kind = TokenKind.word;
+      this.flags |= TokenFlag.word;
+      if (this.isCodeLike(from, to)) this.flags |= TokenFlag.identifier;
+    }
+  }
+
+  /** Camel case, a digit touching a letter, or an empty call `()` after the word. */
+  private isCodeLike(from: number, to: number): boolean {
+    const { text, end } = this;
+    if (end + 1 < to && text.charCodeAt(end) === LEFT_PARENTHESIS && text.charCodeAt(end + 1) === RIGHT_PARENTHESIS)
+      return true;
+    if (this.digits && touchesDigit(text, from, end)) return true;
+    return isCamel(text, from, end);
+  }
+}
+
+function isWordUnit(found: number): boolean {
+  return (
+    found === CharClass.letter ||
+    found === CharClass.digit ||
+    found === CharClass.underscore ||
+    found === CharClass.pair
+  );
+}
+
+function isPrefixSign(text: string, at: number): boolean {
+  const found = classAt(text, at);
+  if (
+    found === CharClass.dot ||
+    found === CharClass.hyphen ||
+    found === CharClass.slash ||
+    found === CharClass.underscore
+  )
+    return true;
+  const unit = text.charCodeAt(at);
+  return unit === AT || unit === HASH || unit === 0x24 || unit === 0x7e || unit === PLUS;
+}
+
+function isSign(unit: number): boolean {
+  return unit === PLUS || unit === 0x2d || unit === 0x2010 || unit === 0x2011;
+}
+
+function isUpper(text: string, at: number): boolean {
+  const unit = text.charCodeAt(at);
+  if (unit < 0x80) return unit >= 0x41 && unit <= 0x5a;
+  const char = text.charAt(at);
+  return char !== char.toLowerCase();
+}
+
+function isLower(text: string, at: number): boolean {
+  const unit = text.charCodeAt(at);
+  if (unit < 0x80) return unit >= 0x61 && unit <= 0x7a;
+  const char = text.charAt(at);
+  return char !== char.toUpperCase();
+}
+
+/** True where a capital follows a small letter within a part, or small letters other than a plural s follow two capitals. */
+function isCamel(text: string, from: number, to: number): boolean {
+  let capitals = 0;
+  let small = false;
+  for (let at = from; at < to; at++) {
+    if (isUpper(text, at)) {
+      if (small) return true;
+      capitals++;
+    } else if (isLower(text, at)) {
+      if (capitals >= 2 && !(text.charCodeAt(at) === 0x73 && (at + 1 === to || !isLower(text, at + 1)))) return true;
+      small = true;
+      capitals = 0;
+    } else if (classAt(text, at) !== CharClass.mark && classAt(text, at) !== CharClass.invisible) {
+      small = false;
+      capitals = 0;
+    }
+  }
+  return false;
+}
+
+function touchesDigit(text: string, from: number, to: number): boolean {
+  if (/^\d+(?:st|nd|rd|th)$/i.test(text.slice(from, Math.min(to, from + 12)))) return false;
+  for (let at = from + 1; at < to; at++) {
+    const before = classAt(text, at - 1);
+    const found = classAt(text, at);
+    if (before === CharClass.letter && found === CharClass.digit) return true;
+    if (before === CharClass.digit && found === CharClass.letter) return true;
+  }
+  return false;
+}
+
+/** A number with its unit: `10ms`, `1.5GB`. */
+function isQuantity(text: string, from: number, to: number): boolean {
+  if (to - from > 24 || classAt(text, to - 1) !== CharClass.letter) return false;
+  let at = to;
+  while (at > from && classAt(text, at - 1) === CharClass.letter) at--;
+  if (at === from || to - at > 5 || classAt(text, at - 1) !== CharClass.digit) return false;
+  for (let k = from; k < at; k++) if (classAt(text, k) === CharClass.letter) return false;
+  return text.charAt(at) !== 'D' && UNITS.has(text.slice(at, to).toLowerCase());
+}
+
+function isPathUnit(text: string, at: number): boolean {
+  const found = classAt(text, at);
+  if (isWordUnit(found) || found === CharClass.hyphen || found === CharClass.dot || found === CharClass.slash)
+    return true;
+  const unit = text.charCodeAt(at);
+  return unit === AT || unit === PLUS || unit === 0x7e;
+}
+
+/** The end of the stretch of path characters from an offset on, without trailing stops and hyphens. */
+function pathEnd(text: string, from: number, to: number): number {
+  let end = from;
+  while (end < to && isPathUnit(text, end)) end++;
+  while (end > from + 1) {
+    const last = classAt(text, end - 1);
+    if (last !== CharClass.dot && last !== CharClass.hyphen) break;
+    end--;
+  }
+  return end;
+}
+
+/** True where the stretch is a path: it ends in a slash, or has a stop, an underscore or an at sign among its letters. */
+function isPath(text: string, from: number, slash: number, end: number): boolean {
+  if (end - slash >= 1 && classAt(text, end - 1) === CharClass.slash) return end - from >= 2;
+  for (let at = from; at < end; at++) {
+    const found = classAt(text, at);
+    if (found === CharClass.underscore || text.charCodeAt(at) === AT) return true;
+    if (found === CharClass.dot && at + 1 < end && isWordUnit(classAt(text, at + 1))) return true;
+  }
+  return false;
+}
+
+/** The end of an address: the run's end without closing punctuation. */
+function trimmedEnd(text: string, from: number, to: number): number {
+  let end = to;
+  while (end > from && /[.,;:!?'"’”»)\]}>]/.test(text.charAt(end - 1))) end--;
+  return end;
+}
