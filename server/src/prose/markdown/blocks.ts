@@ -1,0 +1,103 @@
+// From syntax tree to prose blocks: which node is which kind of block, in which zones.
+import type { TreeCursor } from '@lezer/common';
+import { ContentBuilder } from '../content.js';
+import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
+import { markQuotations } from '../quotations.js';
+import { Zone, type ZoneSet } from '../zones.js';
+import { DEEPEST } from './containers.js';
+import { readInline, type InlineContext } from './inline.js';
+import { LEVEL_OF, Role, ROLE_OF } from './roles.js';
+
+/** What reading blocks leaves behind. */
+export interface BlockContext extends InlineContext {
+  readonly blocks: ProseBlock[];
+  readonly problems: ReadingProblem[];
+}
+
+const SAFETY = /^(?:danger|warning|caution|notice)$/i;
+const CONTAINER_KIND = /[:!?=+\s]*(?:\{\s*\.?(?:callout-)?)?([A-Za-z]+)/y;
+const ALERT = /\[!([A-Za-z]+)\][+-]?[ \t]*/y;
+const LABELLED = /\*\*(note|tip|hint|info|important|warning|caution|danger|notice)\b/iy;
+
+/** Reads the block at the cursor, which comes back to it. */
+export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind = 'paragraph'): void {
+  switch (ROLE_OF[cursor.type.id]) {
+    case Role.container:
+    case Role.table:
+      return readChildren(cx, cursor, zones, kind);
+    case Role.listItem:
+      return readChildren(cx, cursor, zones, 'listItem');
+    case Role.blockquote:
+      return readBlockquote(cx, cursor, zones, kind);
+    case Role.admonition:
+      return readChildren(cx, cursor, zones | admonitionZones(cx.text, cursor.from), kind);
+    case Role.paragraph:
+      return readLeaf(cx, cursor, zones, kind, cursor.from);
+    case Role.heading:
+      return readLeaf(cx, cursor, zones | Zone.heading, 'heading', cursor.from);
+    case Role.title:
+      return readLeaf(cx, cursor, zones, 'caption', cursor.from);
+    case Role.tableCell:
+      return readLeaf(cx, cursor, zones | Zone.tableCell, 'tableCell', cursor.from);
+    case Role.tooDeep:
+      cx.problems.push({
+        span: { start: cursor.from, end: cursor.to },
+        message: `This line is nested more than ${DEEPEST} levels deep and is not read.`,
+      });
+      return;
+    default:
+  }
+}
+
+function readChildren(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind): void {
+  if (!cursor.firstChild()) return;
+  do readBlock(cx, cursor, zones, kind);
+  while (cursor.nextSibling());
+  cursor.parent();
+}
+
+/** A blockquote quotes somebody, unless it opens as an alert (`> [!NOTE]`) or with a label in bold (`> **Note**`). */
+function readBlockquote(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind): void {
+  if (!cursor.firstChild()) return;
+  let inner = zones | Zone.quotation;
+  let first = true;
+  do {
+    const role = ROLE_OF[cursor.type.id];
+    if (role === Role.none) continue;
+    let from = cursor.from;
+    if (first && role === Role.paragraph) {
+      const alert = matchAt(ALERT, cx.text, from);
+      const label = alert ?? matchAt(LABELLED, cx.text, from);
+      if (label) inner = zones | (SAFETY.test(label[1]!) ? Zone.safetyMessage : 0);
+      if (alert) from += alert[0].length;
+    }
+    first = false;
+    if (role === Role.paragraph) readLeaf(cx, cursor, inner, kind, from);
+    else readBlock(cx, cursor, inner, kind);
+  } while (cursor.nextSibling());
+  cursor.parent();
+}
+
+function admonitionZones(text: string, from: number): ZoneSet {
+  const kind = matchAt(CONTAINER_KIND, text, from)?.[1];
+  return kind !== undefined && SAFETY.test(kind) ? Zone.safetyMessage : 0;
+}
+
+function matchAt(pattern: RegExp, text: string, at: number): RegExpExecArray | null {
+  pattern.lastIndex = at;
+  return pattern.exec(text);
+}
+
+function readLeaf(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind, from: number): void {
+  const { to } = cursor;
+  const start = cursor.from;
+  const builder = new ContentBuilder(cx.text, start);
+  readInline(cx, cursor, builder, from, to);
+  const content = builder.finish({ kind, level: LEVEL_OF[cursor.type.id]!, zones }, to);
+  if (content) cx.blocks.push({ start, content: markQuotations(content) });
+  for (const block of cx.inner) {
+    const inherited = block.content.zones | (zones & (Zone.quotation | Zone.safetyMessage));
+    cx.blocks.push({ start: block.start, content: { ...block.content, zones: inherited } });
+  }
+  cx.inner.length = 0;
+}

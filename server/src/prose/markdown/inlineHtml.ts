@@ -1,0 +1,85 @@
+// HTML tags inside a paragraph: which vanish, which hide what they enclose, which put it into a zone.
+import type { ContentBuilder } from '../content.js';
+import { Zone, type ZoneSet } from '../zones.js';
+
+const NAME = /<\/?([A-Za-z][A-Za-z0-9-]*)/y;
+const HREF = /\shref\s*=\s*(?:"([^"]*)"|'([^']*)'|([^\s"'=<>`]+))/i;
+
+const VANISHING = new Set(
+  'abbr b bdi bdo big center cite del dfn div em font i ins label li mark nobr ol p q s small span strike strong sub'
+    .concat(' sup time u ul wbr td th tr summary details figure figcaption section a kbd')
+    .split(' '),
+);
+const HIDING = new Set('code pre samp script style svg tt var math textarea'.split(' '));
+const ZONES: Partial<Record<string, ZoneSet>> = { kbd: Zone.uiLabel, q: Zone.quotation, cite: Zone.quotation };
+
+/** The HTML elements that are open while one block is read. */
+export class InlineHtml {
+  private zones: ZoneSet = 0;
+  /** Names that nothing closes in the rest of the block. */
+  private readonly unclosed = new Set<string>();
+  private anchor: { start: number; target: string } | undefined;
+
+  constructor(
+    private readonly text: string,
+    private readonly out: ContentBuilder,
+    private readonly end: number,
+  ) {}
+
+  /** Takes the tag `[from, to)` and returns where reading goes on: behind the tag or behind the element that it hides. */
+  tag(from: number, to: number): number {
+    NAME.lastIndex = from;
+    const name = NAME.exec(this.text)?.[1]?.toLowerCase() ?? '';
+    const closing = this.text.charCodeAt(from + 1) === 47;
+    if (name === 'br') {
+      this.out.space(from, to);
+      return to;
+    }
+    if (!closing && HIDING.has(name)) {
+      const end = this.elementEnd(name, to);
+      this.out.opaque(from, end);
+      return end;
+    }
+    if (!VANISHING.has(name)) {
+      this.out.opaque(from, to);
+      return to;
+    }
+    const zone = ZONES[name];
+    if (zone !== undefined) this.switchZone(zone, !closing);
+    else if (name === 'a') this.switchAnchor(closing ? undefined : HREF.exec(this.text.slice(from, to)));
+    return to;
+  }
+
+  /** Ends what is still open where the block ends. */
+  close(): void {
+    this.switchAnchor(undefined);
+    this.out.setZones(this.out.currentZones & ~this.zones);
+  }
+
+  private switchZone(zone: ZoneSet, on: boolean): void {
+    this.zones = on ? this.zones | zone : this.zones & ~zone;
+    this.out.setZones(on ? this.out.currentZones | zone : this.out.currentZones & ~zone);
+  }
+
+  private switchAnchor(href: RegExpExecArray | null | undefined): void {
+    if (this.anchor) {
+      this.out.link(this.anchor.start, this.anchor.target);
+      this.anchor = undefined;
+      this.switchZone(Zone.linkText, false);
+    }
+    if (!href) return;
+    this.switchZone(Zone.linkText, true);
+    this.anchor = { start: this.out.length, target: href[1] ?? href[2] ?? href[3] ?? '' };
+  }
+
+  /** The end of the element whose opening tag ends at `from`; the tag's own end where nothing closes it in this block. */
+  private elementEnd(name: string, from: number): number {
+    if (this.unclosed.has(name)) return from;
+    const closing = new RegExp(`</${name}\\s*>`, 'gi');
+    closing.lastIndex = from;
+    const found = closing.exec(this.text.slice(0, this.end));
+    if (found) return found.index + found[0].length;
+    this.unclosed.add(name);
+    return from;
+  }
+}

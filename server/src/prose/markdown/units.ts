@@ -1,0 +1,103 @@
+// The outermost blocks of a Markdown document, each read by itself: what an edit leaves alone is kept.
+import type { Tree } from '@lezer/common';
+import type { ProseBlock, ReadingProblem } from '../prose.js';
+import { readBlock } from './blocks.js';
+import { definitionsIn, type Definition } from './definitions.js';
+import { markdownParser } from './grammar.js';
+
+/** An outermost block and the prose in it; blocks and problems count offsets from the document's start. */
+export interface Unit {
+  /** Where the line begins on which the block begins. At this place the parser knows nothing of what came before. */
+  readonly lineStart: number;
+  readonly end: number;
+  readonly blocks: readonly ProseBlock[];
+  readonly problems: readonly ReadingProblem[];
+  readonly definitions: readonly Definition[];
+  /** True where the unit's prose depends on the document's link reference definitions. */
+  readonly usesDefinitions: boolean;
+}
+
+/** A parsed stretch of a text, and where its outermost blocks begin. */
+export interface Stretch {
+  readonly from: number;
+  readonly text: string;
+  readonly tree: Tree;
+  /** The outermost blocks as offsets into `text`: the start of the first line, the end. */
+  readonly outline: readonly { readonly lineStart: number; readonly end: number }[];
+  /** Of each outermost block. */
+  readonly definitions: readonly (readonly Definition[])[];
+}
+
+/** Parses `[from, to)` of a text, which begins at the start of a line. */
+export function parseStretch(whole: string, from: number, to: number): Stretch {
+  const text = from === 0 && to === whole.length ? whole : whole.slice(from, to);
+  const tree = markdownParser.parse(text);
+  const outline: { lineStart: number; end: number }[] = [];
+  const definitions: Definition[][] = [];
+  const found = definitionsIn(tree, text);
+  const cursor = tree.cursor();
+  let next = 0;
+  if (cursor.firstChild()) {
+    do {
+      outline.push({ lineStart: text.lastIndexOf('\n', cursor.from - 1) + 1, end: cursor.to });
+      const own: Definition[] = [];
+      while (next < found.length && found[next]!.at < cursor.to) own.push(found[next++]!.definition);
+      definitions.push(own);
+    } while (cursor.nextSibling());
+  }
+  return { from, text, tree, outline, definitions };
+}
+
+/** Reads the first `count` outermost blocks of a stretch. */
+export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, string>, count: number): Unit[] {
+  const { from, text, tree, outline } = stretch;
+  const units: Unit[] = [];
+  const cursor = tree.cursor();
+  if (count === 0 || !cursor.firstChild()) return units;
+  do {
+    const i = units.length;
+    const cx = {
+      text,
+      definitions,
+      usesDefinitions: false,
+      inner: [],
+      blocks: [] as ProseBlock[],
+      problems: [] as ReadingProblem[],
+    };
+    readBlock(cx, cursor, 0);
+    const unit: Unit = {
+      lineStart: outline[i]!.lineStart,
+      end: outline[i]!.end,
+      blocks: cx.blocks,
+      problems: cx.problems,
+      definitions: stretch.definitions[i]!,
+      usesDefinitions: cx.usesDefinitions,
+    };
+    units.push(shifted(unit, from));
+  } while (units.length < count && cursor.nextSibling());
+  return units;
+}
+
+/** The unit `by` units further on; the same contents. */
+export function shifted(unit: Unit, by: number): Unit {
+  if (by === 0) return unit;
+  return {
+    ...unit,
+    lineStart: unit.lineStart + by,
+    end: unit.end + by,
+    blocks: unit.blocks.map(({ start, content }) => ({ start: start + by, content })),
+    problems: unit.problems.map(({ span, message }) => ({
+      span: { start: span.start + by, end: span.end + by },
+      message,
+    })),
+  };
+}
+
+/** The first definition of each label counts (CommonMark 0.31.2, "Link reference definitions"). */
+export function definitionTable(units: Iterable<readonly Definition[]>): Map<string, string> {
+  const table = new Map<string, string>();
+  for (const definitions of units) {
+    for (const { label, target } of definitions) if (!table.has(label)) table.set(label, target);
+  }
+  return table;
+}

@@ -1,0 +1,143 @@
+// Reads plain text: paragraphs between blank lines, list items, underlined headings; indented and code-like lines stay out.
+import type { SourceText } from '../text/sourceText.js';
+import { ContentBuilder, type BlockRole } from './content.js';
+import { normalise } from './normalise.js';
+import type { ProseBlock } from './prose.js';
+import { markQuotations } from './quotations.js';
+import { keepContents, type Reading } from './reading.js';
+import { Zone } from './zones.js';
+
+const LIST_MARK = /^[ \t]*(?:[-*+•]|\(?(?:\d{1,3}|[a-zA-Z])[.)])[ \t]+(?=\S)/;
+const UNDERLINE = /^[ \t]*([=\-~^"'`#*+_])\1{2,}[ \t]*$/;
+const NO_WORD = /^[^\p{L}\p{N}]*$/u;
+const OPAQUE_MATTER = new RegExp(
+  [
+    '``[^`]+``|`[^`]+`', // code, as most plain text formats mark it
+    '(?:[a-z][a-z0-9+.-]*://|www\\.)[^\\s<>"]*[^\\s<>".,;:!?)\\]}\'’”]',
+    '[\\w.+-]{1,100}@[\\w-]+(?:\\.[\\w-]+)+',
+  ].join('|'),
+  'giu',
+);
+const CODE_LINE =
+  /^[ \t]*(?:[$%#>][ \t]\S|\/\/|#!|>>>|\.\.[ \t]|:[\w-]+:(?:[ \t]|$))|[;{}][ \t]*$|^[ \t]*[\w.]+\(.*\)[ \t]*$|^[ \t]*[\w.$-]+[ \t]*[:+-]?=[ \t]/;
+const LEVELS = '=-~^';
+
+interface Line {
+  readonly start: number;
+  readonly end: number;
+  /** Columns of white space before the first visible character; Infinity on a blank line. */
+  readonly indent: number;
+}
+
+/**
+ * Reads a plain text. The rules: a blank line ends a paragraph, and so does a list mark; a paragraph of which every line is
+ * indented four columns or more beyond the text's own margin is code; a line of marks under a line makes that a
+ * heading; a line that looks like a command, a directive, an assignment or the end of a statement is left out.
+ */
+export function readPlaintext(source: SourceText): Reading {
+  const text = normalise(source.text);
+  const lines = linesOf(text);
+  const margin = lines.reduce((least, line) => Math.min(least, line.indent), Number.POSITIVE_INFINITY);
+  const blocks: ProseBlock[] = [];
+  for (let from = 0; from < lines.length;) {
+    if (lines[from]!.indent === Number.POSITIVE_INFINITY) {
+      from++;
+      continue;
+    }
+    let to = from + 1;
+    while (to < lines.length && lines[to]!.indent !== Number.POSITIVE_INFINITY) to++;
+    readParagraph(text, lines.slice(from, to), margin, blocks);
+    from = to;
+  }
+  return { source, prose: { blocks, problems: [], language: undefined } };
+}
+
+/** Reads again; equal blocks at either end keep their content objects. */
+export function rereadPlaintext(previous: Reading, source: SourceText): Reading {
+  const reading = readPlaintext(source);
+  return { source, prose: { ...reading.prose, blocks: keepContents(previous.prose.blocks, reading.prose.blocks) } };
+}
+
+function linesOf(text: string): Line[] {
+  const lines: Line[] = [];
+  for (let start = text.charCodeAt(0) === 0xfeff ? 1 : 0; start < text.length;) {
+    let end = text.indexOf('\n', start);
+    if (end < 0) end = text.length;
+    let indent = 0;
+    let at = start;
+    for (; at < end; at++) {
+      const unit = text.charCodeAt(at);
+      if (unit === 9) indent += 8 - (indent % 8);
+      else if (unit === 32 || unit === 12) indent++;
+      else break;
+    }
+    lines.push({ start, end, indent: at < end ? indent : Number.POSITIVE_INFINITY });
+    start = end + 1;
+  }
+  return lines;
+}
+
+function readParagraph(text: string, lines: readonly Line[], margin: number, blocks: ProseBlock[]): void {
+  if (lines.every((line) => line.indent >= margin + 4 && !LIST_MARK.test(text.slice(line.start, line.end)))) return;
+  let pending: Line[] = [];
+  let kind: BlockRole['kind'] = 'paragraph';
+  const flush = (): void => {
+    readLines(text, pending, { kind, level: 0, zones: Zone.prose }, blocks);
+    pending = [];
+    kind = 'paragraph';
+  };
+  for (const line of lines) {
+    const written = text.slice(line.start, line.end);
+    const underline = UNDERLINE.exec(written);
+    if (underline) {
+      const role = { kind: 'heading', level: LEVELS.indexOf(underline[1]!) + 1 || 3, zones: Zone.heading } as const;
+      const title = pending.pop();
+      flush();
+      if (title) readLines(text, [title], role, blocks);
+      continue;
+    }
+    if (CODE_LINE.test(written) || NO_WORD.test(written)) {
+      flush();
+      continue;
+    }
+    const mark = LIST_MARK.exec(written);
+    if (!mark) {
+      pending.push(line);
+      continue;
+    }
+    flush();
+    kind = 'listItem';
+    pending.push({ ...line, start: line.start + mark[0].length });
+  }
+  flush();
+}
+
+function readLines(text: string, lines: readonly Line[], role: BlockRole, blocks: ProseBlock[]): void {
+  const first = lines[0];
+  if (!first) return;
+  const start = first.start + /^[ \t\f]*/.exec(text.slice(first.start, first.end))![0].length;
+  const end = lines[lines.length - 1]!.end;
+  const out = new ContentBuilder(text, start);
+  let before = start;
+  for (const line of lines) {
+    const written = text.slice(line.start, line.end);
+    const from = line.start + /^\s*/.exec(written)![0].length;
+    const to = line.start + written.trimEnd().length;
+    if (from > before) out.space(before, from);
+    readLine(text, from, to, out);
+    before = to;
+  }
+  const content = out.finish(role, end);
+  if (content) blocks.push({ start, content: markQuotations(content) });
+}
+
+function readLine(text: string, from: number, to: number, out: ContentBuilder): void {
+  let at = from;
+  for (const match of text.slice(from, to).matchAll(OPAQUE_MATTER)) {
+    const found = from + match.index;
+    out.run(at, found);
+    at = found + match[0].length;
+    out.opaque(found, at);
+  }
+  out.run(at, to);
+}
