@@ -3,6 +3,7 @@ import { compareCodeUnits } from '../base/order.js';
 import { PagedColumn } from '../base/pagedColumn.js';
 import type { Work } from '../base/work.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
+import { TokenFlag } from '../tokens/tokens.js';
 import { countBlock } from './counting.js';
 import { GramTable } from './grams.js';
 import { makeStream } from './stream.js';
@@ -75,6 +76,35 @@ export class Corpus {
   get stream(): TokenStream {
     this.cachedStream ??= makeStream(this.documents, this.vocabulary);
     return this.cachedStream;
+  }
+
+  /** Number of counted words: those in open zones, blocks of the same prose once. */
+  get words(): number {
+    const { stream } = this;
+    let words = 0;
+    for (let row = 0; row < stream.length; row++) {
+      if (stream.counted[row] === 1 && (stream.flags[row]! & TokenFlag.word) !== 0) words++;
+    }
+    return words;
+  }
+
+  has(uri: string): boolean {
+    return this.find(uri) !== undefined;
+  }
+
+  /** The document of a URI, by binary search. */
+  find(uri: string): CorpusDocument | undefined {
+    let low = 0;
+    let high = this.documents.length - 1;
+    while (low <= high) {
+      const middle = (low + high) >>> 1;
+      const document = this.documents[middle]!;
+      const order = compareCodeUnits(document.uri, uri);
+      if (order === 0) return document;
+      if (order < 0) low = middle + 1;
+      else high = middle - 1;
+    }
+    return undefined;
   }
 
   /** The next snapshot; this one stays as it is. A later change of the same URI in one list wins. */

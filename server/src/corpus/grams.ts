@@ -31,6 +31,11 @@ export class GramTable {
     return words.length < 2 ? undefined : id;
   }
 
+  /** The id of `prefix` followed by `word`, or undefined where it was never seen. */
+  findExtension(prefix: number, word: number, length: number): number | undefined {
+    return this.pairs.find(leftKey(prefix, length), word);
+  }
+
   lengthOf(id: number): number {
     return this.lengths[id]!;
   }

@@ -50,6 +50,8 @@ export interface UsePlace {
 export interface Question {
   readonly id: string;
   readonly kind: QuestionKind;
+  /** The language (BCP 47 primary subtag) of the corpus it was mined from; set by the engine. */
+  readonly language?: string;
   /** From 0 to 1: how sure the evidence is that the terms name one concept. */
   readonly confidence: number;
   /** What answering settles: confidence × uses outside the leading term. Orders the questions. */

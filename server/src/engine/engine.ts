@@ -1,0 +1,171 @@
+// The engine's one writer: takes changes, hands out immutable snapshots, and settles relations as work that can rest.
+import type { Work } from '../base/work.js';
+import type { DocumentFacts } from '../facts/documentFacts.js';
+import { DEFAULT_KINDS } from '../mining/question.js';
+import { reread, startReading } from '../prose/read.js';
+import type { SourceText } from '../text/sourceText.js';
+import { parseTermbase } from '../termbase/parse.js';
+import { emptyTermbase } from '../termbase/termbase.js';
+import { factsOfProse } from './factsOf.js';
+import type { Profiles } from './factsOf.js';
+import { Relations } from './relations.js';
+import { Snapshot } from './snapshot.js';
+import type { EngineDocument, EngineSettings, EngineState, LoadedTermbase, Scoped } from './snapshot.js';
+
+/** One document's change: a new text, or undefined where the document is gone. */
+export interface DocumentUpdate {
+  readonly uri: string;
+  readonly source: SourceText | undefined;
+  /** Facts of exactly this text, where a worker has gathered them already. */
+  readonly facts?: DocumentFacts;
+  /** True while an editor holds the document: its reading is kept for the next edit. */
+  readonly open?: boolean;
+}
+
+/** A change of the world outside, made in one step. */
+export interface EngineChange {
+  readonly documents?: readonly DocumentUpdate[];
+  /** Texts of termbase files; undefined for one that is gone. */
+  readonly termbases?: readonly { readonly uri: string; readonly text: string | undefined }[];
+  readonly settings?: EngineSettings;
+}
+
+/** What is asked unless settings say otherwise. */
+export const DEFAULT_SETTINGS: EngineSettings = { kinds: DEFAULT_KINDS, leastConfidence: 0.5 };
+
+/**
+ * Holds the documents of one workspace folder. {@link apply} is immediate: texts and termbases are new at once, relations
+ * are those last settled. {@link settle} brings the relations up to date with all texts applied before it began.
+ * Findings after settling are a function of texts, settings and termbases, never of the order of changes.
+ */
+export class Engine {
+  private state: EngineState;
+  private scopes = new Map<string, Scoped>();
+  /** Documents whose facts are not in the relations yet, with their facts where they came along. */
+  private readonly unsettled = new Map<string, DocumentFacts | undefined>();
+  private settlement = 0;
+
+  constructor(private readonly profiles: Profiles) {
+    this.state = {
+      revision: 0,
+      settings: DEFAULT_SETTINGS,
+      documents: new Map(),
+      termbases: [],
+      relations: Relations.none,
+      agendaRevision: 0,
+    };
+  }
+
+  /** The state now. Hold one snapshot for the length of a request. */
+  get snapshot(): Snapshot {
+    return new Snapshot(this.state, this.scopes);
+  }
+
+  /** True where {@link settle} has something to do. */
+  get needsSettling(): boolean {
+    return this.unsettled.size > 0;
+  }
+
+  /** Takes a change in and returns the snapshot after it. Applying a text that is there already changes nothing. */
+  apply(change: EngineChange): Snapshot {
+    const documents = this.changedDocuments(change.documents ?? []);
+    const termbases = changedTermbases(this.state.termbases, change.termbases ?? []);
+    const settings = change.settings ?? this.state.settings;
+    const newAgenda = termbases !== this.state.termbases || settings !== this.state.settings;
+    this.commit({ documents, termbases, settings }, newAgenda);
+    return this.snapshot;
+  }
+
+  /**
+   * Gathers the facts of changed documents, counts and mines. Rests between documents and inside mining. Changes applied
+   * while it rests are left for the next settlement; a settlement that was started later makes this one return undone.
+   */
+  *settle(): Work<Snapshot> {
+    const mine = ++this.settlement;
+    const changes = new Map<string, DocumentFacts | undefined>();
+    const began = new Map<string, EngineDocument | undefined>();
+    for (const [uri, known] of [...this.unsettled]) {
+      const document = this.state.documents.get(uri);
+      began.set(uri, document);
+      changes.set(uri, document && (known ?? this.factsOf(document)));
+      yield;
+      if (mine !== this.settlement) return this.snapshot;
+    }
+    const work = this.state.relations.settle(changes);
+    let step = work.next();
+    while (step.done !== true) {
+      yield;
+      if (mine !== this.settlement) return this.snapshot;
+      step = work.next();
+    }
+    for (const [uri, document] of began) {
+      if (this.state.documents.get(uri)?.source === document?.source) this.unsettled.delete(uri);
+    }
+    if (changes.size > 0) this.commit({ relations: step.value }, true);
+    return this.snapshot;
+  }
+
+  private factsOf({ source, reading }: EngineDocument): DocumentFacts {
+    return factsOfProse((reading ?? startReading(source)).prose, this.profiles);
+  }
+
+  private changedDocuments(updates: readonly DocumentUpdate[]): ReadonlyMap<string, EngineDocument> {
+    if (updates.length === 0) return this.state.documents;
+    const documents = new Map(this.state.documents);
+    for (const { uri, source, facts, open } of updates) {
+      const known = documents.get(uri);
+      if (source === undefined) {
+        if (documents.delete(uri)) this.unsettled.set(uri, undefined);
+        continue;
+      }
+      const same = known?.source.text === source.text && known.source.format === source.format;
+      documents.set(uri, {
+        source: same ? known.source : source,
+        reading: readingAfter(known, source, same, open === true),
+      });
+      if (!same || facts !== undefined) this.unsettled.set(uri, facts);
+    }
+    return documents;
+  }
+
+  private commit(parts: Partial<EngineState>, newAgenda: boolean): void {
+    const { revision, agendaRevision } = this.state;
+    this.state = {
+      ...this.state,
+      ...parts,
+      revision: revision + 1,
+      agendaRevision: agendaRevision + (newAgenda ? 1 : 0),
+    };
+    if (newAgenda) this.scopes = new Map();
+  }
+}
+
+function readingAfter(
+  known: EngineDocument | undefined,
+  source: SourceText,
+  same: boolean,
+  open: boolean,
+): EngineDocument['reading'] {
+  if (!open) return undefined;
+  if (known?.reading === undefined) return startReading(source);
+  return same ? known.reading : reread(known.reading, source);
+}
+
+function changedTermbases(
+  known: readonly LoadedTermbase[],
+  changes: readonly { readonly uri: string; readonly text: string | undefined }[],
+): readonly LoadedTermbase[] {
+  if (changes.every(({ uri, text }) => known.find((loaded) => loaded.uri === uri)?.text === text)) return known;
+  const next = new Map(known.map((loaded) => [loaded.uri, loaded]));
+  for (const { uri, text } of changes) {
+    if (text === undefined) next.delete(uri);
+    else next.set(uri, load(uri, text, next.get(uri)));
+  }
+  return [...next.values()].sort((a, b) => (a.uri < b.uri ? -1 : 1));
+}
+
+/** Reads a termbase file; where it is broken the last good decisions stay in force. */
+function load(uri: string, text: string, before: LoadedTermbase | undefined): LoadedTermbase {
+  const { termbase, problems, usable } = parseTermbase(text, uri);
+  return { uri, text, problems, usable, termbase: usable ? termbase : (before?.termbase ?? emptyTermbase(uri)) };
+}

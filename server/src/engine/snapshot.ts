@@ -1,0 +1,136 @@
+// What everyone reads: the state of the engine at one revision; it never changes.
+import type { Span } from '../base/span.js';
+import { decide } from '../decisions/decide.js';
+import type { Agenda } from '../decisions/decide.js';
+import { scopeOf } from '../decisions/scope.js';
+import type { PlacedTermbase } from '../decisions/scope.js';
+import type { Finding } from '../findings/finding.js';
+import { startReading } from '../prose/read.js';
+import type { Reading } from '../prose/read.js';
+import type { SourceText } from '../text/sourceText.js';
+import { emptyTermbase } from '../termbase/termbase.js';
+import type { Termbase, TermbaseProblem } from '../termbase/termbase.js';
+import { Checker } from './checker.js';
+import type { Relations } from './relations.js';
+
+/** A document as the engine holds it. */
+export interface EngineDocument {
+  readonly source: SourceText;
+  /** Kept for documents that are open in an editor, so that an edit is read at the cost of the edit. */
+  readonly reading: Reading | undefined;
+}
+
+/** A termbase file: its text and problems now, and the decisions of its last sound text, which stay in force. */
+export interface LoadedTermbase {
+  readonly uri: string;
+  readonly text: string;
+  readonly problems: readonly TermbaseProblem[];
+  readonly usable: boolean;
+  readonly termbase: Termbase;
+}
+
+/** Which words of the open questions are shown as hints: questions less sure than this stay in the list alone. */
+export interface EngineSettings {
+  /** Kinds of question that are asked. */
+  readonly kinds: readonly string[];
+  /** Least confidence, from 0 to 1, of a question that is asked. */
+  readonly leastConfidence: number;
+}
+
+/** The parts of a state; {@link Snapshot} adds what is derived from them. */
+export interface EngineState {
+  readonly revision: number;
+  readonly settings: EngineSettings;
+  readonly documents: ReadonlyMap<string, EngineDocument>;
+  readonly termbases: readonly LoadedTermbase[];
+  readonly relations: Relations;
+  /** Counts the settlements and changes of termbases and settings: equal numbers mean equal agendas. */
+  readonly agendaRevision: number;
+}
+
+/** One revision of the engine, with everything that can be asked of it. */
+export class Snapshot {
+  constructor(
+    private readonly state: EngineState,
+    /** Agendas and checkers by scope: shared by all snapshots of one agenda revision. */
+    private readonly scopes: Map<string, Scoped>,
+  ) {}
+
+  get revision(): number {
+    return this.state.revision;
+  }
+
+  get documents(): ReadonlyMap<string, EngineDocument> {
+    return this.state.documents;
+  }
+
+  get termbases(): readonly LoadedTermbase[] {
+    return this.state.termbases;
+  }
+
+  get relations(): Relations {
+    return this.state.relations;
+  }
+
+  get settings(): EngineSettings {
+    return this.state.settings;
+  }
+
+  /** A document's prose, read anew where it is not kept; undefined for an unknown URI. */
+  readingOf(uri: string): Reading | undefined {
+    const document = this.state.documents.get(uri);
+    return document && (document.reading ?? startReading(document.source));
+  }
+
+  /** What is decided and what is asked where the URI (of a document, existing or not) stands. */
+  agendaAt(uri: string): Agenda {
+    return this.scopeAt(uri).agenda;
+  }
+
+  /** The checker for the decisions where the URI stands. */
+  checkerAt(uri: string): Checker {
+    return this.scopeAt(uri).checker;
+  }
+
+  /** The URI of the nearest termbase in force at a URI, or undefined where there is none. */
+  termbaseAt(uri: string): LoadedTermbase | undefined {
+    const id = scopeOf(uri, this.placed()).id;
+    return this.state.termbases.find((loaded) => loaded.uri === id);
+  }
+
+  /** The findings of a document, in order of their places; empty for an unknown URI. */
+  findingsIn(uri: string): readonly Finding[] {
+    const reading = this.readingOf(uri);
+    return reading === undefined ? [] : this.checkerAt(uri).check(reading);
+  }
+
+  /** The text of a span of a document, or undefined where the document is unknown. */
+  textOf(uri: string, span: Span): string | undefined {
+    return this.state.documents.get(uri)?.source.text.slice(span.start, span.end);
+  }
+
+  private placed(): PlacedTermbase[] {
+    return this.state.termbases.map(({ uri, termbase }) => ({ uri, termbase }));
+  }
+
+  private scopeAt(uri: string): Scoped {
+    const scope = scopeOf(uri, this.placed());
+    let scoped = this.scopes.get(scope.id);
+    if (scoped === undefined) {
+      const { kinds, leastConfidence } = this.state.settings;
+      const asked = this.state.relations.questions.filter(
+        ({ kind, confidence }) => kinds.includes(kind) && confidence >= leastConfidence,
+      );
+      const agenda = decide(scope.chain.length > 0 ? scope.chain : [emptyTermbase('')], asked);
+      scoped = { agenda, checker: new Checker(agenda) };
+      this.scopes.set(scope.id, scoped);
+    }
+    return scoped;
+  }
+}
+
+/** What is derived for one scope of termbases. */
+export interface Scoped {
+  readonly agenda: Agenda;
+  readonly checker: Checker;
+}

@@ -1,0 +1,94 @@
+// Where each term stands: the corpus cut into terms, longest first, so that a word inside a longer term is not its own.
+import type { Work } from '../../base/work.js';
+import type { Corpus } from '../../corpus/corpus.js';
+import { LONGEST_GRAM } from '../../corpus/grams.js';
+import type { TokenStream } from '../../corpus/stream.js';
+import { FactFlag } from '../../facts/flags.js';
+import { TokenFlag } from '../../tokens/tokens.js';
+import type { Term } from './terms.js';
+import { useOfTag } from './wordUse.js';
+
+/** The places of terms in a stream: occurrence `i` is term `term[i]` in the rows `[first[i], first[i] + length[i])`. */
+export interface Segments {
+  readonly count: number;
+  readonly term: Uint32Array;
+  readonly first: Uint32Array;
+  readonly length: Uint8Array;
+  /** Occurrences of each term outside longer terms. */
+  readonly uses: Uint32Array;
+  /** The term that covers a row, as index + 1, or 0. */
+  readonly covering: Uint32Array;
+}
+
+/** Cuts a corpus into the given noun terms; occurrences are in order of their rows. */
+export function* segment(corpus: Corpus, terms: readonly Term[]): Work<Segments> {
+  const { stream, grams } = corpus;
+  const ofWord = new Uint32Array(corpus.vocabulary.size);
+  const ofGram = new Uint32Array(grams.size);
+  terms.forEach((term, index) => {
+    for (const { words } of term.forms) {
+      if (words.length === 1) ofWord[words[0]!] = index + 1;
+      else ofGram[grams.find(words)!] = index + 1;
+    }
+  });
+  const covering = new Uint32Array(stream.length);
+  const term: number[] = [];
+  const first: number[] = [];
+  const length: number[] = [];
+  for (let row = 0; row < stream.length;) {
+    const match = isContent(stream, row) ? longestAt(corpus, row, ofWord, ofGram) : undefined;
+    if (match !== undefined) {
+      term.push(match.term - 1);
+      first.push(row);
+      length.push(match.length);
+      covering.fill(match.term, row, row + match.length);
+    }
+    const next = row + (match?.length ?? 1);
+    if (next >> 16 !== row >> 16) yield;
+    row = next;
+  }
+  const uses = new Uint32Array(terms.length);
+  for (const each of term) uses[each]!++;
+  return {
+    ...{ count: term.length, uses, covering },
+    ...{ term: Uint32Array.from(term), first: Uint32Array.from(first), length: Uint8Array.from(length) },
+  };
+}
+
+function longestAt(
+  { stream, grams }: Corpus,
+  row: number,
+  ofWord: Uint32Array,
+  ofGram: Uint32Array,
+): { term: number; length: number } | undefined {
+  const word = stream.fold[row]!;
+  // A single word is this noun only where it is used as one; in a longer term the whole decides.
+  let found = useOfTag(stream.tag[row]!) === 0 && ofWord[word] !== 0 ? { term: ofWord[word]!, length: 1 } : undefined;
+  let gram: number | undefined = word;
+  for (let length = 2; length <= LONGEST_GRAM; length++) {
+    const next = row + length - 1;
+    if (!follows(stream, next)) break;
+    gram = grams.findExtension(gram, stream.fold[next]!, length);
+    if (gram === undefined) break;
+    if (ofGram[gram] !== 0) found = { term: ofGram[gram]!, length };
+  }
+  return found;
+}
+
+/** True where the row's word follows the one before it with nothing but white space between them. */
+export function follows(stream: TokenStream, row: number): boolean {
+  const flags = stream.flags[row] ?? 0;
+  return (
+    stream.counted[row] === 1 &&
+    (flags & (TokenFlag.word | TokenFlag.spaceBefore | TokenFlag.sentenceStart)) ===
+      (TokenFlag.word | TokenFlag.spaceBefore) &&
+    (stream.flags[row - 1]! & TokenFlag.possessive) === 0
+  );
+}
+
+/** True for a counted word that is not one of grammar. */
+export function isContent(stream: TokenStream, row: number): boolean {
+  return (
+    stream.counted[row] === 1 && (stream.flags[row]! & (TokenFlag.word | FactFlag.functionWord)) === TokenFlag.word
+  );
+}

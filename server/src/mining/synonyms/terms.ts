@@ -1,0 +1,128 @@
+// The terms of a corpus: nouns and runs of words around a noun that are used often enough and hold together, and verbs.
+import { compareCodeUnits } from '../../base/order.js';
+import type { Work } from '../../base/work.js';
+import type { Corpus } from '../../corpus/corpus.js';
+import { npmi } from '../../corpus/statistics/association.js';
+import { cValues } from '../../corpus/statistics/termhood.js';
+import type { WordUses } from './wordUse.js';
+
+/** Fewest uses of a term that is asked about. */
+const FEWEST_USES = 5;
+/** Fewest uses of one inflected form that adds to a term. */
+const FEWEST_FORM_USES = 2;
+/** A run of words is a term where it is worth this much by C-value, … */
+const LEAST_C_VALUE = 4;
+/** … and its words attract one another this much, by NPMI. */
+const LEAST_ATTRACTION = 0.1;
+
+/** Adjectives that say nothing of a concept when they open a term: grammar rather than terminology. */
+const GENERIC = new Set(
+  `other same different new old such many several few various certain first second third last next previous following above
+  own specific particular given single multiple additional further more most less least available necessary possible
+  important common similar whole entire full current existing appropriate relevant good better best large small high low
+  long short simple main general actual real desired required corresponding respective recommended example sample`.split(
+    /\s+/,
+  ),
+);
+
+/** A noun term, or a verb: its words as lower-case vocabulary numbers with the last word in its dictionary form. */
+export interface Term {
+  readonly kind: 'noun' | 'verb';
+  /** Identity within one mining: the words' texts joined by spaces, last word as its lemma. */
+  readonly key: string;
+  readonly words: readonly number[];
+  /** Surface runs (lower-case words) that are this term: singular, plural; most used first. */
+  readonly forms: readonly { readonly words: readonly number[]; readonly uses: number }[];
+  readonly uses: number;
+}
+
+interface Candidate {
+  readonly key: string;
+  readonly words: number[];
+  readonly forms: { words: number[]; uses: number }[];
+  uses: number;
+}
+
+/** The noun terms of a corpus, in order of uses and code units. */
+export function* findNounTerms(corpus: Corpus, uses: WordUses): Work<Term[]> {
+  const candidates = new Map<string, Candidate>();
+  const text = (word: number): string => corpus.vocabulary.textOf(word);
+  const add = (words: number[], count: number): void => {
+    const lemma = uses.lemma(words[words.length - 1]!, 'noun');
+    const normal = [...words.slice(0, -1), lemma];
+    const key = normal.map(text).join(' ');
+    let candidate = candidates.get(key);
+    if (candidate === undefined) candidates.set(key, (candidate = { key, words: normal, forms: [], uses: 0 }));
+    candidate.forms.push({ words, uses: count });
+    candidate.uses += count;
+  };
+  for (let word = 0; word < corpus.vocabulary.size; word++) {
+    const count = uses.count(word, 'noun');
+    if (count >= FEWEST_FORM_USES && isTermWord(text(word))) add([word], count);
+  }
+  yield;
+  for (let gram = 0; gram < corpus.grams.size; gram++) {
+    const count = corpus.usesOfGram(gram);
+    if (count >= FEWEST_FORM_USES) {
+      const words = corpus.grams.wordsOf(gram);
+      if (isNounShaped(words, uses, text)) add(words, count);
+    }
+    if (gram % 50_000 === 0) yield;
+  }
+  const frequent = [...candidates.values()].filter(({ uses: count }) => count >= FEWEST_USES);
+  yield;
+  return keepTogether(corpus, frequent).map(({ key, words, forms, uses: count }) => ({
+    ...{ kind: 'noun' as const, key, words, uses: count },
+    forms: forms.sort(
+      (a, b) => b.uses - a.uses || compareCodeUnits(a.words.map(text).join(' '), b.words.map(text).join(' ')),
+    ),
+  }));
+}
+
+/** Drops runs of words that are mere neighbours. */
+function keepTogether(corpus: Corpus, candidates: Candidate[]): Candidate[] {
+  candidates.sort((a, b) => b.uses - a.uses || compareCodeUnits(a.key, b.key));
+  const values = cValues(
+    candidates.map(({ words, uses }) => ({
+      words: words.map((word) => corpus.vocabulary.textOf(word)),
+      frequency: uses,
+    })),
+    'smoothed',
+  );
+  const usesOfKey = new Map(candidates.map(({ key, uses }) => [key, uses]));
+  const all = candidates.reduce((sum, { words, uses }) => (words.length === 1 ? sum + uses : sum), 0);
+  return candidates.filter(({ words, uses }, index) => {
+    if (words.length === 1) return true;
+    if (values[index]! < LEAST_C_VALUE) return false;
+    const head = usesOfKey.get(corpus.vocabulary.textOf(words[words.length - 1]!));
+    const rest = restUses(corpus, words.slice(0, -1));
+    if (head === undefined || rest === 0) return true;
+    return (
+      npmi({ c1: Math.max(rest, uses), c2: Math.max(head, uses), c12: uses, n: Math.max(all, rest, head) }) >
+      LEAST_ATTRACTION
+    );
+  });
+}
+
+function restUses(corpus: Corpus, words: readonly number[]): number {
+  if (words.length === 1) return corpus.stream.rowsOf(words[0]!).length;
+  const gram = corpus.grams.find(words);
+  return gram === undefined ? 0 : corpus.usesOfGram(gram);
+}
+
+function isTermWord(text: string): boolean {
+  return text.length > 1 && /^\p{L}[\p{L}\p{M}\d'’+#.-]*$/u.test(text);
+}
+
+/** (adjective | noun | participle)* noun, judged by how each word is used in the whole corpus, not by one tag. */
+function isNounShaped(words: readonly number[], uses: WordUses, text: (word: number) => string): boolean {
+  const last = words.length - 1;
+  return words.every((word, index) => {
+    const spelled = text(word);
+    if (!isTermWord(spelled)) return false;
+    if (index === last) return uses.share(word, 'noun') >= 0.4;
+    if (index === 0 && GENERIC.has(spelled)) return false;
+    const nominal = uses.share(word, 'noun') + uses.share(word, 'adjective');
+    return nominal >= 0.5 || (uses.share(word, 'verb') >= 0.3 && /(ed|ing|en)$/.test(spelled));
+  });
+}
