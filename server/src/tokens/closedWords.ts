@@ -17,6 +17,7 @@ export const UNITS = set(`
 /** Abbreviations that a full stop follows without ending a sentence, in lower case and without the stop. */
 export const STOPPED_ABBREVIATIONS = set(`
   mr mrs ms dr prof st sr jr messrs gen col capt lt sgt rev hon gov sen rep
+  jan feb apr jun jul aug sept sep oct nov dec drs hrs
   vs approx dept est ca cf al viz esp incl excl resp e.g i.e eg ie ibid
 `);
 

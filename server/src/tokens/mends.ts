@@ -12,11 +12,14 @@ export interface TaggedRows {
 }
 
 const CERTAIN_DETERMINERS = new Set('the a an its your our their my his every another no'.split(' '));
-const { NOUN, PROPN, VERB, ADJ } = TAG;
+const { NOUN, PROPN, VERB, ADJ, AUX, ADV, PART, PRON } = TAG;
+const FULL_OR_AUXILIARY = new Set('have has had having do does did doing done'.split(' '));
+/** How many adverbs and pronouns may stand between an auxiliary and its verb: `do you not always want`. */
+const REACH = 4;
 
 /**
  * Changes tags in place: an imperative noun at a sentence's start before a determiner is a verb; so is a noun between *to* or a modal
- * and a determiner; a verb between a determiner and a noun is an adjective.
+ * and a determiner; a verb between a determiner and a noun is an adjective; *have* and *do* that help no verb are verbs.
  */
 export function mendTags({ tag, flags, forms }: TaggedRows, lexicon: WinkLexicon): void {
   const last = tag.length - 1;
@@ -36,11 +39,24 @@ export function mendTags({ tag, flags, forms }: TaggedRows, lexicon: WinkLexicon
       if (governed && (determined || before.lower !== 'to') && mayBeBaseVerb(form, lexicon)) tag[row] = VERB;
       else if (isOpening && determined && !OPENING_NOUNS.has(form.lower) && mayBeBaseVerb(form, lexicon))
         tag[row] = VERB;
+    } else if (now === AUX) {
+      if (FULL_OR_AUXILIARY.has(form.lower) && !helps(tag, forms, row)) tag[row] = VERB;
     } else if (now === VERB && row > 0 && (tag[row + 1] === NOUN || tag[row + 1] === PROPN)) {
       const before = forms[row - 1];
       if (before !== undefined && CERTAIN_DETERMINERS.has(before.lower)) tag[row] = ADJ;
     }
   }
+}
+
+/** True where a verb comes after the auxiliary at a row, with nothing between but adverbs, negation and pronouns, or nothing at all comes. */
+function helps(tag: Uint8Array, forms: TaggedRows['forms'], row: number): boolean {
+  for (let at = row + 1; at < tag.length && at <= row + REACH; at++) {
+    const next = tag[at];
+    if (next === VERB || next === AUX) return true;
+    if (next !== ADV && next !== PART && next !== PRON) return false;
+    if (forms[at]?.lower === 'to') return false;
+  }
+  return false;
 }
 
 function mayBeBaseVerb(form: WordForm, lexicon: WinkLexicon): boolean {
