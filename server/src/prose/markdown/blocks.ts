@@ -24,21 +24,29 @@ export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, 
   switch (ROLE_OF[cursor.type.id]) {
     case Role.container:
     case Role.table:
-      return readChildren(cx, cursor, zones, kind);
+      readChildren(cx, cursor, zones, kind);
+      break;
     case Role.listItem:
-      return readChildren(cx, cursor, zones, 'listItem');
+      readChildren(cx, cursor, zones, 'listItem');
+      break;
     case Role.blockquote:
-      return readBlockquote(cx, cursor, zones, kind);
+      readBlockquote(cx, cursor, zones, kind);
+      break;
     case Role.admonition:
-      return readChildren(cx, cursor, zones | admonitionZones(cx.text, cursor.from), kind);
+      readChildren(cx, cursor, zones | admonitionZones(cx.text, cursor.from), kind);
+      break;
     case Role.paragraph:
-      return readLeaf(cx, cursor, zones, kind, cursor.from);
+      readLeaf(cx, cursor, zones, kind, cursor.from);
+      break;
     case Role.heading:
-      return readLeaf(cx, cursor, zones | Zone.heading, 'heading', cursor.from);
+      readLeaf(cx, cursor, zones | Zone.heading, 'heading', cursor.from);
+      break;
     case Role.title:
-      return readLeaf(cx, cursor, zones, 'caption', cursor.from);
+      readLeaf(cx, cursor, zones, 'caption', cursor.from);
+      break;
     case Role.tableCell:
-      return readLeaf(cx, cursor, zones | Zone.tableCell, 'tableCell', cursor.from);
+      readLeaf(cx, cursor, zones | Zone.tableCell, 'tableCell', cursor.from);
+      break;
     case Role.tooDeep:
       cx.problems.push({
         span: { start: cursor.from, end: cursor.to },

@@ -62,9 +62,8 @@ function open(cx: BlockContext, line: Line, type: string, value: number, title: 
   const head = line.text.slice(line.pos);
   cx.startComposite(type, line.pos, value);
   const end = from + line.text.length;
-  let shownFrom = end;
   if (title !== undefined && title !== '') {
-    shownFrom = from + line.pos + head.lastIndexOf(title);
+    const shownFrom = from + line.pos + head.lastIndexOf(title);
     const inline = cx.parser.parseInline(title, shownFrom);
     cx.addElement(cx.elt('ContainerHead', from + line.pos, shownFrom));
     cx.addElement(cx.elt('ContainerTitle', shownFrom, shownFrom + title.length, inline));

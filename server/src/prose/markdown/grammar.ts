@@ -1,5 +1,6 @@
 // The Markdown grammar: CommonMark and GFM by @lezer/markdown, the generators' additions, and guards against hostile input.
 import { GFM, parser as commonMark, type Element, type LeafBlock, type MarkdownConfig } from '@lezer/markdown';
+import { brackets } from './brackets.js';
 import { containers } from './containers.js';
 import { parsePlainRun } from './plainRun.js';
 import { templates } from './templates.js';
@@ -23,7 +24,7 @@ function isTooLong(_cx: unknown, _line: unknown, leaf: LeafBlock): boolean {
 }
 
 /** The configured parser. It is stateless: parsing one text never affects another. */
-export const markdownParser = commonMark.configure([GFM, templates, guards, containers]);
+export const markdownParser = commonMark.configure([GFM, templates, brackets, guards, containers]);
 
 const parseWhole = markdownParser.parseInline.bind(markdownParser);
 

@@ -71,9 +71,11 @@ class InlineReader {
     this.plain(from);
     switch (role) {
       case Role.styled:
-        return this.children(to);
+        this.children(to);
+        return;
       case Role.link:
-        return this.link(from, to);
+        this.link(from, to);
+        return;
       case Role.image:
         this.image(from, to);
         break;
@@ -120,7 +122,7 @@ class InlineReader {
 
   private reference(from: number, to: number): void {
     const decoded = decodeReference(this.cx.text.slice(from, to));
-    if (decoded === undefined) this.out.opaque(from, to);
+    if (decoded === undefined) this.out.run(from, to);
     else this.out.substitute(decoded, from, to);
   }
 
