@@ -1,0 +1,98 @@
+// Where a form stands: its uses as rows of the token stream, how many documents hold them, and the places to show.
+import { Zone } from '../prose/zones.js';
+import type { TokenStream } from '../corpus/stream.js';
+import { TokenFlag } from '../tokens/tokens.js';
+import type { UsePlace } from './question.js';
+
+/** One use of a form: rows `[row, row + length)` of the token stream. */
+export interface Use {
+  readonly row: number;
+  readonly length: number;
+}
+
+/** True where a counted word follows the row before it with nothing but white space between. */
+export function followsOn(stream: TokenStream, row: number): boolean {
+  const flags = stream.flags[row]!;
+  return (
+    (flags & TokenFlag.word) !== 0 &&
+    (flags & TokenFlag.spaceBefore) !== 0 &&
+    (flags & TokenFlag.sentenceStart) === 0 &&
+    (stream.flags[row - 1]! & TokenFlag.possessive) === 0 &&
+    stream.counted[row] === 1
+  );
+}
+
+/** The rows, ascending, at which a sequence of lower-case words begins, with nothing but white space inside it. */
+export function rowsOfSequence(stream: TokenStream, folds: readonly number[]): number[] {
+  let rarest = 0;
+  for (let i = 1; i < folds.length; i++) {
+    if (stream.rowsOf(folds[i]!).length < stream.rowsOf(folds[rarest]!).length) rarest = i;
+  }
+  const found: number[] = [];
+  for (const at of stream.rowsOf(folds[rarest]!)) {
+    const first = at - rarest;
+    if (first >= 0 && standsAt(stream, folds, first)) found.push(first);
+  }
+  return found;
+}
+
+function standsAt(stream: TokenStream, folds: readonly number[], first: number): boolean {
+  if (first + folds.length > stream.length || stream.counted[first] !== 1) return false;
+  for (let i = 0; i < folds.length; i++) {
+    if (stream.fold[first + i] !== folds[i] || (i > 0 && !followsOn(stream, first + i))) return false;
+  }
+  return firstRowOfBlock(stream, first + folds.length - 1) <= first;
+}
+
+/** The first row of the block that a row stands in. */
+export function firstRowOfBlock(stream: TokenStream, row: number): number {
+  return stream.blockFirst[stream.blockOf(row)]!;
+}
+
+/** One after the last row of the block that a row stands in. */
+export function endRowOfBlock(stream: TokenStream, row: number): number {
+  return stream.blockFirst[stream.blockOf(row) + 1]!;
+}
+
+/** How many documents hold at least one of the uses. */
+export function countDocuments(stream: TokenStream, uses: readonly Use[]): number {
+  return new Set(uses.map((use) => stream.documentOf(use.row))).size;
+}
+
+/** True for a row in running text: no heading, label, table cell or page title. */
+export function isRunningText(stream: TokenStream, row: number): boolean {
+  return (stream.zones[row]! & (Zone.heading | Zone.tableCell | Zone.frontMatter | Zone.alternativeText)) === 0;
+}
+
+/**
+ * Up to `limit` uses to show for one term: running text before headings and tables, another document each while there
+ * are any, in document order.
+ */
+export function examplePlaces(stream: TokenStream, term: number, uses: readonly Use[], limit = 3): UsePlace[] {
+  const inOrder = [...uses].sort((a, b) => a.row - b.row);
+  const preferred = [
+    ...inOrder.filter((use) => isRunningText(stream, use.row)),
+    ...inOrder.filter((use) => !isRunningText(stream, use.row)),
+  ];
+  const seen = new Set<number>();
+  const chosen: Use[] = [];
+  for (const use of preferred) {
+    if (chosen.length === limit) break;
+    const document = stream.documentOf(use.row);
+    if (!seen.has(document)) {
+      seen.add(document);
+      chosen.push(use);
+    }
+  }
+  for (const use of preferred) {
+    if (chosen.length === limit) break;
+    if (!chosen.includes(use)) chosen.push(use);
+  }
+  return chosen
+    .sort((a, b) => a.row - b.row)
+    .map((use) => {
+      const document = stream.documentOf(use.row);
+      const firstToken = use.row - stream.documentFirst[document]!;
+      return { term, document, firstToken, lastToken: firstToken + use.length - 1 };
+    });
+}

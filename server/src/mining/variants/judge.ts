@@ -1,0 +1,113 @@
+// Whether two ways of writing are a mix to ask about: how often they stand in the same slot, and what speaks against it.
+import { SLOTS } from './slots.js';
+import type { Slot } from './slots.js';
+import type { Style } from './styles.js';
+
+/** What the two ways differ in. */
+export type Lane = 'spelling' | 'joining' | 'hyphen' | 'space' | 'name';
+
+/** A mix of two ways of writing. */
+export interface Mix {
+  readonly lane: Lane;
+  /** Uses in which the ways could be exchanged: the smaller count in each slot, added up. */
+  readonly exchangeable: number;
+}
+
+/** The particles of phrasal verbs: written apart from a verb, together in the noun made of it. */
+const PARTICLES = new Set(
+  'up out off down in on over away back through around along by about across under together ahead forward apart to'.split(
+    ' ',
+  ),
+);
+/** Words inside a phrase that make its open form a phrase of grammar (end to end, out of date, left to right). */
+const LINKS = new Set('to of and or the a an in on by for with from at as per vs not no than'.split(' '));
+
+/** Slots in which an open and a joined form are the same part of speech. */
+const LIKE_SLOTS: readonly Slot[] = ['attributive', 'predicate', 'noun', 'verb'];
+
+/** Judges two ways of writing one key, or returns undefined where they are right as they are. */
+export function judge(a: Style, b: Style): Mix | undefined {
+  if (a.uses.length === 0 || b.uses.length === 0) return undefined;
+  const open = a.shape === 'open' ? a : b.shape === 'open' ? b : undefined;
+  const chunk = open === a ? b : a;
+  if (open === undefined) return judgeChunks(a, b);
+  if (chunk.shape === 'open') return undefined;
+  return judgeOpen(chunk, open);
+}
+
+function judgeChunks(a: Style, b: Style): Mix | undefined {
+  if (isLowerCamel(a) || isLowerCamel(b)) return undefined;
+  if (isShouted(a) !== isShouted(b)) return undefined;
+  const sameShape = a.shape === b.shape;
+  const byPart = sameShape && differsByPartOfSpeech(a.text, b.text);
+  const particle = !sameShape && endsInParticle(a.shape === 'hyphened' ? a : b);
+  const exchangeable =
+    byPart || particle
+      ? shared(a, b, ['attributive', 'predicate', 'noun', 'unclear']) + (byPart ? shared(a, b, ['verb']) : 0)
+      : Math.min(counted(a), counted(b));
+  if (exchangeable === 0) return undefined;
+  if (!sameShape && (isCamel(a) || isCamel(b))) return undefined;
+  return { lane: sameShape ? 'spelling' : 'joining', exchangeable };
+}
+
+function judgeOpen(chunk: Style, open: Style): Mix | undefined {
+  const parts = open.forms[0]!.parts;
+  if (parts.some((part, i) => i > 0 && PARTICLES.has(part)) || PARTICLES.has(parts[0]!)) return undefined;
+  if (isLowerCamel(chunk) || isShouted(chunk)) return undefined;
+  if (namesOf(open) > 0.6 && namesOf(chunk) < 0.4) return undefined;
+  if (isCamel(chunk)) return judgeCamel(chunk, open);
+  const phrase = parts.some((part) => LINKS.has(part));
+  const exchangeable = shared(chunk, open, phrase ? ['attributive'] : LIKE_SLOTS);
+  if (exchangeable === 0) return undefined;
+  return { lane: chunk.shape === 'hyphened' ? 'hyphen' : 'space', exchangeable };
+}
+
+/** A kind or class beside the concept it stands for: a mix only where prose uses the joined form as a noun of its own. */
+function judgeCamel(chunk: Style, open: Style): Mix | undefined {
+  const plurals = chunk.forms
+    .filter((form) => form.text !== form.style)
+    .reduce((sum, form) => sum + form.rows.length, 0);
+  const asName = open.inside > 0 && open.capitalised / open.inside >= 0.6;
+  const leads = chunk.uses.length >= 10 && chunk.uses.length >= 4 * open.uses.length;
+  if (!asName && !leads) return undefined;
+  if (!asName && plurals * 20 < chunk.uses.length) return undefined;
+  const exchangeable = shared(chunk, open, ['predicate', 'noun']);
+  return exchangeable < 2
+    ? undefined
+    : { lane: 'name', exchangeable: exchangeable + shared(chunk, open, ['attributive']) };
+}
+
+function shared(a: Style, b: Style, slots: readonly Slot[]): number {
+  return slots.reduce((sum, slot) => sum + Math.min(a.slots[slot], b.slots[slot]), 0);
+}
+
+function counted(style: Style): number {
+  return SLOTS.reduce((sum, slot) => sum + (slot === 'lone' ? 0 : style.slots[slot]), 0);
+}
+
+function endsInParticle(style: Style): boolean {
+  const { parts } = style.forms[0]!;
+  return PARTICLES.has(parts[parts.length - 1]!);
+}
+
+/** licence and license, practice and practise, indexes and indices: one spelling may be the verb's. */
+function differsByPartOfSpeech(a: string, b: string): boolean {
+  return a.replace(/s/g, 'c') === b.replace(/s/g, 'c') || a.endsWith('s') || b.endsWith('s');
+}
+
+function isCamel(style: Style): boolean {
+  return style.inside > 0 ? style.camel / style.inside >= 0.5 : false;
+}
+
+function isLowerCamel(style: Style): boolean {
+  return style.lowerCamel > 0 && style.lowerCamel * 2 >= style.inside;
+}
+
+function isShouted(style: Style): boolean {
+  return style.shouted > 0 && style.shouted * 2 >= style.inside;
+}
+
+/** The share of uses inside sentences with a capital anywhere. */
+function namesOf(style: Style): number {
+  return style.inside === 0 ? 0 : style.withCapital / style.inside;
+}

@@ -1,0 +1,111 @@
+// The slot of a use in its sentence, told from its neighbours: before a noun, after "is", as a noun, as a verb.
+import type { Corpus } from '../../corpus/corpus.js';
+import type { TokenStream } from '../../corpus/stream.js';
+import type { Vocabulary } from '../../corpus/vocabulary.js';
+import { FactFlag } from '../../facts/flags.js';
+import { TAG, TokenFlag } from '../../tokens/tokens.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn } from '../places.js';
+
+/** The slots, by code. `lone`: nothing but the form stands there; `unclear`: its neighbours do not tell. */
+export const SLOTS = ['attributive', 'predicate', 'noun', 'verb', 'unclear', 'lone'] as const;
+export type Slot = (typeof SLOTS)[number];
+
+const LISTS = {
+  determiner: `a an the this that these those some any each every no all both either neither another other its their
+    your our my his her whose which what such several many few one two three more most same multiple new`,
+  preposition: `of in on at by for with from into onto over under between among through during via per about without
+    within upon across against like using including`,
+  modal: `can could may might must shall should will would cannot can't don't doesn't didn't won't shouldn't let lets
+    let's please do does did`,
+  pronoun: `i you we they it he she who which that users`,
+  leadsToInfinitive: `need needs needed want wants how have has having able used use required allow allows allowed
+    enable enables order going try tries trying attempt attempts fail fails failed possible easy ready necessary
+    configured designed likely you users them us ability way time used ready whether when where what attempting
+    wish wishes choose decide forget forgot sure`,
+  be: `is are was were be been being as not becomes become remains remain stays stay seems`,
+  objectStart: `a an the this that these those your its their our my all any each every some it them both`,
+} as const;
+type WordClass = keyof typeof LISTS;
+
+/** Tells the slots of uses in one corpus. */
+export class SlotReader {
+  private readonly classes: Readonly<Record<WordClass, ReadonlySet<number>>>;
+  private readonly to: number | undefined;
+  private readonly comma: number | undefined;
+  private readonly stream: TokenStream;
+
+  constructor(corpus: Corpus) {
+    this.stream = corpus.stream;
+    this.to = corpus.vocabulary.find('to');
+    this.comma = corpus.vocabulary.find(',');
+    this.classes = Object.fromEntries(
+      Object.entries(LISTS).map(([name, words]) => [name, idsOf(corpus.vocabulary, words)]),
+    ) as Record<WordClass, ReadonlySet<number>>;
+  }
+
+  /** The slot of a use of `length` rows from `row` on. */
+  slotOf(row: number, length: number): Slot {
+    const { stream } = this;
+    const end = row + length;
+    const blockStart = firstRowOfBlock(stream, row);
+    const blockEnd = endRowOfBlock(stream, row);
+    const starts = row === blockStart || (stream.flags[row]! & TokenFlag.sentenceStart) !== 0;
+    if (row === blockStart && (end === blockEnd || this.isColon(end, blockEnd))) return 'lone';
+    if (this.isVerb(row, end, starts, blockEnd)) return 'verb';
+    if (end < blockEnd) {
+      const next = this.afterwards(end);
+      if (next !== undefined) return next;
+    }
+    if (!starts && this.follows(row) && this.is('be', row - 1)) return 'predicate';
+    return 'noun';
+  }
+
+  private isVerb(row: number, end: number, starts: boolean, blockEnd: number): boolean {
+    const { stream } = this;
+    const takesObject = end < blockEnd && followsOn(stream, end) && this.is('objectStart', end);
+    if (starts) return takesObject;
+    if (!this.follows(row)) return false;
+    const before = stream.fold[row - 1]!;
+    if (this.is('modal', row - 1) || this.is('pronoun', row - 1)) return true;
+    if (before !== this.to) return false;
+    return takesObject || (this.follows(row - 1) && this.is('leadsToInfinitive', row - 2));
+  }
+
+  /** What the following word makes of a use, or undefined where it leaves the question open. */
+  private afterwards(end: number): Slot | undefined {
+    const { stream } = this;
+    if (!followsOn(stream, end)) {
+      const sign = stream.flags[end]! & TokenFlag.word;
+      return sign === 0 && this.isComma(end) ? 'unclear' : undefined;
+    }
+    const flags = stream.flags[end]!;
+    const tag = stream.tag[end]!;
+    if ((flags & FactFlag.functionWord) !== 0) return tag === TAG.CCONJ ? 'unclear' : undefined;
+    if (tag === TAG.AUX || tag === TAG.ADV || tag === TAG.ADP || tag === TAG.PART) return undefined;
+    if (tag === TAG.VERB) return 'unclear';
+    return 'attributive';
+  }
+
+  private follows(row: number): boolean {
+    return row > 0 && followsOn(this.stream, row);
+  }
+
+  private is(name: WordClass, row: number): boolean {
+    return this.classes[name].has(this.stream.fold[row]!);
+  }
+
+  private isComma(row: number): boolean {
+    return this.stream.fold[row] === this.comma;
+  }
+
+  private isColon(row: number, blockEnd: number): boolean {
+    return (
+      row === blockEnd - 1 && (this.stream.flags[row]! & TokenFlag.word) === 0 && this.stream.tag[row] === TAG.PUNCT
+    );
+  }
+}
+
+function idsOf(vocabulary: Vocabulary, words: string): ReadonlySet<number> {
+  const ids = words.split(/\s+/).map((word) => vocabulary.find(word));
+  return new Set(ids.filter((id) => id !== undefined));
+}

@@ -1,0 +1,97 @@
+// Styles: the inflections of one way of writing together, with what its uses tell about it.
+import type { Corpus } from '../../corpus/corpus.js';
+import { TokenFlag } from '../../tokens/tokens.js';
+import { endRowOfBlock, firstRowOfBlock, isRunningText } from '../places.js';
+import type { Use } from '../places.js';
+import type { Candidate, Form, Shape } from './candidates.js';
+import type { Slot, SlotReader } from './slots.js';
+
+/** One way of writing a word or compound, all inflections together. */
+export interface Style {
+  readonly shape: Shape;
+  /** The style's singular form in lower case. */
+  readonly text: string;
+  readonly forms: readonly Form[];
+  /** Uses that count as evidence, in document order. */
+  readonly uses: readonly Use[];
+  /** Uses that count, by slot; those that stand alone as labels are left out. */
+  readonly slots: Readonly<Record<Slot, number>>;
+  /** Uses inside sentences of running text; the counts below are among them. */
+  readonly inside: number;
+  /** Every word begins with a capital. */
+  readonly capitalised: number;
+  /** Any letter is a capital. */
+  readonly withCapital: number;
+  /** A capital inside a word (ConfigMap, configMap). */
+  readonly camel: number;
+  /** A capital inside a word that begins with a small letter (configMap). */
+  readonly lowerCamel: number;
+  /** No small letter, several capitals (SLOWLOG). */
+  readonly shouted: number;
+}
+
+type Cases = Record<'inside' | 'capitalised' | 'withCapital' | 'camel' | 'lowerCamel' | 'shouted', number>;
+
+/** The styles of a candidate. Where only the plural differs (indexes, indices), each plural is a style. */
+export function stylesOf(corpus: Corpus, slots: SlotReader, candidate: Candidate): Style[] {
+  const byStyle = new Map<string, Form[]>();
+  for (const form of candidate.forms) {
+    const list = byStyle.get(form.style);
+    if (list === undefined) byStyle.set(form.style, [form]);
+    else list.push(form);
+  }
+  if (byStyle.size === 1) {
+    const plurals = candidate.forms.filter((form) => form.text !== form.style);
+    return plurals.length < 2 ? [] : plurals.map((form) => makeStyle(corpus, slots, form.text, [form]));
+  }
+  return [...byStyle].map(([text, forms]) => makeStyle(corpus, slots, text, forms));
+}
+
+function makeStyle(corpus: Corpus, reader: SlotReader, text: string, forms: readonly Form[]): Style {
+  const slots: Record<Slot, number> = { attributive: 0, predicate: 0, noun: 0, verb: 0, unclear: 0, lone: 0 };
+  const uses: Use[] = [];
+  const cases: Cases = { inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0 };
+  for (const form of forms) {
+    for (const row of form.rows) {
+      const length = form.folds.length;
+      if (isGlued(corpus, row, length)) continue;
+      const slot = reader.slotOf(row, length);
+      // An open plural before a noun is not its modifier: "two elements follow".
+      slots[slot === 'attributive' && form.shape === 'open' && form.text !== form.style ? 'unclear' : slot]++;
+      uses.push({ row, length });
+      countCase(corpus, row, length, cases);
+    }
+  }
+  uses.sort((a, b) => a.row - b.row);
+  return { shape: forms[0]!.shape, text, forms, uses, slots, ...cases };
+}
+
+function countCase(corpus: Corpus, row: number, length: number, cases: Cases): void {
+  const { stream, vocabulary } = corpus;
+  if (!isRunningText(stream, row) || (stream.flags[row]! & TokenFlag.sentenceStart) !== 0) return;
+  cases.inside++;
+  let capitals = 0;
+  for (let i = 0; i < length; i++) if (stream.spelling[row + i] !== stream.fold[row + i]) capitals++;
+  if (capitals > 0) cases.withCapital++;
+  if (capitals === length) cases.capitalised++;
+  if (capitals === 0 || length > 1) return;
+  const text = vocabulary.textOf(stream.spelling[row]!);
+  if (/\p{Ll}\p{Lu}/u.test(text)) {
+    cases.camel++;
+    if (/^\p{Ll}/u.test(text)) cases.lowerCamel++;
+  } else if (/^[^\p{Ll}]*$/u.test(text)) cases.shouted++;
+}
+
+/** True where a sign is glued to the form, as in paths, options and placeholders: it is part of a larger thing there. */
+function isGlued(corpus: Corpus, row: number, length: number): boolean {
+  const { stream, vocabulary } = corpus;
+  const isWord = (at: number): boolean => (stream.flags[at]! & TokenFlag.word) !== 0;
+  if ((stream.flags[row]! & TokenFlag.spaceBefore) === 0 && row > firstRowOfBlock(stream, row)) {
+    if (isWord(row - 1) || !/^[("'“‘[—–,;]$/u.test(vocabulary.textOf(stream.spelling[row - 1]!))) return true;
+  }
+  const end = row + length;
+  if (end < endRowOfBlock(stream, row) && (stream.flags[end]! & TokenFlag.spaceBefore) === 0) {
+    if (isWord(end) || !/^[)"'”’\].,;:!?…—–]/u.test(vocabulary.textOf(stream.spelling[end]!))) return true;
+  }
+  return false;
+}
