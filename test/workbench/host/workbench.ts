@@ -78,16 +78,19 @@ export class Workbench {
     await this.page.mouse.click(point.x, point.y);
   }
 
-  /** Rests the mouse on a word. @returns the text of the hover. A first small move is now and then not seen, so it moves again. */
-  async hover(word: string, nth = 0): Promise<string> {
+  /**
+   * Rests the mouse on a word until the hover shows `expected`: a first small move is now and then not seen, and the
+   * parts of a hover come one after the other. @returns the text of the whole hover.
+   */
+  async hover(word: string, expected: RegExp, nth = 0): Promise<string> {
     const point = await middleOfWord(this.page, word, nth);
-    const content = this.page.locator('.monaco-hover:not(.hidden) .hover-row').first();
-    await persist(5, async (attempt) => {
+    const shown = this.page.locator('.monaco-hover:not(.hidden)').filter({ hasText: expected }).first();
+    return persist(5, async (attempt) => {
       await this.page.mouse.move(5, 5);
       await this.page.mouse.move(point.x - 3 + attempt, point.y, { steps: 3 });
-      await content.waitFor({ timeout: 4000 });
+      await shown.waitFor({ timeout: 5000 });
+      return (await shown.innerText()).trim();
     });
-    return (await this.page.locator('.monaco-hover:visible').first().innerText()).trim();
   }
 
   /**
