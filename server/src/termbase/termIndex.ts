@@ -37,14 +37,17 @@ export class TermIndex {
   /**
    * The places that a text means. The very spelling wins; then a spelling that differs in its first capital, as at the start
    * of a sentence; then any capitals, unless the term is case-sensitive or its concept tells spellings apart by capitals.
-   * A verb with its object (`start session`) finds the concepts that hold for this object.
+   * A verb with its object (`start session`) finds the concepts that hold for this object; a bare verb finds those that
+   * hold for some objects only where none holds for all.
    * @param partOfSpeech leaves out the entries that state another one.
    */
   placesOf(text: string, partOfSpeech?: PartOfSpeech): readonly TermPlace[] {
     const written = termText(text);
-    const candidates = this.placesOfKey(termKey(text)).filter(
+    const possible = this.placesOfKey(termKey(text)).filter(
       ({ term }) => !partOfSpeech || !term.partOfSpeech || term.partOfSpeech === partOfSpeech,
     );
+    const general = possible.filter(({ concept, object }) => object !== undefined || concept.with.length === 0);
+    const candidates = general.length > 0 ? general : possible;
     const exact = candidates.filter((place) => spelling(place) === written);
     if (exact.length > 0) return exact;
     const free = candidates.filter(({ term }) => !term.caseSensitive);

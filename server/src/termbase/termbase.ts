@@ -119,8 +119,9 @@ export function emptyTermbase(uri: string): Termbase {
 }
 
 /**
- * Whether two entries of one spelling may stand side by side as homonyms (ISO 1087): both give a part of speech, a subject
- * or objects, and these differ, or both are case-sensitive and spelt differently.
+ * Whether two entries of one spelling may stand side by side as homonyms (ISO 1087): both give a part of speech or a
+ * subject, and these differ; or both are case-sensitive and spelt differently; or they are verbs decided for different
+ * objects, where a decision for some objects is an exception to one for all.
  */
 export function areHomonyms(
   a: { readonly term: TermEntry; readonly concept: ConceptEntry },
@@ -131,6 +132,6 @@ export function areHomonyms(
   if (differ(a.term.partOfSpeech, b.term.partOfSpeech)) return true;
   if (differ(a.concept.subject, b.concept.subject)) return true;
   if (a.term.caseSensitive && b.term.caseSensitive && a.term.text !== b.term.text) return true;
-  if (a.concept.with.length === 0 || b.concept.with.length === 0) return false;
+  if (a.concept.with.length === 0 && b.concept.with.length === 0) return false;
   return !a.concept.with.some((object) => b.concept.with.some((other) => other.key === object.key));
 }
