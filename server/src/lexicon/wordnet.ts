@@ -1,0 +1,129 @@
+// Reads the compact WordNet tables: from a word to its senses in order, from a sense to what it is linked with.
+import * as data from './data/wordnet.js';
+
+/** The parts of speech that WordNet knows. */
+export type WordNetPos = 'noun' | 'verb' | 'adjective' | 'adverb';
+
+/** All parts of speech, in a fixed order. */
+export const wordNetParts: readonly WordNetPos[] = ['noun', 'verb', 'adjective', 'adverb'];
+
+/** One part of speech, decoded on first use. */
+export interface WordNetTable {
+  /** Number of a lower-case lemma, words separated by a space; −1 when it is not there. */
+  numberOf(lemma: string): number;
+  /** Senses of a lemma's number, the commonest first. */
+  sensesOf(lemma: number): Uint32Array;
+  /** Direct hypernyms of a noun's or verb's sense; the head senses that an adjective's sense is similar to. */
+  linksOf(sense: number): Uint32Array;
+  /** Whether the dictionary itself calls two lemmas antonyms. */
+  areAntonyms(lemma1: number, lemma2: number): boolean;
+  /** Whether some words of two senses are antonyms. */
+  areOpposite(sense1: number, sense2: number): boolean;
+}
+
+const tables = new Map<WordNetPos, WordNetTable>();
+
+/** The table of one part of speech. */
+export function wordNetTable(pos: WordNetPos): WordNetTable {
+  let table = tables.get(pos);
+  if (table === undefined) {
+    table = decode(
+      data[`${pos}Lemmas`],
+      data[`${pos}Senses`],
+      data[`${pos}Links`],
+      data[`${pos}OppositeWords`],
+      data[`${pos}OppositeSenses`],
+    );
+    tables.set(pos, table);
+  }
+  return table;
+}
+
+function decode(lemmas: string, senses: string, links: string, words: string, opposed: string): WordNetTable {
+  const starts = lineStarts(lemmas);
+  const senseLists = decodeLists(senses);
+  const linkLists = decodeLists(links);
+  const antonyms = decodePairs(words);
+  const opposites = decodePairs(opposed);
+  return {
+    numberOf: (lemma) => findLine(lemmas, starts, lemma),
+    sensesOf: (lemma) => senseLists.values.subarray(senseLists.starts[lemma], senseLists.starts[lemma + 1]),
+    linksOf: (sense) => linkLists.values.subarray(linkLists.starts[sense], linkLists.starts[sense + 1]),
+    areAntonyms: (lemma1, lemma2) => hasPair(antonyms, lemma1, lemma2),
+    areOpposite: (sense1, sense2) => hasPair(opposites, sense1, sense2),
+  };
+}
+
+/** Where each line starts, and one past the end of the text and its absent last line break. */
+function lineStarts(text: string): Uint32Array {
+  const starts = [0];
+  for (let at = text.indexOf('\n'); at >= 0; at = text.indexOf('\n', at + 1)) starts.push(at + 1);
+  starts.push(text.length + 1);
+  return Uint32Array.from(starts);
+}
+
+function findLine(text: string, starts: Uint32Array, wanted: string): number {
+  let low = 0;
+  let high = starts.length - 2;
+  while (low <= high) {
+    const middle = (low + high) >> 1;
+    const line = text.slice(starts[middle], (starts[middle + 1] ?? 0) - 1);
+    if (line === wanted) return middle;
+    if (line < wanted) low = middle + 1;
+    else high = middle - 1;
+  }
+  return -1;
+}
+
+/** Lists separated by a space; in a list, "!" is the next number never met before, else three digits are a number. */
+function decodeLists(text: string): { starts: Uint32Array; values: Uint32Array } {
+  const values: number[] = [];
+  const starts: number[] = [0];
+  let unmet = 0;
+  for (let at = 0; at < text.length;) {
+    const mark = text[at];
+    if (mark === ' ') {
+      starts.push(values.length);
+      at += 1;
+    } else if (mark === '!') {
+      values.push(unmet++);
+      at += 1;
+    } else {
+      values.push(numberAt(text, at));
+      at += 3;
+    }
+  }
+  starts.push(values.length);
+  return { starts: Uint32Array.from(starts), values: Uint32Array.from(values) };
+}
+
+/** Pairs as sorted numbers `smaller · 2²⁰ + larger`; numbers are below 85³ < 2²⁰. */
+function decodePairs(text: string): Float64Array {
+  const pairs = new Float64Array(text.length / 6);
+  for (let i = 0; i < pairs.length; i++) pairs[i] = numberAt(text, 6 * i) * 0x100000 + numberAt(text, 6 * i + 3);
+  return pairs.sort();
+}
+
+function hasPair(pairs: Float64Array, a: number, b: number): boolean {
+  const wanted = Math.min(a, b) * 0x100000 + Math.max(a, b);
+  let low = 0;
+  let high = pairs.length - 1;
+  while (low <= high) {
+    const middle = (low + high) >> 1;
+    const pair = pairs[middle] ?? 0;
+    if (pair === wanted) return true;
+    if (pair < wanted) low = middle + 1;
+    else high = middle - 1;
+  }
+  return false;
+}
+
+function numberAt(text: string, at: number): number {
+  return (digitAt(text, at) * 85 + digitAt(text, at + 1)) * 85 + digitAt(text, at + 2);
+}
+
+/** Digits run from "%" in rising order of code and leave out the backslash and the grave accent. */
+function digitAt(text: string, at: number): number {
+  const code = text.charCodeAt(at);
+  return code - 37 - (code > 92 ? 1 : 0) - (code > 96 ? 1 : 0);
+}
