@@ -93,3 +93,12 @@ export function makeTerm(
 export function byUses(a: QuestionTerm, b: QuestionTerm): number {
   return b.uses - a.uses || compareCodeUnits(a.text, b.text);
 }
+
+/** The forms, singular and plural, that share a word's {@link singularKey}; some of them may be no words. */
+export function numberForms(word: string): string[] {
+  const key = singularKey(word);
+  const forms = new Set([word, key, `${key}s`, `${key}es`]);
+  if (key.endsWith('y')) forms.add(`${key.slice(0, -1)}ies`).add(`${key.slice(0, -1)}ie`);
+  for (const [plural, singular] of IRREGULAR) if (singular === key) forms.add(plural);
+  return [...forms].filter((form) => singularKey(form) === key);
+}

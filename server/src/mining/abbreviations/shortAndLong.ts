@@ -1,0 +1,148 @@
+// A short form and its one expansion, both in free use: asked where the long form goes on after it was explained.
+import type { Corpus } from '../../corpus/corpus.js';
+import { Zone } from '../../prose/zones.js';
+import { countDocuments, examplePlaces } from '../places.js';
+import type { Use } from '../places.js';
+import type { Question, QuestionTerm, Reason } from '../question.js';
+import { byUses, displayText, makeTerm, pages, times } from '../wording.js';
+import type { Explained, Expansion } from './explained.js';
+import { formsOfLong, formsOfShort } from './longForms.js';
+import type { FormUses } from './longForms.js';
+
+/** The least that is asked about: uses of the short form, and free uses of the long one. */
+const LEAST = { short: 2, freeOnItsPages: 2, free: 3, freePages: 3 } as const;
+
+/** How sure an explanation makes that both forms name one thing. */
+const CONFIDENCE = { once: 0.85, more: 0.92 } as const;
+
+/** How the long form is used beside the short one. */
+export interface FreeUse {
+  /** Free uses on pages that use the short form, and the number of these pages. */
+  readonly onItsPages: readonly Use[];
+  /** Free uses on any page. */
+  readonly all: readonly Use[];
+}
+
+/** The question about a short form and its expansion, or undefined where the documents explain it and go on with it. */
+export function askExplained(
+  corpus: Corpus,
+  { short, expansions }: Explained,
+  others: readonly Explained[],
+): Question | undefined {
+  const expansion = expansions[0]!;
+  const shortForms = formsOfShort(corpus, short);
+  const shortUses = usesOf(shortForms);
+  if (shortUses.length < LEAST.short) return undefined;
+  const longForms = formsOfLong(corpus, expansion.words);
+  const longUses = withoutLonger(corpus, usesOf(longForms), expansion, others);
+  const free = freeUses(corpus, longUses, shortUses, expansion);
+  const freePages = countDocuments(corpus.stream, free.all);
+  const enough =
+    free.onItsPages.length >= LEAST.freeOnItsPages || (free.all.length >= LEAST.free && freePages >= LEAST.freePages);
+  if (!enough) return undefined;
+  const kept = new Set(longUses.map((use) => use.row));
+  const sides = [
+    { term: termOf(corpus, shortForms, short), uses: shortUses },
+    {
+      term: termOf(corpus, longForms.map((form) => ({ ...form, uses: form.uses.filter((use) => kept.has(use.row)) }))),
+      uses: free.all,
+    },
+  ].sort((a, b) => byUses(a.term, b.term));
+  const confidence = expansion.definitions.length > 1 ? CONFIDENCE.more : CONFIDENCE.once;
+  return {
+    id: `abbreviation:${sides.map(({ term }) => term.text).join('|')}`,
+    kind: 'abbreviation',
+    confidence,
+    worth: confidence * Math.min(free.all.length, shortUses.length),
+    terms: sides.map(({ term }) => term),
+    reasons: reasonsOf(corpus, short, expansion, free, longUses),
+    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
+  };
+}
+
+/** Uses that are no explanation, not the first on a page that uses the short form, and in no heading. */
+export function freeUses(
+  corpus: Corpus,
+  long: readonly Use[],
+  short: readonly Use[],
+  expansion: Expansion,
+): FreeUse {
+  const { stream } = corpus;
+  const explained = new Set(expansion.definitions.map((definition) => definition.longRow));
+  const shortPages = new Set(short.map((use) => stream.documentOf(use.row)));
+  const introduced = new Set<number>();
+  const onItsPages: Use[] = [];
+  const all: Use[] = [];
+  for (const use of long) {
+    if ((stream.zones[use.row]! & (Zone.heading | Zone.frontMatter)) !== 0) continue;
+    const page = stream.documentOf(use.row);
+    const first = shortPages.has(page) && !introduced.has(page);
+    introduced.add(page);
+    if (first || explained.has(use.row)) continue;
+    all.push(use);
+    if (shortPages.has(page)) onItsPages.push(use);
+  }
+  return { onItsPages, all };
+}
+
+/** Uses that are not part of a longer long form that has a short form of its own (custom resource definition). */
+function withoutLonger(
+  corpus: Corpus,
+  uses: readonly Use[],
+  expansion: Expansion,
+  others: readonly Explained[],
+): Use[] {
+  const text = ` ${expansion.words.join(' ')} `;
+  const inside = new Set<number>();
+  for (const other of others) {
+    for (const { words } of other.expansions) {
+      if (words.length <= expansion.words.length || !` ${words.join(' ')} `.includes(text)) continue;
+      for (const { row, length } of usesOf(formsOfLong(corpus, words))) {
+        for (let i = 0; i < length; i++) inside.add(row + i);
+      }
+    }
+  }
+  return uses.filter((use) => !inside.has(use.row));
+}
+
+/** All uses of several forms, in document order. */
+export function usesOf(forms: readonly FormUses[]): Use[] {
+  return forms.flatMap((form) => form.uses).sort((a, b) => a.row - b.row);
+}
+
+/** A term over several forms; `lead` names it where one of the forms reads so. */
+export function termOf(corpus: Corpus, forms: readonly FormUses[], lead?: string): QuestionTerm {
+  const texts = forms
+    .filter((form) => form.uses.length > 0)
+    .map((form) => ({ text: displayText(corpus.stream, corpus.vocabulary, form.uses), count: form.uses.length }));
+  const documents = countDocuments(corpus.stream, usesOf(forms));
+  return makeTerm(texts, documents, texts.some(({ text }) => text === lead) ? lead : undefined);
+}
+
+function reasonsOf(
+  corpus: Corpus,
+  short: string,
+  expansion: Expansion,
+  free: FreeUse,
+  longUses: readonly Use[],
+): Reason[] {
+  const { stream } = corpus;
+  const long = displayText(stream, corpus.vocabulary, longUses);
+  const explained = expansion.definitions.length;
+  const reasons: Reason[] = [
+    { kind: 'explained', text: `the documents explain “${short}” as “${long}” ${times(explained)}`, value: explained },
+    {
+      kind: 'free-use',
+      text: `“${long}” is spelled out ${times(free.all.length)} on ${pages(countDocuments(stream, free.all))} where it is no explanation`,
+      value: free.all.length,
+    },
+  ];
+  if (free.onItsPages.length > 0) {
+    reasons.push({
+      kind: 'mixed-page',
+      text: `${pages(countDocuments(stream, free.onItsPages))} go on with “${long}” beside “${short}”`.replace('1 page go ', '1 page goes '),
+      value: free.onItsPages.length,
+    });
+  }
+  return reasons;
+}
