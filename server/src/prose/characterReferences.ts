@@ -2,7 +2,6 @@
 import { characterEntities } from 'character-entities';
 import { OPAQUE } from './prose.js';
 
-
 /** The form that CommonMark 0.31.2 allows ("Entity and numeric character references"). */
 const NUMERIC = /^#(?:\d{1,7}|[xX][\da-fA-F]{1,6})$/;
 

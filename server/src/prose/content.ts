@@ -3,6 +3,8 @@ import { OPAQUE, type BlockContent, type BlockKind, type LinkMark, type ZoneMark
 import type { ZoneSet } from './zones.js';
 
 const LETTER_OR_DIGIT = /[\p{L}\p{N}]/u;
+const NO_MARKS: readonly ZoneMark[] = [];
+const NO_LINKS: readonly LinkMark[] = [];
 
 /** What a block is, apart from its text. */
 export interface BlockRole {
@@ -19,8 +21,8 @@ export interface BlockRole {
 export class ContentBuilder {
   private text = '';
   private readonly pieces: number[] = [];
-  private readonly marks: ZoneMark[] = [];
-  private readonly links: LinkMark[] = [];
+  private marks: ZoneMark[] | undefined;
+  private links: LinkMark[] | undefined;
   private zones: ZoneSet = 0;
   private zonesFrom = 0;
   private gapFrom = -1;
@@ -78,7 +80,7 @@ export class ContentBuilder {
     if (zones === this.zones) return;
     const at = this.length;
     if (this.zones !== 0 && at > this.zonesFrom) {
-      this.marks.push({ start: this.zonesFrom, end: at, zones: this.zones });
+      (this.marks ??= []).push({ start: this.zonesFrom, end: at, zones: this.zones });
     }
     this.zones = zones;
     this.zonesFrom = at;
@@ -86,20 +88,22 @@ export class ContentBuilder {
 
   /** Records that the text from `start` to here is a link's. */
   link(start: number, target: string): void {
-    if (this.text.length > start) this.links.push({ start, end: this.text.length, target });
+    if (this.text.length > start) (this.links ??= []).push({ start, end: this.text.length, target });
   }
 
   /** The finished content, or undefined where the block holds no word. `end` is the source offset of the block's end. */
   finish(role: BlockRole, end: number): BlockContent | undefined {
     this.gapFrom = -1;
     this.setZones(0);
-    if (!LETTER_OR_DIGIT.test(this.text)) return undefined;
+    if (!hasWord(this.text)) return undefined;
     return {
-      ...role,
+      kind: role.kind,
+      level: role.level,
       text: this.text,
-      marks: this.marks,
-      links: this.links,
-      pieces: Uint32Array.from(this.pieces),
+      zones: role.zones,
+      marks: this.marks ?? NO_MARKS,
+      links: this.links ?? NO_LINKS,
+      pieces: new Uint32Array(this.pieces),
       sourceLength: end - this.start,
     };
   }
@@ -119,4 +123,14 @@ export class ContentBuilder {
     }
     this.text += ' ';
   }
+}
+
+/** True where the text holds a letter or a digit. Most texts show one at once, in ASCII. */
+function hasWord(text: string): boolean {
+  for (let i = 0; i < text.length; i++) {
+    const unit = text.charCodeAt(i);
+    if (unit > 127) return LETTER_OR_DIGIT.test(text);
+    if ((unit >= 97 && unit <= 122) || (unit >= 65 && unit <= 90) || (unit >= 48 && unit <= 57)) return true;
+  }
+  return false;
 }

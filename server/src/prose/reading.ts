@@ -15,35 +15,46 @@ export interface Change {
   readonly newEnd: number;
 }
 
+/** Units that are compared at once: comparing slices costs far less than comparing units one by one. */
+const STRIDE = 512;
+
 /** The one stretch that covers all differences between two texts, or undefined where they are equal. */
 export function changeBetween(before: string, after: string): Change | undefined {
   if (before === after) return undefined;
   const shorter = Math.min(before.length, after.length);
   let start = 0;
-  while (start < shorter && before.charCodeAt(start) === after.charCodeAt(start)) start++;
-  let oldEnd = before.length;
-  let newEnd = after.length;
-  while (oldEnd > start && newEnd > start && before.charCodeAt(oldEnd - 1) === after.charCodeAt(newEnd - 1)) {
-    oldEnd--;
-    newEnd--;
+  while (start + STRIDE <= shorter && before.slice(start, start + STRIDE) === after.slice(start, start + STRIDE)) {
+    start += STRIDE;
   }
-  return { start, oldEnd, newEnd };
+  while (start < shorter && before.charCodeAt(start) === after.charCodeAt(start)) start++;
+  const most = shorter - start;
+  let same = 0;
+  while (same + STRIDE <= most && tail(before, same) === tail(after, same)) same += STRIDE;
+  while (same < most && before.charCodeAt(before.length - same - 1) === after.charCodeAt(after.length - same - 1))
+    same++;
+  return { start, oldEnd: before.length - same, newEnd: after.length - same };
+}
+
+/** The stride of a text that ends `skip` units before its end. */
+function tail(text: string, skip: number): string {
+  return text.slice(text.length - skip - STRIDE, text.length - skip);
 }
 
 /** The blocks of `next`, with the content objects of `previous` wherever equal ones stand at either end of the document. */
 export function keepContents(previous: readonly ProseBlock[], next: readonly ProseBlock[]): ProseBlock[] {
   const kept = [...next];
   const shorter = Math.min(previous.length, next.length);
+  const keep = (old: ProseBlock, at: number): boolean => {
+    const { start, content } = next[at]!;
+    if (content === old.content) return true;
+    if (!sameContent(content, old.content)) return false;
+    kept[at] = { start, content: old.content };
+    return true;
+  };
   let head = 0;
-  for (; head < shorter && sameContent(previous[head]!.content, next[head]!.content); head++) {
-    kept[head] = { start: next[head]!.start, content: previous[head]!.content };
-  }
-  for (let tail = 1; tail <= shorter - head; tail++) {
-    const before = previous[previous.length - tail]!;
-    const at = next.length - tail;
-    if (!sameContent(before.content, next[at]!.content)) break;
-    kept[at] = { start: next[at]!.start, content: before.content };
-  }
+  while (head < shorter && keep(previous[head]!, head)) head++;
+  let tail = 0;
+  while (tail < shorter - head && keep(previous[previous.length - tail - 1]!, next.length - tail - 1)) tail++;
   return kept;
 }
 

@@ -28,7 +28,7 @@ export function readInline(cx: InlineContext, cursor: TreeCursor, out: ContentBu
 
 class InlineReader {
   private at: number;
-  private readonly html: InlineHtml;
+  private html: InlineHtml | undefined;
 
   constructor(
     private readonly cx: InlineContext,
@@ -38,12 +38,11 @@ class InlineReader {
     private readonly end: number,
   ) {
     this.at = from;
-    this.html = new InlineHtml(cx.text, out, end);
   }
 
   read(): void {
     this.children(this.end);
-    this.html.close();
+    this.html?.close();
   }
 
   /** Reads the children of the cursor's node, and the text between and after them up to `end`. */
@@ -93,6 +92,7 @@ class InlineReader {
         this.out.space(from, to);
         break;
       case Role.htmlTag:
+        this.html ??= new InlineHtml(this.cx.text, this.out, this.end);
         this.at = this.html.tag(from, to);
         return;
       default:

@@ -17,7 +17,7 @@ const ZONES: Partial<Record<string, ZoneSet>> = { kbd: Zone.uiLabel, q: Zone.quo
 export class InlineHtml {
   private zones: ZoneSet = 0;
   /** Names that nothing closes in the rest of the block. */
-  private readonly unclosed = new Set<string>();
+  private unclosed: Set<string> | undefined;
   private anchor: { start: number; target: string } | undefined;
 
   constructor(
@@ -74,12 +74,12 @@ export class InlineHtml {
 
   /** The end of the element whose opening tag ends at `from`; the tag's own end where nothing closes it in this block. */
   private elementEnd(name: string, from: number): number {
-    if (this.unclosed.has(name)) return from;
+    if (this.unclosed?.has(name) === true) return from;
     const closing = new RegExp(`</${name}\\s*>`, 'gi');
     closing.lastIndex = from;
     const found = closing.exec(this.text.slice(0, this.end));
     if (found) return found.index + found[0].length;
-    this.unclosed.add(name);
+    (this.unclosed ??= new Set()).add(name);
     return from;
   }
 }

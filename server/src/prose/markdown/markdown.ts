@@ -50,7 +50,7 @@ export function rereadMarkdown(previous: MarkdownReading, source: SourceText): M
   if (!insideFrontMatter && !behindFrontMatter) return rereadWhole(previous, source);
   if (insideFrontMatter) {
     const units = previous.units.map((unit) => shifted(unit, shift));
-    return assemble(source, text, frontMatter, units, previous.definitions);
+    return assemble(source, text, frontMatter, units, previous.definitions, previous.prose.blocks);
   }
   return rereadBody(previous, source, text, from, change) ?? rereadWhole(previous, source);
 }

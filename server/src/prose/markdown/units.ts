@@ -82,10 +82,11 @@ export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, str
 export function shifted(unit: Unit, by: number): Unit {
   if (by === 0) return unit;
   return {
-    ...unit,
     lineStart: unit.lineStart + by,
     end: unit.end + by,
     blocks: unit.blocks.map(({ start, content }) => ({ start: start + by, content })),
+    definitions: unit.definitions,
+    usesDefinitions: unit.usesDefinitions,
     problems: unit.problems.map(({ span, message }) => ({
       span: { start: span.start + by, end: span.end + by },
       message,

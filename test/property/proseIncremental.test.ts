@@ -1,0 +1,182 @@
+// Reading again after an edit gives what reading the whole text gives, over random edits of Markdown.
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { read, reread, startReading } from '../../server/src/prose/read.js';
+import type { SourceText } from '../../server/src/text/sourceText.js';
+import { PAGE } from '../unit/prose/page.js';
+
+const SNIPPETS = [
+  ...[
+    '\n',
+    '\n\n',
+    ' ',
+    '    ',
+    '\t',
+    '\r\n',
+    '\r',
+    '  \n',
+    '\\\n',
+    '-',
+    '*',
+    '**',
+    '_',
+    '`',
+    '```\n',
+    '~~~\n',
+    '>',
+    '> ',
+    '#',
+  ],
+  ...[
+    '## ',
+    '- ',
+    '1. ',
+    '  - ',
+    '+ ',
+    '|',
+    '| a | b |\n',
+    '|---|---|\n',
+    '---\n',
+    '===\n',
+    '[',
+    ']',
+    '](',
+    '](x "y")',
+    '[r]',
+  ],
+  ...[
+    '[r]: /elsewhere\n',
+    '[new]: /new\n',
+    '[^1]: ',
+    '[^1]',
+    '<',
+    '<!--',
+    '-->',
+    '<div>\n',
+    '</div>',
+    '<pre>',
+    '</pre>\n',
+    '<kbd>',
+  ],
+  ...[
+    '</kbd>',
+    '<code>',
+    '{{ x }}',
+    '{% if y %}',
+    '{: .note }',
+    '!!! warning "Take care"\n',
+    '    body\n',
+    ':::danger\n',
+    ':::\n',
+  ],
+  ...[
+    '=== "Tab"\n',
+    '> [!CAUTION]\n',
+    '"',
+    'four words in quotes',
+    '&amp;',
+    '&#x41;',
+    'https://a.example/b_c',
+    'me@a.example',
+    ':smile:',
+  ],
+  ...[
+    'word',
+    'API key',
+    'naïve',
+    '漢字かな',
+    '🙂',
+    '👩‍🚀',
+    '\u0301',
+    '\uFEFF',
+    '\uFFFC',
+    '\0',
+    '\ud800',
+    '---\ntitle: New\n---\n',
+    'title: x\n',
+  ],
+];
+
+function markdown(text: string): SourceText {
+  return { uri: 'file:///page.md', format: 'markdown', text };
+}
+
+interface Edit {
+  readonly at: number;
+  readonly remove: number;
+  readonly insert: readonly string[];
+}
+
+const edits = fc.array(
+  fc.record<Edit>({
+    at: fc.double({ min: 0, max: 1, noNaN: true }),
+    remove: fc.oneof(
+      { weight: 3, arbitrary: fc.constant(0) },
+      fc.integer({ min: 1, max: 12 }),
+      fc.integer({ min: 1, max: 300 }),
+    ),
+    insert: fc.array(fc.constantFrom(...SNIPPETS), { maxLength: 4 }),
+  }),
+  { minLength: 1, maxLength: 8 },
+);
+
+function apply(text: string, { at, remove, insert }: Edit): string {
+  const offset = Math.floor(at * text.length);
+  return text.slice(0, offset) + insert.join('') + text.slice(offset + remove);
+}
+
+function expectIncrementalEqualsWhole(start: string, script: readonly Edit[]): void {
+  let text = start;
+  let reading = startReading(markdown(text));
+  for (const edit of script) {
+    text = apply(text, edit);
+    const before = reading;
+    const proseBefore = before.prose;
+    reading = reread(reading, markdown(text));
+    const fresh = JSON.stringify(read(markdown(text)));
+    expect(JSON.stringify(reading.prose) === fresh, JSON.stringify({ text, edit })).toBe(true);
+    expect(before.prose).toBe(proseBefore);
+  }
+}
+
+describe('reread', () => {
+  it('equals reading the whole page after random edits of a realistic page', () => {
+    fc.assert(
+      fc.property(edits, (script) => expectIncrementalEqualsWhole(PAGE, script)),
+      { numRuns: 250 },
+    );
+  });
+
+  it('equals reading the whole page with CRLF line breaks', () => {
+    fc.assert(
+      fc.property(edits, (script) => expectIncrementalEqualsWhole(PAGE.replaceAll('\n', '\r\n'), script)),
+      { numRuns: 80 },
+    );
+  });
+
+  it('equals reading the whole of texts made of markup alone', () => {
+    const soup = fc.array(fc.constantFrom(...SNIPPETS), { maxLength: 60 }).map((parts) => parts.join(''));
+    fc.assert(
+      fc.property(soup, edits, (text, script) => expectIncrementalEqualsWhole(text, script)),
+      { numRuns: 400 },
+    );
+  });
+
+  it('keeps the content objects of the body when the title changes', () => {
+    const before = startReading(markdown(PAGE));
+    const after = reread(before, markdown(PAGE.replace('buoy gateway', 'new gateway')));
+    const old = new Set(before.prose.blocks.map(({ content }) => content));
+    const fresh = after.prose.blocks.filter(({ content }) => !old.has(content));
+    expect(fresh.map(({ content }) => content.text)).toEqual(['Keys of the new gateway']);
+  });
+
+  it('keeps the content objects of the blocks that an edit leaves alone', () => {
+    const before = startReading(markdown(PAGE));
+    const at = PAGE.indexOf('wait for five');
+    const after = reread(before, markdown(`${PAGE.slice(0, at)}always ${PAGE.slice(at)}`));
+    const old = new Set(before.prose.blocks.map(({ content }) => content));
+    const fresh = after.prose.blocks.filter(({ content }) => !old.has(content));
+    expect(fresh.map(({ content }) => content.text)).toEqual([expect.stringContaining('always wait for five')]);
+    expect(after.prose.blocks.length).toBe(before.prose.blocks.length);
+  });
+});
