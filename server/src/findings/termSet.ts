@@ -1,0 +1,86 @@
+// The compiled terms: one matcher over all statuses, so that the longest term decides, and what the rules ask of each term.
+import { FORMS, inflectsAs, termForms } from '../rewrite/inflect.js';
+import type { CheckedTerm } from './checkedTerm.js';
+import { foldText } from './foldWord.js';
+import { ObjectSet } from './objectOfVerb.js';
+import { TermMatcher, type OnMatch } from './termMatcher.js';
+
+/** A term with what its rules need at each match. */
+export interface CompiledTerm {
+  readonly checked: CheckedTerm;
+  /** How it inflects and, for verbs, must be used. */
+  readonly as: 'noun' | 'verb' | 'none';
+  /** Matches are compared in exact case: asked for, or because another term differs from this one in case alone. */
+  readonly caseSensitive: boolean;
+  /** A word of its own whose spelling is also a form of a term of another part of speech. */
+  readonly ambiguous: boolean;
+  readonly objects: ObjectSet | undefined;
+}
+
+/** A list of terms ready for checking. Immutable; equal inputs give equal findings. */
+export class TermSet {
+  readonly terms: readonly CompiledTerm[];
+  private readonly matcher: TermMatcher;
+
+  constructor(terms: readonly CheckedTerm[]) {
+    const spellings = new Map<string, Set<string>>();
+    const uses = new Map<string, Set<string>>();
+    for (const { text, partOfSpeech } of terms) {
+      gather(spellings, foldText(text), text);
+      for (const form of termForms(text, partOfSpeech))
+        gather(uses, foldText(form.text), inflectsAs(text, partOfSpeech));
+    }
+    this.terms = terms.map((checked): CompiledTerm => {
+      const { text, partOfSpeech, withObjects, caseSensitive } = checked;
+      return {
+        checked,
+        as: inflectsAs(text, partOfSpeech),
+        caseSensitive: caseSensitive === true || spellings.get(foldText(text))!.size > 1,
+        ambiguous: termForms(text, partOfSpeech).some((form) => uses.get(foldText(form.text))!.size > 1),
+        objects: withObjects && withObjects.length > 0 ? new ObjectSet(withObjects) : undefined,
+      };
+    });
+    this.matcher = new TermMatcher(
+      this.terms.map(({ checked: { text, partOfSpeech }, caseSensitive }) => ({
+        text,
+        caseSensitive,
+        ...(partOfSpeech === undefined ? {} : { partOfSpeech }),
+      })),
+    );
+  }
+
+  /** Reports the terms of a text as {@link TermMatcher.scan} does. */
+  scan(text: string, onMatch: OnMatch): void {
+    this.matcher.scan(text, 0, text.length, onMatch);
+  }
+
+  /** True where a term that is in use (not deprecated, not asked about) begins within `[start, end)` and runs beyond `end`. */
+  overlapsTermInUse(text: string, start: number, end: number): boolean {
+    let found = false;
+    for (let from = nextWord(text, start, end); from < end && !found; from = nextWord(text, from, end)) {
+      this.matcher.scan(text, from, Math.min(text.length, end + 200), (index, at, stop) => {
+        const { status } = this.terms[index]!.checked;
+        if (at < end && stop > end && status !== 'deprecated' && status !== 'undecided') found = true;
+      });
+    }
+    return found;
+  }
+}
+
+/** The form behind a form index. */
+export function formAt(index: number): (typeof FORMS)[number] {
+  return FORMS[index]!;
+}
+
+function nextWord(text: string, from: number, end: number): number {
+  let at = from;
+  while (at < end && /[\p{L}\p{N}_]/u.test(text.charAt(at))) at++;
+  while (at < end && !/[\p{L}\p{N}_]/u.test(text.charAt(at))) at++;
+  return at;
+}
+
+function gather(groups: Map<string, Set<string>>, key: string, value: string): void {
+  const group = groups.get(key);
+  if (group) group.add(value);
+  else groups.set(key, new Set([value]));
+}
