@@ -15,7 +15,7 @@ export function lemmaOf(word: string, tag: Tag, lexicon: WinkLexicon): string {
   if (KEPT.has(word)) return word;
   const asTag: Tag = tag === 'PROPN' ? 'NOUN' : tag;
   const known = lexicon.lemma(word, asTag);
-  if (known !== undefined) return known;
+  if (known !== undefined) return asTag === 'VERB' ? withFinalE(word, known, lexicon) : known;
   const hyphen = word.lastIndexOf('-');
   if (hyphen > 0 && hyphen < word.length - 1) {
     return word.slice(0, hyphen + 1) + lemmaOf(word.slice(hyphen + 1), tag, lexicon);
@@ -25,9 +25,17 @@ export function lemmaOf(word: string, tag: Tag, lexicon: WinkLexicon): string {
     const rest = lexicon.lemma(word.slice(prefix[0].length), asTag);
     if (rest !== undefined && (asTag === 'NOUN' || asTag === 'VERB')) return prefix[0] + rest;
   }
-  if (asTag === 'NOUN') return singular(word);
+  if (tag === 'NOUN') return singular(word);
   if (asTag === 'VERB') return baseVerb(word, lexicon);
   return word;
+}
+
+/**
+ * *tuning* is of *tune*, not of *tun*, which would double its consonant: a single short syllable left undoubled has lost an e.
+ */
+function withFinalE(word: string, lemma: string, lexicon: WinkLexicon): string {
+  if (!/^[^aeiou]*[aeiou][^aeiouwxy]$/.test(lemma) || !lexicon.isBaseForm(lemma + 'e', 'VERB')) return lemma;
+  return word === lemma + 'ing' || word === lemma + 'ed' ? lemma + 'e' : lemma;
 }
 
 function singular(word: string): string {

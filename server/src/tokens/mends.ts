@@ -1,7 +1,7 @@
 // Mends of parts of speech that a general tagger gets wrong in instructions.
 import { BEFORE_BASE_FORM, DETERMINERS, OPENING_NOUNS } from './closedWords.js';
 import type { WordForm } from './shownForms.js';
-import { TAG, type Tag, TokenFlag } from './tokens.js';
+import { TAG, TokenFlag } from './tokens.js';
 import type { WinkLexicon } from './winkLexicon.js';
 
 /** The rows of one block, as the mends see them: `forms` has a form for words alone. */
@@ -11,44 +11,87 @@ export interface TaggedRows {
   readonly forms: readonly (WordForm | undefined)[];
 }
 
+const { NOUN, PROPN, VERB, ADJ, AUX, ADV, PART, PRON, NUM, PUNCT, SYM, DET, OPAQUE } = TAG;
+/** Determiners that are never pronouns: what stands between one of them and a noun describes the noun. */
 const CERTAIN_DETERMINERS = new Set('the a an its your our their my his every another no'.split(' '));
-const { NOUN, PROPN, VERB, ADJ, AUX, ADV, PART, PRON } = TAG;
 const FULL_OR_AUXILIARY = new Set('have has had having do does did doing done'.split(' '));
-/** How many adverbs and pronouns may stand between an auxiliary and its verb: `do you not always want`. */
+/** Verbs whose object a bare verb follows: *let the user choose*. */
+const BEFORE_BARE_VERB = new Set(
+  'let lets letting make makes making made help helps helping have has see watch'.split(' '),
+);
+/** How far an auxiliary's verb may be: `do you not always want`. */
 const REACH = 4;
 
 /**
- * Changes tags in place: an imperative noun at a sentence's start before a determiner is a verb; so is a noun between *to* or a modal
- * and a determiner; a verb between a determiner and a noun is an adjective; *have* and *do* that help no verb are verbs.
+ * Changes tags in place, from left to right:
+ * an imperative noun at a sentence's start before a determiner is a verb; so is a noun between *to* or a modal and a determiner;
+ * a noun in -ing before a determiner is a verb with its object; a verb between a determiner and a noun is an adjective;
+ * *have* and *do* that help no verb are verbs.
  */
 export function mendTags({ tag, flags, forms }: TaggedRows, lexicon: WinkLexicon): void {
-  const last = tag.length - 1;
   let opening = false;
-  for (let row = 0; row < last; row++) {
+  for (let row = 0; row < tag.length; row++) {
     if ((flags[row]! & TokenFlag.sentenceStart) !== 0) opening = true;
     const form = forms[row];
-    if (form === undefined) continue;
-    const isOpening = opening;
-    opening = false;
     const now = tag[row];
+    if (form === undefined) {
+      // A list's number and an opening bracket leave the sentence's first word to come.
+      if (now !== NUM && now !== PUNCT && now !== SYM) opening = false;
+      continue;
+    }
     if (now === NOUN || now === PROPN) {
-      const next = forms[row + 1];
-      const determined = next !== undefined && DETERMINERS.has(next.lower);
-      const before = row === 0 ? undefined : forms[row - 1];
-      const governed = before !== undefined && now === NOUN && BEFORE_BASE_FORM.has(before.lower);
-      if (governed && (determined || before.lower !== 'to') && mayBeBaseVerb(form, lexicon)) tag[row] = VERB;
-      else if (isOpening && determined && !OPENING_NOUNS.has(form.lower) && mayBeBaseVerb(form, lexicon))
-        tag[row] = VERB;
+      const before = row === 0 ? undefined : forms[row - 1]?.lower;
+      if (isVerbInDisguise(form, now, before, forms[row + 1]?.lower, opening, lexicon)) tag[row] = VERB;
     } else if (now === AUX) {
       if (FULL_OR_AUXILIARY.has(form.lower) && !helps(tag, forms, row)) tag[row] = VERB;
     } else if (now === VERB && row > 0 && (tag[row + 1] === NOUN || tag[row + 1] === PROPN)) {
-      const before = forms[row - 1];
-      if (before !== undefined && CERTAIN_DETERMINERS.has(before.lower)) tag[row] = ADJ;
+      if (CERTAIN_DETERMINERS.has(forms[row - 1]?.lower ?? '')) tag[row] = ADJ;
     }
+    if (tag[row] === VERB && isHeadNoun({ tag, flags, forms }, row, lexicon)) tag[row] = NOUN;
+    opening = false;
   }
 }
 
-/** True where a verb comes after the auxiliary at a row, with nothing between but adverbs, negation and pronouns, or nothing at all comes. */
+/**
+ * True for a base form that ends a noun phrase in the singular, as in "the replica set of": as a verb it would not agree with its subject.
+ * After an auxiliary or a causative ("let the user set") the base form is right.
+ */
+function isHeadNoun({ tag, forms }: TaggedRows, row: number, lexicon: WinkLexicon): boolean {
+  const before = row === 0 ? undefined : tag[row - 1];
+  if (before !== NOUN && before !== PROPN && before !== OPAQUE) return false;
+  const { lower } = forms[row]!;
+  if (!lexicon.isBaseForm(lower, 'NOUN') || !lexicon.isBaseForm(lower, 'VERB') || /(?:s|ing)$/.test(lower))
+    return false;
+  if (forms[row - 1]?.lower.endsWith('s') === true || forms[row + 1]?.lower === 'to') return false;
+  const next = tag[row + 1];
+  if (next === DET || next === PRON || next === NUM || next === ADJ) return false;
+  let at = row - 1;
+  while (at > 0 && at > row - REACH && (tag[at] === NOUN || tag[at] === PROPN || tag[at] === OPAQUE || tag[at] === ADJ))
+    at--;
+  if (!CERTAIN_DETERMINERS.has(forms[at]?.lower ?? '')) return false;
+  const governor = at === 0 ? undefined : forms[at - 1];
+  return governor === undefined || (tag[at - 1] !== AUX && !BEFORE_BARE_VERB.has(governor.lower));
+}
+
+function isVerbInDisguise(
+  form: WordForm,
+  now: number,
+  before: string | undefined,
+  next: string | undefined,
+  opening: boolean,
+  lexicon: WinkLexicon,
+): boolean {
+  const determined = next !== undefined && DETERMINERS.has(next);
+  if (now === NOUN && before !== undefined && BEFORE_BASE_FORM.has(before)) {
+    // After *to* a noun may stand ("compared to clouds"); after a modal none does.
+    if ((determined || before !== 'to') && mayBeBaseVerb(form, lexicon)) return true;
+  }
+  if (!determined) return false;
+  if (opening && !OPENING_NOUNS.has(form.lower) && mayBeBaseVerb(form, lexicon)) return true;
+  return form.lower.endsWith('ing') && CERTAIN_DETERMINERS.has(next) && lexicon.canBe(form.lower, 'VERB');
+}
+
+/** True where a verb comes after the auxiliary at a row, with nothing between but adverbs, negation and pronouns. */
 function helps(tag: Uint8Array, forms: TaggedRows['forms'], row: number): boolean {
   for (let at = row + 1; at < tag.length && at <= row + REACH; at++) {
     const next = tag[at];
@@ -59,13 +102,8 @@ function helps(tag: Uint8Array, forms: TaggedRows['forms'], row: number): boolea
   return false;
 }
 
-function mayBeBaseVerb(form: WordForm, lexicon: WinkLexicon): boolean {
-  const { lower } = form;
-  if (known(lower, 'VERB', lexicon)) return true;
-  if (lexicon.knows(lower)) return false;
-  return /^[a-z-]+$/.test(lower) && !lower.endsWith('s');
-}
-
-function known(lower: string, tag: Tag, lexicon: WinkLexicon): boolean {
-  return lexicon.isBaseForm(lower, tag);
+/** True where the word is known as a verb's base form, or is unknown and may be one. */
+function mayBeBaseVerb({ lower }: WordForm, lexicon: WinkLexicon): boolean {
+  if (lexicon.isBaseForm(lower, 'VERB')) return true;
+  return !lexicon.knows(lower) && /^[a-z-]+$/.test(lower) && !lower.endsWith('s');
 }

@@ -2,7 +2,7 @@
 // So every shown word is one token to the tagger, its memory does not grow with the documents, and no result hangs on what it read before.
 import { CHUNK_PARTICLES } from './closedWords.js';
 import { lemmaOf } from './lemma.js';
-import { TAGS } from './tokens.js';
+import { TAG, TAGS } from './tokens.js';
 import type { WinkLexicon } from './winkLexicon.js';
 
 /** Stand-ins; no word of the lexicon begins so. */
@@ -22,6 +22,8 @@ export interface WordForm {
   /** Tokens that either shown form makes. */
   readonly count: number;
   readonly lower: string;
+  /** Capitals and a plural s: `APIs`. */
+  readonly isAcronymPlural: boolean;
   /** Lemmas by tag code, filled on demand. */
   readonly lemmas: (string | undefined)[];
 }
@@ -46,8 +48,13 @@ export class ShownForms {
 
   /** The dictionary form of a word tagged so. */
   lemma(form: WordForm, tag: number): string {
-    return (form.lemmas[tag] ??=
-      form.lower.length > LONGEST_REMEMBERED ? form.lower : lemmaOf(form.lower, TAGS[tag]!, this.lexicon));
+    return (form.lemmas[tag] ??= this.makeLemma(form, tag));
+  }
+
+  private makeLemma({ lower, isAcronymPlural }: WordForm, tag: number): string {
+    if (lower.length > LONGEST_REMEMBERED) return lower;
+    if (isAcronymPlural && (tag === TAG.PROPN || tag === TAG.NOUN)) return lower.slice(0, -1);
+    return lemmaOf(lower, TAGS[tag]!, this.lexicon);
   }
 
   private make(written: string): WordForm {
@@ -56,12 +63,17 @@ export class ShownForms {
       .replace(/[’]/g, "'")
       .replace(/[\u2010\u2011]/g, '-');
     const lower = word.toLowerCase();
+    const isAcronymPlural = /^[A-Z]{2,}s$/.test(word);
     const split = splitContraction(lower);
-    if (split !== undefined) {
-      return { shown: split, shownUncapitalised: split, count: 2, lower, lemmas: [] };
-    }
-    const shown = this.single(word, lower);
-    return { shown, shownUncapitalised: this.uncapitalised(word, lower, shown), count: 1, lower, lemmas: [] };
+    const shown = split ?? this.single(word, lower);
+    return {
+      shown,
+      shownUncapitalised: split ?? this.uncapitalised(word, lower, shown),
+      count: split === undefined ? 1 : 2,
+      lower,
+      isAcronymPlural,
+      lemmas: [],
+    };
   }
 
   private single(word: string, lower: string): string {
@@ -107,7 +119,7 @@ export class ShownForms {
 
 /** What is shown for a number, an identifier or an opaque unit. */
 export const SHOWN_NUMBER = A_NUMBER;
-export const SHOWN_IDENTIFIER = UNKNOWN_NAME;
+export const SHOWN_IDENTIFIER = UNKNOWN_NOUN;
 export const SHOWN_OPAQUE = UNKNOWN_NOUN;
 
 /** What is shown for a sign that starts with this unit. */
@@ -140,6 +152,7 @@ const NEGATED: Readonly<Record<string, string>> = { ca: 'can', wo: 'will', sha: 
 /** The two words of a contraction, space between, or undefined. */
 function splitContraction(lower: string): string | undefined {
   if (lower === 'cannot') return 'can not';
+  if (lower === "let's") return 'let us';
   const at = lower.indexOf("'");
   if (at <= 0) return undefined;
   if (lower.endsWith("n't") && /^[a-z]+n't$/.test(lower)) {
