@@ -23,19 +23,30 @@ const Relation = {
 
 /** Stands for the start or end of a sentence among neighbouring words. */
 const EDGE = 0;
+/** The largest share of terms that a feature may have. */
+const COMMONEST = 0.25;
 /** How far to the left of a noun its verb may stand, in words. */
 const REACH = 5;
 
 /** Context vectors of terms, with the counts they come from. */
 export interface Contexts {
-  /** One vector a term; empty where the term was never met. */
+  /** One vector a term, then one for each half of the halved terms; empty where the term was never met. */
   readonly vectors: readonly SparseVector[];
-  /** In words, what a feature is, for showing: “rotate ___”. */
-  describe(feature: number): string;
+  /** In words, what a feature is, for showing: “rotate ___”; undefined where it says nothing to a reader. */
+  describe(feature: number): string | undefined;
 }
 
-/** Gathers the contexts of every occurrence of every term. Weights: ln(1 + c) · ln(n/df) over the terms met. */
-export function* gatherContexts(corpus: Corpus, segments: Segments, terms: number): Work<Contexts> {
+/**
+ * Gathers the contexts of every occurrence of every term. Weights: ln(1 + c) · ln(n/df) over the terms met.
+ * @param halved terms that get two more vectors each, in this order: of their uses in every other of their documents, and
+ *   of the rest; they show how alike two names of one thing are used here. They count in no df.
+ */
+export function* gatherContexts(
+  corpus: Corpus,
+  segments: Segments,
+  terms: number,
+  halved: readonly number[] = [],
+): Work<Contexts> {
   const { stream, vocabulary } = corpus;
   const features = new PairTable();
   const pairs = new PairTable();
@@ -45,10 +56,7 @@ export function* gatherContexts(corpus: Corpus, segments: Segments, terms: numbe
     const cell = cells.idOf(term, features.idOf(relation, word));
     counts[cell] = (counts[cell] ?? 0) + 1;
   };
-  for (let i = 0; i < segments.count; i++) {
-    const term = segments.term[i]!;
-    const first = segments.first[i]!;
-    const end = first + segments.length[i]!;
+  const gather = (term: number, first: number, end: number): void => {
     const before = neighbour(stream, first, -1);
     const after = neighbour(stream, end - 1, 1);
     put(term, Relation.before, before);
@@ -56,19 +64,68 @@ export function* gatherContexts(corpus: Corpus, segments: Segments, terms: numbe
     if (before !== EDGE) put(term, Relation.twoBefore, pairs.idOf(neighbour(stream, first - 1, -1), before));
     if (after !== EDGE) put(term, Relation.twoAfter, pairs.idOf(after, neighbour(stream, end, 1)));
     relate(stream, first, end, (relation, word) => put(term, relation, word));
+  };
+  const halves = halvesOf(stream, segments, terms, halved);
+  for (let i = 0; i < segments.count; i++) {
+    const term = segments.term[i]!;
+    const first = segments.first[i]!;
+    const end = first + segments.length[i]!;
+    gather(term, first, end);
+    const half = halves.of(i);
+    if (half !== undefined) gather(half, first, end);
     if (i % 20_000 === 0) yield;
   }
-  const describe = (feature: number): string => {
+  const describe = (feature: number): string | undefined => {
     const relation = features.leftOf(feature);
     const code = features.rightOf(feature);
     const word = (id: number): string => (id === EDGE ? '' : vocabulary.textOf(id - 1));
-    if (relation === Relation.twoBefore) return `${word(pairs.leftOf(code))} ${word(pairs.rightOf(code))} ___`.trim();
-    if (relation === Relation.twoAfter) return `___ ${word(pairs.leftOf(code))} ${word(pairs.rightOf(code))}`.trim();
-    if (relation === Relation.after || relation === Relation.modifies) return `___ ${word(code)}`.trim();
-    if (relation === Relation.subjectOf) return `___ ${word(code)}`;
-    return `${word(code)} ___`.trim();
+    switch (relation) {
+      case Relation.twoBefore:
+        return frame(`${word(pairs.leftOf(code))} ${word(pairs.rightOf(code))}`, '');
+      case Relation.twoAfter:
+        return frame('', `${word(pairs.leftOf(code))} ${word(pairs.rightOf(code))}`);
+      case Relation.after:
+      case Relation.modifies:
+      case Relation.subjectOf:
+        return frame('', word(code));
+      default:
+        return frame(word(code), '');
+    }
   };
-  return { vectors: weigh(cells, counts, features.size, terms), describe };
+  return { vectors: weigh(cells, counts, features.size, terms, terms + 2 * halved.length), describe };
+}
+
+/** A frame to show, or undefined where it holds signs or stand-ins for code. */
+function frame(before: string, after: string): string | undefined {
+  const words = `${before} ${after}`.trim();
+  if (!/^[\p{L}][\p{L}'’ -]*$/u.test(words)) return undefined;
+  return before === '' ? `___ ${words}` : `${words} ___`;
+}
+
+/** Which half, as a term beyond the last, an occurrence of a halved term belongs to: its documents by turns. */
+function halvesOf(
+  stream: TokenStream,
+  segments: Segments,
+  terms: number,
+  halved: readonly number[],
+): { of(occurrence: number): number | undefined } {
+  const placeOf = new Map(halved.map((term, place) => [term, place]));
+  const last = new Map<number, { document: number; turn: 0 | 1 }>();
+  return {
+    of: (occurrence) => {
+      const term = segments.term[occurrence]!;
+      const place = placeOf.get(term);
+      if (place === undefined) return undefined;
+      const document = stream.documentOf(segments.first[occurrence]!);
+      let state = last.get(term);
+      if (state === undefined) last.set(term, (state = { document, turn: 0 }));
+      else if (state.document !== document) {
+        state.document = document;
+        state.turn = state.turn === 0 ? 1 : 0;
+      }
+      return terms + 2 * place + state.turn;
+    },
+  };
 }
 
 /** The dictionary form of the counted word beside a row plus 1, or {@link EDGE} at a sentence's or block's end. */
@@ -120,12 +177,23 @@ function isPhrasePart(tag: number): boolean {
   return tag === TAG.DET || tag === TAG.ADJ || tag === TAG.NUM || tag === TAG.PRON || isNoun(tag);
 }
 
-function weigh(cells: PairTable, counts: readonly number[], features: number, terms: number): SparseVector[] {
+/** Weighs the cells of `all` rows, of which the first `terms` are terms and make the df. */
+function weigh(
+  cells: PairTable,
+  counts: readonly number[],
+  features: number,
+  terms: number,
+  all: number,
+): SparseVector[] {
   const df = new Uint32Array(features);
-  const sizes = new Uint32Array(terms);
-  for (let cell = 0; cell < cells.size; cell++) df[cells.rightOf(cell)]!++;
-  for (let cell = 0; cell < cells.size; cell++) if (df[cells.rightOf(cell)]! > 1) sizes[cells.leftOf(cell)]!++;
-  const met = sizes.reduce((sum, size) => sum + (size > 0 ? 1 : 0), 0);
+  const sizes = new Uint32Array(all);
+  for (let cell = 0; cell < cells.size; cell++) if (cells.leftOf(cell) < terms) df[cells.rightOf(cell)]!++;
+  const isMet = new Uint8Array(terms);
+  for (let cell = 0; cell < cells.size; cell++) if (cells.leftOf(cell) < terms) isMet[cells.leftOf(cell)] = 1;
+  const met = isMet.reduce((sum, each) => sum + each, 0);
+  // A feature of one term alone is shared by no two; one that most terms have says next to nothing and costs the most.
+  const says = (feature: number): boolean => df[feature]! >= 2 && df[feature]! <= met * COMMONEST;
+  for (let cell = 0; cell < cells.size; cell++) if (says(cells.rightOf(cell))) sizes[cells.leftOf(cell)]!++;
   const rows = Array.from(sizes, (size) => ({
     order: new Uint32Array(size),
     weight: new Float64Array(size),
@@ -133,11 +201,10 @@ function weigh(cells: PairTable, counts: readonly number[], features: number, te
   }));
   for (let cell = 0; cell < cells.size; cell++) {
     const feature = cells.rightOf(cell);
-    // A feature of one term alone is shared by no two.
-    if (df[feature]! < 2) continue;
+    if (!says(feature)) continue;
     const row = rows[cells.leftOf(cell)]!;
     row.order[row.filled] = feature;
-    row.weight[row.filled++] = dampedTfIdf(counts[cell]!, Math.min(df[feature]!, met), met);
+    row.weight[row.filled++] = dampedTfIdf(counts[cell]!, df[feature]!, met);
   }
   return rows.map(({ order, weight }) => sortedVector(order, weight));
 }

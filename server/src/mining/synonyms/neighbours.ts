@@ -1,56 +1,91 @@
-// The nearest neighbours of every term by their contexts: all pairs, through an inverted index.
+// How alike two terms are used, and their places among each other's neighbours: by their contexts, through an inverted index.
 import type { Work } from '../../base/work.js';
 import type { SparseVector } from '../../corpus/statistics/similarity.js';
 
-/** How many neighbours are kept for each term; a rank beyond it counts as this. */
-export const KEPT_NEIGHBOURS = 50;
+/** How two terms compare by Lin's measure. */
+export interface Likeness {
+  /** From 0 to 1. */
+  readonly similarity: number;
+  /** The place of `b` among the neighbours of `a`, from 1, and the other way round. */
+  readonly rankOfB: number;
+  readonly rankOfA: number;
+}
 
-/** Neighbour lists: term `t` has the neighbours `lists[t]`, most alike first, ties by term number. */
+/** What a comparison of terms yields. */
 export interface Neighbours {
-  readonly lists: readonly Uint32Array[];
-  /** The place of `b` among the neighbours of `a`, from 1; {@link KEPT_NEIGHBOURS} + 1 where it is not among them. */
-  rank(a: number, b: number): number;
+  /** By `a · terms + b`, a < b. */
+  readonly likeness: ReadonlyMap<number, Likeness>;
+  /** The nearest neighbours of the terms asked for, most alike first, ties by index. */
+  readonly nearest: ReadonlyMap<number, readonly number[]>;
 }
 
 /**
- * Ranks all terms for each term by Lin's measure (Lin 1998, eq. 4). Terms must come in an order that depends on their
- * texts alone, since ties are broken by it. Features that more than `commonest` terms have add to no pair: they say
- * next to nothing, and their pairs are most of the work.
+ * Compares pairs of terms against all other terms by Lin's measure (Lin 1998, eq. 4), one row a term that some pair holds.
+ * Terms must come in an order that depends on their texts alone, since ties are broken by it.
+ * @param listed terms for which the `keep` nearest neighbours are wanted
  */
-export function* rankNeighbours(vectors: readonly SparseVector[], commonest: number): Work<Neighbours> {
+export function* compareTerms(
+  vectors: readonly SparseVector[],
+  pairs: readonly { readonly a: number; readonly b: number }[],
+  listed: readonly number[],
+  keep: number,
+): Work<Neighbours> {
   const totals = vectors.map(({ weights }) => weights.reduce((sum, weight) => sum + weight, 0));
   const index = invert(vectors);
   const shared = new Float64Array(vectors.length);
-  const lists: Uint32Array[] = [];
-  for (let term = 0; term < vectors.length; term++) {
+  const partners = new Map<number, number[]>();
+  for (const { a, b } of pairs) {
+    partners.set(a, [...(partners.get(a) ?? []), b]);
+    partners.set(b, [...(partners.get(b) ?? []), a]);
+  }
+  const wanted = new Set(listed);
+  const rows = [...new Set([...partners.keys(), ...listed])].sort((x, y) => x - y);
+  const places = new Map<number, { similarity: number; rank: number }>();
+  const nearest = new Map<number, readonly number[]>();
+  let steps = 0;
+  for (const term of rows) {
     const touched: number[] = [];
     const { ids, weights } = vectors[term]!;
     for (let i = 0; i < ids.length; i++) {
       const from = index.first[ids[i]!]!;
       const until = index.first[ids[i]! + 1]!;
-      if (until - from > commonest) continue;
       for (let at = from; at < until; at++) {
         const other = index.terms[at]!;
         if (shared[other] === 0) touched.push(other);
         shared[other]! += weights[i]! + index.weights[at]!;
       }
     }
-    const alike = (other: number): number => shared[other]! / (totals[term]! + totals[other]!);
-    lists.push(nearest(touched, term, alike));
+    for (const other of touched) shared[other]! /= totals[term]! + totals[other]!;
+    shared[term] = 0;
+    for (const other of partners.get(term) ?? []) {
+      const similarity = shared[other]!;
+      let rank = 1;
+      for (const third of touched) {
+        if (shared[third]! > similarity || (shared[third] === similarity && third < other)) rank++;
+      }
+      places.set(term * vectors.length + other, { similarity, rank });
+    }
+    if (wanted.has(term)) nearest.set(term, mostAlike(touched, shared, keep));
     for (const other of touched) shared[other] = 0;
-    if (term % 64 === 0) yield;
+    if (++steps % 64 === 0) yield;
   }
-  const rank = (a: number, b: number): number => {
-    const at = lists[a]!.indexOf(b);
-    return at < 0 ? KEPT_NEIGHBOURS + 1 : at + 1;
-  };
-  return { lists, rank };
+  const likeness = new Map<number, Likeness>();
+  for (const { a, b } of pairs) {
+    const here = places.get(a * vectors.length + b)!;
+    const there = places.get(b * vectors.length + a)!;
+    likeness.set(a * vectors.length + b, {
+      similarity: here.similarity,
+      rankOfB: here.rank,
+      rankOfA: there.rank,
+    });
+  }
+  return { likeness, nearest };
 }
 
-function nearest(touched: readonly number[], self: number, alike: (other: number) => number): Uint32Array {
-  const scored = touched.filter((other) => other !== self).map((other) => ({ other, score: alike(other) }));
-  scored.sort((a, b) => b.score - a.score || a.other - b.other);
-  return Uint32Array.from(scored.slice(0, KEPT_NEIGHBOURS), ({ other }) => other);
+function mostAlike(touched: readonly number[], score: Float64Array, keep: number): number[] {
+  const found = touched.filter((other) => score[other]! > 0);
+  found.sort((a, b) => score[b]! - score[a]! || a - b);
+  return found.slice(0, keep);
 }
 
 function invert(vectors: readonly SparseVector[]): { first: Uint32Array; terms: Uint32Array; weights: Float64Array } {

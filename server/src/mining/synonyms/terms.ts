@@ -4,6 +4,9 @@ import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { npmi } from '../../corpus/statistics/association.js';
 import { cValues } from '../../corpus/statistics/termhood.js';
+import { singularOf } from '../../lexicon/plurals.js';
+import { spellingKey } from '../../lexicon/spelling.js';
+import { termKey } from '../../lexicon/termKey.js';
 import type { WordUses } from './wordUse.js';
 
 /** Fewest uses of a term that is asked about. */
@@ -25,76 +28,85 @@ const GENERIC = new Set(
   ),
 );
 
-/** A noun term, or a verb: its words as lower-case vocabulary numbers with the last word in its dictionary form. */
+/** A noun term: all its ways of writing, singular and plural, under one key. */
 export interface Term {
-  readonly kind: 'noun' | 'verb';
-  /** Identity within one mining: the words' texts joined by spaces, last word as its lemma. */
+  /** Identity: the words' texts in one spelling, joined, the last one singular; ways of writing share it. */
   readonly key: string;
+  /** The words, in lower case, of its most used form, the last one singular. */
+  readonly words: readonly string[];
+  /** Surface runs (lower-case vocabulary numbers) that are this term; most used first. */
+  readonly forms: readonly TermForm[];
+  /** All uses, also inside longer terms. */
+  readonly uses: number;
+}
+
+export interface TermForm {
   readonly words: readonly number[];
-  /** Surface runs (lower-case words) that are this term: singular, plural; most used first. */
-  readonly forms: readonly { readonly words: readonly number[]; readonly uses: number }[];
   readonly uses: number;
 }
 
 interface Candidate {
   readonly key: string;
-  readonly words: number[];
-  readonly forms: { words: number[]; uses: number }[];
+  readonly forms: TermForm[];
   uses: number;
 }
 
 /** The noun terms of a corpus, in order of uses and code units. */
 export function* findNounTerms(corpus: Corpus, uses: WordUses): Work<Term[]> {
+  const { vocabulary, grams } = corpus;
   const candidates = new Map<string, Candidate>();
-  const text = (word: number): string => corpus.vocabulary.textOf(word);
+  const text = (word: number): string => vocabulary.textOf(word);
+  const keys: (string | undefined)[] = [];
+  const keyOf = (word: number): string => (keys[word] ??= termKey(text(word)));
+  const inner: (string | undefined)[] = [];
+  const innerKeyOf = (word: number): string => (inner[word] ??= spellingKey(text(word)).replaceAll('-', ''));
   const add = (words: number[], count: number): void => {
-    const lemma = uses.lemma(words[words.length - 1]!, 'noun');
-    const normal = [...words.slice(0, -1), lemma];
-    const key = normal.map(text).join(' ');
+    const last = words.length - 1;
+    const key = words.map((word, index) => (index === last ? keyOf(word) : innerKeyOf(word))).join('');
     let candidate = candidates.get(key);
-    if (candidate === undefined) candidates.set(key, (candidate = { key, words: normal, forms: [], uses: 0 }));
+    if (candidate === undefined) candidates.set(key, (candidate = { key, forms: [], uses: 0 }));
     candidate.forms.push({ words, uses: count });
     candidate.uses += count;
   };
-  for (let word = 0; word < corpus.vocabulary.size; word++) {
+  for (let word = 0; word < vocabulary.size; word++) {
     const count = uses.count(word, 'noun');
     if (count >= FEWEST_FORM_USES && isTermWord(text(word))) add([word], count);
   }
   yield;
-  for (let gram = 0; gram < corpus.grams.size; gram++) {
+  for (let gram = 0; gram < grams.size; gram++) {
     const count = corpus.usesOfGram(gram);
     if (count >= FEWEST_FORM_USES) {
-      const words = corpus.grams.wordsOf(gram);
+      const words = grams.wordsOf(gram);
       if (isNounShaped(words, uses, text)) add(words, count);
     }
     if (gram % 50_000 === 0) yield;
   }
-  const frequent = [...candidates.values()].filter(({ uses: count }) => count >= FEWEST_USES);
+  const frequent = [...candidates.values()].filter((candidate) => candidate.uses >= FEWEST_USES);
   yield;
-  return keepTogether(corpus, frequent).map(({ key, words, forms, uses: count }) => ({
-    ...{ kind: 'noun' as const, key, words, uses: count },
-    forms: forms.sort(
-      (a, b) => b.uses - a.uses || compareCodeUnits(a.words.map(text).join(' '), b.words.map(text).join(' ')),
-    ),
-  }));
+  const inOrder = (a: TermForm, b: TermForm): number =>
+    b.uses - a.uses || compareCodeUnits(a.words.map(text).join(' '), b.words.map(text).join(' '));
+  for (const { forms } of frequent) forms.sort(inOrder);
+  return keepTogether(corpus, frequent).map(({ key, forms, uses: count }) => {
+    const words = forms[0]!.words.map(text);
+    words.push(singularOf(words.pop()!));
+    return { key, words, forms, uses: count };
+  });
 }
 
 /** Drops runs of words that are mere neighbours. */
 function keepTogether(corpus: Corpus, candidates: Candidate[]): Candidate[] {
   candidates.sort((a, b) => b.uses - a.uses || compareCodeUnits(a.key, b.key));
   const values = cValues(
-    candidates.map(({ words, uses }) => ({
-      words: words.map((word) => corpus.vocabulary.textOf(word)),
-      frequency: uses,
-    })),
+    candidates.map(({ forms, key, uses }) => ({ words: wordsForNesting(corpus, forms[0]!, key), frequency: uses })),
     'smoothed',
   );
   const usesOfKey = new Map(candidates.map(({ key, uses }) => [key, uses]));
-  const all = candidates.reduce((sum, { words, uses }) => (words.length === 1 ? sum + uses : sum), 0);
-  return candidates.filter(({ words, uses }, index) => {
+  const all = candidates.reduce((sum, { forms, uses }) => (forms[0]!.words.length === 1 ? sum + uses : sum), 0);
+  return candidates.filter(({ forms, uses }, index) => {
+    const { words } = forms[0]!;
     if (words.length === 1) return true;
     if (values[index]! < LEAST_C_VALUE) return false;
-    const head = usesOfKey.get(corpus.vocabulary.textOf(words[words.length - 1]!));
+    const head = usesOfKey.get(termKey(corpus.vocabulary.textOf(words[words.length - 1]!)));
     const rest = restUses(corpus, words.slice(0, -1));
     if (head === undefined || rest === 0) return true;
     return (
@@ -102,6 +114,13 @@ function keepTogether(corpus: Corpus, candidates: Candidate[]): Candidate[] {
       LEAST_ATTRACTION
     );
   });
+}
+
+/** The words of a candidate as nesting compares them; the key stands in where two candidates would be alike. */
+function wordsForNesting(corpus: Corpus, form: TermForm, key: string): string[] {
+  if (form.words.length === 1) return [key];
+  const words = form.words.map((word) => corpus.vocabulary.textOf(word));
+  return [...words.slice(0, -1), termKey(words[words.length - 1]!)];
 }
 
 function restUses(corpus: Corpus, words: readonly number[]): number {

@@ -1,0 +1,12 @@
+// Synonyms: different words for one concept, asked where independent evidence and usage agree.
+import { compareCodeUnits } from '../../base/order.js';
+import type { Work } from '../../base/work.js';
+import type { Corpus } from '../../corpus/corpus.js';
+import type { Question } from '../question.js';
+import { askNouns } from './nouns.js';
+
+/** Asks about synonymous nouns, verbs with their object, and terms alike in use alone; most worth first. */
+export function* askSynonyms(corpus: Corpus): Work<Question[]> {
+  const questions = yield* askNouns(corpus);
+  return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
+}

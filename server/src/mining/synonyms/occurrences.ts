@@ -1,0 +1,31 @@
+// The occurrences of each term in order, and which occurrence covers a row.
+import type { TokenStream } from '../../corpus/stream.js';
+import type { Use } from '../places.js';
+import type { Segments } from './segment.js';
+
+/** The occurrences of terms, by term. */
+export interface Occurrences {
+  /** Indexes into the segments, ascending. */
+  of(term: number): Uint32Array;
+  /** The same as uses of rows. */
+  usesOf(term: number): Use[];
+  /** How many documents a term occurs in. */
+  documentsOf(term: number): number;
+}
+
+/** Sorts the occurrences by term. */
+export function indexOccurrences(stream: TokenStream, segments: Segments): Occurrences {
+  const first = new Uint32Array(segments.uses.length + 1);
+  segments.uses.forEach((uses, term) => {
+    first[term + 1] = first[term]! + uses;
+  });
+  const next = first.slice();
+  const sorted = new Uint32Array(segments.count);
+  for (let i = 0; i < segments.count; i++) sorted[next[segments.term[i]!]!++] = i;
+  const of = (term: number): Uint32Array => sorted.subarray(first[term]!, first[term + 1]!);
+  return {
+    of,
+    usesOf: (term) => Array.from(of(term), (i) => ({ row: segments.first[i]!, length: segments.length[i]! })),
+    documentsOf: (term) => new Set(Array.from(of(term), (i) => stream.documentOf(segments.first[i]!))).size,
+  };
+}
