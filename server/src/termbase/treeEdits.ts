@@ -52,7 +52,8 @@ export class TreeEdits {
     if (previous === undefined) throw new Unwritable(startOf(map));
     const column = this.columnOf(startOf(map.items[0]!.key));
     const lines = indented(writePairLines(key, value, this.style), column);
-    const gap = map.items.length > 1 && this.isGapBefore(startOf(map.items.at(-1)!.key));
+    // Blank lines part the sections of a file, not the keys of an entry.
+    const gap = column === 0 && map.items.length > 1 && this.isGapBefore(startOf(map.items.at(-1)!.key));
     this.insertLines(endOfPair(previous), gap ? ['', ...lines] : lines, isLast ? column : undefined);
   }
 

@@ -1,0 +1,58 @@
+// The suggested term, its reason, and the answers on offer.
+import { describe, expect, it } from 'vitest';
+import { decide } from '../../../server/src/decisions/decide.js';
+import { choicesOf, preferenceOf } from '../../../server/src/decisions/preference.js';
+import { question, term, termbase } from './questions.js';
+
+const FILE = termbase(`
+concepts:
+  - { preferred: access key, deprecated: [API key] }
+  - { preferred: sign in, deprecated: [log in] }
+  - { preferred: data center, deprecated: [datacenter] }
+  - { preferred: file name, deprecated: [filename] }
+  - { preferred: setup page, deprecated: [set-up page] }
+  - { preferred: certificate authority, deprecated: [CA] }
+`);
+
+function suggestion(terms: string[]): string {
+  const { decisions, precedents } = decide([FILE], []);
+  const { text, reason } = preferenceOf(question(terms), decisions, precedents);
+  return `${text}: ${reason.text}`;
+}
+
+describe('the suggestion', () => {
+  it.each([
+    ['the preferred term', ['secret×9', 'access key×2'], 'access key: “access key” is already the preferred term'],
+    [
+      'in place of a deprecated one',
+      ['secret×9', 'API key×2'],
+      'access key: the termbase prefers “access key” to “API key”',
+    ],
+    ['a word within', ['log in page×9', 'sign in page×2'], 'sign in page: you prefer “sign in” to “log in”'],
+    ['a habit', ['webpage×9', 'web page×2'], 'web page: 2 of 2 earlier decisions prefer open to closed'],
+    ['no habit from one case', ['start-up×9', 'startup×2'], 'start-up: it is the most used (9 times)'],
+    ['no habit from one abbreviation', ['VM×9', 'virtual machine×2'], 'VM: it is the most used (9 times)'],
+    ['the most used', ['node×2', 'host×9'], 'host: it is the most used (9 times)'],
+    ['a tie by code units', ['node', 'host'], 'host: used as often as the other (once)'],
+  ])('%s', (_, terms, expected) => expect(suggestion(terms)).toBe(expected));
+
+  it('takes the more widespread of two terms used alike', () => {
+    const { decisions, precedents } = decide([], []);
+    const asked = { ...question(['a×4', 'b×4']), terms: [term('a×4'), { ...term('b×4'), documents: 3 }] };
+    expect(preferenceOf(asked, decisions, precedents)).toEqual({
+      text: 'b',
+      reason: { kind: 'documents', text: 'as often used as the other (4 times), but in more documents (3)', value: 3 },
+    });
+  });
+});
+
+describe('the answers on offer', () => {
+  it.each<[what: string, terms: string[], choices: ReturnType<typeof choicesOf>]>([
+    ['nothing decided', ['node×2', 'host×9'], { prefer: ['host', 'node'], either: true }],
+    ['a preferred term', ['secret×9', 'access key×2'], { prefer: ['access key'], either: true }],
+    ['a deprecated term', ['secret×9', 'API key×2'], { prefer: ['access key'], either: false }],
+  ])('%s', (_, terms, choices) => {
+    const { decisions, precedents } = decide([FILE], []);
+    expect(choicesOf(question(terms), decisions, precedents)).toEqual(choices);
+  });
+});
