@@ -55,6 +55,12 @@ export function pointClassAt(text: string, offset: number): number {
   return found === CharClass.pair ? pairClassAt(text, offset) : found;
 }
 
+/** True where a letter, a digit or an underscore starts at the offset. */
+export function isWordAt(text: string, offset: number): boolean {
+  const found = pointClassAt(text, offset);
+  return found === CharClass.letter || found === CharClass.digit || found === CharClass.underscore;
+}
+
 function isPair(text: string, offset: number): boolean {
   const unit = text.charCodeAt(offset);
   if (unit > 0xdbff || offset + 1 >= text.length) return false;

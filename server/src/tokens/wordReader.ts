@@ -1,6 +1,8 @@
 // Reads one word from its first unit to its last: which signs join its parts, and what kind of word it makes.
-import { CharClass, classAt, pairClassAt } from './charClass.js';
-import { IS_CONTRACTIONS, UNITS } from './closedWords.js';
+import { CharClass, classAt, isWordAt, pairClassAt } from './charClass.js';
+import { IS_CONTRACTIONS } from './closedWords.js';
+import { isPath, pathEnd, trimmedEnd } from './paths.js';
+import { isCamel, isQuantity, isUpper, touchesDigit } from './wordShape.js';
 import { TokenKind } from './tokenColumns.js';
 import { TokenFlag } from './tokens.js';
 
@@ -133,7 +135,7 @@ export class WordReader {
   private isPossessiveEnding(at: number, to: number): boolean {
     const { text } = this;
     if (at + 1 >= to || (text.charCodeAt(at + 1) | 0x20) !== 0x73) return false;
-    return at + 2 >= to || !isWordUnit(classAt(text, at + 2));
+    return at + 2 >= to || !isWordAt(text, at + 2);
   }
 
   /** A slash joins a path (`a/b.txt`, `src/`), and single letters (`I/O`, `A/B`); elsewhere it separates. */
@@ -142,8 +144,8 @@ export class WordReader {
     if (this.code && at > from && this.isPathFrom(from)) return 1;
     if (at < this.plainSlashesUntil) return 0;
     if (at - from === 1 && this.letters && at + 1 < to && classAt(text, at + 1) === CharClass.letter) {
-      const after = at + 2 < to ? classAt(text, at + 2) : CharClass.space;
-      if (!isWordUnit(after) && after !== CharClass.slash) return 1;
+      const ends = at + 2 >= to || (!isWordAt(text, at + 2) && classAt(text, at + 2) !== CharClass.slash);
+      if (ends) return 1;
     }
     if (!this.letters && this.wordFollows(at + 1, to)) return 0;
     const end = pathEnd(text, at, to);
@@ -173,7 +175,7 @@ export class WordReader {
         this.code = true;
         return 1;
       case EQUALS:
-        return classAt(text, from) === CharClass.hyphen && this.code && isWordUnit(next) ? 1 : 0;
+        return classAt(text, from) === CharClass.hyphen && this.code && this.wordFollows(at + 1, to) ? 1 : 0;
       case BACKSLASH:
         if (next !== CharClass.letter && next !== CharClass.digit) return 0;
         this.code = true;
@@ -182,10 +184,10 @@ export class WordReader {
         return next === CharClass.letter && at - from <= 3 && isUpper(text, from) && isUpper(text, at + 1) ? 1 : 0;
       case PLUS: {
         const twice = at + 1 < to && text.charCodeAt(at + 1) === PLUS;
-        return twice && this.letters && !(at + 2 < to && isWordUnit(classAt(text, at + 2))) ? 2 : 0;
+        return twice && this.letters && !(at + 2 < to && isWordAt(text, at + 2)) ? 2 : 0;
       }
       case HASH:
-        return at - from === 1 && isUpper(text, from) && !isWordUnit(next) ? 1 : 0;
+        return at - from === 1 && isUpper(text, from) && !this.wordFollows(at + 1, to) ? 1 : 0;
       default:
         return 0;
     }
@@ -216,7 +218,7 @@ export class WordReader {
   }
 
   private wordFollows(at: number, to: number): boolean {
-    return at < to && isWordUnit(classAt(this.text, at));
+    return at < to && isWordAt(this.text, at);
   }
 
   /** `e.g.`, `U.S.`: single letters with a stop after each, the last stop included. */
@@ -267,15 +269,6 @@ export class WordReader {
   }
 }
 
-function isWordUnit(found: number): boolean {
-  return (
-    found === CharClass.letter ||
-    found === CharClass.digit ||
-    found === CharClass.underscore ||
-    found === CharClass.pair
-  );
-}
-
 function isPrefixSign(text: string, at: number): boolean {
   const found = classAt(text, at);
   if (
@@ -291,97 +284,4 @@ function isPrefixSign(text: string, at: number): boolean {
 
 function isSign(unit: number): boolean {
   return unit === PLUS || unit === 0x2d || unit === 0x2010 || unit === 0x2011;
-}
-
-function isUpper(text: string, at: number): boolean {
-  const unit = text.charCodeAt(at);
-  if (unit < 0x80) return unit >= 0x41 && unit <= 0x5a;
-  const char = text.charAt(at);
-  return char !== char.toLowerCase();
-}
-
-function isLower(text: string, at: number): boolean {
-  const unit = text.charCodeAt(at);
-  if (unit < 0x80) return unit >= 0x61 && unit <= 0x7a;
-  const char = text.charAt(at);
-  return char !== char.toUpperCase();
-}
-
-/** True where a capital follows a small letter within a part, or small letters other than a plural s follow two capitals. */
-function isCamel(text: string, from: number, to: number): boolean {
-  let capitals = 0;
-  let small = false;
-  for (let at = from; at < to; at++) {
-    if (isUpper(text, at)) {
-      if (small) return true;
-      capitals++;
-    } else if (isLower(text, at)) {
-      if (capitals >= 2 && !(text.charCodeAt(at) === 0x73 && (at + 1 === to || !isLower(text, at + 1)))) return true;
-      small = true;
-      capitals = 0;
-    } else if (classAt(text, at) !== CharClass.mark && classAt(text, at) !== CharClass.invisible) {
-      small = false;
-      capitals = 0;
-    }
-  }
-  return false;
-}
-
-function touchesDigit(text: string, from: number, to: number): boolean {
-  if (/^\d+(?:st|nd|rd|th)$/i.test(text.slice(from, Math.min(to, from + 12)))) return false;
-  for (let at = from + 1; at < to; at++) {
-    const before = classAt(text, at - 1);
-    const found = classAt(text, at);
-    if (before === CharClass.letter && found === CharClass.digit) return true;
-    if (before === CharClass.digit && found === CharClass.letter) return true;
-  }
-  return false;
-}
-
-/** A number with its unit: `10ms`, `1.5GB`. */
-function isQuantity(text: string, from: number, to: number): boolean {
-  if (to - from > 24 || classAt(text, to - 1) !== CharClass.letter) return false;
-  let at = to;
-  while (at > from && classAt(text, at - 1) === CharClass.letter) at--;
-  if (at === from || to - at > 5 || classAt(text, at - 1) !== CharClass.digit) return false;
-  for (let k = from; k < at; k++) if (classAt(text, k) === CharClass.letter) return false;
-  return text.charAt(at) !== 'D' && UNITS.has(text.slice(at, to).toLowerCase());
-}
-
-function isPathUnit(text: string, at: number): boolean {
-  const found = classAt(text, at);
-  if (isWordUnit(found) || found === CharClass.hyphen || found === CharClass.dot || found === CharClass.slash)
-    return true;
-  const unit = text.charCodeAt(at);
-  return unit === AT || unit === PLUS || unit === 0x7e;
-}
-
-/** The end of the stretch of path characters from an offset on, without trailing stops and hyphens. */
-function pathEnd(text: string, from: number, to: number): number {
-  let end = from;
-  while (end < to && isPathUnit(text, end)) end++;
-  while (end > from + 1) {
-    const last = classAt(text, end - 1);
-    if (last !== CharClass.dot && last !== CharClass.hyphen) break;
-    end--;
-  }
-  return end;
-}
-
-/** True where the stretch is a path: it ends in a slash, or has a stop, an underscore or an at sign among its letters. */
-function isPath(text: string, from: number, slash: number, end: number): boolean {
-  if (end - slash >= 1 && classAt(text, end - 1) === CharClass.slash) return end - from >= 2;
-  for (let at = from; at < end; at++) {
-    const found = classAt(text, at);
-    if (found === CharClass.underscore || text.charCodeAt(at) === AT) return true;
-    if (found === CharClass.dot && at + 1 < end && isWordUnit(classAt(text, at + 1))) return true;
-  }
-  return false;
-}
-
-/** The end of an address: the run's end without closing punctuation. */
-function trimmedEnd(text: string, from: number, to: number): number {
-  let end = to;
-  while (end > from && /[.,;:!?'"’”»)\]}>]/.test(text.charAt(end - 1))) end--;
-  return end;
 }
