@@ -11,7 +11,7 @@ for (const [singular, ...plurals] of IRREGULAR_NOUNS) {
 
 /** Endings that compounds written as one word share with an irregular noun: foreman, subindex, superset of nothing else. */
 const COMPOUND_ENDINGS: readonly string[] =
-  'woman man child person foot tooth mouse leaf shelf life knife wife self half vertex matrix schema axis basis analysis thesis index quiz'.split(
+  'woman man child person foot tooth mouse leaf shelf life knife wife self half vertex matrix schema analysis thesis index quiz'.split(
     ' ',
   );
 const NOT_COMPOUND = new Set('human german roman shaman talisman ottoman caiman norman'.split(' '));

@@ -15,8 +15,20 @@ export interface VerbForms {
   readonly gerund: readonly string[];
 }
 
-const PREFIX =
-  /^(?:re|un|over|out|under|mis|fore|pre|de|co|auto|hot|cross|up|down|back|off|by|sub|super|multi|dis|inter|with|proof|hand|self|side|live|fast|cold|double|pod|web)-?(?=[a-z]{2,})/;
+/** First parts behind which a verb keeps its own forms: rerun, overwrite, hot-swap. Longer ones before those they begin with. */
+const PREFIXES: readonly string[] = (
+  'under un over out mis fore pre re de co auto hot cross up down back off by sub super multi dis inter with proof hand self side live fast cold ' +
+  'double pod web type rough in way leap'
+).split(' ');
+
+/** The verb behind each first part that the word may have. */
+function* behindPrefix(base: string): Iterable<{ prefix: string; rest: string }> {
+  for (const prefix of PREFIXES) {
+    if (!base.startsWith(prefix)) continue;
+    const at = base.charAt(prefix.length) === '-' ? prefix.length + 1 : prefix.length;
+    if (base.length - at >= 2) yield { prefix: base.slice(0, at), rest: base.slice(at) };
+  }
+}
 
 /** The forms of a verb given in its base form, one lower-case word. Spelling rules: common practice, American first. */
 export function verbForms(base: string): VerbForms {
@@ -57,27 +69,28 @@ function gerunds(base: string, doubled: readonly string[]): readonly string[] {
 function irregularForms(base: string): { past: readonly string[]; participle: readonly string[] } | undefined {
   const own = IRREGULAR_VERBS.get(base);
   if (own || REGULAR_DESPITE_PREFIX.has(base)) return own;
-  const prefix = PREFIX.exec(base)?.[0];
-  const rest = prefix === undefined ? undefined : IRREGULAR_VERBS.get(base.slice(prefix.length));
-  if (prefix === undefined || !rest) return undefined;
-  const withPrefix = (form: string): string => prefix + form;
-  return { past: rest.past.map(withPrefix), participle: rest.participle.map(withPrefix) };
+  for (const { prefix, rest } of behindPrefix(base)) {
+    const forms = IRREGULAR_VERBS.get(rest);
+    if (!forms) continue;
+    const withPrefix = (form: string): string => prefix + form;
+    return { past: forms.past.map(withPrefix), participle: forms.participle.map(withPrefix) };
+  }
+  return undefined;
 }
 
 /** The stem before -ed and -ing: the last consonant doubled, as it is, or both where British and American usage differ. */
 function doubledStem(base: string): readonly string[] {
   if (/[^aeiou]?[aeiou]c$/.test(base) && !/^(?:sync|arc|zinc|talc)$|sync$/.test(base)) return [base + 'k'];
   if (/^(?:quiz|whiz)$/.test(base)) return [base + 'z'];
-  if (!/(?:^|[^aeiou]|qu)[aeiou][bdfgklmnprstvz]$/.test(base) || NEVER_DOUBLING.has(base)) return [base];
   const last = base.charAt(base.length - 1);
-  const prefix = PREFIX.exec(base)?.[0];
-  const rest = prefix === undefined ? '' : base.slice(prefix.length);
-  if (NEVER_DOUBLING.has(rest)) return [base];
+  if (/^(?:focus|bias|benefit|catalog|target|worship|telegram)$/.test(base)) return [base, base + last];
+  if (!/(?:^|[^aeiou]|qu)[aeiou][bdfgklmnprstvz]$/.test(base) || NEVER_DOUBLING.has(base)) return [base];
+  const rests = [...behindPrefix(base)].map(({ rest }) => rest);
+  if (rests.some((rest) => NEVER_DOUBLING.has(rest))) return [base];
   if (isOneSyllable(base) || STRESSED_LAST.has(base) || DOUBLING_ENDINGS.some((end) => isCompoundOf(base, end)))
     return [base + last];
-  if (rest !== '' && (STRESSED_LAST.has(rest) || (isOneSyllable(rest) && rest.length > 2))) return [base + last];
+  if (rests.some((rest) => STRESSED_LAST.has(rest) || (isOneSyllable(rest) && rest.length > 2))) return [base + last];
   if (/[aeiou]l$/.test(base)) return [base, base + 'l'];
-  if (/^(?:focus|bias|benefit|catalog)$/.test(base)) return [base, base + last];
   return [base];
 }
 
@@ -89,6 +102,6 @@ function isOneSyllable(word: string): boolean {
   return (
     /^(?:[^aeiou]*|[^aeiou]*qu)[aeiou][^aeiou]$/.test(word) &&
     word.length > 1 &&
-    !/^[^aeiou]*y[^aeiou]*[aeiou]/.test(word)
+    !/^[^aeiou]+y[^aeiou]*[aeiou]/.test(word)
   );
 }
