@@ -2,41 +2,19 @@
 import { byCountThenText, compareCodeUnits } from '../base/order.js';
 import type { TokenStream } from '../corpus/stream.js';
 import type { Vocabulary } from '../corpus/vocabulary.js';
+import { pluralsOf, singularOf } from '../lexicon/plurals.js';
 import { TokenFlag } from '../tokens/tokens.js';
 import { isRunningText } from './places.js';
 import type { Use } from './places.js';
 import type { QuestionTerm, TermForm } from './question.js';
 
-/** Plurals that no ending tells, with their singulars; from general knowledge of English. */
-const IRREGULAR = new Map(
-  `indices index|vertices vertex|matrices matrix|appendices appendix|analyses analysis|hypotheses hypothesis|bases basis
-  |axes axis|crises crisis|theses thesis|syntheses synthesis|parentheses parenthesis|children child|criteria criterion
-  |phenomena phenomenon|schemata schema|men man|women woman|feet foot|teeth tooth|geese goose|mice mouse|lives life
-  |knives knife|leaves leaf|halves half|shelves shelf|selves self|wolves wolf|aliases alias|viruses virus|buses bus
-  |statuses status|corpuses corpus|bonuses bonus|canvases canvas|biases bias|lenses lens|gases gas|quizzes quiz`
-    .split('|')
-    .map((pair) => pair.trim().split(' ') as [string, string]),
-);
-
-/** Singulars that end in s, and words that are never taken for plurals. */
-const NEVER_PLURAL = new Set(
-  `alias always as atlas bias bus canvas chaos corpus gas its lens news perhaps plus pos previous process s series species
-  status this thus us various versus was yes across access address less express pass`.split(/\s+/),
-);
-
 /**
  * The key that singular and plural of an English noun share, in lower case: mostly the singular. Verbs in -s fold alike,
- * and -ie folds with -y (cookies tells not which it comes from), which does no harm.
+ * and -ie folds with -y ("cookies" does not tell which it comes from), which does no harm.
  */
 export function singularKey(word: string): string {
-  if (word.length > 4 && word.endsWith('ie')) return `${word.slice(0, -2)}y`;
-  const irregular = IRREGULAR.get(word);
-  if (irregular !== undefined) return irregular;
-  if (word.length < 3 || !word.endsWith('s') || NEVER_PLURAL.has(word)) return word;
-  if (/(?:ss|us|is|'s)$/.test(word)) return word;
-  if (word.endsWith('ies')) return word.length > 4 ? `${word.slice(0, -3)}y` : word.slice(0, -1);
-  if (/(?:sh|ch|x|ss|zz)es$/.test(word)) return word.slice(0, -2);
-  return word.slice(0, -1);
+  const singular = singularOf(word);
+  return singular.length > 4 && singular.endsWith('ie') ? `${singular.slice(0, -2)}y` : singular;
 }
 
 /** "once", "twice", "31 times". */
@@ -49,9 +27,12 @@ export function pages(count: number): string {
   return count === 1 ? '1 page' : `${count} pages`;
 }
 
+/** From this share of lower-case uses on, capitals are not part of a word. */
+const LOWER_SHARE = 0.15;
+
 /**
- * The spelling that shows a set of uses: the commonest in running text inside sentences, where capitals mean something;
- * elsewhere the commonest at all. Ties by code units, lower case before capitals.
+ * The spelling that shows a set of uses, as it stands inside sentences of running text, where capitals mean something:
+ * lower case unless it is all but always capitalised, else the commonest. Ties by code units, lower case before capitals.
  */
 export function displayText(stream: TokenStream, vocabulary: Vocabulary, uses: readonly Use[]): string {
   const inside = uses.filter(
@@ -62,6 +43,8 @@ export function displayText(stream: TokenStream, vocabulary: Vocabulary, uses: r
     const text = spelledAt(stream, vocabulary, use);
     counts.set(text, (counts.get(text) ?? 0) + 1);
   }
+  const lower = [...counts].find(([text]) => text === text.toLowerCase());
+  if (lower !== undefined && inside.length > 0 && lower[1] >= LOWER_SHARE * inside.length) return lower[0];
   const best = [...counts].sort(([a, m], [b, n]) => n - m || -compareCodeUnits(a, b))[0];
   return inside.length > 0 ? best![0] : lowerUnlessCamel(best![0]);
 }
@@ -97,8 +80,7 @@ export function byUses(a: QuestionTerm, b: QuestionTerm): number {
 /** The forms, singular and plural, that share a word's {@link singularKey}; some of them may be no words. */
 export function numberForms(word: string): string[] {
   const key = singularKey(word);
-  const forms = new Set([word, key, `${key}s`, `${key}es`]);
-  if (key.endsWith('y')) forms.add(`${key.slice(0, -1)}ies`).add(`${key.slice(0, -1)}ie`);
-  for (const [plural, singular] of IRREGULAR) if (singular === key) forms.add(plural);
+  const forms = new Set([word, key, `${key}s`, ...pluralsOf(key)]);
+  if (key.endsWith('y')) forms.add(`${key.slice(0, -1)}ie`);
   return [...forms].filter((form) => singularKey(form) === key);
 }

@@ -1,10 +1,113 @@
-// Clippings.
+// Clipped words (repo, admin) beside their full forms, by a list; asked where both stand among the same words.
+import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
-import type { Question } from '../question.js';
+import { fullFormsOf } from '../../lexicon/clippings.js';
+import { TokenFlag } from '../../tokens/tokens.js';
+import { countDocuments, examplePlaces } from '../places.js';
+import type { Use } from '../places.js';
+import type { Question, QuestionTerm } from '../question.js';
+import { byUses, pages, singularKey, times } from '../wording.js';
+import { framesOf, frameText, sharedFrames } from './frames.js';
+import type { SharedFrames } from './frames.js';
+import { formsOfLong } from './longForms.js';
+import type { FormUses } from './longForms.js';
+import { termOf, usesOf } from './shortAndLong.js';
 
-/** Questions about clipped words beside their full forms. */
-export function* askClippings(corpus: Corpus): Work<Question[]> {
-  yield;
-  return corpus.documents.length < 0 ? [] : [];
+/** The least that is asked about. */
+const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33 } as const;
+
+/** Words between two resting points. */
+const STRIDE = 5000;
+
+interface Side {
+  /** In lower case, the last in the singular. */
+  readonly words: readonly string[];
+  readonly forms: readonly FormUses[];
+  readonly uses: readonly Use[];
 }
+
+/** Questions about clipped words beside their full forms. Their order is not defined. */
+export function* askClippings(corpus: Corpus): Work<Question[]> {
+  const questions: Question[] = [];
+  for (const clipping of yield* clippingsIn(corpus)) {
+    const question = askClipping(corpus, clipping);
+    if (question !== undefined) questions.push(question);
+  }
+  return questions;
+}
+
+/** The clippings that the corpus has, in the singular, in order of their code units. */
+function* clippingsIn(corpus: Corpus): Work<string[]> {
+  const { vocabulary, stream } = corpus;
+  const found = new Set<string>();
+  for (let id = 0; id < vocabulary.size; id++) {
+    if (id % STRIDE === 0) yield;
+    if (vocabulary.foldOf(id) !== id || stream.rowsOf(id).length === 0) continue;
+    const text = vocabulary.textOf(id);
+    if (fullFormsOf(text).length > 0) found.add(singularKey(text));
+  }
+  return [...found].sort(compareCodeUnits);
+}
+
+function askClipping(corpus: Corpus, clipping: string): Question | undefined {
+  const short = sideOf(corpus, [clipping]);
+  if (short === undefined) return undefined;
+  const shortFrames = framesOf(corpus, short.uses);
+  const candidates = fullFormsOf(clipping).flatMap((full) => {
+    const words = full.split(' ');
+    const long = sideOf(corpus, [...words.slice(0, -1), singularKey(words[words.length - 1]!)]);
+    return long === undefined ? [] : [{ long, shared: sharedFrames(corpus, shortFrames, framesOf(corpus, long.uses)) }];
+  });
+  candidates.sort((a, b) => b.shared.kinds.length - a.shared.kinds.length);
+  const best = candidates[0];
+  if (best === undefined || best.shared.kinds.length < LEAST.kinds || best.shared.share < LEAST.share) return undefined;
+  return makeQuestion(corpus, short, best.long, best.shared);
+}
+
+function sideOf(corpus: Corpus, words: readonly string[]): Side | undefined {
+  const forms = formsOfLong(corpus, words)
+    .map(({ folds, uses }) => ({ folds, uses: uses.filter((use) => isPlain(corpus, use)) }))
+    .filter(({ uses }) => uses.length > 0);
+  const uses = usesOf(forms);
+  if (uses.length < LEAST.uses || countDocuments(corpus.stream, uses) < LEAST.documents) return undefined;
+  return { words, forms, uses };
+}
+
+/** A use that is neither an identifier nor set in capitals. */
+function isPlain(corpus: Corpus, { row, length }: Use): boolean {
+  const { stream, vocabulary } = corpus;
+  if ((stream.flags[row]! & TokenFlag.identifier) !== 0) return length === 1 && /\d/.test(vocabulary.textOf(stream.fold[row]!));
+  return !/\p{Lu}\p{Lu}/u.test(vocabulary.textOf(stream.spelling[row]!));
+}
+
+function makeQuestion(corpus: Corpus, short: Side, long: Side, shared: SharedFrames): Question {
+  const sides = [short, long]
+    .map(({ forms, uses, words }) => ({ term: termOf(corpus, forms, words.join(' ')), uses }))
+    .sort((a, b) => byUses(a.term, b.term));
+  const confidence = 0.5 + 0.4 * shared.share;
+  const [clip, full] = [short, long].map(({ forms, words }) => termOf(corpus, forms, words.join(' '))) as [QuestionTerm, QuestionTerm];
+  const shown = shared.kinds.slice(0, 3).map((frame) => `“${frameText(corpus, frame)}”`);
+  return {
+    id: `abbreviation:${sides.map(({ term }) => term.text).join('|')}`,
+    kind: 'abbreviation',
+    confidence,
+    worth: confidence * sides[1]!.term.uses,
+    terms: sides.map(({ term }) => term),
+    reasons: [
+      {
+        kind: 'clipping',
+        text: `“${clip.text}” is short for “${full.text}”; written ${times(clip.uses)} on ${pages(clip.documents)} and in full ${times(full.uses)} on ${pages(full.documents)}`,
+        value: sides[1]!.term.uses,
+      },
+      {
+        kind: 'shared-frames',
+        text: `both stand beside the same words, ${shared.kinds.length} of them: ${shown.join(', ')}`,
+        value: shared.kinds.length,
+      },
+    ],
+    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
+  };
+}
+
+

@@ -10,7 +10,7 @@ import { formsOfLong, formsOfShort } from './longForms.js';
 import type { FormUses } from './longForms.js';
 
 /** The least that is asked about: uses of the short form, and free uses of the long one. */
-const LEAST = { short: 2, freeOnItsPages: 2, free: 3, freePages: 3 } as const;
+const LEAST = { short: 2, freeOnItsPages: 2, free: 3, freePages: 3, freeOnFewPages: 5 } as const;
 
 /** How sure an explanation makes that both forms name one thing. */
 const CONFIDENCE = { once: 0.85, more: 0.92 } as const;
@@ -38,13 +38,21 @@ export function askExplained(
   const free = freeUses(corpus, longUses, shortUses, expansion);
   const freePages = countDocuments(corpus.stream, free.all);
   const enough =
-    free.onItsPages.length >= LEAST.freeOnItsPages || (free.all.length >= LEAST.free && freePages >= LEAST.freePages);
+    free.onItsPages.length >= LEAST.freeOnItsPages ||
+    (free.all.length >= LEAST.free && freePages >= LEAST.freePages) ||
+    free.all.length >= LEAST.freeOnFewPages;
   if (!enough) return undefined;
   const kept = new Set(longUses.map((use) => use.row));
+  const shortRows = new Set(expansion.definitions.map((definition) => definition.shortRow));
+  const unexplained = shortUses.filter((use) => !shortRows.has(use.row));
   const sides = [
-    { term: termOf(corpus, shortForms, short), uses: shortUses },
+    { term: termOf(corpus, shortForms, short), uses: unexplained.length > 0 ? unexplained : shortUses },
     {
-      term: termOf(corpus, longForms.map((form) => ({ ...form, uses: form.uses.filter((use) => kept.has(use.row)) }))),
+      term: termOf(
+        corpus,
+        longForms.map((form) => ({ ...form, uses: form.uses.filter((use) => kept.has(use.row)) })),
+        expansion.words.join(' '),
+      ),
       uses: free.all,
     },
   ].sort((a, b) => byUses(a.term, b.term));
@@ -110,13 +118,14 @@ export function usesOf(forms: readonly FormUses[]): Use[] {
   return forms.flatMap((form) => form.uses).sort((a, b) => a.row - b.row);
 }
 
-/** A term over several forms; `lead` names it where one of the forms reads so. */
+/** A term over several forms, named by the form that reads as `lead` (capitals and hyphens apart) where there is one. */
 export function termOf(corpus: Corpus, forms: readonly FormUses[], lead?: string): QuestionTerm {
   const texts = forms
     .filter((form) => form.uses.length > 0)
     .map((form) => ({ text: displayText(corpus.stream, corpus.vocabulary, form.uses), count: form.uses.length }));
   const documents = countDocuments(corpus.stream, usesOf(forms));
-  return makeTerm(texts, documents, texts.some(({ text }) => text === lead) ? lead : undefined);
+  const leading = texts.find(({ text }) => text.toLowerCase().replace(/-/g, ' ') === lead?.toLowerCase().replace(/-/g, ' '));
+  return makeTerm(texts, documents, leading?.text);
 }
 
 function reasonsOf(

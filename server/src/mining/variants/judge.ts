@@ -71,6 +71,8 @@ function judgeCamel(chunk: Style, open: Style): Mix | undefined {
   const leads = chunk.uses.length >= 10 && chunk.uses.length >= 4 * open.uses.length;
   if (!asName && !leads) return undefined;
   if (!asName && plurals * 20 < chunk.uses.length) return undefined;
+  // A part of one longer name beside a name of its own: Horizontal Pod Autoscaler, PodAutoscaler.
+  if (open.afterName > 0.5 * open.inside && chunk.afterName < 0.25 * chunk.inside) return undefined;
   const exchangeable = shared(chunk, open, ['predicate', 'noun']);
   return exchangeable < 2
     ? undefined

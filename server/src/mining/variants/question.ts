@@ -100,7 +100,7 @@ function textOf(corpus: Corpus, form: Form): string {
 
 function reasonsOf(corpus: Corpus, mix: Mix, sides: readonly SideTerm[]): Reason[] {
   const ways = sides.map(
-    ({ term, side }) => `${wayOf(side)} (“${term.text}”) ${times(term.uses)} on ${pages(term.documents)}`,
+    ({ term, side }) => `${wayOf(side, term.text)} ${times(term.uses)} on ${pages(term.documents)}`,
   );
   const reasons: Reason[] = [{ kind: kindOf(mix.lane), text: `written ${listed(ways)}`, value: mix.exchangeable }];
   const slot = commonSlot(sides);
@@ -135,11 +135,11 @@ function kindOf(lane: Lane): string {
   return lane === 'spelling' || lane === 'name' ? lane : 'compound';
 }
 
-function wayOf({ name, styles }: Side): string {
-  if (name === 'closed') return 'as one word';
-  if (name === 'hyphened') return 'with a hyphen';
-  if (name !== 'open') return 'as';
-  return `as ${['two', 'three', 'four'][styles[0]!.forms[0]!.folds.length - 2]!} words`;
+function wayOf({ name, styles }: Side, text: string): string {
+  if (name === 'closed') return `as one word (“${text}”)`;
+  if (name === 'hyphened') return `with a hyphen (“${text}”)`;
+  if (name !== 'open') return `as “${text}”`;
+  return `as ${['two', 'three', 'four'][styles[0]!.forms[0]!.folds.length - 2]!} words (“${text}”)`;
 }
 
 function listed(items: readonly string[]): string {

@@ -1,7 +1,9 @@
 // Styles: the inflections of one way of writing together, with what its uses tell about it.
 import type { Corpus } from '../../corpus/corpus.js';
+import type { TokenStream } from '../../corpus/stream.js';
+import { FactFlag } from '../../facts/flags.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, isRunningText } from '../places.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn, isRunningText } from '../places.js';
 import type { Use } from '../places.js';
 import type { Candidate, Form, Shape } from './candidates.js';
 import type { Slot, SlotReader } from './slots.js';
@@ -28,9 +30,11 @@ export interface Style {
   readonly lowerCamel: number;
   /** No small letter, several capitals (SLOWLOG). */
   readonly shouted: number;
+  /** A capitalised content word stands right before: the form may be a part of a longer name. */
+  readonly afterName: number;
 }
 
-type Cases = Record<'inside' | 'capitalised' | 'withCapital' | 'camel' | 'lowerCamel' | 'shouted', number>;
+type Cases = Record<'inside' | 'capitalised' | 'withCapital' | 'camel' | 'lowerCamel' | 'shouted' | 'afterName', number>;
 
 /** The styles of a candidate. Where only the plural differs (indexes, indices), each plural is a style. */
 export function stylesOf(corpus: Corpus, slots: SlotReader, candidate: Candidate): Style[] {
@@ -50,7 +54,7 @@ export function stylesOf(corpus: Corpus, slots: SlotReader, candidate: Candidate
 function makeStyle(corpus: Corpus, reader: SlotReader, text: string, forms: readonly Form[]): Style {
   const slots: Record<Slot, number> = { attributive: 0, predicate: 0, noun: 0, verb: 0, unclear: 0, lone: 0 };
   const uses: Use[] = [];
-  const cases: Cases = { inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0 };
+  const cases: Cases = { inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0, afterName: 0 };
   for (const form of forms) {
     for (const row of form.rows) {
       const length = form.folds.length;
@@ -69,7 +73,11 @@ function makeStyle(corpus: Corpus, reader: SlotReader, text: string, forms: read
 function countCase(corpus: Corpus, row: number, length: number, cases: Cases): void {
   const { stream, vocabulary } = corpus;
   if (!isRunningText(stream, row) || (stream.flags[row]! & TokenFlag.sentenceStart) !== 0) return;
+  if (row === firstRowOfBlock(stream, row)) return;
   cases.inside++;
+  if (stream.spelling[row - 1] !== stream.fold[row - 1] && isContent(stream, row - 1) && followsOn(stream, row)) {
+    cases.afterName++;
+  }
   let capitals = 0;
   for (let i = 0; i < length; i++) if (stream.spelling[row + i] !== stream.fold[row + i]) capitals++;
   if (capitals > 0) cases.withCapital++;
@@ -80,6 +88,11 @@ function countCase(corpus: Corpus, row: number, length: number, cases: Cases): v
     cases.camel++;
     if (/^\p{Ll}/u.test(text)) cases.lowerCamel++;
   } else if (/^[^\p{Ll}]*$/u.test(text)) cases.shouted++;
+}
+
+function isContent(stream: TokenStream, row: number): boolean {
+  const flags = stream.flags[row]!;
+  return (flags & TokenFlag.word) !== 0 && (flags & FactFlag.functionWord) === 0;
 }
 
 /** True where a sign is glued to the form, as in paths, options and placeholders: it is part of a larger thing there. */
