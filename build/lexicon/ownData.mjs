@@ -8,6 +8,7 @@ const lists = [
   ['closedSets', 'sets whose members are never one thing'],
   ['functionWords', 'words that carry grammar rather than content'],
   ['verbNounPairs', 'phrasal verbs and the nouns made of them'],
+  ['iseWords', 'words that end in -ise in every country'],
   ['plurals', 'irregular plurals, and nouns that have none'],
 ];
 

@@ -67,10 +67,8 @@ function compilePart(synsets, index, linkMarks) {
     for (const { target, from, to } of antonyms) {
       const other = synsets.get(target);
       const pair = [words[from - 1], other.words[to - 1]].map((word) => lemmaNumber.get(word.replaceAll('_', ' ')));
-      if (pair.every((i) => i !== undefined) && pair[0] < pair[1]) oppositeWords.add(pair.map(encodeNumber).join(''));
-      if (numbers.has(target) && number(offset) < number(target)) {
-        oppositeSenses.add(encodeNumber(number(offset)) + encodeNumber(number(target)));
-      }
+      if (pair.every((i) => i !== undefined)) oppositeWords.add(encodePair(...pair));
+      if (numbers.has(target)) oppositeSenses.add(encodePair(number(offset), number(target)));
     }
   }
   return {
@@ -80,6 +78,11 @@ function compilePart(synsets, index, linkMarks) {
     OppositeWords: [...oppositeWords].sort().join(''),
     OppositeSenses: [...oppositeSenses].sort().join(''),
   };
+}
+
+/** The smaller number first: opposition has no direction, though the database names some of it in one only. */
+function encodePair(a, b) {
+  return encodeNumber(Math.min(a, b)) + encodeNumber(Math.max(a, b));
 }
 
 /** Lemma → offsets of its synsets, the commonest first, and how many of them a tagged corpus has (wndb(5WN), index files). */

@@ -34,7 +34,9 @@ export function equivalentSets(): readonly EquivalentSet[] {
 /** The other terms of every set that has a term, in the order of the list; a set twice named gives its terms twice. */
 export function equivalentsOf(term: string, pos?: EquivalentPos): Equivalent[] {
   const key = termKey(term);
-  return setsOf(key)
+  const all = equivalentSets();
+  return (indexOf(key) ?? [])
+    .flatMap((i) => all[i] ?? [])
     .filter((set) => pos === undefined || set.pos === pos)
     .flatMap((set) => set.terms.filter((other) => termKey(other) !== key).map((other) => ({ term: other, set })));
 }
@@ -45,12 +47,23 @@ export function equivalentsOf(term: string, pos?: EquivalentPos): Equivalent[] {
  * @param pos where given, only sets of that part of speech count
  */
 export function areEquivalent(a: string, b: string, pos?: EquivalentPos): EquivalentSet | undefined {
-  const left = termKey(a);
-  const right = termKey(b);
-  if (left === right) return undefined;
-  const others = new Set(setsOf(right));
-  const shared = setsOf(left).filter((set) => others.has(set) && (pos === undefined || set.pos === pos));
-  return shared.find((set) => set.distinct === undefined) ?? shared[0];
+  return equivalentByKeys(termKey(a), termKey(b), pos);
+}
+
+/** The same for terms whose keys are known already ({@link termKey}). */
+export function equivalentByKeys(a: string, b: string, pos?: EquivalentPos): EquivalentSet | undefined {
+  const all = equivalentSets();
+  const left = indexOf(a);
+  const right = indexOf(b);
+  if (a === b || left === undefined || right === undefined) return undefined;
+  let first: EquivalentSet | undefined;
+  for (const i of left) {
+    const set = all[i];
+    if (set === undefined || !right.includes(i) || (pos !== undefined && set.pos !== pos)) continue;
+    if (set.distinct === undefined) return set;
+    first ??= set;
+  }
+  return first;
 }
 
 /**
@@ -85,10 +98,10 @@ export function parseEquivalents(text: string): EquivalentSet[] {
   return found;
 }
 
-function setsOf(key: string): EquivalentSet[] {
-  const all = equivalentSets();
-  setsByKey ??= indexByKey(all);
-  return (setsByKey.get(key) ?? []).flatMap((i) => all[i] ?? []);
+/** Places in the list of the sets that have a term. */
+function indexOf(key: string): readonly number[] | undefined {
+  setsByKey ??= indexByKey(equivalentSets());
+  return setsByKey.get(key);
 }
 
 function indexByKey(all: readonly EquivalentSet[]): Map<string, number[]> {

@@ -2,9 +2,11 @@
 import { closedSetsText } from './data/closedSets.js';
 import { oppositesText } from './data/opposites.js';
 import { differenceByAffix, sharedEndings } from './affixes.js';
-import { areEquivalent } from './equivalents.js';
+import { equivalentByKeys } from './equivalents.js';
 import { areOpposites } from './synonyms.js';
-import { termKey, termWords } from './termKey.js';
+import { singularOf } from './plurals.js';
+import { spellingKey } from './spelling.js';
+import { plainWords, splitWords, termKey } from './termKey.js';
 
 /** Why two terms stay apart. */
 export interface Apart {
@@ -26,23 +28,31 @@ let lists: Lists | undefined;
  * their ends, at what differs ("CPU limit", "memory limit"). Forms of one term are never apart.
  */
 export function mustStayApart(a: string, b: string): Apart | undefined {
-  const left = termWords(a);
-  const right = termWords(b);
-  const leftKey = left.join('');
-  const rightKey = right.join('');
+  const left = plainWords(a);
+  const right = plainWords(b);
+  const leftKey = keyOf(left);
+  const rightKey = keyOf(right);
   if (leftKey === rightKey) return undefined;
   if (withoutDigits(leftKey) === withoutDigits(rightKey)) return apart('digits', a, b, 'they differ in digits only');
   const whole = listed(a, b, leftKey, rightKey);
   if (whole !== undefined) return whole;
   // What our own list says of two whole terms outweighs what their parts suggest (fill in, fill out a form).
-  if (areEquivalent(a, b) !== undefined) return undefined;
+  if (equivalentByKeys(leftKey, rightKey) !== undefined) return undefined;
   const [leftRest, rightRest] = differingParts(left, right);
   if (leftRest.length + rightRest.length < left.length + right.length) {
-    const part = listed(leftRest.join(' '), rightRest.join(' '), leftRest.join(''), rightRest.join(''));
+    const part = listed(leftRest.join(' '), rightRest.join(' '), keyOf(leftRest), keyOf(rightRest));
     if (part !== undefined) return part;
   }
-  if (leftRest.length <= 1 && rightRest.length <= 1) return byWord(leftRest[0] ?? '', rightRest[0] ?? '');
-  return undefined;
+  if (leftRest.length > 1 || rightRest.length > 1) return undefined;
+  return byWord(leftRest[0] ?? '', rightRest[0] ?? '') ?? byLastWords(splitWords(a), splitWords(b));
+}
+
+/** The last words as they are written: what looks like a plural may be a word of its own (apropos, goods). */
+function byLastWords(a: readonly string[], b: readonly string[]): Apart | undefined {
+  const [left = '', right = ''] = [a.at(-1), b.at(-1)];
+  if (a.length !== b.length || (left === singularOf(left) && right === singularOf(right))) return undefined;
+  if (!a.slice(0, -1).every((word, i) => sameWord(word, b[i])) || sameWord(left, right)) return undefined;
+  return byWord(left, right);
 }
 
 /** Names of the closed sets that two terms share. */
@@ -74,13 +84,23 @@ function byWord(a: string, b: string): Apart | undefined {
   return undefined;
 }
 
+/** The key of words already split, as {@link termKey} gives it. */
+function keyOf(words: readonly string[]): string {
+  return words.map(spellingKey).join('');
+}
+
 /** What is left of two word lists when the words they share at their beginnings and ends are gone. */
 function differingParts(a: readonly string[], b: readonly string[]): [string[], string[]] {
   let start = 0;
-  while (start < a.length && start < b.length && a[start] === b[start]) start++;
+  while (start < a.length && start < b.length && sameWord(a[start], b[start])) start++;
   let end = 0;
-  while (end < a.length - start && end < b.length - start && a[a.length - 1 - end] === b[b.length - 1 - end]) end++;
+  while (end < a.length - start && end < b.length - start && sameWord(a[a.length - 1 - end], b[b.length - 1 - end]))
+    end++;
   return [a.slice(start, a.length - end), b.slice(start, b.length - end)];
+}
+
+function sameWord(a = '', b = ''): boolean {
+  return a === b || spellingKey(a) === spellingKey(b);
 }
 
 function withoutDigits(key: string): string {

@@ -1,13 +1,16 @@
 // Folds the spellings of one word, British or American or other, to one key.
+import { iseWordsText } from './data/iseWords.js';
 import { spellingText } from './data/spelling.js';
 
 /** Directions that are written with and without a final s (towards, toward); verbs such as "forwards" fold alike. */
 const wards = /^(after|back|down|east|for|home|in|north|on|out|sea|side|sky|south|to|up|west)wards$/;
 
-/** -ise beside -ize. That the key of a word like "promise" is no word does not matter: nothing else has that key. */
-const ise = /^([a-z]{3,})is(e|es|ed|ing|er|ers|able|ation|ations|ational)$/;
+/** What follows the s of -ise beside -ize. */
+const afterIs = new Set(['e', 'es', 'ed', 'ing', 'er', 'ers', 'able', 'ation', 'ations', 'ational']);
 
 let table: Map<string, string> | undefined;
+/** Words that end in -ise everywhere, without that ending. */
+let alwaysIse: ReadonlySet<string> | undefined;
 
 /**
  * The key that all spellings of a word share: "colour" and "color" → "color", "organise" → "organize". Words of several
@@ -24,7 +27,11 @@ export function spellingKey(lowerWord: string): string {
 
 function byRule(word: string): string {
   if (word.endsWith('wards')) return word.replace(wards, '$1ward');
-  return word.replace(ise, '$1iz$2');
+  const at = word.lastIndexOf('is');
+  if (at < 3 || !afterIs.has(word.slice(at + 2))) return word;
+  const stem = word.slice(0, at);
+  alwaysIse ??= new Set(iseWordsText.split(/\s/).map((one) => one.replace(/ise$/, '')));
+  return stem.endsWith('w') || alwaysIse.has(stem) ? word : `${stem}iz${word.slice(at + 2)}`;
 }
 
 function parse(): Map<string, string> {

@@ -1,5 +1,6 @@
 // Reads the compact WordNet tables: from a word to its senses in order, from a sense to what it is linked with.
 import * as data from './data/wordnet.js';
+import { indexLines } from './lineIndex.js';
 
 /** The parts of speech that WordNet knows. */
 export type WordNetPos = 'noun' | 'verb' | 'adjective' | 'adverb';
@@ -10,15 +11,15 @@ export const wordNetParts: readonly WordNetPos[] = ['noun', 'verb', 'adjective',
 /** One part of speech, decoded on first use. */
 export interface WordNetTable {
   /** Number of a lower-case lemma, words separated by a space; −1 when it is not there. */
-  numberOf(lemma: string): number;
+  readonly numberOf: (lemma: string) => number;
   /** Senses of a lemma's number, the commonest first. */
-  sensesOf(lemma: number): Uint32Array;
+  readonly sensesOf: (lemma: number) => Uint32Array;
   /** Direct hypernyms of a noun's or verb's sense; the head senses that an adjective's sense is similar to. */
-  linksOf(sense: number): Uint32Array;
+  readonly linksOf: (sense: number) => Uint32Array;
   /** Whether the dictionary itself calls two lemmas antonyms. */
-  areAntonyms(lemma1: number, lemma2: number): boolean;
+  readonly areAntonyms: (lemma1: number, lemma2: number) => boolean;
   /** Whether some words of two senses are antonyms. */
-  areOpposite(sense1: number, sense2: number): boolean;
+  readonly areOpposite: (sense1: number, sense2: number) => boolean;
 }
 
 const tables = new Map<WordNetPos, WordNetTable>();
@@ -40,39 +41,18 @@ export function wordNetTable(pos: WordNetPos): WordNetTable {
 }
 
 function decode(lemmas: string, senses: string, links: string, words: string, opposed: string): WordNetTable {
-  const starts = lineStarts(lemmas);
+  const index = indexLines(lemmas);
   const senseLists = decodeLists(senses);
   const linkLists = decodeLists(links);
   const antonyms = decodePairs(words);
   const opposites = decodePairs(opposed);
   return {
-    numberOf: (lemma) => findLine(lemmas, starts, lemma),
+    numberOf: index.find,
     sensesOf: (lemma) => senseLists.values.subarray(senseLists.starts[lemma], senseLists.starts[lemma + 1]),
     linksOf: (sense) => linkLists.values.subarray(linkLists.starts[sense], linkLists.starts[sense + 1]),
     areAntonyms: (lemma1, lemma2) => hasPair(antonyms, lemma1, lemma2),
     areOpposite: (sense1, sense2) => hasPair(opposites, sense1, sense2),
   };
-}
-
-/** Where each line starts, and one past the end of the text and its absent last line break. */
-function lineStarts(text: string): Uint32Array {
-  const starts = [0];
-  for (let at = text.indexOf('\n'); at >= 0; at = text.indexOf('\n', at + 1)) starts.push(at + 1);
-  starts.push(text.length + 1);
-  return Uint32Array.from(starts);
-}
-
-function findLine(text: string, starts: Uint32Array, wanted: string): number {
-  let low = 0;
-  let high = starts.length - 2;
-  while (low <= high) {
-    const middle = (low + high) >> 1;
-    const line = text.slice(starts[middle], (starts[middle + 1] ?? 0) - 1);
-    if (line === wanted) return middle;
-    if (line < wanted) low = middle + 1;
-    else high = middle - 1;
-  }
-  return -1;
 }
 
 /** Lists separated by a space; in a list, "!" is the next number never met before, else three digits are a number. */

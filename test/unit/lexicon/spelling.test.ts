@@ -62,6 +62,18 @@ describe('spellingKey', () => {
   it.each(same)('folds %s and %s', (a, b) => expect(spellingKey(a)).toBe(spellingKey(b)));
   it.each(different)('keeps %s and %s apart', (a, b) => expect(spellingKey(a)).not.toBe(spellingKey(b)));
 
+  it.each([
+    'raise',
+    'exercises',
+    'promised',
+    'enterprise',
+    'advisable',
+    'supervising',
+    'otherwise',
+    'precise',
+    'disable',
+  ])('leaves %s alone', (word) => expect(spellingKey(word)).toBe(word));
+
   it('leaves unknown words as they are, and is its own fixed point', () => {
     expect(spellingKey('kubelet')).toBe('kubelet');
     expect(spellingKey('')).toBe('');
