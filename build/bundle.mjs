@@ -1,10 +1,11 @@
 // Bundles the extension, the language server and the command line into dist/, one file each.
 import { build } from 'esbuild';
-import { chmod, rm } from 'node:fs/promises';
+import { chmod, readFile, rm } from 'node:fs/promises';
 import { fileURLToPath } from 'node:url';
 
 const root = fileURLToPath(new URL('..', import.meta.url));
 const watching = process.argv.includes('--watch');
+const { version } = JSON.parse(await readFile(new URL('../package.json', import.meta.url), 'utf8'));
 const shared = {
   absWorkingDir: root,
   bundle: true,
@@ -14,6 +15,7 @@ const shared = {
   sourcemap: process.argv.includes('--source-maps') || watching ? 'linked' : false,
   minify: !watching,
   legalComments: 'none',
+  define: { EVENWORD_VERSION: JSON.stringify(version) },
   loader: { '.css': 'text', '.html': 'text' },
   logLevel: 'warning',
 };

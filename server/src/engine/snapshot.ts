@@ -5,6 +5,7 @@ import type { Agenda } from '../decisions/decide.js';
 import { scopeOf } from '../decisions/scope.js';
 import type { PlacedTermbase } from '../decisions/scope.js';
 import type { Finding } from '../findings/finding.js';
+import type { QuestionKind } from '../mining/question.js';
 import { startReading } from '../prose/read.js';
 import type { Reading } from '../prose/read.js';
 import type { SourceText } from '../text/sourceText.js';
@@ -29,10 +30,10 @@ export interface LoadedTermbase {
   readonly termbase: Termbase;
 }
 
-/** Which words of the open questions are shown as hints: questions less sure than this stay in the list alone. */
+/** What is asked. */
 export interface EngineSettings {
   /** Kinds of question that are asked. */
-  readonly kinds: readonly string[];
+  readonly kinds: readonly QuestionKind[];
   /** Least confidence, from 0 to 1, of a question that is asked. */
   readonly leastConfidence: number;
 }
@@ -80,6 +81,11 @@ export class Snapshot {
   readingOf(uri: string): Reading | undefined {
     const document = this.state.documents.get(uri);
     return document && (document.reading ?? startReading(document.source));
+  }
+
+  /** The same state, asking other kinds of question. */
+  asking(kinds: readonly QuestionKind[]): Snapshot {
+    return new Snapshot({ ...this.state, settings: { ...this.state.settings, kinds } }, new Map());
   }
 
   /** What is decided and what is asked where the URI (of a document, existing or not) stands. */

@@ -56,6 +56,8 @@ export interface Question {
   readonly confidence: number;
   /** What answering settles: confidence × uses outside the leading term. Orders the questions. */
   readonly worth: number;
+  /** For verbs: the objects (nouns in their dictionary form) with which they name one operation. */
+  readonly objects?: readonly string[];
   /** Most used first, ties by code units. */
   readonly terms: readonly QuestionTerm[];
   readonly reasons: readonly Reason[];

@@ -5,6 +5,7 @@ import { pathToFileURL } from 'node:url';
 import ignore from 'ignore';
 import type { Ignore } from 'ignore';
 import type { Format, SourceText } from '../text/sourceText.js';
+import { canonicalUri } from '../text/uri.js';
 
 /** Files larger than this are left out: prose is never so long, data often is. In bytes. */
 export const LARGEST_FILE = 4 * 1024 * 1024;
@@ -66,6 +67,11 @@ export async function findFiles(path: string): Promise<FoundFiles> {
   return found;
 }
 
+/** The canonical URI of a file. */
+export function uriOfPath(path: string): string {
+  return canonicalUri(pathToFileURL(path).href);
+}
+
 /** A file's text, or why it cannot be had. */
 export type ReadFile = { readonly source: SourceText } | { readonly leftOut: LeftOut };
 
@@ -76,7 +82,7 @@ export async function readDocument(path: string): Promise<ReadFile> {
     const reason = unreadable(bytes);
     if (reason !== undefined) return { leftOut: { path, reason } };
     const text = new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes);
-    return { source: { uri: pathToFileURL(path).href, format: formatOf(path) ?? 'plaintext', text } };
+    return { source: { uri: uriOfPath(path), format: formatOf(path) ?? 'plaintext', text } };
   } catch (error) {
     if (error instanceof TypeError) return { leftOut: { path, reason: await encodingReason(path) } };
     return { leftOut: { path, reason: plainReason(error) } };

@@ -1,0 +1,26 @@
+// The language client: which documents the server sees, and what it is told at the start.
+import { LanguageClient } from 'vscode-languageclient/node';
+import type { LanguageClientOptions, ServerOptions } from 'vscode-languageclient/node';
+import { DOCUMENT_LANGUAGES, STATE_NOTIFICATION, TERMBASE_NAME } from '../../server/src/lsp/protocol.js';
+import type { ClientOptions, FolderStateParams } from '../../server/src/lsp/protocol.js';
+
+/** Starts the server and connects it to the editor. */
+export async function startClient(
+  server: ServerOptions,
+  onState: (state: FolderStateParams) => void,
+): Promise<LanguageClient> {
+  const options: LanguageClientOptions = {
+    documentSelector: [
+      ...DOCUMENT_LANGUAGES.flatMap((language) =>
+        ['file', 'vscode-remote', 'vscode-vfs', 'untitled'].map((scheme) => ({ scheme, language })),
+      ),
+      { pattern: `**/${TERMBASE_NAME}` },
+    ],
+    initializationOptions: { savesTermbase: true } satisfies ClientOptions,
+    markdown: { isTrusted: false, supportHtml: false },
+  };
+  const client = new LanguageClient('evenword', 'Evenword', server, options);
+  client.onNotification(STATE_NOTIFICATION, onState);
+  await client.start();
+  return client;
+}

@@ -1,0 +1,81 @@
+// evenword ask: the undecided mixes of a documentation set, most worth first, with their evidence.
+import { ExampleFinder } from '../engine/examples.js';
+import type { Snapshot } from '../engine/snapshot.js';
+import type { Question, QuestionKind } from '../mining/question.js';
+import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
+import { Exit } from './host.js';
+import type { Subcommand } from './main.js';
+import { UsageError } from './options.js';
+import { renderQuestions } from './questionText.js';
+
+const KINDS: readonly QuestionKind[] = [
+  'variant',
+  'abbreviation',
+  'ambiguous-abbreviation',
+  'synonym',
+  'verb-object',
+  'look-alike',
+];
+
+export const ask: Subcommand = {
+  summary: 'lists the undecided mixes: terms that may name one thing',
+  operands: 'DIR…',
+  options: {
+    format: { value: 'FORMAT', choices: ['text', 'json'], help: 'text for people (default), json for programs' },
+    kinds: { value: 'KINDS', help: `kinds of question, by commas: ${KINDS.join(', ')}; all but look-alike by default` },
+    most: { value: 'N', help: 'list no more than N questions (all by default)' },
+    'explain-files': { help: 'also say which files were left out, and why' },
+  },
+  async run({ options, operands }, host) {
+    const folders = requireFolders(operands);
+    const kinds = readKinds(options.get('kinds'));
+    const most = readCount(options.get('most'));
+    const survey = await surveyOrStop(host, folders, true);
+    if (survey === undefined) return Exit.cannotRun;
+    const snapshot = kinds === undefined ? survey.snapshot : survey.snapshot.asking(kinds);
+    const open = snapshot.agendaAt(survey.rootUri).open.slice(0, most);
+    sayLeftOut(host, survey.leftOut, options.has('explain-files'));
+    if (options.get('format') === 'json') host.write(`${JSON.stringify(toJson(snapshot, open), undefined, 2)}\n`);
+    else host.write(renderQuestions(snapshot, open, host));
+    return Exit.clean;
+  },
+};
+
+/** The JSON of `ask`, as the README documents it. */
+function toJson(snapshot: Snapshot, questions: readonly Question[]): object {
+  const { documents, words } = snapshot.relations.size;
+  const examples = new ExampleFinder(snapshot);
+  return {
+    documents,
+    words,
+    questions: questions.map((question) => ({
+      id: question.id,
+      kind: question.kind,
+      confidence: Math.round(question.confidence * 1000) / 1000,
+      terms: question.terms.map(({ text, uses, documents: pages, forms }) => ({
+        ...{ text, uses, documents: pages },
+        forms: forms.map((form) => form.text),
+      })),
+      reasons: question.reasons.map(({ kind, text, value }) => ({
+        kind,
+        text,
+        value: Math.round(value * 1000) / 1000,
+      })),
+      examples: examples.of(question).map(({ term, uri, line, text }) => ({ term, uri, line, text })),
+    })),
+  };
+}
+
+function readKinds(value: string | true | undefined): readonly QuestionKind[] | undefined {
+  if (typeof value !== 'string') return undefined;
+  const names = value.split(',').map((name) => name.trim());
+  const unknown = names.find((name) => !KINDS.some((kind) => kind === name));
+  if (unknown !== undefined) throw new UsageError(`There is no kind “${unknown}”. There are: ${KINDS.join(', ')}.`);
+  return KINDS.filter((kind) => names.includes(kind));
+}
+
+function readCount(value: string | true | undefined): number | undefined {
+  if (typeof value !== 'string') return undefined;
+  if (!/^[1-9]\d{0,8}$/.test(value)) throw new UsageError(`--most takes a whole number from 1, not “${value}”.`);
+  return Number(value);
+}

@@ -1,0 +1,33 @@
+// Holds documents to one agenda; what it found in a block is kept for as long as the block's content is.
+import type { Agenda } from '../decisions/decide.js';
+import { checkBlock, checkProse } from '../findings/check.js';
+import type { BlockFinding, Finding } from '../findings/finding.js';
+import { readKept } from '../findings/suppression.js';
+import { TermSet } from '../findings/termSet.js';
+import type { BlockContent } from '../prose/prose.js';
+import type { Reading } from '../prose/read.js';
+import { checkedTerms } from './checkedTerms.js';
+
+/** The terms of one agenda, and what they found. */
+export class Checker {
+  private compiled: TermSet | undefined;
+  private readonly ofBlock = new WeakMap<BlockContent, readonly BlockFinding[]>();
+
+  constructor(private readonly agenda: Agenda) {}
+
+  /** The terms that are looked for. Compiled when first asked for: thousands of terms take some milliseconds. */
+  get terms(): TermSet {
+    this.compiled ??= new TermSet(checkedTerms(this.agenda));
+    return this.compiled;
+  }
+
+  /** The findings of a document, in order of their places. Blocks that an edit left alone are not checked again. */
+  check({ source, prose }: Reading): readonly Finding[] {
+    const ofBlock = (content: BlockContent): readonly BlockFinding[] => {
+      let known = this.ofBlock.get(content);
+      if (known === undefined) this.ofBlock.set(content, (known = checkBlock(content, this.terms)));
+      return known;
+    };
+    return checkProse(prose, this.terms, { ofBlock, kept: readKept(source) });
+  }
+}

@@ -1,0 +1,35 @@
+// Replacing a finding's term by the preferred one, as edits of the document's source.
+import type { Finding } from '../findings/finding.js';
+import { isRefusal, replaceTerm } from '../rewrite/replaceTerm.js';
+import { sourceEdits } from '../rewrite/sourceEdits.js';
+import type { TextEdit } from '../text/edits.js';
+import type { Snapshot } from './snapshot.js';
+
+/** The edits of a fix, or why there is none, as a sentence for the writer. Not certain: a person should look first. */
+export type Fix =
+  | { readonly kind: 'edits'; readonly edits: readonly TextEdit[]; readonly certain: boolean }
+  | { readonly kind: 'refused'; readonly reason: string };
+
+/** Uses the preferred term in the place of a finding of this very snapshot. */
+export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding): Fix {
+  const reading = snapshot.readingOf(uri);
+  const block = reading?.prose.blocks[finding.block];
+  const source = reading?.source.text;
+  if (block === undefined || source === undefined || finding.preferred === undefined)
+    return { kind: 'refused', reason: 'There is no preferred term.' };
+  const checked = snapshot.checkerAt(uri).terms.terms.find((term) => term.checked.id === finding.termId)?.checked;
+  const replaced = replaceTerm({
+    ...{
+      text: block.content.text,
+      zones: finding.zones,
+      span: finding.proseSpan,
+      from: finding.term,
+      to: finding.preferred,
+    },
+    ...(checked?.partOfSpeech && { partOfSpeech: checked.partOfSpeech }),
+  });
+  if (isRefusal(replaced)) return { kind: 'refused', reason: replaced.refused };
+  const edits = sourceEdits(block, replaced.span, replaced.edits, source);
+  if (isRefusal(edits)) return { kind: 'refused', reason: edits.refused };
+  return { kind: 'edits', edits, certain: replaced.certain };
+}

@@ -1,0 +1,82 @@
+// Quick fixes at a place: the preferred term here, and the answers to an open question.
+import type { Span } from '../base/span.js';
+import { overlaps, touches } from '../base/span.js';
+import { preferredEdits } from '../engine/fixing.js';
+import { termAt } from '../engine/termCard.js';
+import type { Snapshot } from '../engine/snapshot.js';
+import type { Finding } from '../findings/finding.js';
+import type { Question } from '../mining/question.js';
+import type { TextEdit } from '../text/edits.js';
+import type { Choice } from './answers.js';
+
+/** A quick fix that replaces text, or one that answers a question (its edits are made when it is chosen). */
+export type QuickFix =
+  | {
+      readonly kind: 'replace';
+      readonly title: string;
+      readonly finding: Finding;
+      readonly edits: readonly TextEdit[];
+      readonly certain: boolean;
+    }
+  | {
+      readonly kind: 'answer';
+      readonly title: string;
+      readonly finding: Finding | undefined;
+      readonly question: string;
+      readonly choice: Choice;
+    };
+
+/** The quick fixes for a span of a document, most helpful first. */
+export function quickFixesAt(snapshot: Snapshot, uri: string, span: Span): QuickFix[] {
+  const findings = snapshot
+    .findingsIn(uri)
+    .filter((finding) => overlaps(finding.span, span) || touches(finding.span, span.start));
+  const fixes: QuickFix[] = [];
+  for (const finding of findings) {
+    if (finding.code !== 'deprecated-term' || finding.preferred === undefined) continue;
+    const fix = preferredEdits(snapshot, uri, finding);
+    if (fix.kind === 'edits') {
+      fixes.push({
+        kind: 'replace',
+        title: `Use “${finding.preferred}” here`,
+        finding,
+        edits: fix.edits,
+        certain: fix.certain,
+      });
+    }
+  }
+  const { open } = snapshot.agendaAt(uri);
+  const asked = new Map<string, Finding | undefined>();
+  for (const finding of findings) if (finding.questionId !== undefined) asked.set(finding.questionId, finding);
+  const here = termAt(snapshot, uri, span.start)?.checked;
+  if (here?.status === 'undecided' && !asked.has(here.conceptId)) asked.set(here.conceptId, undefined);
+  for (const [id, finding] of asked) {
+    const question = open.find((each) => each.id === id);
+    if (question !== undefined) fixes.push(...answersTo(question, finding));
+  }
+  return fixes;
+}
+
+function answersTo(question: Question, finding: Finding | undefined): QuickFix[] {
+  const names = question.terms.map(({ text }) => text);
+  const quoted = listed(names.map((name) => `“${name}”`));
+  const answer = (title: string, choice: Choice): QuickFix => ({
+    kind: 'answer',
+    title,
+    finding,
+    question: question.id,
+    choice,
+  });
+  const object =
+    question.objects === undefined ? '' : ` (with ${question.objects.map((noun) => `“${noun}”`).join(', ')})`;
+  return [
+    ...names.map((name) => answer(`Prefer “${name}”${object}`, { kind: 'prefer', preferred: name })),
+    answer(`Either is fine: ${quoted} name one concept${object}`, { kind: 'either' }),
+    answer(`Two concepts: keep ${quoted} apart`, { kind: 'apart' }),
+    answer(`Not now: do not ask about ${quoted}`, { kind: 'later' }),
+  ];
+}
+
+function listed(names: readonly string[]): string {
+  return `${names.slice(0, -1).join(', ')} and ${names[names.length - 1]!}`;
+}

@@ -1,0 +1,66 @@
+// The command line's world on Node: standard streams, the file system, colours where the terminal has them.
+import { mkdir, writeFile } from 'node:fs/promises';
+import { dirname, join, relative } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import type { CliHost, Survey } from '../cli/host.js';
+import { CannotSurvey } from '../cli/host.js';
+import { Profiles } from '../engine/factsOf.js';
+import { CannotRead, plainReason } from './files.js';
+import { surveyFolders } from './survey.js';
+
+/** The host of a process. Colours are off where NO_COLOR is set (no-color.org) or output is no terminal. */
+export function nodeHost(): CliHost {
+  const colours = process.stdout.isTTY && process.env.NO_COLOR === undefined;
+  let shown = 0;
+  const progress = (text: string): void => {
+    if (!process.stderr.isTTY) return;
+    process.stderr.write(`\r${text.padEnd(shown)}${text === '' ? '\r' : ''}`);
+    shown = text.length;
+  };
+  return {
+    write: (text) => void process.stdout.write(text),
+    note: (text) => void process.stderr.write(text),
+    progress,
+    width: process.stdout.columns || 100,
+    emphasise: (text) => (colours ? `\u001b[1m${text}\u001b[22m` : text),
+    faint: (text) => (colours ? `\u001b[2m${text}\u001b[22m` : text),
+    survey(paths, mine) {
+      return surveyForCli(paths, mine, this.progress.bind(this));
+    },
+    pathOf(uri) {
+      if (!uri.startsWith('file:')) return uri;
+      const path = fileURLToPath(uri);
+      const below = relative(process.cwd(), path);
+      return below === '' || below.startsWith('..') ? path : below;
+    },
+    async writeFiles(folder, files) {
+      try {
+        for (const [name, text] of files) {
+          await mkdir(dirname(join(folder, name)), { recursive: true });
+          await writeFile(join(folder, name), text);
+        }
+      } catch (error) {
+        throw new CannotSurvey(`${folder}: ${plainReason(error)}`);
+      }
+    },
+  };
+}
+
+async function surveyForCli(
+  paths: readonly string[],
+  mine: boolean,
+  progress: (text: string) => void,
+): Promise<Survey> {
+  try {
+    const { engine, rootUri, leftOut } = await surveyFolders(paths, new Profiles(), {
+      mine,
+      progress: (stage, done, all) =>
+        progress(stage === 'reading' ? `Reading ${done} of ${all} pages` : 'Comparing terms …'),
+    });
+    progress('');
+    return { snapshot: engine.snapshot, rootUri, leftOut };
+  } catch (error) {
+    if (error instanceof CannotRead) throw new CannotSurvey(error.message);
+    throw error;
+  }
+}

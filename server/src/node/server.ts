@@ -1,0 +1,11 @@
+// Entry of the language server on Node, over stdio or an IPC channel; the same file serves as a worker that gathers facts.
+import { createConnection, ProposedFeatures } from 'vscode-languageserver/node';
+import { serve } from '../lsp/server.js';
+import { serveAsWorker } from './factsPool.js';
+import { nodeServerHost } from './serverHost.js';
+
+declare const EVENWORD_VERSION: string;
+
+if (!serveAsWorker()) {
+  serve(createConnection(ProposedFeatures.all), nodeServerHost(), EVENWORD_VERSION);
+}

@@ -1,0 +1,95 @@
+// Reading folders into an engine: documents found and read, facts gathered on workers, relations settled.
+import { existsSync } from 'node:fs';
+import { readFile, stat } from 'node:fs/promises';
+import { dirname, join, resolve } from 'node:path';
+import { finish } from '../base/work.js';
+import { Engine } from '../engine/engine.js';
+import type { Profiles } from '../engine/factsOf.js';
+import type { SourceText } from '../text/sourceText.js';
+import { gatherAll } from './factsPool.js';
+import { CannotRead, findFiles, plainReason, readDocument, uriOfPath } from './files.js';
+import type { LeftOut } from './files.js';
+
+/** How far a survey has come. */
+export type SurveyProgress = (stage: 'reading' | 'mining', done: number, all: number) => void;
+
+/** Folders read into an engine. */
+export interface SurveyedFolders {
+  readonly engine: Engine;
+  /** The folder that holds all named paths, as a URI with a closing slash. */
+  readonly rootUri: string;
+  readonly leftOut: readonly LeftOut[];
+}
+
+/**
+ * Reads all documents and termbases under the paths, and the termbases of the folders above up to the repository's root.
+ * @throws CannotRead where a named path is missing or unreadable.
+ */
+export async function surveyFolders(
+  paths: readonly string[],
+  profiles: Profiles,
+  options: { readonly mine: boolean; readonly progress?: SurveyProgress; readonly signal?: AbortSignal },
+): Promise<SurveyedFolders> {
+  const { mine, progress, signal } = options;
+  const absolute = paths.map((path) => resolve(path));
+  const found = [];
+  for (const path of absolute) found.push(await findFiles(path));
+  const root = await commonFolder(absolute);
+  const documents = [...new Set(found.flatMap((each) => each.documents))];
+  const termbases = [...new Set([...termbasesAbove(root), ...found.flatMap((each) => each.termbases)])];
+  const leftOut = found.flatMap((each) => each.leftOut);
+  const sources: SourceText[] = [];
+  for (const path of documents) {
+    const file = await readDocument(path);
+    if ('source' in file) sources.push(file.source);
+    else leftOut.push(file.leftOut);
+  }
+  const facts = mine
+    ? await gatherAll(sources, profiles, {
+        ...(signal && { signal }),
+        progress: (done, all) => progress?.('reading', done, all),
+      })
+    : [];
+  const engine = new Engine(profiles);
+  engine.apply({
+    documents: sources.map((source, index) => {
+      const known = facts[index];
+      return { uri: source.uri, source, ...(known && { facts: known }) };
+    }),
+    termbases: await Promise.all(
+      termbases.map(async (path) => ({ uri: uriOfPath(path), text: await readTermbase(path) })),
+    ),
+  });
+  if (mine) {
+    progress?.('mining', 0, 1);
+    finish(engine.settle());
+  }
+  return { engine, rootUri: uriOfPath(join(root, '/')), leftOut };
+}
+
+async function readTermbase(path: string): Promise<string> {
+  return readFile(path, 'utf8').catch((error: unknown) => {
+    throw new CannotRead(`${path}: ${plainReason(error)}`);
+  });
+}
+
+/** The deepest folder that holds all paths. */
+async function commonFolder(paths: readonly string[]): Promise<string> {
+  const folders = await Promise.all(
+    paths.map(async (path) => ((await stat(path)).isDirectory() ? path : dirname(path))),
+  );
+  let common = folders[0]!;
+  for (const folder of folders)
+    while (folder !== common && !folder.startsWith(join(common, '/'))) common = dirname(common);
+  return common;
+}
+
+/** Termbases of the folders above, up to the root of the repository; none where there is no repository. */
+function termbasesAbove(folder: string): string[] {
+  const found: string[] = [];
+  for (let at = folder; ; at = dirname(at)) {
+    if (at !== folder && existsSync(join(at, 'termbase.yaml'))) found.push(join(at, 'termbase.yaml'));
+    if (existsSync(join(at, '.git'))) return found;
+    if (dirname(at) === at) return [];
+  }
+}
