@@ -22,6 +22,9 @@ export interface WordNetTable {
   readonly areOpposite: (sense1: number, sense2: number) => boolean;
 }
 
+const space = 32;
+const exclamationMark = 33;
+
 const tables = new Map<WordNetPos, WordNetTable>();
 
 /** The table of one part of speech. */
@@ -57,24 +60,26 @@ function decode(lemmas: string, senses: string, links: string, words: string, op
 
 /** Lists separated by a space; in a list, "!" is the next number never met before, else three digits are a number. */
 function decodeLists(text: string): { starts: Uint32Array; values: Uint32Array } {
-  const values: number[] = [];
-  const starts: number[] = [0];
+  const values = new Uint32Array(text.length);
+  const starts = new Uint32Array(text.length + 2);
+  let count = 0;
+  let lists = 1;
   let unmet = 0;
   for (let at = 0; at < text.length;) {
-    const mark = text[at];
-    if (mark === ' ') {
-      starts.push(values.length);
+    const mark = text.charCodeAt(at);
+    if (mark === space) {
+      starts[lists++] = count;
       at += 1;
-    } else if (mark === '!') {
-      values.push(unmet++);
+    } else if (mark === exclamationMark) {
+      values[count++] = unmet++;
       at += 1;
     } else {
-      values.push(numberAt(text, at));
+      values[count++] = numberAt(text, at);
       at += 3;
     }
   }
-  starts.push(values.length);
-  return { starts: Uint32Array.from(starts), values: Uint32Array.from(values) };
+  starts[lists] = count;
+  return { starts: starts.slice(0, lists + 1), values: values.slice(0, count) };
 }
 
 /** Pairs as sorted numbers `smaller · 2²⁰ + larger`; numbers are below 85³ < 2²⁰. */
