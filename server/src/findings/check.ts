@@ -5,7 +5,8 @@ import { deprecatedTerm } from './deprecatedTerm.js';
 import type { BlockFinding, Finding } from './finding.js';
 import { mixedTerms } from './mixedTerms.js';
 import { NOTHING_KEPT, type Kept } from './suppression.js';
-import { formAt, type TermSet } from './termSet.js';
+import type { Form } from '../rewrite/inflect.js';
+import { formAt, type CompiledTerm, type TermSet } from './termSet.js';
 import { useOfMatch, type TermUse } from './termUse.js';
 import type { TagAt } from './useOfWord.js';
 
@@ -19,23 +20,30 @@ const RULES: readonly ((use: TermUse) => BlockFinding | undefined)[] = [deprecat
  */
 export function checkBlock(content: BlockContent, terms: TermSet, tagAt?: TagAt): readonly BlockFinding[] {
   if (!isOpen(content.zones)) return [];
-  const findings: BlockFinding[] = [];
-  const { text } = content;
-  terms.scan(text, (index, start, end, formIndex) => {
+  // The matches are gathered first: judging one scans its surroundings with the same matcher.
+  const matches: { term: CompiledTerm; start: number; end: number; form: Form }[] = [];
+  terms.scan(content.text, (index, start, end, formIndex) => {
     const term = terms.terms[index]!;
     const { status } = term.checked;
-    if (status !== 'deprecated' && status !== 'undecided') return;
-    const use = useOfMatch(content, terms, term, start, end, formAt(formIndex), tagAt);
-    if (!use) return;
-    for (const rule of RULES) {
-      const finding = rule(use);
-      if (!finding) continue;
-      // Two decisions about one place: the first in the list of terms is enough.
-      if (findings[findings.length - 1]?.span.start !== start) findings.push(finding);
-      return;
-    }
+    if (status === 'deprecated' || status === 'undecided') matches.push({ term, start, end, form: formAt(formIndex) });
   });
+  const findings: BlockFinding[] = [];
+  for (const { term, start, end, form } of matches) {
+    // Two decisions about one place: the first in the list of terms is enough.
+    if (findings[findings.length - 1]?.span.start === start) continue;
+    const use = useOfMatch(content, terms, term, start, end, form, tagAt);
+    const finding = use && firstOf(use);
+    if (finding) findings.push(finding);
+  }
   return findings;
+}
+
+function firstOf(use: TermUse): BlockFinding | undefined {
+  for (const rule of RULES) {
+    const finding = rule(use);
+    if (finding) return finding;
+  }
+  return undefined;
 }
 
 /** What a document's check may draw on besides its prose and terms. */

@@ -1,4 +1,5 @@
 // Finds many terms at once in running text, in all their forms, longest first; scanning allocates nothing.
+import { invariant } from '../base/invariant.js';
 import { FORMS, termForms, type PartOfSpeech } from '../rewrite/inflect.js';
 import { ASCII_FOLD, foldSlow } from './foldWord.js';
 import { normalSeparator, toPattern, type Pattern } from './pattern.js';
@@ -30,6 +31,7 @@ export class TermMatcher {
   private readonly trie: TermTrie;
   private readonly longest: number;
   private readonly reader = new WordReader(this.words);
+  private scanning = false;
 
   constructor(terms: readonly MatchableTerm[]) {
     const patterns: Pattern[] = [];
@@ -51,12 +53,21 @@ export class TermMatcher {
     this.longest = patterns.reduce((most, { words }) => Math.max(most, words.length), 1);
   }
 
-  /** Reports the terms in `text` between `from` and `to`, left to right, without overlaps. */
+  /** Reports the terms in `text` between `from` and `to`, left to right, without overlaps. `onMatch` must not scan with this matcher. */
   scan(text: string, from: number, to: number, onMatch: OnMatch): void {
     if (this.patterns.length === 0) return;
+    invariant(!this.scanning, 'a matcher scans one text at a time');
+    this.scanning = true;
+    try {
+      this.run(text, from, Math.min(to, text.length), onMatch);
+    } finally {
+      this.scanning = false;
+    }
+  }
+
+  private run(text: string, from: number, end: number, onMatch: OnMatch): void {
     const { reader } = this;
     const { first } = this.trie;
-    const end = Math.min(to, text.length);
     let at = from;
     let free = from;
     reader.count = 0;
@@ -147,7 +158,7 @@ export class TermMatcher {
     const start = this.reader.starts[k]! - lead.length;
     const stop = this.reader.ends[last]! + tail.length;
     if (lead !== '' && (start < from || start < free || !text.startsWith(lead, start))) return -1;
-    if (tail !== '' && (stop > end || !text.startsWith(tail, this.reader.ends[last]!))) return -1;
+    if (tail !== '' && (stop > end || !text.startsWith(tail, this.reader.ends[last]))) return -1;
     if (exact !== undefined && text.slice(start, stop).replace(/\s+/g, ' ') !== exact) return -1;
     return stop;
   }

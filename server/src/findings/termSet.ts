@@ -5,6 +5,9 @@ import { foldText } from './foldWord.js';
 import { ObjectSet } from './objectOfVerb.js';
 import { TermMatcher, type OnMatch } from './termMatcher.js';
 
+/** How far behind a match a term that overlaps it may end, in UTF-16 units. */
+const REACH = 200;
+
 /** A term with what its rules need at each match. */
 export interface CompiledTerm {
   readonly checked: CheckedTerm;
@@ -56,14 +59,15 @@ export class TermSet {
 
   /** True where a term that is in use (not deprecated, not asked about) begins within `[start, end)` and runs beyond `end`. */
   overlapsTermInUse(text: string, start: number, end: number): boolean {
-    let found = false;
-    for (let from = nextWord(text, start, end); from < end && !found; from = nextWord(text, from, end)) {
-      this.matcher.scan(text, from, Math.min(text.length, end + 200), (index, at, stop) => {
-        const { status } = this.terms[index]!.checked;
-        if (at < end && stop > end && status !== 'deprecated' && status !== 'undecided') found = true;
-      });
+    let furthest = 0;
+    const keep: OnMatch = (index, at, stop) => {
+      const { status } = this.terms[index]!.checked;
+      if (at < end && status !== 'deprecated' && status !== 'undecided') furthest = Math.max(furthest, stop);
+    };
+    for (let from = nextWord(text, start, end); from < end; from = nextWord(text, from, end)) {
+      this.matcher.scan(text, from, Math.min(text.length, end + REACH), keep);
     }
-    return found;
+    return furthest > end;
   }
 }
 
