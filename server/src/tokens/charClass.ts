@@ -33,6 +33,8 @@ const UNSPACED =
   /^[\p{Script=Han}\p{Script=Hiragana}\p{Script=Katakana}\p{Script=Thai}\p{Script=Lao}\p{Script=Khmer}\p{Script=Myanmar}\u30FC\uFF70]$/u;
 
 const table = new Uint8Array(0x10000);
+const pairs = new Map<number, number>();
+const MOST_PAIRS = 4096;
 
 /** The class of the code unit at an offset; {@link CharClass.pair} where a whole surrogate pair starts. */
 export function classAt(text: string, offset: number): number {
@@ -46,7 +48,12 @@ export function classAt(text: string, offset: number): number {
 /** The class of the pair of surrogates at an offset. */
 export function pairClassAt(text: string, offset: number): number {
   const code = text.codePointAt(offset)!;
-  return classify(String.fromCodePoint(code), code);
+  const known = pairs.get(code);
+  if (known !== undefined) return known;
+  if (pairs.size >= MOST_PAIRS) pairs.clear();
+  const found = classify(String.fromCodePoint(code), code);
+  pairs.set(code, found);
+  return found;
 }
 
 /** The class of the code point at an offset, pairs looked through. */

@@ -12,7 +12,7 @@ import { openModel, type WinkLexicon } from './winkLexicon.js';
 
 /** A call to the tagger costs as much as some ten words; blocks are joined up to about so many tokens. */
 const TOKENS_A_CALL = 400;
-/** Of adjoining signs the tagger sees no more than this many. */
+/** Of signs and opaque units in a row the tagger sees no more than this many. */
 const SIGNS_SHOWN = 2;
 /**
  * Stands between two blocks. The tagger's patterns are over parts of speech, and none of them holds the one of a line break:
@@ -97,8 +97,7 @@ class EnglishProfile implements LanguageProfile {
       if ((flags[row]! & TokenFlag.sentenceStart) !== 0) opening = true;
       const form = kind[row] === TokenKind.word ? shownForms.of(text.slice(start[row], end[row])) : undefined;
       forms[row] = form;
-      const isSign = kind[row] === TokenKind.punctuation || kind[row] === TokenKind.symbol;
-      signs = isSign ? signs + 1 : 0;
+      signs = kind[row]! >= TokenKind.punctuation ? signs + 1 : 0;
       if (signs > SIGNS_SHOWN || inLongRun[row] !== 0) continue;
       rows.push(row);
       if (form === undefined) {

@@ -4,7 +4,7 @@ import { CharClass, pointClassAt } from './charClass.js';
 import { Scanner } from './scan.js';
 import { markSentenceStarts } from './sentences.js';
 import { TokenColumns, TokenKind } from './tokenColumns.js';
-import { type BlockTokens, type LanguageProfile, TAG, TokenFlag } from './tokens.js';
+import { type BlockTokens, type LanguageProfile, TAG, TokenFlag, tokenSlice } from './tokens.js';
 
 /** Longest stretch handed to the segmenter at once, in UTF-16 units: longer ones are cut, so that time stays in proportion. */
 const STRETCH = 4096;
@@ -49,10 +49,7 @@ class NeutralProfile implements LanguageProfile {
     const lemma = new Array<string>(columns.length);
     for (let row = 0; row < columns.length; row++) {
       columns.tag[row] = TAGS_BY_KIND[columns.kind[row]!]!;
-      lemma[row] = text
-        .slice(columns.start[row], columns.end[row])
-        .replace(/\p{Cf}+/gu, '')
-        .toLowerCase();
+      lemma[row] = tokenSlice(text, columns.start[row]!, columns.end[row]!, columns.flags[row]!).toLowerCase();
     }
     return columns.toBlockTokens(lemma);
   }

@@ -63,8 +63,13 @@ const INVISIBLE_CHARACTERS = /[\p{Cf}]+/gu;
 
 /** The text of one token as it reads, without soft hyphens and zero-width characters. */
 export function tokenText(text: string, tokens: BlockTokens, row: number): string {
-  const slice = text.slice(tokens.start[row], tokens.end[row]);
-  return (tokens.flags[row]! & TokenFlag.invisible) === 0 ? slice : slice.replace(INVISIBLE_CHARACTERS, '');
+  return tokenSlice(text, tokens.start[row]!, tokens.end[row]!, tokens.flags[row]!);
+}
+
+/** The same for a token of which the place and the flags are at hand. */
+export function tokenSlice(text: string, start: number, end: number, flags: number): string {
+  const slice = text.slice(start, end);
+  return (flags & TokenFlag.invisible) === 0 ? slice : slice.replace(INVISIBLE_CHARACTERS, '');
 }
 
 /** How the words of a language are read. */
