@@ -4,8 +4,8 @@ import { OPAQUE, sourceEnd, sourceStart, type ProseBlock } from '../prose/prose.
 import type { TextEdit } from '../text/edits.js';
 import type { Refusal } from './replaceTerm.js';
 
-/** Marks of a line's start inside a block: indentation, quotation and list marks are no part of the words. */
-const LINE_START = /^[^\S\n]*(?:\r?\n[\s>]*)?$/;
+/** What may stand at a line's start inside a block: indentation and quotation marks are no part of the words. */
+const LINE_START = /^[\s>]*$/;
 
 /**
  * The edits in the source, ascending. Refused where the term at `term` or an edit has markup, character references or the like in it.
@@ -37,7 +37,8 @@ function isPlain(block: ProseBlock, { start, end }: Span, source: string): boole
   let expected = start === end ? 0 : sourceStart(block, start);
   for (let at = start; at < end; at++) {
     const from = sourceStart(block, at);
-    if (from !== expected && !LINE_START.test(source.slice(expected, from))) return false;
+    const betweenWords = /\s/.test(text.charAt(at)) || (at > start && /\s/.test(text.charAt(at - 1)));
+    if (from !== expected && !(betweenWords && LINE_START.test(source.slice(expected, from)))) return false;
     const to = sourceEnd(block, at + 1);
     const unit = text.charAt(at);
     const written = source.slice(from, to);
