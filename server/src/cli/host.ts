@@ -40,6 +40,8 @@ export interface CliHost {
    * @throws CannotSurvey where the folder cannot be written.
    */
   writeFiles(folder: string, files: ReadonlyMap<string, string>): Promise<void>;
+  /** The date of today in local time, as `2024-05-31` (ISO 8601). */
+  now(): string;
 }
 
 /** A named path cannot be read or written; the message names it and says why. */

@@ -43,6 +43,11 @@ export function nodeHost(): CliHost {
         throw new CannotSurvey(`${folder}: ${plainReason(error)}`);
       }
     },
+    now() {
+      const date = new Date();
+      const two = (part: number): string => String(part).padStart(2, '0');
+      return `${date.getFullYear()}-${two(date.getMonth() + 1)}-${two(date.getDate())}`;
+    },
   };
 }
 
