@@ -9,7 +9,8 @@ const ANY_MARK = /["“„«]/;
 const BEFORE_OPENING = /[\s([{—–/\-:,;'‘]/;
 const AFTER_CLOSING = /[\s)\]}.,;:!?—–/\-'’]/;
 const WORDS = /[\p{L}\p{N}]\S*/gu;
-const CLOSING: Record<string, string> = { '“': '”', '„': '“”', '«': '»' };
+const OPENING = '"“„«';
+const CLOSING: Partial<Record<string, string>> = { '“': '”', '„': '“”', '«': '»' };
 
 /** The content with its inline quotations marked as {@link Zone.quotation}; the same object where it has none. */
 export function markQuotations(content: BlockContent): BlockContent {
@@ -23,16 +24,16 @@ export function markQuotations(content: BlockContent): BlockContent {
 
 function quotations(text: string): { start: number; end: number }[] {
   const found: { start: number; end: number }[] = [];
+  /** Marks that nothing closes in the rest of the text. */
+  let unclosed = '';
   for (let i = 0; i < text.length; i++) {
     const mark = text[i]!;
-    let close = -1;
-    if (mark === '"') {
-      if (i === 0 || BEFORE_OPENING.test(text[i - 1]!)) close = straightClose(text, i + 1);
-    } else {
-      const closers = CLOSING[mark];
-      if (closers !== undefined) close = closeOf(text, i + 1, closers);
+    if (!OPENING.includes(mark) || unclosed.includes(mark) || !opens(text, i, mark)) continue;
+    const close = mark === '"' ? straightClose(text, i + 1) : closeOf(text, i + 1, CLOSING[mark]!);
+    if (close < 0) {
+      unclosed += mark;
+      continue;
     }
-    if (close < 0) continue;
     const inner = text.slice(i + 1, close);
     if ((inner.match(WORDS)?.length ?? 0) >= QUOTATION_WORDS) found.push({ start: i, end: close + 1 });
     i = close;
@@ -40,9 +41,16 @@ function quotations(text: string): { start: number; end: number }[] {
   return found;
 }
 
-/** The straight mark that ends a quotation that opened just before `from`, or -1. */
+/** A straight mark opens a quotation where it stands before a word and not behind one; the others always do. */
+function opens(text: string, i: number, mark: string): boolean {
+  if (mark !== '"') return true;
+  const before = text[i - 1];
+  const after = text[i + 1];
+  return (before === undefined || BEFORE_OPENING.test(before)) && after !== undefined && !/\s/.test(after);
+}
+
+/** The straight mark at or behind `from` that ends a quotation, or -1. */
 function straightClose(text: string, from: number): number {
-  if (from >= text.length || /\s/.test(text[from]!)) return -1;
   for (let at = text.indexOf('"', from); at >= 0; at = text.indexOf('"', at + 1)) {
     const after = text[at + 1];
     const ends = after === undefined || AFTER_CLOSING.test(after);

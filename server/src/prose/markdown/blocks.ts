@@ -48,13 +48,17 @@ export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, 
       readLeaf(cx, cursor, zones | Zone.tableCell, 'tableCell', cursor.from);
       break;
     case Role.tooDeep:
-      cx.problems.push({
-        span: { start: cursor.from, end: cursor.to },
-        message: `This line is nested more than ${DEEPEST} levels deep and is not read.`,
-      });
-      return;
+      reportTooDeep(cx.problems, cursor.from, cursor.to);
+      break;
     default:
   }
+}
+
+/** One problem for all lines of an outermost block that are too deep. */
+function reportTooDeep(problems: ReadingProblem[], start: number, end: number): void {
+  const first = problems.pop()?.span.start ?? start;
+  const message = `Text nested more than ${DEEPEST} levels deep is not read.`;
+  problems.push({ span: { start: first, end }, message });
 }
 
 function readChildren(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind): void {

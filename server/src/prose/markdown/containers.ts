@@ -2,7 +2,7 @@
 import type { BlockContext, Line, MarkdownConfig } from '@lezer/markdown';
 
 /** Contexts deeper than this are not read: each level costs time on every line. */
-export const DEEPEST = 60;
+export const DEEPEST = 24;
 
 const INDENTED = /^(?:!!!|\?\?\?\+?|===[!+]?)[ \t]+(?=["\w])/;
 const INDENTED_TITLE = /^(?:!!!|\?\?\?\+?|===[!+]?)[ \t]+[^"]*"(.*)"[ \t\r]*$/;

@@ -1,5 +1,13 @@
 // The Markdown grammar: CommonMark and GFM by @lezer/markdown, the generators' additions, and guards against hostile input.
-import { GFM, parser as commonMark, type Element, type LeafBlock, type MarkdownConfig } from '@lezer/markdown';
+import {
+  GFM,
+  parser as commonMark,
+  type BlockContext,
+  type Element,
+  type LeafBlock,
+  type Line,
+  type MarkdownConfig,
+} from '@lezer/markdown';
 import { brackets } from './brackets.js';
 import { containers } from './containers.js';
 import { parsePlainRun } from './plainRun.js';
@@ -9,18 +17,47 @@ import { templates } from './templates.js';
  * Inline markup is resolved within stretches of about this many units. The parser's cost can grow with the square of
  * what it is given at once; real paragraphs stay far below.
  */
-const LONGEST_INLINE = 4096;
-/** A paragraph is cut at the next line once it is this long, unless it is a table. */
+const LONGEST_INLINE = 2048;
+/** A paragraph is cut at the next line once it is this long. */
 const LONGEST_LEAF = 16384;
+/** Likewise where it opens with a bracket: each further line may be tried as part of a link reference definition. */
+const LONGEST_BRACKETED_LEAF = 2048;
 const TABLE_START = /^[^\n]*\n[>\s]*\|?\s*:?-+:?\s*(?:\||$|\n)/;
 
 const guards: MarkdownConfig = {
-  parseBlock: [{ name: 'LongLeaf', endLeaf: isTooLong }],
+  defineNodes: [{ name: 'LongHtml', block: true }],
+  parseBlock: [
+    { name: 'LongLeaf', endLeaf: isTooLong },
+    { name: 'LongHtml', parse: parseLongHtml, before: 'HTMLBlock' },
+  ],
   parseInline: [{ name: 'PlainRun', parse: parsePlainRun, before: 'Escape' }],
 };
 
+/** The limit of a leaf that has grown past the shorter limit: looked up once a leaf, since looking costs its length. */
+const limits = new WeakMap<LeafBlock, number>();
+
 function isTooLong(_cx: unknown, _line: unknown, leaf: LeafBlock): boolean {
-  return leaf.content.length > LONGEST_LEAF && !TABLE_START.test(leaf.content);
+  if (leaf.content.length <= LONGEST_BRACKETED_LEAF) return false;
+  let limit = limits.get(leaf);
+  if (limit === undefined) {
+    limit = limitOf(leaf.content);
+    limits.set(leaf, limit);
+  }
+  return leaf.content.length > limit;
+}
+
+function limitOf(content: string): number {
+  const table = TABLE_START.test(content);
+  if (content.startsWith('[') && !(table && /^[^\n]*\]/.test(content))) return LONGEST_BRACKETED_LEAF;
+  return table ? Number.POSITIVE_INFINITY : LONGEST_LEAF;
+}
+
+/** A long line that opens with a tag is taken for HTML at once: telling for sure costs the square of its length. */
+function parseLongHtml(cx: BlockContext, line: Line): boolean {
+  if (line.next !== 60 || line.text.length - line.pos <= LONGEST_INLINE) return false;
+  cx.addElement(cx.elt('LongHtml', cx.lineStart + line.pos, cx.lineStart + line.text.length));
+  cx.nextLine();
+  return true;
 }
 
 /** The configured parser. It is stateless: parsing one text never affects another. */
@@ -39,13 +76,27 @@ markdownParser.parseInline = (text: string, offset: number): Element[] => {
   return elements;
 };
 
-/** Where the stretch that begins at `from` ends: at white space where there is any in its second half. */
+/**
+ * Where the stretch that begins at `from` ends: in its second half behind the last blank or line break at which no bracket,
+ * code span or emphasis seems to be open; else behind the last blank; else at its full length.
+ */
 function cut(text: string, from: number): number {
   const limit = from + LONGEST_INLINE;
   if (limit >= text.length) return text.length;
-  for (let i = limit; i > from + LONGEST_INLINE / 2; i--) {
-    const unit = text.charCodeAt(i - 1);
-    if (unit === 32 || unit === 10) return i;
+  let brackets = 0;
+  let odd = 0;
+  let blank = limit;
+  let settled = -1;
+  for (let i = from; i < limit; i++) {
+    const unit = text.charCodeAt(i);
+    if (unit === 91 || unit === 40) brackets++;
+    else if (unit === 93 || unit === 41) brackets--;
+    else if (unit === 96) odd ^= 1;
+    else if (unit === 42) odd ^= 2;
+    else if ((unit === 32 || unit === 10) && i >= from + LONGEST_INLINE / 2) {
+      blank = i + 1;
+      if (brackets === 0 && odd === 0) settled = i + 1;
+    }
   }
-  return limit;
+  return settled > 0 ? settled : blank;
 }

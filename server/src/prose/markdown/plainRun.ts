@@ -27,8 +27,10 @@ export function parsePlainRun(cx: InlineContext, _next: number, pos: number): nu
       return local + offset;
     }
     if (unit === SPACE) {
-      const after = text.charCodeAt(i + 1);
-      if (after === SPACE || after === 10) break;
+      let last = i;
+      while (text.charCodeAt(last + 1) === SPACE) last++;
+      if (text.charCodeAt(last + 1) === 10) break;
+      i = last;
     } else if (unit === COLON) {
       const after = text.charCodeAt(i + 1);
       if (after >= 97 && after <= 122 && !isWord(text.charCodeAt(i - 1))) break;
@@ -59,6 +61,8 @@ function mayBeginLink(text: string, i: number, unit: number): boolean {
 
 /** Where the local part of an e-mail address begins whose characters `at` lies in or right behind, or -1. */
 function localPartStart(text: string, at: number): number {
+  const sign = text.indexOf('@', at);
+  if (sign < 0 || sign > at + LONGEST_LOCAL_PART) return -1;
   let end = at;
   while (end < text.length && end - at <= LONGEST_LOCAL_PART && isLocal(text.charCodeAt(end))) end++;
   if (text.charCodeAt(end) !== AT) return -1;

@@ -1,7 +1,8 @@
 // Inline markup of site generators: template markers, attribute lists, emoji short codes. None of it is prose.
 import type { InlineContext, MarkdownConfig } from '@lezer/markdown';
 
-const LONGEST = 2000;
+/** Units between a marker's ends; longer ones are text. */
+const LONGEST = 600;
 
 /** `[opening, closing]` of the markers that stand for something the generator fills in. */
 const MARKERS: readonly (readonly [string, string])[] = [
