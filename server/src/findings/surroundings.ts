@@ -29,7 +29,8 @@ function isFreeBefore(text: string, start: number): boolean {
 
 function isFreeAfter(text: string, end: number, term: string): boolean {
   const after = text.charAt(end);
-  if (after === '' || /\s/.test(after)) return !/^\s?\((?:TM|R|C|SM)\)/.test(text.slice(end, end + 6));
+  if (after === '' || /\s/.test(after))
+    return !/^\s?\((?:TM|R|C|SM)\)|^\s+(?:==?|:=|=>)\s/.test(text.slice(end, end + 6));
   const further = text.charAt(end + 1);
   if (NAME_AFTER.test(after)) return false;
   if (after === '.' || after === ':')

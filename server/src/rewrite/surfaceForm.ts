@@ -1,5 +1,6 @@
 // Which form of a term stands in the text, and the same form of the term that takes its place.
 import type { Span } from '../base/span.js';
+import { startsSentence } from './sentence.js';
 import { inflectTerm, termForms, type Form, type PartOfSpeech } from './inflect.js';
 
 /** The form found: `written` is the term in that form with its termbase's capitals. */
@@ -36,30 +37,34 @@ export function inflectLike(term: string, form: Form, partOfSpeech: PartOfSpeech
   return inflected ?? (form === 'plural' ? term : undefined);
 }
 
-/** *Launched* is past or participle, *put* base, past or participle: the words before it tell, or the choice stays uncertain. */
+const ADVERBS = String.raw`(?:(?:not|also|never|already|always|just|now|then|only|still|first|[a-z]+ly)\s+)*`;
+const AFTER_AUXILIARY = new RegExp(
+  String.raw`\b(?:is|are|was|were|be|been|being|am|has|have|had|having|get|gets|got|getting|isn't|aren't|wasn't|weren't|hasn't|haven't|hadn't)\s+${ADVERBS}$`,
+);
+const AFTER_MODAL = new RegExp(
+  String.raw`\b(?:to|will|would|can|could|may|might|must|shall|should|do|does|did|don't|doesn't|didn't|please|let's)\s+${ADVERBS}$`,
+);
+const AFTER_SUBJECT = new RegExp(String.raw`(?:^|[\s(])(?:i|you|we|they|he|she|it|who)\s+${ADVERBS}$`);
+const BEFORE_OBJECT = /^\s+(?:an?|the|this|these|those|my|your|his|her|its|our|their|it|them)\b/;
+
+/** *Launched* is past or participle, *put* base, past or participle: the words around it tell, or the choice stays uncertain. */
 function amongForms(forms: ReadonlySet<Form>, text: string, span: Span): { form: Form; certain: boolean } {
-  const before = text.slice(Math.max(0, span.start - 60), span.start).toLowerCase();
-  const after = text.slice(span.end, span.end + 10).toLowerCase();
-  const afterAuxiliary =
-    /\b(?:is|are|was|were|be|been|being|am|has|have|had|having|get|gets|got|getting|isn't|aren't|wasn't|weren't|hasn't|haven't|hadn't)\s+(?:(?:not|also|never|already|always|just|now|then|only|still|[a-z]+ly)\s+)*$/.test(
-      before.replace(/’/g, "'"),
-    );
-  if (forms.has('participle') && (afterAuxiliary || /^\s+by\b/.test(after)))
+  const before = text
+    .slice(Math.max(0, span.start - 60), span.start)
+    .toLowerCase()
+    .replace(/’/g, "'");
+  const after = text.slice(span.end, span.end + 12).toLowerCase();
+  const [base, past, participle] = [forms.has('base'), forms.has('past'), forms.has('participle')];
+  if (participle && (AFTER_AUXILIARY.test(before) || /^\s+by\b/.test(after)))
     return { form: 'participle', certain: true };
-  if (
-    forms.has('base') &&
-    /\b(?:to|will|would|can|could|may|might|must|shall|should|do|does|did|don't|please|not)\s+$/.test(before)
-  ) {
-    return { form: 'base', certain: true };
-  }
-  if (
-    forms.has('past') &&
-    !forms.has('base') &&
-    /(?:^|[\s(])(?:i|you|we|they|he|she|it|who)\s+(?:[a-z]+ly\s+)?$/.test(before)
-  )
-    return { form: 'past', certain: true };
-  if (forms.has('base') && !forms.has('participle')) return { form: 'base', certain: false };
-  return { form: forms.has('base') ? 'base' : 'participle', certain: false };
+  if (base && AFTER_MODAL.test(before)) return { form: 'base', certain: true };
+  // An imperative; "Set up any agent" is none but that.
+  if (base && startsSentence(text, span.start)) return { form: 'base', certain: true };
+  // A participle takes no object of its own: "…, run the following command".
+  if (base && !past) return { form: 'base', certain: BEFORE_OBJECT.test(after) || AFTER_SUBJECT.test(before) };
+  if (past && !base && AFTER_SUBJECT.test(before)) return { form: 'past', certain: true };
+  if (past && !base && BEFORE_OBJECT.test(after)) return { form: 'past', certain: true };
+  return { form: base ? 'base' : 'participle', certain: false };
 }
 
 function fold(text: string): string {

@@ -84,6 +84,7 @@ describe('deprecated terms', () => {
     'an API key store here',
     'node=3, $node, node*, node+',
     'dataCenter',
+    'client.update( node = "2" )',
   ])('is quiet in %j', (text) => expect(found(text)).toEqual([]));
 
   it('speaks plainly', () => {

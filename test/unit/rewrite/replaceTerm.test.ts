@@ -80,6 +80,9 @@ describe('verbs', () => {
     ['⟦Configuring⟧ the server', 'configure', 'set up', 'Setting up the server'],
     ['⟦Setting up⟧ the server', 'set up', 'configure', 'Configuring the server'],
     ['⟦Backing up⟧ data', 'back up', 'save', 'Saving data'],
+    ['To list all, ⟦run⟧ the command.', 'run', 'begin', 'To list all, begin the command.'],
+    ['You can also ⟦set up⟧ a policy.', 'set up', 'configure', 'You can also configure a policy.'],
+    ['They ⟦set up⟧ a policy.', 'set up', 'configure', '? They configure a policy.'],
     ['It ⟦copy-pastes⟧ text', 'copy-paste', 'clone', 'It clones text'],
   ])('%s', (marked, from, to, expected) => {
     expect(replaced(marked, from, to, 'verb')).toBe(expected);
