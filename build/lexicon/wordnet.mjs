@@ -102,7 +102,7 @@ function parseData(text) {
   const synsets = new Map();
   for (const line of text.split('\n')) {
     if (line === '' || line.startsWith(' ')) continue;
-    const fields = line.split(' ');
+    const fields = line.slice(0, line.indexOf(' | ')).split(' ');
     const wordCount = parseInt(fields[3], 16);
     const words = fields.slice(4, 4 + 2 * wordCount).filter((_, i) => i % 2 === 0);
     const first = 4 + 2 * wordCount;

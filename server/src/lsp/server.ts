@@ -1,5 +1,11 @@
 // The language server: registration of capabilities and handlers over one connection.
-import { CodeActionKind, TextDocumentSyncKind, TextDocuments } from 'vscode-languageserver';
+import {
+  CodeActionKind,
+  MessageType,
+  ShowMessageNotification,
+  TextDocumentSyncKind,
+  TextDocuments,
+} from 'vscode-languageserver';
 import type { Connection, InitializeParams, InitializeResult } from 'vscode-languageserver';
 import { TextDocument } from 'vscode-languageserver-textdocument';
 import { Profiles } from '../engine/factsOf.js';
@@ -52,7 +58,8 @@ export function serve(connection: Connection, host: ServerHost, version: string)
   connection.onHover((params) => guarded(() => provideHover(sessions, params)));
   connection.onCodeAction((params) => guarded(() => provideCodeActions(sessions, params)));
   connection.onCodeActionResolve(async (action) => {
-    const refuse = (message: string): void => void connection.window.showWarningMessage(message);
+    const refuse = (message: string): void =>
+      void connection.sendNotification(ShowMessageNotification.type, { type: MessageType.Warning, message });
     return (await guarded(() => resolveCodeAction(sessions, action, options, refuse))) ?? action;
   });
   connection.onRequest(REPORT_REQUEST, (params: ReportParams | undefined) => provideReport(sessions, params ?? {}));
