@@ -13,6 +13,7 @@ const DOLLAR = 0x24;
 const PLUS = 0x2b;
 const TILDE = 0x7e;
 const LEFT_SINGLE_QUOTE = 0x2018;
+const INVISIBLE = /\p{Cf}/u;
 
 /** A scanner; it keeps no state from one text to the next. */
 export class Scanner {
@@ -60,7 +61,8 @@ export class Scanner {
         fresh = false;
       } else if (found === CharClass.unspaced) {
         const end = unspacedEnd(text, at, to);
-        into.add(at, end, TokenKind.word, space | TokenFlag.word);
+        const invisible = INVISIBLE.test(text.slice(at, end)) ? TokenFlag.invisible : 0;
+        into.add(at, end, TokenKind.word, space | TokenFlag.word | invisible);
         at = end;
         fresh = false;
       } else if (found === CharClass.invisible) {
@@ -137,14 +139,17 @@ function runEnd(text: string, from: number): number {
   return at;
 }
 
+/** The end of a run of letters without spaces; invisible characters count only between them. */
 function unspacedEnd(text: string, from: number, to: number): number {
-  let at = from + width(text, from);
-  while (at < to) {
+  let end = from;
+  for (let at = from; at < to;) {
     const found = pointClassAt(text, at);
-    if (found !== CharClass.unspaced && found !== CharClass.mark && found !== CharClass.invisible) break;
+    const isInvisible = found === CharClass.invisible;
+    if (found !== CharClass.unspaced && found !== CharClass.mark && !isInvisible) break;
     at += width(text, at);
+    if (!isInvisible) end = at;
   }
-  return at;
+  return end;
 }
 
 function width(text: string, at: number): number {
