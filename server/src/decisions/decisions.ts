@@ -28,6 +28,8 @@ const GROWTH_TO_ASK_AGAIN = 2;
 /** The decisions of a chain of termbases, nearest first; immutable. */
 export class Decisions {
   private readonly inForce: TermsInForce;
+  /** All terms in force that finally name a concept, of whichever file. */
+  private readonly namesOf = new Map<ConceptEntry, string[]>();
   /** Decided concepts, nearest file first, each file in its order; overridden terms and emptied concepts are left out. */
   readonly concepts: readonly DecidedConcept[];
 
@@ -35,6 +37,9 @@ export class Decisions {
     this.inForce = new TermsInForce(chain);
     const concepts = new Map<ConceptEntry, { concept: ConceptEntry; uri: string; terms: DecidedTerm[] }>();
     for (const term of this.inForce.terms) {
+      const names = this.namesOf.get(term.names);
+      if (names === undefined) this.namesOf.set(term.names, [term.entry.text]);
+      else names.push(term.entry.text);
       const known = concepts.get(term.concept);
       if (known === undefined) concepts.set(term.concept, { concept: term.concept, uri: term.uri, terms: [term] });
       else known.terms.push(term);
@@ -79,16 +84,24 @@ export class Decisions {
 
   /**
    * How two terms of a question stand to each other. Where files of the chain disagree, the nearest one that knows both wins.
-   * Terms of two different concepts are two concepts without being listed under `apart`.
+   * Terms of two different concepts are two concepts without being listed under `apart`; what is kept apart from one term
+   * of a concept is kept apart from all of them.
    */
   relationOf(a: QuestionTerm, b: QuestionTerm): Relation | undefined {
     const ofA = this.termsOfQuestionTerm(a);
     const ofB = this.termsOfQuestionTerm(b);
     const together = ofA.flatMap((x) => ofB.filter((y) => x.names === y.names).map((y) => Math.max(x.level, y.level)));
-    const apart = this.chain.findIndex((termbase) => termbase.apart.some(({ terms }) => holdsAll(terms, [a, b])));
+    const names = [a, b].map(spellingsOf);
+    // A nearer file may split a concept; then its other terms say nothing about which half they belong to.
+    if (together.length === 0) [ofA, ofB].forEach((terms, side) => names[side]!.push(...this.synonymsOf(terms)));
+    const apart = this.chain.findIndex((termbase) => termbase.apart.some(({ terms }) => holdsAll(terms, names)));
     if (apart >= 0 && together.every((level) => apart <= level)) return 'two-concepts';
     if (together.length > 0) return 'one-concept';
     return ofA.length > 0 && ofB.length > 0 ? 'two-concepts' : undefined;
+  }
+
+  private synonymsOf(terms: readonly DecidedTerm[]): string[] {
+    return terms.flatMap(({ names }) => this.namesOf.get(names) ?? []);
   }
 
   /** The `later` entry that puts a question off, unless its terms have since come to twice the uses. */
@@ -97,7 +110,7 @@ export class Decisions {
     for (const { uri, later } of this.chain) {
       for (const entry of later) {
         const grown = entry.uses !== undefined && uses >= GROWTH_TO_ASK_AGAIN * Math.max(1, entry.uses);
-        if (!grown && holdsAll(entry.terms, question.terms)) return { uri, span: entry.span };
+        if (!grown && holdsAll(entry.terms, question.terms.map(spellingsOf))) return { uri, span: entry.span };
       }
     }
     return undefined;
@@ -109,11 +122,11 @@ function spellingsOf(term: QuestionTerm): string[] {
   return [term.text, ...term.forms.map(({ text }) => text)];
 }
 
-/** True where each of the terms is listed, no two by the same name. */
-function holdsAll(names: readonly TermRef[], terms: readonly QuestionTerm[]): boolean {
+/** True where each term is listed by one of its spellings, no two by the same name. */
+function holdsAll(names: readonly TermRef[], terms: readonly (readonly string[])[]): boolean {
   const taken = new Set<TermRef>();
-  for (const term of terms) {
-    const name = spellingsOf(term)
+  for (const spellings of terms) {
+    const name = spellings
       .map((spelling) => findName(names, spelling))
       .find((found) => found !== undefined && !taken.has(found));
     if (name === undefined) return false;

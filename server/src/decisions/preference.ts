@@ -1,22 +1,16 @@
 // Which of a question's terms to suggest, and why; and which answers the termbase would accept.
 import { compareCodeUnits } from '../base/order.js';
 import type { Question, QuestionTerm, Reason } from '../mining/question.js';
-import { termText } from '../termbase/termKey.js';
+import type { Answer } from '../termbase/answer.js';
+import type { PartOfSpeech } from '../termbase/termbase.js';
 import type { Decisions } from './decisions.js';
 import type { Precedents } from './precedents.js';
+import type { DecidedTerm } from './termsInForce.js';
 
 /** The term to suggest. It need not be one of the question's: a deprecated term brings its preferred one with it. */
 export interface Preference {
   readonly text: string;
   readonly reason: Reason;
-}
-
-/** The answers that contradict nothing decided. */
-export interface Choices {
-  /** The terms that can be preferred, the suggested one first. */
-  readonly prefer: readonly string[];
-  /** Whether *either is fine* can be said: not where one of the terms is deprecated. */
-  readonly either: boolean;
 }
 
 /** Decisions of one kind that must agree before they count as a habit, and how far they must outnumber the opposite. */
@@ -36,15 +30,34 @@ export function preferenceOf(question: Question, decisions: Decisions, precedent
   );
 }
 
-/** The answers to offer for a question. */
-export function choicesOf(question: Question, decisions: Decisions, precedents: Precedents): Choices {
-  const { text } = preferenceOf(question, decisions, precedents);
-  const decided = question.terms.flatMap((term) => decisions.termsOfQuestionTerm(term));
-  const either = !decided.some(({ entry }) => entry.status === 'deprecated');
-  // Where a concept is touched, any other preferred term would contradict it.
-  if (decided.length > 0) return { prefer: [text], either };
-  const others = question.terms.map((term) => term.text).filter((other) => termText(other) !== termText(text));
-  return { prefer: [text, ...others], either };
+/**
+ * The answers that contradict nothing decided, the suggested one first: prefer each of the terms, *either is fine*, two
+ * concepts, not now. Where the question touches a decided concept, its preferred term alone can be preferred, and
+ * *either* is not offered beside a deprecated term.
+ */
+export function answersOf(question: Question, decisions: Decisions, precedents: Precedents): readonly Answer[] {
+  const { text: suggested } = preferenceOf(question, decisions, precedents);
+  const decided = question.terms.map((term) => decisions.termsOfQuestionTerm(term)[0]);
+  const open = question.terms.filter((_, index) => decided[index] === undefined).map(({ text }) => text);
+  const known = decided.find((term) => term !== undefined);
+  const uses = question.terms.reduce((sum, term) => sum + term.uses, 0);
+  const scope = scopeOfAnswer(question, known);
+  // Decided terms keep their status; their concept takes part in the answer under its preferred term.
+  const terms = known === undefined ? open : [known.preferred.text, ...open];
+  const preferable = known === undefined ? [suggested, ...open.filter((text) => text !== suggested)] : [suggested];
+  const isDeprecated = decided.some((term) => term?.entry.status === 'deprecated');
+  return [
+    ...preferable.map((preferred): Answer => ({ kind: 'prefer', terms, preferred, ...scope })),
+    ...(isDeprecated ? [] : [{ kind: 'either', terms, ...scope } as const]),
+    { kind: 'apart', terms },
+    { kind: 'later', terms: question.terms.map(({ text }) => text), uses },
+  ];
+}
+
+/** The part of speech to write down: a verb's alone, since most terms are nouns, and only where all terms are verbs. */
+function scopeOfAnswer({ terms }: Question, known: DecidedTerm | undefined): { partOfSpeech?: PartOfSpeech } {
+  if (known !== undefined) return known.entry.partOfSpeech ? { partOfSpeech: known.entry.partOfSpeech } : {};
+  return terms.every((term) => term.partOfSpeech === 'verb') ? { partOfSpeech: 'verb' } : {};
 }
 
 function decidedPreference(question: Question, decisions: Decisions): Preference | undefined {

@@ -100,11 +100,13 @@ function planConcept(
   lookUp: LookUp,
 ): Change | Refusal | undefined {
   const status = answer.kind === 'prefer' ? 'deprecated' : 'admitted';
-  const clash = keptApart(termbase, terms, lookUp);
-  if (clash !== undefined) return clash;
   const objects = distinct(answer.with ?? []);
   const places = terms.map((term) => lookUp.placesOf(term, answer.partOfSpeech, objects));
   const concept = commonConcept(terms, places);
+  // What is kept apart from any term of a concept is kept apart from the concept.
+  const others = concept && !('code' in concept) ? concept.terms.map(({ text }) => text) : [];
+  const clash = keptApart(termbase, distinct([...terms, ...others]), lookUp);
+  if (clash !== undefined) return clash;
   if (concept === undefined) return planNewConcept(termbase, terms, answer, status, lookUp);
   if ('code' in concept) return concept;
   const missing: string[] = [];

@@ -18,6 +18,7 @@ concepts:
     deprecated: [Github]
 apart:
   - [sampling interval, reporting interval, time span]
+  - [access key, door key]
 later:
   - [page, screen]
   - { terms: [drop-down, dropdown], uses: 10 }
@@ -38,6 +39,7 @@ describe('questions', () => {
     ['two concepts of the termbase', ['API key', 'token'], 'two-concepts'],
     ['kept apart', ['sampling interval', 'reporting interval'], 'two-concepts'],
     ['kept apart, three', ['time span', 'sampling interval', 'reporting interval'], 'two-concepts'],
+    ['kept apart from the preferred term', ['API key', 'door key'], 'two-concepts'],
     ['some together, the rest apart', ['API key', 'access key', 'token'], 'one-and-two-concepts'],
     ['two of three in one concept', ['API key×9', 'access key×5', 'secret×2'], [['access key', 'secret']]],
     [

@@ -1,7 +1,8 @@
 // The suggested term, its reason, and the answers on offer.
 import { describe, expect, it } from 'vitest';
 import { decide } from '../../../server/src/decisions/decide.js';
-import { choicesOf, preferenceOf } from '../../../server/src/decisions/preference.js';
+import { answersOf, preferenceOf } from '../../../server/src/decisions/preference.js';
+import type { Answer } from '../../../server/src/termbase/answer.js';
 import { question, term, termbase } from './questions.js';
 
 const FILE = termbase(`
@@ -47,12 +48,50 @@ describe('the suggestion', () => {
 });
 
 describe('the answers on offer', () => {
-  it.each<[what: string, terms: string[], choices: ReturnType<typeof choicesOf>]>([
-    ['nothing decided', ['node×2', 'host×9'], { prefer: ['host', 'node'], either: true }],
-    ['a preferred term', ['secret×9', 'access key×2'], { prefer: ['access key'], either: true }],
-    ['a deprecated term', ['secret×9', 'API key×2'], { prefer: ['access key'], either: false }],
-  ])('%s', (_, terms, choices) => {
+  it.each<[what: string, terms: string[], answers: Answer[]]>([
+    [
+      'nothing decided',
+      ['node×2', 'host×9'],
+      [
+        { kind: 'prefer', terms: ['node', 'host'], preferred: 'host' },
+        { kind: 'prefer', terms: ['node', 'host'], preferred: 'node' },
+        { kind: 'either', terms: ['node', 'host'] },
+        { kind: 'apart', terms: ['node', 'host'] },
+        { kind: 'later', terms: ['node', 'host'], uses: 11 },
+      ],
+    ],
+    [
+      'a preferred term',
+      ['secret×9', 'access key×2'],
+      [
+        { kind: 'prefer', terms: ['access key', 'secret'], preferred: 'access key' },
+        { kind: 'either', terms: ['access key', 'secret'] },
+        { kind: 'apart', terms: ['access key', 'secret'] },
+        { kind: 'later', terms: ['secret', 'access key'], uses: 11 },
+      ],
+    ],
+    [
+      'a deprecated term',
+      ['secret×9', 'API key×2'],
+      [
+        { kind: 'prefer', terms: ['access key', 'secret'], preferred: 'access key' },
+        { kind: 'apart', terms: ['access key', 'secret'] },
+        { kind: 'later', terms: ['secret', 'API key'], uses: 11 },
+      ],
+    ],
+    [
+      'verbs',
+      ['boot/verb×2', 'power up/verb'],
+      [
+        { kind: 'prefer', terms: ['boot', 'power up'], preferred: 'boot', partOfSpeech: 'verb' },
+        { kind: 'prefer', terms: ['boot', 'power up'], preferred: 'power up', partOfSpeech: 'verb' },
+        { kind: 'either', terms: ['boot', 'power up'], partOfSpeech: 'verb' },
+        { kind: 'apart', terms: ['boot', 'power up'] },
+        { kind: 'later', terms: ['boot', 'power up'], uses: 3 },
+      ],
+    ],
+  ])('%s', (_, terms, answers) => {
     const { decisions, precedents } = decide([FILE], []);
-    expect(choicesOf(question(terms), decisions, precedents)).toEqual(choices);
+    expect(answersOf(question(terms), decisions, precedents)).toEqual(answers);
   });
 });
