@@ -24,14 +24,48 @@ export function isRefused(a: Term, b: Term): boolean {
   const left = a.words.join(' ');
   const right = b.words.join(' ');
   if (isCodeLike(left) !== isCodeLike(right)) return true;
-  // A clipping and its full form are the abbreviations' to ask about, and a longer term its shorter one's.
-  return clippedSide(left, right) !== undefined || mustStayApart(left, right) !== undefined;
+  // Clippings, abbreviations and ways of writing are other engines' to ask about.
+  if (clippedSide(left, right) !== undefined || isAbbreviated(a.words, b.words)) return true;
+  if (a.words.length === b.words.length && a.words.every((word, at) => isOneStem(word, b.words[at]!))) return true;
+  return mustStayApart(left, right) !== undefined;
 }
 
 function isCodeLike(text: string): boolean {
   return /[\d_.]/.test(text);
 }
 
+/** True where what differs is one short word on one side whose letters stand, in order, in the words of the other. */
+export function isAbbreviated(a: readonly string[], b: readonly string[]): boolean {
+  const left = a.filter((word) => !b.includes(word));
+  const right = b.filter((word) => !a.includes(word));
+  return shortens(left, right) || shortens(right, left);
+}
+
+const LONGEST_ABBREVIATION = 6;
+
+function shortens(short: readonly string[], long: readonly string[]): boolean {
+  const letters = short.length === 1 ? short[0]!.replace(/s$/, '') : '';
+  const text = long.join('').replaceAll('-', '');
+  if (letters.length < 2 || letters.length > LONGEST_ABBREVIATION || text.length < letters.length + 3) return false;
+  if (letters[0] !== text[0]) return false;
+  let at = 0;
+  for (const letter of letters) {
+    at = text.indexOf(letter, at) + 1;
+    if (at === 0) return false;
+  }
+  return true;
+}
+
+/** The same word, or one of them its gerund (load, loading; map, mapping). */
+function isOneStem(a: string, b: string): boolean {
+  const [short, long] = a.length <= b.length ? [a, b] : [b, a];
+  if (short === long) return true;
+  if (!long.endsWith('ing')) return false;
+  const stem = long.slice(0, -3);
+  return stem === short || `${stem}e` === short || (stem.at(-1) === stem.at(-2) && stem.slice(0, -1) === short);
+}
+
+/** Reads what the documents list apart: headings, list items, cells and glossary entries that consist of one term. */
 export function readSeparations(corpus: Corpus, segments: Segments): Separations {
   const { stream, vocabulary } = corpus;
   const groups = new Map<number, Set<number>>();

@@ -4,9 +4,10 @@ import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import type { Question } from '../question.js';
 import { askNouns } from './nouns.js';
+import { askVerbs } from './verbs.js';
 
 /** Asks about synonymous nouns, verbs with their object, and terms alike in use alone; most worth first. */
 export function* askSynonyms(corpus: Corpus): Work<Question[]> {
-  const questions = yield* askNouns(corpus);
+  const questions = [...(yield* askNouns(corpus)), ...(yield* askVerbs(corpus))];
   return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }

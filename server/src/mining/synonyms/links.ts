@@ -12,7 +12,7 @@ export interface LexicalLink {
 }
 
 /** A dictionary's synonyms in rarer senses than this (sum of both places) say nothing of technical prose. */
-const RAREST_SENSES = 5;
+const RAREST_SENSES = 3;
 
 /** The stronger of the relations that the two sources know, or undefined. */
 export function lexicalLink(a: string, b: string, pos: EquivalentPos & WordNetPos): LexicalLink | undefined {
@@ -20,5 +20,5 @@ export function lexicalLink(a: string, b: string, pos: EquivalentPos & WordNetPo
   if (set !== undefined) return { source: 'list', strength: set.distinct === undefined ? 1 : 0.7 };
   const relation = synonymy(a, b, pos);
   if (typeof relation !== 'object' || relation.rankSum > RAREST_SENSES) return undefined;
-  return { source: 'dictionary', strength: relation.rankSum <= 2 ? 0.8 : relation.rankSum <= 3 ? 0.6 : 0.4 };
+  return { source: 'dictionary', strength: relation.rankSum <= 2 ? 0.8 : 0.6 };
 }

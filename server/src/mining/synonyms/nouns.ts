@@ -19,6 +19,9 @@ import { indexOccurrences } from './occurrences.js';
 import { properShare } from './properNames.js';
 import { makeQuestion } from './question.js';
 import { confidenceOf, scoreOf } from './score.js';
+import type { Shape } from './score.js';
+import type { Term } from './terms.js';
+import { isGeneralNoun } from './generalWords.js';
 import { segment } from './segment.js';
 import { sharedFrames } from './frames.js';
 import { findNounTerms } from './terms.js';
@@ -78,7 +81,8 @@ export function* askNouns(corpus: Corpus): Work<Question[]> {
       self: self(Math.min(segments.uses[pair.a]!, segments.uses[pair.b]!)),
       sideBySide: sideBySide.get(keyOf(pair)) ?? { coordinated: 0, contrasted: 0 },
       siblings: separations.siblings(pair.a, pair.b),
-      multiword: terms[pair.a]!.words.length > 1 && terms[pair.b]!.words.length > 1,
+      shape: shapeOf(terms[pair.a]!, terms[pair.b]!),
+      general: Number(isGeneral(terms[pair.a]!)) + Number(isGeneral(terms[pair.b]!)),
       properNames: Number(isProper(pair.a)) + Number(isProper(pair.b)),
       fewest: Math.min(segments.uses[pair.a]!, segments.uses[pair.b]!),
     };
@@ -98,6 +102,16 @@ export function* askNouns(corpus: Corpus): Work<Question[]> {
     yield;
   }
   return questions;
+}
+
+function shapeOf({ words: a }: Term, { words: b }: Term): Shape {
+  const [short, long] = a.length <= b.length ? [a, b] : [b, a];
+  if (short.length < long.length && ` ${long.join(' ')} `.includes(` ${short.join(' ')} `)) return 'contained';
+  return short.length > 1 ? 'multiword' : 'words';
+}
+
+function isGeneral({ words }: Term): boolean {
+  return words.length === 1 && isGeneralNoun(words[0]!);
 }
 
 function reasonsOf(

@@ -11,6 +11,8 @@ import { byUses, displayText, makeTerm, spelledAt } from '../wording.js';
 export interface NamedUses {
   readonly uses: readonly Use[];
   readonly partOfSpeech: 'noun' | 'verb';
+  /** The dictionary form, where it is known. */
+  readonly text?: string;
 }
 
 /** Puts a question together; reasons come in the order of their weight. */
@@ -39,7 +41,7 @@ export function makeQuestion(
   };
 }
 
-function nounTerm({ stream, vocabulary }: Corpus, { uses, partOfSpeech }: NamedUses): QuestionTerm {
+function nounTerm({ stream, vocabulary }: Corpus, { uses, partOfSpeech, text: lemma }: NamedUses): QuestionTerm {
   const forms = new Map<string, Use[]>();
   for (const use of uses) {
     const text = spelledAt(stream, vocabulary, use).toLowerCase();
@@ -54,7 +56,7 @@ function nounTerm({ stream, vocabulary }: Corpus, { uses, partOfSpeech }: NamedU
   }));
   const lead = shown.filter(({ lower }) => isSingular(lower)).sort(byCountThenText)[0];
   const documents = new Set(uses.map((use) => stream.documentOf(use.row))).size;
-  return { ...makeTerm(shown, documents, lead?.text), partOfSpeech };
+  return { ...makeTerm(shown, documents, lemma ?? lead?.text), partOfSpeech };
 }
 
 function isSingular(text: string): boolean {

@@ -1,7 +1,10 @@
 // How sure the evidence makes it that two terms name one concept.
-import type { Evidence } from './evidence.js';
 import type { SideBySide } from './coordination.js';
+import type { Evidence, EvidenceKind } from './evidence.js';
 import type { Likeness } from './neighbours.js';
+
+/** How the words of two terms lie to one another. */
+export type Shape = 'words' | 'multiword' | 'contained';
 
 /** Everything that is known of a pair when it is judged. */
 export interface Known {
@@ -12,40 +15,60 @@ export interface Known {
   readonly sideBySide: SideBySide;
   /** Lists, tables and pages in which each has an entry of its own. */
   readonly siblings: number;
-  /** Whether each term has several words. */
-  readonly multiword: boolean;
+  /** Single words; terms of several words; or one term the other with a word more. */
+  readonly shape: Shape;
   /** How many of the two are proper names. */
   readonly properNames: number;
+  /** How many of the two are words of general English. */
+  readonly general: number;
   /** Uses of the rarer term. */
   readonly fewest: number;
 }
 
-const WEIGHT = {
-  list: { multiword: 2.6, single: 1.6 },
-  dictionary: { multiword: 2, single: 1.2 },
-  component: 2.2,
-  definition: 2.4,
-  'link-target': 1.4,
-  neighbours: 0,
-} as const;
+/** Two unrelated terms, before any evidence. */
+const BASE = -1.2;
 
-/** The score of a pair, in logits around the threshold: 0 is as likely right as wrong. */
+/** The score of a pair, in logits: 0 is as likely right as wrong. Weights fitted by reading; see the evaluation. */
 export function scoreOf(known: Known): number {
-  const { likeness, sideBySide, fewest } = known;
-  let score = -2.5;
-  for (const { kind, strength } of known.evidence) {
-    const weight =
-      kind === 'list' || kind === 'dictionary' ? WEIGHT[kind][known.multiword ? 'multiword' : 'single'] : WEIGHT[kind];
-    score += weight * strength;
-  }
-  score += 1.8 * Math.min(1, likeness.similarity / known.self);
-  score -= 0.4 * Math.log(Math.sqrt(likeness.rankOfA * likeness.rankOfB));
-  score -= 8 * Math.sqrt((sideBySide.coordinated + sideBySide.contrasted) / fewest);
-  if (sideBySide.coordinated + sideBySide.contrasted >= 3) score -= 1;
+  const { sideBySide, fewest } = known;
+  let score = BASE + lexicalWeight(known) + statementWeight(known) + contextWeight(known);
+  const beside = sideBySide.coordinated + sideBySide.contrasted;
+  score -= 8 * Math.sqrt(beside / fewest);
+  if (beside >= 3) score -= 1;
   score -= 1.2 * Math.log1p(known.siblings);
   score -= known.properNames === 2 ? 2.5 : known.properNames;
-  if (fewest < 12) score -= 0.3;
+  score -= 0.8 * known.general;
   return score;
+}
+
+/** List, dictionary and differing parts say the same of a pair: the strongest counts. */
+function lexicalWeight({ evidence, shape }: Known): number {
+  const strength = strongest(evidence, ['list', 'dictionary', 'component']);
+  if (strength === 0) return shape === 'contained' ? -1.3 : 0;
+  if (shape === 'words') return -0.4 + 1.6 * strength;
+  return 0.3 + 1.8 * strength - (shape === 'contained' ? 1.3 : 0);
+}
+
+/** What the documents themselves say and do: statements, and links to one place. */
+function statementWeight({ evidence }: Known): number {
+  let weight = 0;
+  for (const { kind, strength, value } of evidence) {
+    if (kind === 'definition') weight += (strength >= 0.8 ? 2.2 : 0.4) + 0.3 * Math.min(4, value - 1);
+    else if (kind === 'link-target') weight += 0.5 * Math.min(2, value);
+  }
+  return weight;
+}
+
+/** Usage confirms or refuses: against the yardstick of one term's own halves, and by mutual rank. */
+function contextWeight({ likeness, self, shape }: Known): number {
+  const share = Math.min(1, likeness.similarity / self);
+  const rank = Math.log(Math.sqrt(likeness.rankOfA * likeness.rankOfB));
+  // Terms of several words are rarer, and their contexts say less.
+  return shape === 'words' ? 1.8 * (share - 0.7) - 0.35 * (rank - 1.1) : 1.2 * (share - 0.5) - 0.3 * (rank - 1.6);
+}
+
+function strongest(evidence: readonly Evidence[], kinds: readonly EvidenceKind[]): number {
+  return evidence.reduce((most, { kind, strength }) => (kinds.includes(kind) ? Math.max(most, strength) : most), 0);
 }
 
 /** The confidence, from 0 to 1, that a score stands for. */

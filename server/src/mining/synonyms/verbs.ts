@@ -1,0 +1,162 @@
+// Two verbs for one operation on the same object: candidates by list and dictionary, confirmed by the objects they share.
+import { compareCodeUnits } from '../../base/order.js';
+import type { Work } from '../../base/work.js';
+import type { Corpus } from '../../corpus/corpus.js';
+import { pmi } from '../../corpus/statistics/association.js';
+import type { Question, Reason } from '../question.js';
+import { times } from '../wording.js';
+import { clusterPairs } from './clusters.js';
+import { forEachPair } from './lexical.js';
+import type { Likeness } from './neighbours.js';
+import { makeQuestion } from './question.js';
+import { confidenceOf } from './score.js';
+import { compareVerbs } from './verbLikeness.js';
+import { linkVerbs, scoreOfVerbs } from './verbLinks.js';
+import type { VerbLink } from './verbLinks.js';
+import { readVerbUses } from './verbUses.js';
+import type { VerbUse, VerbUses } from './verbUses.js';
+
+/** Fewest uses of a verb with the object. */
+const FEWEST_USES = 3;
+/** Least attraction between a verb and the object, PMI in bits. */
+const LEAST_PMI = 0.3;
+/** Least score of a pair that is asked about. */
+const THRESHOLD = 0.2;
+
+/** A verb as it is used with one object. */
+interface VerbWithObject {
+  readonly verb: number;
+  readonly text: string;
+  readonly uses: readonly VerbUse[];
+}
+
+interface Operation {
+  readonly verbs: readonly VerbWithObject[];
+  readonly object: string;
+  readonly score: number;
+  readonly links: readonly VerbLink[];
+}
+
+/** Asks about verbs that are said of the same object. */
+export function* askVerbs(corpus: Corpus): Work<Question[]> {
+  const read = yield* readVerbUses(corpus);
+  const objects = byObject(read);
+  yield;
+  const candidates = new Map<number, { a: number; b: number }>();
+  const linked = objects.map(({ object, verbs }) => {
+    const links = new Map<number, VerbLink>();
+    forEachPair(verbs, (left, right) => {
+      const link = linkVerbs(left.text, right.text, object);
+      if (link === undefined || read.coordinated(left.text, right.text) >= 2) return;
+      const key = keyOf(left.verb, right.verb, read.verbs.size);
+      links.set(key, link);
+      candidates.set(key, { a: Math.min(left.verb, right.verb), b: Math.max(left.verb, right.verb) });
+    });
+    return { object, verbs, links };
+  });
+  yield;
+  const likeness = yield* compareVerbs(corpus, read, [...candidates.values()]);
+  const operations: Operation[] = [];
+  for (const { object, verbs, links } of linked) {
+    if (links.size > 0) operations.push(...operationsOn(object, verbs, links, likeness, read.verbs.size));
+  }
+  yield;
+  return groupByVerbs(operations).map((same) => questionOf(corpus, same));
+}
+
+function keyOf(one: number, other: number, verbs: number): number {
+  return Math.min(one, other) * verbs + Math.max(one, other);
+}
+
+function operationsOn(
+  object: string,
+  verbs: readonly VerbWithObject[],
+  links: ReadonlyMap<number, VerbLink>,
+  likeness: ReadonlyMap<number, Likeness>,
+  size: number,
+): Operation[] {
+  const holding: { a: number; b: number; score: number; link: VerbLink }[] = [];
+  forEachPair([...verbs.keys()], (a, b) => {
+    const key = keyOf(verbs[a]!.verb, verbs[b]!.verb, size);
+    const link = links.get(key);
+    if (link === undefined) return;
+    const score = scoreOfVerbs(verbs[a]!.text, verbs[b]!.text, object, link, likeness.get(key)!);
+    if (score >= THRESHOLD) holding.push({ a, b, score, link });
+  });
+  return clusterPairs(holding, verbs.length).map(({ members, weakest }) => ({
+    verbs: members.map((at) => verbs[at]!),
+    object,
+    score: weakest,
+    links: holding.filter(({ a, b }) => members.includes(a) && members.includes(b)).map(({ link }) => link),
+  }));
+}
+
+interface ObjectVerbs {
+  readonly object: string;
+  /** Most uses first, ties by code units. */
+  readonly verbs: readonly VerbWithObject[];
+}
+
+/** Objects with at least two verbs that are used and attracted enough, in order of their texts. */
+function byObject({ verbs, objects, pairs, uses }: VerbUses): ObjectVerbs[] {
+  const verbTotals = new Float64Array(verbs.size);
+  const objectTotals = new Float64Array(objects.size);
+  let all = 0;
+  uses.forEach(({ length }, pair) => {
+    verbTotals[pairs.leftOf(pair)]! += length;
+    objectTotals[pairs.rightOf(pair)]! += length;
+    all += length;
+  });
+  const found = new Map<number, VerbWithObject[]>();
+  uses.forEach((rows, pair) => {
+    if (rows.length < FEWEST_USES) return;
+    const verb = pairs.leftOf(pair);
+    const object = pairs.rightOf(pair);
+    if (pmi({ c1: verbTotals[verb]!, c2: objectTotals[object]!, c12: rows.length, n: all }) < LEAST_PMI) return;
+    const list = found.get(object) ?? [];
+    list.push({ verb, text: verbs.textOf(verb), uses: rows });
+    found.set(object, list);
+  });
+  return [...found]
+    .filter(([, list]) => list.length > 1)
+    .map(([object, list]) => ({
+      object: objects.textOf(object),
+      verbs: list.sort((a, b) => b.uses.length - a.uses.length || compareCodeUnits(a.text, b.text)),
+    }))
+    .sort((a, b) => compareCodeUnits(a.object, b.object));
+}
+
+function questionOf(corpus: Corpus, operations: readonly Operation[]): Question {
+  const usesOf = ({ verbs }: Operation): number => verbs.reduce((sum, { uses }) => sum + uses.length, 0);
+  const ordered = [...operations].sort((a, b) => usesOf(b) - usesOf(a) || compareCodeUnits(a.object, b.object));
+  const leading = ordered[0]!;
+  const reasons: Reason[] = ordered.map((operation) => ({
+    kind: 'shared-object',
+    text: `each is said of “${operation.object}”: ${operation.verbs.map(({ text, uses }) => `“${text}” ${times(uses.length)}`).join(', ')}`,
+    value: usesOf(operation),
+  }));
+  reasons.push(...leading.links.map(({ kind, text, strength }) => ({ kind, text, value: strength })));
+  const named = leading.verbs.map(({ verb, text }) => ({
+    text,
+    uses: ordered.flatMap(({ verbs }) => verbs.find((each) => each.verb === verb)!.uses).sort((a, b) => a.row - b.row),
+    partOfSpeech: 'verb' as const,
+  }));
+  const score = Math.max(...ordered.map((operation) => operation.score));
+  const question = makeQuestion(corpus, 'verb-object', named, confidenceOf(score), reasons);
+  return { ...question, id: `${question.id}:${leading.object}`, objects: ordered.map(({ object }) => object) };
+}
+
+/** Operations of the same verbs together, in order of their first. */
+function groupByVerbs(operations: readonly Operation[]): Operation[][] {
+  const groups = new Map<string, Operation[]>();
+  for (const operation of operations) {
+    const key = operation.verbs
+      .map(({ text }) => text)
+      .sort(compareCodeUnits)
+      .join('|');
+    const same = groups.get(key);
+    if (same === undefined) groups.set(key, [operation]);
+    else same.push(operation);
+  }
+  return [...groups.values()];
+}
