@@ -45,3 +45,12 @@ export const OPENING_NOUNS = set(
 export const CHUNK_PARTICLES = set(
   'in out up down on off over by to of at as for with away back through around under and or the a an not so go be',
 );
+
+/** Determiners that are never pronouns: what stands between one of them and a noun describes the noun. */
+export const CERTAIN_DETERMINERS = set('the a an its your our their my his every another no');
+
+/** Verbs that may help another verb or stand by themselves. */
+export const FULL_OR_AUXILIARY = set('have has had having do does did doing done');
+
+/** Verbs whose object a bare verb follows: *let the user choose*. */
+export const BEFORE_BARE_VERB = set('let lets letting make makes making made help helps helping have has see watch');

@@ -28,7 +28,6 @@ interface Pending {
   readonly tokens: BlockTokens;
   readonly lemma: string[];
   readonly forms: (WordForm | undefined)[];
-  readonly kind: Uint8Array;
   /** The shown tokens of the block, space between. */
   readonly shown: string;
   /** The row of each shown token. */
@@ -87,7 +86,8 @@ class EnglishProfile implements LanguageProfile {
     this.scanner.scan(text, columns);
     markSentenceStarts(text, columns);
     const { length, start, end, kind, flags, inLongRun } = columns;
-    const forms = new Array<WordForm | undefined>(length).fill(undefined);
+    const forms: (WordForm | undefined)[] = [];
+    const lemma: string[] = [];
     const shown: string[] = [];
     const rows: number[] = [];
     const title = isTitle(text, columns);
@@ -95,8 +95,11 @@ class EnglishProfile implements LanguageProfile {
     let opening = false;
     for (let row = 0; row < length; row++) {
       if ((flags[row]! & TokenFlag.sentenceStart) !== 0) opening = true;
-      const form = kind[row] === TokenKind.word ? shownForms.of(text.slice(start[row], end[row])) : undefined;
-      forms[row] = form;
+      const slice = text.slice(start[row], end[row]);
+      const form = kind[row] === TokenKind.word ? shownForms.of(slice) : undefined;
+      forms.push(form);
+      lemma.push(form === undefined ? slice.toLowerCase() : '');
+      columns.tag[row] = FIXED_TAGS[kind[row]!]!;
       signs = kind[row]! >= TokenKind.punctuation ? signs + 1 : 0;
       if (signs > SIGNS_SHOWN || inLongRun[row] !== 0) continue;
       rows.push(row);
@@ -109,12 +112,8 @@ class EnglishProfile implements LanguageProfile {
       if (form.count === 2) rows.push(NO_ROW);
       opening = false;
     }
-    const lemma = new Array<string>(length);
-    for (let row = 0; row < length; row++) {
-      lemma[row] = forms[row] === undefined ? text.slice(start[row], end[row]).toLowerCase() : '';
-    }
     const tokens = columns.toBlockTokens(lemma);
-    return { tokens, lemma, forms, kind: kind.slice(0, length), shown: shown.join(' '), rows };
+    return { tokens, lemma, forms, shown: shown.join(' '), rows };
   }
 
   /** Tags blocks together, in one call of the tagger. */
@@ -137,15 +136,11 @@ class EnglishProfile implements LanguageProfile {
 
   /** Writes a block's tags and lemmas, of which the tagger's begin at `from`. */
   private settle(block: Pending, tags: readonly string[], from: number): void {
-    const { rows, kind, forms, lemma } = block;
+    const { rows, forms, lemma } = block;
     const { tag, flags } = block.tokens;
     for (let k = 0; k < rows.length; k++) {
       const row = rows[k]!;
-      if (row !== NO_ROW) tag[row] = (TAG as Readonly<Record<string, number>>)[tags[from + k] ?? 'X'] ?? TAG.X;
-    }
-    for (let row = 0; row < tag.length; row++) {
-      const fixed = FIXED_TAGS[kind[row]!];
-      if (fixed !== undefined) tag[row] = fixed;
+      if (row !== NO_ROW && forms[row] !== undefined) tag[row] = CODES[tags[from + k] ?? 'X'] ?? TAG.X;
     }
     mendTags({ tag, flags, forms }, this.lexicon);
     for (let row = 0; row < tag.length; row++) {
@@ -155,8 +150,9 @@ class EnglishProfile implements LanguageProfile {
   }
 }
 
+const CODES = TAG as Readonly<Record<string, number>>;
 /** The tags of kinds whose tag the scanner knows better than any tagger. */
-const FIXED_TAGS: readonly (number | undefined)[] = [undefined, TAG.PROPN, TAG.NUM, TAG.PUNCT, TAG.SYM, TAG.OPAQUE];
+const FIXED_TAGS: readonly number[] = [TAG.X, TAG.PROPN, TAG.NUM, TAG.PUNCT, TAG.SYM, TAG.OPAQUE];
 
 function shownOther(kind: number, unit: number): string {
   switch (kind) {

@@ -1,5 +1,6 @@
 // Mends of parts of speech that a general tagger gets wrong in instructions.
-import { BEFORE_BASE_FORM, DETERMINERS, OPENING_NOUNS } from './closedWords.js';
+import { BEFORE_BARE_VERB } from './closedWords.js';
+import { Role } from './roles.js';
 import type { WordForm } from './shownForms.js';
 import { TAG, TokenFlag } from './tokens.js';
 import type { WinkLexicon } from './winkLexicon.js';
@@ -12,13 +13,6 @@ export interface TaggedRows {
 }
 
 const { NOUN, PROPN, VERB, ADJ, AUX, ADV, PART, PRON, NUM, PUNCT, SYM, DET, OPAQUE } = TAG;
-/** Determiners that are never pronouns: what stands between one of them and a noun describes the noun. */
-const CERTAIN_DETERMINERS = new Set('the a an its your our their my his every another no'.split(' '));
-const FULL_OR_AUXILIARY = new Set('have has had having do does did doing done'.split(' '));
-/** Verbs whose object a bare verb follows: *let the user choose*. */
-const BEFORE_BARE_VERB = new Set(
-  'let lets letting make makes making made help helps helping have has see watch'.split(' '),
-);
 /** How far an auxiliary's verb may be: `do you not always want`. */
 const REACH = 4;
 
@@ -40,12 +34,12 @@ export function mendTags({ tag, flags, forms }: TaggedRows, lexicon: WinkLexicon
       continue;
     }
     if (now === NOUN || now === PROPN) {
-      const before = row === 0 ? undefined : forms[row - 1]?.lower;
-      if (isVerbInDisguise(form, now, before, forms[row + 1]?.lower, opening, lexicon)) tag[row] = VERB;
+      const before = row === 0 ? undefined : forms[row - 1];
+      if (isVerbInDisguise(form, now, before, forms[row + 1], opening, lexicon)) tag[row] = VERB;
     } else if (now === AUX) {
-      if (FULL_OR_AUXILIARY.has(form.lower) && !helps(tag, forms, row)) tag[row] = VERB;
+      if (has(form, Role.fullOrAuxiliary) && !helps(tag, forms, row)) tag[row] = VERB;
     } else if (now === VERB && row > 0 && (tag[row + 1] === NOUN || tag[row + 1] === PROPN)) {
-      if (CERTAIN_DETERMINERS.has(forms[row - 1]?.lower ?? '')) tag[row] = ADJ;
+      if (has(forms[row - 1], Role.certainDeterminer)) tag[row] = ADJ;
     }
     if (tag[row] === VERB && isHeadNoun({ tag, flags, forms }, row, lexicon)) tag[row] = NOUN;
     opening = false;
@@ -68,7 +62,7 @@ function isHeadNoun({ tag, forms }: TaggedRows, row: number, lexicon: WinkLexico
   let at = row - 1;
   while (at > 0 && at > row - REACH && (tag[at] === NOUN || tag[at] === PROPN || tag[at] === OPAQUE || tag[at] === ADJ))
     at--;
-  if (!CERTAIN_DETERMINERS.has(forms[at]?.lower ?? '')) return false;
+  if (!has(forms[at], Role.certainDeterminer)) return false;
   const governor = at === 0 ? undefined : forms[at - 1];
   return governor === undefined || (tag[at - 1] !== AUX && !BEFORE_BARE_VERB.has(governor.lower));
 }
@@ -76,19 +70,19 @@ function isHeadNoun({ tag, forms }: TaggedRows, row: number, lexicon: WinkLexico
 function isVerbInDisguise(
   form: WordForm,
   now: number,
-  before: string | undefined,
-  next: string | undefined,
+  before: WordForm | undefined,
+  next: WordForm | undefined,
   opening: boolean,
   lexicon: WinkLexicon,
 ): boolean {
-  const determined = next !== undefined && DETERMINERS.has(next);
-  if (now === NOUN && before !== undefined && BEFORE_BASE_FORM.has(before)) {
+  const determined = has(next, Role.determiner);
+  if (now === NOUN && before !== undefined && has(before, Role.beforeBaseForm)) {
     // After *to* a noun may stand ("compared to clouds"); after a modal none does.
-    if ((determined || before !== 'to') && mayBeBaseVerb(form, lexicon)) return true;
+    if ((determined || before.lower !== 'to') && mayBeBaseVerb(form, lexicon)) return true;
   }
   if (!determined) return false;
-  if (opening && !OPENING_NOUNS.has(form.lower) && mayBeBaseVerb(form, lexicon)) return true;
-  return form.lower.endsWith('ing') && CERTAIN_DETERMINERS.has(next) && lexicon.canBe(form.lower, 'VERB');
+  if (opening && !has(form, Role.openingNoun) && mayBeBaseVerb(form, lexicon)) return true;
+  return form.lower.endsWith('ing') && has(next, Role.certainDeterminer) && lexicon.canBe(form.lower, 'VERB');
 }
 
 /** True where a verb comes after the auxiliary at a row, with nothing between but adverbs, negation and pronouns. */
@@ -100,6 +94,10 @@ function helps(tag: Uint8Array, forms: TaggedRows['forms'], row: number): boolea
     if (forms[at]?.lower === 'to') return false;
   }
   return false;
+}
+
+function has(form: WordForm | undefined, role: number): boolean {
+  return form !== undefined && (form.roles & role) !== 0;
 }
 
 /** True where the word is known as a verb's base form, or is unknown and may be one. */

@@ -8,7 +8,8 @@ import { type BlockTokens, type LanguageProfile, TAG, TokenFlag, tokenSlice } fr
 
 /** Longest stretch handed to the segmenter at once, in UTF-16 units: longer ones are cut, so that time stays in proportion. */
 const STRETCH = 4096;
-const INVISIBLE_ONLY = /^\p{Cf}+$/u;
+/** What a segment must have to be a word: some are made of marks and invisible characters alone. */
+const HAS_WORD = /[\p{L}\p{N}]/u;
 const TAGS_BY_KIND = [TAG.X, TAG.X, TAG.NUM, TAG.PUNCT, TAG.SYM, TAG.OPAQUE];
 
 /**
@@ -60,7 +61,7 @@ class NeutralProfile implements LanguageProfile {
     for (let at = from; at < to;) {
       const end = stretchEnd(text, at, to);
       for (const { index, segment } of this.segmenter.segment(text.slice(at, end))) {
-        if (INVISIBLE_ONLY.test(segment)) continue;
+        if (!HAS_WORD.test(segment)) continue;
         this.columns.add(at + index, at + index + segment.length, TokenKind.word, own);
         own = flags & ~TokenFlag.spaceBefore;
       }

@@ -2,6 +2,7 @@
 // So every shown word is one token to the tagger, its memory does not grow with the documents, and no result hangs on what it read before.
 import { CHUNK_PARTICLES } from './closedWords.js';
 import { lemmaOf } from './lemma.js';
+import { rolesOf } from './roles.js';
 import { TAG, TAGS } from './tokens.js';
 import type { WinkLexicon } from './winkLexicon.js';
 
@@ -22,6 +23,8 @@ export interface WordForm {
   /** Tokens that either shown form makes. */
   readonly count: number;
   readonly lower: string;
+  /** {@link Role} bits. */
+  readonly roles: number;
   /** Capitals and a plural s: `APIs`. */
   readonly isAcronymPlural: boolean;
   /** Lemmas by tag code, filled on demand. */
@@ -71,6 +74,7 @@ export class ShownForms {
       shownUncapitalised: split ?? this.uncapitalised(word, lower, shown),
       count: split === undefined ? 1 : 2,
       lower,
+      roles: rolesOf(lower),
       isAcronymPlural,
       lemmas: [],
     };

@@ -17,6 +17,9 @@ const BACKSLASH = 0x5c;
 const LEFT_PARENTHESIS = 0x28;
 const RIGHT_PARENTHESIS = 0x29;
 
+/** Signs that end a word wherever they end a run: , . ; : ! ? ) " */
+const CLOSING = new Set([0x2c, 0x2e, 0x3b, 0x3a, 0x21, 0x3f, 0x29, 0x22]);
+
 /** Reads words of the text it was given; the result of a reading stands in its fields until the next. */
 export class WordReader {
   /** The offset after the word. */
@@ -47,7 +50,11 @@ export class WordReader {
   read(from: number, to: number, quoteOpen: boolean): void {
     this.letters = this.digits = this.code = this.invisible = false;
     this.flags = 0;
-    let at = this.skipPrefix(from, to);
+    let at = plainWordEnd(this.text, from, to);
+    if (at > from) {
+      this.letters = true;
+      if (this.endsPlainly(at, to)) return;
+    } else at = this.skipPrefix(from, to);
     while (at < to) {
       const step = this.advance(from, at, to);
       if (step === 0) break;
@@ -59,6 +66,15 @@ export class WordReader {
       this.end = this.next = at + 1;
     } else this.takePossessive(from, at, to, quoteOpen);
     this.settle(from, to);
+  }
+
+  /** Settles a word of mere letters that nothing but one closing sign follows, as most words are. */
+  private endsPlainly(at: number, to: number): boolean {
+    if (at < to && (at + 1 < to || !CLOSING.has(this.text.charCodeAt(at)))) return false;
+    this.end = this.next = at;
+    this.kind = TokenKind.word;
+    this.flags = TokenFlag.word;
+    return true;
   }
 
   /** Passes the signs that open an identifier or a signed number. */
@@ -267,6 +283,18 @@ export class WordReader {
     if (this.digits && touchesDigit(text, from, end)) return true;
     return isCamel(text, from, end);
   }
+}
+
+/** The end of the small ASCII letters, after a first letter in any case. */
+function plainWordEnd(text: string, from: number, to: number): number {
+  const first = text.charCodeAt(from) | 0x20;
+  if (first < 0x61 || first > 0x7a) return from;
+  let at = from + 1;
+  for (; at < to; at++) {
+    const unit = text.charCodeAt(at);
+    if (unit < 0x61 || unit > 0x7a) break;
+  }
+  return at;
 }
 
 function isPrefixSign(text: string, at: number): boolean {
