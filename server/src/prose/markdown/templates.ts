@@ -11,6 +11,23 @@ const MARKERS: readonly (readonly [string, string])[] = [
   ['${', '}'],
 ];
 
+const MARKER_ON_ONE_LINE = /\{\{[^\n]{0,600}?\}\}|\{%[^\n]{0,600}?%\}/g;
+const FILLER = '\u00A0';
+
+/**
+ * The text with the blanks inside template markers replaced, length kept: a generator fills in `{{ branch }}` before Markdown
+ * is read, so such a blank does not end a link's target.
+ */
+export function closeMarkers(text: string): string {
+  if (!text.includes('{{') && !text.includes('{%')) return text;
+  return text.replace(MARKER_ON_ONE_LINE, (marker) => marker.replaceAll(' ', FILLER));
+}
+
+/** Undoes {@link closeMarkers} in a piece of its result that is shown. */
+export function openMarkers(text: string): string {
+  return text.includes(FILLER) ? text.replaceAll(FILLER, ' ') : text;
+}
+
 const ATTRIBUTES = /\{(?::|\s*[.#][\w-])[^{}\n]*\}/y;
 const EMOJI = /:[a-z][a-z0-9_+-]*:(?![\w:])/y;
 

@@ -1,0 +1,71 @@
+// Hostile input: what would make a parser slow or deep is read in a bounded multiple of the time that prose takes.
+import { describe, expect, it } from 'vitest';
+import { read } from '../../../server/src/prose/read.js';
+import type { Format } from '../../../server/src/text/sourceText.js';
+
+const SIZE = 100_000;
+/** Reading 100 KB of prose takes about 12 ms, so this stands for about 300 ms; what is quadratic takes seconds. */
+const MOST = 25;
+
+function fill(unit: string): string {
+  return unit.repeat(Math.ceil(SIZE / unit.length)).slice(0, SIZE);
+}
+
+const HOSTILE: Record<string, string> = {
+  base64: fill('QUJDREVGR0hJSktMTU5PUFFSU1RVVldYWVphYmNkZWZnaGlqa2xtbm9wcXJzdHV2d3h5ejAxMjM0NTY3ODkrLw'),
+  'one word': fill('a'),
+  'one accented word': fill('é'),
+  dashes: fill('-'),
+  'opening brackets': fill('['),
+  'balanced brackets': fill('[').slice(0, SIZE / 2) + fill(']').slice(0, SIZE / 2),
+  'opening emphasis': fill('*a '),
+  'emphasis that closes nothing': fill('*a_ '),
+  'nested emphasis': '*_'.repeat(12_000) + 'a' + '_*'.repeat(12_000),
+  pipes: fill('|'),
+  'a table of pipes': `${fill('|')}\n${fill('|-')}`,
+  'a bracket before a table': `[|\n|-|-\n${fill('a|\n')}`,
+  comments: fill('<!--'),
+  'processing instructions': fill('<?'),
+  'a tag full of blanks': `<a${fill(' ')}`,
+  'code elements': fill('<code>'),
+  'code spans': Array.from({ length: 440 }, (_, i) => '`'.repeat(i + 1)).join(' '),
+  'titles that never end': fill('[a](b "c'),
+  'images in images': '!['.repeat(20_000) + '](x)'.repeat(15_000),
+  'deep quotations': fill('> '),
+  'many deep quotations': fill(`${'>'.repeat(40)} a\n`),
+  'deep lists': fill('- * '),
+  'lists ever deeper': Array.from({ length: 440 }, (_, i) => `${'  '.repeat(i)}- a`).join('\n'),
+  templates: fill('{%'),
+  addresses: fill('a@'),
+  'a local part': fill('a.'),
+  blanks: `a${fill(' ')}b`,
+  'line breaks': fill('\n'),
+  definitions: fill('[a]: b\n'),
+  'a label that never ends': `[${fill('a\n')}`,
+  'opening quotation marks': fill('"a '),
+  'open containers': fill(':::a\n'),
+  'front matter that never ends': `---\n${fill('a: b\n')}`,
+  'an unclosed title': `---\ntitle: "${fill('x\\')}\n---\n`,
+  'NUL units': fill('\0'),
+  'lone surrogates': fill('\ud800'),
+  'byte order marks': fill('\uFEFF'),
+};
+
+const PROSE = fill('The key opens the gateway, and *every* owner has [one](x.md) of `them`.\n\n');
+
+function milliseconds(text: string, format: Format): number {
+  const before = process.cpuUsage();
+  read({ uri: 'file:///hostile', format, text });
+  const { user, system } = process.cpuUsage(before);
+  return (user + system) / 1000;
+}
+
+describe.each<Format>(['markdown', 'plaintext'])('reading 100 KB as %s', (format) => {
+  for (let i = 0; i < 10; i++) milliseconds(PROSE, format);
+  const usual = Math.max(4, Array.from({ length: 5 }, () => milliseconds(PROSE, format)).sort((a, b) => a - b)[2]!);
+
+  it.each(Object.entries(HOSTILE))('of %s stays within bounds', (_name, text) => {
+    const taken = Math.min(...Array.from({ length: 3 }, () => milliseconds(text, format)));
+    expect(taken / usual).toBeLessThan(MOST);
+  });
+});
