@@ -3,7 +3,7 @@ import { invariant } from '../base/invariant.js';
 import { FORMS, termForms, type PartOfSpeech } from '../rewrite/inflect.js';
 import { ASCII_FOLD, foldSlow } from './foldWord.js';
 import { normalSeparator, toPattern, type Pattern } from './pattern.js';
-import { TermTrie } from './termTrie.js';
+import { bitOf, TermTrie } from './termTrie.js';
 import { Gap, WordReader } from './wordReader.js';
 import { WordTable } from './wordTable.js';
 
@@ -67,7 +67,7 @@ export class TermMatcher {
 
   private run(text: string, from: number, end: number, onMatch: OnMatch): void {
     const { reader } = this;
-    const { first } = this.trie;
+    const { first, accept, ways, separatorCount } = this.trie;
     let at = from;
     let free = from;
     reader.count = 0;
@@ -75,12 +75,20 @@ export class TermMatcher {
       at = reader.read(text, at, end);
       // Words that a term could run beyond the chunk from wait for the next one.
       const stop = at >= end ? reader.count : reader.count - this.longest;
-      const { ids, starts, count } = reader;
+      const { ids, starts, gaps, count } = reader;
       let k = 0;
       while (k < stop) {
         const id = ids[k]!;
         const node = id < 0 ? 0 : first[id]!;
-        const matched = node === 0 ? -1 : this.matchFrom(text, k, node, from, free, end, onMatch);
+        // Most first words lead nowhere: no term ends with them, and the next word's bit is clear.
+        const gap = gaps[k + 1]!;
+        const leads =
+          node !== 0 &&
+          (accept[node] !== 0 ||
+            (ways[node] !== 0 &&
+              (gap === Gap.other ||
+                (ids[k + 1]! >= 0 && (ways[node]! & bitOf(ids[k + 1]! * separatorCount + gap)) !== 0))));
+        const matched = leads ? this.matchFrom(text, k, node, from, free, end, onMatch) : -1;
         if (matched < 0) k++;
         else {
           free = matched;
@@ -107,12 +115,14 @@ export class TermMatcher {
     let best = this.reach(text, node, k, last, from, free, end);
     let bestNode = node;
     let bestLast = last;
-    while (trie.deep[node] === 1 && last + 1 < reader.count) {
+    while (trie.ways[node] !== 0 && last + 1 < reader.count) {
       const id = reader.ids[last + 1]!;
       if (id < 0) break;
       const separator = this.separatorBefore(text, last + 1);
       if (separator < 0) break;
-      node = trie.step(node, id * trie.separatorCount + separator);
+      const symbol = id * trie.separatorCount + separator;
+      if ((trie.ways[node]! & bitOf(symbol)) === 0) break;
+      node = trie.step(node, symbol);
       if (node === 0) break;
       last++;
       const reached = this.reach(text, node, k, last, from, free, end);

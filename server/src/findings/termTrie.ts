@@ -9,8 +9,8 @@ const HYPHEN = 1;
 export class TermTrie {
   /** First node of a word that begins a pattern, by word number; 0 where none does. */
   readonly first: Int32Array;
-  /** 1 where edges leave the node. */
-  readonly deep: Uint8Array;
+  /** One bit for each symbol that leaves the node, by {@link bitOf}: a clear bit spares the look into the edges; 0 where none leaves. */
+  readonly ways: Int32Array;
   /** Head of the node's chain of patterns, as pattern index + 1. */
   readonly accept: Int32Array;
   /** The next pattern of a chain, as index + 1. */
@@ -39,7 +39,7 @@ export class TermTrie {
     const nodes = 1 + patterns.reduce((sum, { words: own }) => sum + own.length, 0);
     while (this.mask + 1 < nodes * 2) this.mask = this.mask * 2 + 1;
     this.edges = new Int32Array(3 * (this.mask + 1));
-    this.deep = new Uint8Array(nodes);
+    this.ways = new Int32Array(nodes);
     this.accept = new Int32Array(nodes);
     this.next = new Int32Array(patterns.length);
     this.particular = new Uint8Array(nodes);
@@ -96,7 +96,7 @@ export class TermTrie {
     this.edges[slot * 3] = node;
     this.edges[slot * 3 + 1] = symbol;
     this.edges[slot * 3 + 2] = target;
-    this.deep[node] = 1;
+    this.ways[node]! |= bitOf(symbol);
   }
 }
 
@@ -107,6 +107,11 @@ function spelling({ words, separators }: Pattern): number[] {
     for (let at = 0; at < (separators[k]?.length ?? 0); at++) units.push(0);
   }
   return units;
+}
+
+/** The bit of a symbol in {@link TermTrie.ways}. */
+export function bitOf(symbol: number): number {
+  return 1 << (Math.imul(symbol, 0x9e3779b1) >>> 27);
 }
 
 function slotOf(node: number, symbol: number): number {

@@ -1,6 +1,6 @@
 // Cuts text into words for the matcher, chunk by chunk over UTF-8 bytes, into typed arrays that are used again and again.
 import { ASCII_FOLD, foldSlow, isWordPoint } from './foldWord.js';
-import { hashStep, spread, type WordTable } from './wordTable.js';
+import { hashStep, SHARED, spread, type WordTable } from './wordTable.js';
 
 /** Kinds of gap before a word, as far as a single character tells. */
 export const Gap = { space: 0, hyphen: 1, other: 2 } as const;
@@ -52,7 +52,7 @@ export class WordReader {
   /** A zero byte stands behind the chunk and ends its last word. `base` turns a byte's index into an offset of the text; it shrinks with every character of several bytes. */
   private cut(text: string, from: number, length: number): void {
     const { bytes, ids, starts, ends, gaps } = this;
-    const { slots, mask, seed } = this.table;
+    const { slots, mask } = this.table;
     let count = this.count;
     let base = from;
     let i = 0;
@@ -65,7 +65,7 @@ export class WordReader {
       }
       const begin = i;
       const start = base + i;
-      let hash = seed;
+      let hash = 0;
       while (folded > BEYOND) {
         hash = hashStep(hash, folded);
         folded = FOLD[bytes[++i]!]!;
@@ -97,7 +97,7 @@ export class WordReader {
         let number = slots[slot * 2 + 1]!;
         while (number !== 0) {
           if (slots[slot * 2] === hash) {
-            id = number - 1;
+            id = number === SHARED ? this.table.find(foldSlow(text.slice(start, stop))) : number - 1;
             break;
           }
           slot = (slot + 1) & mask;

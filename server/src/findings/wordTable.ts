@@ -1,18 +1,17 @@
 // A closed set of folded words as an open-addressing hash table over typed arrays: from a word's hash to its number.
 
-const MULTIPLIER = 0x01000193;
+/** Stands in a slot for a word's number where several words share its hash: then the spelling decides. */
+export const SHARED = -1;
 
 /**
- * Numbers words from 0 in order of first entry. The hashes of the words in it differ from each other; a word that is not in it
- * may share a hash with one that is, so a match is compared with the text in the end.
+ * Numbers words from 0 in order of first entry. A word that is not in the table may share a hash with one that is, so whoever looks
+ * up by hash compares the text in the end.
  */
 export class WordTable {
   private readonly numbers = new Map<string, number>();
-  /** Slots of (hash, number + 1), a power of two of them; filled by {@link freeze}. */
+  /** Slots of (hash, number + 1 or {@link SHARED}), a power of two of them, the second half of an empty one being 0. */
   slots = new Int32Array(2);
   mask = 0;
-  /** The hash of no units. */
-  seed = 0;
 
   get size(): number {
     return this.numbers.size;
@@ -28,35 +27,30 @@ export class WordTable {
     return this.numbers.get(word) ?? -1;
   }
 
-  /** Lays out the table, with the first seed under which no two of its words share a hash. */
+  /** Lays out the table; words entered later are not in it. */
   freeze(): void {
     let size = 16;
-    while (size < this.numbers.size * 3) size *= 2;
+    while (size < this.numbers.size * 2) size *= 2;
     this.mask = size - 1;
-    for (this.seed = 0x811c9dc5 | 0; !this.layOut(size); this.seed = (this.seed + 1) | 0);
-  }
-
-  private layOut(size: number): boolean {
-    const slots = new Int32Array(size * 2);
+    this.slots = new Int32Array(size * 2);
     for (const [word, number] of this.numbers) {
-      let hash = this.seed;
+      let hash = 0;
       for (let k = 0; k < word.length; k++) hash = hashStep(hash, word.charCodeAt(k));
       let slot = spread(hash) & this.mask;
-      for (; slots[slot * 2 + 1] !== 0; slot = (slot + 1) & this.mask) if (slots[slot * 2] === hash) return false;
-      slots[slot * 2] = hash;
-      slots[slot * 2 + 1] = number + 1;
+      while (this.slots[slot * 2 + 1] !== 0 && this.slots[slot * 2] !== hash) slot = (slot + 1) & this.mask;
+      this.slots[slot * 2 + 1] = this.slots[slot * 2 + 1] === 0 ? number + 1 : SHARED;
+      this.slots[slot * 2] = hash;
     }
-    this.slots = slots;
-    return true;
   }
 }
 
-/** Adds one unit to a word's hash (FNV-1a: Fowler, Noll & Vo 1991). */
+/** Adds one unit to a word's hash, a polynomial in 127 modulo 2^32 that begins at 0. */
 export function hashStep(hash: number, unit: number): number {
-  return Math.imul(hash ^ unit, MULTIPLIER);
+  return ((hash << 7) - hash + unit) | 0;
 }
 
 /** Brings the high bits down, which a power-of-two mask would ignore. */
 export function spread(hash: number): number {
-  return hash ^ (hash >>> 15);
+  const mixed = Math.imul(hash, 0x9e3779b1);
+  return mixed ^ (mixed >>> 15);
 }

@@ -14,6 +14,7 @@ const COMPOUND_ENDINGS: readonly string[] =
   'woman man child person foot tooth mouse leaf shelf life knife wife self half vertex matrix schema analysis thesis index quiz'.split(
     ' ',
   );
+const COMPOUND_PLURAL = /(?:men|children|people|feet|teeth|mice|ves|ices|xes|schemata|analyses)$/;
 const NOT_COMPOUND = new Set('human german roman shaman talisman ottoman caiman norman'.split(' '));
 
 /** Words in -s that are singular as they stand: class, status, basis, alias, chaos, lens. */
@@ -57,6 +58,7 @@ export function singular(noun: string): string {
   if (isInitialism(noun)) return noun;
   const known = SINGULARS.get(lower);
   if (known !== undefined) return likeFirst(noun, known);
+  if (!lower.endsWith('s') && !COMPOUND_PLURAL.test(lower)) return noun;
   for (const candidate of singularCandidates(noun, lower)) if (pluralForms(candidate).includes(noun)) return candidate;
   return noun;
 }
