@@ -1,4 +1,5 @@
 // Keystroke to hints through the server: a page of 5,000 words, 1,000 decided terms, each key answered by diagnostics.
+import type { Diagnostic } from 'vscode-languageserver-protocol';
 import { TestClient, eventually, temporaryFolder } from '../support/languageServer.js';
 import { documentsOf } from './documents.js';
 import { ms, quantile } from './measure.js';
@@ -70,7 +71,7 @@ async function answered(client: TestClient, uri: string, send: () => Promise<voi
   const answer = new Promise<void>((resolve) => {
     const listening = client.connection.onNotification(
       'textDocument/publishDiagnostics',
-      (params: { uri: string; diagnostics: never[] }) => {
+      (params: { uri: string; diagnostics: Diagnostic[] }) => {
         client.published.push(params);
         if (params.uri === uri && client.published.length > before) {
           listening.dispose();

@@ -42,7 +42,12 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
   for (let round = 0; round < rounds; round++) {
     times.bare.push(cpuMs(bare));
     times.survey.push(cpuMs(survey));
-    times.bareWall.push(await wallMs(() => Promise.resolve(bare())));
+    times.bareWall.push(
+      await wallMs(() => {
+        bare();
+        return Promise.resolve();
+      }),
+    );
     times.workers.push(
       await wallMs(async () => {
         const facts = await gatherAll(sources, profiles);

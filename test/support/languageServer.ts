@@ -44,17 +44,20 @@ export class TestClient {
       new StreamMessageWriter(child.stdin),
     );
     const client = new TestClient(child, connection);
-    connection.onNotification('evenword/state', (state: ReportedState) => client.states.push(state));
+    connection.onNotification('evenword/state', (state: ReportedState) => void client.states.push(state));
     connection.onNotification(
       'textDocument/publishDiagnostics',
       (params: { uri: string; diagnostics: Diagnostic[] }) => {
         client.published.push(params);
       },
     );
-    connection.onNotification('window/logMessage', ({ message }: { message: string }) => client.messages.push(message));
-    connection.onNotification('window/showMessage', ({ message }: { message: string }) =>
-      client.messages.push(message),
+    connection.onNotification(
+      'window/logMessage',
+      ({ message }: { message: string }) => void client.messages.push(message),
     );
+    connection.onNotification('window/showMessage', ({ message }: { message: string }) => {
+      client.messages.push(message);
+    });
     connection.onRequest('window/workDoneProgress/create', () => null);
     connection.onRequest('client/registerCapability', () => null);
     connection.onRequest('workspace/configuration', ({ items }: { items: unknown[] }) => items.map(() => null));

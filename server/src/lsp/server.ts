@@ -27,9 +27,8 @@ export function serve(connection: Connection, host: ServerHost, version: string)
 
   connection.onInitialize((params: InitializeParams): InitializeResult => {
     options = (params.initializationOptions as ClientOptions | null | undefined) ?? {};
-    const folders = params.workspaceFolders ?? (params.rootUri ? [{ uri: params.rootUri, name: '' }] : []);
     sessions.setClient(params.capabilities);
-    for (const { uri } of folders) sessions.add(uri);
+    for (const { uri } of params.workspaceFolders ?? []) sessions.add(uri);
     return {
       serverInfo: { name: SOURCE, version },
       capabilities: {
