@@ -67,7 +67,8 @@ const HOSTILE: [string, string][] = [
   ['distinct words', distinctWords],
 ];
 
-const prose = fill(
+const japanese = fill('端末を起動する。次に設定を開き、サーバーの名前を入力する。');
+const english = fill(
   'The server keeps a record of every request, and the client may read it later. Restart the service to clear it. ',
 );
 const paragraph = (text: string): BlockContent => ({
@@ -82,9 +83,10 @@ const paragraph = (text: string): BlockContent => ({
 });
 
 describe.each([
-  ['en', createEnglishProfile()],
-  ['ja', createNeutralProfile('ja')],
-] as const)('profile %s', (language, profile) => {
+  ['en', createEnglishProfile(), english],
+  // The segmentation of scripts without spaces is the platform's, and dearer than ours: the neutral profile is held against such prose.
+  ['ja', createNeutralProfile('ja'), japanese],
+] as const)('profile %s', (language, profile, prose) => {
   /** Processor time in milliseconds, the smaller of two runs: on a busy machine the clock on the wall says little. */
   const cost = (text: string): number => {
     const content = paragraph(text);
@@ -106,7 +108,6 @@ describe.each([
       `${language}: 100 KB of prose ${ordinary.toFixed(1)} ms; dearest hostile lines, against it: ${shown.join(', ')}`,
     );
     // Two units a token is the densest that text can be, about three times as dense as prose. The floor of 20 ms keeps a fast machine from failing.
-    for (const [name, ms] of costs)
-      expect(ms, name).toBeLessThan(Math.max(20, ordinary * (language === 'en' ? 4 : 10)));
+    for (const [name, ms] of costs) expect(ms, name).toBeLessThan(Math.max(20, ordinary * 5));
   });
 });

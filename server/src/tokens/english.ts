@@ -96,7 +96,7 @@ class EnglishProfile implements LanguageProfile {
     for (let row = 0; row < length; row++) {
       if ((flags[row]! & TokenFlag.sentenceStart) !== 0) opening = true;
       const slice = text.slice(start[row], end[row]);
-      const form = kind[row] === TokenKind.word ? shownForms.of(slice) : undefined;
+      const form = kind[row] === TokenKind.word && inLongRun[row] === 0 ? shownForms.of(slice) : undefined;
       forms.push(form);
       lemma.push(form === undefined ? slice.toLowerCase() : '');
       columns.tag[row] = FIXED_TAGS[kind[row]!]!;
