@@ -9,7 +9,6 @@ const ODD = /[\r\0\uFFFC]/;
 export function normalise(source: string): string {
   if (!ODD.test(source)) return source;
   return source
-    .replaceAll('\\\r\n', ' \\\n')
     .replaceAll('\r\n', ' \n')
     .replaceAll('\r', '\n')
     .replace(/[\0\uFFFC]/g, '\uFFFD');

@@ -113,6 +113,8 @@ class InlineReader {
       while (start < newline && isBlank(text.charCodeAt(start))) start++;
       let end = newline;
       while (end > start && isBlank(text.charCodeAt(end - 1))) end--;
+      // A hard break before `\r\n` reaches the parser as a backslash before a blank, and is none to it.
+      if (newline < to && end > start && end < newline && text.charCodeAt(end - 1) === BACKSLASH) end--;
       if (start > at) this.out.space(at, start);
       this.out.run(start, end);
       at = newline < to ? newline + 1 : to;
@@ -197,6 +199,8 @@ class InlineReader {
     return { textEnd, target, label: label !== undefined && label !== '' ? label : text.slice(textStart, textEnd) };
   }
 }
+
+const BACKSLASH = 92;
 
 function isBlank(unit: number): boolean {
   return unit === 32 || unit === 9;

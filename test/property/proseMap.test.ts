@@ -1,0 +1,122 @@
+// The map between a block's text and its source holds for any mixture of markup, in every format.
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { OPAQUE, sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
+import { read } from '../../server/src/prose/read.js';
+import type { Format } from '../../server/src/text/sourceText.js';
+
+const PARTS = [
+  ...['word', 'two words', 'naïve', '漢字', '🙂', '\u0301', '"a b c d"', '“e f g h”', '.', ', '],
+  ...[
+    ' ',
+    '  ',
+    '\t',
+    '\n',
+    '\n\n',
+    '\r\n',
+    '\r',
+    '  \n',
+    '\\\n',
+    '*',
+    '**',
+    '_',
+    '~~',
+    '`',
+    '``',
+    '[',
+    ']',
+    '](x)',
+    '![',
+    '[^a]',
+    '<b>',
+  ],
+  ...[
+    '</b>',
+    '<kbd>',
+    '</kbd>',
+    '<q>',
+    '<a href="y">',
+    '</a>',
+    '<code>',
+    '</code>',
+    '<br>',
+    '&amp;',
+    '&#65;',
+    '&no;',
+    '\\*',
+    '\\',
+  ],
+  ...[
+    '# ',
+    '> ',
+    '> [!WARNING]\n',
+    '- ',
+    '1. ',
+    '    ',
+    '| ',
+    '|-|-|\n',
+    '```\n',
+    '---\n',
+    '===\n',
+    '!!! note\n    ',
+    ':::tip x\n',
+    ':::\n',
+  ],
+  ...[
+    '{{ a }}',
+    '{% b',
+    '${c}',
+    ':d:',
+    'https://e.f',
+    'g@h.i',
+    '[j]: k\n',
+    '---\ntitle: "l \\" m"\n---\n',
+    '\uFEFF',
+    '\uFFFC',
+    '\0',
+    '\ud800',
+  ],
+];
+
+const soups = fc.array(fc.constantFrom(...PARTS), { maxLength: 40 }).map((parts) => parts.join(''));
+
+function expectSoundMap(text: string, format: Format): void {
+  let before = 0;
+  for (const block of read({ uri: 'file:///soup', format, text }).blocks) {
+    const { content, start } = block;
+    expect(start).toBeGreaterThanOrEqual(before);
+    expect(start + content.sourceLength).toBeLessThanOrEqual(text.length);
+    before = start;
+    let to = start;
+    for (let i = 0; i < content.text.length; i++) {
+      const from = sourceStart(block, i);
+      const unit = content.text[i]!;
+      const slice = text.slice(from, sourceEnd(block, i + 1));
+      // Units of one decoded reference share its place; all others follow one another.
+      expect(from >= to || slice.startsWith('&')).toBe(true);
+      to = sourceEnd(block, i + 1);
+      expect(to).toBeLessThanOrEqual(start + content.sourceLength);
+      if (unit === OPAQUE || slice.length !== 1) expect(slice.length).toBeGreaterThan(0);
+      else if (unit === ' ') expect(slice).toMatch(/\s/);
+      else if (unit === '\uFFFD') expect(['\0', '\uFFFC', '\uFFFD']).toContain(slice);
+      else expect(slice).toBe(unit);
+    }
+    let at = 0;
+    for (const mark of content.marks) {
+      expect(mark.start).toBeGreaterThanOrEqual(at);
+      expect(mark.end).toBeGreaterThan(mark.start);
+      at = mark.end;
+    }
+    expect(at).toBeLessThanOrEqual(content.text.length);
+    expect([...content.links].every((link) => link.start < link.end && link.end <= content.text.length)).toBe(true);
+  }
+}
+
+describe.each<Format>(['markdown', 'plaintext'])('the prose of any %s', (format) => {
+  it('maps unit by unit to its source', () => {
+    fc.assert(
+      fc.property(soups, (text) => expectSoundMap(text, format)),
+      { numRuns: 600 },
+    );
+  });
+});
