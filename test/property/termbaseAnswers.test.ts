@@ -59,7 +59,7 @@ describe('answering every question as offered', () => {
           }
         },
       ),
-      { numRuns: 300 },
+      { numRuns: 200 },
     );
   });
 });

@@ -1,8 +1,8 @@
 // What is decided for one part of the tree: statuses of terms, pairs kept apart, questions put off.
 import type { Span } from '../base/span.js';
 import type { Question, QuestionTerm } from '../mining/question.js';
-import { termKey, termText } from '../termbase/termKey.js';
-import type { ConceptEntry, PartOfSpeech, Termbase, TermRef, TermStatus } from '../termbase/termbase.js';
+import type { ApartEntry, ConceptEntry, LaterEntry, PartOfSpeech, Termbase, TermStatus } from '../termbase/termbase.js';
+import { GroupIndex } from './groupIndex.js';
 import { TermsInForce, type DecidedTerm } from './termsInForce.js';
 
 /** How two terms stand to each other, where a termbase says it. */
@@ -28,6 +28,8 @@ const GROWTH_TO_ASK_AGAIN = 2;
 /** The decisions of a chain of termbases, nearest first; immutable. */
 export class Decisions {
   private readonly inForce: TermsInForce;
+  private readonly apart: GroupIndex<ApartEntry>;
+  private readonly later: GroupIndex<LaterEntry>;
   /** All terms in force that finally name a concept, of whichever file. */
   private readonly namesOf = new Map<ConceptEntry, string[]>();
   /** Decided concepts, nearest file first, each file in its order; overridden terms and emptied concepts are left out. */
@@ -35,6 +37,8 @@ export class Decisions {
 
   constructor(readonly chain: readonly Termbase[]) {
     this.inForce = new TermsInForce(chain);
+    this.apart = new GroupIndex(chain, ({ apart }) => apart);
+    this.later = new GroupIndex(chain, ({ later }) => later);
     const concepts = new Map<ConceptEntry, { concept: ConceptEntry; uri: string; terms: DecidedTerm[] }>();
     for (const term of this.inForce.terms) {
       const names = this.namesOf.get(term.names);
@@ -94,8 +98,8 @@ export class Decisions {
     const names = [a, b].map(spellingsOf);
     // A nearer file may split a concept; then its other terms say nothing about which half they belong to.
     if (together.length === 0) [ofA, ofB].forEach((terms, side) => names[side]!.push(...this.synonymsOf(terms)));
-    const apart = this.chain.findIndex((termbase) => termbase.apart.some(({ terms }) => holdsAll(terms, names)));
-    if (apart >= 0 && together.every((level) => apart <= level)) return 'two-concepts';
+    const apart = this.apart.levelOf(names);
+    if (apart !== undefined && together.every((level) => apart <= level)) return 'two-concepts';
     if (together.length > 0) return 'one-concept';
     return ofA.length > 0 && ofB.length > 0 ? 'two-concepts' : undefined;
   }
@@ -107,11 +111,9 @@ export class Decisions {
   /** The `later` entry that puts a question off, unless its terms have since come to twice the uses. */
   putOff(question: Question): DecisionPlace | undefined {
     const uses = question.terms.reduce((sum, term) => sum + term.uses, 0);
-    for (const { uri, later } of this.chain) {
-      for (const entry of later) {
-        const grown = entry.uses !== undefined && uses >= GROWTH_TO_ASK_AGAIN * Math.max(1, entry.uses);
-        if (!grown && holdsAll(entry.terms, question.terms.map(spellingsOf))) return { uri, span: entry.span };
-      }
+    for (const { uri, entry } of this.later.entriesWith(question.terms.map(spellingsOf))) {
+      const grown = entry.uses !== undefined && uses >= GROWTH_TO_ASK_AGAIN * Math.max(1, entry.uses);
+      if (!grown) return { uri, span: entry.span };
     }
     return undefined;
   }
@@ -120,24 +122,4 @@ export class Decisions {
 /** A question's term as written: its text, then its forms, most used first as they come. */
 function spellingsOf(term: QuestionTerm): string[] {
   return [term.text, ...term.forms.map(({ text }) => text)];
-}
-
-/** True where each term is listed by one of its spellings, no two by the same name. */
-function holdsAll(names: readonly TermRef[], terms: readonly (readonly string[])[]): boolean {
-  const taken = new Set<TermRef>();
-  for (const spellings of terms) {
-    const name = spellings
-      .map((spelling) => findName(names, spelling))
-      .find((found) => found !== undefined && !taken.has(found));
-    if (name === undefined) return false;
-    taken.add(name);
-  }
-  return true;
-}
-
-function findName(names: readonly TermRef[], spelling: string): TermRef | undefined {
-  const key = termKey(spelling);
-  const sameKey = names.filter((name) => name.key === key);
-  // Names that differ in capitals alone are told apart by them.
-  return sameKey.length > 1 ? sameKey.find(({ text }) => text === termText(spelling)) : sameKey[0];
 }

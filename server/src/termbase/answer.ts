@@ -193,8 +193,9 @@ function statusClash({ term }: TermPlace, wanted: TermStatus): Refusal | undefin
 
 function keptApart(termbase: Termbase, terms: readonly string[], lookUp: LookUp): Refusal | undefined {
   for (const entry of termbase.apart) {
-    const [one, other] = terms.filter((term) => lookUp.isAmong(entry.terms, term));
-    if (one === undefined || other === undefined) continue;
+    // Spellings that differ in capitals can share one name of the entry, which keeps nothing apart.
+    const [one, other] = entry.terms.flatMap((name) => terms.find((term) => lookUp.isSame(name, term)) ?? []);
+    if (one === undefined || other === undefined || one === other) continue;
     const message = `“${one}” and “${other}” are kept apart as two concepts. Remove that entry from the termbase first.`;
     return { code: 'kept-apart', message, span: entry.span };
   }

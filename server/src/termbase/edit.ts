@@ -6,7 +6,7 @@ import { applyEdits, type TextEdit } from '../text/edits.js';
 import { LineIndex } from '../text/lineIndex.js';
 import { isRefusal, planAnswer, type Answer, type Change, type Refusal, type RefusalCode } from './answer.js';
 import { APART_KEYS, CONCEPT_KEYS, TOP_KEYS } from './format.js';
-import { parseTermbase } from './parse.js';
+import { parseTermbase, termbaseOf } from './parse.js';
 import { isEmpty, spanOf, type Node } from './reading.js';
 import { findPair, isFlow, quotingOf, TreeEdits, Unwritable } from './treeEdits.js';
 import { FORMAT_VERSION } from './termbase.js';
@@ -39,7 +39,8 @@ const OPENING = '# What this documentation calls things. Edited by hand or by Ev
  * Nothing is written into a file with errors, against what the file says, or where the result would not read back.
  */
 export function answerEdits(text: string, answer: Answer): AnswerEdits {
-  const parsed = parseTermbase(text, '');
+  const source = readYaml(text);
+  const parsed = termbaseOf(source, '');
   const error = parsed.problems.find(({ severity }) => severity === 'error');
   if (error !== undefined) {
     const message = `The termbase has an error, so nothing is written into it. ${error.message}`;
@@ -49,7 +50,7 @@ export function answerEdits(text: string, answer: Answer): AnswerEdits {
   if (plan === undefined) return { kind: 'edits', edits: [] };
   if (isRefusal(plan)) return refused(text, plan);
   try {
-    const edits = editsFor(text, plan);
+    const edits = editsFor(text, source.document?.contents, plan);
     // Whatever odd YAML the file holds: what is written must read back as the answer.
     const after = parseTermbase(applyEdits(text, edits), '');
     if (after.usable && planAnswer(after.termbase, answer) === undefined) return { kind: 'edits', edits };
@@ -76,8 +77,7 @@ function spanOfChange(change: Change): Span {
   return 'entry' in change ? change.entry.span : { start: 0, end: 0 };
 }
 
-function editsFor(text: string, change: Change): readonly TextEdit[] {
-  const root = readYaml(text).document?.contents;
+function editsFor(text: string, root: Node, change: Change): readonly TextEdit[] {
   const style = styleOf(root);
   const tree = new TreeEdits(text, style);
   if (isEmpty(root)) {

@@ -15,7 +15,7 @@ import {
   type TermbaseProblem,
   type TermRef,
 } from './termbase.js';
-import { readYaml } from './yamlTree.js';
+import { readYaml, type YamlTree } from './yamlTree.js';
 
 /** What reading a file gives. */
 export interface ParsedTermbase {
@@ -32,7 +32,11 @@ export interface ParsedTermbase {
  * @param uri where the text is from: kept with the termbase, not opened.
  */
 export function parseTermbase(text: string, uri: string): ParsedTermbase {
-  const { document, problems: syntax } = readYaml(text);
+  return termbaseOf(readYaml(text), uri);
+}
+
+/** Reads a file whose YAML tree is at hand already; otherwise as {@link parseTermbase}. */
+export function termbaseOf({ document, problems: syntax }: YamlTree, uri: string): ParsedTermbase {
   const reading = new Reading();
   reading.problems.push(...syntax);
   const root = document?.contents;

@@ -298,3 +298,9 @@ describe('refusals', () => {
     expect(answered('---\n...\n', PREFER)).toMatch(/^cannot-write: /u);
   });
 });
+
+it('does not take two spellings of one name for two names kept apart', () => {
+  const before = lines('concepts:', '  - { preferred: Github, deprecated: [GitHub] }', 'apart:', '  - [Github, node]');
+  const answer: Answer = { kind: 'prefer', terms: ['Github', 'hub'], preferred: 'Github' };
+  expect(answered(before, answer)).toBe(before.replace('[GitHub]', '[GitHub, hub]'));
+});
