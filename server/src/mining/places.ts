@@ -64,6 +64,15 @@ export function isRunningText(stream: TokenStream, row: number): boolean {
   return (stream.zones[row]! & (Zone.heading | Zone.tableCell | Zone.frontMatter | Zone.alternativeText)) === 0;
 }
 
+/** True for a row inside a sentence of running text, where a capital is the word's own. */
+export function isInsideSentence(stream: TokenStream, row: number): boolean {
+  return (
+    isRunningText(stream, row) &&
+    (stream.flags[row]! & TokenFlag.sentenceStart) === 0 &&
+    row > firstRowOfBlock(stream, row)
+  );
+}
+
 /**
  * Up to `limit` uses to show for one term: running text before headings and tables, another document each while there
  * are any, in document order.

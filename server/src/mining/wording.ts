@@ -3,8 +3,7 @@ import { byCountThenText, compareCodeUnits } from '../base/order.js';
 import type { TokenStream } from '../corpus/stream.js';
 import type { Vocabulary } from '../corpus/vocabulary.js';
 import { pluralsOf, singularOf } from '../lexicon/plurals.js';
-import { TokenFlag } from '../tokens/tokens.js';
-import { isRunningText } from './places.js';
+import { isInsideSentence } from './places.js';
 import type { Use } from './places.js';
 import type { QuestionTerm, TermForm } from './question.js';
 
@@ -35,9 +34,7 @@ const LOWER_SHARE = 0.15;
  * lower case unless it is all but always capitalised, else the commonest. Ties by code units, lower case before capitals.
  */
 export function displayText(stream: TokenStream, vocabulary: Vocabulary, uses: readonly Use[]): string {
-  const inside = uses.filter(
-    (use) => isRunningText(stream, use.row) && (stream.flags[use.row]! & TokenFlag.sentenceStart) === 0,
-  );
+  const inside = uses.filter((use) => isInsideSentence(stream, use.row));
   const counts = new Map<string, number>();
   for (const use of inside.length > 0 ? inside : uses) {
     const text = spelledAt(stream, vocabulary, use);

@@ -77,7 +77,8 @@ function sideOf(corpus: Corpus, words: readonly string[]): Side | undefined {
 /** A use that is neither an identifier nor set in capitals. */
 function isPlain(corpus: Corpus, { row, length }: Use): boolean {
   const { stream, vocabulary } = corpus;
-  if ((stream.flags[row]! & TokenFlag.identifier) !== 0) return length === 1 && /\d/.test(vocabulary.textOf(stream.fold[row]!));
+  if ((stream.flags[row]! & TokenFlag.identifier) !== 0)
+    return length === 1 && /\d/.test(vocabulary.textOf(stream.fold[row]!));
   return !/\p{Lu}\p{Lu}/u.test(vocabulary.textOf(stream.spelling[row]!));
 }
 
@@ -86,7 +87,10 @@ function makeQuestion(corpus: Corpus, short: Side, long: Side, shared: SharedFra
     .map(({ forms, uses, words }) => ({ term: termOf(corpus, forms, words.join(' ')), uses }))
     .sort((a, b) => byUses(a.term, b.term));
   const confidence = 0.5 + 0.4 * shared.share;
-  const [clip, full] = [short, long].map(({ forms, words }) => termOf(corpus, forms, words.join(' '))) as [QuestionTerm, QuestionTerm];
+  const [clip, full] = [short, long].map(({ forms, words }) => termOf(corpus, forms, words.join(' '))) as [
+    QuestionTerm,
+    QuestionTerm,
+  ];
   const shown = shared.kinds.slice(0, 3).map((frame) => `“${frameText(corpus, frame)}”`);
   return {
     id: `abbreviation:${sides.map(({ term }) => term.text).join('|')}`,
@@ -109,5 +113,3 @@ function makeQuestion(corpus: Corpus, short: Side, long: Side, shared: SharedFra
     places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
   };
 }
-
-

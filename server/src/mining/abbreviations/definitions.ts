@@ -127,7 +127,12 @@ function makeDefinition(
   longLength: number,
 ): Definition {
   const words: string[] = [];
-  for (let i = 0; i < longLength; i++) words.push(...spellingAt(corpus, longRow + i).toLowerCase().split('-'));
+  for (let i = 0; i < longLength; i++)
+    words.push(
+      ...spellingAt(corpus, longRow + i)
+        .toLowerCase()
+        .split('-'),
+    );
   return { short, shortRow, longRow, longLength, longKey: longKeyOf(words) };
 }
 

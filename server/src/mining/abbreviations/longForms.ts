@@ -20,7 +20,10 @@ export function formsOfLong(corpus: Corpus, words: readonly string[]): FormUses[
   const extend = (prefix: readonly number[], at: number): void => {
     if (at === words.length) sequences.push([...prefix]);
     for (let end = at + 1; end <= words.length; end++) {
-      const head = words.slice(at, end - 1).map((word) => `${word}-`).join('');
+      const head = words
+        .slice(at, end - 1)
+        .map((word) => `${word}-`)
+        .join('');
       const tail = words[end - 1]!;
       for (const last of end === words.length ? numberForms(tail) : [tail]) {
         const id = corpus.vocabulary.find(head + last);
@@ -30,7 +33,10 @@ export function formsOfLong(corpus: Corpus, words: readonly string[]): FormUses[
   };
   extend([], 0);
   return sequences
-    .map((folds) => ({ folds, uses: rowsOfSequence(corpus.stream, folds).map((row) => ({ row, length: folds.length })) }))
+    .map((folds) => ({
+      folds,
+      uses: rowsOfSequence(corpus.stream, folds).map((row) => ({ row, length: folds.length })),
+    }))
     .filter(({ uses }) => uses.length > 0);
 }
 

@@ -69,12 +69,7 @@ export function askExplained(
 }
 
 /** Uses that are no explanation, not the first on a page that uses the short form, and in no heading. */
-export function freeUses(
-  corpus: Corpus,
-  long: readonly Use[],
-  short: readonly Use[],
-  expansion: Expansion,
-): FreeUse {
+export function freeUses(corpus: Corpus, long: readonly Use[], short: readonly Use[], expansion: Expansion): FreeUse {
   const { stream } = corpus;
   const explained = new Set(expansion.definitions.map((definition) => definition.longRow));
   const shortPages = new Set(short.map((use) => stream.documentOf(use.row)));
@@ -124,7 +119,9 @@ export function termOf(corpus: Corpus, forms: readonly FormUses[], lead?: string
     .filter((form) => form.uses.length > 0)
     .map((form) => ({ text: displayText(corpus.stream, corpus.vocabulary, form.uses), count: form.uses.length }));
   const documents = countDocuments(corpus.stream, usesOf(forms));
-  const leading = texts.find(({ text }) => text.toLowerCase().replace(/-/g, ' ') === lead?.toLowerCase().replace(/-/g, ' '));
+  const leading = texts.find(
+    ({ text }) => text.toLowerCase().replace(/-/g, ' ') === lead?.toLowerCase().replace(/-/g, ' '),
+  );
   return makeTerm(texts, documents, leading?.text);
 }
 
@@ -149,7 +146,10 @@ function reasonsOf(
   if (free.onItsPages.length > 0) {
     reasons.push({
       kind: 'mixed-page',
-      text: `${pages(countDocuments(stream, free.onItsPages))} go on with “${long}” beside “${short}”`.replace('1 page go ', '1 page goes '),
+      text: `${pages(countDocuments(stream, free.onItsPages))} go on with “${long}” beside “${short}”`.replace(
+        '1 page go ',
+        '1 page goes ',
+      ),
       value: free.onItsPages.length,
     });
   }

@@ -3,6 +3,7 @@ import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import type { Question } from '../question.js';
+import { askCapitals } from './capitals.js';
 import { findCandidates } from './candidates.js';
 import { joinFamilies } from './families.js';
 import type { Member } from './families.js';
@@ -29,6 +30,10 @@ export function* askVariants(corpus: Corpus): Work<Question[]> {
   }
   yield;
   const questions = joinFamilies(members).flatMap((family) => makeQuestion(corpus, family) ?? []);
+  const settled = new Set(
+    questions.flatMap(({ terms }) => terms.flatMap(({ forms }) => forms.map(({ text }) => text.toLowerCase()))),
+  );
+  questions.push(...(yield* askCapitals(corpus, settled)));
   return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }
 

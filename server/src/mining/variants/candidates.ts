@@ -1,5 +1,6 @@
 // Candidates: ways of writing that share one key, found among the words of the corpus and its n-grams.
 import type { Corpus } from '../../corpus/corpus.js';
+import { singularOf } from '../../lexicon/plurals.js';
 import { spellingKey } from '../../lexicon/spelling.js';
 import { TokenFlag } from '../../tokens/tokens.js';
 import { rowsOfSequence } from '../places.js';
@@ -18,6 +19,8 @@ export interface Form {
   readonly text: string;
   /** The form with its last part in the singular: inflections of one way of writing share it. */
   readonly style: string;
+  /** The last part is a plural, or a verb in -s. */
+  readonly plural: boolean;
   readonly parts: readonly string[];
   readonly rows: readonly number[];
 }
@@ -65,7 +68,8 @@ function makeForm(corpus: Corpus, key: string, shape: Shape, folds: readonly num
   const head = parts.slice(0, -1);
   const tail = parts[parts.length - 1]!;
   const rows = folds.length === 1 ? [...corpus.stream.rowsOf(folds[0]!)] : rowsOfSequence(corpus.stream, folds);
-  return { shape, key, folds, text: parts.join(joint), style: [...head, singularKey(tail)].join(joint), parts, rows };
+  const style = [...head, singularKey(tail)].join(joint);
+  return { shape, key, folds, text: parts.join(joint), style, plural: singularOf(tail) !== tail, parts, rows };
 }
 
 function indexChunks(corpus: Corpus): {

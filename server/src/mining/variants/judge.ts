@@ -22,8 +22,18 @@ const PARTICLES = new Set(
 /** Words inside a phrase that make its open form a phrase of grammar (end to end, out of date, left to right). */
 const LINKS = new Set('to of and or the a an in on by for with from at as per vs not no than'.split(' '));
 
+/** Words that count or grade the noun at a phrase's end rather than the one after them: a single node failure. */
+const QUANTIFIERS = new Set(
+  `one two three four five six seven eight nine ten single multiple several many few more less most least first second third
+  last next same other different various higher lower larger smaller longer shorter faster slower better best
+  worst new old`.split(/\s+/),
+);
+
 /** Slots in which an open and a joined form are the same part of speech. */
 const LIKE_SLOTS: readonly Slot[] = ['attributive', 'predicate', 'noun', 'verb'];
+
+/** An open form that begins with a quantifier must be as frequent before a noun as 1 / this of the joined one. */
+const QUANTIFIED_SHARE = 4;
 
 /** Judges two ways of writing one key, or returns undefined where they are right as they are. */
 export function judge(a: Style, b: Style): Mix | undefined {
@@ -57,8 +67,12 @@ function judgeOpen(chunk: Style, open: Style): Mix | undefined {
   if (namesOf(open) > 0.6 && namesOf(chunk) < 0.4) return undefined;
   if (isCamel(chunk)) return judgeCamel(chunk, open);
   const phrase = parts.some((part) => LINKS.has(part));
-  const exchangeable = shared(chunk, open, phrase ? ['attributive'] : LIKE_SLOTS);
-  if (exchangeable === 0) return undefined;
+  const slots = phrase ? (['attributive'] as const) : LIKE_SLOTS;
+  if (QUANTIFIERS.has(parts[0]!) && open.slots.attributive * QUANTIFIED_SHARE < chunk.slots.attributive)
+    return undefined;
+  // Lone uses in two slots are as easily two misread sentences.
+  if (Math.max(...slots.map((slot) => shared(chunk, open, [slot]))) < 2) return undefined;
+  const exchangeable = shared(chunk, open, slots);
   return { lane: chunk.shape === 'hyphened' ? 'hyphen' : 'space', exchangeable };
 }
 

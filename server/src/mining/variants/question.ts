@@ -1,13 +1,13 @@
 // A family of ways of writing as a question: its terms, the reasons in plain words, its worth.
 import type { Corpus } from '../../corpus/corpus.js';
 import { countDocuments, examplePlaces } from '../places.js';
-import type { Use } from '../places.js';
 import type { Question, QuestionTerm, Reason } from '../question.js';
 import { byUses, displayText, makeTerm, pages, times } from '../wording.js';
 import type { Form } from './candidates.js';
 import type { Family, Side } from './families.js';
 import type { Lane, Mix } from './judge.js';
 import type { Slot } from './slots.js';
+import type { SlottedUse } from './styles.js';
 
 /** How often a mix was right when read, by what the ways differ in. */
 const CONFIDENCE: Readonly<Record<Lane, number>> = {
@@ -24,7 +24,7 @@ const LEAST_EXCHANGEABLE = 2;
 interface SideTerm {
   readonly term: QuestionTerm;
   readonly side: Side;
-  readonly uses: readonly Use[];
+  readonly uses: readonly SlottedUse[];
 }
 
 /** The question that a family asks, or undefined where there is too little of it to ask about. */
@@ -34,6 +34,7 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
   const sides = sideTerms(corpus, family);
   const least = Math.min(...sides.map(({ term }) => term.documents));
   if (least < 2 && mix.exchangeable < leastOnOnePage(mix.lane)) return undefined;
+  const slot = commonSlot(sides);
   const confidence = confidenceOf(mix);
   const terms = sides.map(({ term }) => term);
   const outside = terms.slice(1).reduce((sum, term) => sum + term.uses, 0);
@@ -43,14 +44,14 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
     confidence,
     worth: confidence * outside,
     terms,
-    reasons: reasonsOf(corpus, mix, sides),
-    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
+    reasons: reasonsOf(corpus, mix, sides, slot),
+    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, inSlot(uses, slot))),
   };
 }
 
 /** A way of writing that one page alone has may be that page's own: it takes more of it, save for a plain spelling. */
 function leastOnOnePage(lane: Lane): number {
-  return lane === 'spelling' ? 2 : lane === 'joining' ? 3 : 4;
+  return lane === 'spelling' ? 2 : 3;
 }
 
 function confidenceOf({ lane, exchangeable }: Mix): number {
@@ -90,7 +91,7 @@ function commonInflection(family: Family): string | undefined {
 }
 
 function inflectionOf(form: Form): string {
-  return form.key + (form.text === form.style ? '' : '+');
+  return form.key + (form.plural ? '+' : '');
 }
 
 function textOf(corpus: Corpus, form: Form): string {
@@ -98,12 +99,11 @@ function textOf(corpus: Corpus, form: Form): string {
   return displayText(corpus.stream, corpus.vocabulary, uses);
 }
 
-function reasonsOf(corpus: Corpus, mix: Mix, sides: readonly SideTerm[]): Reason[] {
+function reasonsOf(corpus: Corpus, mix: Mix, sides: readonly SideTerm[], slot: Slot | undefined): Reason[] {
   const ways = sides.map(
     ({ term, side }) => `${wayOf(side, term.text)} ${times(term.uses)} on ${pages(term.documents)}`,
   );
   const reasons: Reason[] = [{ kind: kindOf(mix.lane), text: `written ${listed(ways)}`, value: mix.exchangeable }];
-  const slot = commonSlot(sides);
   if (slot !== undefined && mix.lane !== 'spelling') {
     const counts = sides.map(({ term, side }) => `“${term.text}” ${times(slotCount(side, slot))}`);
     reasons.push({
@@ -148,6 +148,11 @@ function listed(items: readonly string[]): string {
 
 function slotCount(side: Side, slot: Slot): number {
   return side.styles.reduce((sum, style) => sum + style.slots[slot], 0);
+}
+
+/** The uses that show the mix best: those in the slot that all sides share. */
+function inSlot(uses: readonly SlottedUse[], slot: Slot | undefined): readonly SlottedUse[] {
+  return slot === undefined ? uses : uses.filter((use) => use.slot === slot);
 }
 
 /** The slot that the sides share most, where they share one. */

@@ -3,6 +3,7 @@ import type { Corpus } from '../../corpus/corpus.js';
 import type { TokenStream } from '../../corpus/stream.js';
 import type { Vocabulary } from '../../corpus/vocabulary.js';
 import { FactFlag } from '../../facts/flags.js';
+import { Zone } from '../../prose/zones.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
 import { endRowOfBlock, firstRowOfBlock, followsOn } from '../places.js';
 
@@ -33,9 +34,11 @@ export class SlotReader {
   private readonly to: number | undefined;
   private readonly comma: number | undefined;
   private readonly stream: TokenStream;
+  private readonly vocabulary: Vocabulary;
 
   constructor(corpus: Corpus) {
     this.stream = corpus.stream;
+    this.vocabulary = corpus.vocabulary;
     this.to = corpus.vocabulary.find('to');
     this.comma = corpus.vocabulary.find(',');
     this.classes = Object.fromEntries(
@@ -51,6 +54,7 @@ export class SlotReader {
     const blockEnd = endRowOfBlock(stream, row);
     const starts = row === blockStart || (stream.flags[row]! & TokenFlag.sentenceStart) !== 0;
     if (row === blockStart && (end === blockEnd || this.isColon(end, blockEnd))) return 'lone';
+    if (this.isLabel(row, blockStart, blockEnd)) return 'lone';
     if (this.isVerb(row, end, starts, blockEnd)) return 'verb';
     if (end < blockEnd) {
       const next = this.afterwards(end);
@@ -63,6 +67,8 @@ export class SlotReader {
   private isVerb(row: number, end: number, starts: boolean, blockEnd: number): boolean {
     const { stream } = this;
     const takesObject = end < blockEnd && followsOn(stream, end) && this.is('objectStart', end);
+    // The tagger knows a verb by more than its neighbours; participles it takes for verbs before their nouns as well.
+    if (end === row + 1 && stream.tag[row] === TAG.VERB && !this.isParticiple(row)) return true;
     if (starts) return takesObject;
     if (!this.follows(row)) return false;
     const before = stream.fold[row - 1]!;
@@ -71,9 +77,25 @@ export class SlotReader {
     return takesObject || (this.follows(row - 1) && this.is('leadsToInfinitive', row - 2));
   }
 
+  /** In a heading without a capital, or in a link that opens an entry of a list: the name of a command or a page. */
+  private isLabel(row: number, blockStart: number, blockEnd: number): boolean {
+    const { stream } = this;
+    const zones = stream.zones[row]!;
+    if ((zones & (Zone.heading | Zone.frontMatter)) !== 0) {
+      for (let at = blockStart; at < blockEnd; at++) if (stream.spelling[at] !== stream.fold[at]) return false;
+      return true;
+    }
+    if ((zones & Zone.linkText) === 0) return false;
+    for (let at = blockStart; at <= row; at++) if ((stream.zones[at]! & Zone.linkText) === 0) return false;
+    let end = row;
+    while (end < blockEnd && (stream.zones[end]! & Zone.linkText) !== 0) end++;
+    return end === blockEnd || (stream.flags[end]! & TokenFlag.word) === 0;
+  }
+
   /** What the following word makes of a use, or undefined where it leaves the question open. */
   private afterwards(end: number): Slot | undefined {
     const { stream } = this;
+    if (stream.tag[end] === TAG.OPAQUE && (stream.flags[end]! & TokenFlag.spaceBefore) !== 0) return 'unclear';
     if (!followsOn(stream, end)) {
       const sign = stream.flags[end]! & TokenFlag.word;
       return sign === 0 && this.isComma(end) ? 'unclear' : undefined;
@@ -92,6 +114,10 @@ export class SlotReader {
 
   private is(name: WordClass, row: number): boolean {
     return this.classes[name].has(this.stream.fold[row]!);
+  }
+
+  private isParticiple(row: number): boolean {
+    return /(?:ed|ing|en)$/.test(this.vocabulary.textOf(this.stream.fold[row]!));
   }
 
   private isComma(row: number): boolean {

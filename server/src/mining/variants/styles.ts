@@ -3,10 +3,15 @@ import type { Corpus } from '../../corpus/corpus.js';
 import type { TokenStream } from '../../corpus/stream.js';
 import { FactFlag } from '../../facts/flags.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, followsOn, isRunningText } from '../places.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
 import type { Candidate, Form, Shape } from './candidates.js';
 import type { Slot, SlotReader } from './slots.js';
+
+/** A use and the slot it stands in. */
+export interface SlottedUse extends Use {
+  readonly slot: Slot;
+}
 
 /** One way of writing a word or compound, all inflections together. */
 export interface Style {
@@ -14,8 +19,8 @@ export interface Style {
   /** The style's singular form in lower case. */
   readonly text: string;
   readonly forms: readonly Form[];
-  /** Uses that count as evidence, in document order. */
-  readonly uses: readonly Use[];
+  /** Uses that count as evidence, in document order, each with its slot. */
+  readonly uses: readonly SlottedUse[];
   /** Uses that count, by slot; those that stand alone as labels are left out. */
   readonly slots: Readonly<Record<Slot, number>>;
   /** Uses inside sentences of running text; the counts below are among them. */
@@ -34,7 +39,10 @@ export interface Style {
   readonly afterName: number;
 }
 
-type Cases = Record<'inside' | 'capitalised' | 'withCapital' | 'camel' | 'lowerCamel' | 'shouted' | 'afterName', number>;
+type Cases = Record<
+  'inside' | 'capitalised' | 'withCapital' | 'camel' | 'lowerCamel' | 'shouted' | 'afterName',
+  number
+>;
 
 /** The styles of a candidate. Where only the plural differs (indexes, indices), each plural is a style. */
 export function stylesOf(corpus: Corpus, slots: SlotReader, candidate: Candidate): Style[] {
@@ -45,24 +53,32 @@ export function stylesOf(corpus: Corpus, slots: SlotReader, candidate: Candidate
     else list.push(form);
   }
   if (byStyle.size === 1) {
-    const plurals = candidate.forms.filter((form) => form.text !== form.style);
-    return plurals.length < 2 ? [] : plurals.map((form) => makeStyle(corpus, slots, form.text, [form]));
+    const plurals = candidate.forms.filter((form) => form.plural);
+    return plurals.length < 2 || !beginAlike(plurals)
+      ? []
+      : plurals.map((form) => makeStyle(corpus, slots, form.text, [form]));
   }
   return [...byStyle].map(([text, forms]) => makeStyle(corpus, slots, text, forms));
 }
 
+/** People and persons are two words, indexes and indices one. */
+function beginAlike(forms: readonly Form[]): boolean {
+  return new Set(forms.map((form) => form.text.slice(0, 3))).size === 1;
+}
+
 function makeStyle(corpus: Corpus, reader: SlotReader, text: string, forms: readonly Form[]): Style {
   const slots: Record<Slot, number> = { attributive: 0, predicate: 0, noun: 0, verb: 0, unclear: 0, lone: 0 };
-  const uses: Use[] = [];
+  const uses: SlottedUse[] = [];
   const cases: Cases = { inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0, afterName: 0 };
   for (const form of forms) {
     for (const row of form.rows) {
       const length = form.folds.length;
-      if (isGlued(corpus, row, length)) continue;
-      const slot = reader.slotOf(row, length);
+      if (isMention(corpus, row, length)) continue;
+      const found = reader.slotOf(row, length);
       // An open plural before a noun is not its modifier: "two elements follow".
-      slots[slot === 'attributive' && form.shape === 'open' && form.text !== form.style ? 'unclear' : slot]++;
-      uses.push({ row, length });
+      const slot = found === 'attributive' && form.shape === 'open' && form.plural ? 'unclear' : found;
+      slots[slot]++;
+      uses.push({ row, length, slot });
       countCase(corpus, row, length, cases);
     }
   }
@@ -72,8 +88,7 @@ function makeStyle(corpus: Corpus, reader: SlotReader, text: string, forms: read
 
 function countCase(corpus: Corpus, row: number, length: number, cases: Cases): void {
   const { stream, vocabulary } = corpus;
-  if (!isRunningText(stream, row) || (stream.flags[row]! & TokenFlag.sentenceStart) !== 0) return;
-  if (row === firstRowOfBlock(stream, row)) return;
+  if (!isInsideSentence(stream, row)) return;
   cases.inside++;
   if (stream.spelling[row - 1] !== stream.fold[row - 1] && isContent(stream, row - 1) && followsOn(stream, row)) {
     cases.afterName++;
@@ -95,9 +110,31 @@ function isContent(stream: TokenStream, row: number): boolean {
   return (flags & TokenFlag.word) !== 0 && (flags & FactFlag.functionWord) === 0;
 }
 
-/** True where a sign is glued to the form, as in paths, options and placeholders: it is part of a larger thing there. */
-function isGlued(corpus: Corpus, row: number, length: number): boolean {
+/** True where quotation marks hold the form and nothing else: it is spoken of, or a value of a field. */
+function isQuoted(corpus: Corpus, row: number, length: number): boolean {
   const { stream, vocabulary } = corpus;
+  const end = row + length;
+  if (row === firstRowOfBlock(stream, row) || end >= endRowOfBlock(stream, row)) return false;
+  const isMark = (at: number): boolean => /^["'“”‘’«»]/u.test(vocabulary.textOf(stream.spelling[at]!));
+  return isMark(row - 1) && isMark(end);
+}
+
+/** True beside a sign of assignment: a line of code that its document does not mark as such. */
+function isOperand(corpus: Corpus, row: number, length: number): boolean {
+  const { stream, vocabulary } = corpus;
+  const end = row + length;
+  const isSign = (at: number): boolean => /^(?:[:!=+]?=+|[-=]>)$/.test(vocabulary.textOf(stream.spelling[at]!));
+  if (row > firstRowOfBlock(stream, row) && isSign(row - 1)) return true;
+  return end < endRowOfBlock(stream, row) && isSign(end);
+}
+
+/**
+ * True where a form is no use as a word: in quotation marks of its own, or with a sign glued to it, as in paths, options
+ * and placeholders, where it is part of a larger thing.
+ */
+export function isMention(corpus: Corpus, row: number, length: number): boolean {
+  const { stream, vocabulary } = corpus;
+  if (isQuoted(corpus, row, length) || isOperand(corpus, row, length)) return true;
   const isWord = (at: number): boolean => (stream.flags[at]! & TokenFlag.word) !== 0;
   if ((stream.flags[row]! & TokenFlag.spaceBefore) === 0 && row > firstRowOfBlock(stream, row)) {
     if (isWord(row - 1) || !/^[("'“‘[—–,;]$/u.test(vocabulary.textOf(stream.spelling[row - 1]!))) return true;

@@ -1,0 +1,202 @@
+// Variants: what is asked, and what is right as it is.
+import { describe, expect, it } from 'vitest';
+import { finish } from '../../../server/src/base/work.js';
+import { Corpus } from '../../../server/src/corpus/corpus.js';
+import type { Question } from '../../../server/src/mining/question.js';
+import { askVariants } from '../../../server/src/mining/variants/ask.js';
+import { corpusOf } from '../../support/corpusOf.js';
+
+function ask(...documents: string[]): Question[] {
+  return finish(askVariants(corpusOf(documents)));
+}
+
+const idsOf = (questions: readonly Question[]): string[] => questions.map(({ id }) => id);
+
+describe('a way of writing that varies in one slot', () => {
+  it('asks one word against two', () => {
+    const [question, ...rest] = ask(
+      'Load the dataset from disk. The dataset is large. Each dataset has a name.',
+      'Load the data set from disk. The data set is large. These data sets have names.',
+    );
+    expect(rest).toEqual([]);
+    expect(question).toMatchObject({ kind: 'variant', id: 'variant:data set|dataset' });
+    expect(question!.terms.map(({ text, uses, documents }) => [text, uses, documents])).toEqual([
+      ['data set', 3, 1],
+      ['dataset', 3, 1],
+    ]);
+    expect(question!.terms[0]!.forms).toEqual([
+      { text: 'data set', uses: 2 },
+      { text: 'data sets', uses: 1 },
+    ]);
+  });
+
+  it('asks one word against a hyphen', () => {
+    expect(
+      idsOf(
+        ask(
+          'Install the plugin. Every plugin is signed.',
+          'Install the plug-in. Every plug-in is signed. Write a plug-in.',
+          'A plugin of yours is welcome.',
+        ),
+      ),
+    ).toEqual(['variant:plug-in|plugin']);
+  });
+
+  it('asks a hyphen against two words where both stand before a noun', () => {
+    expect(
+      idsOf(
+        ask(
+          'Use real-time data. A real-time feed starts.',
+          'Use real time data. A real time feed starts.',
+          'Send real-time alerts, and a real time report.',
+        ),
+      ),
+    ).toEqual(['variant:real time|real-time']);
+  });
+
+  // VarCon lists behavior as American, behaviour as British.
+  it('asks British against American spelling, a family in one question', () => {
+    const questions = ask(
+      'The behaviour changed. We organise the behavioural data. It was organised well.',
+      'The behavior changed. We organize the behavioral data. It was organized well.',
+      'Its behaviour and behavior.',
+    );
+    expect(idsOf(questions).sort()).toEqual(['variant:behavior|behaviour', 'variant:organise|organize']);
+  });
+
+  it('asks three ways at once', () => {
+    const [question] = ask(
+      'The user name is long. A user name is set. Enter the user name.',
+      'The username is long. A username is set.',
+      'The user-name is long. A user-name is set. The username is short, the user-name too.',
+    );
+    expect(question!.terms.map(({ text }) => text)).toEqual(['user name', 'user-name', 'username']);
+  });
+});
+
+describe('what is right as it is', () => {
+  it('leaves a hyphen before a noun beside the open noun phrase', () => {
+    expect(
+      ask(
+        'The real-time feed is fast. A real-time view. Real-time data.',
+        'It shows prices in real time. This is done in real time. Nothing happens in real time.',
+      ),
+    ).toEqual([]);
+  });
+
+  // Facts of practice: log in is what a user does, login what it is called.
+  it.each([
+    ['log in', 'login'],
+    ['set up', 'setup'],
+    ['back up', 'backup'],
+    ['shut down', 'shutdown'],
+    ['roll back', 'rollback'],
+  ])('never asks %s beside %s', (verb, noun) => {
+    expect(
+      ask(
+        `You can ${verb} now. To ${verb}, press Enter. Users ${verb} twice. The ${verb} failed. A ${verb} page.`,
+        `The ${noun} failed. A ${noun} is needed. Open the ${noun} page. You can ${noun} now. To ${noun} is easy.`,
+      ),
+    ).toEqual([]);
+  });
+
+  it('leaves code alone', () => {
+    expect(
+      ask(
+        'Set `dataset` and `dataset` and `dataset`. The data set is large.',
+        'Set `dataset`. The data set is small. A data set is here.',
+      ),
+    ).toEqual([]);
+  });
+
+  it('leaves identifiers beside prose', () => {
+    expect(
+      ask(
+        'The nodeSelector is set. Each nodeSelector has a value. A nodeSelector of yours.',
+        'The node selector is set. Each node selector has a value. A node selector of yours.',
+      ),
+    ).toEqual([]);
+  });
+
+  it('leaves plural and singular', () => {
+    expect(ask('The movie is long. A movie ends.', 'The movies are long. Cookies and a cookie. The cookie.')).toEqual(
+      [],
+    );
+  });
+});
+
+describe('capitals of a name', () => {
+  it('asks GitHub against Github', () => {
+    const page = 'We use GitHub for code. Send it to GitHub today. Our GitHub page.';
+    expect(idsOf(ask(page, `${page} See Github too.`, 'Look at Github first, then at GitHub.'))).toEqual([
+      'variant:GitHub|Github',
+    ]);
+  });
+
+  it('leaves sentence starts, headings and common words', () => {
+    expect(
+      ask(
+        '# Service Broker\n\nThe service is up. Service is down. A service broker runs.',
+        '# Service Broker\n\nEach service waits. Service calls fail. The broker waits for a service.',
+      ),
+    ).toEqual([]);
+  });
+});
+
+describe('a question', () => {
+  const documents = {
+    'file:///a.md': 'Load the dataset from disk. The dataset is large.',
+    'file:///b.md': 'Load the data set from disk. The data set is large.',
+    'file:///c.md': 'A dataset here, and the data set there.',
+  };
+
+  it('shows places of both ways, other documents first', () => {
+    const corpus = corpusOf(documents);
+    const [question] = finish(askVariants(corpus));
+    const shown = question!.places.map(({ term, document, firstToken, lastToken }) => {
+      const { facts, ids } = corpus.documents[document]!;
+      const words = Array.from(facts.word.subarray(firstToken, lastToken + 1), (word) =>
+        corpus.vocabulary.textOf(ids[word]!),
+      );
+      return [question!.terms[term]!.text, document, words.join(' ')];
+    });
+    expect(shown).toEqual([
+      ['data set', 1, 'data set'],
+      ['data set', 1, 'data set'],
+      ['data set', 2, 'data set'],
+      ['dataset', 0, 'dataset'],
+      ['dataset', 0, 'dataset'],
+      ['dataset', 2, 'dataset'],
+    ]);
+  });
+
+  it('says why in plain words', () => {
+    const [question] = ask(...Object.values(documents));
+    expect(question!.reasons.map(({ kind, text }) => `${kind}: ${text}`)).toEqual([
+      'compound: written as two words (“data set”) 3 times on 2 pages and as one word (“dataset”) 3 times on 2 pages',
+      'same-slot: both stand where a noun stands (after “the”, “of” and the like): “data set” 3 times and “dataset” 3 times',
+      'mixed-page: 1 page mixes them',
+    ]);
+  });
+
+  it('does not depend on the order in which documents came', () => {
+    const forwards = finish(askVariants(corpusOf(documents)));
+    const backwards = finish(askVariants(corpusOf(Object.fromEntries(Object.entries(documents).reverse()))));
+    expect(backwards).toEqual(forwards);
+  });
+
+  it('forgets documents that went', () => {
+    const corpus = corpusOf(documents);
+    const gone = finish(
+      corpus.apply([
+        { uri: 'file:///b.md', facts: undefined },
+        { uri: 'file:///c.md', facts: undefined },
+      ]),
+    );
+    expect(finish(askVariants(gone))).toEqual([]);
+  });
+
+  it('has nothing to ask of an empty corpus', () => {
+    expect(finish(askVariants(Corpus.create()))).toEqual([]);
+  });
+});
