@@ -1,7 +1,6 @@
 // Candidates among terms of several words that differ in one word only, where those two words are themselves synonyms.
 import type { PairCollector } from './evidence.js';
-import { forEachPair } from './lexical.js';
-import { lexicalLink } from './links.js';
+import { lexicalLink, Meanings } from './links.js';
 import type { LexicalLink } from './links.js';
 import type { Term } from './terms.js';
 
@@ -17,23 +16,22 @@ export function pairByComponents(terms: readonly Term[], pairs: PairCollector): 
       else members.push(index);
     }
   });
-  const known = new Map<string, LexicalLink | undefined>();
+  const ofHeads = new Meanings(['noun']);
+  const ofModifiers = new Meanings(['noun', 'adjective', 'verb']);
   for (const [frame, members] of frames) {
+    if (members.length < 2) continue;
     const gap = Number(frame.slice(0, frame.indexOf(' ')));
-    forEachPair(members, (a, b) => {
-      const left = terms[a]!.words[gap]!;
-      const right = terms[b]!.words[gap]!;
-      const isHead = gap === terms[a]!.words.length - 1;
-      const key = `${isHead} ${left} ${right}`;
-      if (!known.has(key)) known.set(key, linkOfParts(left, right, isHead));
-      const link = known.get(key);
+    const isHead = gap === terms[members[0]!]!.words.length - 1;
+    const words = members.map((term) => terms[term]!.words[gap]!);
+    (isHead ? ofHeads : ofModifiers).forEachRelated(words, (i, j) => {
+      const link = linkOfParts(words[i]!, words[j]!, isHead);
       if (link === undefined) return;
-      const says = link.source === 'list' ? 'the trade uses for one thing' : 'a dictionary gives as synonyms';
-      pairs.add(a, b, {
+      const says = link.source === 'list' ? 'the trade often uses for one thing' : 'a dictionary gives as synonyms';
+      pairs.add(members[i]!, members[j]!, {
         kind: 'component',
         // A differing head makes two kinds of thing more easily than a differing modifier.
         strength: link.strength * (isHead ? 0.8 : 1),
-        text: `they differ only in “${left}” and “${right}”, which ${says}`,
+        text: `they differ only in “${words[i]!}” and “${words[j]!}”, which ${says}`,
         value: link.strength,
       });
     });

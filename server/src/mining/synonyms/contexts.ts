@@ -51,10 +51,9 @@ export function* gatherContexts(
   const features = new PairTable();
   const pairs = new PairTable();
   const cells = new PairTable();
-  const counts: number[] = [];
+  const counts = new CountColumn();
   const put = (term: number, relation: number, word: number): void => {
-    const cell = cells.idOf(term, features.idOf(relation, word));
-    counts[cell] = (counts[cell] ?? 0) + 1;
+    counts.add(cells.idOf(term, features.idOf(relation, word)));
   };
   const gather = (term: number, first: number, end: number): void => {
     const before = neighbour(stream, first, -1);
@@ -177,39 +176,58 @@ function isPhrasePart(tag: number): boolean {
   return tag === TAG.DET || tag === TAG.ADJ || tag === TAG.NUM || tag === TAG.PRON || isNoun(tag);
 }
 
-/** Weighs the cells of `all` rows, of which the first `terms` are terms and make the df. */
-function weigh(
-  cells: PairTable,
-  counts: readonly number[],
-  features: number,
-  terms: number,
-  all: number,
-): SparseVector[] {
+/**
+ * Weighs the cells of `all` rows, of which the first `terms` are terms and make the df. Cells are visited in order of
+ * their features, so that every vector comes out sorted.
+ */
+function weigh(cells: PairTable, counts: CountColumn, features: number, terms: number, all: number): SparseVector[] {
   const df = new Uint32Array(features);
   const sizes = new Uint32Array(all);
-  for (let cell = 0; cell < cells.size; cell++) if (cells.leftOf(cell) < terms) df[cells.rightOf(cell)]!++;
   const isMet = new Uint8Array(terms);
-  for (let cell = 0; cell < cells.size; cell++) if (cells.leftOf(cell) < terms) isMet[cells.leftOf(cell)] = 1;
+  const first = new Uint32Array(features + 1);
+  for (let cell = 0; cell < cells.size; cell++) {
+    const feature = cells.rightOf(cell);
+    first[feature + 1]!++;
+    if (cells.leftOf(cell) >= terms) continue;
+    df[feature]!++;
+    isMet[cells.leftOf(cell)] = 1;
+  }
   const met = isMet.reduce((sum, each) => sum + each, 0);
   // A feature of one term alone is shared by no two; one that most terms have says next to nothing and costs the most.
   const says = (feature: number): boolean => df[feature]! >= 2 && df[feature]! <= met * COMMONEST;
-  for (let cell = 0; cell < cells.size; cell++) if (says(cells.rightOf(cell))) sizes[cells.leftOf(cell)]!++;
-  const rows = Array.from(sizes, (size) => ({
-    order: new Uint32Array(size),
-    weight: new Float64Array(size),
-    filled: 0,
-  }));
+  for (let feature = 0; feature < features; feature++) first[feature + 1]! += first[feature]!;
+  const byFeature = new Uint32Array(cells.size);
   for (let cell = 0; cell < cells.size; cell++) {
+    byFeature[first[cells.rightOf(cell)]!++] = cell;
+    if (says(cells.rightOf(cell))) sizes[cells.leftOf(cell)]!++;
+  }
+  const rows = Array.from(sizes, (size) => ({ ids: new Uint32Array(size), weights: new Float64Array(size) }));
+  const filled = new Uint32Array(all);
+  for (const cell of byFeature) {
     const feature = cells.rightOf(cell);
     if (!says(feature)) continue;
-    const row = rows[cells.leftOf(cell)]!;
-    row.order[row.filled] = feature;
-    row.weight[row.filled++] = dampedTfIdf(counts[cell]!, df[feature]!, met);
+    const row = cells.leftOf(cell);
+    const at = filled[row]!++;
+    rows[row]!.ids[at] = feature;
+    rows[row]!.weights[at] = dampedTfIdf(counts.get(cell), df[feature]!, met);
   }
-  return rows.map(({ order, weight }) => sortedVector(order, weight));
+  return rows;
 }
 
-function sortedVector(ids: Uint32Array, weights: Float64Array): SparseVector {
-  const order = Uint32Array.from(ids.keys()).sort((a, b) => ids[a]! - ids[b]!);
-  return { ids: Uint32Array.from(order, (at) => ids[at]!), weights: Float64Array.from(order, (at) => weights[at]!) };
+/** Counts of cells in a column that grows with them. */
+class CountColumn {
+  private counts = new Uint32Array(4096);
+
+  add(cell: number): void {
+    if (cell >= this.counts.length) {
+      const wider = new Uint32Array(cell * 2);
+      wider.set(this.counts);
+      this.counts = wider;
+    }
+    this.counts[cell]!++;
+  }
+
+  get(cell: number): number {
+    return this.counts[cell]!;
+  }
 }

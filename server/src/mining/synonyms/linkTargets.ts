@@ -25,7 +25,7 @@ export function pairByLinkTargets(corpus: Corpus, segments: Segments, pairs: Pai
       if (occurrence === undefined || first + segments.length[occurrence]! !== end) continue;
       const target = resolveTarget(uri, link.target);
       let terms = names.get(target);
-      if (terms === undefined) names.set(target, (terms = new Map()));
+      if (terms === undefined) names.set(target, (terms = new Map<number, number>()));
       const term = segments.term[occurrence]!;
       terms.set(term, (terms.get(term) ?? 0) + 1);
     }

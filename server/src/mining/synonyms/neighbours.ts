@@ -82,10 +82,16 @@ export function* compareTerms(
   return { likeness, nearest };
 }
 
+/** The `keep` most alike, by insertion: few are kept of many. */
 function mostAlike(touched: readonly number[], score: Float64Array, keep: number): number[] {
-  const found = touched.filter((other) => score[other]! > 0);
-  found.sort((a, b) => score[b]! - score[a]! || a - b);
-  return found.slice(0, keep);
+  const best: number[] = [];
+  for (const other of touched) {
+    const at = best.findIndex((each) => score[other]! > score[each]! || (score[other] === score[each] && other < each));
+    if (score[other] === 0 || (at < 0 && best.length === keep)) continue;
+    best.splice(at < 0 ? best.length : at, 0, other);
+    if (best.length > keep) best.pop();
+  }
+  return best;
 }
 
 function invert(vectors: readonly SparseVector[]): { first: Uint32Array; terms: Uint32Array; weights: Float64Array } {

@@ -22,10 +22,10 @@ export function indexOccurrences(stream: TokenStream, segments: Segments): Occur
   const next = first.slice();
   const sorted = new Uint32Array(segments.count);
   for (let i = 0; i < segments.count; i++) sorted[next[segments.term[i]!]!++] = i;
-  const of = (term: number): Uint32Array => sorted.subarray(first[term]!, first[term + 1]!);
+  const of = (term: number): Uint32Array => sorted.subarray(first[term], first[term + 1]);
   return {
     of,
-    usesOf: (term) => Array.from(of(term), (i) => ({ row: segments.first[i]!, length: segments.length[i]! })),
+    usesOf: (term) => Array.from(of(term), (i): Use => ({ row: segments.first[i]!, length: segments.length[i]! })),
     documentsOf: (term) => new Set(Array.from(of(term), (i) => stream.documentOf(segments.first[i]!))).size,
   };
 }

@@ -27,6 +27,8 @@ export interface Known {
 
 /** Two unrelated terms, before any evidence. */
 const BASE = -1.2;
+/** What each word of general English costs. */
+const GENERAL = 0.8;
 
 /** The score of a pair, in logits: 0 is as likely right as wrong. Weights fitted by reading; see the evaluation. */
 export function scoreOf(known: Known): number {
@@ -37,12 +39,18 @@ export function scoreOf(known: Known): number {
   if (beside >= 3) score -= 1;
   score -= 1.2 * Math.log1p(known.siblings);
   score -= known.properNames === 2 ? 2.5 : known.properNames;
-  score -= 0.8 * known.general;
+  score -= GENERAL * known.general;
   return score;
 }
 
+/** The most that a pair can score whose similarity is a share of `self`, whatever else is found. */
+export function bestScoreOf(known: Pick<Known, 'evidence' | 'shape' | 'general'>, share: number): number {
+  const best = contextWeight({ likeness: { similarity: share, rankOfA: 1, rankOfB: 1 }, self: 1, shape: known.shape });
+  return BASE + lexicalWeight(known) + statementWeight(known) + best - GENERAL * known.general;
+}
+
 /** List, dictionary and differing parts say the same of a pair: the strongest counts. */
-function lexicalWeight({ evidence, shape }: Known): number {
+function lexicalWeight({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): number {
   const strength = strongest(evidence, ['list', 'dictionary', 'component']);
   if (strength === 0) return shape === 'contained' ? -1.3 : 0;
   if (shape === 'words') return -0.4 + 1.6 * strength;
@@ -50,7 +58,7 @@ function lexicalWeight({ evidence, shape }: Known): number {
 }
 
 /** What the documents themselves say and do: statements, and links to one place. */
-function statementWeight({ evidence }: Known): number {
+function statementWeight({ evidence }: Pick<Known, 'evidence'>): number {
   let weight = 0;
   for (const { kind, strength, value } of evidence) {
     if (kind === 'definition') weight += (strength >= 0.8 ? 2.2 : 0.4) + 0.3 * Math.min(4, value - 1);
@@ -60,7 +68,7 @@ function statementWeight({ evidence }: Known): number {
 }
 
 /** Usage confirms or refuses: against the yardstick of one term's own halves, and by mutual rank. */
-function contextWeight({ likeness, self, shape }: Known): number {
+function contextWeight({ likeness, self, shape }: Pick<Known, 'likeness' | 'self' | 'shape'>): number {
   const share = Math.min(1, likeness.similarity / self);
   const rank = Math.log(Math.sqrt(likeness.rankOfA * likeness.rankOfB));
   // Terms of several words are rarer, and their contexts say less.

@@ -16,8 +16,6 @@ export interface Segments {
   readonly length: Uint8Array;
   /** Occurrences of each term outside longer terms. */
   readonly uses: Uint32Array;
-  /** The term that covers a row, as index + 1, or 0. */
-  readonly covering: Uint32Array;
 }
 
 /** Cuts a corpus into the given noun terms; occurrences are in order of their rows. */
@@ -31,28 +29,24 @@ export function* segment(corpus: Corpus, terms: readonly Term[]): Work<Segments>
       else ofGram[grams.find(words)!] = index + 1;
     }
   });
-  const covering = new Uint32Array(stream.length);
-  const term: number[] = [];
-  const first: number[] = [];
-  const length: number[] = [];
+  const term = new Uint32Array(stream.length);
+  const first = new Uint32Array(stream.length);
+  const length = new Uint8Array(stream.length);
+  let count = 0;
   for (let row = 0; row < stream.length;) {
     const match = isContent(stream, row) ? longestAt(corpus, row, ofWord, ofGram) : undefined;
     if (match !== undefined) {
-      term.push(match.term - 1);
-      first.push(row);
-      length.push(match.length);
-      covering.fill(match.term, row, row + match.length);
+      term[count] = match.term - 1;
+      first[count] = row;
+      length[count++] = match.length;
     }
     const next = row + (match?.length ?? 1);
     if (next >> 16 !== row >> 16) yield;
     row = next;
   }
   const uses = new Uint32Array(terms.length);
-  for (const each of term) uses[each]!++;
-  return {
-    ...{ count: term.length, uses, covering },
-    ...{ term: Uint32Array.from(term), first: Uint32Array.from(first), length: Uint8Array.from(length) },
-  };
+  for (let i = 0; i < count; i++) uses[term[i]!]!++;
+  return { count, uses, term: term.slice(0, count), first: first.slice(0, count), length: length.slice(0, count) };
 }
 
 function longestAt(

@@ -1,0 +1,157 @@
+// Pairs of noun terms before the judge: what must not be asked is refused, the rest gets its facts and a score.
+import type { Work } from '../../base/work.js';
+import type { Corpus } from '../../corpus/corpus.js';
+import { isRefused, readSeparations } from './apart.js';
+import type { Separations } from './apart.js';
+import { gatherContexts } from './contexts.js';
+import type { Contexts } from './contexts.js';
+import { countSideBySide } from './coordination.js';
+import type { Pair } from './evidence.js';
+import { isGeneralNoun } from './generalWords.js';
+import { selfSimilarity, termsToHalve } from './likeness.js';
+import { compareTerms } from './neighbours.js';
+import { lin } from '../../corpus/statistics/similarity.js';
+import type { SparseVector } from '../../corpus/statistics/similarity.js';
+import type { Neighbours } from './neighbours.js';
+import type { Occurrences } from './occurrences.js';
+import { properShare } from './properNames.js';
+import { bestScoreOf, scoreOf } from './score.js';
+import type { Known, Shape } from './score.js';
+import type { Segments } from './segment.js';
+import type { Term } from './terms.js';
+
+/** A pair with all that is known of it. */
+export interface JudgedPair extends Pair {
+  readonly known: Known;
+  readonly score: number;
+}
+
+/** Fewest uses of a term outside longer terms, … */
+const FEWEST_USES = 3;
+/** … as a share of all its uses. */
+const LEAST_ALONE = 0.15;
+/** From this share of capitalised uses a term is a proper name. */
+const PROPER = 0.5;
+/** Pairs that cannot reach this score are not compared. */
+const HOPELESS = -0.3;
+
+const EMPTY: SparseVector = { ids: new Uint32Array(0), weights: new Float64Array(0) };
+
+/** Judges pairs of one corpus; contexts are gathered once, with the first call. */
+export class Judge {
+  private gathered: Contexts | undefined;
+  private readonly separations: Separations;
+  private readonly proper = new Map<number, boolean>();
+  private self: (uses: number) => number = () => 1;
+
+  constructor(
+    private readonly corpus: Corpus,
+    readonly terms: readonly Term[],
+    readonly segments: Segments,
+    private readonly occurrences: Occurrences,
+  ) {
+    this.separations = readSeparations(corpus, segments);
+  }
+
+  /** The contexts of all terms, by which pairs were judged. */
+  get contexts(): Contexts {
+    return this.gathered!;
+  }
+
+  /** Judges the pairs that are not refused outright, in their order. */
+  *judge(pairs: readonly Pair[]): Work<JudgedPair[]> {
+    if (this.gathered === undefined) yield* this.gather();
+    const able = pairs.filter((pair) => this.isAble(pair));
+    yield;
+    const { likeness } = yield* compareTerms(this.vectors, able, [], 0);
+    const wanted = new Set(able.map((pair) => this.keyOf(pair)));
+    const sideBySide = countSideBySide(this.corpus, this.segments, this.terms, wanted);
+    yield;
+    return able.map((pair) => {
+      const key = this.keyOf(pair);
+      const fewest = Math.min(this.segments.uses[pair.a]!, this.segments.uses[pair.b]!);
+      const known: Known = {
+        ...this.wordsOf(pair),
+        likeness: likeness.get(key)!,
+        self: this.self(fewest),
+        sideBySide: sideBySide.get(key) ?? { coordinated: 0, contrasted: 0 },
+        siblings: this.separations.siblings(pair.a, pair.b),
+        properNames: Number(this.isProper(pair.a)) + Number(this.isProper(pair.b)),
+        fewest,
+      };
+      return { ...pair, known, score: scoreOf(known) };
+    });
+  }
+
+  /** For each of some terms, the nearest of the others of them. */
+  *nearestAmong(some: readonly number[], keep: number): Work<Neighbours['nearest']> {
+    if (this.gathered === undefined) yield* this.gather();
+    const wanted = new Set(some);
+    const vectors = this.vectors.map((vector, term) => (wanted.has(term) ? vector : EMPTY));
+    return (yield* compareTerms(vectors, [], some, keep)).nearest;
+  }
+
+  private get vectors(): readonly SparseVector[] {
+    return this.gathered!.vectors.slice(0, this.terms.length);
+  }
+
+  private *gather(): Work<void> {
+    const { corpus, segments, terms } = this;
+    const halved = termsToHalve(segments.uses);
+    const contexts = yield* gatherContexts(corpus, segments, terms.length, halved);
+    const half = (at: number) => contexts.vectors[terms.length + at]!;
+    this.self = selfSimilarity(
+      halved.map((term, at) => ({ one: half(2 * at), other: half(2 * at + 1), uses: segments.uses[term]! })),
+    );
+    this.gathered = contexts;
+  }
+
+  private isAble(pair: Pair): boolean {
+    const { a, b } = pair;
+    if (!this.isOften(a) || !this.isOften(b) || this.separations.bothDefined(a, b)) return false;
+    if (pair.evidence[0]?.kind !== 'neighbours') {
+      const words = this.wordsOf(pair);
+      if (bestScoreOf(words, 1) < HOPELESS) return false;
+      // Likeness costs little; the places among all neighbours, which the judgement also needs, cost much.
+      const { vectors } = this.gathered!;
+      const fewest = Math.min(this.segments.uses[a]!, this.segments.uses[b]!);
+      if (bestScoreOf(words, lin(vectors[a]!, vectors[b]!) / this.self(fewest)) < HOPELESS) return false;
+    }
+    return !isRefused(this.terms[a]!, this.terms[b]!);
+  }
+
+  private isOften(term: number): boolean {
+    return this.segments.uses[term]! >= Math.max(FEWEST_USES, LEAST_ALONE * this.terms[term]!.uses);
+  }
+
+  private isProper(term: number): boolean {
+    let proper = this.proper.get(term);
+    if (proper === undefined) {
+      proper = properShare(this.corpus.stream, this.corpus.vocabulary, this.occurrences.usesOf(term)) >= PROPER;
+      this.proper.set(term, proper);
+    }
+    return proper;
+  }
+
+  private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general'> {
+    const [one, other] = [this.terms[a]!, this.terms[b]!];
+    return { evidence, shape: shapeOf(one, other), general: Number(isGeneral(one)) + Number(isGeneral(other)) };
+  }
+
+  private keyOf({ a, b }: { readonly a: number; readonly b: number }): number {
+    return a * this.terms.length + b;
+  }
+}
+
+function shapeOf({ words: a }: Term, { words: b }: Term): Shape {
+  const [short, long] = a.length < b.length || a.join('').length < b.join('').length ? [a, b] : [b, a];
+  const isWhole = ` ${long.join(' ')} `.includes(` ${short.join(' ')} `);
+  // A compound written as one word holds its parts as much as one written as two.
+  const isEnd = short.length === 1 && long.length === 1 && long[0]!.endsWith(short[0]!);
+  if (isWhole || isEnd) return 'contained';
+  return short.length > 1 ? 'multiword' : 'words';
+}
+
+function isGeneral({ words }: Term): boolean {
+  return words.length === 1 && isGeneralNoun(words[0]!);
+}

@@ -1,0 +1,36 @@
+// Why two or more terms are asked about, in plain words: what speaks for them, and how they are used.
+import type { Reason } from '../question.js';
+import { times } from '../wording.js';
+import type { Contexts } from './contexts.js';
+import { sharedFrames } from './frames.js';
+import type { JudgedPair } from './judge.js';
+
+/** Mutual ranks up to this are worth telling. */
+const NEAREST = 3;
+
+/** The reasons for the pairs of one concept; the evidence for identity first, then usage. */
+export function reasonsOf(pairs: readonly JudgedPair[], contexts: Contexts): Reason[] {
+  const reasons: Reason[] = [];
+  const said = new Set<string>();
+  const say = (reason: Reason | undefined): void => {
+    if (reason === undefined || said.has(reason.text)) return;
+    said.add(reason.text);
+    reasons.push(reason);
+  };
+  for (const { evidence } of pairs) for (const { kind, text, value } of evidence) say({ kind, text, value });
+  for (const { a, b } of pairs) say(sharedFrames(contexts, contexts.vectors[a]!, contexts.vectors[b]!));
+  for (const { known } of pairs) {
+    const { rankOfA, rankOfB } = known.likeness;
+    if (rankOfA <= NEAREST && rankOfB <= NEAREST) {
+      say({
+        kind: 'likeness',
+        text: 'of all terms here, each is among those used most like the other',
+        value: Math.max(rankOfA, rankOfB),
+      });
+    }
+    const beside = known.sideBySide.coordinated + known.sideBySide.contrasted;
+    if (beside > 0)
+      say({ kind: 'side-by-side', text: `against it: both stand side by side ${times(beside)}`, value: beside });
+  }
+  return reasons;
+}
