@@ -2,6 +2,7 @@
 import type { Finding } from '../findings/finding.js';
 import { LineIndex } from '../text/lineIndex.js';
 import type { Position } from '../text/lineIndex.js';
+import { toSarif } from '../report/sarif.js';
 import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './main.js';
@@ -12,13 +13,19 @@ interface PlacedFinding {
   readonly finding: Finding;
   readonly start: Position;
   readonly end: Position;
+  /** The text of the finding's block. */
+  readonly blockText: string;
 }
 
 export const verify: Subcommand = {
   summary: 'checks every page against the termbase; exit code 1 where a page breaks a decision',
   operands: 'DIR…',
   options: {
-    format: { value: 'FORMAT', choices: ['text', 'json'], help: 'text for people (default), json for programs' },
+    format: {
+      value: 'FORMAT',
+      choices: ['text', 'json', 'sarif'],
+      help: 'text for people (default), json for programs, sarif (2.1.0) for code review',
+    },
   },
   async run({ options, operands }, host) {
     const survey = await surveyOrStop(host, requireFolders(operands), false);
@@ -28,6 +35,7 @@ export const verify: Subcommand = {
     const found: PlacedFinding[] = [];
     for (const [uri, { source }] of [...snapshot.documents].sort(([a], [b]) => (a < b ? -1 : 1))) {
       const lines = new LineIndex(source.text);
+      const blocks = snapshot.readingOf(uri)?.prose.blocks ?? [];
       for (const finding of snapshot.findingsIn(uri)) {
         // Undecided mixes are questions: nobody has broken a rule that nobody made.
         if (finding.severity === 'hint') continue;
@@ -36,11 +44,14 @@ export const verify: Subcommand = {
           finding,
           start: lines.positionAt(finding.span.start),
           end: lines.positionAt(finding.span.end),
+          blockText: blocks[finding.block]?.content.text ?? '',
         });
       }
     }
     const pages = new Set(found.map(({ uri }) => uri)).size;
-    if (options.get('format') === 'json') {
+    if (options.get('format') === 'sarif') {
+      host.write(toSarif(found, survey.rootUri));
+    } else if (options.get('format') === 'json') {
       host.write(
         `${JSON.stringify({ documents: snapshot.documents.size, findings: found.map(toJson) }, undefined, 2)}\n`,
       );

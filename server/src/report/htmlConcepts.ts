@@ -1,4 +1,5 @@
 // Decided concepts in the report's HTML, and what else the termbase says: terms kept apart, questions put off.
+import type { TermStatus } from '../termbase/termbase.js';
 import { driftLine, folderTable, shareBar, shareText } from './htmlNames.js';
 import { html } from './markup.js';
 import type { Markup } from './markup.js';
@@ -7,6 +8,9 @@ import { counted, grouped, listed } from './words.js';
 
 /** Pages with a deprecated term that are shown at once; the rest opens. */
 const PAGES_SHOWN = 5;
+
+/** The colours of decided names say their status. */
+const SERIES: Readonly<Record<TermStatus, number>> = { preferred: 0, deprecated: 1, admitted: 2 };
 
 /** The part on decided concepts. */
 export function conceptsPart({ concepts }: ReportData): Markup {
@@ -63,11 +67,11 @@ function conceptEntry(concept: ReportConcept, index: number): Markup {
   const id = `concept-${index + 1}`;
   const total = terms.reduce((sum, { uses }) => sum + uses, 0);
   const rows = terms.map(
-    ({ text, status, uses, documents }, series) =>
+    ({ text, status, uses, documents }) =>
       html`<tr>
         <th scope="row">${text}</th>
         <td class="status">${status}</td>
-        <td class="bar">${shareBar(uses, total, series)}</td>
+        <td class="bar">${shareBar(uses, total, SERIES[status])}</td>
         <td class="number">${shareText(uses, total)}</td>
         <td class="number">${grouped(uses)}</td>
         <td class="number">${grouped(documents)}</td>
@@ -105,7 +109,7 @@ function conceptEntry(concept: ReportConcept, index: number): Markup {
     ${drift === undefined ? html`<p class="drift">No page uses any of its names.</p>` : driftLine(drift, where)}
     ${toChange > 0 && stillToChange(concept)}
     ${folderTable(
-      terms.map(({ text }) => text),
+      terms.map(({ text, status }) => ({ text, series: SERIES[status] })),
       where,
     )}
   </article> `;

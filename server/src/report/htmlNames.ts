@@ -11,29 +11,20 @@ const DISTINCT = 3;
 export function shareBar(uses: number, total: number, series: number): Markup {
   return html`<svg aria-hidden="true" focusable="false">
     <rect class="track" width="100%" height="100%" rx="3" />
-    ${
-      total > 0 &&
-      uses > 0 &&
-      html`<rect class="n${Math.min(series, DISTINCT)}" width="${width(uses / total)}" height="100%" rx="3" />`
-    }
+    ${total > 0 && uses > 0 && html`<rect ${colour(series)} width="${width(uses / total)}" height="100%" rx="3" />`}
   </svg>`;
 }
 
 /** All names' shares in one bar, side by side. */
-export function sharesBar(uses: readonly number[]): Markup {
-  const total = uses.reduce((sum, count) => sum + count, 0);
-  let from = 0;
-  const parts = uses.map((count, series) => {
-    const start = from;
-    from += total === 0 ? 0 : count / total;
+export function sharesBar(names: readonly { readonly uses: number; readonly series: number }[]): Markup {
+  const total = names.reduce((sum, { uses }) => sum + uses, 0);
+  let before = 0;
+  const parts = names.map(({ uses, series }) => {
+    const start = before;
+    before += uses;
     return (
-      count > 0 &&
-      html`<rect
-        class="n${Math.min(series, DISTINCT)}"
-        x="${width(start)}"
-        width="${width(count / total)}"
-        height="100%"
-      />`
+      uses > 0 &&
+      html`<rect ${colour(series)} x="${width(start / total)}" width="${width(uses / total)}" height="100%" />`
     );
   });
   return html`<svg aria-hidden="true" focusable="false">${parts}</svg>`;
@@ -56,16 +47,25 @@ export function driftLine(drift: Drift | undefined, where: WhereDriftLives | und
   return html`<p class="drift">${text}${where && html` ${whereText(where)}`}</p>`;
 }
 
-/** Which folder uses which name. */
-export function folderTable(names: readonly string[], where: WhereDriftLives | undefined): Markup | undefined {
+/** Which folder uses which name; each name with the number of its colour. */
+export function folderTable(
+  names: readonly { readonly text: string; readonly series: number }[],
+  where: WhereDriftLives | undefined,
+): Markup | undefined {
   if (where === undefined) return undefined;
   const rows = where.folders.map(
     ({ folder, uses }) =>
       html`<tr>
         <th scope="row">${folder === '.' ? 'top folder' : folder}</th>
-        <td class="bar">${sharesBar(uses)}</td>
+        <td class="bar">${sharesBar(uses.map((count, index) => ({ uses: count, series: names[index]!.series })))}</td>
         ${uses.map((count) => html`<td class="number">${grouped(count)}</td>`)}
       </tr> `,
+  );
+  const heads = names.map(
+    ({ text, series }) =>
+      html`<th scope="col" class="number">
+        <svg aria-hidden="true" focusable="false"><rect ${colour(series)} width="100%" height="100%" /></svg>${text}
+      </th>`,
   );
   return html`<details>
     <summary>Folder by folder</summary>
@@ -75,7 +75,7 @@ export function folderTable(names: readonly string[], where: WhereDriftLives | u
           <tr>
             <th scope="col">Folder</th>
             <td></td>
-            ${names.map((name) => html`<th scope="col" class="number">${name}</th>`)}
+            ${heads}
           </tr>
         </thead>
         <tbody>
@@ -84,6 +84,10 @@ export function folderTable(names: readonly string[], where: WhereDriftLives | u
       </table>
     </div>
   </details> `;
+}
+
+function colour(series: number): Markup {
+  return html`class="n${Math.min(series, DISTINCT)}"`;
 }
 
 function width(share: number): string {

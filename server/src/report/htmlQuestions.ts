@@ -11,8 +11,8 @@ export function questionsPart(questions: readonly ReportQuestion[]): Markup {
     questions.length === 0
       ? html`<p>No question is open.</p>`
       : html`<p>
-            Each may be one thing under several names. They stand in the order of what an answer settles; only answers
-            become rules.
+            Each may be one thing under several names. They stand in the order of what an answer settles, weighed by how
+            sure the evidence is. Only answers become rules.
           </p>
           ${glance(questions)} ${questions.map(questionEntry)}`;
   return html`<section class="part" aria-labelledby="questions">
@@ -27,7 +27,7 @@ function glance(questions: readonly ReportQuestion[]): Markup {
       html`<tr>
         <td class="number">${index + 1}</td>
         <th scope="row"><a href="#question-${index + 1}">${question.terms.map(({ text }) => text).join(' / ')}</a></th>
-        <td class="bar">${sharesBar(question.terms.map(({ uses }) => uses))}</td>
+        <td class="bar">${sharesBar(question.terms.map(({ uses }, series) => ({ uses, series })))}</td>
         <td class="number extra">${question.terms.map(({ uses }) => grouped(uses)).join(' / ')}</td>
         <td class="number">${grouped(question.settles)}</td>
         <td class="number">${question.drift?.names.toFixed(1) ?? '–'}</td>
@@ -105,7 +105,7 @@ function questionEntry(question: ReportQuestion, index: number): Markup {
       </div>`
     }
     ${folderTable(
-      terms.map(({ text }) => text),
+      terms.map(({ text }, series) => ({ text, series })),
       where,
     )}
   </article> `;

@@ -15,7 +15,9 @@ export function toMarkdown(data: ReportData): string {
       [1],
     ),
     '## Open questions',
-    ...(questions.length === 0 ? ['No question is open.'] : ['In the order of what an answer settles.']),
+    ...(questions.length === 0
+      ? ['No question is open.']
+      : ['In the order of what an answer settles, weighed by how sure the evidence is.']),
     ...questions.flatMap(questionOf),
     '## Decided concepts',
     ...(concepts.length === 0 ? ['Nothing is decided yet.'] : []),

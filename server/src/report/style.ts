@@ -28,6 +28,7 @@ h2{font-size:1.8rem;margin:0 0 .4rem}
 h3{font-size:1.35rem;margin:0}
 h4{font-size:1rem;margin:0 0 .6rem;font-weight:600}
 p{margin:0 0 .8rem;max-width:44rem}
+p,li,dd{text-wrap:pretty}
 .faint,.place,figcaption,.note{color:var(--faint)}
 .masthead{display:flex;flex-wrap:wrap;justify-content:space-between;gap:.2rem 2rem;border-bottom:3px double var(--line);padding-bottom:.8rem}
 .masthead p{margin:0}
@@ -47,11 +48,14 @@ section.part{margin-top:4rem}
 table{border-collapse:collapse;width:100%;font-variant-numeric:tabular-nums lining-nums}
 caption{text-align:left;color:var(--faint);font-size:.9rem;padding:0 0 .4rem}
 th,td{text-align:left;vertical-align:baseline;padding:.42rem 1rem .42rem 0;border-top:1px solid var(--line);font-weight:400}
-thead th{border-top:0;color:var(--faint);font-size:.85rem}
-tbody th{font-weight:600;overflow-wrap:anywhere}
+thead th,thead td{border-top:0}
+thead th{color:var(--faint);font-size:.85rem}
+tbody th{font-weight:600;overflow-wrap:break-word}
+thead svg{display:inline-block;width:.65rem;height:.65rem;margin-right:.4rem}
 .number{text-align:right;white-space:nowrap}
 th:last-child,td:last-child{padding-right:0}
-td.bar{width:38%;min-width:7rem;vertical-align:middle}
+table.names tbody th{width:30%}
+td.bar{width:34%;min-width:7rem;vertical-align:middle}
 .glance td.bar{width:24%}
 .glance th a{font-weight:600}
 svg{display:block;width:100%;height:.8rem}
@@ -72,7 +76,7 @@ svg{display:block;width:100%;height:.8rem}
 .evidence li{margin:0 0 .95rem}
 .evidence li p{margin:0;font-family:var(--book);font-size:1.02rem;line-height:1.5;overflow-wrap:anywhere}
 .place{font-size:.82rem;overflow-wrap:anywhere}
-mark{background:transparent;color:inherit;font-weight:600;padding:.05em .15em;border-radius:3px;border-bottom:2px solid var(--further)}
+mark{-webkit-box-decoration-break:clone;box-decoration-break:clone;background:transparent;color:inherit;font-weight:600;padding:.05em .15em;border-radius:3px;border-bottom:2px solid var(--further)}
 .s0 mark{background:var(--firstGround);border-color:var(--first)}
 .s1 mark{background:var(--secondGround);border-color:var(--second)}
 .s2 mark{background:var(--thirdGround);border-color:var(--third)}
@@ -85,7 +89,7 @@ details[open] summary{margin-bottom:.7rem}
 .terms dd{margin:0;max-width:46rem}
 footer{margin-top:4rem;padding-top:1rem;border-top:3px double var(--line);color:var(--faint);font-size:.9rem}
 .unseen{position:absolute;width:1px;height:1px;overflow:hidden;clip-path:inset(50%);white-space:nowrap}
-@media (max-width:52rem){
+@media screen and (max-width:52rem){
 .sheet{padding:2rem 1.15rem 3rem}
 .state{margin:1.6rem 0}
 .figures{grid-template-columns:repeat(2,1fr)}

@@ -59,10 +59,10 @@ export function figuresOf(parts: Parts): Figure[] {
               : `${grouped(uses - kept)} of ${counted(uses, 'use')} to change`,
         },
     drift === undefined
-      ? nothingToMeasure('drift', 'Names for one concept', 'no concept is known yet')
+      ? nothingToMeasure('drift', 'Drift', 'no concept is known yet')
       : {
-          ...{ id: 'drift', label: 'Names for one concept', text: drift.names.toFixed(2), value: drift.names },
-          note: 'in effect, on the average; 1.00 is no drift',
+          ...{ id: 'drift', label: 'Drift', text: drift.names.toFixed(2), value: drift.names },
+          note: 'names in effect for one concept; 1.00 is none',
         },
   ];
 }
