@@ -67,7 +67,7 @@ export class TermMatcher {
 
   private run(text: string, from: number, end: number, onMatch: OnMatch): void {
     const { reader } = this;
-    const { first, accept, ways, separatorCount } = this.trie;
+    const { roots, separatorCount } = this.trie;
     let at = from;
     let free = from;
     reader.count = 0;
@@ -79,16 +79,12 @@ export class TermMatcher {
       let k = 0;
       while (k < stop) {
         const id = ids[k]!;
-        const node = id < 0 ? 0 : first[id]!;
+        const root = id < 0 ? 0 : roots[id * 2]!;
         // Most first words lead nowhere: no term ends with them, and the next word's bit is clear.
-        const gap = gaps[k + 1]!;
-        const leads =
-          node !== 0 &&
-          (accept[node] !== 0 ||
-            (ways[node] !== 0 &&
-              (gap === Gap.other ||
-                (ids[k + 1]! >= 0 && (ways[node]! & bitOf(ids[k + 1]! * separatorCount + gap)) !== 0))));
-        const matched = leads ? this.matchFrom(text, k, node, from, free, end, onMatch) : -1;
+        const matched =
+          root < 0 || (root > 0 && this.mayGoOn(roots[id * 2 + 1]!, gaps[k + 1]!, ids[k + 1]!, separatorCount))
+            ? this.matchFrom(text, k, Math.abs(root), root < 0, from, free, end, onMatch)
+            : -1;
         if (matched < 0) k++;
         else {
           free = matched;
@@ -99,11 +95,17 @@ export class TermMatcher {
     } while (at < end);
   }
 
+  private mayGoOn(ways: number, gap: number, id: number, separatorCount: number): boolean {
+    if (ways === 0 || id < 0) return false;
+    return gap === Gap.other || (ways & bitOf(id * separatorCount + gap)) !== 0;
+  }
+
   /** Tries the terms that begin with word `k`; reports the longest and returns its end, or −1. */
   private matchFrom(
     text: string,
     k: number,
     first: number,
+    accepts: boolean,
     from: number,
     free: number,
     end: number,
@@ -112,7 +114,7 @@ export class TermMatcher {
     const { reader, trie } = this;
     let node = first;
     let last = k;
-    let best = this.reach(text, node, k, last, from, free, end);
+    let best = accepts ? this.reach(text, node, k, last, from, free, end) : -1;
     let bestNode = node;
     let bestLast = last;
     while (trie.ways[node] !== 0 && last + 1 < reader.count) {
@@ -122,9 +124,11 @@ export class TermMatcher {
       if (separator < 0) break;
       const symbol = id * trie.separatorCount + separator;
       if ((trie.ways[node]! & bitOf(symbol)) === 0) break;
-      node = trie.step(node, symbol);
-      if (node === 0) break;
+      const target = trie.step(node, symbol);
+      if (target === 0) break;
       last++;
+      node = Math.abs(target);
+      if (target > 0) continue;
       const reached = this.reach(text, node, k, last, from, free, end);
       if (reached > best) {
         best = reached;
@@ -146,7 +150,7 @@ export class TermMatcher {
   /** The furthest end of a pattern at the node that fits the words `k` to `last`, or −1. */
   private reach(text: string, node: number, k: number, last: number, from: number, free: number, end: number): number {
     const { trie } = this;
-    if (trie.accept[node] === 0 || !this.isSpelled(text, node, k, last)) return -1;
+    if (!this.isSpelled(text, node, k, last)) return -1;
     if (trie.particular[node] === 0) return this.reader.ends[last]!;
     let furthest = -1;
     for (let index = trie.accept[node]!; index !== 0; index = trie.next[index - 1]!) {

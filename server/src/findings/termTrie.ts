@@ -7,8 +7,11 @@ const HYPHEN = 1;
 
 /** The compiled patterns. Nodes are numbers; node 0 is the root and is reached by no edge. */
 export class TermTrie {
-  /** First node of a word that begins a pattern, by word number; 0 where none does. */
-  readonly first: Int32Array;
+  /**
+   * Two cells for each word, by number: the node that it leads to from the root, negative where a pattern ends there and 0 where no
+   * pattern begins with it; and that node's {@link ways}. Side by side, because the scan reads both for every word.
+   */
+  readonly roots: Int32Array;
   /** One bit for each symbol that leaves the node, by {@link bitOf}: a clear bit spares the look into the edges; 0 where none leaves. */
   readonly ways: Int32Array;
   /** Head of the node's chain of patterns, as pattern index + 1. */
@@ -20,8 +23,8 @@ export class TermTrie {
   /** The folded spelling of the first pattern of a node's chain: range of `units`, separators as one unit 0. */
   readonly spellings: Int32Array;
   readonly units: Uint16Array;
-  /** Edges as (node, symbol, target) in open addressing; target 0 is an empty slot. */
-  private edges = new Int32Array(3 * 16);
+  /** Edges as (node, symbol, target) in open addressing; target 0 is an empty slot, a negative one has patterns. */
+  private readonly edges: Int32Array;
   private mask = 15;
   private readonly separators = new Map<string, number>([
     [' ', SPACE],
@@ -37,25 +40,25 @@ export class TermTrie {
     }
     this.separatorCount = this.separators.size;
     const nodes = 1 + patterns.reduce((sum, { words: own }) => sum + own.length, 0);
-    while (this.mask + 1 < nodes * 2) this.mask = this.mask * 2 + 1;
-    this.edges = new Int32Array(3 * (this.mask + 1));
     this.ways = new Int32Array(nodes);
     this.accept = new Int32Array(nodes);
     this.next = new Int32Array(patterns.length);
     this.particular = new Uint8Array(nodes);
     this.spellings = new Int32Array(nodes * 2);
     this.units = new Uint16Array(patterns.reduce((sum, pattern) => sum + spelling(pattern).length, 0));
-    this.first = new Int32Array(words.size);
+    const first = new Int32Array(words.size);
+    const edges = new Map<number, readonly [node: number, symbol: number, target: number]>();
     let count = 1;
     const ends = patterns.map((pattern) => {
       const start = words.find(pattern.words[0]!);
-      let node = this.first[start]!;
-      if (node === 0) node = this.first[start] = count++;
+      let node = first[start]!;
+      if (node === 0) node = first[start] = count++;
       for (let k = 1; k < pattern.words.length; k++) {
         const symbol =
           words.find(pattern.words[k]!) * this.separatorCount + this.separators.get(pattern.separators[k - 1]!)!;
-        let target = this.step(node, symbol);
-        if (target === 0) this.addEdge(node, symbol, (target = count++));
+        const key = node * words.size * this.separatorCount + symbol;
+        const target = edges.get(key)?.[2] ?? count++;
+        edges.set(key, [node, symbol, target]);
         node = target;
       }
       return node;
@@ -74,6 +77,14 @@ export class TermTrie {
       this.next[index] = this.accept[node]!;
       this.accept[node] = index + 1;
     }
+    while ((this.mask + 1) * 2 < edges.size * 3) this.mask = this.mask * 2 + 1;
+    this.edges = new Int32Array(3 * (this.mask + 1));
+    for (const [node, symbol, target] of edges.values()) this.layEdge(node, symbol, target);
+    this.roots = new Int32Array(words.size * 2);
+    for (const [word, node] of first.entries()) {
+      this.roots[word * 2] = this.accept[node] === 0 ? node : -node;
+      this.roots[word * 2 + 1] = this.ways[node]!;
+    }
   }
 
   /** The number of a separator in its normal form, or −1 where no pattern has it. */
@@ -81,7 +92,7 @@ export class TermTrie {
     return this.separators.get(normal) ?? -1;
   }
 
-  /** The node that a symbol (word × separatorCount + separator) leads to, or 0. */
+  /** The node that a symbol (word × separatorCount + separator) leads to, negative where a pattern ends there, or 0. */
   step(node: number, symbol: number): number {
     const { edges, mask } = this;
     for (let slot = slotOf(node, symbol) & mask; ; slot = (slot + 1) & mask) {
@@ -90,12 +101,12 @@ export class TermTrie {
     }
   }
 
-  private addEdge(node: number, symbol: number, target: number): void {
+  private layEdge(node: number, symbol: number, target: number): void {
     let slot = slotOf(node, symbol) & this.mask;
     while (this.edges[slot * 3 + 2] !== 0) slot = (slot + 1) & this.mask;
     this.edges[slot * 3] = node;
     this.edges[slot * 3 + 1] = symbol;
-    this.edges[slot * 3 + 2] = target;
+    this.edges[slot * 3 + 2] = this.accept[target] === 0 ? target : -target;
     this.ways[node]! |= bitOf(symbol);
   }
 }
