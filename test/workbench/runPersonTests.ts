@@ -62,6 +62,14 @@ async function runSuites(grep?: string): Promise<Mocha.Stats> {
 /** Packs what the manifest says into `vsix`, without asking any network. */
 async function pack(vsix: string): Promise<void> {
   const program = path.join(projectRoot, 'node_modules/@vscode/vsce/vsce');
-  const options = ['package', '--no-dependencies', '--skip-license', '--allow-missing-repository', '--out', vsix];
+  const options = [
+    'package',
+    '--no-dependencies',
+    '--no-rewrite-relative-links',
+    '--skip-license',
+    '--allow-missing-repository',
+    '--out',
+    vsix,
+  ];
   await promisify(execFile)(process.execPath, [program, ...options], { cwd: projectRoot });
 }

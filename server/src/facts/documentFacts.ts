@@ -3,6 +3,7 @@ import { hashText } from '../base/hash.js';
 import { isFunctionWord } from '../lexicon/functionWords.js';
 import { BLOCK_KINDS, sourceEnd, sourceStart } from '../prose/prose.js';
 import type { BlockContent, Prose, ProseBlock } from '../prose/prose.js';
+import { tokenSlice } from '../tokens/tokens.js';
 import type { BlockTokens, LanguageProfile } from '../tokens/tokens.js';
 import { FactFlag } from './flags.js';
 
@@ -94,7 +95,7 @@ class FactsBuilder {
       const marked = content.marks[mark];
       const row = this.row++;
       this.zones[row] = content.zones | (marked !== undefined && marked.start < end ? marked.zones : 0);
-      const word = this.localId(content.text.slice(start, end));
+      const word = this.localId(tokenSlice(content.text, start, end, tokens.flags[i]!));
       if (this.isFunction[word]) this.flags[row]! |= FactFlag.functionWord;
       this.word[row] = word;
       this.lemma[row] = this.localId(tokens.lemma[i]!);
