@@ -54,10 +54,18 @@ export function answersOf(question: Question, decisions: Decisions, precedents: 
   ];
 }
 
-/** The part of speech to write down: a verb's alone, since most terms are nouns, and only where all terms are verbs. */
-function scopeOfAnswer({ terms }: Question, known: DecidedTerm | undefined): { partOfSpeech?: PartOfSpeech } {
-  if (known !== undefined) return known.entry.partOfSpeech ? { partOfSpeech: known.entry.partOfSpeech } : {};
-  return terms.every((term) => term.partOfSpeech === 'verb') ? { partOfSpeech: 'verb' } : {};
+/** What an answer says of all its terms. */
+interface AnswerScope {
+  readonly partOfSpeech?: PartOfSpeech;
+  readonly with?: readonly string[];
+}
+
+/** The objects, and the part of speech to write down: a verb's alone, since most terms are nouns, and only where all terms are verbs. */
+function scopeOfAnswer({ terms, objects }: Question, known: DecidedTerm | undefined): AnswerScope {
+  const about = objects === undefined ? {} : { with: objects };
+  if (known !== undefined)
+    return known.entry.partOfSpeech ? { partOfSpeech: known.entry.partOfSpeech, ...about } : about;
+  return terms.every((term) => term.partOfSpeech === 'verb') ? { partOfSpeech: 'verb', ...about } : about;
 }
 
 function decidedPreference(question: Question, decisions: Decisions): Preference | undefined {

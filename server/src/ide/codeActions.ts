@@ -5,8 +5,8 @@ import { preferredEdits } from '../engine/fixing.js';
 import { termAt } from '../engine/termCard.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import type { Finding } from '../findings/finding.js';
-import type { Question } from '../mining/question.js';
 import type { TextEdit } from '../text/edits.js';
+import { offeredAnswers } from './answers.js';
 import type { Choice } from './answers.js';
 
 /** A quick fix that replaces text, or one that answers a question (its edits are made when it is chosen). */
@@ -52,31 +52,10 @@ export function quickFixesAt(snapshot: Snapshot, uri: string, span: Span): Quick
   if (here?.status === 'undecided' && !asked.has(here.conceptId)) asked.set(here.conceptId, undefined);
   for (const [id, finding] of asked) {
     const question = open.find((each) => each.id === id);
-    if (question !== undefined) fixes.push(...answersTo(question, finding));
+    if (question === undefined) continue;
+    for (const { title, choice } of offeredAnswers(snapshot, uri, question)) {
+      fixes.push({ kind: 'answer', title, finding, question: id, choice });
+    }
   }
   return fixes;
-}
-
-function answersTo(question: Question, finding: Finding | undefined): QuickFix[] {
-  const names = question.terms.map(({ text }) => text);
-  const quoted = listed(names.map((name) => `“${name}”`));
-  const answer = (title: string, choice: Choice): QuickFix => ({
-    kind: 'answer',
-    title,
-    finding,
-    question: question.id,
-    choice,
-  });
-  const object =
-    question.objects === undefined ? '' : ` (with ${question.objects.map((noun) => `“${noun}”`).join(', ')})`;
-  return [
-    ...names.map((name) => answer(`Prefer “${name}”${object}`, { kind: 'prefer', preferred: name })),
-    answer(`Either is fine: ${quoted} name one concept${object}`, { kind: 'either' }),
-    answer(`Two concepts: keep ${quoted} apart`, { kind: 'apart' }),
-    answer(`Not now: do not ask about ${quoted}`, { kind: 'later' }),
-  ];
-}
-
-function listed(names: readonly string[]): string {
-  return `${names.slice(0, -1).join(', ')} and ${names[names.length - 1]!}`;
 }
