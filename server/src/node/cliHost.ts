@@ -36,7 +36,7 @@ export function nodeHost(): CliHost {
     async writeFiles(folder, files) {
       try {
         for (const [name, text] of files) {
-          await mkdir(dirname(join(folder, name)), { recursive: true });
+          await makeFolder(dirname(join(folder, name)));
           await writeFile(join(folder, name), text);
         }
       } catch (error) {
@@ -49,6 +49,21 @@ export function nodeHost(): CliHost {
       return `${date.getFullYear()}-${two(date.getMonth() + 1)}-${two(date.getDate())}`;
     },
   };
+}
+
+/** Makes a folder and those above it. Node's own recursive mkdir never returns where a file system answers ENOENT to mkdir. */
+async function makeFolder(folder: string): Promise<void> {
+  const codeOf = (error: unknown): unknown => (error as NodeJS.ErrnoException).code;
+  const make = async (): Promise<void> => {
+    await mkdir(folder).catch((error: unknown) => {
+      if (codeOf(error) !== 'EEXIST') throw error;
+    });
+  };
+  await make().catch(async (error: unknown) => {
+    if (codeOf(error) !== 'ENOENT' || dirname(folder) === folder) throw error;
+    await makeFolder(dirname(folder));
+    await make();
+  });
 }
 
 async function surveyForCli(
