@@ -81,7 +81,7 @@ describe('generators’ containers', () => {
       'paragraph[safetyMessage]: More.',
       'paragraph: After.',
     ]);
-    expect(outline('??? note\n    Body.\n\n=== "Tab one"\n\n    - item\n')).toEqual([
+    expect(outline('???note\n    Body.\n\n=== "Tab one"\n\n    - item\n')).toEqual([
       'paragraph: Body.',
       'caption: Tab one',
       'listItem: item',
@@ -103,6 +103,10 @@ describe('inline markup', () => {
   it('makes code, URLs, addresses, templates and emoji codes opaque', () => {
     const text = 'a `b` <https://c.d> https://e.f/g_h me_x@i.jk {{ l }} {% m %} ${n} :o_p: {{< q "r" >}} s';
     expect(outline(text)).toEqual(['paragraph: a @ @ @ @ @ @ @ @ @ s']);
+  });
+
+  it('makes addresses without a dot opaque too', () => {
+    expect(outline('Open http://localhost:8080/a, or https://{host}/b.')).toEqual(['paragraph: Open @, or @.']);
   });
 
   it('vanishes where it only styles', () => {

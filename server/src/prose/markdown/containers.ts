@@ -4,8 +4,8 @@ import type { BlockContext, Line, MarkdownConfig } from '@lezer/markdown';
 /** Contexts deeper than this are not read: each level costs time on every line. */
 export const DEEPEST = 24;
 
-const INDENTED = /^(?:!!!|\?\?\?\+?|===[!+]?)[ \t]+(?=["\w])/;
-const INDENTED_TITLE = /^(?:!!!|\?\?\?\+?|===[!+]?)[ \t]+[^"]*"(.*)"[ \t\r]*$/;
+const INDENTED = /^(?:(?:!!!|\?\?\?\+?)[ \t]*|===[!+]?[ \t]+)(?=["\w])/;
+const INDENTED_TITLE = /^(?:!!!|\?\?\?\+?|===[!+]?)[ \t]*[^"]*"(.*)"[ \t\r]*$/;
 const COLONS = /^(:{3,})[ \t]*(?:\{[^}]*\}|[A-Za-z][\w-]*)/;
 const COLONS_TITLE = /^:{3,}[ \t]*(?:\{[^}]*\}|[A-Za-z][\w-]*)(?:\[([^\]]*)\]|[ \t]+([^[{\s].*))/;
 const COLONS_END = /^:{3,}[ \t\r]*$/;

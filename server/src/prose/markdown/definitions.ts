@@ -1,6 +1,5 @@
 // Link reference definitions: `[label]: target`. They decide which brackets are links, in the whole document.
 import type { Tree } from '@lezer/common';
-import { openMarkers } from './templates.js';
 import { Role, ROLE_OF } from './roles.js';
 
 /** One definition; `label` is folded as references to it are. */
@@ -16,7 +15,7 @@ export function foldLabel(label: string): string {
 
 /** A target as written, without the angle brackets around it. */
 export function bareTarget(written: string): string {
-  return openMarkers(written.startsWith('<') && written.endsWith('>') ? written.slice(1, -1) : written);
+  return written.startsWith('<') && written.endsWith('>') ? written.slice(1, -1) : written;
 }
 
 /** The definitions of a parsed text with the offsets at which they begin, in order. */

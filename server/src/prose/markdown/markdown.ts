@@ -4,7 +4,6 @@ import { normalise } from '../normalise.js';
 import type { Prose, ProseBlock, ReadingProblem } from '../prose.js';
 import { changeBetween, keepContents, type Change, type Reading } from '../reading.js';
 import { readFrontMatter, type FrontMatter } from './frontMatter.js';
-import { closeMarkers } from './templates.js';
 import { definitionTable, parseStretch, readUnits, shifted, type Stretch, type Unit } from './units.js';
 
 /** A Markdown document read. The fields beside the prose are the reader's own. */
@@ -20,7 +19,7 @@ const MARGIN = 2;
 
 /** Reads a whole document. */
 export function readMarkdown(source: SourceText): MarkdownReading {
-  const text = closeMarkers(normalise(source.text));
+  const text = normalise(source.text);
   const bodyStart = text.charCodeAt(0) === 0xfeff ? 1 : 0;
   const frontMatter = readFrontMatter(text, bodyStart);
   const stretch = parseStretch(text, frontMatter?.end ?? bodyStart, text.length);
@@ -38,7 +37,7 @@ export function readMarkdown(source: SourceText): MarkdownReading {
  * unchanged blocks were in sight of the parser.
  */
 export function rereadMarkdown(previous: MarkdownReading, source: SourceText): MarkdownReading {
-  const text = closeMarkers(normalise(source.text));
+  const text = normalise(source.text);
   const change = changeBetween(previous.text, text);
   if (!change) return { ...previous, source };
   const shift = change.newEnd - change.oldEnd;

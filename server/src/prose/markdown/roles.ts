@@ -61,6 +61,7 @@ const NAMES: Record<string, number> = {
   Autolink: Role.opaque,
   Template: Role.opaque,
   Emoji: Role.opaque,
+  BareUrl: Role.opaque,
   Escape: Role.escape,
   Entity: Role.reference,
   HardBreak: Role.lineBreak,

@@ -1,4 +1,4 @@
-// Inline markup of site generators: template markers, attribute lists, emoji short codes. None of it is prose.
+// Inline markup of site generators: template markers, attribute lists, emoji short codes, local addresses. None of it is prose.
 import type { InlineContext, MarkdownConfig } from '@lezer/markdown';
 
 /** Units between a marker's ends; longer ones are text. */
@@ -16,16 +16,11 @@ const FILLER = '\u00A0';
 
 /**
  * The text with the blanks inside template markers replaced, length kept: a generator fills in `{{ branch }}` before Markdown
- * is read, so such a blank does not end a link's target.
+ * is read, so such a blank does not end a link's target. Every line is treated by itself.
  */
 export function closeMarkers(text: string): string {
   if (!text.includes('{{') && !text.includes('{%')) return text;
   return text.replace(MARKER_ON_ONE_LINE, (marker) => marker.replaceAll(' ', FILLER));
-}
-
-/** Undoes {@link closeMarkers} in a piece of its result that is shown. */
-export function openMarkers(text: string): string {
-  return text.includes(FILLER) ? text.replaceAll(FILLER, ' ') : text;
 }
 
 const ATTRIBUTES = /\{(?::|\s*[.#][\w-])[^{}\n]*\}/y;
@@ -57,11 +52,22 @@ function parseEmoji(cx: InlineContext, next: number, pos: number): number {
   return emoji ? cx.addElement(cx.elt('Emoji', pos, pos + emoji[0].length)) : -1;
 }
 
+const BARE_URL = /https?:\/\/[^\s<>"'`|)\]*]*[^\s<>"'`|)\]*.,;:!?]/y;
+
+/** Addresses that GFM does not link for want of a dot, such as `http://localhost:8080/`, are no prose either. */
+function parseBareUrl(cx: InlineContext, next: number, pos: number): number {
+  if (next !== 104) return -1;
+  BARE_URL.lastIndex = pos - cx.offset;
+  const url = BARE_URL.exec(cx.text);
+  return url ? cx.addElement(cx.elt('BareUrl', pos, pos + url[0].length)) : -1;
+}
+
 /** The extension of the Markdown grammar. */
 export const templates: MarkdownConfig = {
-  defineNodes: ['Template', 'AttributeList', 'Emoji'],
+  defineNodes: ['Template', 'AttributeList', 'Emoji', 'BareUrl'],
   parseInline: [
     { name: 'Template', parse: parseTemplate, before: 'Escape' },
     { name: 'Emoji', parse: parseEmoji, before: 'Escape' },
+    { name: 'BareUrl', parse: parseBareUrl, after: 'Autolink' },
   ],
 };

@@ -4,6 +4,7 @@ import type { ProseBlock, ReadingProblem } from '../prose.js';
 import { readBlock } from './blocks.js';
 import { definitionsIn, type Definition } from './definitions.js';
 import { markdownParser } from './grammar.js';
+import { closeMarkers } from './templates.js';
 
 /** An outermost block and the prose in it; blocks and problems count offsets from the document's start. */
 export interface Unit {
@@ -31,7 +32,7 @@ export interface Stretch {
 /** Parses `[from, to)` of a text, which begins at the start of a line. */
 export function parseStretch(whole: string, from: number, to: number): Stretch {
   const text = from === 0 && to === whole.length ? whole : whole.slice(from, to);
-  const tree = markdownParser.parse(text);
+  const tree = markdownParser.parse(closeMarkers(text));
   const outline: { lineStart: number; end: number }[] = [];
   const definitions: Definition[][] = [];
   const found = definitionsIn(tree, text);
