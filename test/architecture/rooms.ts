@@ -34,7 +34,7 @@ export const ROOMS: Readonly<Record<string, RoomRule>> = {
   findings: {
     rooms: ['base', 'text', 'prose', 'tokens', 'lexicon', 'facts', 'corpus', 'termbase', 'decisions', 'rewrite'],
   },
-  rewrite: { rooms: ['base', 'text', 'prose', 'tokens', 'lexicon'], packages: [/^pluralize$/] },
+  rewrite: { rooms: ['base', 'text', 'prose', 'tokens', 'lexicon'] },
   engine: { rooms: upToRewrite },
   report: { rooms: ['base', 'engine', 'rewrite'], types: upToRewrite },
   ide: { rooms: ['base', 'text', 'engine', 'rewrite', 'decisions'], types: upToRewrite },

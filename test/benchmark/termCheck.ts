@@ -4,6 +4,7 @@ import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSy
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
 import { TermMatcher } from '../../server/src/findings/termMatcher.js';
+import { cpuMs, median } from './measure.js';
 
 /** One line of the result: times are medians of processor milliseconds; the ratio is ours over grep's. */
 export interface TermCheckRow {
@@ -118,19 +119,6 @@ function grepMs(list: string, file: string): number {
   });
   const [user, system] = stderr.trim().split(' ').map(Number);
   return (user! + system!) * 1000;
-}
-
-/** Processor time of the work in milliseconds: on a shared machine the clock on the wall measures the neighbours. */
-function cpuMs(run: () => unknown): number {
-  const begin = process.cpuUsage();
-  run();
-  const { user, system } = process.cpuUsage(begin);
-  return (user + system) / 1000;
-}
-
-function median(values: readonly number[]): number {
-  const sorted = [...values].sort((a, b) => a - b);
-  return sorted[sorted.length >> 1]!;
 }
 
 if (process.argv[1] !== undefined && /termCheck\.(?:ts|mjs|js)$/.test(process.argv[1])) {
