@@ -1,0 +1,129 @@
+// Where a pair that nobody asks about was lost, as far as the public functions of the engine rooms tell.
+import { finish } from '../../server/src/base/work.js';
+import { findUses } from '../../server/src/corpus/concordance.js';
+import type { Corpus } from '../../server/src/corpus/corpus.js';
+import { clippedSide } from '../../server/src/lexicon/clippings.js';
+import { mustStayApart } from '../../server/src/lexicon/opposites.js';
+import { singularOf } from '../../server/src/lexicon/plurals.js';
+import { termKey } from '../../server/src/lexicon/termKey.js';
+import { findDefinitions } from '../../server/src/mining/abbreviations/definitions.js';
+import { lexicalLink } from '../../server/src/mining/synonyms/links.js';
+import { segment } from '../../server/src/mining/synonyms/segment.js';
+import { findNounTerms } from '../../server/src/mining/synonyms/terms.js';
+import { readVerbUses } from '../../server/src/mining/synonyms/verbUses.js';
+import { countWordUses } from '../../server/src/mining/synonyms/wordUse.js';
+import { numberForms } from '../../server/src/mining/wording.js';
+import { verbForms } from '../../server/src/rewrite/verb.js';
+import type { Asked } from './asked.js';
+import { FEWEST_USES } from './gold.js';
+import type { GoldPair } from './gold.js';
+import { nounKey, placeAsked, verbKey } from './match.js';
+import { hyphensOf } from './recall.js';
+
+/** The stages at which a pair can be lost, in order, with what each means. */
+export const STAGES = {
+  'not used': 'a form does not stand in the counted text',
+  rare: 'a form is used less than five times in the counted text',
+  threshold: 'mined, but its confidence is below the default threshold',
+  'look-alike': 'asked among the look-alikes only',
+  explained: 'the short form is explained with its long form, and asking was held needless',
+  'not linked': 'no explanation and no clipping joins short and long form',
+  'other key': 'the two do not fold to one key',
+  judged: 'one key, but judged right as it is or too weak',
+  'no term': 'a form is neither a noun term nor a verb with objects',
+  swallowed: 'a noun term stands almost only inside longer terms',
+  'parts of speech': 'one is a noun term, the other a verb',
+  refused: 'refused outright: opposites, a closed set, an affix, digits',
+  'no link': 'both are terms, but no list and no dictionary joins them, and no other source was enough',
+  'weak in use': 'a list or dictionary joins them, but their use did not confirm it',
+} as const;
+export type Stage = keyof typeof STAGES;
+
+/** Fewest uses outside longer terms below which a noun term counts as swallowed. */
+const FEWEST_OUTSIDE = 3;
+
+/** Says of a pair that the default kinds miss where it was lost. Heavy parts are made when first needed. */
+export function createFunnel(asked: Asked): (pair: GoldPair) => Stage {
+  const { corpus } = asked;
+  if (corpus === undefined) return () => 'not used';
+  const terms = once(() => readTerms(corpus));
+  const definitions = once(() => findDefinitions(corpus));
+  return ({ a, b, kind }) => {
+    const uses = Math.min(usesOf(corpus, a), usesOf(corpus, b));
+    if (uses === 0) return 'not used';
+    if (uses < FEWEST_USES) return 'rare';
+    const hyphens = hyphensOf(kind);
+    const mined = asked.mined.filter((question) => question.kind !== 'look-alike');
+    if (placeAsked(mined, a, b, hyphens) > 0) return 'threshold';
+    if (placeAsked(asked.withLookAlikes, a, b, hyphens) > 0) return 'look-alike';
+    if (kind === 'abbreviation') {
+      const keys = [nounKey(a, 'open'), nounKey(b, 'open')];
+      const explained = definitions().some(
+        ({ short, longKey }) => keys.includes(nounKey(short, 'open')) && keys.includes(nounKey(longKey, 'open')),
+      );
+      if (explained) return 'explained';
+      return clippedSide(a.toLowerCase(), b.toLowerCase()) === undefined ? 'not linked' : 'judged';
+    }
+    if (kind === 'spelling' || kind === 'hyphenation') return termKey(a) === termKey(b) ? 'judged' : 'other key';
+    return synonymStage(terms(), a, b);
+  };
+}
+
+/** What the synonym engine knows: its noun terms with their uses outside longer terms, and its verbs with objects. */
+interface Terms {
+  readonly outside: ReadonlyMap<string, number>;
+  readonly verbs: ReadonlySet<string>;
+}
+
+function readTerms(corpus: Corpus): Terms {
+  const terms = finish(findNounTerms(corpus, countWordUses(corpus)));
+  const { uses } = finish(segment(corpus, terms));
+  const outside = new Map<string, number>();
+  terms.forEach(({ words }, index) => outside.set(nounKey(words.join(' '), 'open'), uses[index]!));
+  const read = finish(readVerbUses(corpus));
+  const verbs = new Set<string>();
+  read.uses.forEach(({ length }, pair) => {
+    if (length > 0) verbs.add(verbKey(read.verbs.textOf(read.pairs.leftOf(pair)), 'open'));
+  });
+  return { outside, verbs };
+}
+
+function synonymStage({ outside, verbs }: Terms, a: string, b: string): Stage {
+  const nouns = [a, b].map((form) => outside.get(nounKey(form, 'open')));
+  const areVerbs = [a, b].map((form) => verbs.has(verbKey(form, 'open')));
+  const bothNouns = nouns.every((count) => count !== undefined);
+  const bothVerbs = areVerbs.every(Boolean);
+  if (!bothNouns && !bothVerbs) {
+    const known = nouns.every((count, index) => count !== undefined || areVerbs[index] === true);
+    return known ? 'parts of speech' : 'no term';
+  }
+  if (!bothVerbs && nouns.some((count) => count! < FEWEST_OUTSIDE)) return 'swallowed';
+  if (mustStayApart(a, b) !== undefined) return 'refused';
+  const linked =
+    (bothNouns && lexicalLink(singularPhrase(a), singularPhrase(b), 'noun') !== undefined) ||
+    (bothVerbs && lexicalLink(verbKey(a, 'open'), verbKey(b, 'open'), 'verb') !== undefined);
+  return linked ? 'weak in use' : 'no link';
+}
+
+function singularPhrase(term: string): string {
+  const words = term.toLowerCase().split(/\s+/);
+  return [...words.slice(0, -1), singularOf(words.at(-1)!)].join(' ');
+}
+
+/** Counted uses of a term in its singular and plural, and with its first word inflected as a verb. */
+export function usesOf(corpus: Corpus, term: string): number {
+  const words = term.toLowerCase().split(/\s+/);
+  const last = words.at(-1)!;
+  const before = words.slice(0, -1);
+  const forms = new Set(numberForms(last).map((form) => [...before, form].join(' ')));
+  forms.add(words.join(' '));
+  const { thirdPerson, past, participle, gerund } = verbForms(words[0]!);
+  for (const form of [...thirdPerson, ...past, ...participle, ...gerund])
+    forms.add([form, ...words.slice(1)].join(' '));
+  return [...forms].reduce((sum, form) => sum + findUses(corpus, form).rows.length, 0);
+}
+
+function once<T>(make: () => T): () => T {
+  let made: { readonly value: T } | undefined;
+  return () => (made ??= { value: make() }).value;
+}
