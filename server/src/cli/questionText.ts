@@ -34,11 +34,16 @@ function renderOne(question: Question, number: number, examples: readonly Exampl
 }
 
 /** The question itself, in one sentence. */
-export function titleOf({ kind, terms }: Question): string {
+export function titleOf({ kind, terms, objects }: Question): string {
   const names = terms.map(({ text }) => `“${text}”`);
   if (kind === 'ambiguous-abbreviation') return `Does ${names.join(', ')} mean one thing everywhere?`;
   const last = names[names.length - 1]!;
   const list = names.length < 2 ? last : `${names.slice(0, -1).join(', ')} and ${last}`;
+  if (objects !== undefined) {
+    const [object, ...more] = objects.map((noun) => `“${noun}”`);
+    const others = more.length > 0 ? ` (also with ${more.join(', ')})` : '';
+    return `One thing to do with ${object}, ${names.length === 2 ? 'two' : String(names.length)} verbs: ${list}?${others}`;
+  }
   return `One thing, ${names.length === 2 ? 'two' : String(names.length)} names: ${list}?`;
 }
 

@@ -34,7 +34,8 @@ function headline({ text, names, question }: TermCard): string {
   const name = `**${escape(text)}**`;
   if (question !== undefined) {
     const rivals = names.filter((each) => each.text !== text).map((each) => `**${escape(each.text)}**`);
-    return `${name}: one thing with ${rivals.join(', ')}? Nobody has decided yet.`;
+    const objects = question.objects === undefined ? '' : ` ${listed(question.objects)}`;
+    return `${name}${objects}: one thing with ${rivals.join(', ')}? Nobody has decided yet.`;
   }
   const status = names.find((each) => each.text === text)?.status;
   const preferred = names.find((each) => each.status === 'preferred');
@@ -56,6 +57,10 @@ function table(names: readonly NameOnCard[]): string {
 
 function companion({ word, place, count }: Companion): string {
   return `${place === 'after' ? `___ ${escape(word)}` : `${escape(word)} ___`} (${count})`;
+}
+
+function listed(words: readonly string[]): string {
+  return words.map((word) => escape(word)).join(' / ');
 }
 
 /** Text of documents shown in Markdown: nothing in it may act as markup. */
