@@ -14,8 +14,11 @@ import { formsOfLong } from './longForms.js';
 import type { FormUses } from './longForms.js';
 import { termOf, usesOf } from './shortAndLong.js';
 
-/** The least that is asked about. */
-const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33 } as const;
+/**
+ * The least that is asked about: uses and documents of either form; kinds of frame that both have, with their share in the
+ * rarer form's uses; or else so many of its uses and such a share of them in fewer kinds.
+ */
+const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33, usesInFew: 4, shareInFew: 0.6 } as const;
 
 /** Words between two resting points. */
 const STRIDE = 5000;
@@ -61,8 +64,14 @@ function askClipping(corpus: Corpus, clipping: string): Question | undefined {
   });
   candidates.sort((a, b) => b.shared.kinds.length - a.shared.kinds.length);
   const best = candidates[0];
-  if (best === undefined || best.shared.kinds.length < LEAST.kinds || best.shared.share < LEAST.share) return undefined;
+  if (best === undefined || !standAlike(best.shared)) return undefined;
   return makeQuestion(corpus, short, best.long, best.shared);
+}
+
+function standAlike({ kinds, uses, share }: SharedFrames): boolean {
+  return (
+    (kinds.length >= LEAST.kinds && share >= LEAST.share) || (uses >= LEAST.usesInFew && share >= LEAST.shareInFew)
+  );
 }
 
 function sideOf(corpus: Corpus, words: readonly string[]): Side | undefined {
@@ -106,7 +115,7 @@ function makeQuestion(corpus: Corpus, short: Side, long: Side, shared: SharedFra
       },
       {
         kind: 'shared-frames',
-        text: `both stand beside the same words, ${shared.kinds.length} of them: ${shown.join(', ')}`,
+        text: `both stand beside the same ${shared.kinds.length === 1 ? 'word' : `${shared.kinds.length} words`}: ${shown.join(', ')}`,
         value: shared.kinds.length,
       },
     ],

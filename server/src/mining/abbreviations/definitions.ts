@@ -19,6 +19,9 @@ export interface Definition {
 /** A short form in parentheses: letters, of which two are capitals or one is beside a digit; a plural s may follow. */
 const SHORT = /^(?=.{2,11}$)\p{L}[\p{L}\p{N}]*(?:[-&/.][\p{L}\p{N}]+)*$/u;
 
+/** The longest long form that is read, in words. */
+const LONGEST_LONG = 12;
+
 /** All explanations of short forms in a corpus, in document order. */
 export function findDefinitions(corpus: Corpus): Definition[] {
   const { stream, vocabulary } = corpus;
@@ -107,16 +110,17 @@ function readLong(
   let from = first;
   if (/^(?:an?|the)$/.test(spellingAt(corpus, from).toLowerCase())) from++;
   const parts: string[] = [];
-  for (let row = from; row < end && row - from < 12; row++) {
-    if ((stream.flags[row]! & TokenFlag.word) === 0 || stream.counted[row] !== 1) return undefined;
-    if (row > from && !followsOn(stream, row)) return undefined;
+  let longest: Definition | undefined;
+  for (let row = from; row < end && row - from < LONGEST_LONG; row++) {
+    const isWord = (stream.flags[row]! & TokenFlag.word) !== 0 && stream.counted[row] === 1;
+    if (!isWord || (row > from && !followsOn(stream, row))) break;
     parts.push(...partsOf(spellingAt(corpus, row)));
     const complete = parts.length > 1 && aligns(lettersOf(short), parts);
     if (complete && (!toParenthesis || closes(corpus, row + 1))) {
-      return makeDefinition(corpus, short, shortRow, from, row + 1 - from);
+      longest = makeDefinition(corpus, short, shortRow, from, row + 1 - from);
     }
   }
-  return undefined;
+  return longest;
 }
 
 function makeDefinition(

@@ -26,9 +26,10 @@ export function framesOf(corpus: Corpus, uses: readonly Use[]): Frames {
   return frames;
 }
 
-/** What two forms share: the kinds of frame, most used first, and the share of the rarer form's framed uses in them. */
+/** What two forms share: the kinds of frame, most used first; the rarer form's uses in them, and their share in its framed uses. */
 export interface SharedFrames {
   readonly kinds: readonly number[];
+  readonly uses: number;
   readonly share: number;
 }
 
@@ -42,7 +43,7 @@ export function sharedFrames(corpus: Corpus, a: Frames, b: Frames): SharedFrames
   const text = (frame: number): string => `${corpus.vocabulary.textOf(frame >> 1)} ${frame & 1}`;
   kinds.sort((x, y) => weight(y) - weight(x) || (text(x) < text(y) ? -1 : 1));
   const inShared = kinds.reduce((sum, frame) => sum + rarer.get(frame)!, 0);
-  return { kinds, share: inShared === 0 ? 0 : inShared / total(rarer) };
+  return { kinds, uses: inShared, share: inShared === 0 ? 0 : inShared / total(rarer) };
 }
 
 /** A frame as a writer reads it: "___ file", "root ___". */

@@ -10,6 +10,7 @@ import type { Member } from './families.js';
 import { judge } from './judge.js';
 import type { Mix } from './judge.js';
 import { makeQuestion } from './question.js';
+import { askPhrases } from './phrases.js';
 import { SlotReader } from './slots.js';
 import { stylesOf } from './styles.js';
 import type { Style } from './styles.js';
@@ -33,7 +34,7 @@ export function* askVariants(corpus: Corpus): Work<Question[]> {
   const settled = new Set(
     questions.flatMap(({ terms }) => terms.flatMap(({ forms }) => forms.map(({ text }) => text.toLowerCase()))),
   );
-  questions.push(...(yield* askCapitals(corpus, settled)));
+  questions.push(...(yield* askCapitals(corpus, settled)), ...(yield* askPhrases(corpus, settled)));
   return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }
 

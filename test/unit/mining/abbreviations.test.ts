@@ -1,0 +1,179 @@
+// Abbreviations: how they are read, what is asked, and what is right as it is.
+import { existsSync, readFileSync } from 'node:fs';
+import { resolve } from 'node:path';
+import { describe, expect, it } from 'vitest';
+import { finish } from '../../../server/src/base/work.js';
+import { Corpus } from '../../../server/src/corpus/corpus.js';
+import { aligns, longestAlignment } from '../../../server/src/mining/abbreviations/alignment.js';
+import { askAbbreviations } from '../../../server/src/mining/abbreviations/ask.js';
+import { findDefinitions, partsOf, shortFormOf } from '../../../server/src/mining/abbreviations/definitions.js';
+import type { Question } from '../../../server/src/mining/question.js';
+import { corpusOf } from '../../support/corpusOf.js';
+
+const ask = (...documents: string[]): Question[] => finish(askAbbreviations(corpusOf(documents)));
+const definitionsIn = (text: string): string[] =>
+  findDefinitions(corpusOf([text])).map(({ short, longKey }) => `${short} = ${longKey}`);
+
+describe('alignment', () => {
+  // Common abbreviations of the trade: common practice, no source.
+  it.each([
+    ['crd', 'custom resource definition'],
+    ['pit', 'point in time'],
+    ['iam', 'identity and access management'],
+    ['rag', 'retrieval augmented generation'],
+    ['idp', 'identity provider'],
+    ['xml', 'extensible markup language'],
+    ['genai', 'generative ai'],
+    ['oidc', 'open id connect'],
+  ])('%s is made of %s', (short, long) => {
+    expect(aligns(short, long.split(' '))).toBe(true);
+  });
+
+  it.each([
+    ['crd', 'custom definition'],
+    ['ca', 'custom resource'],
+    ['pit', 'in time'],
+    ['ml', 'machine learning model'],
+  ])('%s is not made of %s', (short, long) => {
+    expect(aligns(short, long.split(' '))).toBe(false);
+  });
+
+  it('takes the longest run of words before', () => {
+    expect(longestAlignment('crd', [['the'], ['knative'], ['custom'], ['resource'], ['definition']])).toBe(3);
+  });
+
+  const glossary = resolve(import.meta.dirname, '../../../../shared/data/rfc4949.txt');
+  // RFC 4949 (Shirey 2007): its entries "$ ABC (x) See: long form" for an abbreviation and its long form.
+  it.skipIf(!existsSync(glossary))('explains the abbreviations of a published glossary', () => {
+    const pattern = /^ {3}\$ ([A-Z]{2,6})\n {6}\([A-Z]\) See: ([A-Za-z][A-Za-z -]+)\.$/gm;
+    const pairs = [...readFileSync(glossary, 'utf8').matchAll(pattern)].map(([, short, long]) => ({ short, long }));
+    const aligned = pairs.filter(({ short, long }) => aligns(short!.toLowerCase(), long!.split(' ').flatMap(partsOf)));
+    expect(pairs.length).toBeGreaterThan(50);
+    expect(aligned.length / pairs.length).toBeGreaterThan(0.85);
+  });
+});
+
+describe('short forms', () => {
+  it.each([
+    ['CRDs', 'CRD'],
+    ['k-NN', 'k-NN'],
+    ['OTel', 'OTel'],
+    ['K8s', 'K8s'],
+  ])('%s is the short form %s', (spelling, short) => {
+    expect(shortFormOf(spelling)).toBe(short);
+  });
+
+  it.each(['Note', 'a', 'word', 'ABCDEFGHIJKLM'])('%s is none', (spelling) => {
+    expect(shortFormOf(spelling)).toBeUndefined();
+  });
+});
+
+describe('explanations', () => {
+  it('are read in three ways', () => {
+    expect(definitionsIn('Add a custom resource definition (CRD) first.')).toEqual([
+      'CRD = custom resource definition',
+    ]);
+    expect(definitionsIn('Set the PIT (point in time) of the search.')).toEqual(['PIT = point in time']);
+    expect(definitionsIn('RBAC stands for role-based access control.')).toEqual(['RBAC = role based access control']);
+  });
+
+  it('fold the plural', () => {
+    expect(definitionsIn('These are virtual machines (VMs).')).toEqual(['VM = virtual machine']);
+  });
+
+  it('leave other parentheses alone', () => {
+    expect(definitionsIn('Restart the server (SIGHUP). See the list (PDF).')).toEqual([]);
+  });
+});
+
+describe('a short and a long form', () => {
+  const explained = 'A custom resource (CR) holds the settings. Each CR has a name.';
+
+  it('are asked where the long form goes on', () => {
+    const [question, ...rest] = ask(
+      `${explained} The custom resource is read. Every custom resource counts. Delete the CR.`,
+      'The custom resources wait. A CR waits. The custom resources stop.',
+    );
+    expect(rest).toEqual([]);
+    expect(question).toMatchObject({ kind: 'abbreviation', id: 'abbreviation:custom resource|CR' });
+    expect(question!.terms.map(({ text, uses }) => [text, uses])).toEqual([
+      ['custom resource', 5],
+      ['CR', 4],
+    ]);
+    expect(question!.reasons.map(({ text }) => text)).toEqual([
+      'the documents explain “CR” as “custom resource” once',
+      '“custom resource” is spelled out 3 times on 2 pages where it is no explanation',
+      '2 pages go on with “custom resource” beside “CR”',
+    ]);
+  });
+
+  it('are right where the long form is explained and the short one goes on', () => {
+    expect(ask(`${explained} Delete the CR.`, `${explained} Add a CR.`, 'A custom resource is read here.')).toEqual([]);
+  });
+
+  it('are right where the long form is part of a longer one', () => {
+    expect(
+      ask(
+        `${explained} A custom resource definition (CRD) is a type. The custom resource definition is read.`,
+        'See the custom resource definition of yours. A custom resource definition is here. The CRD and the CR.',
+      ).map(({ id }) => id),
+    ).not.toContain('abbreviation:custom resource|CR');
+  });
+
+  it('do not depend on the order in which documents came', () => {
+    const pages = {
+      'file:///a.md': `${explained} The custom resource is read. Every custom resource counts.`,
+      'file:///b.md': 'The custom resources wait. A CR waits. The custom resources stop.',
+    };
+    const forwards = finish(askAbbreviations(corpusOf(pages)));
+    expect(finish(askAbbreviations(corpusOf(Object.fromEntries(Object.entries(pages).reverse()))))).toEqual(forwards);
+    expect(forwards).toHaveLength(1);
+  });
+});
+
+describe('a short form with two explanations', () => {
+  it('is asked about as ambiguous', () => {
+    const [question] = ask(
+      'The Advanced Packaging Tool (APT) installs it. Run APT again.',
+      'An advanced persistent threat (APT) hides. Each APT is different. The advanced persistent threat stays.',
+    );
+    expect(question).toMatchObject({ kind: 'ambiguous-abbreviation' });
+    expect(question!.terms.map(({ text }) => text)).toEqual([
+      'APT',
+      'advanced persistent threat',
+      'Advanced Packaging Tool',
+    ]);
+  });
+
+  it('is none where the words are only inflected', () => {
+    expect(
+      ask('It reached general availability (GA) today.', 'It is generally available (GA) today. GA is near.'),
+    ).toEqual([]);
+  });
+});
+
+describe('clipped words', () => {
+  it('are asked among the same words as their full forms', () => {
+    const [question] = ask(
+      'Open the config file. Check config values. A config change is logged. The config directory is here.',
+      'Open the configuration file. Check configuration values. A configuration change is logged.',
+      'The config file and the configuration directory.',
+    );
+    expect(question).toMatchObject({ kind: 'abbreviation', id: 'abbreviation:config|configuration' });
+    expect(question!.reasons[1]!.text).toContain('“___ change”, “check ___”');
+  });
+
+  it('are left where they stand among other words', () => {
+    expect(
+      ask(
+        'Start the app store. An app icon. The app drawer opens. Your app list.',
+        'Send the application form. A job application waits. The application deadline passed. Visa application rules.',
+        'The app icon. A grant application.',
+      ),
+    ).toEqual([]);
+  });
+});
+
+it('has nothing to ask of an empty corpus', () => {
+  expect(finish(askAbbreviations(Corpus.create()))).toEqual([]);
+});
