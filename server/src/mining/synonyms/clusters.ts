@@ -15,13 +15,12 @@ export interface Cluster {
 
 /**
  * Agglomerates the strongest pairs first, ties by index; two clusters join only where all pairs across them hold. A pair
- * whose clusters may not join becomes a cluster of its own, for it is true of the two.
+ * whose clusters may not join is left out: no term is asked about twice.
  */
 export function clusterPairs(pairs: readonly ScoredPair[], terms: number): Cluster[] {
   const scores = new Map(pairs.map(({ a, b, score }) => [a * terms + b, score]));
   const holds = (x: number, y: number): number | undefined => scores.get(Math.min(x, y) * terms + Math.max(x, y));
   const clusterOf = new Map<number, number[]>();
-  const own: number[][] = [];
   for (const { a, b } of [...pairs].sort((x, y) => y.score - x.score || x.a - y.a || x.b - y.b)) {
     const left = clusterOf.get(a) ?? [a];
     const right = clusterOf.get(b) ?? [b];
@@ -29,9 +28,9 @@ export function clusterPairs(pairs: readonly ScoredPair[], terms: number): Clust
     if (left.every((x) => right.every((y) => holds(x, y) !== undefined))) {
       const joined = [...left, ...right];
       for (const member of joined) clusterOf.set(member, joined);
-    } else own.push([a, b]);
+    }
   }
-  const clusters = [...new Set(clusterOf.values()), ...own];
+  const clusters = [...new Set(clusterOf.values())];
   return clusters.map((members) => {
     members.sort((x, y) => x - y);
     let weakest = Infinity;

@@ -24,7 +24,7 @@ const Relation = {
 /** Stands for the start or end of a sentence among neighbouring words. */
 const EDGE = 0;
 /** The largest share of terms that a feature may have. */
-const COMMONEST = 0.25;
+const COMMONEST = 0.1;
 /** How far to the left of a noun its verb may stand, in words. */
 const REACH = 5;
 

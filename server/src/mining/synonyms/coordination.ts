@@ -78,12 +78,17 @@ export function countSideBySide(
     counts.set(key, found);
   };
   const elliptic = ellipticTerms(terms);
+  const involved = new Uint8Array(terms.length);
+  for (const key of wanted) involved[Math.floor(key / terms.length)] = involved[key % terms.length] = 1;
   let list: number[] = [];
   for (let i = 1; i < segments.count; i++) {
     const end = segments.first[i - 1]! + segments.length[i - 1]!;
     const start = segments.first[i]!;
+    const concerns = list.length > 0 || involved[segments.term[i - 1]!] === 1 || involved[segments.term[i]!] === 1;
     const between =
-      start - end <= REACH ? wordsBetween(stream, vocabulary.textOf.bind(vocabulary), end, start) : undefined;
+      concerns && start - end <= REACH
+        ? wordsBetween(stream, vocabulary.textOf.bind(vocabulary), end, start)
+        : undefined;
     if (between === undefined || !(COORDINATING.has(between) || CONTRASTING.has(between))) {
       list = [];
       continue;

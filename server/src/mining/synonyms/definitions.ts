@@ -28,7 +28,7 @@ export function findStatements(corpus: Corpus, segments: Segments): Statement[] 
     const right = segments.term[i]!;
     const from = segments.first[i - 1]! + segments.length[i - 1]!;
     const until = segments.first[i]!;
-    if (left === right || until - from > REACH || until === from) continue;
+    if (left === right || until - from > REACH || until === from || !OPENING.has(textAt(from))) continue;
     const after = until + segments.length[i]!;
     const words: string[] = [];
     let broken = starts(until);
@@ -49,6 +49,29 @@ export function findStatements(corpus: Corpus, segments: Segments): Statement[] 
   return found;
 }
 
+/** The first word or sign of what stands between two names of one thing. */
+const OPENING = new Set([
+  ',',
+  '(',
+  'or',
+  'is',
+  'are',
+  'was',
+  'were',
+  'which',
+  'that',
+  'also',
+  'aka',
+  'a.k.a',
+  'a.k.a.',
+  '–',
+  '—',
+  'sometimes',
+  'often',
+  'and',
+  '”',
+  '"',
+]);
 const DETERMINERS = new Set(['a', 'an', 'the', 'your', 'its', 'their', '“', '"', "'", '”']);
 const NAMING = new Set([
   'called',

@@ -29,7 +29,7 @@ const VERBS = words(
   tell ask try attempt choose pick prefer like follow find notice observe think believe expect assume ensure guarantee
   determine decide become remain stay come go bring put change modify alter adjust improve enhance increase reduce affect
   influence cause produce yield result face encounter experience meet address handle solve tackle support come happen occur
-  appear seem look`,
+  appear seem look set specify define configure name add avoid prevent`,
 );
 
 /** True for a noun, in its singular, that names no concept of a field by itself. */

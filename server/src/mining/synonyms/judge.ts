@@ -32,8 +32,8 @@ const FEWEST_USES = 3;
 const LEAST_ALONE = 0.15;
 /** From this share of capitalised uses a term is a proper name. */
 const PROPER = 0.5;
-/** Pairs that cannot reach this score are not compared. */
-const HOPELESS = -0.3;
+/** Least score of a pair that is asked about. */
+export const THRESHOLD = 0.1;
 
 const EMPTY: SparseVector = { ids: new Uint32Array(0), weights: new Float64Array(0) };
 
@@ -91,6 +91,12 @@ export class Judge {
     return (yield* compareTerms(vectors, [], some, keep)).nearest;
   }
 
+  /** The similarity of two terms as a share of what two names of one thing have here; once contexts are gathered. */
+  shareOf(a: number, b: number): number {
+    const { vectors } = this.gathered!;
+    return lin(vectors[a]!, vectors[b]!) / this.self(Math.min(this.segments.uses[a]!, this.segments.uses[b]!));
+  }
+
   private get vectors(): readonly SparseVector[] {
     return this.gathered!.vectors.slice(0, this.terms.length);
   }
@@ -111,11 +117,9 @@ export class Judge {
     if (!this.isOften(a) || !this.isOften(b) || this.separations.bothDefined(a, b)) return false;
     if (pair.evidence[0]?.kind !== 'neighbours') {
       const words = this.wordsOf(pair);
-      if (bestScoreOf(words, 1) < HOPELESS) return false;
+      if (bestScoreOf(words, 1) < THRESHOLD) return false;
       // Likeness costs little; the places among all neighbours, which the judgement also needs, cost much.
-      const { vectors } = this.gathered!;
-      const fewest = Math.min(this.segments.uses[a]!, this.segments.uses[b]!);
-      if (bestScoreOf(words, lin(vectors[a]!, vectors[b]!) / this.self(fewest)) < HOPELESS) return false;
+      if (bestScoreOf(words, this.shareOf(a, b)) < THRESHOLD) return false;
     }
     return !isRefused(this.terms[a]!, this.terms[b]!);
   }

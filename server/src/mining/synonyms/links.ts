@@ -13,12 +13,12 @@ export interface LexicalLink {
 }
 
 /** A dictionary's synonyms in rarer senses than this (sum of both places) say nothing of technical prose. */
-const RAREST_SENSES = 3;
+export const RAREST_SENSES = 3;
 
 /** The relation that our list knows, else the dictionary's, or undefined. */
 export function lexicalLink(a: string, b: string, pos: EquivalentPos): LexicalLink | undefined {
   const set = areEquivalent(a, b, pos);
-  if (set !== undefined) return { source: 'list', strength: set.distinct === undefined ? 1 : 0.7 };
+  if (set !== undefined) return { source: 'list', strength: set.distinct === undefined ? 1 : 0.65 };
   const relation = synonymy(a, b, pos);
   if (typeof relation !== 'object' || relation.rankSum > RAREST_SENSES) return undefined;
   return { source: 'dictionary', strength: relation.rankSum <= 2 ? 0.8 : 0.6 };

@@ -20,7 +20,12 @@ export function* pairByLooks(judge: Judge, judged: readonly JudgedPair[]): Work<
   const pairs: Pair[] = [];
   for (const a of frequent) {
     for (const b of nearest.get(a) ?? []) {
-      if (a < b && nearest.get(b)?.includes(a) === true && !known.has(`${a} ${b}`)) {
+      if (
+        a < b &&
+        nearest.get(b)?.includes(a) === true &&
+        !known.has(`${a} ${b}`) &&
+        judge.shareOf(a, b) >= LEAST_SHARE
+      ) {
         const text = 'no other source speaks for it: they are merely used alike';
         pairs.push({ a, b, evidence: [{ kind: 'neighbours', strength: 0, text, value: NEAREST }] });
       }
@@ -28,9 +33,8 @@ export function* pairByLooks(judge: Judge, judged: readonly JudgedPair[]): Work<
   }
   const found = yield* judge.judge(pairs);
   return found
-    .filter(({ known: { likeness, self, sideBySide, siblings, properNames } }) => {
-      const beside = sideBySide.coordinated + sideBySide.contrasted;
-      return likeness.similarity / self >= LEAST_SHARE && beside === 0 && siblings === 0 && properNames === 0;
+    .filter(({ known: { sideBySide, siblings, properNames } }) => {
+      return sideBySide.coordinated + sideBySide.contrasted + siblings + properNames === 0;
     })
     .sort((x, y) => y.score - x.score || x.a - y.a || x.b - y.b)
     .slice(0, MOST);

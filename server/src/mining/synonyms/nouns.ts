@@ -6,7 +6,7 @@ import { clusterPairs } from './clusters.js';
 import { pairByComponents } from './components.js';
 import { pairByStatements } from './definitions.js';
 import { PairCollector } from './evidence.js';
-import { Judge } from './judge.js';
+import { Judge, THRESHOLD } from './judge.js';
 import type { JudgedPair } from './judge.js';
 import { pairByLists } from './lexical.js';
 import { pairByLinkTargets } from './linkTargets.js';
@@ -18,9 +18,6 @@ import { confidenceOf } from './score.js';
 import { segment } from './segment.js';
 import { findNounTerms } from './terms.js';
 import { countWordUses } from './wordUse.js';
-
-/** Least score of a pair that is asked about. */
-const THRESHOLD = 0;
 
 /** Asks about noun terms of one concept, and about terms that are alike in use alone. */
 export function* askNouns(corpus: Corpus): Work<Question[]> {

@@ -37,7 +37,7 @@ export function scoreOf(known: Known): number {
   const beside = sideBySide.coordinated + sideBySide.contrasted;
   score -= 8 * Math.sqrt(beside / fewest);
   if (beside >= 3) score -= 1;
-  score -= 1.2 * Math.log1p(known.siblings);
+  score -= 1.8 * Math.log1p(known.siblings);
   score -= known.properNames === 2 ? 2.5 : known.properNames;
   score -= GENERAL * known.general;
   return score;
@@ -53,7 +53,7 @@ export function bestScoreOf(known: Pick<Known, 'evidence' | 'shape' | 'general'>
 function lexicalWeight({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): number {
   const strength = strongest(evidence, ['list', 'dictionary', 'component']);
   if (strength === 0) return shape === 'contained' ? -1.3 : 0;
-  if (shape === 'words') return -0.4 + 1.6 * strength;
+  if (shape === 'words') return -0.5 + 1.6 * strength;
   return 0.3 + 1.8 * strength - (shape === 'contained' ? 1.3 : 0);
 }
 
@@ -61,7 +61,7 @@ function lexicalWeight({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): 
 function statementWeight({ evidence }: Pick<Known, 'evidence'>): number {
   let weight = 0;
   for (const { kind, strength, value } of evidence) {
-    if (kind === 'definition') weight += (strength >= 0.8 ? 2.2 : 0.4) + 0.3 * Math.min(4, value - 1);
+    if (kind === 'definition') weight += (strength >= 0.8 ? 1.7 : 0.4) + 0.3 * Math.min(4, value - 1);
     else if (kind === 'link-target') weight += 0.5 * Math.min(2, value);
   }
   return weight;

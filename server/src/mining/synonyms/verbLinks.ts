@@ -1,10 +1,12 @@
 // Whether two verbs may name one operation on an object: what list and dictionary say, and how sure that is.
+import { clippedSide } from '../../lexicon/clippings.js';
 import { areEquivalent } from '../../lexicon/equivalents.js';
 import { mustStayApart } from '../../lexicon/opposites.js';
 import { spellingKey } from '../../lexicon/spelling.js';
 import { synonymy } from '../../lexicon/synonyms.js';
 import { termKey } from '../../lexicon/termKey.js';
 import { isGeneralNoun, isGeneralVerb } from './generalWords.js';
+import { RAREST_SENSES } from './links.js';
 import type { Likeness } from './neighbours.js';
 
 /** How two verbs are linked, for one object. */
@@ -15,12 +17,17 @@ export interface VerbLink {
   readonly text: string;
 }
 
-/** A dictionary's synonyms in rarer senses than this (sum of both places) say nothing of technical prose. */
-const RAREST_SENSES = 5;
+/** Fewer uses than this with one object may be chance. */
+const FEW = 4;
 
 /** The link of two verbs, or undefined where there is none or they must stay apart. */
 export function linkVerbs(one: string, other: string, object: string): VerbLink | undefined {
-  if (spellingKey(one) === spellingKey(other) || mustStayApart(one, other) !== undefined) return undefined;
+  const link = lexicalLinkOfVerbs(one, other, object);
+  if (link === undefined || spellingKey(one) === spellingKey(other)) return undefined;
+  return clippedSide(one, other) === undefined && mustStayApart(one, other) === undefined ? link : undefined;
+}
+
+function lexicalLinkOfVerbs(one: string, other: string, object: string): VerbLink | undefined {
   const set = areEquivalent(one, other, 'verb');
   if (set !== undefined) {
     const fit = set.objects === undefined ? 0.8 : fitOf(object, set.objects);
@@ -32,7 +39,7 @@ export function linkVerbs(one: string, other: string, object: string): VerbLink 
   if (typeof relation !== 'object' || relation.rankSum > RAREST_SENSES) return undefined;
   return {
     kind: 'dictionary',
-    strength: relation.rankSum <= 2 ? 0.8 : relation.rankSum === 3 ? 0.7 : 0.5,
+    strength: relation.rankSum <= 2 ? 0.8 : 0.7,
     text: `a general dictionary gives “${one}” and “${other}” as synonyms`,
   };
 }
@@ -45,10 +52,21 @@ function fitOf(object: string, objects: readonly string[]): number {
   return objects.some((each) => synonymy(each, object, 'noun') !== undefined) ? 0.6 : 0.3;
 }
 
-/** The score of two verbs with an object, in logits: 0 is as likely right as wrong. */
-export function scoreOfVerbs(one: string, other: string, object: string, link: VerbLink, likeness: Likeness): number {
+/**
+ * The score of two verbs with an object, in logits: 0 is as likely right as wrong.
+ * @param fewest uses of the rarer verb with the object
+ */
+export function scoreOfVerbs(
+  one: string,
+  other: string,
+  object: string,
+  link: VerbLink,
+  likeness: Likeness,
+  fewest: number,
+): number {
   let score = -1.6 + 3 * link.strength;
-  score -= 0.25 * Math.log(Math.sqrt(likeness.rankOfA * likeness.rankOfB));
+  score -= 0.45 * Math.log(Math.sqrt(likeness.rankOfA * likeness.rankOfB));
+  if (fewest < FEW) score -= 0.3;
   if (isGeneralNoun(object)) score -= 0.8;
   if (isGeneralVerb(one) || isGeneralVerb(other)) score -= 1.2;
   return score;

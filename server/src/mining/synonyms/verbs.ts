@@ -7,6 +7,7 @@ import type { Question, Reason } from '../question.js';
 import { times } from '../wording.js';
 import { clusterPairs } from './clusters.js';
 import { forEachPair } from './lexical.js';
+import { Meanings } from './links.js';
 import type { Likeness } from './neighbours.js';
 import { makeQuestion } from './question.js';
 import { confidenceOf } from './score.js';
@@ -20,6 +21,10 @@ import type { VerbUse, VerbUses } from './verbUses.js';
 const FEWEST_USES = 3;
 /** Least attraction between a verb and the object, PMI in bits. */
 const LEAST_PMI = 0.3;
+/** Verbs that are set side by side so often ("create or update") are two operations. */
+const MOST_COORDINATED = 2;
+/** The best that a comparison can yield. */
+const NEAREST: Likeness = { similarity: 1, rankOfA: 1, rankOfB: 1 };
 /** Least score of a pair that is asked about. */
 const THRESHOLD = 0.2;
 
@@ -43,11 +48,15 @@ export function* askVerbs(corpus: Corpus): Work<Question[]> {
   const objects = byObject(read);
   yield;
   const candidates = new Map<number, { a: number; b: number }>();
+  const meanings = new Meanings(['verb']);
   const linked = objects.map(({ object, verbs }) => {
     const links = new Map<number, VerbLink>();
-    forEachPair(verbs, (left, right) => {
+    const texts = verbs.map(({ text }) => text);
+    meanings.forEachRelated(texts, (i, j) => {
+      const [left, right] = [verbs[i]!, verbs[j]!];
       const link = linkVerbs(left.text, right.text, object);
-      if (link === undefined || read.coordinated(left.text, right.text) >= 2) return;
+      if (link === undefined || read.coordinated(left.text, right.text) >= MOST_COORDINATED) return;
+      if (scoreOfVerbs(left.text, right.text, object, link, NEAREST, FEWEST_USES + 1) < THRESHOLD) return;
       const key = keyOf(left.verb, right.verb, read.verbs.size);
       links.set(key, link);
       candidates.set(key, { a: Math.min(left.verb, right.verb), b: Math.max(left.verb, right.verb) });
@@ -80,7 +89,8 @@ function operationsOn(
     const key = keyOf(verbs[a]!.verb, verbs[b]!.verb, size);
     const link = links.get(key);
     if (link === undefined) return;
-    const score = scoreOfVerbs(verbs[a]!.text, verbs[b]!.text, object, link, likeness.get(key)!);
+    const fewest = Math.min(verbs[a]!.uses.length, verbs[b]!.uses.length);
+    const score = scoreOfVerbs(verbs[a]!.text, verbs[b]!.text, object, link, likeness.get(key)!, fewest);
     if (score >= THRESHOLD) holding.push({ a, b, score, link });
   });
   return clusterPairs(holding, verbs.length).map(({ members, weakest }) => ({
