@@ -30,7 +30,8 @@ export function collectReport(snapshot: Snapshot, rootUri: string, options: Repo
     const { id, kind, language, objects, confidence, terms, reasons } = question;
     const isDrift = kind !== 'ambiguous-abbreviation';
     const drift = isDrift ? driftOf(terms.map(({ uses }) => uses)) : undefined;
-    const where = isDrift ? places.where(terms.map((_, index) => usage.get(askedId(question, index))!)) : undefined;
+    const counted = terms.map((_, index) => usage.get(askedId(question, index))!);
+    const where = isDrift && countsAgree(counted, terms) ? places.where(counted) : undefined;
     return {
       ...{ id, kind, confidence, reasons },
       ...(language !== undefined && { language }),
@@ -81,6 +82,14 @@ class Places {
     });
     return whereDriftLives(pages);
   }
+}
+
+/**
+ * Questions count with their own eye for slots and objects. Where the plain count over pages comes out otherwise by more
+ * than a quarter for any name, it says nothing sound about folders.
+ */
+function countsAgree(counted: readonly TermUsage[], terms: readonly { readonly uses: number }[]): boolean {
+  return counted.every(({ uses }, index) => Math.abs(uses - terms[index]!.uses) <= terms[index]!.uses / 4);
 }
 
 const decidedId = (concept: number, term: number): string => `decided ${concept} ${term}`;

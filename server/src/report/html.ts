@@ -83,7 +83,8 @@ const reading = html`<section class="part" aria-labelledby="reading">
     <dd>
       The mutual information of name and folder, and of name and page, as a share of that entropy (T. M. Cover and J. A.
       Thomas, <cite>Elements of Information Theory</cite>, chapter 2), less what chance alone would give (G. A. Miller,
-      1955). It is said where there are uses enough to say it.
+      1955). It is said where there are uses enough to say it. Folders are counted with names inside longer names left
+      out.
     </dd>
     <dt>Sure</dt>
     <dd>

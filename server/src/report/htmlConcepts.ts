@@ -90,12 +90,12 @@ function conceptEntry(concept: ReportConcept, index: number): Markup {
     </header>
     ${definition !== undefined && html`<p>${definition}</p>`}
     <div class="wide">
-      <table>
+      <table class="names decided">
         <thead>
           <tr>
             <th scope="col">Term</th>
             <th scope="col">Status</th>
-            <td></td>
+            <td class="bar"></td>
             <th scope="col" class="number">Share</th>
             <th scope="col" class="number">Uses</th>
             <th scope="col" class="number">Pages</th>

@@ -70,7 +70,7 @@ export function folderTable(
   return html`<details>
     <summary>Folder by folder</summary>
     <div class="wide" tabindex="0" role="region" aria-label="Uses by folder">
-      <table>
+      <table class="folders">
         <thead>
           <tr>
             <th scope="col">Folder</th>

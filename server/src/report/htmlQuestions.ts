@@ -74,7 +74,7 @@ function questionEntry(question: ReportQuestion, index: number): Markup {
       <h3 id="${id}"><span class="count">${index + 1}</span>${titleOf(question)}</h3>
       <p class="kind">${KIND_NAMES[kind]}, ${percent(confidence)} sure; settles ${counted(settles, 'use')}</p>
     </header>
-    <table>
+    <table class="names">
       <thead>
         <tr>
           <th scope="col">Name</th>

@@ -57,13 +57,13 @@ export function whereText({ shares: { folders, pages, inside } }: WhereDriftLive
   if (pages === undefined || inside === undefined) {
     if (folders >= 0.5) return `Most of the mix (${percent(folders)}) is one folder against another.`;
     if (folders >= 0.15)
-      return `Part of the mix (${percent(folders)}) is one folder against another, the rest is mixed inside folders.`;
+      return `Part of the mix (${percent(folders)}) is one folder against another, the rest is inside folders.`;
     return 'The folders mix the names alike.';
   }
   const parts = [
     { share: folders, text: 'one folder against another' },
     { share: pages, text: 'one page against another in the same folder' },
-    { share: inside, text: 'mixed inside pages' },
+    { share: inside, text: 'inside pages' },
   ].sort((a, b) => b.share - a.share);
   const [first, second] = parts;
   const head = `${first!.share >= 0.5 ? 'Most' : 'The largest part'} of the mix (${percent(first!.share)}) is ${first!.text}`;
