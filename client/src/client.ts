@@ -1,14 +1,12 @@
 // The language client: which documents the server sees, and what it is told at the start.
+import * as vscode from 'vscode';
 import { LanguageClient } from 'vscode-languageclient/node';
 import type { LanguageClientOptions, ServerOptions } from 'vscode-languageclient/node';
 import { DOCUMENT_LANGUAGES, STATE_NOTIFICATION, TERMBASE_NAME } from '../../server/src/lsp/protocol.js';
 import type { ClientOptions, FolderStateParams } from '../../server/src/lsp/protocol.js';
 
-/** Starts the server and connects it to the editor. */
-export async function startClient(
-  server: ServerOptions,
-  onState: (state: FolderStateParams) => void,
-): Promise<LanguageClient> {
+/** Starts the server and connects it to the editor; requests that come before it is up wait for it. */
+export function startClient(server: ServerOptions, onState: (state: FolderStateParams) => void): LanguageClient {
   const options: LanguageClientOptions = {
     documentSelector: [
       ...DOCUMENT_LANGUAGES.flatMap((language) =>
@@ -21,6 +19,8 @@ export async function startClient(
   };
   const client = new LanguageClient('evenword', 'Evenword', server, options);
   client.onNotification(STATE_NOTIFICATION, onState);
-  await client.start();
+  client.start().catch((error: unknown) => {
+    void vscode.window.showErrorMessage(`Evenword's language server could not be started: ${String(error)}`);
+  });
   return client;
 }

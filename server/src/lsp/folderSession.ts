@@ -116,7 +116,7 @@ export class FolderSession {
     }
     this.engine.apply({ documents: [{ uri, source: { uri, format: formatOf(document), text }, open: true }] });
     this.publish(uri);
-    if (this.engine.needsSettling) this.settleWhenIdle();
+    this.settleWhenIdle();
   }
 
   /** A document was closed: what is on disk counts again. */
@@ -142,7 +142,7 @@ export class FolderSession {
     if (this.open.has(uri)) return;
     this.engine.apply({ documents: [{ uri, source }] });
     if (source === undefined) this.publisher.clear(uri);
-    if (this.engine.needsSettling) this.settleWhenIdle();
+    this.settleWhenIdle();
   }
 
   /** The version of an open document, for edits that must not hit another text. */
@@ -167,6 +167,8 @@ export class FolderSession {
   }
 
   private settleWhenIdle(): void {
+    // Single documents outside all folders are checked, but make no documentation set to be mined.
+    if (this.uri === '' || !this.engine.needsSettling) return;
     clearTimeout(this.idle);
     this.settling.abort();
     this.idle = setTimeout(() => {
