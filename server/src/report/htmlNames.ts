@@ -74,7 +74,7 @@ export function folderTable(
         <thead>
           <tr>
             <th scope="col">Folder</th>
-            <td></td>
+            <td class="bar"></td>
             ${heads}
           </tr>
         </thead>

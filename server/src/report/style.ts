@@ -99,9 +99,8 @@ footer{margin-top:4rem;padding-top:1rem;border-top:3px double var(--line);color:
 .figures div:last-child:nth-child(odd){grid-column:1/-1}
 .figures .value{font-size:1.9rem}
 .entry{padding:1.1rem 1.05rem 1.2rem}
-.glance .bar,.glance .extra,.decided .bar{display:none}
+.glance .bar,.glance .extra,.decided .bar,.folders .bar{display:none}
 td.bar{min-width:4.5rem;width:26%}
-.folders td.bar{min-width:3rem}
 .folders .number{white-space:normal}
 th,td{padding-right:.7rem}
 h2{font-size:1.5rem}h3{font-size:1.18rem}
