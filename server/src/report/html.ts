@@ -70,7 +70,7 @@ const reading = html`<section class="part" aria-labelledby="reading">
     <dt>Uses</dt>
     <dd>
       Counted in running text, in every inflected form. Code, quotations and passages that are repeated word for word
-      are left out.
+      are left out. A check of the pages names fewer places, since it is silent where it is not sure.
     </dd>
     <dt>Names in effect</dt>
     <dd>
