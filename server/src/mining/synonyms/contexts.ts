@@ -1,4 +1,5 @@
 // The contexts of terms: neighbouring words and grammatical relations, counted into one sparse vector a term.
+import { compareCodeUnits } from '../../base/order.js';
 import { PairTable } from '../../base/pairTable.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
@@ -25,6 +26,8 @@ const Relation = {
 const EDGE = 0;
 /** The largest share of terms that a feature may have. */
 const COMMONEST = 0.1;
+/** In a small corpus so many terms may share a feature all the same. */
+const ALWAYS_TOLD = 25;
 /** How far to the left of a noun its verb may stand, in words. */
 const REACH = 5;
 
@@ -74,10 +77,11 @@ export function* gatherContexts(
     if (half !== undefined) gather(half, first, end);
     if (i % 20_000 === 0) yield;
   }
+  const shown = commonForms(corpus);
+  const word = (id: number): string => (id === EDGE ? '' : vocabulary.textOf(shown[id - 1]!));
   const describe = (feature: number): string | undefined => {
     const relation = features.leftOf(feature);
     const code = features.rightOf(feature);
-    const word = (id: number): string => (id === EDGE ? '' : vocabulary.textOf(id - 1));
     switch (relation) {
       case Relation.twoBefore:
         return frame(`${word(pairs.leftOf(code))} ${word(pairs.rightOf(code))}`, '');
@@ -92,6 +96,24 @@ export function* gatherContexts(
     }
   };
   return { vectors: weigh(cells, counts, features.size, terms, terms + 2 * halved.length), describe };
+}
+
+/** The commonest written form of each dictionary form: readers know “qualified”, not “qualify”, where that is what stands. */
+function commonForms({ stream, vocabulary }: Corpus): Uint32Array {
+  const uses = new Uint32Array(vocabulary.size);
+  for (let row = 0; row < stream.length; row++) uses[stream.fold[row]!]!++;
+  const shown = Uint32Array.from({ length: vocabulary.size }, (_, word) => word);
+  const most = new Uint32Array(vocabulary.size);
+  for (let row = 0; row < stream.length; row++) {
+    const fold = stream.fold[row]!;
+    const lemma = stream.lemma[row]!;
+    const better =
+      uses[fold]! - most[lemma]! || compareCodeUnits(vocabulary.textOf(shown[lemma]!), vocabulary.textOf(fold));
+    if (better <= 0) continue;
+    shown[lemma] = fold;
+    most[lemma] = uses[fold]!;
+  }
+  return shown;
 }
 
 /** A frame to show, or undefined where it holds signs or stand-ins for code. */
@@ -194,7 +216,8 @@ function weigh(cells: PairTable, counts: CountColumn, features: number, terms: n
   }
   const met = isMet.reduce((sum, each) => sum + each, 0);
   // A feature of one term alone is shared by no two; one that most terms have says next to nothing and costs the most.
-  const says = (feature: number): boolean => df[feature]! >= 2 && df[feature]! <= met * COMMONEST;
+  const says = (feature: number): boolean =>
+    df[feature]! >= 2 && df[feature]! <= Math.max(ALWAYS_TOLD, met * COMMONEST);
   for (let feature = 0; feature < features; feature++) first[feature + 1]! += first[feature]!;
   const byFeature = new Uint32Array(cells.size);
   for (let cell = 0; cell < cells.size; cell++) {

@@ -23,7 +23,7 @@ import { countWordUses } from './wordUse.js';
 export function* askNouns(corpus: Corpus): Work<Question[]> {
   const terms = yield* findNounTerms(corpus, countWordUses(corpus));
   const segments = yield* segment(corpus, terms);
-  const occurrences = indexOccurrences(corpus.stream, segments);
+  const occurrences = indexOccurrences(segments);
   const collector = new PairCollector(terms.length);
   pairByLists(terms, collector);
   yield;

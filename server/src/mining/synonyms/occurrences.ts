@@ -1,5 +1,4 @@
 // The occurrences of each term in order, and which occurrence covers a row.
-import type { TokenStream } from '../../corpus/stream.js';
 import type { Use } from '../places.js';
 import type { Segments } from './segment.js';
 
@@ -9,12 +8,10 @@ export interface Occurrences {
   of(term: number): Uint32Array;
   /** The same as uses of rows. */
   usesOf(term: number): Use[];
-  /** How many documents a term occurs in. */
-  documentsOf(term: number): number;
 }
 
 /** Sorts the occurrences by term. */
-export function indexOccurrences(stream: TokenStream, segments: Segments): Occurrences {
+export function indexOccurrences(segments: Segments): Occurrences {
   const first = new Uint32Array(segments.uses.length + 1);
   segments.uses.forEach((uses, term) => {
     first[term + 1] = first[term]! + uses;
@@ -26,6 +23,5 @@ export function indexOccurrences(stream: TokenStream, segments: Segments): Occur
   return {
     of,
     usesOf: (term) => Array.from(of(term), (i): Use => ({ row: segments.first[i]!, length: segments.length[i]! })),
-    documentsOf: (term) => new Set(Array.from(of(term), (i) => stream.documentOf(segments.first[i]!))).size,
   };
 }

@@ -2,9 +2,9 @@
 import { byCountThenText, compareCodeUnits } from '../../base/order.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { singularOf } from '../../lexicon/plurals.js';
-import { examplePlaces } from '../places.js';
 import type { Use } from '../places.js';
-import type { Question, QuestionKind, QuestionTerm, Reason, UsePlace } from '../question.js';
+import type { Question, QuestionKind, QuestionTerm, Reason } from '../question.js';
+import { tellingPlaces } from './tellingPlaces.js';
 import { byUses, displayText, makeTerm, spelledAt } from '../wording.js';
 
 /** A term of a question before it is put in order. */
@@ -25,7 +25,10 @@ export function makeQuestion(
 ): Question {
   const terms = named.map((each) => ({ term: nounTerm(corpus, each), uses: each.uses }));
   terms.sort((x, y) => byUses(x.term, y.term));
-  const places: UsePlace[] = terms.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses));
+  const places = tellingPlaces(
+    corpus.stream,
+    terms.map(({ uses }) => uses),
+  );
   const outside = terms.slice(1).reduce((sum, { term }) => sum + term.uses, 0);
   return {
     id: `${kind}:${terms

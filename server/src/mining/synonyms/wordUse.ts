@@ -23,8 +23,6 @@ export interface WordUses {
   share(word: number, use: WordUse): number;
   /** The number of a word's uses in a class. */
   count(word: number, use: WordUse): number;
-  /** The dictionary form of a word as a noun (its singular) or as a verb, as a vocabulary number. */
-  lemma(word: number, use: 'noun' | 'verb'): number;
 }
 
 /** Counts the uses of every word of a corpus. */
@@ -32,20 +30,11 @@ export function countWordUses(corpus: Corpus): WordUses {
   const { stream, vocabulary } = corpus;
   const width = WORD_USES.length;
   const counts = new Int32Array(vocabulary.size * width);
-  const lemmas = [new Map<number, number>(), new Map<number, number>()];
   for (let row = 0; row < stream.length; row++) {
     if (stream.counted[row] === 0 || (stream.flags[row]! & TokenFlag.word) === 0) continue;
     const use = useOfTag(stream.tag[row]!);
     const word = stream.fold[row]!;
     counts[word * width + use]!++;
-    const known = lemmas[use];
-    if (known === undefined) continue;
-    const lemma = stream.lemma[row]!;
-    const earlier = known.get(word);
-    // A word of two lemmas keeps the one that comes first by code units, whichever was read first.
-    if (earlier === undefined || (earlier !== lemma && vocabulary.textOf(lemma) < vocabulary.textOf(earlier))) {
-      known.set(word, lemma);
-    }
   }
   const count = (word: number, use: WordUse): number => counts[word * width + WORD_USES.indexOf(use)]!;
   return {
@@ -56,6 +45,5 @@ export function countWordUses(corpus: Corpus): WordUses {
         1,
         WORD_USES.reduce((sum, each) => sum + count(word, each), 0),
       ),
-    lemma: (word, use) => lemmas[use === 'noun' ? 0 : 1]!.get(word) ?? word,
   };
 }
