@@ -1,10 +1,10 @@
 // From a folder or from texts to the questions that are asked, through the engine that the product runs.
+import { compareCodeUnits } from '../../server/src/base/order.js';
 import { finish } from '../../server/src/base/work.js';
 import type { Corpus } from '../../server/src/corpus/corpus.js';
 import { Engine } from '../../server/src/engine/engine.js';
 import { Profiles, factsOf } from '../../server/src/engine/factsOf.js';
 import type { DocumentFacts } from '../../server/src/facts/documentFacts.js';
-import { DEFAULT_KINDS } from '../../server/src/mining/question.js';
 import type { Question } from '../../server/src/mining/question.js';
 import { findFiles, readDocument } from '../../server/src/node/files.js';
 import type { SourceText } from '../../server/src/text/sourceText.js';
@@ -19,8 +19,10 @@ export interface Asked {
   readonly mined: readonly Question[];
   /** The questions of the default kinds above the default threshold, in the order they are asked. */
   readonly byDefault: readonly Question[];
-  /** The same with the look-alikes among them. */
+  /** The same and every look-alike that was mined, whatever its confidence, in one order of worth. */
   readonly withLookAlikes: readonly Question[];
+  /** Look-alikes below the default threshold: those who ask for the kind see them only if they lower it. */
+  readonly hiddenLookAlikes: number;
   /** Processor time in seconds, on one thread. */
   readonly readingSeconds: number;
   readonly miningSeconds: number;
@@ -53,12 +55,16 @@ export function ask(
   const snapshot = finish(engine.settle());
   const miningSeconds = secondsSince(start) - readingSeconds;
   const { relations } = snapshot;
+  const byDefault = snapshot.agendaAt('').open;
+  const lookAlikes = relations.questions.filter(({ kind }) => kind === 'look-alike');
+  const shown = snapshot.asking(['look-alike']).agendaAt('').open.length;
   return {
     corpus: relations.languages.find(({ language }) => language === 'en')?.corpus,
     ...relations.size,
     mined: relations.questions,
-    byDefault: snapshot.agendaAt('').open,
-    withLookAlikes: snapshot.asking([...DEFAULT_KINDS, 'look-alike']).agendaAt('').open,
+    byDefault,
+    withLookAlikes: [...byDefault, ...lookAlikes].sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id)),
+    hiddenLookAlikes: lookAlikes.length - shown,
     readingSeconds,
     miningSeconds,
   };

@@ -24,6 +24,7 @@ export async function evaluateSet(set: GoldSet): Promise<SetResult | SkippedSet>
     ...{ readingSeconds, miningSeconds, peakMegabytes },
     questions: asked.byDefault.map(inShort),
     lookAlikes: lookAlikes.map(inShort),
+    hiddenLookAlikes: asked.hiddenLookAlikes,
     pairs: fatesOf(set, asked, createFunnel(asked)),
     negatives: set.negatives.length,
     negativesAsked: negativesAsked(set, asked),

@@ -7,6 +7,10 @@ import { mustStayApart } from '../../server/src/lexicon/opposites.js';
 import { singularOf } from '../../server/src/lexicon/plurals.js';
 import { termKey } from '../../server/src/lexicon/termKey.js';
 import { findDefinitions } from '../../server/src/mining/abbreviations/definitions.js';
+import { groupDefinitions } from '../../server/src/mining/abbreviations/explained.js';
+import type { Explained } from '../../server/src/mining/abbreviations/explained.js';
+import { formsOfLong, formsOfShort } from '../../server/src/mining/abbreviations/longForms.js';
+import { freeUses, usesOf as formUses } from '../../server/src/mining/abbreviations/shortAndLong.js';
 import { lexicalLink } from '../../server/src/mining/synonyms/links.js';
 import { segment } from '../../server/src/mining/synonyms/segment.js';
 import { findNounTerms } from '../../server/src/mining/synonyms/terms.js';
@@ -39,33 +43,50 @@ export const STAGES = {
 } as const;
 export type Stage = keyof typeof STAGES;
 
+/** A stage, and what was seen there: counts, the form that is no term, why a pair is refused. */
+export interface Loss {
+  readonly stage: Stage;
+  readonly detail?: string;
+}
+
 /** Fewest uses outside longer terms below which a noun term counts as swallowed. */
 const FEWEST_OUTSIDE = 3;
 
 /** Says of a pair that the default kinds miss where it was lost. Heavy parts are made when first needed. */
-export function createFunnel(asked: Asked): (pair: GoldPair) => Stage {
+export function createFunnel(asked: Asked): (pair: GoldPair) => Loss {
   const { corpus } = asked;
-  if (corpus === undefined) return () => 'not used';
+  if (corpus === undefined) return () => ({ stage: 'not used' });
   const terms = once(() => readTerms(corpus));
-  const definitions = once(() => findDefinitions(corpus));
+  const explained = once(() => groupDefinitions(findDefinitions(corpus)));
   return ({ a, b, kind }) => {
-    const uses = Math.min(usesOf(corpus, a), usesOf(corpus, b));
-    if (uses === 0) return 'not used';
-    if (uses < FEWEST_USES) return 'rare';
+    const uses = [usesOf(corpus, a), usesOf(corpus, b)];
+    const detail = `${uses[0]!} and ${uses[1]!} uses counted`;
+    if (Math.min(...uses) < FEWEST_USES) return { stage: Math.min(...uses) === 0 ? 'not used' : 'rare', detail };
     const hyphens = hyphensOf(kind);
     const mined = asked.mined.filter((question) => question.kind !== 'look-alike');
-    if (placeAsked(mined, a, b, hyphens) > 0) return 'threshold';
-    if (placeAsked(asked.withLookAlikes, a, b, hyphens) > 0) return 'look-alike';
-    if (kind === 'abbreviation') {
-      const keys = [nounKey(a, 'open'), nounKey(b, 'open')];
-      const explained = definitions().some(
-        ({ short, longKey }) => keys.includes(nounKey(short, 'open')) && keys.includes(nounKey(longKey, 'open')),
-      );
-      if (explained) return 'explained';
-      return clippedSide(a.toLowerCase(), b.toLowerCase()) === undefined ? 'not linked' : 'judged';
-    }
-    if (kind === 'spelling' || kind === 'hyphenation') return termKey(a) === termKey(b) ? 'judged' : 'other key';
-    return synonymStage(terms(), a, b);
+    if (placeAsked(mined, a, b, hyphens) > 0) return { stage: 'threshold' };
+    if (placeAsked(asked.withLookAlikes, a, b, hyphens) > 0) return { stage: 'look-alike' };
+    if (kind === 'abbreviation') return abbreviationLoss(corpus, explained(), a, b);
+    if (kind === 'spelling' || kind === 'hyphenation')
+      return { stage: termKey(a) === termKey(b) ? 'judged' : 'other key', detail };
+    return synonymLoss(terms(), a, b);
+  };
+}
+
+function abbreviationLoss(corpus: Corpus, explained: readonly Explained[], a: string, b: string): Loss {
+  const keys = [nounKey(a, 'open'), nounKey(b, 'open')];
+  const same = explained.find(({ short }) => keys.includes(nounKey(short, 'open')));
+  const expansion = same?.expansions.find(({ words }) => keys.includes(nounKey(words.join(' '), 'open')));
+  if (same === undefined || expansion === undefined)
+    return { stage: clippedSide(a.toLowerCase(), b.toLowerCase()) === undefined ? 'not linked' : 'judged' };
+  const long = formUses(formsOfLong(corpus, expansion.words));
+  const free = freeUses(corpus, long, formUses(formsOfShort(corpus, same.short)), expansion);
+  const others = same.expansions.length - 1;
+  return {
+    stage: 'explained',
+    detail:
+      `${expansion.definitions.length} explanations; ${free.all.length} of ${long.length} long forms free, ` +
+      `${free.onItsPages.length} on pages with the short form${others > 0 ? `; ${others} other expansions` : ''}`,
   };
 }
 
@@ -88,21 +109,23 @@ function readTerms(corpus: Corpus): Terms {
   return { outside, verbs };
 }
 
-function synonymStage({ outside, verbs }: Terms, a: string, b: string): Stage {
+function synonymLoss({ outside, verbs }: Terms, a: string, b: string): Loss {
   const nouns = [a, b].map((form) => outside.get(nounKey(form, 'open')));
   const areVerbs = [a, b].map((form) => verbs.has(verbKey(form, 'open')));
   const bothNouns = nouns.every((count) => count !== undefined);
   const bothVerbs = areVerbs.every(Boolean);
   if (!bothNouns && !bothVerbs) {
-    const known = nouns.every((count, index) => count !== undefined || areVerbs[index] === true);
-    return known ? 'parts of speech' : 'no term';
+    const unknown = [a, b].filter((_, index) => nouns[index] === undefined && areVerbs[index] === false);
+    return unknown.length === 0 ? { stage: 'parts of speech' } : { stage: 'no term', detail: unknown.join(', ') };
   }
-  if (!bothVerbs && nouns.some((count) => count! < FEWEST_OUTSIDE)) return 'swallowed';
-  if (mustStayApart(a, b) !== undefined) return 'refused';
+  if (!bothVerbs && nouns.some((count) => count! < FEWEST_OUTSIDE))
+    return { stage: 'swallowed', detail: `${nouns.join(' and ')} uses outside longer terms` };
+  const apart = mustStayApart(a, b);
+  if (apart !== undefined) return { stage: 'refused', detail: apart.detail };
   const linked =
     (bothNouns && lexicalLink(singularPhrase(a), singularPhrase(b), 'noun') !== undefined) ||
     (bothVerbs && lexicalLink(verbKey(a, 'open'), verbKey(b, 'open'), 'verb') !== undefined);
-  return linked ? 'weak in use' : 'no link';
+  return { stage: linked ? 'weak in use' : 'no link' };
 }
 
 function singularPhrase(term: string): string {

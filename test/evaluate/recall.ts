@@ -1,7 +1,7 @@
 // Which real decisions are asked about, at what place; and which terms that are kept apart are asked about as one.
 import type { Question } from '../../server/src/mining/question.js';
 import type { Asked } from './asked.js';
-import type { Stage } from './funnel.js';
+import type { Loss, Stage } from './funnel.js';
 import { PAIR_KINDS } from './gold.js';
 import type { GoldNegative, GoldPair, GoldSet, PairKind } from './gold.js';
 import { placeAsked } from './match.js';
@@ -17,6 +17,7 @@ export interface PairFate extends GoldPair {
   readonly question?: string;
   /** Where it was lost, for a pair that the default kinds do not ask about. */
   readonly stage?: Stage;
+  readonly detail?: string;
 }
 
 /** A pair that must not be asked about and is. */
@@ -26,11 +27,11 @@ export interface NegativeAsked extends GoldNegative {
   readonly question: string;
 }
 
-/** Looks up every positive pair of a set. `stageOf` is asked for those that the default kinds miss. */
-export function fatesOf(set: GoldSet, asked: Asked, stageOf: (pair: GoldPair) => Stage): PairFate[] {
+/** Looks up every positive pair of a set. `lossOf` is asked for those that the default kinds miss. */
+export function fatesOf(set: GoldSet, asked: Asked, lossOf: (pair: GoldPair) => Loss): PairFate[] {
   return set.positives.map((pair) => {
     const places = placesOf(asked, pair.a, pair.b, hyphensOf(pair.kind));
-    return { ...pair, ...places, ...(places.place === 0 && { stage: stageOf(pair) }) };
+    return { ...pair, ...places, ...(places.place === 0 && lossOf(pair)) };
   });
 }
 

@@ -28,7 +28,9 @@ export interface SetResult {
   readonly peakMegabytes: number;
   /** Questions of the default kinds above the default threshold, in order. */
   readonly questions: readonly AskedQuestion[];
+  /** All look-alikes that were mined, and how many of them are below the default threshold. */
   readonly lookAlikes: readonly AskedQuestion[];
+  readonly hiddenLookAlikes: number;
   readonly pairs: readonly PairFate[];
   readonly negatives: number;
   readonly negativesAsked: readonly NegativeAsked[];

@@ -33,6 +33,8 @@ function showSets(sets: readonly SetResult[]): string[] {
   };
   const sum = (figure: (set: SetResult) => number): number => sets.reduce((total, set) => total + figure(set), 0);
   const whole = { words: sum(({ words }) => words), questions: sum(({ questions }) => questions.length) };
+  const hidden = sum(({ hiddenLookAlikes }) => hiddenLookAlikes);
+  const lookAlikes = sum((set) => set.lookAlikes.length);
   return [
     '',
     'Sets (* read as plain text)',
@@ -55,6 +57,7 @@ function showSets(sets: readonly SetResult[]): string[] {
       ...sets.map((set) => [set.name, ...kinds.map((kind) => load(set, kind))]),
     ]),
     `all sets together: ${((whole.questions / whole.words) * 1e5).toFixed(1)} per 100,000 words`,
+    `look-alikes below the default threshold, so not shown even on request: ${hidden} of ${lookAlikes}`,
   ];
 }
 
@@ -71,7 +74,7 @@ export function recallGroups(pairs: readonly PairFate[]): { title: string; rows:
 
 function showRecall(pairs: readonly PairFate[]): string[] {
   const header = ['kind', 'pairs', ...CUTS.map((cut) => (Number.isFinite(cut) ? `first ${cut}` : 'at all')), 'recall'];
-  const lines = ['', 'Recall of real decisions: default kinds, and after the stroke with look-alikes'];
+  const lines = ['', 'Recall of real decisions: default kinds, and after the stroke with all look-alikes'];
   for (const { title, rows } of recallGroups(pairs)) {
     if (rows.length === 0) continue;
     lines.push(`- ${GROUPS[title]!}`);
@@ -87,6 +90,14 @@ function showRecall(pairs: readonly PairFate[]): string[] {
       ]),
     );
   }
+  const short = pairs.filter(({ kind, flags }) => kind === 'abbreviation' && flags.length === 0);
+  const explained = short.filter(({ stage }) => stage === 'explained').length;
+  const found = short.filter(({ place }) => place > 0).length;
+  if (explained > 0)
+    lines.push(
+      `abbreviations, plain: ${explained} of ${short.length} are explained in the documents and not asked; ` +
+        `of the rest ${found} of ${short.length - explained} are found (${share(found, short.length - explained)})`,
+    );
   return lines;
 }
 
@@ -105,8 +116,10 @@ function showMisses(sets: readonly SetResult[]): string[] {
     const here = missed.filter((pair) => pair.stage === stage);
     if (here.length === 0) continue;
     lines.push(`${String(here.length).padStart(4)} ${stage}: ${STAGES[stage]}`);
-    for (const { name, kind, a, b, countA, countB } of here)
-      lines.push(`       ${name}, ${kind}: ${a} ${countA} | ${b} ${countB}`);
+    for (const { name, kind, a, b, countA, countB, detail } of here)
+      lines.push(
+        `       ${name}, ${kind}: ${a} ${countA} | ${b} ${countB}${detail === undefined ? '' : ` (${detail})`}`,
+      );
   }
   return lines;
 }

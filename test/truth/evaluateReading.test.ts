@@ -128,7 +128,7 @@ describe('comparing evaluations', () => {
     const questions = ids.map((id) => ({ id, kind: 'variant' as const, terms: [] }));
     const set = { name: 'one', format: 'markdown', asPlainText: false, documents: 1, leftOut: 0, words: 1000 };
     const cost = { readingSeconds: 1, miningSeconds: 1, peakMegabytes: 100 };
-    const rest = { lookAlikes: [], pairs: [], negatives: 0, negativesAsked: [], agreement };
+    const rest = { lookAlikes: [], hiddenLookAlikes: 0, pairs: [], negatives: 0, negativesAsked: [], agreement };
     return { sets: [{ ...set, ...cost, ...rest, questions, agreementOfLookAlikes: agreement }], skipped: [] };
   };
 
