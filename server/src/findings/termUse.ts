@@ -48,14 +48,16 @@ export function useOfMatch(
   if (!standsAlone(text, start, end, checked.text) || isMention(text, start, end)) return undefined;
   const surface = text.slice(start, end);
   if (term.caseSensitive && hasForcedCapital(content, start, surface, zones)) return undefined;
-  if (!isUsedAs(text, start, end, form, term, tagAt)) return undefined;
   if (term.objects && !term.objects.isObjectOf(text, start, end, form)) return undefined;
+  if (!isUsedAs(text, start, end, form, term, tagAt)) return undefined;
   if (terms.overlapsTermInUse(text, start, end)) return undefined;
   return { term, start, end, surface, form, zones };
 }
 
 function isUsedAs(text: string, start: number, end: number, form: Form, term: CompiledTerm, tagAt?: TagAt): boolean {
-  if (term.as === 'verb') return useAt(text, start, end, form, tagAt) === 'verb';
+  // With an object that the decision names behind it, a particle is no preposition: "turn on the light".
+  const governs = term.objects !== undefined;
+  if (term.as === 'verb') return useAt(text, start, end, form, tagAt, governs) === 'verb';
   if (term.as === 'none' || /\s/.test(term.checked.text)) return true;
   const use = useAt(text, start, end, form, tagAt);
   if (term.ambiguous) return use === 'noun';

@@ -22,13 +22,16 @@ export type Use = 'noun' | 'verb' | 'unknown';
 /** Particles that are as often the preposition of a following noun phrase: *check the log in the console*. */
 const PREPOSITION_LIKE = /\s(?:in|on|over|off|through|down|by|to)$/i;
 
-/** How the word or particle verb at `[start, end)` is used. */
-export function useAt(text: string, start: number, end: number, form: Form, tagAt?: TagAt): Use {
+/**
+ * How the word or particle verb at `[start, end)` is used.
+ * @param governs true where its object is known to follow, so that a particle before a noun phrase is in no doubt
+ */
+export function useAt(text: string, start: number, end: number, form: Form, tagAt?: TagAt, governs = false): Use {
   const left = wordBefore(text, start)?.word;
   const right = wordAfter(text, end)?.word;
   const surface = text.slice(start, end);
   // "log in the console": particle or preposition, only a reader can say.
-  if (PREPOSITION_LIKE.test(surface) && right !== undefined && OBJECT_STARTS.has(right)) return 'unknown';
+  if (!governs && PREPOSITION_LIKE.test(surface) && right !== undefined && OBJECT_STARTS.has(right)) return 'unknown';
   const rule = byNeighbours(text, start, form, left, right);
   if (rule !== 'unknown') return rule;
   const tag = tagAt?.(start);

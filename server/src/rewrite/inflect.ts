@@ -30,7 +30,8 @@ export function inflectsAs(text: string, partOfSpeech?: PartOfSpeech): 'noun' | 
 
 /** The range of the head word in a term: a verb's first word; a noun's last, or the one before its preposition (*point of sale*). */
 export function headOf(text: string, as: 'noun' | 'verb' | 'none'): { start: number; end: number } {
-  const words = [...text.matchAll(/[^\s-]+/g)].map((match) => ({
+  // A single letter and its hyphen belong to the word behind them: e-mails, X-rays.
+  const words = [...text.matchAll(/(?:(?<![^\s-])\p{L}-)?[^\s-]+/gu)].map((match) => ({
     start: match.index,
     end: match.index + match[0].length,
   }));

@@ -150,6 +150,26 @@ describe('verbs and nouns', () => {
   });
 });
 
+describe('a particle verb whose objects are named', () => {
+  const objects = { partOfSpeech: 'verb', withObjects: ['light', 'breaker'] } as const;
+  const switching = new TermSet([
+    { id: 't1', text: 'switch on', status: 'preferred', conceptId: 'on', ...objects },
+    { id: 't2', text: 'turn on', status: 'deprecated', preferred: 'switch on', conceptId: 'on', ...objects },
+  ]);
+  const surfaces = (text: string): string[] => checkBlock(content(text), switching).map(({ surface }) => surface);
+
+  it.each([
+    ['Turn on the navigation light.', ['Turn on']],
+    ['The crew turns on the main breaker.', ['turns on']],
+    ['When you have turned on the lights, wait.', ['turned on']],
+  ])('is found before one of them: %j', (text, expected) => expect(surfaces(text)).toEqual(expected));
+
+  it.each(['Turn on the spot.', 'The vessel must turn on the tide.', 'a turn on the light'])(
+    'is left alone elsewhere: %j',
+    (text) => expect(surfaces(text)).toEqual([]),
+  );
+});
+
 describe('case alone', () => {
   it.each([
     ['Use Javascript here.', 'paragraph', ['Javascript']],

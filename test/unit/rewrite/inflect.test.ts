@@ -164,6 +164,7 @@ describe('terms', () => {
       'logging in',
     ]);
     expect(inflectTerm('point of sale', 'plural', 'noun')).toBe('points of sale');
+    expect(inflectTerm('e-mail', 'plural', 'noun')).toBe('e-mails');
     expect(inflectTerm('Log in', 'gerund', 'verb')).toBe('Logging in');
     expect(inflectTerm('software', 'plural', 'noun')).toBeUndefined();
   });
