@@ -1,12 +1,24 @@
 // A development runner: reads a folder of documents, asks the form questions and prints them with their sentences.
 import { readdirSync, readFileSync, existsSync } from 'node:fs';
-import { basename, join } from 'node:path';
+import { basename, join, resolve } from 'node:path';
 import { finish } from '../../server/src/base/work.js';
 import { Corpus } from '../../server/src/corpus/corpus.js';
 import { factsOf, Profiles } from '../../server/src/engine/factsOf.js';
+import { askAbbreviations } from '../../server/src/mining/abbreviations/ask.js';
 import { askVariants } from '../../server/src/mining/variants/ask.js';
 import type { Question } from '../../server/src/mining/question.js';
 import { singularKey } from '../../server/src/mining/wording.js';
+
+const FLAGS = ['residual', 'pos_dependent', 'sense_limited', 'function_phrase'] as const;
+
+/** A pair that maintainers unified, with its counts in prose. */
+interface Positive extends Partial<Record<(typeof FLAGS)[number], boolean>> {
+  readonly a: string;
+  readonly b: string;
+  readonly count_a: number;
+  readonly count_b: number;
+  readonly kind: string;
+}
 
 const folder = process.argv[2]!;
 const show = Number(process.argv[3] ?? 50);
@@ -33,32 +45,34 @@ const cpu = (): number => {
 const before = cpu();
 const variants = finish(askVariants(corpus));
 const after = cpu();
-const questions: Question[] = [...variants];
+const abbreviations = finish(askAbbreviations(corpus));
+const last = cpu();
+const questions: Question[] = [...variants, ...abbreviations];
 console.error(
-  `${files.length} files, ${words} words, reading ${before.toFixed(1)} s, asking ${(after - before).toFixed(2)} s`,
+  `${files.length} files, ${words} words, reading ${before.toFixed(1)} s, variants ${(after - before).toFixed(2)} s, abbreviations ${(last - after).toFixed(2)} s`,
 );
 for (const kind of ['variant', 'abbreviation', 'ambiguous-abbreviation']) {
   const list = questions.filter((q) => q.kind === kind);
   console.log(`\n## ${kind}: ${list.length} (${((list.length / words) * 1e5).toFixed(1)} per 100k)`);
   list.slice(0, show).forEach((q, i) => {
     console.log(
-      `${i + 1}. ${q.terms.map((t) => `${t.text} ${t.uses}/${t.documents}d [${t.forms.map((f) => f.text + ' ' + f.uses).join(', ')}]`).join('  |  ')}  conf ${q.confidence.toFixed(2)} worth ${q.worth.toFixed(1)}`,
+      `${i + 1}. ${q.terms.map((t) => `${t.text} ${t.uses}/${t.documents}d [${t.forms.map((f) => `${f.text} ${f.uses}`).join(', ')}]`).join('  |  ')}  conf ${q.confidence.toFixed(2)} worth ${q.worth.toFixed(1)}`,
     );
-    for (const r of q.reasons) console.log(`      (${r.kind}) ${r.text}`);
+    for (const r of q.reasons) console.log(`      (${r.kind}) ${r.text} = ${r.value}`);
     for (const p of q.places) {
       const d = corpus.documents[p.document]!;
       const words = d.facts;
       let s = '';
       for (let k = Math.max(0, p.firstToken - 7); k <= Math.min(words.word.length - 1, p.lastToken + 7); k++) {
         const w = words.words[words.word[k]!]!;
-        s += (k === p.firstToken ? ' [[' : ' ') + w + (k === p.lastToken ? ']]' : '');
+        s += `${k === p.firstToken ? ' [[' : ' '}${w}${k === p.lastToken ? ']]' : ''}`;
       }
       console.log(`      ${p.term}: ${s}`);
     }
   });
 }
 // recall
-const goldFile = '/work/shared/data/gold-dev.json';
+const goldFile = resolve('../shared/data/gold-dev.json');
 if (existsSync(goldFile)) {
   const norm = (s: string): string =>
     s
@@ -68,7 +82,7 @@ if (existsSync(goldFile)) {
       .join(' ');
   const gold = JSON.parse(readFileSync(goldFile, 'utf8')) as {
     folder: string;
-    positives: Record<string, unknown>[];
+    positives: Positive[];
     negatives: { a: string; b: string }[];
   }[];
   const set = gold.find((g) => folder.includes(basename(g.folder)));
@@ -84,20 +98,15 @@ if (existsSync(goldFile)) {
     });
   const tally: Record<string, [number, number]> = {};
   for (const p of set?.positives ?? []) {
-    const kind = p['kind'] as string;
-    if (
-      !['spelling', 'hyphenation', 'abbreviation'].includes(kind) ||
-      (p['count_a'] as number) < 5 ||
-      (p['count_b'] as number) < 5
-    )
-      continue;
-    const flagged = ['residual', 'pos_dependent', 'sense_limited', 'function_phrase'].some((f) => p[f] === true);
-    const at = find(p['a'] as string, p['b'] as string);
-    const t = (tally[kind + (flagged ? ' flagged' : '')] ??= [0, 0]);
+    const kind = p.kind;
+    if (!['spelling', 'hyphenation', 'abbreviation'].includes(kind) || p.count_a < 5 || p.count_b < 5) continue;
+    const flagged = FLAGS.some((flag) => p[flag] === true);
+    const at = find(p.a, p.b);
+    const t = (tally[`${kind}${flagged ? ' flagged' : ''}`] ??= [0, 0]);
     t[1]++;
     if (at >= 0) t[0]++;
     console.log(
-      `  ${at >= 0 ? '+' : '-'} ${kind}${flagged ? ' flagged' : ''} ${p['a']} | ${p['b']} ${p['count_a']} ${p['count_b']} ${at >= 0 ? questions[at]!.id : ''}`,
+      `  ${at >= 0 ? '+' : '-'} ${kind}${flagged ? ' flagged' : ''} ${p.a} | ${p.b} ${p.count_a} ${p.count_b} ${at >= 0 ? questions[at]!.id : ''}`,
     );
   }
   console.log(JSON.stringify(tally));

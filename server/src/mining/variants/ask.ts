@@ -9,6 +9,7 @@ import { joinFamilies } from './families.js';
 import type { Member } from './families.js';
 import { judge } from './judge.js';
 import type { Mix } from './judge.js';
+import { Mentions } from './mentions.js';
 import { makeQuestion } from './question.js';
 import { askPhrases } from './phrases.js';
 import { SlotReader } from './slots.js';
@@ -20,13 +21,13 @@ const STRIDE = 200;
 
 /** All questions about ways of writing, the worthiest first. */
 export function* askVariants(corpus: Corpus): Work<Question[]> {
-  const reader = new SlotReader(corpus);
+  const readers = { slots: new SlotReader(corpus), mentions: new Mentions(corpus) };
   const candidates = findCandidates(corpus);
   yield;
   const members: Member[] = [];
   for (let i = 0; i < candidates.length; i++) {
     if (i % STRIDE === 0) yield;
-    const member = largestMix(stylesOf(corpus, reader, candidates[i]!));
+    const member = largestMix(stylesOf(corpus, readers, candidates[i]!));
     if (member !== undefined) members.push(member);
   }
   yield;
@@ -34,7 +35,7 @@ export function* askVariants(corpus: Corpus): Work<Question[]> {
   const settled = new Set(
     questions.flatMap(({ terms }) => terms.flatMap(({ forms }) => forms.map(({ text }) => text.toLowerCase()))),
   );
-  questions.push(...(yield* askCapitals(corpus, settled)), ...(yield* askPhrases(corpus, settled)));
+  questions.push(...(yield* askCapitals(corpus, readers.mentions, settled)), ...(yield* askPhrases(corpus, settled)));
   return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }
 

@@ -1,4 +1,5 @@
 // Candidates: ways of writing that share one key, found among the words of the corpus and its n-grams.
+import { compareCodeUnits } from '../../base/order.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { singularOf } from '../../lexicon/plurals.js';
 import { spellingKey } from '../../lexicon/spelling.js';
@@ -58,7 +59,8 @@ export function findCandidates(corpus: Corpus): Candidate[] {
         return makeForm(corpus, key, 'open', folds, parts);
       }),
     ];
-    if (new Set(forms.map((form) => form.text)).size > 1) candidates.push({ key, forms });
+    forms.sort((a, b) => compareCodeUnits(a.text, b.text));
+    if (forms[0]!.text !== forms[forms.length - 1]!.text) candidates.push({ key, forms });
   }
   return candidates;
 }

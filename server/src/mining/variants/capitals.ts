@@ -7,7 +7,7 @@ import { countDocuments, examplePlaces, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
 import type { Question } from '../question.js';
 import { byUses, makeTerm, numberForms, pages, singularKey, times } from '../wording.js';
-import { isMention } from './styles.js';
+import type { Mentions } from './mentions.js';
 
 const CONFIDENCE = { inner: 0.9, first: 0.85 } as const;
 
@@ -33,7 +33,7 @@ interface Way {
  * Questions about capitals. Their order is not defined.
  * @param settled lower-case texts of terms that other questions are about already
  */
-export function* askCapitals(corpus: Corpus, settled: ReadonlySet<string>): Work<Question[]> {
+export function* askCapitals(corpus: Corpus, mentions: Mentions, settled: ReadonlySet<string>): Work<Question[]> {
   const { vocabulary } = corpus;
   const questions: Question[] = [];
   const asked = new Set<string>();
@@ -44,7 +44,7 @@ export function* askCapitals(corpus: Corpus, settled: ReadonlySet<string>): Work
     const key = singularKey(vocabulary.textOf(fold));
     if (asked.has(key) || settled.has(key) || settled.has(vocabulary.textOf(fold))) continue;
     asked.add(key);
-    const question = askWord(corpus, key);
+    const question = askWord(corpus, mentions, key);
     if (question !== undefined) questions.push(question);
   }
   return questions;
@@ -58,8 +58,8 @@ function mayBeName(corpus: Corpus, id: number, fold: number): boolean {
   return lower >= LEAST.lower.uses || corpus.usesOfWord(id) + lower < total;
 }
 
-function askWord(corpus: Corpus, key: string): Question | undefined {
-  const ways = waysOf(corpus, key);
+function askWord(corpus: Corpus, mentions: Mentions, key: string): Question | undefined {
+  const ways = waysOf(corpus, mentions, key);
   const lead = ways[0];
   if (ways.length < 2 || lead === undefined || lead.text.length < 2 || !/^[\p{L}\p{N}]+$/u.test(lead.text))
     return undefined;
@@ -71,14 +71,14 @@ function askWord(corpus: Corpus, key: string): Question | undefined {
 }
 
 /** The spellings of a word, singular and plural together, inside sentences of running text, most used first. */
-function waysOf(corpus: Corpus, key: string): Way[] {
+function waysOf(corpus: Corpus, mentions: Mentions, key: string): Way[] {
   const { stream, vocabulary } = corpus;
   const ways = new Map<string, Use[]>();
   for (const form of numberForms(key)) {
     const fold = vocabulary.find(form);
     if (fold === undefined) continue;
     for (const row of stream.rowsOf(fold)) {
-      if (!isInsideSentence(stream, row) || isMention(corpus, row, 1)) continue;
+      if (!isInsideSentence(stream, row) || mentions.isMention(row, 1)) continue;
       const spelling = vocabulary.textOf(stream.spelling[row]!);
       const text = form === `${key}s` && spelling.endsWith('s') ? spelling.slice(0, -1) : spelling;
       const uses = ways.get(text);

@@ -1,4 +1,5 @@
 // Whether two ways of writing are a mix to ask about: how often they stand in the same slot, and what speaks against it.
+import { isVerbNounPair } from '../../lexicon/verbNounPairs.js';
 import { SLOTS } from './slots.js';
 import type { Slot } from './slots.js';
 import type { Style } from './styles.js';
@@ -63,6 +64,7 @@ function judgeChunks(a: Style, b: Style): Mix | undefined {
 function judgeOpen(chunk: Style, open: Style): Mix | undefined {
   const parts = open.forms[0]!.parts;
   if (parts.some((part, i) => i > 0 && PARTICLES.has(part)) || PARTICLES.has(parts[0]!)) return undefined;
+  if (isVerbNounPair(open.text, chunk.text)) return undefined;
   if (isLowerCamel(chunk) || isShouted(chunk)) return undefined;
   if (namesOf(open) > 0.6 && namesOf(chunk) < 0.4) return undefined;
   if (isCamel(chunk)) return judgeCamel(chunk, open);

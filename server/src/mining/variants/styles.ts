@@ -3,9 +3,10 @@ import type { Corpus } from '../../corpus/corpus.js';
 import type { TokenStream } from '../../corpus/stream.js';
 import { FactFlag } from '../../facts/flags.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, followsOn, isInsideSentence } from '../places.js';
+import { followsOn, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
 import type { Candidate, Form, Shape } from './candidates.js';
+import type { Mentions } from './mentions.js';
 import type { Slot, SlotReader } from './slots.js';
 
 /** A use and the slot it stands in. */
@@ -44,8 +45,14 @@ type Cases = Record<
   number
 >;
 
+/** What tells about single uses. */
+export interface Readers {
+  readonly slots: SlotReader;
+  readonly mentions: Mentions;
+}
+
 /** The styles of a candidate. Where only the plural differs (indexes, indices), each plural is a style. */
-export function stylesOf(corpus: Corpus, slots: SlotReader, candidate: Candidate): Style[] {
+export function stylesOf(corpus: Corpus, readers: Readers, candidate: Candidate): Style[] {
   const byStyle = new Map<string, Form[]>();
   for (const form of candidate.forms) {
     const list = byStyle.get(form.style);
@@ -56,9 +63,9 @@ export function stylesOf(corpus: Corpus, slots: SlotReader, candidate: Candidate
     const plurals = candidate.forms.filter((form) => form.plural);
     return plurals.length < 2 || !beginAlike(plurals)
       ? []
-      : plurals.map((form) => makeStyle(corpus, slots, form.text, [form]));
+      : plurals.map((form) => makeStyle(corpus, readers, form.text, [form]));
   }
-  return [...byStyle].map(([text, forms]) => makeStyle(corpus, slots, text, forms));
+  return [...byStyle].map(([text, forms]) => makeStyle(corpus, readers, text, forms));
 }
 
 /** People and persons are two words, indexes and indices one. */
@@ -66,15 +73,15 @@ function beginAlike(forms: readonly Form[]): boolean {
   return new Set(forms.map((form) => form.text.slice(0, 3))).size === 1;
 }
 
-function makeStyle(corpus: Corpus, reader: SlotReader, text: string, forms: readonly Form[]): Style {
+function makeStyle(corpus: Corpus, readers: Readers, text: string, forms: readonly Form[]): Style {
   const slots: Record<Slot, number> = { attributive: 0, predicate: 0, noun: 0, verb: 0, unclear: 0, lone: 0 };
   const uses: SlottedUse[] = [];
   const cases: Cases = { inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0, afterName: 0 };
   for (const form of forms) {
     for (const row of form.rows) {
       const length = form.folds.length;
-      if (isMention(corpus, row, length)) continue;
-      const found = reader.slotOf(row, length);
+      if (readers.mentions.isMention(row, length)) continue;
+      const found = readers.slots.slotOf(row, length);
       // An open plural before a noun is not its modifier: "two elements follow".
       const slot = found === 'attributive' && form.shape === 'open' && form.plural ? 'unclear' : found;
       slots[slot]++;
@@ -108,40 +115,4 @@ function countCase(corpus: Corpus, row: number, length: number, cases: Cases): v
 function isContent(stream: TokenStream, row: number): boolean {
   const flags = stream.flags[row]!;
   return (flags & TokenFlag.word) !== 0 && (flags & FactFlag.functionWord) === 0;
-}
-
-/** True where quotation marks hold the form and nothing else: it is spoken of, or a value of a field. */
-function isQuoted(corpus: Corpus, row: number, length: number): boolean {
-  const { stream, vocabulary } = corpus;
-  const end = row + length;
-  if (row === firstRowOfBlock(stream, row) || end >= endRowOfBlock(stream, row)) return false;
-  const isMark = (at: number): boolean => /^["'“”‘’«»]/u.test(vocabulary.textOf(stream.spelling[at]!));
-  return isMark(row - 1) && isMark(end);
-}
-
-/** True beside a sign of assignment: a line of code that its document does not mark as such. */
-function isOperand(corpus: Corpus, row: number, length: number): boolean {
-  const { stream, vocabulary } = corpus;
-  const end = row + length;
-  const isSign = (at: number): boolean => /^(?:[:!=+]?=+|[-=]>)$/.test(vocabulary.textOf(stream.spelling[at]!));
-  if (row > firstRowOfBlock(stream, row) && isSign(row - 1)) return true;
-  return end < endRowOfBlock(stream, row) && isSign(end);
-}
-
-/**
- * True where a form is no use as a word: in quotation marks of its own, or with a sign glued to it, as in paths, options
- * and placeholders, where it is part of a larger thing.
- */
-export function isMention(corpus: Corpus, row: number, length: number): boolean {
-  const { stream, vocabulary } = corpus;
-  if (isQuoted(corpus, row, length) || isOperand(corpus, row, length)) return true;
-  const isWord = (at: number): boolean => (stream.flags[at]! & TokenFlag.word) !== 0;
-  if ((stream.flags[row]! & TokenFlag.spaceBefore) === 0 && row > firstRowOfBlock(stream, row)) {
-    if (isWord(row - 1) || !/^[("'“‘[—–,;]$/u.test(vocabulary.textOf(stream.spelling[row - 1]!))) return true;
-  }
-  const end = row + length;
-  if (end < endRowOfBlock(stream, row) && (stream.flags[end]! & TokenFlag.spaceBefore) === 0) {
-    if (isWord(end) || !/^[)"'”’\].,;:!?…—–]/u.test(vocabulary.textOf(stream.spelling[end]!))) return true;
-  }
-  return false;
 }
