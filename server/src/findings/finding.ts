@@ -4,8 +4,7 @@ import type { ZoneSet } from '../prose/zones.js';
 import type { Form } from '../rewrite/inflect.js';
 
 /** Stable names of the rules, as editors and reports show them. */
-export type FindingCode =
-  'deprecated-term' | 'mixed-terms' | 'variant-form' | 'odd-companion' | 'unexplained-abbreviation';
+export type FindingCode = 'deprecated-term' | 'mixed-terms';
 
 /** A decided thing is a warning; an undecided one is a hint and no more. */
 export type Severity = 'hint' | 'information' | 'warning';
