@@ -1,6 +1,5 @@
 // Short forms with their explanations gathered: one short form, one or several expansions.
-import { compareCodeUnits } from '../../base/order.js';
-import type { Use } from '../places.js';
+import { byCountThenText, compareCodeUnits } from '../../base/order.js';
 import type { Definition } from './definitions.js';
 
 /** One thing that a short form is explained to stand for. */
@@ -16,27 +15,30 @@ export interface Explained {
   readonly expansions: readonly Expansion[];
 }
 
-/** Gathers explanations by short form, in order of its code units. */
+/** Gathers explanations by short form, whatever its capitals (IdP, IDP), in order of its code units. */
 export function groupDefinitions(definitions: readonly Definition[]): Explained[] {
   const byShort = new Map<string, Map<string, Definition[]>>();
   for (const definition of definitions) {
-    const byLong = byShort.get(definition.short) ?? new Map<string, Definition[]>();
-    byShort.set(definition.short, byLong);
+    const key = definition.short.toLowerCase();
+    const byLong = byShort.get(key) ?? new Map<string, Definition[]>();
+    byShort.set(key, byLong);
     const list = byLong.get(definition.longKey);
     if (list === undefined) byLong.set(definition.longKey, [definition]);
     else list.push(definition);
   }
   return [...byShort]
     .sort(([a], [b]) => compareCodeUnits(a, b))
-    .map(([short, byLong]) => ({
-      short,
+    .map(([, byLong]) => ({
+      short: commonest([...byLong.values()].flat().map(({ short }) => short)),
       expansions: [...byLong]
         .sort(([a, m], [b, n]) => n.length - m.length || compareCodeUnits(a, b))
         .map(([longKey, list]) => ({ words: longKey.split(' '), definitions: list })),
     }));
 }
 
-/** The uses of the long form inside explanations. */
-export function explainedUses(expansion: Expansion): Use[] {
-  return expansion.definitions.map(({ longRow, longLength }) => ({ row: longRow, length: longLength }));
+/** The text that is there most often, ties by code units. */
+function commonest(texts: readonly string[]): string {
+  const counts = new Map<string, number>();
+  for (const text of texts) counts.set(text, (counts.get(text) ?? 0) + 1);
+  return [...counts].map(([text, count]) => ({ text, count })).sort(byCountThenText)[0]!.text;
 }

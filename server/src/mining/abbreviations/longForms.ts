@@ -40,7 +40,7 @@ export function formsOfLong(corpus: Corpus, words: readonly string[]): FormUses[
     .filter(({ uses }) => uses.length > 0);
 }
 
-/** The uses of a short form written as such, singular and plural: other capitals make other words (IT, it). */
+/** The uses of a short form written as one, singular and plural; in small letters it is another word (IT, it). */
 export function formsOfShort(corpus: Corpus, short: string): FormUses[] {
   const { vocabulary, stream } = corpus;
   const forms: FormUses[] = [];
@@ -50,7 +50,8 @@ export function formsOfShort(corpus: Corpus, short: string): FormUses[] {
     const uses: Use[] = [];
     for (const row of stream.rowsOf(fold)) {
       const spelling = vocabulary.textOf(stream.spelling[row]!);
-      if (spelling === text || shortFormOf(spelling) === short) uses.push({ row, length: 1 });
+      if (spelling === text || shortFormOf(spelling)?.toLowerCase() === short.toLowerCase())
+        uses.push({ row, length: 1 });
     }
     if (uses.length > 0) forms.push({ folds: [fold], uses });
   }

@@ -68,11 +68,12 @@ export function askExplained(
   };
 }
 
-/** Uses that are no explanation, not the first on a page that uses the short form, and in no heading. */
+/** Uses that are no explanation, nor right after a parenthesis, not the first on a page with the short form, in no heading. */
 export function freeUses(corpus: Corpus, long: readonly Use[], short: readonly Use[], expansion: Expansion): FreeUse {
   const { stream } = corpus;
   const explained = new Set(expansion.definitions.map((definition) => definition.longRow));
   const shortPages = new Set(short.map((use) => stream.documentOf(use.row)));
+  const opening = corpus.vocabulary.find('(');
   const introduced = new Set<number>();
   const onItsPages: Use[] = [];
   const all: Use[] = [];
@@ -81,7 +82,7 @@ export function freeUses(corpus: Corpus, long: readonly Use[], short: readonly U
     const page = stream.documentOf(use.row);
     const first = shortPages.has(page) && !introduced.has(page);
     introduced.add(page);
-    if (first || explained.has(use.row)) continue;
+    if (first || explained.has(use.row) || stream.spelling[use.row - 1] === opening) continue;
     all.push(use);
     if (shortPages.has(page)) onItsPages.push(use);
   }
