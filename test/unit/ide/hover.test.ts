@@ -1,0 +1,68 @@
+// The card of a term as a hover: statuses, counts, rivals, definition; and nothing where there is nothing to say.
+import { describe, expect, it } from 'vitest';
+import { finish } from '../../../server/src/base/work.js';
+import { Engine } from '../../../server/src/engine/engine.js';
+import { Profiles } from '../../../server/src/engine/factsOf.js';
+import { hoverAt } from '../../../server/src/ide/hover.js';
+import { PAGES } from '../../support/mixedPages.js';
+
+const root = 'file:///docs/';
+const termbase = `evenword: 1
+concepts:
+  - preferred: access key
+    admitted: [key string]
+    deprecated: [API key]
+    definition: A *secret* string.
+apart:
+  - [hull, mast]
+`;
+const engine = new Engine(new Profiles());
+engine.apply({
+  documents: Object.entries(PAGES).map(([name, text]) => ({
+    uri: root + name,
+    source: { uri: root + name, format: 'markdown', text },
+  })),
+  termbases: [{ uri: `${root}termbase.yaml`, text: termbase }],
+});
+finish(engine.settle());
+
+function hover(page: string, word: string): string | undefined {
+  return hoverAt(engine.snapshot, root + page, PAGES[page]!.indexOf(word) + 1)?.markdown;
+}
+
+describe('the hover', () => {
+  it('says what is preferred, who uses what, and the definition as plain text', () => {
+    expect(hover('connecting.md', 'API key')).toBe(
+      [
+        '**API key** is a deprecated term. Preferred: **access key**.',
+        '',
+        '| Name | Status | Uses | Pages |',
+        '|---|---|--:|--:|',
+        '| access key | preferred | 1 | 1 |',
+        '| key string | admitted | 0 | 0 |',
+        '| API key | deprecated | 2 | 1 |',
+        '',
+        'A \\*secret\\* string.',
+      ].join('\n'),
+    );
+    expect(hover('connecting.md', 'access key')).toMatch(/^\*\*access key\*\* is the preferred term\./);
+  });
+
+  it('asks where nobody has decided, with the reasons', () => {
+    const card = hover('installing.md', 'datalogger')!;
+    expect(card).toMatch(/^\*\*datalogger\*\*: one thing with \*\*data logger\*\*\? Nobody has decided yet\./);
+    expect(card).toMatch(/\| datalogger \| undecided \| \d+ \| \d+ \|/);
+    expect(card).toMatch(/^- written as /m);
+  });
+
+  it('says that a term is kept apart', () => {
+    expect(hover('installing.md', 'hull')).toMatch(/^\*\*hull\*\* is kept apart/);
+  });
+
+  it('is silent on other words, in code and beyond the text', () => {
+    expect(hover('quiet.md', 'archive')).toBeUndefined();
+    expect(hover('connecting.md', '`API')).toBeUndefined();
+    expect(hoverAt(engine.snapshot, `${root}connecting.md`, 1e6)).toBeUndefined();
+    expect(hoverAt(engine.snapshot, `${root}nowhere.md`, 0)).toBeUndefined();
+  });
+});
