@@ -5,9 +5,12 @@ import type { Corpus } from '../../corpus/corpus.js';
 import type { Question } from '../question.js';
 import { askNouns } from './nouns.js';
 import { askVerbs } from './verbs.js';
+import { readUses } from './wordUse.js';
 
 /** Asks about synonymous nouns, verbs with their object, and terms alike in use alone; most worth first. */
 export function* askSynonyms(corpus: Corpus): Work<Question[]> {
-  const questions = [...(yield* askNouns(corpus)), ...(yield* askVerbs(corpus))];
+  const uses = readUses(corpus);
+  yield;
+  const questions = [...(yield* askNouns(corpus, uses)), ...(yield* askVerbs(corpus, uses))];
   return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }

@@ -20,9 +20,9 @@ import { findNounTerms } from './terms.js';
 import { countWordUses } from './wordUse.js';
 
 /** Asks about noun terms of one concept, and about terms that are alike in use alone. */
-export function* askNouns(corpus: Corpus): Work<Question[]> {
-  const terms = yield* findNounTerms(corpus, countWordUses(corpus));
-  const segments = yield* segment(corpus, terms);
+export function* askNouns(corpus: Corpus, uses: Uint8Array): Work<Question[]> {
+  const terms = yield* findNounTerms(corpus, countWordUses(corpus, uses));
+  const segments = yield* segment(corpus, terms, uses);
   const occurrences = indexOccurrences(segments);
   const collector = new PairCollector(terms.length);
   pairByLists(terms, collector);

@@ -53,7 +53,8 @@ export function bestScoreOf(known: Pick<Known, 'evidence' | 'shape' | 'general'>
 function lexicalWeight({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): number {
   const strength = strongest(evidence, ['list', 'dictionary', 'component']);
   if (strength === 0) return shape === 'contained' ? -1.3 : 0;
-  if (shape === 'words') return -0.5 + 1.6 * strength;
+  // A general dictionary calls the terms of a field by one name that the field tells apart (alarm, alert).
+  if (shape === 'words') return -0.5 + 1.6 * strength - (strongest(evidence, ['list']) > 0 ? 0 : 0.45);
   return 0.3 + 1.8 * strength - (shape === 'contained' ? 1.3 : 0);
 }
 

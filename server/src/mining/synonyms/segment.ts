@@ -6,7 +6,6 @@ import type { TokenStream } from '../../corpus/stream.js';
 import { FactFlag } from '../../facts/flags.js';
 import { TokenFlag } from '../../tokens/tokens.js';
 import type { Term } from './terms.js';
-import { useOfTag } from './wordUse.js';
 
 /** The places of terms in a stream: occurrence `i` is term `term[i]` in the rows `[first[i], first[i] + length[i])`. */
 export interface Segments {
@@ -18,8 +17,11 @@ export interface Segments {
   readonly uses: Uint32Array;
 }
 
-/** Cuts a corpus into the given noun terms; occurrences are in order of their rows. */
-export function* segment(corpus: Corpus, terms: readonly Term[]): Work<Segments> {
+/**
+ * Cuts a corpus into the given noun terms; occurrences are in order of their rows.
+ * @param uses the class of each row, by `readUses`
+ */
+export function* segment(corpus: Corpus, terms: readonly Term[], uses: Uint8Array): Work<Segments> {
   const { stream, grams } = corpus;
   const ofWord = new Uint32Array(corpus.vocabulary.size);
   const ofGram = new Uint32Array(grams.size);
@@ -34,7 +36,7 @@ export function* segment(corpus: Corpus, terms: readonly Term[]): Work<Segments>
   const length = new Uint8Array(stream.length);
   let count = 0;
   for (let row = 0; row < stream.length;) {
-    const match = isContent(stream, row) ? longestAt(corpus, row, ofWord, ofGram) : undefined;
+    const match = isContent(stream, row) ? longestAt(corpus, row, uses, ofWord, ofGram) : undefined;
     if (match !== undefined) {
       term[count] = match.term - 1;
       first[count] = row;
@@ -44,20 +46,27 @@ export function* segment(corpus: Corpus, terms: readonly Term[]): Work<Segments>
     if (next >> 16 !== row >> 16) yield;
     row = next;
   }
-  const uses = new Uint32Array(terms.length);
-  for (let i = 0; i < count; i++) uses[term[i]!]!++;
-  return { count, uses, term: term.slice(0, count), first: first.slice(0, count), length: length.slice(0, count) };
+  const usesOfTerms = new Uint32Array(terms.length);
+  for (let i = 0; i < count; i++) usesOfTerms[term[i]!]!++;
+  return {
+    count,
+    uses: usesOfTerms,
+    term: term.slice(0, count),
+    first: first.slice(0, count),
+    length: length.slice(0, count),
+  };
 }
 
 function longestAt(
   { stream, grams }: Corpus,
   row: number,
+  uses: Uint8Array,
   ofWord: Uint32Array,
   ofGram: Uint32Array,
 ): { term: number; length: number } | undefined {
   const word = stream.fold[row]!;
   // A single word is this noun only where it is used as one; in a longer term the whole decides.
-  let found = useOfTag(stream.tag[row]!) === 0 && ofWord[word] !== 0 ? { term: ofWord[word]!, length: 1 } : undefined;
+  let found = uses[row] === 0 && ofWord[word] !== 0 ? { term: ofWord[word]!, length: 1 } : undefined;
   let gram: number | undefined = word;
   for (let length = 2; length <= LONGEST_GRAM; length++) {
     const next = row + length - 1;

@@ -65,7 +65,8 @@ export function scoreOfVerbs(
   fewest: number,
 ): number {
   let score = -1.6 + 3 * link.strength;
-  score -= 0.45 * Math.log(Math.sqrt(likeness.rankOfA * likeness.rankOfB));
+  const rank = Math.sqrt(likeness.rankOfA * likeness.rankOfB);
+  score -= 0.45 * Math.log(rank);
   if (fewest < FEW) score -= 0.3;
   if (isGeneralNoun(object)) score -= 0.8;
   if (isGeneralVerb(one) || isGeneralVerb(other)) score -= 1.2;

@@ -5,12 +5,16 @@ import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import type { TokenStream } from '../../corpus/stream.js';
 import { isFunctionWord } from '../../lexicon/functionWords.js';
+import { isKnown } from '../../lexicon/synonyms.js';
 import { singularOf } from '../../lexicon/plurals.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
 
 /** Particles that belong to the verb before them wherever they stand, … */
 const ALWAYS = new Set(['up', 'out', 'off', 'down', 'away', 'back']);
-/** … and those that do where no noun phrase follows of which they would be the preposition. */
+/** … and those that do where a dictionary or our list has the verb with them. */
+const SOMETIMES = new Set(['on', 'in', 'over', 'through']);
+/** The class of nouns. */
+const NOUN = 0;
 const BE = new Set(['is', 'are', 'was', 'were', 'be', 'been', 'being', 'gets', 'get']);
 /** Most words between a verb and the head of its object. */
 const REACH = 6;
@@ -35,8 +39,11 @@ export interface VerbUses {
   coordinated(one: string, other: string): number;
 }
 
-/** Reads every verb of a corpus. */
-export function* readVerbUses(corpus: Corpus): Work<VerbUses> {
+/**
+ * Reads every verb of a corpus.
+ * @param classes the class of each row, by `readUses`
+ */
+export function* readVerbUses(corpus: Corpus, classes: Uint8Array): Work<VerbUses> {
   const { stream, vocabulary } = corpus;
   const verbs = new Interner();
   const objects = new Interner();
@@ -51,23 +58,27 @@ export function* readVerbUses(corpus: Corpus): Work<VerbUses> {
   };
   for (let row = 0; row < stream.length; row++) {
     if (row % 50_000 === 0) yield;
-    if (stream.tag[row] !== TAG.VERB || !isWord(stream, row)) continue;
-    const particle = row + 1 < stream.length && joins(stream, row + 1) && ALWAYS.has(textAt(row + 1));
+    if (stream.tag[row] !== TAG.VERB || classes[row] === NOUN || !isWord(stream, row)) continue;
     const lemma = vocabulary.textOf(stream.lemma[row]!);
+    const particle = row + 1 < stream.length && joins(stream, row + 1) && isParticle(lemma, textAt(row + 1));
     const verb = particle ? `${lemma} ${textAt(row + 1)}` : lemma;
     const use = { row, length: particle ? 2 : 1 };
     const other = coordinatedVerb(stream, textAt, row + use.length);
     if (other !== undefined) count(sideBySide, lemma, vocabulary.textOf(stream.lemma[other]!));
-    const after = objectAfter(stream, textAt, row + use.length);
+    const after = objectAfter(stream, classes, textAt, row + use.length);
     if (after !== undefined) put(verb, after, use);
     else {
-      const before = subjectOfPassive(stream, textAt, row);
+      const before = subjectOfPassive(stream, classes, textAt, row);
       if (before !== undefined) put(verb, before, use);
     }
   }
   const coordinated = (one: string, other: string): number =>
     sideBySide.get(keyOf(one.split(' ')[0]!, other.split(' ')[0]!)) ?? 0;
   return { verbs, objects, pairs, uses, coordinated };
+}
+
+function isParticle(verb: string, word: string): boolean {
+  return ALWAYS.has(word) || (SOMETIMES.has(word) && isKnown(`${verb} ${word}`, 'verb'));
 }
 
 function keyOf(one: string, other: string): string {
@@ -81,12 +92,17 @@ function count(counts: Map<string, number>, one: string, other: string): void {
 }
 
 /** The head of the noun phrase that begins at a row, or undefined where none does. */
-function objectAfter(stream: TokenStream, textAt: (row: number) => string, from: number): number | undefined {
+function objectAfter(
+  stream: TokenStream,
+  classes: Uint8Array,
+  textAt: (row: number) => string,
+  from: number,
+): number | undefined {
   let head: number | undefined;
   for (let row = from; row < Math.min(stream.length, from + REACH); row++) {
     if (!joins(stream, row)) break;
     const tag = stream.tag[row]!;
-    if (tag === TAG.NOUN || tag === TAG.PROPN) {
+    if (classes[row] === NOUN) {
       if (isWord(stream, row)) head = row;
       else if (head !== undefined) break;
     } else if (head !== undefined) break;
@@ -96,7 +112,12 @@ function objectAfter(stream: TokenStream, textAt: (row: number) => string, from:
 }
 
 /** "The job is started": the noun before the auxiliaries of a participle. */
-function subjectOfPassive(stream: TokenStream, textAt: (row: number) => string, verb: number): number | undefined {
+function subjectOfPassive(
+  stream: TokenStream,
+  classes: Uint8Array,
+  textAt: (row: number) => string,
+  verb: number,
+): number | undefined {
   let row = verb - 1;
   let passive = false;
   for (; row >= 0 && row >= verb - 4; row--) {
@@ -106,8 +127,7 @@ function subjectOfPassive(stream: TokenStream, textAt: (row: number) => string, 
     else if (tag !== TAG.ADV && tag !== TAG.PART) break;
   }
   if (!passive || row < 0 || !/(ed|en|t|n|d|wn|un|ung|uck|ut)$/.test(textAt(verb))) return undefined;
-  const tag = stream.tag[row]!;
-  return (tag === TAG.NOUN || tag === TAG.PROPN) && isWord(stream, row) ? row : undefined;
+  return classes[row] === NOUN && isWord(stream, row) ? row : undefined;
 }
 
 /** The verb that a conjunction at a row joins to the one before it. */

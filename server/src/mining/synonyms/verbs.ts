@@ -43,8 +43,8 @@ interface Operation {
 }
 
 /** Asks about verbs that are said of the same object. */
-export function* askVerbs(corpus: Corpus): Work<Question[]> {
-  const read = yield* readVerbUses(corpus);
+export function* askVerbs(corpus: Corpus, uses: Uint8Array): Work<Question[]> {
+  const read = yield* readVerbUses(corpus, uses);
   const objects = byObject(read);
   yield;
   const candidates = new Map<number, { a: number; b: number }>();
