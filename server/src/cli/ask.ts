@@ -4,7 +4,7 @@ import type { Snapshot } from '../engine/snapshot.js';
 import type { Question, QuestionKind } from '../mining/question.js';
 import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
-import type { Subcommand } from './main.js';
+import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
 import { renderQuestions } from './questionText.js';
 

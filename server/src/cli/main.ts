@@ -3,17 +3,10 @@ import { ask } from './ask.js';
 import type { CliHost } from './host.js';
 import { CannotSurvey, Exit } from './host.js';
 import { UsageError, readOptions } from './options.js';
-import type { Given, OptionRule } from './options.js';
+import type { OptionRule } from './options.js';
 import { report } from './report.js';
+import type { Subcommand } from './subcommand.js';
 import { verify } from './verify.js';
-
-/** One subcommand. `run` gives the exit code. */
-export interface Subcommand {
-  readonly summary: string;
-  readonly operands: string;
-  readonly options: Readonly<Record<string, OptionRule>>;
-  run(given: Given, host: CliHost): Promise<number>;
-}
 
 const SUBCOMMANDS: Readonly<Record<string, Subcommand>> = { ask, report, verify };
 

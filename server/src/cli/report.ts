@@ -2,7 +2,7 @@
 import { makeReport } from '../report/report.js';
 import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
-import type { Subcommand } from './main.js';
+import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
 
 export const report: Subcommand = {

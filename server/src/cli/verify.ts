@@ -5,7 +5,7 @@ import type { Position } from '../text/lineIndex.js';
 import { toSarif } from '../report/sarif.js';
 import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
-import type { Subcommand } from './main.js';
+import type { Subcommand } from './subcommand.js';
 
 /** A finding with its document and lines. */
 interface PlacedFinding {

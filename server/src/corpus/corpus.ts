@@ -4,21 +4,12 @@ import { PagedColumn } from '../base/pagedColumn.js';
 import type { Work } from '../base/work.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
 import { TokenFlag } from '../tokens/tokens.js';
+import type { CorpusDocument } from './corpusDocument.js';
 import { countBlock } from './counting.js';
 import { GramTable } from './grams.js';
 import { makeStream } from './stream.js';
 import type { TokenStream } from './stream.js';
 import { Vocabulary } from './vocabulary.js';
-
-/** One document in a corpus: its facts, and the corpus's number of each of its words. */
-export interface CorpusDocument {
-  readonly uri: string;
-  readonly facts: DocumentFacts;
-  /** From an index into `facts.words` to a word of the vocabulary. */
-  readonly ids: Uint32Array;
-  /** The corpus's number of each block's prose. */
-  readonly blocks: Uint32Array;
-}
 
 /** A document to put in, or to take out where `facts` is undefined. */
 export interface DocumentChange {

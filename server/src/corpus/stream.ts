@@ -1,6 +1,6 @@
 // All tokens of a corpus in one row of columns, and where each word stands: derived whole from a snapshot's documents.
 import { isOpen } from '../prose/zones.js';
-import type { CorpusDocument } from './corpus.js';
+import type { CorpusDocument } from './corpusDocument.js';
 import type { Vocabulary } from './vocabulary.js';
 
 /**

@@ -1,6 +1,5 @@
 // Bits that the facts add to a token's own.
 import { isOpen } from '../prose/zones.js';
-import type { DocumentFacts } from './documentFacts.js';
 
 /** Bits of a token beside {@link TokenFlag}'s. */
 export const FactFlag = {
@@ -9,6 +8,6 @@ export const FactFlag = {
 } as const;
 
 /** True where a token lies in zones that are counted, asked about and fixed. */
-export function isCounted(facts: DocumentFacts, row: number): boolean {
+export function isCounted(facts: { readonly zones: Uint16Array }, row: number): boolean {
   return isOpen(facts.zones[row]!);
 }
