@@ -1,0 +1,210 @@
+// From a stream of tags and text to blocks of prose: which elements are open, and which block their text belongs to.
+import { ContentBuilder, type BlockRole } from '../content.js';
+import type { ProseBlock } from '../prose.js';
+import { markQuotations } from '../quotations.js';
+import { Zone } from '../zones.js';
+import { closedFrame, ground, openFrame, State, type Frame } from './frames.js';
+import { CONTAINER, Flow, HIDDEN, PARAGRAPH, type ElementRole, type Vocabulary } from './roles.js';
+import type { TextReader } from './runningText.js';
+import type { StartTag } from './startTag.js';
+
+interface OpenLink {
+  readonly frame: Frame;
+  readonly target: string;
+  /** Where its text begins in the pending block. */
+  from: number;
+}
+
+/** A block of text while it is read. */
+interface Pending {
+  readonly out: ContentBuilder;
+  readonly role: BlockRole;
+  /** The source offset behind what is visible so far. */
+  end: number;
+}
+
+/** Takes the elements and the text of one document in their order and makes blocks of them. */
+export class Elements {
+  /** The open elements, outermost first, on the ground that they stand on. */
+  readonly frames: Frame[];
+  /** Elements met that are paragraphs: where there is none, titles alone make no documentation. */
+  paragraphs = 0;
+  private readonly blocks: ProseBlock[] = [];
+  private pending: Pending | undefined;
+  private link: OpenLink | undefined;
+  private readonly suspended: { readonly pending: Pending | undefined; readonly link: OpenLink | undefined }[] = [];
+  /** Counts what became visible, by which an element without text is known. */
+  private shown = 0;
+  /** The end of the last white space between elements. */
+  private spacedTo = 0;
+
+  constructor(
+    private readonly text: string,
+    private readonly reader: TextReader,
+    /** True where text outside all elements is prose. */
+    takesText: boolean,
+  ) {
+    this.frames = [ground(CONTAINER, takesText)];
+  }
+
+  get top(): Frame {
+    return this.frames[this.frames.length - 1]!;
+  }
+
+  /** The blocks read, in source order. */
+  finish(): ProseBlock[] {
+    this.closeTo(1, this.text.length);
+    this.flush();
+    return this.blocks.sort((a, b) => a.start - b.start);
+  }
+
+  /** Opens an element whose start tag ends before `tagEnd`. */
+  open(tag: StartTag, role: ElementRole, vocabulary: Vocabulary, tagEnd: number): void {
+    const parent = this.top;
+    const { flow } = role;
+    const { name, start } = tag;
+    if (parent.state === State.none) {
+      this.frames.push(closedFrame(parent, name, HIDDEN, start));
+      return;
+    }
+    const isRead =
+      parent.state === State.read ||
+      (parent.state === State.asides ? flow === Flow.aside : role.inMetadata === true || flow === Flow.metadata);
+    this.readAttributes(tag, vocabulary, isRead && flow !== Flow.hidden && flow !== Flow.closed);
+    if (!isRead || flow === Flow.hidden) {
+      this.frames.push(closedFrame(parent, name, HIDDEN, start));
+      return;
+    }
+    if (parent.role.parts && flow === Flow.inline) this.space(start, tagEnd);
+    if (flow === Flow.container || flow === Flow.block || flow === Flow.closed || flow === Flow.metadata) this.flush();
+    if (role === PARAGRAPH) this.paragraphs++;
+    if (flow === Flow.opaque || flow === Flow.closed || flow === Flow.lineBreak) {
+      this.frames.push(closedFrame(parent, name, role, start));
+      if (flow === Flow.lineBreak) this.space(start, tagEnd);
+      return;
+    }
+    if (flow === Flow.picture) this.opaque(start, tagEnd);
+    const frame = openFrame(parent, name, role, role.zones | tag.zones(role, vocabulary), start, this.shown);
+    const target = tag.target(role);
+    this.frames.push(frame);
+    if (flow === Flow.aside) this.suspend();
+    if (target !== undefined && this.link === undefined) this.openLink(frame, target);
+    else if (frame.inlineZones !== parent.inlineZones) this.pending?.out.setZones(this.zones());
+  }
+
+  /** Closes elements until `kept` frames are left; their end tag ends before `tagEnd`. */
+  closeTo(kept: number, tagEnd: number): void {
+    while (this.frames.length > kept) this.close(tagEnd);
+  }
+
+  /** Adds character data. */
+  characters(from: number, to: number, plain: boolean): void {
+    const { top } = this;
+    if (top.state !== State.read) return;
+    const visible = this.reader.visibleFrom(from, to);
+    if (visible === to) {
+      this.space(from, to);
+      return;
+    }
+    const start = this.pending ? from : visible;
+    const pending = this.begin(visible);
+    this.reader.read(start, to, pending.out, plain);
+    pending.end = this.reader.visibleEnd(visible, to);
+    this.shown++;
+  }
+
+  private close(tagEnd: number): void {
+    const frame = this.frames.pop()!;
+    const { flow } = frame.role;
+    if (flow === Flow.opaque) this.opaque(frame.start, tagEnd);
+    else if (flow === Flow.inline) {
+      if (this.link?.frame === frame) {
+        this.endLink();
+        this.link = undefined;
+      }
+      // A reference without a text of its own is shown as one that is made for it.
+      if (frame.role.targets && frame.shown === this.shown) this.opaque(frame.start, tagEnd);
+      this.pending?.out.setZones(this.zones());
+    } else if (flow !== Flow.hidden && flow !== Flow.lineBreak && flow !== Flow.picture) {
+      this.flush();
+      if (this.link?.frame === frame) this.link = undefined;
+      if (flow === Flow.aside) ({ pending: this.pending, link: this.link } = this.suspended.pop()!);
+    }
+  }
+
+  private suspend(): void {
+    this.suspended.push({ pending: this.pending, link: this.link });
+    this.pending = undefined;
+    this.link = undefined;
+  }
+
+  private space(from: number, to: number): void {
+    if (!this.pending) return;
+    this.pending.out.space(from, to);
+    this.spacedTo = to;
+  }
+
+  /** One opaque unit for `[start, to)`, or for what spaces in it leave. */
+  private opaque(start: number, to: number): void {
+    const from = Math.max(start, this.spacedTo);
+    if (from >= to) return;
+    const pending = this.begin(from);
+    pending.out.opaque(from, to);
+    pending.end = to;
+    this.shown++;
+  }
+
+  /** The pending block; a new one, if need be, begins at `at`. */
+  private begin(at: number): Pending {
+    if (this.pending) return this.pending;
+    const { kind, level, blockZones } = this.top;
+    const out = new ContentBuilder(this.text, at);
+    out.setZones(this.zones());
+    if (this.link) this.link.from = 0;
+    return (this.pending = { out, role: { kind, level, zones: blockZones }, end: at });
+  }
+
+  /** Ends the pending block. */
+  private flush(): void {
+    const { pending } = this;
+    if (!pending) return;
+    this.endLink();
+    this.pending = undefined;
+    const content = pending.out.finish(pending.role, pending.end);
+    if (content) this.blocks.push({ start: pending.out.start, content: markQuotations(content) });
+  }
+
+  private zones(): number {
+    return this.top.inlineZones | (this.link ? Zone.linkText : 0);
+  }
+
+  private openLink(frame: Frame, target: string): void {
+    this.link = { frame, target, from: 0 };
+    if (!this.pending) return;
+    this.pending.out.setZones(this.zones());
+    this.link.from = this.pending.out.length;
+  }
+
+  /** Records the text of the open link in the pending block. */
+  private endLink(): void {
+    if (this.link && this.pending) this.pending.out.link(this.link.from, this.link.target);
+  }
+
+  /** Reads the attributes that hold prose; outside what is read, those alone that the table names with their element. */
+  private readAttributes(tag: StartTag, vocabulary: Vocabulary, isRead: boolean): void {
+    const { attributes } = vocabulary;
+    if (attributes.size === 0) return;
+    tag.forEach((name, from, to) => {
+      const kind = attributes.get(`${tag.name}@${name}`) ?? (isRead ? attributes.get(name) : undefined);
+      if (kind === undefined || from === to) return;
+      if (kind === 'description' && tag.attribute('name')?.toLowerCase() !== 'description') return;
+      const start = this.reader.visibleFrom(from, to);
+      const out = new ContentBuilder(this.text, start);
+      this.reader.read(start, to, out, false);
+      const own = kind === 'alternativeText' ? Zone.alternativeText : kind === 'description' ? Zone.frontMatter : 0;
+      const zones = own | (this.top.blockZones & (Zone.quotation | Zone.safetyMessage));
+      const content = out.finish({ kind, level: 0, zones }, this.reader.visibleEnd(start, to));
+      if (content) this.blocks.push({ start, content: markQuotations(content) });
+    });
+  }
+}

@@ -1,0 +1,86 @@
+// A start tag's attributes by their places, and the role of the element that it starts.
+import { ADMONITION_CLASSES, HTML, LABEL_CLASSES, SAFETY_CLASSES } from './htmlElements.js';
+import { Zone, type ZoneSet } from '../zones.js';
+import { Flow, INLINE, CONTAINER, type ElementRole, type Vocabulary } from './roles.js';
+
+const SAFETY = /^(?:danger|warning|caution|notice)$/i;
+
+/** A start tag while it is read; used again for the next. */
+export class StartTag {
+  /** As its end tag gives it: in HTML in lower case. */
+  name = '';
+  start = 0;
+  private readonly names: string[] = [];
+  private readonly values: number[] = [];
+
+  constructor(
+    private readonly text: string,
+    private readonly xml: boolean,
+  ) {}
+
+  begin(from: number, to: number): void {
+    const name = this.text.slice(from, to);
+    this.name = this.xml ? name : name.toLowerCase();
+    this.start = from - 1;
+    this.names.length = 0;
+    this.values.length = 0;
+  }
+
+  addName(from: number, to: number): void {
+    const name = this.text.slice(from, to);
+    this.names.push(this.xml ? name : name.toLowerCase());
+    this.values.push(to, to);
+  }
+
+  addValue(from: number, to: number): void {
+    this.values[this.values.length - 2] = from;
+    this.values[this.values.length - 1] = to;
+  }
+
+  /** The attribute's value as written, or undefined. */
+  attribute(name: string): string | undefined {
+    const i = this.names.indexOf(name);
+    return i < 0 ? undefined : this.text.slice(this.values[2 * i], this.values[2 * i + 1]);
+  }
+
+  /** Every attribute with the place of its value. */
+  forEach(visit: (name: string, from: number, to: number) => void): void {
+    for (let i = 0; i < this.names.length; i++) visit(this.names[i]!, this.values[2 * i]!, this.values[2 * i + 1]!);
+  }
+
+  /** Zones that the attributes put the element into. */
+  zones(role: ElementRole, vocabulary: Vocabulary): ZoneSet {
+    if (this.names.length === 0) return 0;
+    if (role.safetyBy !== undefined) return SAFETY.test(this.attribute(role.safetyBy) ?? '') ? Zone.safetyMessage : 0;
+    if (vocabulary !== HTML || role.flow > Flow.inline) return 0;
+    const written = this.attribute('class');
+    if (written === undefined) return 0;
+    const classes = written.toLowerCase().split(/\s+/);
+    if (role.flow === Flow.inline) return classes.some((word) => LABEL_CLASSES.has(word)) ? Zone.uiLabel : 0;
+    const isNotice = classes.includes('notice') && classes.some((word) => ADMONITION_CLASSES.has(word));
+    return isNotice || classes.some((word) => SAFETY_CLASSES.has(word)) ? Zone.safetyMessage : 0;
+  }
+
+  /** The target, where the element is a link. */
+  target(role: ElementRole): string | undefined {
+    for (const name of role.targets ?? []) {
+      const target = this.attribute(name);
+      if (target !== undefined) return target;
+    }
+    return undefined;
+  }
+}
+
+/** The role of an element by its local name; undefined for an unknown one that takes no text of its own. */
+export function roleOf(
+  vocabulary: Vocabulary,
+  parent: { readonly name: string; readonly takesText: boolean },
+  name: string,
+): ElementRole {
+  const { elements, dependent } = vocabulary;
+  if (dependent.has(name)) {
+    const role = elements.get(`${parent.name.slice(parent.name.indexOf(':') + 1)}>${name}`);
+    if (role) return role;
+  }
+  return elements.get(name) ?? (vocabulary.unknown === 'inline' || parent.takesText ? INLINE : CONTAINER);
+}
