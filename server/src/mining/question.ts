@@ -1,4 +1,5 @@
 // A question: terms that may name one concept, with the evidence for it.
+import { compareCodeUnits } from '../base/order.js';
 
 /** What kind of mix a question is about. */
 export type QuestionKind =
@@ -62,4 +63,12 @@ export interface Question {
   readonly terms: readonly QuestionTerm[];
   readonly reasons: readonly Reason[];
   readonly places: readonly UsePlace[];
+}
+
+/** The id of a question of a kind about some terms: their texts in order of code units, whatever their uses are. */
+export function questionId(kind: QuestionKind, terms: readonly { readonly text: string }[]): string {
+  return `${kind}:${terms
+    .map(({ text }) => text)
+    .sort(compareCodeUnits)
+    .join('|')}`;
 }

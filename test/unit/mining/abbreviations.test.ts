@@ -95,7 +95,7 @@ describe('a short and a long form', () => {
       'The custom resources wait. A CR waits. The custom resources stop.',
     );
     expect(rest).toEqual([]);
-    expect(question).toMatchObject({ kind: 'abbreviation', id: 'abbreviation:custom resource|CR' });
+    expect(question).toMatchObject({ kind: 'abbreviation', id: 'abbreviation:CR|custom resource' });
     expect(question!.terms.map(({ text, uses }) => [text, uses])).toEqual([
       ['custom resource', 5],
       ['CR', 4],
@@ -117,7 +117,7 @@ describe('a short and a long form', () => {
         `${explained} A custom resource definition (CRD) is a type. The custom resource definition is read.`,
         'See the custom resource definition of yours. A custom resource definition is here. The CRD and the CR.',
       ).map(({ id }) => id),
-    ).not.toContain('abbreviation:custom resource|CR');
+    ).not.toContain('abbreviation:CR|custom resource');
   });
 
   it('do not depend on the order in which documents came', () => {

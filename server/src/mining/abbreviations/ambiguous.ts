@@ -2,6 +2,7 @@
 import type { Corpus } from '../../corpus/corpus.js';
 import { spellingKey } from '../../lexicon/spelling.js';
 import { examplePlaces } from '../places.js';
+import { questionId } from '../question.js';
 import type { Question } from '../question.js';
 import { byUses, singularKey, times } from '../wording.js';
 import type { Explained, Expansion } from './explained.js';
@@ -31,7 +32,10 @@ export function askAmbiguous(corpus: Corpus, { short, expansions }: Explained): 
   );
   const second = distinct[1]!;
   return {
-    id: `ambiguous-abbreviation:${sides.map(({ term }) => term.text).join('|')}`,
+    id: questionId(
+      'ambiguous-abbreviation',
+      sides.map(({ term }) => term),
+    ),
     kind: 'ambiguous-abbreviation',
     confidence: CONFIDENCE,
     worth: CONFIDENCE * usesOf(second.forms).length,

@@ -6,6 +6,7 @@ import { fullFormsOf } from '../../lexicon/clippings.js';
 import { TokenFlag } from '../../tokens/tokens.js';
 import { countDocuments, examplePlaces } from '../places.js';
 import type { Use } from '../places.js';
+import { questionId } from '../question.js';
 import type { Question, QuestionTerm } from '../question.js';
 import { byUses, pages, singularKey, times } from '../wording.js';
 import { framesOf, frameText, sharedFrames } from './frames.js';
@@ -102,7 +103,10 @@ function makeQuestion(corpus: Corpus, short: Side, long: Side, shared: SharedFra
   ];
   const shown = shared.kinds.slice(0, 3).map((frame) => `“${frameText(corpus, frame)}”`);
   return {
-    id: `abbreviation:${sides.map(({ term }) => term.text).join('|')}`,
+    id: questionId(
+      'abbreviation',
+      sides.map(({ term }) => term),
+    ),
     kind: 'abbreviation',
     confidence,
     worth: confidence * sides[1]!.term.uses,

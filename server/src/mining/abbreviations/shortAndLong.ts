@@ -3,6 +3,7 @@ import type { Corpus } from '../../corpus/corpus.js';
 import { Zone } from '../../prose/zones.js';
 import { countDocuments, examplePlaces } from '../places.js';
 import type { Use } from '../places.js';
+import { questionId } from '../question.js';
 import type { Question, QuestionTerm, Reason } from '../question.js';
 import { byUses, displayText, makeTerm, pages, times } from '../wording.js';
 import type { Explained, Expansion } from './explained.js';
@@ -58,7 +59,10 @@ export function askExplained(
   ].sort((a, b) => byUses(a.term, b.term));
   const confidence = expansion.definitions.length > 1 ? CONFIDENCE.more : CONFIDENCE.once;
   return {
-    id: `abbreviation:${sides.map(({ term }) => term.text).join('|')}`,
+    id: questionId(
+      'abbreviation',
+      sides.map(({ term }) => term),
+    ),
     kind: 'abbreviation',
     confidence,
     worth: confidence * Math.min(free.all.length, shortUses.length),

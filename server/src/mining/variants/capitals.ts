@@ -5,6 +5,7 @@ import type { Corpus } from '../../corpus/corpus.js';
 import { isKnown } from '../../lexicon/synonyms.js';
 import { countDocuments, examplePlaces, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
+import { questionId } from '../question.js';
 import type { Question } from '../question.js';
 import { byUses, makeTerm, numberForms, pages, singularKey, times } from '../wording.js';
 import type { Mentions } from './mentions.js';
@@ -132,7 +133,10 @@ function makeQuestion(corpus: Corpus, lead: Way, others: readonly Way[]): Questi
   const outside = others.reduce((sum, way) => sum + way.uses.length, 0);
   const ways = sides.map(({ term }) => `“${term.text}” ${times(term.uses)} on ${pages(term.documents)}`);
   return {
-    id: `variant:${sides.map(({ term }) => term.text).join('|')}`,
+    id: questionId(
+      'variant',
+      sides.map(({ term }) => term),
+    ),
     kind: 'variant',
     confidence,
     worth: confidence * outside,

@@ -15,6 +15,7 @@ import {
   rowsOfSequence,
 } from '../places.js';
 import type { Use } from '../places.js';
+import { questionId } from '../question.js';
 import type { Question } from '../question.js';
 import { byUses, makeTerm, numberForms, pages, singularKey, spelledAt, times } from '../wording.js';
 
@@ -113,7 +114,10 @@ function askPhrase(corpus: Corpus, key: string, capitalised: readonly Use[]): Qu
   sides.sort((a, b) => byUses(a.term, b.term));
   const ways = sides.map(({ term }) => `“${term.text}” ${times(term.uses)} on ${pages(term.documents)}`);
   return {
-    id: `variant:${sides.map(({ term }) => term.text).join('|')}`,
+    id: questionId(
+      'variant',
+      sides.map(({ term }) => term),
+    ),
     kind: 'variant',
     confidence: CONFIDENCE,
     worth: CONFIDENCE * sides[1]!.term.uses,

@@ -1,6 +1,7 @@
 // A family of ways of writing as a question: its terms, the reasons in plain words, its worth.
 import type { Corpus } from '../../corpus/corpus.js';
 import { countDocuments, examplePlaces } from '../places.js';
+import { questionId } from '../question.js';
 import type { Question, QuestionTerm, Reason } from '../question.js';
 import { byUses, displayText, makeTerm, pages, times } from '../wording.js';
 import type { Form } from './candidates.js';
@@ -39,7 +40,7 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
   const terms = sides.map(({ term }) => term);
   const outside = terms.slice(1).reduce((sum, term) => sum + term.uses, 0);
   return {
-    id: `variant:${terms.map((term) => term.text).join('|')}`,
+    id: questionId('variant', terms),
     kind: 'variant',
     confidence,
     worth: confidence * outside,
