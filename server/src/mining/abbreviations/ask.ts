@@ -1,5 +1,4 @@
-// Abbreviations: a short and a long form that the documents explain to be one thing, both in free use; and short forms
-// that they explain in two ways.
+// Abbreviations: a short and a long form that the documents explain to be one thing, both in free use; and ambiguous ones.
 import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
