@@ -234,7 +234,11 @@ function isTermbase(uri: string): boolean {
 }
 
 function formatOf(document: TextDocument): SourceText['format'] {
+  if (document.languageId === 'html') return 'html';
+  if (['xml', 'dita', 'docbook'].includes(document.languageId)) return 'xml';
   const markdown =
     document.languageId === 'markdown' || document.languageId === 'mdx' || /\.(md|mdx|markdown)$/i.test(document.uri);
+  if (document.languageId === 'restructuredtext' || /\.(rst|rest)$/i.test(document.uri)) return 'restructuredtext';
+  if (document.languageId === 'asciidoc' || /\.(adoc|asciidoc|asc)$/i.test(document.uri)) return 'asciidoc';
   return markdown ? 'markdown' : 'plaintext';
 }

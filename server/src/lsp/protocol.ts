@@ -1,13 +1,26 @@
 // What client and server say to each other beyond the Language Server Protocol: plain data and names alone.
 
 /** Languages (VS Code's identifiers) whose documents the server is sent. */
-export const DOCUMENT_LANGUAGES = ['markdown', 'mdx', 'plaintext', 'restructuredtext', 'asciidoc'] as const;
+export const DOCUMENT_LANGUAGES = [
+  'markdown',
+  'mdx',
+  'html',
+  'xml',
+  'dita',
+  'docbook',
+  'plaintext',
+  'restructuredtext',
+  'asciidoc',
+] as const;
 
 /** The file name of a termbase. */
 export const TERMBASE_NAME = 'termbase.yaml';
 
 /** Files whose changes on disk the client reports. */
-export const WATCHED_FILES = ['**/*.{md,markdown,mdx,txt,text,rst,adoc}', `**/${TERMBASE_NAME}`] as const;
+export const WATCHED_FILES = [
+  '**/*.{md,markdown,mdx,html,htm,xhtml,xml,dita,page,dbk,txt,text,rst,rest,adoc,asciidoc,asc}',
+  `**/${TERMBASE_NAME}`,
+] as const;
 
 /** Command of a code action after a termbase was edited: the client saves the file, so that the answer is kept. */
 export const SAVE_TERMBASE_COMMAND = 'evenword.saveTermbase';

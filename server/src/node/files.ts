@@ -11,13 +11,23 @@ import { canonicalUri } from '../text/uri.js';
 export const LARGEST_FILE = 4 * 1024 * 1024;
 
 const FORMATS: Readonly<Record<string, Format>> = {
+  '.html': 'html',
+  '.htm': 'html',
+  '.xhtml': 'xml',
+  '.xml': 'xml',
+  '.dita': 'xml',
+  '.page': 'xml',
+  '.dbk': 'xml',
   '.md': 'markdown',
   '.markdown': 'markdown',
   '.mdx': 'markdown',
   '.txt': 'plaintext',
   '.text': 'plaintext',
-  '.rst': 'plaintext',
-  '.adoc': 'plaintext',
+  '.rst': 'restructuredtext',
+  '.rest': 'restructuredtext',
+  '.adoc': 'asciidoc',
+  '.asciidoc': 'asciidoc',
+  '.asc': 'asciidoc',
 };
 
 /** Folders that hold no documentation of the project's own. */

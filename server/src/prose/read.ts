@@ -1,9 +1,12 @@
 // The door to the readers: a text in, its prose out, whatever the format.
 import type { SourceText } from '../text/sourceText.js';
+import { readAsciidoc, rereadAsciidoc } from './asciidoc/asciidoc.js';
+import { readMarkup, rereadMarkup } from './markup/markup.js';
 import { readMarkdown, rereadMarkdown, type MarkdownReading } from './markdown/markdown.js';
 import { readPlaintext, rereadPlaintext } from './plaintext.js';
 import type { Prose } from './prose.js';
 import type { Reading } from './reading.js';
+import { readRestructuredText, rereadRestructuredText } from './restructuredtext/restructuredtext.js';
 
 export type { Reading } from './reading.js';
 
@@ -15,6 +18,9 @@ export function read(source: SourceText): Prose {
 /** Reads a document and keeps what {@link reread} needs. Never throws. */
 export function startReading(source: SourceText): Reading {
   try {
+    if (source.format === 'asciidoc') return readAsciidoc(source);
+    if (source.format === 'restructuredtext') return readRestructuredText(source);
+    if (source.format === 'html' || source.format === 'xml') return readMarkup(source);
     return source.format === 'markdown' ? readMarkdown(source) : readPlaintext(source);
   } catch (error) {
     return unreadable(source, error);
@@ -30,6 +36,9 @@ export function reread(previous: Reading, source: SourceText): Reading {
   if (source.format !== previous.source.format) return startReading(source);
   try {
     if (source.format === 'plaintext') return rereadPlaintext(previous, source);
+    if (source.format === 'html' || source.format === 'xml') return rereadMarkup(previous, source);
+    if (source.format === 'restructuredtext') return rereadRestructuredText(previous, source);
+    if (source.format === 'asciidoc') return rereadAsciidoc(previous, source);
     return 'units' in previous ? rereadMarkdown(previous as MarkdownReading, source) : startReading(source);
   } catch (error) {
     return unreadable(source, error);

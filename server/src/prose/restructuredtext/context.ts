@@ -1,0 +1,33 @@
+// What reading a document needs to know everywhere, and what it leaves behind.
+import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
+import type { ZoneSet } from '../zones.js';
+import type { Lines } from './lines.js';
+
+/** Bodies nested deeper than this are not read. */
+export const DEEPEST = 32;
+
+/** Where a body stands: what its paragraphs are, in which zones, how deep, and whether titles may stand in it. */
+export interface Setting {
+  readonly kind: BlockKind;
+  readonly zones: ZoneSet;
+  readonly depth: number;
+}
+
+/** One document being read. */
+export interface DocumentContext {
+  /** The normalised source: as long as the source itself. */
+  readonly text: string;
+  readonly blocks: ProseBlock[];
+  readonly problems: ReadingProblem[];
+  /** The adornments of titles in order of their first appearance. */
+  readonly titleStyles: string[];
+  /** Folded name → address, of the targets that are defined with one. */
+  readonly targets: ReadonlyMap<string, string>;
+  /** Reads the body elements of `[from, to)`, whose margin is column `base`. */
+  readBody(lines: Lines, from: number, to: number, base: number, setting: Setting): void;
+}
+
+/** The setting one body further in. */
+export function inside(setting: Setting, change: Partial<Setting> = {}): Setting {
+  return { ...setting, ...change, depth: setting.depth + 1 };
+}

@@ -1,0 +1,184 @@
+// One directive: its argument, its options and its body, each read for what it is.
+import { Zone } from '../zones.js';
+import { inside, type DocumentContext, type Setting } from './context.js';
+import { readRecords } from './csvTable.js';
+import { readGlossary } from './definitionList.js';
+import { directiveKind, type DirectiveKind } from './directiveKinds.js';
+import { moveStart } from './explicit.js';
+import { readLeaf, readPhrase } from './leaf.js';
+import { indentedBlock, isBlank, paragraphEnd, skipBlank, type Lines } from './lines.js';
+import { fieldMarkEnd } from './markers.js';
+
+/** The lines of a directive, the first of which goes on behind the name; the others' margin. */
+export interface DirectiveLines {
+  readonly lines: Lines;
+  readonly line: number;
+  readonly to: number;
+  readonly margin: number;
+}
+
+const UNKNOWN: DirectiveKind = { argument: 'opaque', body: 'prose' };
+const SAFETY_TITLE = /^(?:danger|warning|caution|notice)\b/i;
+
+/** Reads the directive `name`, whose matter begins behind offset `after`. */
+export function readDirective(
+  cx: DocumentContext,
+  name: string,
+  after: number,
+  { lines, line, to, margin }: DirectiveLines,
+  setting: Setting,
+): void {
+  const { text } = cx;
+  const known = directiveKind(name);
+  const kind = known ?? UNKNOWN;
+  moveStart(text, lines, line, after, margin);
+  const base = lines.column[line]!;
+  const first = lines.isBlank(line) ? line + 1 : line;
+  const headEnd = paragraphEnd(lines, first, to);
+  let options = first;
+  while (options < headEnd && !isOption(text, lines, options, base)) options++;
+  const head = { lines, from: first, to: options };
+  let zones = setting.zones;
+  if (kind.safety || (name === 'admonition' && SAFETY_TITLE.test(text.slice(lines.at[first], lines.at[first]! + 9)))) {
+    zones |= Zone.safetyMessage;
+  }
+  if (name === 'epigraph' || name === 'pull-quote') zones |= Zone.quotation;
+  const within = { ...setting, zones };
+  if (kind.argument !== 'none') readArgument(cx, head, kind, within);
+  else if (options > first && kind.body === 'prose') cx.readBody(lines, first, options, base, inside(within));
+  if (kind.options) readOptions(cx, lines, options, headEnd, kind.options, within);
+  const from = skipBlank(lines, kind.body === 'meta' || kind.body === 'glossary' ? options : headEnd, to);
+  if (from >= to || (!known && !looksLikeProse(text, lines, from))) return;
+  readDirectiveBody(cx, kind, { lines, line: from, to, margin: base }, within);
+}
+
+function isOption(text: string, lines: Lines, line: number, base: number): boolean {
+  return lines.column[line]! <= base && fieldMarkEnd(text, lines.at[line]!, lines.end[line]!) >= 0;
+}
+
+interface Range {
+  readonly lines: Lines;
+  readonly from: number;
+  readonly to: number;
+}
+
+function readArgument(cx: DocumentContext, { lines, from, to }: Range, kind: DirectiveKind, setting: Setting): void {
+  if (from >= to) return;
+  switch (kind.argument) {
+    case 'caption':
+      readLeaf(cx, lines, from, to, { kind: 'caption', level: 0, zones: setting.zones });
+      break;
+    case 'title':
+    case 'paragraph':
+      readLeaf(cx, lines, from, to, { kind: kind.argument, level: 0, zones: setting.zones });
+      break;
+    case 'heading':
+      readLeaf(cx, lines, from, to, { kind: 'heading', level: 6, zones: setting.zones | Zone.heading });
+      break;
+    case 'version':
+      readBehindVersion(cx, { lines, from, to }, setting);
+      break;
+    default:
+  }
+}
+
+/** `versionadded:: 1.2 text` may go on for some lines. */
+function readBehindVersion(cx: DocumentContext, { lines, from, to }: Range, setting: Setting): void {
+  const { text } = cx;
+  const end = lines.end[from]!;
+  let at = lines.at[from]!;
+  while (at < end && !isBlank(text.charCodeAt(at))) at++;
+  while (at < end && isBlank(text.charCodeAt(at))) at++;
+  lines.at[from] = at;
+  const start = at < end ? from : from + 1;
+  if (start < to) readLeaf(cx, lines, start, to, { ...setting, level: 0 });
+}
+
+function readOptions(
+  cx: DocumentContext,
+  lines: Lines,
+  from: number,
+  to: number,
+  wanted: Readonly<Record<string, 'caption' | 'alternativeText'>>,
+  setting: Setting,
+): void {
+  for (let line = from; line < to;) {
+    const at = lines.at[line]!;
+    const colon = fieldMarkEnd(cx.text, at, lines.end[line]!);
+    const next = indentedBlock(lines, line + 1, to, lines.column[line]!).next;
+    const name = colon < 0 ? '' : cx.text.slice(at + 1, colon);
+    if (Object.hasOwn(wanted, name)) {
+      const kind = wanted[name]!;
+      moveStart(cx.text, lines, line, colon + 1, lines.column[line]!);
+      const zones = setting.zones | (kind === 'alternativeText' ? Zone.alternativeText : 0);
+      const start = lines.isBlank(line) ? line + 1 : line;
+      if (start < next) readLeaf(cx, lines, start, next, { kind, level: 0, zones });
+    }
+    line = next;
+  }
+}
+
+function readDirectiveBody(
+  cx: DocumentContext,
+  kind: DirectiveKind,
+  { lines, line, to, margin }: DirectiveLines,
+  setting: Setting,
+): void {
+  switch (kind.body) {
+    case 'prose':
+      cx.readBody(lines, line, to, margin, inside(setting));
+      break;
+    case 'caption':
+      cx.readBody(lines, line, to, margin, inside(setting, { kind: 'caption' }));
+      break;
+    case 'cells':
+      cx.readBody(
+        lines,
+        line,
+        to,
+        margin,
+        inside(setting, { kind: 'tableCell', zones: setting.zones | Zone.tableCell }),
+      );
+      break;
+    case 'records':
+      readRecords(cx, lines, line, to, setting);
+      break;
+    case 'glossary':
+      readGlossary(cx, lines, skipOptions(cx.text, lines, line, to), to, margin, setting);
+      break;
+    case 'meta':
+      readMeta(cx, lines, line, to, setting);
+      break;
+    default:
+  }
+}
+
+function skipOptions(text: string, lines: Lines, from: number, to: number): number {
+  let line = from;
+  while (line < to && fieldMarkEnd(text, lines.at[line]!, lines.end[line]!) >= 0) line++;
+  return line;
+}
+
+/** Of the statements about a page, its description is prose. */
+function readMeta(cx: DocumentContext, lines: Lines, from: number, to: number, setting: Setting): void {
+  for (let line = from; line < to; line++) {
+    const at = lines.at[line]!;
+    const colon = fieldMarkEnd(cx.text, at, lines.end[line]!);
+    if (colon < 0 || !/^description(?: |$)/.test(cx.text.slice(at + 1, colon))) continue;
+    let start = colon + 1;
+    while (start < lines.end[line]! && isBlank(cx.text.charCodeAt(start))) start++;
+    readPhrase(cx, start, lines.end[line]!, {
+      kind: 'description',
+      level: 0,
+      zones: setting.zones | Zone.frontMatter,
+    });
+  }
+}
+
+/** True where the first line of a body that nobody knows has four words or more and begins like a sentence. */
+function looksLikeProse(text: string, lines: Lines, line: number): boolean {
+  const written = text.slice(lines.at[line], Math.min(lines.end[line]!, lines.at[line]! + 300));
+  return (
+    /^[*_`“"]{0,3}\p{Lu}/u.test(written) && !/[;{}=]|->/.test(written) && /(?:\p{L}+[,;]? +){3}\p{L}/u.test(written)
+  );
+}

@@ -1,0 +1,19 @@
+// The addresses that named targets stand for: `.. _name: address`.
+
+const TARGET = /^[ \t]*\.\. +_(`[^`\n]+`|(?:[^:`\\\n]|:(?!\s)|\\.)+):[ \t]+(\S.*)$/gm;
+
+/** Folded name → address, of all targets on lines of their own that name an address. The first of a name counts. */
+export function targetsIn(text: string): Map<string, string> {
+  const targets = new Map<string, string>();
+  if (!text.includes('.. _')) return targets;
+  for (const [, name, address] of text.matchAll(TARGET)) {
+    const folded = foldName(name!.replace(/^`|`$/g, ''));
+    if (!targets.has(folded)) targets.set(folded, address!.trimEnd());
+  }
+  return targets;
+}
+
+/** A reference name as docutils compares it: in lower case, white space folded. */
+export function foldName(name: string): string {
+  return name.trim().toLowerCase().replace(/\s+/g, ' ');
+}
