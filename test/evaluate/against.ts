@@ -1,5 +1,6 @@
 // What changed since an earlier evaluation: questions gained and lost by set, pairs found and lost, figures before and after.
 import { recallGroups } from './table.js';
+import { keyFigures } from './summary.js';
 import type { Evaluation, SetResult } from './result.js';
 
 /** Lists the differences of two evaluations; sets that only one of them holds are named and left aside. */
@@ -30,24 +31,14 @@ function showFigures(both: readonly (readonly [SetResult, SetResult])[]): string
 /** The figures of some sets together, by name, as they are shown. */
 export function figuresOf(sets: readonly SetResult[]): Map<string, string> {
   const figures = new Map<string, string>();
-  const sum = (figure: (set: SetResult) => number): number => sets.reduce((total, set) => total + figure(set), 0);
   for (const { title, rows } of recallGroups(sets.flatMap(({ pairs }) => pairs))) {
     for (const { kind, pairs, found, foundWithLookAlikes } of rows) {
       figures.set(`recall, ${title}, ${kind}`, `${found.at(-1)!} of ${pairs}`);
       figures.set(`recall with look-alikes, ${title}, ${kind}`, `${foundWithLookAlikes.at(-1)!} of ${pairs}`);
     }
   }
-  const perWords =
-    (sum(({ questions }) => questions.length) /
-      Math.max(
-        1,
-        sum(({ words }) => words),
-      )) *
-    1e5;
-  figures.set('questions per 100,000 words', perWords.toFixed(1));
-  figures.set('negatives asked', String(sum((set) => set.negativesAsked.filter(({ place }) => place > 0).length)));
-  figures.set('negatives asked with look-alikes', String(sum((set) => set.negativesAsked.length)));
-  figures.set('antonyms asked', String(sum(({ agreement }) => agreement.antonyms.length)));
+  for (const [name, value] of keyFigures(sets)) figures.set(name, value);
+  figures.set('negatives asked with look-alikes', String(sets.flatMap((set) => set.negativesAsked).length));
   return figures;
 }
 

@@ -23,7 +23,10 @@ const USAGE = `npm run evaluate -- [SET…] [options]
 `;
 
 void main().catch((error: unknown) => {
-  process.stderr.write(`${error instanceof Error ? error.message : String(error)}\n`);
+  // What fails inside a part is a fault of the program; what fails outside is mostly an option.
+  const inPart = process.argv.includes('--part');
+  const told = error instanceof Error ? (inPart ? error.stack : error.message) : undefined;
+  process.stderr.write(`${told ?? String(error)}\n`);
   process.exitCode = 2;
 });
 
@@ -71,11 +74,15 @@ function findSet(sets: readonly GoldSet[], name: string): GoldSet {
 }
 
 function readEvaluation(file: string): Evaluation {
+  let written: unknown;
   try {
-    return JSON.parse(readFileSync(file, 'utf8')) as Evaluation;
+    written = JSON.parse(readFileSync(file, 'utf8'));
   } catch (error) {
-    throw new Error(`${file}: cannot be read as an earlier evaluation`, { cause: error });
+    throw new Error(`${file}: ${error instanceof Error ? error.message : 'cannot be read'}`, { cause: error });
   }
+  if (typeof written !== 'object' || written === null || !Array.isArray((written as Partial<Evaluation>).sets))
+    throw new Error(`${file}: not the figures of an earlier evaluation (it has no list of sets)`);
+  return written as Evaluation;
 }
 
 /** Runs one part of the evaluation in a child process of the same program and reads its result. */

@@ -1,5 +1,4 @@
 // Where a pair that nobody asks about was lost, as far as the public functions of the engine rooms tell.
-import { finish } from '../../server/src/base/work.js';
 import { findUses } from '../../server/src/corpus/concordance.js';
 import type { Corpus } from '../../server/src/corpus/corpus.js';
 import { clippedSide } from '../../server/src/lexicon/clippings.js';
@@ -12,15 +11,13 @@ import type { Explained } from '../../server/src/mining/abbreviations/explained.
 import { formsOfLong, formsOfShort } from '../../server/src/mining/abbreviations/longForms.js';
 import { freeUses, usesOf as formUses } from '../../server/src/mining/abbreviations/shortAndLong.js';
 import { lexicalLink } from '../../server/src/mining/synonyms/links.js';
-import { segment } from '../../server/src/mining/synonyms/segment.js';
-import { findNounTerms } from '../../server/src/mining/synonyms/terms.js';
-import { readVerbUses } from '../../server/src/mining/synonyms/verbUses.js';
-import { countWordUses } from '../../server/src/mining/synonyms/wordUse.js';
 import { numberForms } from '../../server/src/mining/wording.js';
 import { verbForms } from '../../server/src/rewrite/verb.js';
 import type { Asked } from './asked.js';
 import { FEWEST_USES } from './gold.js';
 import type { GoldPair } from './gold.js';
+import { knownTermsOf } from './knownTerms.js';
+import type { KnownTerms } from './knownTerms.js';
 import { nounKey, placeAsked, verbKey } from './match.js';
 import { hyphensOf } from './recall.js';
 
@@ -56,7 +53,7 @@ const FEWEST_OUTSIDE = 3;
 export function createFunnel(asked: Asked): (pair: GoldPair) => Loss {
   const { corpus } = asked;
   if (corpus === undefined) return () => ({ stage: 'not used' });
-  const terms = once(() => readTerms(corpus));
+  const terms = once(() => knownTermsOf(corpus));
   const explained = once(() => groupDefinitions(findDefinitions(corpus)));
   return ({ a, b, kind }) => {
     const uses = [usesOf(corpus, a), usesOf(corpus, b)];
@@ -90,26 +87,7 @@ function abbreviationLoss(corpus: Corpus, explained: readonly Explained[], a: st
   };
 }
 
-/** What the synonym engine knows: its noun terms with their uses outside longer terms, and its verbs with objects. */
-interface Terms {
-  readonly outside: ReadonlyMap<string, number>;
-  readonly verbs: ReadonlySet<string>;
-}
-
-function readTerms(corpus: Corpus): Terms {
-  const terms = finish(findNounTerms(corpus, countWordUses(corpus)));
-  const { uses } = finish(segment(corpus, terms));
-  const outside = new Map<string, number>();
-  terms.forEach(({ words }, index) => outside.set(nounKey(words.join(' '), 'open'), uses[index]!));
-  const read = finish(readVerbUses(corpus));
-  const verbs = new Set<string>();
-  read.uses.forEach(({ length }, pair) => {
-    if (length > 0) verbs.add(verbKey(read.verbs.textOf(read.pairs.leftOf(pair)), 'open'));
-  });
-  return { outside, verbs };
-}
-
-function synonymLoss({ outside, verbs }: Terms, a: string, b: string): Loss {
+function synonymLoss({ outside, verbs }: KnownTerms, a: string, b: string): Loss {
   const nouns = [a, b].map((form) => outside.get(nounKey(form, 'open')));
   const areVerbs = [a, b].map((form) => verbs.has(verbKey(form, 'open')));
   const bothNouns = nouns.every((count) => count !== undefined);

@@ -5,23 +5,22 @@ import { Corpus } from '../../server/src/corpus/corpus.js';
 import { Profiles, factsOf } from '../../server/src/engine/factsOf.js';
 import { compareCodeUnits } from '../../server/src/base/order.js';
 import { isKnown } from '../../server/src/lexicon/synonyms.js';
-import { findNounTerms } from '../../server/src/mining/synonyms/terms.js';
-import { countWordUses } from '../../server/src/mining/synonyms/wordUse.js';
 import { numberForms } from '../../server/src/mining/wording.js';
 import type { SourceText } from '../../server/src/text/sourceText.js';
 import { ask } from './asked.js';
 import { usesOf } from './funnel.js';
+import { nounTermsOf } from './knownTerms.js';
 import { placeAsked } from './match.js';
 import { rename } from './renaming.js';
 import type { Renaming, RenamingMode } from './renaming.js';
 
 /** Bands of a term's uses before half of them are renamed: from, up to and without. */
 export const BANDS = [
-  [10, 20],
   [20, 50],
   [50, 100],
   [100, 200],
-  [200, Number.POSITIVE_INFINITY],
+  [200, 400],
+  [400, Number.POSITIVE_INFINITY],
 ] as const;
 
 /** Terms tried in each band. They are renamed together, so few, to leave the rest of the prose as it is. */
@@ -76,7 +75,7 @@ export function recoverPseudoSynonyms(sources: readonly SourceText[]): PseudoBan
 
 /** Single nouns in the band, chosen by the hash of their texts: the same ones in every run. */
 function chooseTerms(corpus: Corpus, from: number, to: number): string[] {
-  return finish(findNounTerms(corpus, countWordUses(corpus)))
+  return nounTermsOf(corpus)
     .flatMap(({ words }) => (words.length === 1 && /^[a-z]{4,}$/.test(words[0]!) ? [words[0]!] : []))
     .filter((term) => {
       const uses = usesOf(corpus, term);

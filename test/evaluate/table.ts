@@ -7,6 +7,7 @@ import type { PseudoBand } from './pseudo.js';
 import { CUTS, recallRow, recallRows } from './recall.js';
 import type { PairFate, RecallRow } from './recall.js';
 import type { Evaluation, SetResult } from './result.js';
+import { keyFigures, recallBySet } from './summary.js';
 
 /** The whole evaluation, in lines of at most about 100 columns. */
 export function showEvaluation({ sets, skipped, pseudo, glossary }: Evaluation): string {
@@ -14,10 +15,13 @@ export function showEvaluation({ sets, skipped, pseudo, glossary }: Evaluation):
   return [
     ...(sets.length === 0 ? [] : showSets(sets)),
     ...skipped.map(({ name, reason }) => `${name}: skipped, ${reason}`),
-    ...(pairs.length === 0 ? [] : [...showRecall(pairs), ...showMisses(sets), ...showNegatives(sets)]),
+    ...(pairs.length === 0
+      ? []
+      : [...showRecall(pairs), ...showRecallBySet(sets), ...showMisses(sets), ...showNegatives(sets)]),
     ...(sets.length === 0 ? [] : showAgreement(sets)),
     ...(pseudo === undefined ? [] : showPseudo(pseudo.set, pseudo.bands)),
     ...(glossary === undefined ? [] : showGlossary(glossary)),
+    ...(sets.length === 0 ? [] : showKeyFigures(sets)),
     '',
   ].join('\n');
 }
@@ -106,6 +110,14 @@ const GROUPS: Readonly<Record<string, string>> = {
   flagged: 'flagged pairs (residual, pos_dependent, sense_limited, function_phrase), used as often',
   rare: 'pairs with a form used less than 5 times',
 };
+
+function showRecallBySet(sets: readonly SetResult[]): string[] {
+  return ['', 'Plain pairs found by default, by set', ...table(recallBySet(sets))];
+}
+
+function showKeyFigures(sets: readonly SetResult[]): string[] {
+  return ['', 'In short (plain pairs, default kinds, at all)', ...table(keyFigures(sets))];
+}
 
 function showMisses(sets: readonly SetResult[]): string[] {
   const missed = sets.flatMap(({ name, pairs }) =>

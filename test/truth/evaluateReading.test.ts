@@ -141,6 +141,6 @@ describe('comparing evaluations', () => {
     expect(shown).toContain('- variant:c|d');
     expect(shown).not.toContain('variant:a|b');
     expect(shown).toContain('questions per 100,000 words: 200.0 → 300.0');
-    expect(figuresOf(evaluation('variant:a|b').sets).get('antonyms asked')).toBe('0');
+    expect(figuresOf(evaluation('variant:a|b').sets).get('antonyms asked about')).toBe('0');
   });
 });
