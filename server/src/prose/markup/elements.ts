@@ -21,6 +21,8 @@ interface Pending {
   readonly role: BlockRole;
   /** The source offset behind what is visible so far. */
   end: number;
+  /** True where white space follows that. */
+  spaced: boolean;
 }
 
 /** Takes the elements and the text of one document in their order and makes blocks of them. */
@@ -75,7 +77,7 @@ export class Elements {
       this.frames.push(closedFrame(parent, name, HIDDEN, start));
       return;
     }
-    if (parent.role.parts && flow === Flow.inline) this.space(start, tagEnd);
+    if (parent.role.parts && flow === Flow.inline && parent.shown !== this.shown) this.space(start, tagEnd);
     if (flow === Flow.container || flow === Flow.block || flow === Flow.closed || flow === Flow.metadata) this.flush();
     if (role === PARAGRAPH) this.paragraphs++;
     if (flow === Flow.opaque || flow === Flow.closed || flow === Flow.lineBreak) {
@@ -106,10 +108,10 @@ export class Elements {
       this.space(from, to);
       return;
     }
-    const start = this.pending ? from : visible;
     const pending = this.begin(visible);
-    this.reader.read(start, to, pending.out, plain);
+    this.reader.read(pending.spaced ? visible : from, to, pending.out, plain);
     pending.end = this.reader.visibleEnd(visible, to);
+    pending.spaced = pending.end < to;
     this.shown++;
   }
 
@@ -122,9 +124,9 @@ export class Elements {
         this.endLink();
         this.link = undefined;
       }
+      this.pending?.out.setZones(this.zones());
       // A reference without a text of its own is shown as one that is made for it.
       if (frame.role.targets && frame.shown === this.shown) this.opaque(frame.start, tagEnd);
-      this.pending?.out.setZones(this.zones());
     } else if (flow !== Flow.hidden && flow !== Flow.lineBreak && flow !== Flow.picture) {
       this.flush();
       if (this.link?.frame === frame) this.link = undefined;
@@ -139,8 +141,10 @@ export class Elements {
   }
 
   private space(from: number, to: number): void {
-    if (!this.pending) return;
-    this.pending.out.space(from, to);
+    const { pending } = this;
+    if (!pending || pending.spaced) return;
+    pending.out.space(from, to);
+    pending.spaced = true;
     this.spacedTo = to;
   }
 
@@ -151,6 +155,7 @@ export class Elements {
     const pending = this.begin(from);
     pending.out.opaque(from, to);
     pending.end = to;
+    pending.spaced = false;
     this.shown++;
   }
 
@@ -161,7 +166,7 @@ export class Elements {
     const out = new ContentBuilder(this.text, at);
     out.setZones(this.zones());
     if (this.link) this.link.from = 0;
-    return (this.pending = { out, role: { kind, level, zones: blockZones }, end: at });
+    return (this.pending = { out, role: { kind, level, zones: blockZones }, end: at, spaced: true });
   }
 
   /** Ends the pending block. */
