@@ -23,7 +23,7 @@ const upToRewrite = [
 export const ROOMS: Readonly<Record<string, RoomRule>> = {
   base: { rooms: [] },
   text: { rooms: ['base'] },
-  prose: { rooms: ['base', 'text'], packages: [/^@lezer\//, /^yaml$/, /^character-entities$/] },
+  prose: { rooms: ['base', 'text'], packages: [/^@lezer\//, /^yaml$/, /^character-entities$/, /^htmlparser2$/] },
   tokens: { rooms: ['base', 'text', 'prose'], packages: [/^wink-/] },
   lexicon: { rooms: ['base'] },
   facts: { rooms: ['base', 'text', 'prose', 'tokens', 'lexicon'] },
