@@ -8,10 +8,10 @@ import type { Term } from './terms.js';
 
 /** The documents' own statements that terms are separate things. */
 export interface Separations {
-  /** In how many documents each of two terms has a heading, list item or table cell of its own beside the other's. */
+  /** In how many lists and tables each of two terms has an item or cell of its own beside the other's. */
   siblings(a: number, b: number): number;
-  /** Whether both are headwords of the documents' glossaries. */
-  bothDefined(a: number, b: number): boolean;
+  /** Whether both are headwords of the documents' glossaries, or one document has a heading for each. */
+  areSeparate(a: number, b: number): boolean;
 }
 
 const HEADING = BLOCK_KINDS.indexOf('heading');
@@ -69,15 +69,16 @@ function isOneStem(a: string, b: string): boolean {
 export function readSeparations(corpus: Corpus, segments: Segments): Separations {
   const { stream, vocabulary } = corpus;
   const groups = new Map<number, Set<number>>();
+  const headed = new Map<number, Set<number>>();
   const defined = new Set<number>();
   let group = 0;
   let document = -1;
   let previous = -1;
   let i = 0;
   const blocks = stream.blockKind.length;
-  const join = (id: number, term: number): void => {
-    const found = groups.get(term);
-    if (found === undefined) groups.set(term, new Set([id]));
+  const join = (into: Map<number, Set<number>>, id: number, term: number): void => {
+    const found = into.get(term);
+    if (found === undefined) into.set(term, new Set([id]));
     else found.add(id);
   };
   for (let block = 0; block < blocks; block++) {
@@ -97,8 +98,8 @@ export function readSeparations(corpus: Corpus, segments: Segments): Separations
     if (!opens) continue;
     const term = segments.term[i]!;
     if (kind === DEFINED) defined.add(term);
-    if (kind === HEADING) join(-1 - document, term);
-    else join(group, term);
+    // All headings of a document are one group; lists and tables are runs of their blocks.
+    join(kind === HEADING ? headed : groups, kind === HEADING ? document : group, term);
   }
   return {
     siblings: (a, b) => {
@@ -109,6 +110,10 @@ export function readSeparations(corpus: Corpus, segments: Segments): Separations
       for (const id of left) if (right.has(id)) count++;
       return count;
     },
-    bothDefined: (a, b) => defined.has(a) && defined.has(b),
+    areSeparate: (a, b) => {
+      if (defined.has(a) && defined.has(b)) return true;
+      const other = headed.get(b);
+      return other !== undefined && [...(headed.get(a) ?? [])].some((document) => other.has(document));
+    },
   };
 }

@@ -114,7 +114,7 @@ export class Judge {
 
   private isAble(pair: Pair): boolean {
     const { a, b } = pair;
-    if (!this.isOften(a) || !this.isOften(b) || this.separations.bothDefined(a, b)) return false;
+    if (!this.isOften(a) || !this.isOften(b) || this.separations.areSeparate(a, b)) return false;
     if (pair.evidence[0]?.kind !== 'neighbours') {
       const words = this.wordsOf(pair);
       if (bestScoreOf(words, 1) < THRESHOLD) return false;

@@ -54,15 +54,17 @@ function lexicalWeight({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): 
   const strength = strongest(evidence, ['list', 'dictionary', 'component']);
   if (strength === 0) return shape === 'contained' ? -1.3 : 0;
   // A general dictionary calls the terms of a field by one name that the field tells apart (alarm, alert).
-  if (shape === 'words') return -0.5 + 1.6 * strength - (strongest(evidence, ['list']) > 0 ? 0 : 0.45);
+  if (shape === 'words') return -0.8 + 1.6 * strength - (strongest(evidence, ['list']) > 0 ? 0 : 0.3);
   return 0.3 + 1.8 * strength - (shape === 'contained' ? 1.3 : 0);
 }
 
 /** What the documents themselves say and do: statements, and links to one place. */
 function statementWeight({ evidence }: Pick<Known, 'evidence'>): number {
   let weight = 0;
+  // A mere parenthesis says more where a list or dictionary agrees.
+  const agrees = strongest(evidence, ['list', 'dictionary', 'component']) > 0;
   for (const { kind, strength, value } of evidence) {
-    if (kind === 'definition') weight += (strength >= 0.8 ? 1.7 : 0.4) + 0.3 * Math.min(4, value - 1);
+    if (kind === 'definition') weight += (strength >= 0.8 ? 1.7 : agrees ? 0.7 : 0.4) + 0.3 * Math.min(4, value - 1);
     else if (kind === 'link-target') weight += 0.5 * Math.min(2, value);
   }
   return weight;
