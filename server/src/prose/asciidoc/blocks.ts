@@ -1,0 +1,350 @@
+// From lines to prose blocks: which lines are which kind of block, in which zones.
+import type { BlockRole } from '../content.js';
+import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
+import { Zone, type ZoneSet } from '../zones.js';
+import { namedAttribute, NO_ATTRIBUTES, withAttributes, type BlockAttributes } from './attributes.js';
+import { readBlockText } from './inline.js';
+import {
+  attributeEntry,
+  delimiter,
+  isAttributeLine,
+  isBlank,
+  isBlockTitle,
+  isBreak,
+  isComment,
+  isInclude,
+  sectionTitle,
+  underlinedLevel,
+  type Delimited,
+  type Line,
+} from './lines.js';
+import { listMark, type ListMark } from './lists.js';
+import { alternativeText } from './macros.js';
+import { cellsOf } from './tables.js';
+
+/** Blocks within blocks deeper than this are not read: each level costs time on every line. */
+export const DEEPEST = 24;
+
+/** What is around the blocks being read: zones, the kind of its paragraphs, and how many blocks it lies in. */
+export interface Surroundings {
+  readonly zones: ZoneSet;
+  readonly kind: BlockKind;
+  readonly depth: number;
+}
+
+const CODE_STYLES = new Set(
+  (
+    'source listing literal pass stem latexmath asciimath comment plantuml ditaa graphviz dot mermaid blockdiag seqdiag ' +
+    'actdiag nwdiag packetdiag rackdiag erd nomnoml svgbob vega vegalite wavedrom bytefield tikz d2 bpmn gnuplot msc pikchr'
+  ).split(' '),
+);
+const SAFETY_STYLES = new Set(['WARNING', 'CAUTION', 'DANGER', 'NOTICE']);
+const ADMONITION = /(NOTE|TIP|IMPORTANT|WARNING|CAUTION|DANGER|NOTICE):[ \t]+(?=\S)/y;
+const MACRO = /([\p{L}\p{N}_-]{1,40})::(\S*?)\[/uy;
+
+/** Reads the blocks of one document. */
+export class BlockReader {
+  readonly blocks: ProseBlock[] = [];
+  readonly problems: ReadingProblem[] = [];
+  language: string | undefined;
+
+  constructor(private readonly text: string) {}
+
+  /** Reads the lines `[from, to)`. */
+  read(lines: readonly Line[], from: number, to: number, around: Surroundings): void {
+    new Stretch(this, this.text, lines, to, around).read(from);
+  }
+
+  /** Where the comment, comment block or attribute entry at a line ends; `at` itself where there is none. */
+  behindSilent(lines: readonly Line[], at: number, to: number): number {
+    const { text } = this;
+    const line = lines[at]!;
+    const first = text.charCodeAt(line.start);
+    if (first === 47) {
+      if (delimiter(text, line)?.kind === 'comment') return Math.min(to, closingLine(text, lines, at, to) + 1);
+      return isComment(text, line) ? at + 1 : at;
+    }
+    const entry = first === 58 ? attributeEntry(text, line) : undefined;
+    if (!entry) return at;
+    if (entry.name === 'lang') {
+      const tag = text.slice(entry.value, line.end).trim();
+      if (/^[A-Za-z]{2,3}(?:[-_][A-Za-z0-9]+)*$/.test(tag)) this.language ??= tag.replaceAll('_', '-');
+    }
+    let last = at;
+    while (last + 1 < to && endsWithContinuation(text, lines[last]!)) last++;
+    return last + 1;
+  }
+
+  /** Adds the prose of some lines as one block. */
+  add(lines: readonly Line[], role: BlockRole): void {
+    for (const block of readBlockText(this.text, lines, role)) this.blocks.push(block);
+  }
+}
+
+/** A value goes on in the next line where ` \` ends this one (` + \` in one with a hard break). */
+function endsWithContinuation(text: string, line: Line): boolean {
+  return text.charCodeAt(line.end - 1) === 92 && isBlank(text.charCodeAt(line.end - 2));
+}
+
+/** The index of the line that closes the block which line `at` opens; `to` where none does. */
+function closingLine(text: string, lines: readonly Line[], at: number, to: number): number {
+  const { closing } = delimiter(text, lines[at]!)!;
+  for (let i = at + 1; i < to; i++) {
+    const { start, end } = lines[i]!;
+    if (end - start === closing.length && text.startsWith(closing, start)) return i;
+  }
+  return to;
+}
+
+/** Reads some lines at one depth. */
+class Stretch {
+  private attributes: BlockAttributes = NO_ATTRIBUTES;
+  /** Kind of the paragraphs of the list item that was read last, while its list goes on. */
+  private item: BlockKind | undefined;
+  /** True where what comes belongs to that item: behind `+`, or behind a term without text. */
+  private attached = false;
+  /** True behind a described term until its definition begins. */
+  private awaitsText = false;
+
+  constructor(
+    private readonly reader: BlockReader,
+    private readonly text: string,
+    private readonly lines: readonly Line[],
+    private readonly to: number,
+    private readonly around: Surroundings,
+  ) {}
+
+  read(from: number): void {
+    for (let at = from; at < this.to;) at = this.step(at);
+  }
+
+  /** Reads what begins at a line; the index of the line behind it. */
+  private step(at: number): number {
+    const { text, lines, to } = this;
+    const line = lines[at]!;
+    if (line.start === line.end || isInclude(text, line)) return at + 1;
+    const silent = this.reader.behindSilent(lines, at, to);
+    if (silent > at) return silent;
+    if (isAttributeLine(text, line)) {
+      this.attributes = withAttributes(this.attributes, text.slice(line.start + 1, line.end - 1));
+      return at + 1;
+    }
+    if (isContinuation(text, line)) {
+      this.attached = this.item !== undefined;
+      this.awaitsText = false;
+      return at + 1;
+    }
+    const opened = delimiter(text, line);
+    if (opened) return this.delimited(at, opened.kind);
+    if (isBlockTitle(text, line)) {
+      this.reader.add([{ start: line.start + 1, end: line.end }], this.role('caption'));
+      return at + 1;
+    }
+    return this.simple(at, line);
+  }
+
+  private simple(at: number, line: Line): number {
+    const { text, lines, to } = this;
+    const { style } = this.attributes;
+    if (CODE_STYLES.has(style)) return this.done(this.paragraphEnd(at, false));
+    const title = sectionTitle(text, line);
+    if (title) {
+      this.reader.add([title], this.heading(title.level));
+      return this.done(at + 1, false);
+    }
+    if (this.around.depth === 0 && !this.attached && at + 1 < to) {
+      const level = listMark(text, line) ? 0 : underlinedLevel(text, line, lines[at + 1]!);
+      if (level > 0) {
+        this.reader.add([line], this.heading(level));
+        return this.done(at + 2, false);
+      }
+    }
+    if (isBreak(text, line)) return this.done(at + 1, false);
+    if (this.blockMacro(line)) return this.done(at + 1);
+    const mark = listMark(text, line);
+    if (mark) return this.listItem(at, line, mark);
+    // An indented paragraph is code, unless it is the first text of a described term.
+    if (isBlank(text.charCodeAt(line.start)) && style !== 'normal' && !this.awaitsText) {
+      return this.done(this.paragraphEnd(at, this.item !== undefined), true);
+    }
+    return this.paragraph(at, line);
+  }
+
+  private paragraph(at: number, line: Line): number {
+    const { text } = this;
+    const end = this.paragraphEnd(at, this.attached);
+    const styled = styleZones(this.attributes.style);
+    ADMONITION.lastIndex = line.start;
+    const admonition = ADMONITION.exec(text);
+    const content = this.contentLines(at, end);
+    let zones = styled;
+    if (admonition) {
+      if (SAFETY_STYLES.has(admonition[1]!)) zones |= Zone.safetyMessage;
+      content[0] = { start: line.start + admonition[0].length, end: line.end };
+    } else if (text.charCodeAt(line.start) === 62 && /[> \t]/.test(text[line.start + 1] ?? ' ')) {
+      zones |= Zone.quotation;
+      for (let i = 0; i < content.length; i++) content[i] = withoutQuoteMark(text, content[i]!);
+    } else if (text.charCodeAt(line.start) === 34 && content.length > 1) {
+      const last = content.at(-1)!;
+      if (text.startsWith('-- ', last.start) && text.charCodeAt(content.at(-2)!.end - 1) === 34) {
+        zones |= Zone.quotation;
+        content.pop();
+      }
+    }
+    this.reader.add(content, this.role(this.innerKind(), zones));
+    return this.done(end);
+  }
+
+  /** One item's first paragraph; what follows it may belong to it too. */
+  private listItem(at: number, line: Line, mark: ListMark): number {
+    const hasText = mark.start < line.end;
+    this.item = mark.term ? 'definition' : 'listItem';
+    this.attached = true;
+    this.awaitsText = !hasText;
+    if (mark.term) this.reader.add([mark.term], this.role('definedTerm', Zone.definedTerm));
+    if (!hasText) {
+      this.attributes = NO_ATTRIBUTES;
+      return at + 1;
+    }
+    const end = this.paragraphEnd(at, true);
+    const content = this.contentLines(at, end);
+    content[0] = { start: mark.start, end: line.end };
+    this.reader.add(content, this.role(this.item));
+    this.attributes = NO_ATTRIBUTES;
+    this.attached = false;
+    return end;
+  }
+
+  private delimited(at: number, kind: Delimited): number {
+    const { text, lines, to } = this;
+    const close = closingLine(text, lines, at, to);
+    if (close === to) {
+      const message = 'Nothing closes the block that this line opens, so it reaches to the end of what it stands in.';
+      this.reader.problems.push({ span: lines[at]!, message });
+    }
+    const { style } = this.attributes;
+    if (kind === 'table') this.table(at, close);
+    else if (kind !== 'verbatim' && !CODE_STYLES.has(style)) {
+      const quoted = kind === 'quote' || style === 'quote' || style === 'verse';
+      const zones = styleZones(style) | (quoted ? Zone.quotation : 0);
+      this.inner(lines, at + 1, close, { zones: this.around.zones | zones, kind: this.innerKind() });
+    }
+    return this.done(Math.min(to, close + 1));
+  }
+
+  private inner(lines: readonly Line[], from: number, to: number, around: Omit<Surroundings, 'depth'>): void {
+    if (from >= to) return;
+    const depth = this.around.depth + 1;
+    if (depth <= DEEPEST) {
+      this.reader.read(lines, from, to, { ...around, depth });
+      return;
+    }
+    const message = `Text nested more than ${DEEPEST} levels deep is not read.`;
+    this.reader.problems.push({ span: { start: lines[from]!.start, end: lines[to - 1]!.end }, message });
+  }
+
+  private table(at: number, close: number): void {
+    const { text, lines, around } = this;
+    const opening = text[lines[at]!.start]!;
+    const zones = around.zones | Zone.tableCell;
+    for (const cell of cellsOf(text, lines, at + 1, close, opening, this.attributes)) {
+      if (cell.style === 'l' || cell.style === 'm') continue;
+      if (cell.style === 'a') {
+        this.inner(withoutIndent(text, cell.lines), 0, cell.lines.length, { zones, kind: 'tableCell' });
+        continue;
+      }
+      for (const paragraph of paragraphs(cell.lines)) {
+        this.reader.add(paragraph, { kind: 'tableCell', level: 0, zones });
+      }
+    }
+  }
+
+  /** `name::target[list]` on a line of its own: of an image the alternative text and the title are read. */
+  private blockMacro(line: Line): boolean {
+    const { text } = this;
+    MACRO.lastIndex = line.start;
+    const found = text.charCodeAt(line.end - 1) === 93 ? MACRO.exec(text) : null;
+    const from = line.start + (found?.[0].length ?? 0);
+    if (!found || from > line.end) return false;
+    if (found[1] !== 'image') return true;
+    const alternative = alternativeText(text, from, line.end - 1);
+    if (alternative) this.reader.add([alternative], this.role('alternativeText', Zone.alternativeText));
+    const title = namedAttribute(text.slice(from, line.end - 1), 'title');
+    const start = title ? text.indexOf(title, from) : -1;
+    if (title && start >= (alternative?.end ?? 0)) {
+      this.reader.add([{ start, end: start + title.length }], this.role('caption'));
+    }
+    return true;
+  }
+
+  /** The index behind the last line of a paragraph that begins at `at`. */
+  private paragraphEnd(at: number, atListMarks: boolean): number {
+    const { text, lines, to } = this;
+    let end = at + 1;
+    for (; end < to; end++) {
+      const line = lines[end]!;
+      if (line.start === line.end || isContinuation(text, line) || isInclude(text, line)) break;
+      if (isAttributeLine(text, line) || delimiter(text, line)) break;
+      if (atListMarks && listMark(text, line)) break;
+    }
+    return end;
+  }
+
+  private contentLines(at: number, end: number): Line[] {
+    const content = this.lines.slice(at, end);
+    return content.length === 1 ? content : content.filter((line) => !isComment(this.text, line));
+  }
+
+  /** Kind of the paragraphs that belong to a list item or to nothing. */
+  private innerKind(): BlockKind {
+    return (this.attached ? this.item : undefined) ?? this.around.kind;
+  }
+
+  private role(kind: BlockKind, zones: ZoneSet = 0): BlockRole {
+    return { kind, level: 0, zones: this.around.zones | zones };
+  }
+
+  private heading(level: number): BlockRole {
+    return { kind: 'heading', level, zones: this.around.zones | Zone.heading };
+  }
+
+  /** A block was read: its attributes are used up, and it ended the list unless it belongs to an item. */
+  private done(next: number, inList = this.attached): number {
+    if (!inList) this.item = undefined;
+    this.attributes = NO_ATTRIBUTES;
+    this.attached = false;
+    this.awaitsText = false;
+    return next;
+  }
+}
+
+function isContinuation(text: string, line: Line): boolean {
+  return line.end === line.start + 1 && text.charCodeAt(line.start) === 43;
+}
+
+function styleZones(style: string): ZoneSet {
+  if (SAFETY_STYLES.has(style)) return Zone.safetyMessage;
+  return style === 'quote' || style === 'verse' ? Zone.quotation : 0;
+}
+
+function withoutQuoteMark(text: string, line: Line): Line {
+  return text.charCodeAt(line.start) === 62 ? { start: line.start + 1, end: line.end } : line;
+}
+
+/** A cell's lines, the first of which stands behind the mark of the cell and blanks. */
+function withoutIndent(text: string, lines: readonly Line[]): Line[] {
+  return lines.map((line, i) => {
+    let { start } = line;
+    if (i === 0) while (start < line.end && isBlank(text.charCodeAt(start))) start++;
+    return { start, end: line.end };
+  });
+}
+
+function paragraphs(lines: readonly Line[]): Line[][] {
+  const found: Line[][] = [[]];
+  for (const line of lines) {
+    if (line.start < line.end) found.at(-1)!.push(line);
+    else if (found.at(-1)!.length > 0) found.push([]);
+  }
+  return found;
+}
