@@ -33,7 +33,7 @@ const ELEMENTS: readonly role.RoleLine[] = [
   [role.SAFETY, 'hazardstatement'],
   [role.PARAGRAPH, 'typeofhazard consequence howtoavoid'],
   [role.QUOTATION, 'lq'],
-  [role.ASIDE, 'fn'],
+  [role.ASIDE, 'fn xref>desc link>desc'],
   [role.ALTERNATIVE, 'alt'],
   [role.PICTURE, 'image hazardsymbol object'],
   [role.METADATA, 'prolog metadata topicmeta'],
@@ -44,7 +44,7 @@ const ELEMENTS: readonly role.RoleLine[] = [
   ],
   [role.CLOSED, 'coords shape longquoteref data-about foreign unknown svg mathml equation-block equation-figure'],
   [role.CLOSED, `${DRAFT} coderef include`],
-  [role.HIDDEN, 'indexterm index-see index-see-also index-sort-as data longdescref xref>desc boolean state'],
+  [role.HIDDEN, 'indexterm index-see index-see-also index-sort-as data longdescref boolean state'],
   [role.HIDDEN, 'sort-as indextermref anchor param'],
   [
     role.OPAQUE_INLINE,
@@ -61,7 +61,6 @@ const ELEMENTS: readonly role.RoleLine[] = [
   [role.QUOTE, 'q cite'],
   [role.link('href', 'keyref'), 'xref'],
   [{ ...role.PARAGRAPH, targets: ['href', 'keyref'] }, 'link'],
-  [role.HIDDEN, 'link>desc'],
   [role.INLINE, 'ph keyword b i u sub tm text linktext overline itemgroup'],
 ];
 

@@ -1,0 +1,105 @@
+// HTML held against parse5 8, the HTML Standard's algorithm: which words are prose, and where they stand.
+import { spawnSync } from 'node:child_process';
+import { existsSync, readdirSync, readFileSync } from 'node:fs';
+import path from 'node:path';
+import { micromark } from 'micromark';
+import { gfm, gfmHtml } from 'micromark-extension-gfm';
+import { defaultTreeAdapter as tree, parse, type DefaultTreeAdapterTypes } from 'parse5';
+import { describe, expect, it } from 'vitest';
+import { compare, expectAgreement, newScore, type Judged } from './markupOracle.js';
+
+/** Elements in which text is no prose: code and what pages hold for machines (HTML Standard), navigation, superscripts. */
+const CLOSED = new Set(
+  'script style template noscript pre code samp tt var svg math canvas audio video object iframe textarea select nav sup'
+    .concat(' progress meter output data datalist rp rt listing xmp')
+    .split(' '),
+);
+
+function textOf(source: string): (readonly [number, number])[] {
+  const found: (readonly [number, number])[] = [];
+  const visit = (node: DefaultTreeAdapterTypes.Node): void => {
+    if (tree.isTextNode(node)) {
+      const place = node.sourceCodeLocation;
+      if (!place) return;
+      // A text that goes on behind the page's end tags is one to parse5, and its place holds them.
+      const end = source.slice(place.startOffset, place.endOffset).search(/<\/(?:body|html)>/i);
+      found.push([place.startOffset, end < 0 ? place.endOffset : place.startOffset + end]);
+    } else if (!('childNodes' in node) || (tree.isElementNode(node) && CLOSED.has(node.tagName))) return;
+    else for (const child of node.childNodes) visit(child);
+  };
+  visit(parse(source, { sourceCodeLocationInfo: true, scriptingEnabled: false }));
+  return found;
+}
+
+function judged(name: string, source: string): Judged {
+  return { name, format: 'html', source, prose: textOf(source) };
+}
+
+const PAGE = `<!doctype html>
+<html lang=en><head><meta charset=utf-8><title>Keys &amp; locks</title>
+<style>p { color: red }</style><script>document.write("<p>not prose</p>")</script></head>
+<body><header><h1>Keys</h1></header><nav><ul><li><a href="/">Home page</a></ul></nav>
+<main><p>A <b>main</b> key opens <i>every</i> lock<!-- not this one -->; see <a href="locks.html#main">the locks</a>.
+<p>Caf&eacute; keys are br<em>and</em> new, 🙂 na\u00efve 漢字 too.<ul><li>one<li>two <code>not this</code><ul><li>three</ul></ul>
+<table><caption>All keys</caption><tr><th>Name<th>Use<tr><td>North<td>Opens the mast</table>
+<dl><dt>key<dd>It opens.<dt>lock<dd>It keeps.</dl><pre>not this</pre>
+<details><summary>More</summary>The rest, with <kbd>Ctrl</kbd> and <q>a word</q>.</details>
+<svg><title>not this</title></svg><textarea>nor this</textarea><figure><img alt="A mast" src=a.png><figcaption>The mast</figcaption></figure>
+</main></body></html>`;
+
+const root = path.resolve(import.meta.dirname, '../..');
+
+describe('HTML against parse5', () => {
+  it('agrees on a page with the usual constructs', () => {
+    const score = newScore();
+    compare(judged('page.html', PAGE), score);
+    compare(judged('page.html', PAGE.replaceAll('\n', '\r\n')), score);
+    expectAgreement(score, 80);
+    expect({ missing: score.missing, extra: score.extra }).toEqual({ missing: [], extra: [] });
+  });
+
+  it('agrees on the read-me files of npm packages, as micromark makes pages of them', () => {
+    const score = newScore();
+    for (const name of [
+      'prettier',
+      'vitest',
+      'esbuild',
+      'fast-check',
+      'yaml',
+      'eslint',
+      'mocha',
+      'vite',
+      'parse5',
+      'ajv',
+      'ignore',
+    ]) {
+      const file = path.join(root, 'node_modules', name, 'README.md');
+      if (!existsSync(file)) continue;
+      const page = micromark(readFileSync(file, 'utf8'), {
+        allowDangerousHtml: true,
+        extensions: [gfm()],
+        htmlExtensions: [gfmHtml()],
+      });
+      compare(judged(`${name}.html`, page), score);
+    }
+    expectAgreement(score, 1000);
+  }, 60_000);
+
+  it('agrees on pages of the documentation of Rust', (context) => {
+    const { stdout } = spawnSync('rustc', ['--print', 'sysroot'], { encoding: 'utf8' });
+    const folder = path.join(stdout?.trim() || '/nowhere', 'share/doc/rust/html');
+    if (!existsSync(folder)) return context.skip('needs a Rust toolchain with its documentation (rust-docs)');
+    const score = newScore();
+    for (const book of ['book', 'cargo', 'reference', 'rustdoc', 'std/vec']) {
+      const inside = path.join(folder, book);
+      if (!existsSync(inside)) continue;
+      const files = readdirSync(inside).filter((file) => file.endsWith('.html') && file !== 'print.html');
+      const stride = Math.max(1, Math.ceil(files.length / Number(process.env.ORACLE_FILES ?? 8)));
+      for (let i = 0; i < files.length; i += stride) {
+        const source = readFileSync(path.join(inside, files[i]!), 'utf8');
+        if (source.length < 400_000) compare(judged(`${book}/${files[i]}`, source), score);
+      }
+    }
+    expectAgreement(score, 1000);
+  }, 60_000);
+});
