@@ -20,32 +20,29 @@ export interface Dictionary {
 
 /** Reads the database files (format: wndb(5WN)). */
 export function readDictionary(folder = dictionaryFolder()): Dictionary {
-  const synsets = new Map<string, Set<string>>();
+  /** From part and word to its sets of synonyms, each as its place in the file, with a space before. */
+  const synsets = new Map<string, string>();
   const antonyms = new Set<string>();
   for (const part of PARTS) {
-    const words = new Map<string, string[]>();
-    const opposed: { from: string; to: string; word: number; other: number }[] = [];
+    /** Members of the sets that have antonyms; these go both ways, so the other set is there too. */
+    const members = new Map<string, string[]>();
+    const opposed: Opposed[] = [];
     for (const line of readFileSync(join(folder, `data.${part}`), 'latin1').split('\n')) {
-      if (!/^\d{8} /.test(line)) continue;
+      if (line.startsWith(' ') || line === '') continue;
       const fields = line.slice(0, line.indexOf(' | ')).split(' ');
+      const place = fields[0]!;
       const count = Number.parseInt(fields[3]!, 16);
-      const members = Array.from({ length: count }, (_, at) => plain(fields[4 + 2 * at]!));
-      words.set(fields[0]!, members);
-      for (const word of members) {
+      const words = Array.from({ length: count }, (_, at) => plain(fields[4 + 2 * at]!));
+      for (const word of words) {
         const key = `${part} ${word}`;
-        const own = synsets.get(key) ?? new Set<string>();
-        synsets.set(key, own.add(`${part} ${fields[0]!}`));
+        synsets.set(key, `${synsets.get(key) ?? ''} ${place}`);
       }
-      const pointers = 5 + 2 * count;
-      for (let at = pointers; at + 3 < fields.length && at < pointers + 4 * Number(fields[pointers - 1]); at += 4) {
-        if (fields[at] !== '!') continue;
-        const numbers = fields[at + 3]!;
-        const [word, other] = [numbers.slice(0, 2), numbers.slice(2)].map((each) => Number.parseInt(each, 16) - 1);
-        opposed.push({ from: fields[0]!, to: fields[at + 1]!, word: word!, other: other! });
-      }
+      if (!fields.includes('!')) continue;
+      members.set(place, words);
+      opposed.push(...opposedIn(fields, 4 + 2 * count));
     }
     for (const { from, to, word, other } of opposed) {
-      const [left, right] = [words.get(from)?.[word], words.get(to)?.[other]];
+      const [left, right] = [members.get(from)?.[word], members.get(to)?.[other]];
       if (left !== undefined && right !== undefined) antonyms.add(`${left}|${right}`).add(`${right}|${left}`);
     }
   }
@@ -53,10 +50,29 @@ export function readDictionary(folder = dictionaryFolder()): Dictionary {
     areAntonyms: (a, b) => antonyms.has(`${a}|${b}`),
     knows: (a, part) => synsets.has(`${part} ${a}`),
     areSynonyms: (a, b, part) => {
-      const others = synsets.get(`${part} ${b}`);
-      return [...(synsets.get(`${part} ${a}`) ?? [])].some((synset) => others?.has(synset) === true);
+      const others = synsets.get(`${part} ${b}`)?.split(' ') ?? [];
+      return (synsets.get(`${part} ${a}`)?.split(' ') ?? []).some((place) => place !== '' && others.includes(place));
     },
   };
+}
+
+/** An antonym pointer: from the word with one number (from 0) in one set to that in another. */
+interface Opposed {
+  readonly from: string;
+  readonly to: string;
+  readonly word: number;
+  readonly other: number;
+}
+
+/** The antonym pointers of a line; `at` is the field with the number of pointers, of four fields each. */
+function opposedIn(fields: readonly string[], at: number): Opposed[] {
+  return Array.from({ length: Number(fields[at]) }, (_, index) => at + 1 + 4 * index)
+    .filter((first) => fields[first] === '!')
+    .map((first) => {
+      const numbers = fields[first + 3]!;
+      const [word, other] = [numbers.slice(0, 2), numbers.slice(2)].map((each) => Number.parseInt(each, 16) - 1);
+      return { from: fields[0]!, to: fields[first + 1]!, word: word!, other: other! };
+    });
 }
 
 function dictionaryFolder(): string {
