@@ -53,13 +53,12 @@ export function mailStart(text: string, at: number, least: number): number {
   return start < at && at - start <= LONGEST_LOCAL_PART ? start : -1;
 }
 
-/** Where the domain at `from` ends, or -1 where it has no dot. */
+/** Where the domain at `from` ends, or -1 where there is none. */
 export function mailEnd(text: string, from: number): number {
   let end = from;
   while (end < text.length && (isAlphanumeric(text.charCodeAt(end)) || '-.'.includes(text[end]!))) end++;
   while (end > from && '-.'.includes(text[end - 1]!)) end--;
-  const dot = text.indexOf('.', from);
-  return dot > from && dot < end ? end : -1;
+  return end > from ? end : -1;
 }
 
 function isMailUnit(unit: number): boolean {

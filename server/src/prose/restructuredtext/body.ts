@@ -177,7 +177,7 @@ function lineBlock(
     let next = line + 1;
     while (next < to && !lines.isBlank(next) && lines.column[next]! > base) next++;
     lines.at[line] = at;
-    if (at < end) readLeaf(cx, lines, line, next, { ...setting, level: 0 });
+    if (at < end) readLeaf(cx, lines, line, next, setting);
     line = next;
   }
   return line;
@@ -228,15 +228,15 @@ function textElement(
   while (end < to && !lines.isBlank(end) && lines.column[end]! <= base) end++;
   const lastAt = lines.at[end - 1]!;
   const lastEnd = lines.end[end - 1]!;
-  const role = { ...setting, level: 0 };
   if (!announcesLiteral(text, lastAt, lastEnd)) {
-    readLeaf(cx, lines, line, end, role);
+    readLeaf(cx, lines, line, end, setting);
     return end;
   }
   // Of `text::` the colon is read that docutils shows; a lone `::` shows nothing.
   const before = lastEnd - 2;
-  if (before > lastAt) readLeaf(cx, lines, line, end, role, isBlank(text.charCodeAt(before - 1)) ? before : before + 1);
-  else if (end - 1 > line) readLeaf(cx, lines, line, end - 1, role);
+  if (before > lastAt)
+    readLeaf(cx, lines, line, end, setting, isBlank(text.charCodeAt(before - 1)) ? before : before + 1);
+  else if (end - 1 > line) readLeaf(cx, lines, line, end - 1, setting);
   return literalEnd(cx, lines, end, to, base);
 }
 

@@ -1,15 +1,13 @@
 // What reading a document needs to know everywhere, and what it leaves behind.
-import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
-import type { ZoneSet } from '../zones.js';
+import type { BlockRole } from '../content.js';
+import type { ProseBlock, ReadingProblem } from '../prose.js';
 import type { Lines } from './lines.js';
 
 /** Bodies nested deeper than this are not read. */
 export const DEEPEST = 32;
 
-/** Where a body stands: what its paragraphs are, in which zones, how deep, and whether titles may stand in it. */
-export interface Setting {
-  readonly kind: BlockKind;
-  readonly zones: ZoneSet;
+/** Where a body stands: what its paragraphs are, and how deep it is nested. */
+export interface Setting extends BlockRole {
   readonly depth: number;
 }
 
@@ -27,7 +25,14 @@ export interface DocumentContext {
   readBody(lines: Lines, from: number, to: number, base: number, setting: Setting): void;
 }
 
+const NO_CHANGE: Partial<BlockRole> = {};
+
 /** The setting one body further in. */
-export function inside(setting: Setting, change: Partial<Setting> = {}): Setting {
-  return { ...setting, ...change, depth: setting.depth + 1 };
+export function inside(setting: Setting, change: Partial<BlockRole> = NO_CHANGE): Setting {
+  return {
+    kind: change.kind ?? setting.kind,
+    level: 0,
+    zones: change.zones ?? setting.zones,
+    depth: setting.depth + 1,
+  };
 }

@@ -20,7 +20,7 @@ export function definitionItem(
   const at = lines.at[line]!;
   const end = classifierStart(cx.text, at, lines.end[line]!);
   if (isTerm(cx.text.slice(at, end))) readTerm(cx, at, end, setting);
-  else readPhrase(cx, at, end, { ...setting, level: 0 });
+  else readPhrase(cx, at, end, setting);
   const block = indentedBlock(lines, line + 1, to, base);
   cx.readBody(lines, line + 1, block.to, block.margin, inside(setting, { kind: 'definition' }));
   return block.next;

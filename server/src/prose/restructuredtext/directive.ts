@@ -45,7 +45,12 @@ export function readDirective(
   if (name === 'epigraph' || name === 'pull-quote') zones |= Zone.quotation;
   const within = { ...setting, zones };
   if (kind.argument !== 'none') readArgument(cx, head, kind, within);
-  else if (options > first && kind.body === 'prose') cx.readBody(lines, first, options, base, inside(within));
+  else if (options > first && kind.body === 'prose') {
+    // Without options between them, the first lines and the rest are one body.
+    const end = options < headEnd ? options : to;
+    cx.readBody(lines, first, end, base, inside(within));
+    if (end === to) return;
+  }
   if (kind.options) readOptions(cx, lines, options, headEnd, kind.options, within);
   const from = skipBlank(lines, kind.body === 'meta' || kind.body === 'glossary' ? options : headEnd, to);
   if (from >= to || (!known && !looksLikeProse(text, lines, from))) return;
@@ -91,7 +96,7 @@ function readBehindVersion(cx: DocumentContext, { lines, from, to }: Range, sett
   while (at < end && isBlank(text.charCodeAt(at))) at++;
   lines.at[from] = at;
   const start = at < end ? from : from + 1;
-  if (start < to) readLeaf(cx, lines, start, to, { ...setting, level: 0 });
+  if (start < to) readLeaf(cx, lines, start, to, setting);
 }
 
 function readOptions(
@@ -99,7 +104,7 @@ function readOptions(
   lines: Lines,
   from: number,
   to: number,
-  wanted: Readonly<Record<string, 'caption' | 'alternativeText'>>,
+  wanted: NonNullable<DirectiveKind['options']>,
   setting: Setting,
 ): void {
   for (let line = from; line < to;) {
@@ -112,7 +117,8 @@ function readOptions(
       moveStart(cx.text, lines, line, colon + 1, lines.column[line]!);
       const zones = setting.zones | (kind === 'alternativeText' ? Zone.alternativeText : 0);
       const start = lines.isBlank(line) ? line + 1 : line;
-      if (start < next) readLeaf(cx, lines, start, next, { kind, level: 0, zones });
+      if (kind === 'tableCell') readRecords(cx, lines, start, next, setting);
+      else if (start < next) readLeaf(cx, lines, start, next, { kind, level: 0, zones });
     }
     line = next;
   }

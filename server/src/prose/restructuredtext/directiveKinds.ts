@@ -11,7 +11,7 @@ export interface DirectiveKind {
   readonly argument: Argument;
   readonly body: Body;
   /** Options whose values are prose. */
-  readonly options?: Readonly<Record<string, 'caption' | 'alternativeText'>>;
+  readonly options?: Readonly<Record<string, 'caption' | 'alternativeText' | 'tableCell'>>;
   /** True where the directive warns of harm. */
   readonly safety?: true;
 }
@@ -41,7 +41,7 @@ define('figure', { argument: 'opaque', body: 'caption', options: { alt: 'alterna
 define('image thumbnail', { argument: 'opaque', body: 'none', options: { alt: 'alternativeText' } });
 define('table', { argument: 'caption', body: 'prose' });
 define('list-table flat-table', { argument: 'caption', body: 'cells' });
-define('csv-table', { argument: 'caption', body: 'records' });
+define('csv-table', { argument: 'caption', body: 'records', options: { header: 'tableCell' } });
 define('toctree', { argument: 'opaque', body: 'none', options: { caption: 'caption' } });
 define('contents', { argument: 'caption', body: 'none' });
 define('rubric', { argument: 'heading', body: 'none' });

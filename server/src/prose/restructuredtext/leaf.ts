@@ -19,14 +19,21 @@ export function readLeaf(
   const { text } = cx;
   const start = lines.at[from]!;
   if (end <= start) return;
-  let joined = text.slice(start, to === from + 1 ? end : lines.end[from]!);
   const joinedAt = [0];
   const sourceAt = [start];
+  let joined = '';
+  // Lines that follow one another without indentation are one slice.
+  let sliceFrom = start;
   for (let line = from + 1; line < to; line++) {
-    joinedAt.push(joined.length + 1);
-    sourceAt.push(lines.at[line]!);
-    joined += `\n${text.slice(lines.at[line], line === to - 1 ? end : lines.end[line]!)}`;
+    const at = lines.at[line]!;
+    const before = lines.end[line - 1]!;
+    if (at === before + 1 && text.charCodeAt(before) === 10) continue;
+    joined += `${text.slice(sliceFrom, before)}\n`;
+    sliceFrom = at;
+    joinedAt.push(joined.length);
+    sourceAt.push(at);
   }
+  joined += text.slice(sliceFrom, end);
   const out = new ContentBuilder(text, start);
   readInline(cx, { text: joined, joinedAt, sourceAt }, out);
   const content = out.finish(role, end);

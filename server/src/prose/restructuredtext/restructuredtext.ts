@@ -20,7 +20,8 @@ export function readRestructuredText(source: SourceText): Reading {
     targets: targetsIn(text),
     readBody: (inner, from, to, base, setting) => readBody(cx, inner, from, to, base, setting),
   };
-  if (lines.count > 0) cx.readBody(lines, 0, lines.count, 0, { kind: 'paragraph', zones: Zone.prose, depth: 0 });
+  if (lines.count > 0)
+    cx.readBody(lines, 0, lines.count, 0, { kind: 'paragraph', level: 0, zones: Zone.prose, depth: 0 });
   return { source, prose: { blocks: cx.blocks, problems: cx.problems, language: undefined } };
 }
 
