@@ -84,10 +84,13 @@ export class Engine {
     const mine = ++this.settlement;
     const changes = new Map<string, DocumentFacts | undefined>();
     const began = new Map<string, EngineDocument | undefined>();
-    for (const [uri, known] of [...this.unsettled]) {
+    for (const uri of [...this.unsettled.keys()]) {
+      // Read anew after each rest: an edit meanwhile has thrown away facts that came with the text before it.
       const document = this.state.documents.get(uri);
+      const facts = document && (this.unsettled.get(uri) ?? this.factsOf(document));
+      this.unsettled.set(uri, facts);
       began.set(uri, document);
-      changes.set(uri, document && (known ?? this.factsOf(document)));
+      changes.set(uri, facts);
       yield;
       if (mine !== this.settlement) return this.snapshot;
     }
