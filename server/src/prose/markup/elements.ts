@@ -19,9 +19,9 @@ interface OpenLink {
 interface Pending {
   readonly out: ContentBuilder;
   readonly role: BlockRole;
-  /** The source offset behind what is visible so far. */
+  /** The source offset behind its text so far. */
   end: number;
-  /** True where white space follows that. */
+  /** True where white space ends that. */
   spaced: boolean;
 }
 
@@ -110,8 +110,8 @@ export class Elements {
     }
     const pending = this.begin(visible);
     this.reader.read(pending.spaced ? visible : from, to, pending.out, plain);
-    pending.end = this.reader.visibleEnd(visible, to);
-    pending.spaced = pending.end < to;
+    pending.end = to;
+    pending.spaced = this.reader.visibleEnd(visible, to) < to;
     this.shown++;
   }
 
@@ -144,8 +144,8 @@ export class Elements {
     const { pending } = this;
     if (!pending || pending.spaced) return;
     pending.out.space(from, to);
+    pending.end = this.spacedTo = to;
     pending.spaced = true;
-    this.spacedTo = to;
   }
 
   /** One opaque unit for `[start, to)`, or for what spaces in it leave. */

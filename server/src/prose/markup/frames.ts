@@ -43,18 +43,20 @@ const INHERITED: ZoneSet = Zone.quotation | Zone.safetyMessage;
 
 /** The frame on which a document's outermost elements stand. */
 export function ground(role: ElementRole, takesText: boolean): Frame {
-  return {
-    ...{ name: '', role, state: State.read, kind: 'paragraph', level: 0, blockZones: 0, inlineZones: 0 },
-    ...{ depth: 0, titled: 'heading', takesText, start: 0, shown: 0 },
-  };
+  const zones = { blockZones: 0, inlineZones: 0 };
+  const place = { depth: 0, titled: 'heading', start: 0, shown: 0 } as const;
+  return { name: '', role, state: State.read, kind: 'paragraph', level: 0, ...zones, ...place, takesText };
 }
 
 /** The frame of an element of which nothing is read. */
 export function closedFrame(parent: Frame, name: string, role: ElementRole, start: number): Frame {
-  return { ...parent, name, role, start, state: State.none };
+  return like(parent, name, role, start, State.none, 0, parent.inlineZones, parent.takesText);
 }
 
-/** The frame of an element that is read; `zones` are its role's and what its attributes add. */
+/**
+ * The frame of an element that is read; `zones` are its role's and what its attributes add, `shown` counts what was
+ * visible before it.
+ */
 export function openFrame(
   parent: Frame,
   name: string,
@@ -64,25 +66,57 @@ export function openFrame(
   shown: number,
 ): Frame {
   const { flow } = role;
-  if (flow === Flow.inline) {
-    return { ...parent, name, role, start, shown, takesText: true, inlineZones: parent.inlineZones | zones };
-  }
+  if (flow === Flow.inline) return like(parent, name, role, start, State.read, shown, parent.inlineZones | zones, true);
   const depth = parent.depth + (role.titled === 'heading' ? 1 : 0);
   let blockZones = (flow === Flow.aside ? parent.blockZones & INHERITED : parent.blockZones) | zones;
   let kind = role.kind ?? parent.kind;
-  let level = role.level === 0 ? Math.max(1, depth) : (role.level ?? parent.level);
+  let level = role.level === 0 ? Math.max(1, depth) : (role.level ?? (role.kind === undefined ? parent.level : 0));
   if (role.isTitle) {
     const isHeading = parent.titled === 'heading';
     kind = isHeading ? 'heading' : 'caption';
     level = isHeading ? Math.max(1, depth) : 0;
     if (isHeading) blockZones |= Zone.heading;
-  } else if (role.kind !== undefined && role.level === undefined) level = 0;
+  }
   return {
-    ...{ name, role, kind, level, blockZones, depth, start, shown },
+    name,
+    role,
     state: flow === Flow.metadata ? State.metadata : flow === Flow.picture ? State.asides : State.read,
+    kind,
+    level,
+    blockZones,
     inlineZones: flow === Flow.aside ? 0 : parent.inlineZones,
+    depth,
     titled: role.titled ?? parent.titled,
     takesText: flow === Flow.block || flow === Flow.aside,
+    start,
+    shown,
+  };
+}
+
+/** A frame whose blocks are what its parent's are. Fields are named one by one: spreading costs a multiple. */
+function like(
+  parent: Frame,
+  name: string,
+  role: ElementRole,
+  start: number,
+  state: State,
+  shown: number,
+  inlineZones: ZoneSet,
+  takesText: boolean,
+): Frame {
+  return {
+    name,
+    role,
+    state,
+    kind: parent.kind,
+    level: parent.level,
+    blockZones: parent.blockZones,
+    inlineZones,
+    depth: parent.depth,
+    titled: parent.titled,
+    takesText,
+    start,
+    shown,
   };
 }
 

@@ -145,7 +145,8 @@ class MarkupStream {
   ontextentity(): void {}
 
   private characters(start: number, end: number, plain: boolean): void {
-    if (this.ended || this.beyond > 0 || this.vocabulary === undefined) return;
+    // The tokenizer gives -1 for the start of a tag that the end of the text cuts off.
+    if (start < 0 || this.ended || this.beyond > 0 || this.vocabulary === undefined) return;
     const { elements, vocabulary } = this;
     if (elements.frames.length === 1 && this.xml) return;
     if (vocabulary.unknown === 'skip' && !elements.top.takesText) return;
