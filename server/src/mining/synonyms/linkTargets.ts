@@ -44,7 +44,8 @@ export function pairByLinkTargets(corpus: Corpus, segments: Segments, pairs: Pai
     );
   }
   for (const { a, b, targets } of shared.values()) {
-    const place = targets.sort(compareCodeUnits)[0]!;
+    const first = targets.sort(compareCodeUnits)[0]!;
+    const place = first.slice(first.lastIndexOf('/') + 1) || first;
     pairs.add(a, b, {
       kind: 'link-target',
       strength: Math.min(1, 0.4 + 0.2 * targets.length),

@@ -5,6 +5,8 @@ import type { Pair } from './evidence.js';
 
 /** Below so many uses, likeness in use is chance. */
 const FEWEST_USES = 100;
+/** All pairs of terms are compared, of the most used ones. */
+const MOST_TERMS = 200;
 /** Each must be among so many nearest neighbours of the other. */
 const NEAREST = 2;
 /** Least share of the similarity that two names of one thing have. */
@@ -15,7 +17,11 @@ const MOST = 12;
 /** The pairs most alike in use that `judged` does not hold, strongest first. */
 export function* pairByLooks(judge: Judge, judged: readonly JudgedPair[]): Work<JudgedPair[]> {
   const known = new Set(judged.map(({ a, b }) => `${a} ${b}`));
-  const frequent = Array.from(judge.segments.uses.keys()).filter((term) => judge.segments.uses[term]! >= FEWEST_USES);
+  const { uses } = judge.segments;
+  const frequent = Array.from(uses.keys())
+    .filter((term) => uses[term]! >= FEWEST_USES)
+    .sort((a, b) => uses[b]! - uses[a]! || a - b)
+    .slice(0, MOST_TERMS);
   const nearest = yield* judge.nearestAmong(frequent, NEAREST);
   const pairs: Pair[] = [];
   for (const a of frequent) {

@@ -61,6 +61,7 @@ export function* compareTerms(
       const similarity = shared[other]!;
       let rank = 1;
       for (const third of touched) {
+        if (third === term) continue;
         if (shared[third]! > similarity || (shared[third] === similarity && third < other)) rank++;
       }
       places.set(term * vectors.length + other, { similarity, rank });

@@ -23,6 +23,8 @@ const FEWEST_USES = 3;
 const LEAST_PMI = 0.3;
 /** Verbs that are set side by side so often ("create or update") are two operations. */
 const MOST_COORDINATED = 2;
+/** What being set side by side once takes from the strength of a link. */
+const COORDINATED = 0.15;
 /** The best that a comparison can yield. */
 const NEAREST: Likeness = { similarity: 1, rankOfA: 1, rankOfB: 1 };
 /** Least score of a pair that is asked about. */
@@ -55,10 +57,12 @@ export function* askVerbs(corpus: Corpus, uses: Uint8Array): Work<Question[]> {
     meanings.forEachRelated(texts, (i, j) => {
       const [left, right] = [verbs[i]!, verbs[j]!];
       const link = linkVerbs(left.text, right.text, object);
-      if (link === undefined || read.coordinated(left.text, right.text) >= MOST_COORDINATED) return;
+      const coordinated = read.coordinated(left.text, right.text);
+      if (link === undefined || coordinated >= MOST_COORDINATED) return;
+      const isCoordinated = coordinated > 0;
       if (scoreOfVerbs(left.text, right.text, object, link, NEAREST, FEWEST_USES + 1) < THRESHOLD) return;
       const key = keyOf(left.verb, right.verb, read.verbs.size);
-      links.set(key, link);
+      links.set(key, isCoordinated ? { ...link, strength: link.strength - COORDINATED } : link);
       candidates.set(key, { a: Math.min(left.verb, right.verb), b: Math.max(left.verb, right.verb) });
     });
     return { object, verbs, links };
