@@ -85,8 +85,10 @@ function print(corpus: Corpus, question: Question, number: number): void {
   console.log(
     `${number}. ${question.kind}  ${terms.join('  |  ')}  conf ${question.confidence.toFixed(2)} worth ${question.worth.toFixed(1)}`,
   );
-  if (values.brief)
-    { console.log(`      ${question.reasons.map(({ kind, value }) => `${kind} ${value.toFixed(2)}`).join(', ')}`); return; }
+  if (values.brief) {
+    console.log(`      ${question.reasons.map(({ kind, value }) => `${kind} ${value.toFixed(2)}`).join(', ')}`);
+    return;
+  }
   for (const reason of question.reasons)
     console.log(`      (${reason.kind} ${reason.value.toFixed(2)}) ${reason.text}`);
   for (const place of question.places) console.log(`      ${place.term}: ${sentenceAt(corpus, place)}`);
