@@ -12,6 +12,7 @@ import {
   isBlockTitle,
   isBreak,
   isComment,
+  isEscaped,
   isInclude,
   sectionTitle,
   underlinedLevel,
@@ -263,7 +264,7 @@ class Stretch {
   private blockMacro(line: Line): boolean {
     const { text } = this;
     MACRO.lastIndex = line.start;
-    const found = text.charCodeAt(line.end - 1) === 93 ? MACRO.exec(text) : null;
+    const found = text.charCodeAt(line.end - 1) === 93 && !isEscaped(text, line) ? MACRO.exec(text) : null;
     const from = line.start + (found?.[0].length ?? 0);
     if (!found || from > line.end) return false;
     if (found[1] !== 'image') return true;

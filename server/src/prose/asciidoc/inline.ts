@@ -38,6 +38,10 @@ const SYMBOLS: readonly (readonly [string, string])[] = [
 ];
 const ADDRESS_BEFORE = /[\p{L}\p{N}._%+-]{1,64}$/u;
 const ADDRESS_BEHIND = /@[\p{L}\p{N}][\p{L}\p{N}_-]{0,62}(?:\.[\p{L}\p{N}_-]{1,63}){1,8}/uy;
+function isWhite(unit: number): boolean {
+  return unit === 32 || unit === 10 || unit === 9;
+}
+
 const ESCAPABLE = /[*_`#^~{<[(&+|'":\\]|https?:|[a-z]{2,20}:/y;
 
 /** One pass from left to right over a passage; `run` is where text begins that was not given to the builder yet. */
@@ -76,11 +80,18 @@ export class InlineReader {
     if (block) this.inner.splice(at, 0, block);
   }
 
-  /** Reads `[from, to)` as text in a further zone of the block being read. */
-  within(from: number, to: number, zone: ZoneSet): void {
+  /** Reads stretches as text in a further zone of the block being read, with a blank between them. */
+  within(zone: ZoneSet, ...stretches: readonly (readonly [number, number])[]): void {
     const before = this.out.currentZones;
     this.out.setZones(before | zone);
-    this.read(from, to);
+    let end = -1;
+    for (const stretch of stretches) {
+      const [from, to] = this.trimmed(...stretch);
+      if (from >= to) continue;
+      if (end >= 0) this.out.space(this.passage.sourceOf(end), this.passage.sourceOf(from));
+      this.read(from, to);
+      end = to;
+    }
     this.out.setZones(before);
   }
 
@@ -89,7 +100,7 @@ export class InlineReader {
     const before = this.out.currentZones;
     this.out.setZones(before | Zone.linkText);
     const start = this.out.length;
-    this.read(from, to);
+    this.read(...this.trimmed(from, to));
     this.out.link(start, target);
     this.out.setZones(before);
   }
@@ -99,9 +110,17 @@ export class InlineReader {
     this.out.opaque(this.passage.sourceOf(from), this.passage.sourceEndOf(to));
   }
 
-  /** A blank for `[from, to)`. */
-  space(from: number, to: number): void {
+  private space(from: number, to: number): void {
     this.out.space(this.passage.sourceOf(from), this.passage.sourceOf(to));
+  }
+
+  /** Without blanks at the ends: the builder has one blank for them already, if there is one outside. */
+  private trimmed(from: number, to: number): readonly [number, number] {
+    let start = from;
+    let end = to;
+    while (start < end && isWhite(this.text.charCodeAt(start))) start++;
+    while (end > start && isWhite(this.text.charCodeAt(end - 1))) end--;
+    return [start, end];
   }
 
   private read(from: number, to: number): void {
@@ -260,7 +279,7 @@ export class InlineReader {
       if (close <= i + 2 || close + 2 > to) return -1;
       while (text[close + 2] === ')' && close + 3 <= to) close++;
       this.flush(i);
-      if (text[i + 2] !== '(') this.within(i + 2, close, Zone.prose);
+      if (text[i + 2] !== '(') this.within(Zone.prose, [i + 2, close]);
       return close + 2;
     }
     for (const [written, sign] of SYMBOLS) {

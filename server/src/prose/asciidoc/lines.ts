@@ -61,7 +61,12 @@ export function isComment(text: string, line: Line): boolean {
 
 /** `include::file[…]`: other text stands here once the document is converted. */
 export function isInclude(text: string, line: Line): boolean {
-  return text.startsWith('include::', line.start) && text.charCodeAt(line.end - 1) === 93;
+  return text.startsWith('include::', line.start) && text.charCodeAt(line.end - 1) === 93 && !isEscaped(text, line);
+}
+
+/** True where a backslash before the line takes its meaning away. */
+export function isEscaped(text: string, line: Line): boolean {
+  return text.charCodeAt(line.start - 1) === 92;
 }
 
 const ENTRY = /:!?[\p{L}\p{N}_][^:\n]*:(?=\s|$)/uy;

@@ -111,14 +111,10 @@ function readMacro(reader: InlineReader, parts: Bare): void {
       break;
     case 'kbd':
     case 'btn':
-      reader.within(from, to, Zone.uiLabel);
+      reader.within(Zone.uiLabel, [from, to]);
       break;
     case 'menu':
-      reader.within(start + 5, from - 1, Zone.uiLabel);
-      if (to > from) {
-        reader.space(from - 1, from);
-        reader.within(from, to, Zone.uiLabel);
-      }
+      reader.within(Zone.uiLabel, [start + 5, from - 1], [from, to]);
       break;
     case 'footnote':
     case 'footnoteref':
@@ -128,7 +124,7 @@ function readMacro(reader: InlineReader, parts: Bare): void {
       readImage(reader, parts);
       break;
     case 'indexterm2':
-      reader.within(from, to, Zone.prose);
+      reader.within(Zone.prose, [from, to]);
       break;
     case 'indexterm':
     case 'anchor':
