@@ -5,7 +5,7 @@ import { finish } from '../../server/src/base/work.js';
 import { Corpus } from '../../server/src/corpus/corpus.js';
 import { Profiles, factsOf } from '../../server/src/engine/factsOf.js';
 import { mine } from '../../server/src/mining/mine.js';
-import { gatherAll } from '../../server/src/node/factsPool.js';
+import { FactsPool } from '../../server/src/node/factsPool.js';
 import { read } from '../../server/src/prose/read.js';
 import { documentsOf } from './documents.js';
 import { cpuMs, median, ms, wallMs } from './measure.js';
@@ -30,8 +30,11 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
       Corpus.create().apply(sources.map((source) => ({ uri: source.uri, facts: factsOf(source, profiles) }))),
     );
   };
+  const pool = new FactsPool(profiles);
   bare();
   survey();
+  await pool.gather(sources);
+  await pool.gather(sources);
   const times = {
     bare: [] as number[],
     bareWall: [] as number[],
@@ -50,12 +53,13 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
     );
     times.workers.push(
       await wallMs(async () => {
-        const facts = await gatherAll(sources, profiles);
+        const facts = await pool.gather(sources);
         finish(Corpus.create().apply(sources.map(({ uri }, index) => ({ uri, facts: facts[index]! }))));
       }),
     );
     times.mining.push(cpuMs(() => void finish(mine(corpus))));
   }
+  await pool.end();
   const speed = median(times.bare) / median(times.survey);
   const withWorkers = median(times.bareWall) / median(times.workers);
   const words = corpus.words.toLocaleString('en');

@@ -121,7 +121,7 @@ function grepMs(list: string, file: string): number {
   return (user! + system!) * 1000;
 }
 
-if (process.argv[1] !== undefined && /termCheck\.(?:ts|mjs|js)$/.test(process.argv[1])) {
+if (process.argv[1] !== undefined && /termCheck\.\w+$/.test(process.argv[1])) {
   const { characters, rows, growth } = measureTermCheck();
   for (const { terms, scanMs, grepMs, ratio, matches, compileMs } of rows) {
     console.log(

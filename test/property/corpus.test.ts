@@ -24,6 +24,7 @@ const plainProfile: LanguageProfile = {
           const word = match[0] === ',' ? 0 : TokenFlag.word;
           return word | (index === 0 ? TokenFlag.sentenceStart : TokenFlag.spaceBefore);
         }),
+        word: found.map((match) => match[0]),
         lemma: found.map((match) => match[0].toLowerCase()),
       };
     }),

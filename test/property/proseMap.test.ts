@@ -1,7 +1,7 @@
 // The map between a block's text and its source holds for any mixture of markup, in every format.
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { OPAQUE, sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
+import { OPAQUE, SourceCursor, sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
 import type { Format } from '../../server/src/text/sourceText.js';
 
@@ -88,6 +88,7 @@ function expectSoundMap(text: string, format: Format): void {
     expect(start + content.sourceLength).toBeLessThanOrEqual(text.length);
     before = start;
     let to = start;
+    const cursor = new SourceCursor(block);
     for (let i = 0; i < content.text.length; i++) {
       const from = sourceStart(block, i);
       const unit = content.text[i]!;
@@ -95,6 +96,7 @@ function expectSoundMap(text: string, format: Format): void {
       // Units of one decoded reference share its place; all others follow one another.
       expect(from >= to || slice.startsWith('&')).toBe(true);
       to = sourceEnd(block, i + 1);
+      expect([cursor.start(i), cursor.end(i + 1)]).toEqual([from, to]);
       expect(to).toBeLessThanOrEqual(start + content.sourceLength);
       if (unit === OPAQUE || slice.length !== 1) expect(slice.length).toBeGreaterThan(0);
       else if (unit === ' ') expect(slice).toMatch(/\s/);

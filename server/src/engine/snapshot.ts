@@ -19,6 +19,8 @@ export interface EngineDocument {
   readonly source: SourceText;
   /** Kept for documents that are open in an editor, so that an edit is read at the cost of the edit. */
   readonly reading: Reading | undefined;
+  /** True where its words count and are mined. */
+  readonly counted: boolean;
 }
 
 /** A termbase file: its text and problems now, and the decisions of its last sound text, which stay in force. */
@@ -125,7 +127,8 @@ export class Snapshot {
     if (scoped === undefined) {
       const { kinds, leastConfidence } = this.state.settings;
       const asked = this.state.relations.questions.filter(
-        ({ kind, confidence }) => kinds.includes(kind) && confidence >= leastConfidence,
+        // Look-alikes are weak by nature: whoever asks for the kind wants to see them.
+        ({ kind, confidence }) => kinds.includes(kind) && (kind === 'look-alike' || confidence >= leastConfidence),
       );
       const agenda = decide(scope.chain.length > 0 ? scope.chain : [emptyTermbase('')], asked);
       scoped = { agenda, checker: new Checker(agenda) };

@@ -1,9 +1,8 @@
 // What is known of one document by its text alone: its tokens and blocks as columns.
 import { hashText } from '../base/hash.js';
 import { isFunctionWord } from '../lexicon/functionWords.js';
-import { BLOCK_KINDS, sourceEnd, sourceStart } from '../prose/prose.js';
+import { BLOCK_KINDS, SourceCursor } from '../prose/prose.js';
 import type { BlockContent, Prose, ProseBlock } from '../prose/prose.js';
-import { tokenSlice } from '../tokens/tokens.js';
 import type { BlockTokens, LanguageProfile } from '../tokens/tokens.js';
 import { FactFlag } from './flags.js';
 
@@ -88,6 +87,7 @@ class FactsBuilder {
     this.tag.set(tokens.tag, first);
     this.flags.set(tokens.flags, first);
     let mark = 0;
+    const cursor = new SourceCursor(block);
     for (let i = 0; i < tokens.start.length; i++) {
       const start = tokens.start[i]!;
       const end = tokens.end[i]!;
@@ -95,12 +95,12 @@ class FactsBuilder {
       const marked = content.marks[mark];
       const row = this.row++;
       this.zones[row] = content.zones | (marked !== undefined && marked.start < end ? marked.zones : 0);
-      const word = this.localId(tokenSlice(content.text, start, end, tokens.flags[i]!));
+      const word = this.localId(tokens.word[i]!);
       if (this.isFunction[word]) this.flags[row]! |= FactFlag.functionWord;
       this.word[row] = word;
       this.lemma[row] = this.localId(tokens.lemma[i]!);
-      this.start[row] = sourceStart(block, start);
-      this.end[row] = sourceEnd(block, end);
+      this.start[row] = cursor.start(start);
+      this.end[row] = cursor.end(end);
     }
     this.addLinks(content, tokens, first);
     this.blockKind[this.block] = BLOCK_KINDS.indexOf(content.kind);

@@ -14,76 +14,98 @@ const ROLE = 'evenword-facts';
 /** Called as documents are done: how many of how many. */
 export type Progress = (done: number, all: number) => void;
 
-/**
- * The facts of each document, in order.
- * @throws the signal's reason where it is aborted; workers end at once.
- */
-export async function gatherAll(
-  sources: readonly SourceText[],
-  profiles: Profiles,
-  options: { readonly progress?: Progress; readonly signal?: AbortSignal; readonly workers?: number } = {},
-): Promise<DocumentFacts[]> {
-  const { progress, signal } = options;
-  const size = sources.reduce((sum, source) => sum + source.text.length, 0);
-  const workers = size < WORTH_WORKERS ? 0 : (options.workers ?? Math.min(4, availableParallelism()));
-  if (workers > 0) return gatherOnWorkers(sources, workers, progress, signal);
-  const all: DocumentFacts[] = [];
-  for (const source of sources) {
-    signal?.throwIfAborted();
-    all.push(factsOf(source, profiles));
-    progress?.(all.length, sources.length);
-    if (all.length % 8 === 0) await new Promise(setImmediate);
-  }
-  return all;
+/** How facts are gathered. */
+export interface GatherOptions {
+  readonly progress?: Progress;
+  /** Aborting it rejects with its reason and ends the workers. */
+  readonly signal?: AbortSignal;
 }
 
-async function gatherOnWorkers(
-  sources: readonly SourceText[],
-  count: number,
-  progress: Progress | undefined,
-  signal: AbortSignal | undefined,
-): Promise<DocumentFacts[]> {
-  const results: DocumentFacts[] = new Array<DocumentFacts>(sources.length);
-  const batches = inBatches(sources);
-  let next = 0;
-  let done = 0;
-  const run = (): Promise<void> =>
-    new Promise((resolve, reject) => {
-      const worker = new Worker(__filename, { workerData: ROLE });
-      const end = (settle: () => void): void => {
-        signal?.removeEventListener('abort', abort);
-        void worker.terminate();
-        settle();
-      };
-      const abort = (): void => end(() => reject(signal?.reason as Error));
-      const feed = (): void => {
-        const batch = batches[next++];
-        if (batch === undefined) end(resolve);
-        else worker.postMessage({ first: batch.first, sources: sources.slice(batch.first, batch.end) } satisfies Task);
-      };
-      signal?.addEventListener('abort', abort, { once: true });
-      worker.on('error', (error) => end(() => reject(error)));
-      worker.on('message', ({ first, facts }: Answer) => {
-        facts.forEach((one, index) => (results[first + index] = one));
+/**
+ * Gathers facts for one process. Workers are started with the first large survey and kept until {@link end}: each loads the
+ * language model of its own.
+ */
+export class FactsPool {
+  private workers: Worker[] = [];
+
+  constructor(
+    private readonly profiles: Profiles,
+    private readonly size = Math.min(4, availableParallelism()),
+  ) {}
+
+  /** The facts of each document, in order. One call at a time. */
+  async gather(sources: readonly SourceText[], { progress, signal }: GatherOptions = {}): Promise<DocumentFacts[]> {
+    const size = sources.reduce((sum, source) => sum + source.text.length, 0);
+    if (size >= WORTH_WORKERS && this.size > 0) return this.gatherOnWorkers(sources, progress, signal);
+    const all: DocumentFacts[] = [];
+    for (const source of sources) {
+      signal?.throwIfAborted();
+      all.push(factsOf(source, this.profiles));
+      progress?.(all.length, sources.length);
+      if (all.length % 8 === 0) await new Promise(setImmediate);
+    }
+    return all;
+  }
+
+  /** Ends the workers; the next large survey starts new ones. */
+  async end(): Promise<void> {
+    const workers = this.workers.splice(0);
+    await Promise.all(workers.map((worker) => worker.terminate()));
+  }
+
+  private async gatherOnWorkers(
+    sources: readonly SourceText[],
+    progress: Progress | undefined,
+    signal: AbortSignal | undefined,
+  ): Promise<DocumentFacts[]> {
+    signal?.throwIfAborted();
+    const results = new Array<DocumentFacts>(sources.length);
+    const batches = inBatches(sources);
+    while (this.workers.length < Math.min(this.size, batches.length)) {
+      this.workers.push(new Worker(__filename, { workerData: ROLE }));
+    }
+    let next = 0;
+    let done = 0;
+    const serve = async (worker: Worker): Promise<void> => {
+      for (let batch = batches[next++]; batch !== undefined; batch = batches[next++]) {
+        const task: Task = { sources: sources.slice(batch.first, batch.end) };
+        const facts = await answerOf(worker, task, signal);
+        for (const [index, one] of facts.entries()) results[batch.first + index] = one;
         done += facts.length;
         progress?.(done, sources.length);
-        feed();
-      });
-      feed();
-    });
-  signal?.throwIfAborted();
-  await Promise.all(Array.from({ length: Math.min(count, batches.length) }, run));
-  return results;
+      }
+    };
+    try {
+      await Promise.all(this.workers.map(serve));
+    } catch (error) {
+      await this.end();
+      throw error;
+    }
+    return results;
+  }
+}
+
+/** Sends a worker one task and waits for its answer. */
+function answerOf(worker: Worker, task: Task, signal: AbortSignal | undefined): Promise<readonly DocumentFacts[]> {
+  return new Promise((resolve, reject) => {
+    const settle = (finish: () => void): void => {
+      worker.off('message', answered);
+      worker.off('error', failed);
+      signal?.removeEventListener('abort', aborted);
+      finish();
+    };
+    const answered = (facts: readonly DocumentFacts[]): void => settle(() => resolve(facts));
+    const failed = (error: Error): void => settle(() => reject(error));
+    const aborted = (): void => settle(() => reject(signal?.reason as Error));
+    worker.on('message', answered);
+    worker.on('error', failed);
+    signal?.addEventListener('abort', aborted);
+    worker.postMessage(task);
+  });
 }
 
 interface Task {
-  readonly first: number;
   readonly sources: readonly SourceText[];
-}
-
-interface Answer {
-  readonly first: number;
-  readonly facts: readonly DocumentFacts[];
 }
 
 function inBatches(sources: readonly SourceText[]): { first: number; end: number }[] {
@@ -106,9 +128,9 @@ export function serveAsWorker(): boolean {
   if (isMainThread || workerData !== ROLE || parentPort === null) return false;
   const port = parentPort;
   const profiles = new Profiles();
-  port.on('message', ({ first, sources }: Task) => {
+  port.on('message', ({ sources }: Task) => {
     const facts = sources.map((source) => factsOf(source, profiles));
-    port.postMessage({ first, facts } satisfies Answer, facts.flatMap(buffersOf));
+    port.postMessage(facts, facts.flatMap(buffersOf));
   });
   return true;
 }

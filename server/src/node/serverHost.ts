@@ -1,15 +1,18 @@
 // The language server's world on Node: the file system and worker threads.
 import { readFile } from 'node:fs/promises';
+import { join, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { ServerHost } from '../lsp/host.js';
-import { gatherAll } from './factsPool.js';
+import { FactsPool } from './factsPool.js';
 import { Profiles } from '../engine/factsOf.js';
-import { findFiles, formatOf, readDocument, uriOfPath } from './files.js';
+import { formatOf } from '../text/sourceText.js';
+import { findFiles, plainReason, readDocument, termbasesAbove, uriOfPath, whyLeftOut } from './files.js';
 
 /** A host over `file:` URIs; folders of other schemes hold nothing that it could read. */
 export function nodeServerHost(): ServerHost {
   const profiles = new Profiles();
   return {
+    profiles,
     async readFolder(uri, signal) {
       const path = pathOf(uri);
       if (path === undefined) return { sources: [], termbases: [], leftOut: [] };
@@ -22,23 +25,49 @@ export function nodeServerHost(): ServerHost {
         if ('source' in file) sources.push(file.source);
         else missed.push(file.leftOut);
       }
-      const texts = await Promise.all(
-        termbases.map(async (file) => ({ uri: uriOfPath(file), text: await readFile(file, 'utf8') })),
-      );
+      const texts = [];
+      for (const file of [...termbases, ...termbasesAbove(path)]) {
+        try {
+          texts.push({ uri: uriOfPath(file), text: await readFile(file, 'utf8') });
+        } catch (error) {
+          missed.push({ path: file, reason: plainReason(error) });
+        }
+      }
       return { sources, termbases: texts, leftOut: missed };
     },
-    async readDocument(uri) {
+    async readDocument(folder, uri) {
       const path = pathOf(uri);
       if (path === undefined || formatOf(path) === undefined) return undefined;
+      if ((await reasonAgainst(folder, path)) !== undefined) return undefined;
       const file = await readDocument(path);
       return 'source' in file ? file.source : undefined;
     },
-    async readTermbase(uri) {
+    async readTermbase(folder, uri) {
       const path = pathOf(uri);
-      return path === undefined ? undefined : readFile(path, 'utf8').catch(() => undefined);
+      if (path === undefined || (await reasonAgainst(folder, path)) !== undefined) return undefined;
+      return readFile(path, 'utf8').catch(() => undefined);
     },
-    gather: (sources, progress, signal) => gatherAll(sources, profiles, { progress, signal }),
+    async whyLeftOut(folder, uri) {
+      const path = pathOf(uri);
+      return path === undefined ? undefined : reasonAgainst(folder, path);
+    },
+    async gather(sources, progress, signal) {
+      // The workers' memory is wanted back: after a survey there is little left for them to do.
+      const pool = new FactsPool(profiles);
+      try {
+        return await pool.gather(sources, { progress, signal });
+      } finally {
+        await pool.end();
+      }
+    },
   };
+}
+
+/** Files outside the folder, such as a termbase above it, are left out by nothing in it. */
+async function reasonAgainst(folder: string, path: string): Promise<string | undefined> {
+  const root = folder === '' ? undefined : pathOf(folder);
+  if (root === undefined || !path.startsWith(join(root, sep))) return undefined;
+  return whyLeftOut(root, path);
 }
 
 function pathOf(uri: string): string | undefined {

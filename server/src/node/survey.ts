@@ -6,8 +6,8 @@ import { finish } from '../base/work.js';
 import { Engine } from '../engine/engine.js';
 import type { Profiles } from '../engine/factsOf.js';
 import type { SourceText } from '../text/sourceText.js';
-import { gatherAll } from './factsPool.js';
-import { CannotRead, findFiles, plainReason, readDocument, uriOfPath } from './files.js';
+import { FactsPool } from './factsPool.js';
+import { CannotRead, findFiles, plainReason, readDocument, termbasesAbove, uriOfPath } from './files.js';
 import type { LeftOut } from './files.js';
 
 /** How far a survey has come. */
@@ -36,7 +36,8 @@ export async function surveyFolders(
   for (const path of absolute) found.push(await findFiles(path));
   const root = await commonFolder(absolute);
   const documents = [...new Set(found.flatMap((each) => each.documents))];
-  const termbases = [...new Set([...termbasesAbove(root), ...found.flatMap((each) => each.termbases)])];
+  const above = [...new Set((await foldersOf(absolute)).flatMap((folder) => termbasesInForce(folder, root)))];
+  const termbases = [...new Set([...above, ...found.flatMap((each) => each.termbases)])];
   const leftOut = found.flatMap((each) => each.leftOut);
   const sources: SourceText[] = [];
   for (const path of documents) {
@@ -44,12 +45,14 @@ export async function surveyFolders(
     if ('source' in file) sources.push(file.source);
     else leftOut.push(file.leftOut);
   }
+  const pool = new FactsPool(profiles);
   const facts = mine
-    ? await gatherAll(sources, profiles, {
+    ? await pool.gather(sources, {
         ...(signal && { signal }),
         progress: (done, all) => progress?.('reading', done, all),
       })
     : [];
+  await pool.end();
   const engine = new Engine(profiles);
   engine.apply({
     documents: sources.map((source, index) => {
@@ -73,23 +76,25 @@ async function readTermbase(path: string): Promise<string> {
   });
 }
 
+/** The folder of each path: a folder itself, or the one that holds a file. */
+async function foldersOf(paths: readonly string[]): Promise<string[]> {
+  return Promise.all(paths.map(async (path) => ((await stat(path)).isDirectory() ? path : dirname(path))));
+}
+
 /** The deepest folder that holds all paths. */
 async function commonFolder(paths: readonly string[]): Promise<string> {
-  const folders = await Promise.all(
-    paths.map(async (path) => ((await stat(path)).isDirectory() ? path : dirname(path))),
-  );
+  const folders = await foldersOf(paths);
   let common = folders[0]!;
   for (const folder of folders)
     while (folder !== common && !folder.startsWith(join(common, '/'))) common = dirname(common);
   return common;
 }
 
-/** Termbases of the folders above, up to the root of the repository; none where there is no repository. */
-function termbasesAbove(folder: string): string[] {
-  const found: string[] = [];
+/** Termbases that hold for a named folder: its own, those up to the folder of all names, and those above in the repository. */
+function termbasesInForce(folder: string, common: string): string[] {
+  const found = termbasesAbove(folder);
   for (let at = folder; ; at = dirname(at)) {
-    if (at !== folder && existsSync(join(at, 'termbase.yaml'))) found.push(join(at, 'termbase.yaml'));
-    if (existsSync(join(at, '.git'))) return found;
-    if (dirname(at) === at) return [];
+    if (existsSync(join(at, 'termbase.yaml'))) found.push(join(at, 'termbase.yaml'));
+    if (at === common || dirname(at) === at) return found;
   }
 }

@@ -87,6 +87,37 @@ export function sourceEnd(block: ProseBlock, offset: number): number {
   return block.start + pieces[at + 1]! + (inStep(pieces, at, text) ? offset - pieces[at]! : pieces[at + 2]!);
 }
 
+/**
+ * The same map for one walk through a block from its start to its end: offsets must not fall, and each step costs no search.
+ */
+export class SourceCursor {
+  private at = 0;
+
+  constructor(private readonly block: ProseBlock) {}
+
+  /** {@link sourceStart} of an offset at or behind those asked before. */
+  start(offset: number): number {
+    const { pieces, text } = this.block.content;
+    if (pieces.length === 0) return this.block.start;
+    this.moveTo(offset);
+    return this.block.start + pieces[this.at + 1]! + (inStep(pieces, this.at, text) ? offset - pieces[this.at]! : 0);
+  }
+
+  /** {@link sourceEnd} of an offset at or behind those asked before. */
+  end(offset: number): number {
+    const { pieces, text } = this.block.content;
+    if (offset === 0 || pieces.length === 0) return sourceStart(this.block, 0);
+    this.moveTo(offset - 1);
+    const { at } = this;
+    return this.block.start + pieces[at + 1]! + (inStep(pieces, at, text) ? offset - pieces[at]! : pieces[at + 2]!);
+  }
+
+  private moveTo(offset: number): void {
+    const { pieces } = this.block.content;
+    while (this.at + 3 < pieces.length && pieces[this.at + 3]! <= offset) this.at += 3;
+  }
+}
+
 function inStep(pieces: Uint32Array, at: number, text: string): boolean {
   const textEnd = at + 3 < pieces.length ? pieces[at + 3]! : text.length;
   return textEnd - pieces[at]! === pieces[at + 2]! && text.charCodeAt(pieces[at]!) !== OPAQUE_UNIT;

@@ -7,7 +7,7 @@ import { markSentenceStarts } from './sentences.js';
 import { SHOWN_IDENTIFIER, SHOWN_NUMBER, SHOWN_OPAQUE, ShownForms, shownSign, type WordForm } from './shownForms.js';
 import { isTitle } from './titles.js';
 import { TokenColumns, TokenKind } from './tokenColumns.js';
-import { type BlockTokens, type LanguageProfile, TAG, TokenFlag } from './tokens.js';
+import { type BlockTokens, type LanguageProfile, TAG, TokenFlag, tokenSlice } from './tokens.js';
 import { openModel, type WinkLexicon } from './winkLexicon.js';
 
 /** A call to the tagger costs as much as some ten words; blocks are joined up to about so many tokens. */
@@ -87,6 +87,7 @@ class EnglishProfile implements LanguageProfile {
     markSentenceStarts(text, columns);
     const { length, start, end, kind, flags, inLongRun } = columns;
     const forms: (WordForm | undefined)[] = [];
+    const words: string[] = [];
     const lemma: string[] = [];
     const shown: string[] = [];
     const rows: number[] = [];
@@ -98,6 +99,11 @@ class EnglishProfile implements LanguageProfile {
       const slice = text.slice(start[row], end[row]);
       const form = kind[row] === TokenKind.word && inLongRun[row] === 0 ? shownForms.of(slice) : undefined;
       forms.push(form);
+      words.push(
+        (flags[row]! & TokenFlag.invisible) !== 0
+          ? tokenSlice(text, start[row]!, end[row]!, flags[row]!)
+          : (form?.written ?? slice),
+      );
       lemma.push(form === undefined ? slice.toLowerCase() : '');
       columns.tag[row] = FIXED_TAGS[kind[row]!]!;
       signs = kind[row]! >= TokenKind.punctuation ? signs + 1 : 0;
@@ -112,7 +118,7 @@ class EnglishProfile implements LanguageProfile {
       if (form.count === 2) rows.push(NO_ROW);
       opening = false;
     }
-    const tokens = columns.toBlockTokens(lemma);
+    const tokens = columns.toBlockTokens(words, lemma);
     return { tokens, lemma, forms, shown: shown.join(' '), rows };
   }
 

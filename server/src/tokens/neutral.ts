@@ -48,12 +48,15 @@ class NeutralProfile implements LanguageProfile {
       } else columns.add(start, end, scanned.kind[row]!, flags);
     }
     markSentenceStarts(text, columns);
-    const lemma = new Array<string>(columns.length);
+    const words: string[] = [];
     for (let row = 0; row < columns.length; row++) {
       columns.tag[row] = TAGS_BY_KIND[columns.kind[row]!]!;
-      lemma[row] = tokenSlice(text, columns.start[row]!, columns.end[row]!, columns.flags[row]!).toLowerCase();
+      words.push(tokenSlice(text, columns.start[row]!, columns.end[row]!, columns.flags[row]!));
     }
-    return columns.toBlockTokens(lemma);
+    return columns.toBlockTokens(
+      words,
+      words.map((word) => word.toLowerCase()),
+    );
   }
 
   private segment(text: string, from: number, to: number, flags: number): void {

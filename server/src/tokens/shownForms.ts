@@ -16,6 +16,8 @@ const MOST_REMEMBERED = 1 << 16;
 
 /** One spelling of a word as the profile knows it. */
 export interface WordForm {
+  /** The spelling itself: one string object for all its uses, so that it is hashed once. */
+  readonly written: string;
   /** What the tagger is shown. */
   readonly shown: string;
   /** What it is shown at a sentence's start and in titles, where a capital says nothing. */
@@ -70,6 +72,7 @@ export class ShownForms {
     const split = splitContraction(lower);
     const shown = split ?? this.single(word, lower);
     return {
+      written,
       shown,
       shownUncapitalised: split ?? this.uncapitalised(word, lower, shown),
       count: split === undefined ? 1 : 2,

@@ -34,13 +34,14 @@ export class TokenColumns {
   }
 
   /** A copy of the rows, exactly as long as needed. */
-  toBlockTokens(lemma: readonly string[]): BlockTokens {
+  toBlockTokens(word: readonly string[], lemma: readonly string[]): BlockTokens {
     const { length } = this;
     return {
       start: this.start.slice(0, length),
       end: this.end.slice(0, length),
       tag: this.tag.slice(0, length),
       flags: this.flags.slice(0, length),
+      word,
       lemma,
     };
   }

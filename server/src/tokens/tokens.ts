@@ -55,6 +55,8 @@ export interface BlockTokens {
   readonly end: Uint32Array;
   readonly tag: Uint8Array;
   readonly flags: Uint8Array;
+  /** Each token as it reads: its text without soft hyphens and zero-width characters. */
+  readonly word: readonly string[];
   /** Dictionary form in lower case by the tagger (never the identity of a term: it maps behaviour to behavior). */
   readonly lemma: readonly string[];
 }
