@@ -395,7 +395,7 @@ verb (cache entry, token, key): expire | time out | lapse
 verb (cache, entry): invalidate | expire | evict -- eviction makes room
 verb (transaction): roll back | undo | abort
 verb (message, event): publish | emit | post | send
-verb (message, event): consume | receive | read
+verb (message, event): consume | receive -- a consumer may have to acknowledge what it was given
 verb (topic, channel, feed): subscribe to | follow
 adjective: unique | distinct
 adjective: empty | blank
@@ -940,7 +940,7 @@ verb (data, message, file): encrypt | encipher | scramble
 verb (data, message, file): decrypt | decipher | unscramble
 verb (user, identity, request): authenticate | log in -- authentication need not open a session
 verb (key, certificate, password): rotate | renew | replace
-verb (certificate, token): issue | generate | sign
+verb (certificate, token): issue | generate -- signing is one step of issuing
 verb (certificate, token, key): revoke | withdraw | invalidate
 verb (vulnerability, weakness): exploit | take advantage of
 verb (data, access, system): protect | secure | safeguard
