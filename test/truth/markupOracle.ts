@@ -5,9 +5,9 @@ import { read } from '../../server/src/prose/read.js';
 import type { Format } from '../../server/src/text/sourceText.js';
 
 const WORD = /[\p{L}\p{N}]+/gu;
-/** What stands in text and is no prose by the rules of every format: URLs, addresses, template markers; and references. */
+/** What stands in text and is no prose by the rules of every format: URLs, addresses, template markers, tags that are shown; and references. */
 const MASKED =
-  /[A-Za-z][A-Za-z0-9+.-]*:\/\/[^\s<>"'`|\\^{}]*|www\.[^\s<>"]+|[\w.+-]+@[\w-]+(?:\.[\w-]+)+|\{\{[^]{0,600}?\}\}|\{%[^]{0,600}?%\}|\$\{[^}]{0,600}\}|&[\w#:.-]+;/g;
+  /[A-Za-z][A-Za-z0-9+.-]*:\/\/[^\s<>"'`|\\^{}]*|www\.[^\s<>"]+|[\w.+-]+@[\w-]+(?:\.[\w-]+)+|\{\{[^]{0,600}?\}\}|\{%[^]{0,600}?%\}|\$\{[^}]{0,600}\}|&lt;\/?[A-Za-z][\w:.-]*\s?\/?&gt;|&[\w#:.-]+;/g;
 
 /** How well a set of files agrees. */
 export interface Score {

@@ -126,6 +126,9 @@ describe('HTML inside a block', () => {
     expect(
       html('<p>Open https://a.example/b?c=d&amp;e=f, www.a.example/x. Write to a.b@c.example. {{ page.x }} {% if y %}'),
     ).toEqual(['paragraph: Open @, @. Write to @. @ @']);
+    expect(html('<p>The &lt;p&gt; and &lt;/br &gt; elements; a &lt; b.')).toEqual([
+      'paragraph: The @ and @ elements; a < b.',
+    ]);
     expect(html('<p>a @ b :// c {{ d')).toEqual(['paragraph: a @ b :// c {{ d']);
   });
 

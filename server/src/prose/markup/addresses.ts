@@ -1,4 +1,4 @@
-// Finds what stands in a text and is no prose: URLs, e-mail addresses, markers that a generator fills in.
+// Finds what stands in a text and is no prose: URLs, e-mail addresses, markers that a generator fills in, tags that are shown.
 
 /** A stretch `[start, end)` of the text. */
 interface Found {
@@ -12,6 +12,7 @@ const LONGEST_MARKER = 600;
 const SCHEME_UNIT = /[A-Za-z0-9+.-]/;
 const LOCAL_UNIT = /[A-Za-z0-9_+.-]/;
 const DOMAIN = /[A-Za-z0-9-]{1,63}(?:\.[A-Za-z0-9-]{1,63}){1,10}/y;
+const SHOWN_TAG = /&lt;\/?[A-Za-z][\w:.-]{0,80}\s?\/?&gt;/y;
 const URL_REST = /(?:&amp;|[^\s<>"'`|\\^{}&])*/y;
 const TRAILING = '.,;:!?)]\u2019\u201D*';
 
@@ -24,6 +25,7 @@ const FINDERS: readonly (readonly [string, Finder])[] = [
   ['{{', (text, mark) => marker(text, mark, '}}')],
   ['{%', (text, mark) => marker(text, mark, '%}')],
   ['${', (text, mark) => marker(text, mark, '}')],
+  ['&lt;', shownTag],
 ];
 
 /** Steps through a text from left to right. */
@@ -90,6 +92,11 @@ function mailAddress(text: string, mark: number, from: number): Found | undefine
   if (start === mark) return undefined;
   DOMAIN.lastIndex = mark + 1;
   return DOMAIN.test(text) ? { start, end: DOMAIN.lastIndex } : undefined;
+}
+
+function shownTag(text: string, mark: number): Found | undefined {
+  SHOWN_TAG.lastIndex = mark;
+  return SHOWN_TAG.test(text) ? { start: mark, end: SHOWN_TAG.lastIndex } : undefined;
 }
 
 function marker(text: string, mark: number, closing: string): Found | undefined {

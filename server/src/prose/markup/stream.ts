@@ -1,0 +1,179 @@
+// Follows the tokenizer through one document: which element each tag opens or closes, and in which vocabulary.
+import { Tokenizer } from 'htmlparser2';
+import type { ProseBlock, ReadingProblem } from '../prose.js';
+import { Elements } from './elements.js';
+import { isVoid, keptAtEnd, keptAtStart } from './frames.js';
+import { HTML } from './htmlElements.js';
+import { OTHER } from './otherElements.js';
+import type { Prolog } from './prolog.js';
+import { recognise } from './recognise.js';
+import { HIDDEN, type ElementRole, type Vocabulary } from './roles.js';
+import { TextReader } from './runningText.js';
+import { roleOf, StartTag } from './startTag.js';
+
+/** Elements nested deeper than this are not read: each level costs time at every end tag. */
+const DEEPEST = 256;
+
+const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/;
+
+/** What the tokenizer calls; its offsets count from `base`. */
+export class MarkupStream {
+  readonly problems: ReadingProblem[] = [];
+  language: string | undefined;
+  private readonly tag: StartTag;
+  private readonly elements: Elements;
+  /** Undefined until the root element is known. */
+  private vocabulary: Vocabulary | undefined;
+  private rootPrefix = '';
+  private ended = false;
+  private base = 0;
+  /** Open elements beyond the deepest that is read. */
+  private beyond = 0;
+  /** How many frames are open outside an element of a foreign vocabulary; 0 where none is open. */
+  private foreign = 0;
+
+  constructor(
+    private readonly text: string,
+    private readonly uri: string,
+    private readonly prolog: Prolog,
+    private readonly xml: boolean,
+  ) {
+    this.tag = new StartTag(text, xml);
+    const reader = new TextReader(text, { xml, defined: prolog.entities });
+    this.elements = new Elements(text, reader, !xml);
+    if (!xml) this.vocabulary = HTML;
+  }
+
+  read(from: number): void {
+    this.base = from;
+    const tokenizer = new Tokenizer({ xmlMode: this.xml, decodeEntities: false }, this);
+    tokenizer.write(this.text.slice(from));
+    tokenizer.end();
+  }
+
+  blocks(): ProseBlock[] {
+    const blocks = this.elements.finish();
+    return this.vocabulary === OTHER && this.elements.paragraphs === 0 ? [] : blocks;
+  }
+
+  ontext(start: number, end: number): void {
+    this.characters(start, end, false);
+  }
+
+  oncdata(start: number, end: number, marks: number): void {
+    if (this.xml || this.foreign > 0) this.characters(start, end - marks, true);
+  }
+
+  onopentagname(start: number, end: number): void {
+    this.tag.begin(this.base + start, this.base + end);
+  }
+
+  onattribname(start: number, end: number): void {
+    this.tag.addName(this.base + start, this.base + end);
+  }
+
+  onattribdata(start: number, end: number): void {
+    this.tag.addValue(this.base + start, this.base + end);
+  }
+
+  onopentagend(end: number): void {
+    this.opened(this.base + end + 1, !this.xml && isVoid(this.tag.name));
+  }
+
+  onselfclosingtag(end: number): void {
+    this.opened(this.base + end + 1, this.xml || this.foreign > 0 || isVoid(this.tag.name));
+  }
+
+  onclosetag(start: number, end: number): void {
+    if (this.ended) return;
+    if (this.beyond > 0) {
+      this.beyond--;
+      return;
+    }
+    const written = this.text.slice(this.base + start, this.base + end);
+    const { frames } = this.elements;
+    const kept = keptAtEnd(frames, this.xml ? written : written.toLowerCase(), this.xml);
+    if (kept === frames.length) return;
+    const tagEnd = this.text.indexOf('>', this.base + end);
+    this.closeTo(kept, tagEnd < 0 ? this.text.length : tagEnd + 1);
+    if (this.xml && kept === 1) this.ended = true;
+  }
+
+  isInForeignContext(): boolean {
+    return this.foreign > 0;
+  }
+
+  onattribend(): void {}
+  onattribentity(): void {}
+  oncomment(): void {}
+  ondeclaration(): void {}
+  onend(): void {}
+  onprocessinginstruction(): void {}
+  ontextentity(): void {}
+
+  private characters(start: number, end: number, plain: boolean): void {
+    // The tokenizer gives -1 for the start of a tag that the end of the text cuts off.
+    if (start < 0 || this.ended || this.beyond > 0 || this.vocabulary === undefined) return;
+    const { elements, vocabulary } = this;
+    if (elements.frames.length === 1 && this.xml) return;
+    if (vocabulary.unknown === 'skip' && !elements.top.takesText) return;
+    elements.characters(this.base + start, this.base + end, plain);
+  }
+
+  private opened(tagEnd: number, isEmpty: boolean): void {
+    const { tag, elements } = this;
+    if (this.ended) return;
+    if (this.vocabulary === undefined && !this.start()) return;
+    const vocabulary = this.vocabulary!;
+    if (this.beyond > 0 || elements.frames.length > DEEPEST) {
+      if (!isEmpty && this.beyond++ === 0) this.reportTooDeep();
+      return;
+    }
+    if (!this.xml) {
+      if (this.foreign === 0) this.closeTo(keptAtStart(elements.frames, tag.name), tag.start);
+      if (tag.name === 'html') this.language ??= languageOf(tag);
+    }
+    const role = this.roleOf(vocabulary);
+    elements.open(tag, role, vocabulary, tagEnd);
+    if (isEmpty) this.closeTo(elements.frames.length - 1, tagEnd);
+    else if (this.foreign === 0 && (tag.name === 'svg' || tag.name === 'math'))
+      this.foreign = elements.frames.length - 1;
+  }
+
+  private closeTo(kept: number, tagEnd: number): void {
+    this.elements.closeTo(kept, tagEnd);
+    if (this.foreign >= kept) this.foreign = 0;
+  }
+
+  /** Takes the root element's start tag; false where the document holds no prose. */
+  private start(): boolean {
+    const { tag } = this;
+    const vocabulary = recognise(tag, this.prolog.doctype, this.uri, this.text);
+    this.vocabulary = vocabulary;
+    this.ended = vocabulary === undefined;
+    this.rootPrefix = tag.name.slice(0, tag.name.indexOf(':') + 1);
+    this.language = languageOf(tag);
+    return !this.ended;
+  }
+
+  private roleOf(vocabulary: Vocabulary): ElementRole {
+    const { name } = this.tag;
+    const colon = name.indexOf(':');
+    const parent = this.elements.top;
+    if (colon < 0) return roleOf(vocabulary, parent, name);
+    const known = name.startsWith(this.rootPrefix) && this.rootPrefix !== '';
+    if (!known && this.xml && !vocabulary.extensions.has(name.slice(0, colon))) return HIDDEN;
+    return roleOf(vocabulary, parent, name.slice(colon + 1));
+  }
+
+  private reportTooDeep(): void {
+    if (this.problems.length > 0) return;
+    const span = { start: this.tag.start, end: this.tag.start + this.tag.name.length + 1 };
+    this.problems.push({ span, message: `Text nested more than ${DEEPEST} levels deep is not read.` });
+  }
+}
+
+function languageOf(tag: StartTag): string | undefined {
+  const language = tag.attribute('xml:lang') ?? tag.attribute('lang');
+  return language !== undefined && LANGUAGE_TAG.test(language) ? language : undefined;
+}
