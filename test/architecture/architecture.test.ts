@@ -43,7 +43,9 @@ function importsOf(file: string): Import[] {
   const visit = (node: ts.Node): void => {
     if ((ts.isImportDeclaration(node) || ts.isExportDeclaration(node)) && node.moduleSpecifier !== undefined) {
       const clause = ts.isImportDeclaration(node) ? node.importClause : undefined;
-      const typeOnly = ts.isExportDeclaration(node) ? node.isTypeOnly : clause?.phaseModifier === ts.SyntaxKind.TypeKeyword;
+      const typeOnly = ts.isExportDeclaration(node)
+        ? node.isTypeOnly
+        : clause?.phaseModifier === ts.SyntaxKind.TypeKeyword;
       found.push({ file, target: (node.moduleSpecifier as ts.StringLiteral).text, typeOnly });
     } else if (ts.isCallExpression(node) && node.expression.kind === ts.SyntaxKind.ImportKeyword) {
       found.push({ file, target: (node.arguments[0] as ts.StringLiteral).text, typeOnly: false });
