@@ -6,7 +6,7 @@ import { readExplicit } from './explicit.js';
 import { readFieldBody } from './fields.js';
 import { gridTable } from './gridTable.js';
 import { readLeaf } from './leaf.js';
-import { columnAt, indentedBlock, isBlank, paragraphEnd, skipBlank, type Lines } from './lines.js';
+import { columnAt, indentedBlock, indentedLinesEnd, isBlank, paragraphEnd, skipBlank, type Lines } from './lines.js';
 import { bulletEnd, enumeratorEnd, fieldMarkEnd, isAdorning, isAdornment, optionsEnd } from './markers.js';
 import { isSimpleBorder, simpleTable } from './simpleTable.js';
 import { overlinedTitle, underlinedTitle } from './titles.js';
@@ -86,7 +86,7 @@ function element(
   if (unit === 61 && isSimpleBorder(text, at, end)) return simpleTable(cx, lines, line, to, base, setting);
   const doubled = unit === second && (end === at + 2 || isBlank(text.charCodeAt(at + 2)));
   if (doubled && unit === 46) return readExplicit(cx, lines, line, to, base, setting);
-  if (doubled && unit === 95) return indentedBlock(lines, line + 1, paragraphEnd(lines, line, to), base).next;
+  if (doubled && unit === 95) return indentedLinesEnd(lines, line + 1, to, base);
   return isAdornment(text, at, end) ? overlinedTitle(cx, lines, line, to, base, setting) : undefined;
 }
 
@@ -174,8 +174,7 @@ function lineBlock(
     if (cx.text.charCodeAt(at) !== 124 || (end > at + 1 && !isBlank(cx.text.charCodeAt(at + 1)))) break;
     at++;
     while (at < end && isBlank(cx.text.charCodeAt(at))) at++;
-    let next = line + 1;
-    while (next < to && !lines.isBlank(next) && lines.column[next]! > base) next++;
+    const next = indentedLinesEnd(lines, line + 1, to, base);
     lines.at[line] = at;
     if (at < end) readLeaf(cx, lines, line, next, setting);
     line = next;

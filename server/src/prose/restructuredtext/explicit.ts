@@ -1,7 +1,7 @@
 // Explicit markup, the blocks that begin with `..`: footnotes, citations, directives; targets, substitutions and comments are no prose.
 import { inside, type DocumentContext, type Setting } from './context.js';
 import { readDirective } from './directive.js';
-import { indentedBlock, isBlank, paragraphEnd, type Lines } from './lines.js';
+import { indentedBlock, indentedLinesEnd, isBlank, type Lines } from './lines.js';
 
 const NAME = '[\\p{L}\\p{N}]+(?:[-._+:][\\p{L}\\p{N}]+)*';
 const FOOTNOTE = new RegExp(`\\[(?:#(?:${NAME})?|\\*|[0-9]+|${NAME})\\](?=[ \\t\\n]|$)`, 'yu');
@@ -28,7 +28,7 @@ export function readExplicit(
   const unit = text.charCodeAt(at);
   const second = text.charCodeAt(at + 1);
   const named = at + 1 < end && !isBlank(second);
-  if (unit === 95 && named) return indentedBlock(lines, line + 1, paragraphEnd(lines, line, to), base).next;
+  if (unit === 95 && named) return indentedLinesEnd(lines, line + 1, to, base);
   const block = indentedBlock(lines, line + 1, to, base);
   if (unit === 124 && named) return block.next;
   if (unit === 91) {

@@ -32,7 +32,7 @@ export function gridTable(
   while (end > line + 1 && !TOP.test(text.slice(lines.at[end - 1], lines.end[end - 1]).replaceAll('=', '-'))) end--;
   const rows: LineCells[] = [];
   for (let i = line; i < end; i++) rows.push(lineCells(text, lines.at[i]!, lines.end[i]!));
-  const cells = new GridTracer(rows).cells();
+  const cells = rows.length < 3 ? undefined : new GridTracer(rows).cells();
   if (cells === undefined) {
     const span = { start: lines.at[line]!, end: lines.end[behind - 1]! };
     cx.problems.push({ span, message: 'The lines of this table do not meet, so it is not read.' });

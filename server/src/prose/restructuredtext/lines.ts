@@ -90,6 +90,13 @@ export function indentedBlock(lines: Lines, from: number, to: number, base: numb
   return { to: end, margin, next: line };
 }
 
+/** The line behind the indented lines that begin at `from`; the first blank line ends them. */
+export function indentedLinesEnd(lines: Lines, from: number, to: number, base: number): number {
+  let line = from;
+  while (line < to && !lines.isBlank(line) && lines.column[line]! > base) line++;
+  return line;
+}
+
 /** The column at which offset `to` stands in a line whose first visible character is at `at` in `column`. */
 export function columnAt(text: string, at: number, column: number, to: number): number {
   let here = column;

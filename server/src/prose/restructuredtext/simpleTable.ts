@@ -91,8 +91,9 @@ function hasText(row: LineCells, { from, to }: Column): boolean {
 function addRow(cells: Cell[], from: number, to: number, columns: readonly Column[], rows: readonly LineCells[]): void {
   if (from >= to) return;
   const widest = rows.slice(from, to).reduce((most, row) => Math.max(most, row.width), 0);
-  columns.forEach((column, i) => {
+  for (const [i, column] of columns.entries()) {
+    if (column.from >= widest) break;
     const right = i === columns.length - 1 ? Math.max(widest, column.to) : column.to;
     cells.push({ top: from - 1, left: column.from - 1, bottom: to, right });
-  });
+  }
 }
