@@ -93,6 +93,7 @@ describe('HTML inside a block', () => {
     expect(html('<p>See <a href="a.html#b">the <em>keys</em></a> or <a name=c>this</a>.')).toEqual([
       'paragraph: See <linkText:the keys> or this.',
     ]);
+    expect(html('<h2><a name=a></a><a href="#a"></a>Title</h2>')).toEqual(['heading2[heading]: Title']);
     const links = prose('<a href="x"><h2>Title</h2>text</a> more', 'html').blocks.map(({ content }) => content.links);
     expect(links).toEqual([[{ start: 0, end: 5, target: 'x' }], [{ start: 0, end: 4, target: 'x' }]]);
     const [block] = prose('<p>One <a href="a&amp;b">two three</a>', 'html').blocks;
@@ -116,6 +117,7 @@ describe('HTML inside a block', () => {
     expect(html('<p>a&amp;b &eacute;t&#233;&nbsp;x &unknown; AT&T &#x1F642;')).toEqual([
       'paragraph: a&b été\u00A0x &unknown; AT&T 🙂',
     ]);
+    expect(html('<p>a&nbspb &copy 2020 &ampx &lt')).toEqual(['paragraph: a&nbspb © 2020 &ampx <']);
     expect(sourceOf('<p>a caf&eacute;s b', 'cafés', 'html')).toBe('caf&eacute;s');
     expect(sourceOf('<p>one\r\n   <b>two</b> 🙂 three', 'one two 🙂 three', 'html')).toBe(
       'one\r\n   <b>two</b> 🙂 three',

@@ -72,6 +72,9 @@ describe('DITA', () => {
       'paragraph: Run @ in @; see @ or <linkText:the ><linkText+definedTerm:lock>. @ <quotation:So> it <quotation:is>.',
       'alternativeText[alternativeText]: A lock',
     ]);
+    expect(dita('<p>The <ph keyref="product"/> server, <keyword conkeyref="a/b"></keyword> or <b/>none.</p>')).toEqual([
+      'paragraph: The @ server, @ or none.',
+    ]);
     expect(dita('<codeblock>x <b>y</b></codeblock><draft-comment>Not yet</draft-comment><p>Text</p>')).toEqual([
       'paragraph: Text',
     ]);

@@ -4,6 +4,7 @@ import type { ProseBlock } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import { Zone } from '../zones.js';
 import { closedFrame, ground, openFrame, State, type Frame } from './frames.js';
+import { HTML } from './htmlElements.js';
 import { CONTAINER, Flow, HIDDEN, PARAGRAPH, type ElementRole, type Vocabulary } from './roles.js';
 import type { TextReader } from './runningText.js';
 import type { StartTag } from './startTag.js';
@@ -86,8 +87,10 @@ export class Elements {
       return;
     }
     if (flow === Flow.picture) this.opaque(start, tagEnd);
-    const frame = openFrame(parent, name, role, role.zones | tag.zones(role, vocabulary), start, this.shown);
     const target = tag.target(role);
+    const zones = role.zones | tag.zones(role, vocabulary);
+    const refers = vocabulary !== HTML && (target !== undefined || tag.isReused());
+    const frame = openFrame(parent, name, role, zones, start, this.shown, refers);
     this.frames.push(frame);
     if (flow === Flow.aside) this.suspend();
     if (target !== undefined && this.link === undefined) this.openLink(frame, target);
@@ -125,8 +128,7 @@ export class Elements {
         this.link = undefined;
       }
       this.pending?.out.setZones(this.zones());
-      // A reference without a text of its own is shown as one that is made for it.
-      if (frame.role.targets && frame.shown === this.shown) this.opaque(frame.start, tagEnd);
+      if (frame.refers && frame.shown === this.shown) this.opaque(frame.start, tagEnd);
     } else if (flow !== Flow.hidden && flow !== Flow.lineBreak && flow !== Flow.picture) {
       this.flush();
       if (this.link?.frame === frame) this.link = undefined;

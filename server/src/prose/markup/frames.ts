@@ -36,6 +36,8 @@ export interface Frame {
   readonly start: number;
   /** Count of what was visible before it. */
   readonly shown: number;
+  /** True where a text is made for it if it has none. */
+  readonly refers: boolean;
 }
 
 /** Zones that a block has from what it lies in, whatever it is. */
@@ -44,18 +46,18 @@ const INHERITED: ZoneSet = Zone.quotation | Zone.safetyMessage;
 /** The frame on which a document's outermost elements stand. */
 export function ground(role: ElementRole, takesText: boolean): Frame {
   const zones = { blockZones: 0, inlineZones: 0 };
-  const place = { depth: 0, titled: 'heading', start: 0, shown: 0 } as const;
+  const place = { depth: 0, titled: 'heading', start: 0, shown: 0, refers: false } as const;
   return { name: '', role, state: State.read, kind: 'paragraph', level: 0, ...zones, ...place, takesText };
 }
 
 /** The frame of an element of which nothing is read. */
 export function closedFrame(parent: Frame, name: string, role: ElementRole, start: number): Frame {
-  return like(parent, name, role, start, State.none, 0, parent.inlineZones, parent.takesText);
+  return like(parent, name, role, start, State.none, 0, parent.inlineZones, parent.takesText, false);
 }
 
 /**
  * The frame of an element that is read; `zones` are its role's and what its attributes add, `shown` counts what was
- * visible before it.
+ * visible before it; `refers` is true where a text is made for the element if it has none.
  */
 export function openFrame(
   parent: Frame,
@@ -64,9 +66,11 @@ export function openFrame(
   zones: ZoneSet,
   start: number,
   shown: number,
+  refers: boolean,
 ): Frame {
   const { flow } = role;
-  if (flow === Flow.inline) return like(parent, name, role, start, State.read, shown, parent.inlineZones | zones, true);
+  if (flow === Flow.inline)
+    return like(parent, name, role, start, State.read, shown, parent.inlineZones | zones, true, refers);
   const depth = parent.depth + (role.titled === 'heading' ? 1 : 0);
   let blockZones = (flow === Flow.aside ? parent.blockZones & INHERITED : parent.blockZones) | zones;
   let kind = role.kind ?? parent.kind;
@@ -90,6 +94,7 @@ export function openFrame(
     takesText: flow === Flow.block || flow === Flow.aside,
     start,
     shown,
+    refers,
   };
 }
 
@@ -103,6 +108,7 @@ function like(
   shown: number,
   inlineZones: ZoneSet,
   takesText: boolean,
+  refers: boolean,
 ): Frame {
   return {
     name,
@@ -117,6 +123,7 @@ function like(
     takesText,
     start,
     shown,
+    refers,
   };
 }
 

@@ -5,6 +5,8 @@ import { OPAQUE } from '../prose.js';
 import { AddressFinder } from './addresses.js';
 
 const REFERENCE = /&(?:#[0-9]{1,8}|#[xX][0-9A-Fa-f]{1,7}|[A-Za-z_:][\w:.-]{0,80});/y;
+/** The commonest names that HTML decodes without a semicolon (HTML Standard, "Named character references"). */
+const UNENDED = /&(nbsp|amp|lt|gt|quot|copy|reg)(?![A-Za-z0-9=])/y;
 const PREDEFINED = new Set(['&amp;', '&lt;', '&gt;', '&quot;', '&apos;']);
 const AMPERSAND = 38;
 
@@ -70,6 +72,10 @@ export class TextReader {
         const end = this.reference(run, at, to, out);
         if (end > at) run = end;
         at = Math.max(end, at + 1);
+        if (stop < at) {
+          address = this.addresses.next(at, to);
+          stop = address?.start ?? to;
+        }
       } else at++;
     }
     out.run(run, to);
@@ -77,10 +83,12 @@ export class TextReader {
 
   /** Adds the reference at `at`, with the text before it, and returns its end; `at` itself where it is text. */
   private reference(run: number, at: number, to: number, out: ContentBuilder): number {
-    REFERENCE.lastIndex = at;
-    if (!REFERENCE.test(this.text) || REFERENCE.lastIndex > to) return at;
-    const end = REFERENCE.lastIndex;
-    const decoded = this.decode(this.text.slice(at, end));
+    const unended = this.references.xml ? undefined : matchAt(UNENDED, this.text, at)?.[1];
+    const written = unended === undefined ? matchAt(REFERENCE, this.text, at)?.[0] : `&${unended};`;
+    if (written === undefined) return at;
+    const end = at + written.length - (unended === undefined || this.text[at + written.length - 1] === ';' ? 0 : 1);
+    if (end > to) return at;
+    const decoded = this.decode(written);
     if (decoded === undefined) return at;
     out.run(run, at);
     if (isSpace(decoded.charCodeAt(0))) out.space(at, end);
@@ -96,6 +104,11 @@ export class TextReader {
     const decoded = decodeReference(reference);
     return decoded !== undefined && isCommon(decoded) ? decoded : OPAQUE;
   }
+}
+
+function matchAt(pattern: RegExp, text: string, at: number): RegExpExecArray | null {
+  pattern.lastIndex = at;
+  return pattern.exec(text);
 }
 
 /**

@@ -61,6 +61,11 @@ export class StartTag {
     return isNotice || classes.some((word) => SAFETY_CLASSES.has(word)) ? Zone.safetyMessage : 0;
   }
 
+  /** True where the element's text may come from elsewhere (DITA 1.3, content references and keys). */
+  isReused(): boolean {
+    return this.names.some((name) => name === 'keyref' || name === 'conref' || name === 'conkeyref');
+  }
+
   /** The target, where the element is a link. */
   target(role: ElementRole): string | undefined {
     for (const name of role.targets ?? []) {
