@@ -108,6 +108,7 @@ describe('what cannot run', () => {
     [['ask', '.', '--format', 'xml'], /--format takes text, json; “xml” is none of them/],
     [['ask', '.', '--most', 'ten'], /--most takes a whole number from 1, not “ten”/],
     [['ask', '--colour'], /There is no option --colour/],
+    [['ask', '.', '--constructor'], /There is no option --constructor/],
     [['sing'], /There is no subcommand “sing”/],
   ])('%j ends with exit code 2 and says why', async (words, message) => {
     const { code, out, err } = await evenword(words);

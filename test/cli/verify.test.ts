@@ -1,4 +1,6 @@
 // evenword verify: exit codes, places of findings, broken termbases; and it says what the editor shows.
+import { mkdir } from 'node:fs/promises';
+import { join } from 'node:path';
 import { afterEach, describe, expect, it } from 'vitest';
 import { evenword } from '../support/commandLine.js';
 import { TestClient, eventually, temporaryFolder } from '../support/languageServer.js';
@@ -40,6 +42,30 @@ describe('evenword verify', () => {
     const { code, out, err } = await evenword(['verify', '.'], folder.path);
     expect({ code, out }).toEqual({ code: 2, out: '' });
     expect(err).toMatch(/^termbase\.yaml:4:5: (error|warning): /m);
+    // Silence is for notes: why nothing was checked is said all the same.
+    const broken = await folderOf({ ...PAGES, 'termbase.yaml': 'concepts: [broken\n' });
+    const quiet = await evenword(['verify', '.', '--quiet'], broken.path);
+    expect(quiet).toMatchObject({ code: 2, out: '' });
+    expect(quiet.err).toMatch(/^termbase\.yaml:\d+:\d+: error: /);
+  });
+
+  it('holds single pages and parts of a tree to the termbases above them', async () => {
+    const page = PAGES['connecting.md']!;
+    const folder = await folderOf({
+      ...{ 'termbase.yaml': TERMBASE, 'a/page.md': page, 'b/page.md': page, 'b/c/page.md': page },
+      'b/termbase.yaml': 'evenword: 1\nconcepts:\n  - preferred: API key\n    deprecated: [access key]\n',
+    });
+    const places = async (...words: string[]): Promise<string[]> => {
+      const { out } = await evenword(['verify', ...words], folder.path);
+      return out.split('\n').map((line) => line.split(': ')[0]!);
+    };
+    const nearest = ['b/c/page.md:8:12', 'b/page.md:8:12'];
+    expect(await places('a/page.md')).toEqual(['']);
+    expect(await places('b/page.md')).toEqual([nearest[1], '']);
+    expect(await places('a', 'b/c')).toEqual(['a/page.md:3:4', 'a/page.md:3:71', nearest[0], '']);
+    await mkdir(join(folder.path, '.git'));
+    expect(await places('a/page.md')).toEqual(['a/page.md:3:4', 'a/page.md:3:71', '']);
+    expect(await places('b/c')).toEqual([nearest[0], '']);
   });
 
   it('finds what the editor shows, place by place', async () => {

@@ -24,7 +24,8 @@ export async function surveyOrStop(
     const lines = new LineIndex(text);
     for (const { severity, span, message } of problems) {
       const { line, character } = lines.positionAt(span.start);
-      host.note(`${host.pathOf(uri)}:${line + 1}:${character + 1}: ${severity}: ${message}\n`);
+      const where = `${host.pathOf(uri)}:${line + 1}:${character + 1}`;
+      host.note(`${where}: ${severity}: ${message}\n`, severity === 'error' ? 'error' : undefined);
       if (severity === 'error') broken = true;
     }
   }

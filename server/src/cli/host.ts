@@ -19,8 +19,8 @@ export interface Survey {
 export interface CliHost {
   /** Writes the result: standard output. */
   write(text: string): void;
-  /** Writes a note or progress: standard error. */
-  note(text: string): void;
+  /** Writes a note to standard error; one of the weight `error` says why a run ends, and is written even where notes are not wanted. */
+  note(text: string, weight?: 'error'): void;
   /** Shows how far a survey has come; overwrites itself on a terminal. */
   progress(text: string): void;
   /** Width of the terminal in columns. */

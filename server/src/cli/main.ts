@@ -66,8 +66,11 @@ function helpOf(name: string, { summary, operands, options }: Subcommand): strin
   return `evenword ${name} ${operands}\n${summary}\n\n${rows.join('\n')}\n`;
 }
 
-/** A host whose notes and progress are dropped; errors are still said by {@link runCli}. */
+/** A host whose notes and progress are dropped; why a run cannot go on is still said. */
 function silenced(host: CliHost): CliHost {
   const quiet = Object.create(host) as CliHost;
-  return Object.assign(quiet, { note: () => undefined, progress: () => undefined });
+  const note: CliHost['note'] = (text, weight) => {
+    if (weight === 'error') host.note(text, weight);
+  };
+  return Object.assign(quiet, { note, progress: () => undefined });
 }

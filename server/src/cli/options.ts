@@ -36,7 +36,7 @@ export function readOptions(words: readonly string[], rules: Readonly<Record<str
       continue;
     }
     const [name, inline] = splitOnce(word.replace(/^--?/, ''), '=');
-    const rule = rules[name];
+    const rule = Object.hasOwn(rules, name) ? rules[name] : undefined;
     if (rule === undefined) throw new UsageError(`There is no option ${word.split('=')[0]!}; --help lists them.`);
     if (rule.value === undefined) {
       if (inline !== undefined) throw new UsageError(`--${name} takes no value.`);

@@ -1,34 +1,18 @@
 // Finding the documents of a folder and reading them, with a reason for everything that is left out.
+import { existsSync } from 'node:fs';
 import { readdir, readFile, realpath, stat } from 'node:fs/promises';
-import { basename, extname, join, relative, sep } from 'node:path';
+import { basename, dirname, join, relative, sep } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import ignore from 'ignore';
 import type { Ignore } from 'ignore';
-import type { Format, SourceText } from '../text/sourceText.js';
+import { FORMATS, formatOf } from '../text/sourceText.js';
+import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri } from '../text/uri.js';
 
 /** Files larger than this are left out: prose is never so long, data often is. In bytes. */
 export const LARGEST_FILE = 4 * 1024 * 1024;
 
-const FORMATS: Readonly<Record<string, Format>> = {
-  '.html': 'html',
-  '.htm': 'html',
-  '.xhtml': 'xml',
-  '.xml': 'xml',
-  '.dita': 'xml',
-  '.page': 'xml',
-  '.dbk': 'xml',
-  '.md': 'markdown',
-  '.markdown': 'markdown',
-  '.mdx': 'markdown',
-  '.txt': 'plaintext',
-  '.text': 'plaintext',
-  '.rst': 'restructuredtext',
-  '.rest': 'restructuredtext',
-  '.adoc': 'asciidoc',
-  '.asciidoc': 'asciidoc',
-  '.asc': 'asciidoc',
-};
+const TERMBASE = 'termbase.yaml';
 
 /** Folders that hold no documentation of the project's own. */
 const NEVER_ENTERED = new Set(['node_modules', '.git', '.hg', '.svn', '.venv', '__pycache__', '.vscode-test', '.idea']);
@@ -51,11 +35,6 @@ export class CannotRead extends Error {
   override readonly name = 'CannotRead';
 }
 
-/** The format of a file by its extension, or undefined for other files. */
-export function formatOf(path: string): Format | undefined {
-  return FORMATS[extname(path).toLowerCase()];
-}
-
 /**
  * Lists the documents under a folder (or the one file named), in order. Honours `.gitignore` files, follows no link out of
  * a loop and enters no dependency folder.
@@ -68,7 +47,11 @@ export async function findFiles(path: string): Promise<FoundFiles> {
   });
   if (!status.isDirectory()) {
     if (formatOf(path) === undefined)
-      throw new CannotRead(`${path}: no format that Evenword reads (${Object.keys(FORMATS).join(' ')})`);
+      throw new CannotRead(
+        `${path}: no format that Evenword reads (${Object.keys(FORMATS)
+          .map((extension) => `.${extension}`)
+          .join(' ')})`,
+      );
     return { ...found, documents: [path] };
   }
   await walk(path, [], new Set(), found);
@@ -88,6 +71,7 @@ export type ReadFile = { readonly source: SourceText } | { readonly leftOut: Lef
 /** Reads one document. Only UTF-8 (with or without a byte order mark) is taken: a wrong guess would spoil every offset. */
 export async function readDocument(path: string): Promise<ReadFile> {
   try {
+    if ((await stat(path)).size > LARGEST_FILE) return { leftOut: { path, reason: 'larger than 4 MiB' } };
     const bytes = await readFile(path);
     const reason = unreadable(bytes);
     if (reason !== undefined) return { leftOut: { path, reason } };
@@ -96,6 +80,35 @@ export async function readDocument(path: string): Promise<ReadFile> {
   } catch (error) {
     if (error instanceof TypeError) return { leftOut: { path, reason: await encodingReason(path) } };
     return { leftOut: { path, reason: plainReason(error) } };
+  }
+}
+
+/**
+ * Why {@link findFiles} of a folder would not come to a path below it: the folders and `.gitignore` files in between say so.
+ * Undefined where nothing is against it.
+ */
+export async function whyLeftOut(root: string, path: string): Promise<string | undefined> {
+  const names = relative(root, path).split(sep);
+  const rules: Rules[] = [];
+  let folder = root;
+  for (const [index, name] of names.entries()) {
+    const isFolder = index < names.length - 1;
+    rules.push(...(await rulesOf(folder, true)));
+    folder = join(folder, name);
+    if (isFolder && NEVER_ENTERED.has(name)) return 'a folder of dependencies or tools';
+    // A termbase is law wherever it stands among the documents.
+    if ((isFolder || name !== TERMBASE) && isIgnored(folder, isFolder, rules)) return 'ignored by .gitignore';
+  }
+  return undefined;
+}
+
+/** Termbases of the folders above, nearest first, up to the root of the repository; none where there is no repository. */
+export function termbasesAbove(folder: string): string[] {
+  const found: string[] = [];
+  for (let at = folder; ; at = dirname(at)) {
+    if (at !== folder && existsSync(join(at, TERMBASE))) found.push(join(at, TERMBASE));
+    if (existsSync(join(at, '.git'))) return found;
+    if (dirname(at) === at) return [];
   }
 }
 
@@ -110,7 +123,11 @@ async function walk(
   visited: Set<string>,
   found: { documents: string[]; termbases: string[]; leftOut: LeftOut[] },
 ): Promise<void> {
-  const real = await realpath(folder);
+  // A folder may vanish between being listed and being entered, as when a branch is switched.
+  const real = await realpath(folder).catch((error: unknown) => {
+    found.leftOut.push({ path: folder, reason: plainReason(error) });
+  });
+  if (real === undefined) return;
   if (visited.has(real)) {
     found.leftOut.push({ path: folder, reason: 'a link to a folder that was read already' });
     return;
@@ -138,10 +155,9 @@ async function walk(
       else if (isIgnored(path, true, rules)) found.leftOut.push({ path, reason: 'ignored by .gitignore' });
       else await walk(path, rules, visited, found);
     } else if (kind.isFile()) {
-      if (basename(path) === 'termbase.yaml') found.termbases.push(path);
+      if (basename(path) === TERMBASE) found.termbases.push(path);
       else if (formatOf(path) === undefined) continue;
       else if (isIgnored(path, false, rules)) found.leftOut.push({ path, reason: 'ignored by .gitignore' });
-      else if ((await stat(path)).size > LARGEST_FILE) found.leftOut.push({ path, reason: 'larger than 4 MiB' });
       else found.documents.push(path);
     }
   }

@@ -9,3 +9,30 @@ export interface SourceText {
   readonly format: Format;
   readonly text: string;
 }
+
+/** The formats by file extension, in lower case: the one table for editor, command line and watchers. */
+export const FORMATS: Readonly<Record<string, Format>> = {
+  html: 'html',
+  htm: 'html',
+  xhtml: 'xml',
+  xml: 'xml',
+  dita: 'xml',
+  page: 'xml',
+  dbk: 'xml',
+  md: 'markdown',
+  markdown: 'markdown',
+  mdx: 'markdown',
+  txt: 'plaintext',
+  text: 'plaintext',
+  rst: 'restructuredtext',
+  rest: 'restructuredtext',
+  adoc: 'asciidoc',
+  asciidoc: 'asciidoc',
+  asc: 'asciidoc',
+};
+
+/** The format of a file by the extension of its path or URI, or undefined for other files. */
+export function formatOf(path: string): Format | undefined {
+  const extension = /[^/\\]\.([A-Za-z]+)$/.exec(path)?.[1]?.toLowerCase();
+  return extension !== undefined && Object.hasOwn(FORMATS, extension) ? FORMATS[extension] : undefined;
+}
