@@ -5,14 +5,15 @@ import type { LanguageClientOptions, ServerOptions } from 'vscode-languageclient
 import { DOCUMENT_LANGUAGES, STATE_NOTIFICATION, TERMBASE_NAME } from '../../server/src/lsp/protocol.js';
 import type { ClientOptions, FolderStateParams } from '../../server/src/lsp/protocol.js';
 
+const SCHEMES = ['file', 'vscode-remote', 'vscode-vfs'];
+
 /** Starts the server and connects it to the editor; requests that come before it is up wait for it. */
 export function startClient(server: ServerOptions, onState: (state: FolderStateParams) => void): LanguageClient {
   const options: LanguageClientOptions = {
     documentSelector: [
-      ...DOCUMENT_LANGUAGES.flatMap((language) =>
-        ['file', 'vscode-remote', 'vscode-vfs', 'untitled'].map((scheme) => ({ scheme, language })),
-      ),
-      { pattern: `**/${TERMBASE_NAME}` },
+      ...DOCUMENT_LANGUAGES.flatMap((language) => [...SCHEMES, 'untitled'].map((scheme) => ({ scheme, language }))),
+      // Not the old text of a termbase that a view of differences shows.
+      ...SCHEMES.map((scheme) => ({ scheme, pattern: `**/${TERMBASE_NAME}` })),
     ],
     initializationOptions: { savesTermbase: true } satisfies ClientOptions,
     markdown: { isTrusted: false, supportHtml: false },

@@ -14,5 +14,7 @@ export function activate(context: vscode.ExtensionContext): void {
     { run, debug: { ...run, options: { execArgv: ['--nolazy', '--inspect=6009'] } } },
     (state) => status.show(state),
   );
-  context.subscriptions.push(status, { dispose: () => void client.dispose() }, ...registerCommands(client));
+  // A client that is still starting, or failed to, cannot be stopped; there is nothing to do about it then.
+  const ending = { dispose: () => void client.dispose().catch(() => undefined) };
+  context.subscriptions.push(status, ending, ...registerCommands(client));
 }

@@ -15,8 +15,10 @@ export class StatusItem implements vscode.Disposable {
   /** Takes in the state of one folder. */
   show(state: FolderStateParams): void {
     if (state.folder === '') return;
-    this.states.set(state.folder, state);
+    if (state.state === 'ended') this.states.delete(state.folder);
+    else this.states.set(state.folder, state);
     const all = [...this.states.values()];
+    if (all.length === 0) return this.item.hide();
     const failed = all.find((each) => each.state === 'failed');
     const open = all.reduce((sum, { openQuestions }) => sum + openQuestions, 0);
     const pages = all.reduce((sum, { documents }) => sum + documents, 0);

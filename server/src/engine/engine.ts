@@ -20,6 +20,8 @@ export interface DocumentUpdate {
   readonly facts?: DocumentFacts;
   /** True while an editor holds the document: its reading is kept for the next edit. */
   readonly open?: boolean;
+  /** False for a document that is no part of the set: it is checked, but nothing is mined from it. */
+  readonly counted?: boolean;
 }
 
 /** A change of the world outside, made in one step. */
@@ -87,7 +89,7 @@ export class Engine {
     for (const uri of [...this.unsettled.keys()]) {
       // Read anew after each rest: an edit meanwhile has thrown away facts that came with the text before it.
       const document = this.state.documents.get(uri);
-      const facts = document && (this.unsettled.get(uri) ?? this.factsOf(document));
+      const facts = document?.counted === true ? (this.unsettled.get(uri) ?? this.factsOf(document)) : undefined;
       this.unsettled.set(uri, facts);
       began.set(uri, document);
       changes.set(uri, facts);
@@ -115,18 +117,20 @@ export class Engine {
   private changedDocuments(updates: readonly DocumentUpdate[]): ReadonlyMap<string, EngineDocument> {
     if (updates.length === 0) return this.state.documents;
     const documents = new Map(this.state.documents);
-    for (const { uri, source, facts, open } of updates) {
+    for (const { uri, source, facts, open, counted = true } of updates) {
       const known = documents.get(uri);
       if (source === undefined) {
-        if (documents.delete(uri)) this.unsettled.set(uri, undefined);
+        if (documents.delete(uri) && known!.counted) this.unsettled.set(uri, undefined);
         continue;
       }
       const same = known?.source.text === source.text && known.source.format === source.format;
       documents.set(uri, {
         source: same ? known.source : source,
         reading: readingAfter(known, source, same, open === true),
+        counted,
       });
-      if (!same || facts !== undefined) this.unsettled.set(uri, facts);
+      if (counted ? !same || !known.counted || facts !== undefined : known?.counted === true)
+        this.unsettled.set(uri, facts);
     }
     return documents;
   }

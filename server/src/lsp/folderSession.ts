@@ -2,11 +2,11 @@
 import type { TextDocument } from 'vscode-languageserver-textdocument';
 import { Engine, DEFAULT_SETTINGS } from '../engine/engine.js';
 import type { DocumentUpdate } from '../engine/engine.js';
-import type { Profiles } from '../engine/factsOf.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import { LineIndex } from '../text/lineIndex.js';
-import type { SourceText } from '../text/sourceText.js';
-import { canonicalUri } from '../text/uri.js';
+import { formatOf } from '../text/sourceText.js';
+import type { Format, SourceText } from '../text/sourceText.js';
+import { canonicalUri, isBelow } from '../text/uri.js';
 import { findingToDiagnostic, problemToDiagnostic } from './conversion.js';
 import type { ServerHost } from './host.js';
 import { CalledOff, drive } from './pace.js';
@@ -26,27 +26,36 @@ export interface SessionEditor {
   ): Promise<T>;
   state(state: FolderStateParams): void;
   log(message: string): void;
+  /** True where no deeper workspace folder of its own holds a document of this folder. */
+  owns(uri: string): boolean;
 }
 
 /** A workspace folder, or (with an empty URI) the open documents outside all folders. */
 export class FolderSession {
   readonly engine: Engine;
   private readonly open = new Map<string, TextDocument>();
+  /** Open documents that no survey would come to, or of which that is not known yet: they are checked, but do not count. */
+  private readonly aside = new Set<string>();
+  /** What was opened, edited or reported as changed since the survey began: what it has read of these is old. */
+  private readonly renewed = new Set<string>();
   private readonly lines = new WeakMap<SourceText, LineIndex>();
   private settings: FolderSettings = {};
   private idle: NodeJS.Timeout | undefined;
-  private settling = new AbortController();
+  private surveying: AbortController | undefined;
+  private settling: AbortController | undefined;
   private readonly ended = new AbortController();
+  /** Changed files are read one change after the other, so that the last text read is the last one written. */
+  private reading: Promise<void> = Promise.resolve();
+  private told: FolderStateParams | undefined;
 
   constructor(
     /** Canonical, without a closing slash. */
     readonly uri: string,
-    profiles: Profiles,
     private readonly host: ServerHost,
     private readonly publisher: Publisher,
     private readonly editor: SessionEditor,
   ) {
-    this.engine = new Engine(profiles);
+    this.engine = new Engine(host.profiles);
   }
 
   get snapshot(): Snapshot {
@@ -63,58 +72,86 @@ export class FolderSession {
     return `${this.uri}/`;
   }
 
+  /** The documents that an editor holds, as they are now. */
+  get openDocuments(): readonly TextDocument[] {
+    return [...this.open.values()];
+  }
+
+  /** True where a termbase is loaded, be it one above the folder. */
+  holds(termbaseUri: string): boolean {
+    return this.snapshot.termbases.some(({ uri }) => uri === termbaseUri);
+  }
+
   configure(settings: FolderSettings): void {
     this.settings = settings;
     const least = settings.questions?.leastConfidence;
     this.engine.apply({ settings: { ...DEFAULT_SETTINGS, ...(least !== undefined && { leastConfidence: least }) } });
-    this.publishAll();
+    this.showDecisions();
   }
 
-  /** Reads the folder and settles its relations, with progress shown. Open documents count as the editor has them. */
+  /**
+   * Reads the folder and settles its relations, with progress shown. Open documents count as the editor has them; documents
+   * and termbases that are gone are forgotten. A survey that is started later takes the place of this one.
+   */
   async survey(): Promise<void> {
     if (this.uri === '') return;
+    this.surveying?.abort();
+    const mine = new AbortController();
+    this.surveying = mine;
+    this.renewed.clear();
+    this.callOffSettling();
     this.tellState('surveying');
     try {
       await this.editor.withProgress('Evenword: surveying the documentation', async (report, cancelled) => {
-        const signal = AbortSignal.any([cancelled, this.ended.signal]);
-        const { sources, termbases, leftOut } = await this.host.readFolder(this.uri, signal);
-        for (const { path, reason } of leftOut) this.editor.log(`Left out: ${path}: ${reason}`);
-        const closed = sources.filter(({ uri }) => !this.open.has(uri));
-        this.engine.apply({ termbases: termbases.filter(({ uri }) => !this.open.has(uri)) });
-        this.publishAll();
-        const facts = await this.host.gather(
-          closed,
-          (done, all) => report(`${done} of ${all} pages`, (80 * done) / all),
-          signal,
-        );
-        const updates = closed.map((source, index): DocumentUpdate => ({
-          uri: source.uri,
-          source,
-          facts: facts[index]!,
-        }));
-        this.engine.apply({ documents: updates.filter(({ uri }) => !this.open.has(uri)) });
+        const signal = AbortSignal.any([cancelled, mine.signal]);
+        await this.readAll(report, signal);
         report('comparing terms', 85);
         await this.settle(signal);
       });
+      if (this.surveying !== mine) return;
+      this.surveying = undefined;
+      this.settleWhenIdle();
     } catch (error) {
-      if (this.ended.signal.aborted) return;
+      if (this.surveying !== mine || this.ended.signal.aborted) return;
+      this.surveying = undefined;
       const cancelled = error instanceof CalledOff || (error as Error).name === 'AbortError';
       this.tellState('failed', cancelled ? 'The survey was cancelled.' : (error as Error).message);
-      if (!cancelled) throw error;
+      if (!cancelled) this.editor.log(`The survey of ${this.uri} failed: ${String((error as Error).stack)}`);
     }
+  }
+
+  private async readAll(report: (message: string, percent: number) => void, signal: AbortSignal): Promise<void> {
+    const { sources, termbases, leftOut } = await this.host.readFolder(this.uri, signal);
+    signal.throwIfAborted();
+    for (const { path, reason } of leftOut) this.editor.log(`Left out: ${path}: ${reason}`);
+    const isOld = ({ uri }: { uri: string }): boolean => !this.open.has(uri) && !this.renewed.has(uri);
+    this.takeTermbases([...termbases, ...goneFrom(this.snapshot.termbases, termbases)].filter(isOld));
+    const closed = sources.filter(({ uri }) => !this.open.has(uri) && this.editor.owns(uri));
+    const facts = await this.host.gather(
+      closed,
+      (done, all) => report(`${done} of ${all} pages`, (80 * done) / all),
+      signal,
+    );
+    const updates = closed.map((source, at): DocumentUpdate => ({ uri: source.uri, source, facts: facts[at]! }));
+    const known = [...this.snapshot.documents.keys()].map((uri) => ({ uri }));
+    const gone = goneFrom(known, closed).map(({ uri }) => ({ uri, source: undefined }));
+    this.engine.apply({ documents: [...updates, ...gone].filter(isOld) });
   }
 
   /** A document was opened or edited: its findings are renewed at once, relations when typing rests. */
   edited(document: TextDocument): void {
     const uri = canonicalUri(document.uri);
+    const isNew = !this.open.has(uri);
     this.open.set(uri, document);
+    if (this.surveying !== undefined) this.renewed.add(uri);
     const text = document.getText();
     if (isTermbase(uri)) {
-      this.engine.apply({ termbases: [{ uri, text }] });
-      this.publishAll();
+      this.takeTermbases([{ uri, text }]);
       return;
     }
-    this.engine.apply({ documents: [{ uri, source: { uri, format: formatOf(document), text }, open: true }] });
+    if (isNew && !this.snapshot.documents.has(uri)) this.setAside(uri);
+    const source = { uri, format: formatOfDocument(document), text };
+    this.engine.apply({ documents: [{ uri, source, open: true, counted: !this.aside.has(uri) }] });
     this.publish(uri);
     this.settleWhenIdle();
   }
@@ -123,26 +160,69 @@ export class FolderSession {
   async closed(document: TextDocument): Promise<void> {
     const uri = canonicalUri(document.uri);
     this.open.delete(uri);
+    this.aside.delete(uri);
     if (!isTermbase(uri)) this.publisher.clear(uri);
-    await this.fileChanged(uri);
+    await this.filesChanged([uri]);
   }
 
-  /** A file on disk was made, changed or deleted. */
-  async fileChanged(uri: string): Promise<void> {
-    if (this.open.has(uri)) return;
-    if (isTermbase(uri)) {
-      const text = await this.host.readTermbase(uri);
-      if (this.open.has(uri)) return;
-      this.engine.apply({ termbases: [{ uri, text }] });
-      if (text === undefined) this.publisher.clear(uri);
-      this.publishAll();
-      return;
-    }
-    const source = this.uri === '' ? undefined : await this.host.readDocument(uri);
-    if (this.open.has(uri)) return;
-    this.engine.apply({ documents: [{ uri, source }] });
-    if (source === undefined) this.publisher.clear(uri);
+  /** A document belongs to another session now. */
+  release(document: TextDocument): void {
+    const uri = canonicalUri(document.uri);
+    this.open.delete(uri);
+    this.aside.delete(uri);
+    if (isTermbase(uri)) this.takeTermbases([{ uri, text: undefined }]);
+    else this.engine.apply({ documents: [{ uri, source: undefined }] });
     this.settleWhenIdle();
+  }
+
+  /** Files on disk were made, changed or deleted, or a folder with files in it was deleted. All are taken in one step. */
+  async filesChanged(uris: readonly string[]): Promise<void> {
+    for (const uri of uris) this.renewed.add(uri);
+    const done = this.reading.then(() => this.readChanged(uris));
+    this.reading = done.catch(() => undefined);
+    return done;
+  }
+
+  private async readChanged(changed: readonly string[]): Promise<void> {
+    const termbases: TermbaseText[] = [];
+    const documents: DocumentUpdate[] = [];
+    for (const uri of new Set(changed.flatMap((each) => this.filesAt(each)))) {
+      this.renewed.add(uri);
+      if (this.open.has(uri)) continue;
+      if (isTermbase(uri)) termbases.push({ uri, text: await this.host.readTermbase(this.uri, uri) });
+      else documents.push({ uri, source: this.uri === '' ? undefined : await this.host.readDocument(this.uri, uri) });
+    }
+    if (this.ended.signal.aborted) return;
+    const isClosed = ({ uri }: { uri: string }): boolean => !this.open.has(uri);
+    this.engine.apply({ documents: documents.filter(isClosed) });
+    if (termbases.some(isClosed)) this.takeTermbases(termbases.filter(isClosed));
+    this.settleWhenIdle();
+  }
+
+  /** The files that a report of a change is about: of a deleted folder, all that is known below it. */
+  private filesAt(uri: string): readonly string[] {
+    const { documents, termbases } = this.snapshot;
+    if (documents.has(uri) || isTermbase(uri) || formatOf(uri) !== undefined) return [uri];
+    return [...documents.keys(), ...termbases.map((termbase) => termbase.uri)].filter((each) => isBelow(uri, each));
+  }
+
+  private takeTermbases(termbases: readonly TermbaseText[]): void {
+    this.engine.apply({ termbases });
+    for (const { uri, text } of termbases) if (text === undefined) this.publisher.clear(uri);
+    this.showDecisions();
+  }
+
+  /** Keeps a document that was opened from counting until its folder is found to hold it. */
+  private setAside(uri: string): void {
+    this.aside.add(uri);
+    if (this.uri === '') return;
+    this.host.whyLeftOut(this.uri, uri).then(
+      (reason) => {
+        const document = this.open.get(uri);
+        if (reason === undefined && this.aside.delete(uri) && document !== undefined) this.edited(document);
+      },
+      (error: unknown) => this.editor.log(`${uri}: ${String(error)}`),
+    );
   }
 
   /** The version of an open document, for edits that must not hit another text. */
@@ -160,34 +240,41 @@ export class FolderSession {
   /** Ends the session and takes back what it published. */
   end(): void {
     this.ended.abort();
-    clearTimeout(this.idle);
-    this.settling.abort();
+    this.surveying?.abort();
+    this.callOffSettling();
     for (const uri of this.open.keys()) this.publisher.clear(uri);
     for (const { uri } of this.snapshot.termbases) this.publisher.clear(uri);
+    if (this.uri !== '') this.tellState('ended');
   }
 
   private settleWhenIdle(): void {
-    // Single documents outside all folders are checked, but make no documentation set to be mined.
-    if (this.uri === '' || !this.engine.needsSettling) return;
-    clearTimeout(this.idle);
-    this.settling.abort();
+    // A survey settles what comes in while it reads, and what comes in later is settled after it.
+    if (this.surveying !== undefined || !this.engine.needsSettling || this.ended.signal.aborted) return;
+    this.callOffSettling();
     this.idle = setTimeout(() => {
       this.settle(this.ended.signal).catch((error: unknown) => {
-        if (!(error instanceof CalledOff)) this.editor.log(`Settling failed: ${String(error)}`);
+        if (!(error instanceof CalledOff)) this.editor.log(`Settling failed: ${String((error as Error).stack)}`);
       });
     }, IDLE);
   }
 
+  private callOffSettling(): void {
+    clearTimeout(this.idle);
+    this.settling?.abort();
+    this.settling = undefined;
+  }
+
   private async settle(signal: AbortSignal): Promise<void> {
-    this.settling.abort();
-    this.settling = new AbortController();
-    const superseded = this.settling.signal;
+    const mine = new AbortController();
+    this.settling = mine;
     try {
-      await drive(this.engine.settle(), AbortSignal.any([signal, superseded]));
+      await drive(this.engine.settle(), signal, mine.signal);
     } catch (error) {
       // An edit came in between: the settlement that follows it does this one's work too.
-      if (error instanceof CalledOff && superseded.aborted && !signal.aborted) return;
+      if (error instanceof CalledOff && mine.signal.aborted && !signal.aborted) return;
       throw error;
+    } finally {
+      if (this.settling === mine) this.settling = undefined;
     }
     this.publishAll();
     this.tellState('ready');
@@ -195,11 +282,19 @@ export class FolderSession {
 
   private tellState(state: FolderStateParams['state'], message?: string): void {
     const { snapshot } = this;
-    this.editor.state({
+    this.told = {
       ...{ folder: this.uri, state, documents: snapshot.relations.size.documents },
       openQuestions: snapshot.agendaAt(this.rootUri).open.length,
       ...(message !== undefined && { message }),
-    });
+    };
+    this.editor.state(this.told);
+  }
+
+  /** Decisions or settings changed: shows what follows from them, on pages and in the number of open questions. */
+  private showDecisions(): void {
+    this.publishAll();
+    if (this.told?.state !== 'ready') return;
+    if (this.told.openQuestions !== this.snapshot.agendaAt(this.rootUri).open.length) this.tellState('ready');
   }
 
   private publishAll(): void {
@@ -214,31 +309,44 @@ export class FolderSession {
   }
 
   private publish(uri: string): void {
+    if (this.ended.signal.aborted) return;
     const { snapshot } = this;
     const document = snapshot.documents.get(uri);
     if (document === undefined) return;
-    const lines = this.linesOf(document.source);
     const shown = snapshot
       .findingsIn(uri)
       .filter(({ code }) => code !== 'mixed-terms' || this.settings.hints?.mixedTerms !== false);
+    const lines = shown.length === 0 ? undefined : this.linesOf(document.source);
     this.publisher.publish(
       uri,
-      shown.map((finding) => findingToDiagnostic(finding, lines)),
+      lines === undefined ? [] : shown.map((finding) => findingToDiagnostic(finding, lines)),
       this.open.get(uri)?.version,
     );
   }
 }
 
-function isTermbase(uri: string): boolean {
+/** A termbase file's text, or undefined where it is gone. */
+interface TermbaseText {
+  readonly uri: string;
+  readonly text: string | undefined;
+}
+
+/** Those that are known and were not found again, as changes that take them out. */
+function goneFrom(known: readonly { uri: string }[], found: readonly { uri: string }[]): TermbaseText[] {
+  const uris = new Set(found.map(({ uri }) => uri));
+  return known.filter(({ uri }) => !uris.has(uri)).map(({ uri }) => ({ uri, text: undefined }));
+}
+
+/** True for the URI of a termbase file. */
+export function isTermbase(uri: string): boolean {
   return uri.endsWith(`/${TERMBASE_NAME}`);
 }
 
-function formatOf(document: TextDocument): SourceText['format'] {
-  if (document.languageId === 'html') return 'html';
-  if (['xml', 'dita', 'docbook'].includes(document.languageId)) return 'xml';
-  const markdown =
-    document.languageId === 'markdown' || document.languageId === 'mdx' || /\.(md|mdx|markdown)$/i.test(document.uri);
-  if (document.languageId === 'restructuredtext' || /\.(rst|rest)$/i.test(document.uri)) return 'restructuredtext';
-  if (document.languageId === 'asciidoc' || /\.(adoc|asciidoc|asc)$/i.test(document.uri)) return 'asciidoc';
-  return markdown ? 'markdown' : 'plaintext';
+/** By the file's extension, as a survey reads it, whatever the editor takes it for; else by the editor's language. */
+function formatOfDocument({ uri, languageId }: TextDocument): Format {
+  const format = formatOf(uri);
+  if (format !== undefined) return format;
+  if (languageId === 'markdown' || languageId === 'mdx') return 'markdown';
+  if (languageId === 'html' || languageId === 'restructuredtext' || languageId === 'asciidoc') return languageId;
+  return ['xml', 'dita', 'docbook'].includes(languageId) ? 'xml' : 'plaintext';
 }

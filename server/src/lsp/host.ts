@@ -1,4 +1,5 @@
 // What the language server needs of the world outside an editor: documents on disk and workers.
+import type { Profiles } from '../engine/factsOf.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
 import type { SourceText } from '../text/sourceText.js';
 
@@ -11,12 +12,16 @@ export interface FolderFiles {
 
 /** The server's world. */
 export interface ServerHost {
+  /** Language profiles, made once: the English one takes half a second and some megabytes. */
+  readonly profiles: Profiles;
   /** Reads all documents and termbases of a folder. */
   readFolder(uri: string, signal: AbortSignal): Promise<FolderFiles>;
-  /** Reads one document again; undefined where it is gone, unreadable or left out. */
-  readDocument(uri: string): Promise<SourceText | undefined>;
-  /** Reads one termbase file again; undefined where it is gone. */
-  readTermbase(uri: string): Promise<string | undefined>;
+  /** Reads one document of a folder again; undefined where it is gone, unreadable or left out. */
+  readDocument(folder: string, uri: string): Promise<SourceText | undefined>;
+  /** Reads one termbase file again; undefined where it is gone or lies in a part of the folder that is left out. */
+  readTermbase(folder: string, uri: string): Promise<string | undefined>;
+  /** Why a survey of the folder would not come to a document, or undefined where it would. */
+  whyLeftOut(folder: string, uri: string): Promise<string | undefined>;
   /** Gathers facts, on workers where that pays. */
   gather(
     sources: readonly SourceText[],

@@ -11,11 +11,11 @@ export class CalledOff extends Error {
 
 /**
  * Runs work to its end, giving the event loop a turn after each slice.
- * @throws CalledOff as soon as the signal is aborted.
+ * @throws CalledOff as soon as one of the signals is aborted.
  */
-export async function drive<T>(work: Work<T>, signal?: AbortSignal): Promise<T> {
+export async function drive<T>(work: Work<T>, ...signals: readonly AbortSignal[]): Promise<T> {
   for (;;) {
-    if (signal?.aborted === true) throw new CalledOff('called off');
+    if (signals.some(({ aborted }) => aborted)) throw new CalledOff('called off');
     const until = performance.now() + SLICE;
     do {
       const step = work.next();

@@ -60,8 +60,11 @@ export interface SurveyParams {
 export const STATE_NOTIFICATION = 'evenword/state';
 export interface FolderStateParams {
   readonly folder: string;
-  /** `surveying` while documents are read and compared; `ready` with settled questions; `failed` with a message. */
-  readonly state: 'surveying' | 'ready' | 'failed';
+  /**
+   * `surveying` while documents are read and compared; `ready` with settled questions; `failed` with a message; `ended`
+   * where the folder has left the workspace.
+   */
+  readonly state: 'surveying' | 'ready' | 'failed' | 'ended';
   readonly documents: number;
   readonly openQuestions: number;
   readonly message?: string;

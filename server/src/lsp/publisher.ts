@@ -6,16 +6,16 @@ export type SendDiagnostics = (uri: string, diagnostics: Diagnostic[], version: 
 
 /** Remembers, per document, what the client shows. */
 export class Publisher {
-  private readonly shown = new Map<string, string>();
+  private readonly shown = new Map<string, readonly Diagnostic[]>();
 
   constructor(private readonly send: SendDiagnostics) {}
 
   /** Shows these diagnostics, and no others, for a document. */
   publish(uri: string, diagnostics: readonly Diagnostic[], version?: number): void {
-    const text = JSON.stringify(diagnostics);
-    if ((this.shown.get(uri) ?? '[]') === text) return;
+    const before = this.shown.get(uri) ?? [];
+    if (before.length === diagnostics.length && diagnostics.every((one, at) => isSame(one, before[at]!))) return;
     if (diagnostics.length === 0) this.shown.delete(uri);
-    else this.shown.set(uri, text);
+    else this.shown.set(uri, diagnostics);
     this.send(uri, [...diagnostics], version);
   }
 
@@ -23,4 +23,17 @@ export class Publisher {
   clear(uri: string): void {
     this.publish(uri, []);
   }
+}
+
+/** Compares what this server fills in. */
+function isSame(a: Diagnostic, b: Diagnostic): boolean {
+  return (
+    a.message === b.message &&
+    a.range.start.line === b.range.start.line &&
+    a.range.start.character === b.range.start.character &&
+    a.range.end.line === b.range.end.line &&
+    a.range.end.character === b.range.end.character &&
+    a.severity === b.severity &&
+    a.code === b.code
+  );
 }

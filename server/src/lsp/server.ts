@@ -8,7 +8,6 @@ import {
 } from 'vscode-languageserver';
 import type { Connection, InitializeParams, InitializeResult } from 'vscode-languageserver';
 import { TextDocument } from 'vscode-languageserver-textdocument';
-import { Profiles } from '../engine/factsOf.js';
 import { canonicalUri } from '../text/uri.js';
 import { SOURCE } from './conversion.js';
 import { provideCodeActions, resolveCodeAction } from './handlers/codeAction.js';
@@ -22,7 +21,7 @@ import { Sessions } from './sessions.js';
 /** Serves a connection until it is closed. */
 export function serve(connection: Connection, host: ServerHost, version: string): void {
   const documents = new TextDocuments(TextDocument);
-  const sessions = new Sessions(connection, host, new Profiles());
+  const sessions = new Sessions(connection, host);
   let options: ClientOptions = {};
 
   connection.onInitialize((params: InitializeParams): InitializeResult => {
@@ -40,19 +39,19 @@ export function serve(connection: Connection, host: ServerHost, version: string)
     };
   });
   connection.onInitialized(() => {
-    void guarded(async () => {
-      await sessions.register();
-      await sessions.surveyAll();
-    });
+    // A client that refuses a registration has its folders surveyed all the same.
+    void guarded(() => sessions.register()).then(() => guarded(() => sessions.surveyAll()));
   });
   connection.onDidChangeConfiguration(() => void guarded(() => sessions.configureAll()));
   connection.onDidChangeWatchedFiles(({ changes }) => {
-    void guarded(async () => {
-      for (const { uri } of changes) await sessions.of(uri).fileChanged(canonicalUri(uri));
-    });
+    void guarded(() => sessions.filesChanged(changes.map(({ uri }) => canonicalUri(uri))));
   });
-  documents.onDidChangeContent(({ document }) => void guarded(() => sessions.of(document.uri).edited(document)));
-  documents.onDidClose(({ document }) => void guarded(() => sessions.of(document.uri).closed(document)));
+  documents.onDidChangeContent(({ document }) => {
+    for (const session of sessions.concernedBy(document.uri)) void guarded(() => session.edited(document));
+  });
+  documents.onDidClose(({ document }) => {
+    for (const session of sessions.concernedBy(document.uri)) void guarded(() => session.closed(document));
+  });
 
   connection.onHover((params) => guarded(() => provideHover(sessions, params)));
   connection.onCodeAction((params) => guarded(() => provideCodeActions(sessions, params)));

@@ -1,9 +1,12 @@
 // All workspace folders of a connection, and which of them a document belongs to.
-import { DidChangeConfigurationNotification, DidChangeWatchedFilesNotification } from 'vscode-languageserver';
+import {
+  DidChangeConfigurationNotification,
+  DidChangeWatchedFilesNotification,
+  WatchKind,
+} from 'vscode-languageserver';
 import type { ClientCapabilities, Connection } from 'vscode-languageserver';
-import type { Profiles } from '../engine/factsOf.js';
 import { canonicalUri, isBelow } from '../text/uri.js';
-import { FolderSession } from './folderSession.js';
+import { FolderSession, isTermbase } from './folderSession.js';
 import type { SessionEditor } from './folderSession.js';
 import type { ServerHost } from './host.js';
 import { STATE_NOTIFICATION, WATCHED_FILES } from './protocol.js';
@@ -20,7 +23,6 @@ export class Sessions {
   constructor(
     private readonly connection: Connection,
     private readonly host: ServerHost,
-    private readonly profiles: Profiles,
   ) {
     this.publisher = new Publisher((uri, diagnostics, version) => {
       void connection.sendDiagnostics({ uri, diagnostics, ...(version !== undefined && { version }) });
@@ -50,6 +52,27 @@ export class Sessions {
     return best;
   }
 
+  /** The sessions that an open document matters to: its own and, for a termbase, folders below it that it holds for. */
+  concernedBy(documentUri: string): FolderSession[] {
+    const own = this.of(documentUri);
+    const uri = canonicalUri(documentUri);
+    const others = isTermbase(uri) ? [...this.folders.values()].filter((each) => each !== own && each.holds(uri)) : [];
+    return [own, ...others];
+  }
+
+  /** Files on disk were made, changed or deleted (canonical URIs): each folder takes its own in one step. */
+  async filesChanged(uris: readonly string[]): Promise<void> {
+    const bySession = new Map<FolderSession, Set<string>>();
+    for (const uri of uris) {
+      for (const session of this.concernedBy(uri)) {
+        const own = bySession.get(session);
+        if (own === undefined) bySession.set(session, new Set([uri]));
+        else own.add(uri);
+      }
+    }
+    await Promise.all([...bySession].map(([session, own]) => session.filesChanged([...own])));
+  }
+
   /** The first workspace folder, or undefined where no folder is open. */
   get first(): FolderSession | undefined {
     return this.folders.values().next().value;
@@ -59,7 +82,9 @@ export class Sessions {
   async register(): Promise<void> {
     const { workspace } = this.client;
     if (workspace?.didChangeWatchedFiles?.dynamicRegistration === true) {
-      const watchers = WATCHED_FILES.map((globPattern) => ({ globPattern }));
+      // Of a deleted folder the editor reports the folder alone, not the files in it.
+      const deleted = { globPattern: '**/*', kind: WatchKind.Delete };
+      const watchers = [...WATCHED_FILES.map((globPattern) => ({ globPattern })), deleted];
       await this.connection.client.register(DidChangeWatchedFilesNotification.type, { watchers });
     }
     if (workspace?.didChangeConfiguration?.dynamicRegistration === true) {
@@ -68,7 +93,14 @@ export class Sessions {
     if (workspace?.workspaceFolders === true) {
       this.connection.workspace.onDidChangeWorkspaceFolders(({ added, removed }) => {
         for (const { uri } of removed) this.remove(uri);
-        for (const { uri } of added) void this.start(this.add(uri));
+        const sessions = added.map(({ uri }) => this.add(uri));
+        this.moveDocuments([this.loose, ...this.folders.values()]);
+        for (const session of sessions) void this.start(session);
+        // What a folder inside another one takes or leaves behind changes the outer one's pages.
+        for (const { uri } of [...removed, ...added]) {
+          const outer = [...this.folders.values()].find((each) => isBelow(each.uri, canonicalUri(uri)));
+          if (outer !== undefined && !sessions.includes(outer)) void outer.survey();
+        }
       });
     }
   }
@@ -87,8 +119,16 @@ export class Sessions {
   }
 
   private async start(session: FolderSession): Promise<void> {
-    await this.configure(session);
+    try {
+      await this.configure(session);
+    } catch (error) {
+      this.connection.console.error(`Settings could not be read: ${String(error)}`);
+    }
     await session.survey();
+    // The survey has read a termbase above the folder as it is on disk.
+    for (const document of this.loose.openDocuments) {
+      if (session.holds(canonicalUri(document.uri))) session.edited(document);
+    }
   }
 
   private async configure(session: FolderSession): Promise<void> {
@@ -103,17 +143,35 @@ export class Sessions {
 
   private remove(folderUri: string): void {
     const uri = canonicalUri(folderUri).replace(/\/$/, '');
-    this.folders.get(uri)?.end();
+    const session = this.folders.get(uri);
+    if (session === undefined) return;
     this.folders.delete(uri);
+    session.end();
+    this.moveDocuments([session]);
+  }
+
+  /** Hands open documents over to the sessions that they belong to since folders came or went. */
+  private moveDocuments(sessions: readonly FolderSession[]): void {
+    for (const session of sessions) {
+      for (const document of session.openDocuments) {
+        const owner = this.of(document.uri);
+        // A termbase above a folder is no document of the folder, but holds for it.
+        const isAbove = session.uri !== '' && !isBelow(session.uri, canonicalUri(document.uri));
+        if (owner === session || isAbove) continue;
+        session.release(document);
+        owner.edited(document);
+      }
+    }
   }
 
   private session(uri: string): FolderSession {
-    return new FolderSession(uri, this.profiles, this.host, this.publisher, this.editor());
+    return new FolderSession(uri, this.host, this.publisher, this.editor(uri));
   }
 
-  private editor(): SessionEditor {
+  private editor(folder: string): SessionEditor {
     const { connection } = this;
     return {
+      owns: (uri) => this.of(uri).uri === folder,
       state: (state) => void connection.sendNotification(STATE_NOTIFICATION, state),
       log: (message) => connection.console.log(message),
       withProgress: async (title, task) => {

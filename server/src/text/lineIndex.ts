@@ -11,12 +11,7 @@ export class LineIndex {
   private readonly starts: Uint32Array;
 
   constructor(private readonly text: string) {
-    const starts = [0];
-    for (let i = 0; i < text.length; i++) {
-      const unit = text.charCodeAt(i);
-      if (unit === 10 || (unit === 13 && text.charCodeAt(i + 1) !== 10)) starts.push(i + 1);
-    }
-    this.starts = Uint32Array.from(starts);
+    this.starts = new Uint32Array(text.includes('\r') ? startsAnyBreak(text) : startsLineFeed(text));
   }
 
   get lineCount(): number {
@@ -58,4 +53,20 @@ export class LineIndex {
     }
     return end;
   }
+}
+
+/** Made after each keystroke for the whole text, so the common case leaves the search to the engine of the language. */
+function startsLineFeed(text: string): number[] {
+  const starts = [0];
+  for (let at = text.indexOf('\n'); at >= 0; at = text.indexOf('\n', at + 1)) starts.push(at + 1);
+  return starts;
+}
+
+function startsAnyBreak(text: string): number[] {
+  const starts = [0];
+  for (let i = 0; i < text.length; i++) {
+    const unit = text.charCodeAt(i);
+    if (unit === 10 || (unit === 13 && text.charCodeAt(i + 1) !== 10)) starts.push(i + 1);
+  }
+  return starts;
 }
