@@ -1,6 +1,6 @@
 // Bundles the extension, the language server and the command line into dist/, one file each.
 import { build } from 'esbuild';
-import { chmod, copyFile, readFile, rm } from 'node:fs/promises';
+import { chmod, copyFile, mkdir, readFile, rm } from 'node:fs/promises';
 import { fileURLToPath } from 'node:url';
 
 const root = fileURLToPath(new URL('..', import.meta.url));
@@ -26,14 +26,15 @@ const bundles = [
 ];
 
 await rm(new URL('../dist', import.meta.url), { recursive: true, force: true });
+await mkdir(new URL('../dist', import.meta.url));
 if (watching) {
   const { context } = await import('esbuild');
   await Promise.all(bundles.map(async (options) => (await context({ ...options, logLevel: 'info' })).watch()));
 } else {
   await Promise.all(bundles.map((options) => build(options)));
   await chmod(new URL('../dist/cli.js', import.meta.url), 0o755);
-  await copyFile(
-    new URL('../server/src/termbase/schema.json', import.meta.url),
-    new URL('../dist/termbase.schema.json', import.meta.url),
-  );
 }
+await copyFile(
+  new URL('../server/src/termbase/schema.json', import.meta.url),
+  new URL('../dist/termbase.schema.json', import.meta.url),
+);
