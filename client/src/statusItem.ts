@@ -18,7 +18,10 @@ export class StatusItem implements vscode.Disposable {
     if (state.state === 'ended') this.states.delete(state.folder);
     else this.states.set(state.folder, state);
     const all = [...this.states.values()];
-    if (all.length === 0) return this.item.hide();
+    if (all.length === 0) {
+      this.item.hide();
+      return;
+    }
     const failed = all.find((each) => each.state === 'failed');
     const open = all.reduce((sum, { openQuestions }) => sum + openQuestions, 0);
     const pages = all.reduce((sum, { documents }) => sum + documents, 0);
