@@ -67,7 +67,7 @@ function gather(node: DefaultTreeAdapterTypes.Node, out: string[]): void {
     const attribute = (name: string): string => node.attrs.find((one) => one.name === name)?.value ?? '';
     const verse = node.tagName === 'pre' && attribute('class') === 'content';
     const address = node.tagName === 'a' && attribute('href').startsWith('mailto:');
-    const number = attribute('class') === 'footnote' && node.tagName === 'a';
+    const number = attribute('href').startsWith('#_footnoteref');
     if ((CODE.has(node.tagName) && !verse) || address || number || addedLabel(node.tagName, attribute('class'))) {
       out.push('\uFFFC');
       return;

@@ -154,8 +154,8 @@ class Stretch {
       return this.done(at + 1, false);
     }
     if (this.around.depth === 0 && !this.attached && at + 1 < to) {
-      const level = listMark(text, line) ? 0 : underlinedLevel(text, line, lines[at + 1]!);
-      if (level > 0) {
+      const level = underlinedLevel(text, line, lines[at + 1]!);
+      if (level > 0 && !listMark(text, line)) {
         this.reader.add([line], this.heading(level));
         return this.done(at + 2, false);
       }

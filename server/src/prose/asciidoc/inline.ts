@@ -49,7 +49,7 @@ export class InlineReader {
   readonly inner: ProseBlock[] = [];
   readonly text: string;
   private readonly marks: Marks | undefined;
-  private out: ContentBuilder;
+  private out!: ContentBuilder;
   private run = 0;
 
   constructor(
@@ -58,7 +58,6 @@ export class InlineReader {
   ) {
     this.text = passage.text;
     this.marks = findMarks(this.text);
-    this.out = new ContentBuilder(passage.source, 0);
   }
 
   /** Reads `[from, to)` as a block of its own. */
@@ -127,16 +126,18 @@ export class InlineReader {
     const { text, marks } = this;
     const outerRun = this.run;
     this.run = from;
+    const at = marks?.at;
     for (let i = from; i < to;) {
-      const mark = marks === undefined ? Mark.text : marks.at[i]!;
-      if (mark !== Mark.text) {
-        i = this.marked(i, mark, to);
-        continue;
-      }
       const unit = text.charCodeAt(i);
-      const end = unit < 128 && SPECIAL[unit] === 1 ? this.special(unit, i, to) : -1;
-      if (end < 0) i++;
-      else this.run = i = end;
+      if (at !== undefined && at[i] !== Mark.text) {
+        i = this.marked(i, at[i]!, to);
+      } else if (unit > 127 || SPECIAL[unit] === 0) {
+        i++;
+      } else {
+        const end = this.special(unit, i, to);
+        if (end < 0) i++;
+        else this.run = i = end;
+      }
     }
     this.flush(to);
     this.run = outerRun;

@@ -16,13 +16,21 @@ const SEMICOLON = 59;
 export function listMark(text: string, line: Line): ListMark | undefined {
   const from = visibleStart(text, line);
   ITEM.lastIndex = from;
-  const item = ITEM.exec(text);
+  const item = mayBeginItem(text, from) ? ITEM.exec(text) : null;
   if (!item) return termMark(text, from, line.end);
   let start = from + item[0].length;
   CHECK.lastIndex = start;
   const check = item[0][0] === '*' || item[0][0] === '-' ? CHECK.exec(text) : null;
   if (check) start += check[0].length;
   return { start, term: undefined };
+}
+
+/** False for most lines of prose, whose first word has more than one letter. */
+function mayBeginItem(text: string, from: number): boolean {
+  const unit = text.charCodeAt(from) | 32;
+  if (unit < 97 || unit > 122) return true;
+  const next = text.charCodeAt(from + 1) | 32;
+  return next < 97 || unit === 105 || unit === 118 || unit === 120;
 }
 
 /** `term::`, `term:::`, `term::::` or `term;;`, with a blank or the line's end behind it. */

@@ -74,14 +74,14 @@ function closing(passage: Passage, open: number, to: number): number {
   const { text } = passage;
   let inner = passage.next('[', open + 1);
   let depth = 0;
-  let close = passage.next(']', open + 1);
+  let close = passage.nextClosing(open + 1);
   while (close < to && close - open < LONGEST_LIST) {
     while (inner < close) {
       if (NESTED.test(text.slice(Math.max(open, inner - 310), inner)) && ++depth > DEEPEST) return -1;
       inner = passage.next('[', inner + 1);
     }
-    if (text[close - 1] !== '\\' && --depth < 0) return close;
-    close = passage.next(']', close + 1);
+    if (--depth < 0) return close;
+    close = passage.nextClosing(close + 1);
   }
   return -1;
 }

@@ -14,13 +14,14 @@ export const Mark = {
   closeSingle: 7,
 } as const;
 
-/** The marks of a text by offset. */
+/** The marks of a text by offset, good until those of the next text are looked for. */
 export interface Marks {
   readonly at: Uint8Array;
   readonly ends: ReadonlyMap<number, number>;
 }
 
-const ANY = /[`*_#^~+$]|pass:/;
+const LITERAL = /[`+$]|pass:/;
+const FORMATTING = /[*_#^~]/;
 const LETTER = /[\p{L}\p{N}\p{M}]/u;
 const LONGEST_ROLE = 100;
 
@@ -30,13 +31,19 @@ const LONGEST_ROLE = 100;
  * for a mark that closes runs over the text once: where one fails, so do all that begin later.
  */
 export function findMarks(text: string): Marks | undefined {
-  if (!ANY.test(text)) return undefined;
+  const literal = LITERAL.test(text);
+  const formatting = FORMATTING.test(text);
+  if (!literal && !formatting) return undefined;
   const finder = new MarkFinder(text);
-  finder.literal();
+  if (literal) finder.literal();
+  if (!formatting) return finder;
   for (const mark of ['*', '_', '#']) if (text.includes(mark)) finder.formatting(mark);
   for (const mark of ['^', '~']) if (text.includes(mark)) finder.tight(mark);
   return finder;
 }
+
+/** Marks of a usual text: one is read at a time, and the array for it costs more than finding them. */
+const scratch = new Uint8Array(4096);
 
 class MarkFinder implements Marks {
   readonly at: Uint8Array;
@@ -47,7 +54,7 @@ class MarkFinder implements Marks {
   private readonly curvedUntil = { '"': 0, "'": 0 };
 
   constructor(private readonly text: string) {
-    this.at = new Uint8Array(text.length);
+    this.at = text.length > scratch.length ? new Uint8Array(text.length) : scratch.fill(0, 0, text.length);
   }
 
   /** Monospace, passthroughs and curved quotation marks, from left to right. */

@@ -6,7 +6,8 @@ export class Passage {
   readonly text: string;
   private readonly joined: number[] = [];
   private readonly sources: number[] = [];
-  private readonly found = new Map<string, { from: number; at: number; last: number }>();
+  private found: Map<string, { from: number; at: number; last: number }> | undefined;
+  private readonly closing = { from: 0, at: -1 };
 
   /** `lines` are stretches of `source` in ascending order, at least one. */
   constructor(
@@ -28,6 +29,7 @@ export class Passage {
   /** The offset in the source of the unit at `at`. At a line's end that is the end of the line in the source. */
   sourceOf(at: number): number {
     const { joined, sources } = this;
+    if (joined.length === 1) return sources[0]! + at;
     let low = 0;
     let high = joined.length - 1;
     while (low < high) {
@@ -45,6 +47,7 @@ export class Passage {
 
   /** As `indexOf`, at a cost that is linear over calls with ascending `from`; the text's length where there is none. */
   next(what: string, from: number): number {
+    this.found ??= new Map();
     let known = this.found.get(what);
     if (!known) {
       known = { from: -1, at: -1, last: this.text.lastIndexOf(what) };
@@ -56,5 +59,17 @@ export class Passage {
       known.at = this.text.indexOf(what, from);
     }
     return known.at;
+  }
+
+  /** The next closing bracket that no backslash stands before, at the same cost. */
+  nextClosing(from: number): number {
+    const { closing, text } = this;
+    if (closing.from > from || closing.at < from) {
+      let at = text.indexOf(']', from);
+      while (at > 0 && text.charCodeAt(at - 1) === 92) at = text.indexOf(']', at + 1);
+      closing.from = from;
+      closing.at = at < 0 ? text.length : at;
+    }
+    return closing.at;
   }
 }

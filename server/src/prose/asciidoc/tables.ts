@@ -23,6 +23,8 @@ interface Spec {
 const SPEC = /^(?:(\d{1,3})?(?:\.(\d{1,3}))?([*+]))?(?:[<^>]?(?:\.[<^>])?)([a-z])?$/;
 const PLAIN: Spec = { copies: 1, columns: 1, rows: 1, style: '' };
 const LONGEST_SPEC = 16;
+/** Columns beyond these have no style of their own. */
+const MOST_COLUMNS = 200;
 const COLUMN = /^\s*(?:(\d{1,3})\*)?[<^>]?(?:\.[<^>])?\s*(?:\d{1,3}%?|~)?\s*([a-z])?\s*$/;
 
 /** The cells of a table whose lines are `[from, to)`, in source order; none where the data is separated by other marks. */
@@ -40,8 +42,7 @@ export function cellsOf(
   if (separator.length !== 1) return [];
   const styles = columnStyles(namedAttribute(attributes.written, 'cols') ?? '');
   const raw = split(text, lines, from, to, separator);
-  const withoutHeader = hasHeader(attributes, lines, from, to) ? styles.length : 0;
-  return styled(raw, styles, withoutHeader);
+  return styled(raw, styles, hasHeader(attributes, lines, from, to));
 }
 
 /** The first row is a header where the attributes say so, or where a blank line follows the table's first line. */
@@ -100,40 +101,36 @@ function specBefore(text: string, from: number, at: number, first: boolean): { s
 /** The style letters of the columns that `cols` describes. */
 function columnStyles(cols: string): string[] {
   const styles: string[] = [];
-  if (/^\s*\d{1,3}\s*$/.test(cols)) return Array.from({ length: Number(cols) }, () => '');
+  if (/^\s*\d{1,3}\s*$/.test(cols)) return Array.from({ length: Math.min(MOST_COLUMNS, Number(cols)) }, () => '');
   for (const column of cols === '' ? [] : cols.split(/[,;]/)) {
     const found = COLUMN.exec(column);
-    for (let i = 0; i < Number(found?.[1] ?? 1); i++) styles.push(found?.[2] ?? '');
+    for (let i = 0; i < Number(found?.[1] ?? 1) && styles.length < MOST_COLUMNS; i++) styles.push(found?.[2] ?? '');
   }
   return styles;
 }
 
-/** Gives each cell its own style or its column's, counting columns and rows that cells span. */
-function styled(raw: readonly RawCell[], styles: readonly string[], header: number): Cell[] {
+/**
+ * Gives each cell its own style or its column's. As in Asciidoctor, which column that is goes by the number of cells before it in the
+ * row, and a row is full when the columns of its cells and of cells that reach into it from above make up the table's.
+ */
+function styled(raw: readonly RawCell[], styles: readonly string[], hasHeader: boolean): Cell[] {
   const width = styles.length;
-  const taken: number[] = Array.from({ length: width }, () => 0);
-  let column = 0;
+  /** Columns that cells from above take up in this row and those below. */
+  const reaching: number[] = [];
+  let cells = 0;
+  let columns = 0;
   let row = 0;
-  const skipTaken = (): void => {
-    for (let steps = 0; width > 0 && taken[column]! > 0 && steps < width * 1000; steps++) {
-      taken[column]!--;
-      if (++column === width) {
-        column = 0;
-        row++;
-      }
-    }
-  };
   return raw.map(({ lines, spec }) => {
     if (width === 0) return { lines, style: spec.style };
-    skipTaken();
-    const style = spec.style || (header > 0 && row === 0 ? '' : styles[column]!);
+    const style = spec.style || (hasHeader && row === 0 ? '' : (styles[cells] ?? ''));
     for (let copy = 0; copy < spec.copies; copy++) {
-      if (copy > 0) skipTaken();
-      for (let i = 0; i < spec.columns && column < width; i++) taken[column++] = spec.rows - 1;
-      if (column >= width) {
-        column = 0;
-        row++;
-      }
+      cells++;
+      columns += spec.columns;
+      for (let below = 1; below < spec.rows; below++) reaching[below] = (reaching[below] ?? 0) + spec.columns;
+      if (columns + (reaching[0] ?? 0) < width) continue;
+      reaching.shift();
+      cells = columns = 0;
+      row++;
     }
     return { lines, style };
   });
