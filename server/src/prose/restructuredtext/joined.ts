@@ -14,6 +14,8 @@ export class JoinedText {
   /** Up to where the text has been written or skipped. */
   at = 0;
   private line = 0;
+  /** The first line break at or behind the place written to last, or the text's end. */
+  private newline = -1;
 
   constructor(
     private readonly joined: Joined,
@@ -24,8 +26,11 @@ export class JoinedText {
   write(to: number): void {
     const { text } = this.joined;
     while (this.at < to) {
-      let stop = text.indexOf('\n', this.at);
-      if (stop < 0 || stop > to) stop = to;
+      if (this.newline < this.at) {
+        const found = text.indexOf('\n', this.at);
+        this.newline = found < 0 ? text.length : found;
+      }
+      const stop = Math.min(this.newline, to);
       let start = this.at;
       while (start < stop && isBlank(text.charCodeAt(start))) start++;
       let end = stop;
