@@ -47,12 +47,16 @@ describe('lists', () => {
 
   it('are definitions of terms, without their classifiers', () => {
     expect(
-      outline('access key : string\n  Opens the gate.\n\n  And more.\n\nThis line is no term.\n  Indented.\n'),
+      outline(
+        'access key : string\n  Opens the gate.\n\n  And more.\n\nThis line is no term.\n  Indented.\n\nlint: finds faults\n  Indented.\n',
+      ),
     ).toEqual([
       'definedTerm[definedTerm]: access key',
       'definition: Opens the gate.',
       'definition: And more.',
       'paragraph: This line is no term.',
+      'definition: Indented.',
+      'paragraph: lint: finds faults',
       'definition: Indented.',
     ]);
   });

@@ -6,7 +6,7 @@ import { indentedBlock, type Lines } from './lines.js';
 
 /** A longer line above an indented one is a sentence whose author only indented what follows. In words. */
 const LONGEST_TERM = 8;
-const SENTENCE_END = '.:,;?!';
+const SENTENCE = /[.:;?!]\s|[.:,;?!]$/;
 
 /** Reads the term on `line` and the definition below it; the line behind both. */
 export function definitionItem(
@@ -54,8 +54,7 @@ function readTerm(cx: DocumentContext, start: number, end: number, setting: Sett
 }
 
 function isTerm(text: string): boolean {
-  if (SENTENCE_END.includes(text.charAt(text.length - 1))) return false;
-  return text.length < 200 && text.split(/\s+/, LONGEST_TERM + 1).length <= LONGEST_TERM;
+  return text.length < 200 && !SENTENCE.test(text) && text.split(/\s+/, LONGEST_TERM + 1).length <= LONGEST_TERM;
 }
 
 /** Where `term : classifier` leaves the term, outside literals and roles; the line's end where it has no classifier. */
