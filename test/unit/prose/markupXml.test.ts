@@ -220,6 +220,7 @@ describe('other XML', () => {
           `<article ${DOCBOOK}><para>A &prod; and &other; &amp; &lt; &eacute;&#233; &mdash; &prod<![CDATA[ a & <b> ]]>&smt; &hellip;</para></article>`,
       ),
     ).toEqual(['paragraph: A @ and @ & < éé — &prod a & <b> @ …']);
+    expect(docbook('<para>one<![CDATA[]]>two, &#10;three</para>')).toEqual(['paragraph: onetwo, three']);
     const text = `<article ${DOCBOOK}><para>One <![CDATA[two < three]]> four</para></article>`;
     expect(sourceOf(text, 'two < three', 'xml')).toBe('two < three');
   });

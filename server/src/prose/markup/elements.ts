@@ -105,7 +105,7 @@ export class Elements {
   /** Adds character data. */
   characters(from: number, to: number, plain: boolean): void {
     const { top } = this;
-    if (top.state !== State.read) return;
+    if (top.state !== State.read || from >= to) return;
     const visible = this.reader.visibleFrom(from, to);
     if (visible === to) {
       this.space(from, to);

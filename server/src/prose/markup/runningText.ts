@@ -61,7 +61,8 @@ export class TextReader {
         stop = address?.start ?? to;
       } else if (isSpace(unit)) {
         const end = this.visibleFrom(at, to);
-        if (unit === 32 && end === at + 1 && at > run && end < to && end !== stop) {
+        // A single blank between two words runs on; before a reference it may be one of several.
+        if (unit === 32 && end === at + 1 && at > run && end < stop && text.charCodeAt(end) !== AMPERSAND) {
           at = end;
           continue;
         }
