@@ -5,9 +5,11 @@ import type { DocumentUpdate } from '../engine/engine.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import { LineIndex } from '../text/lineIndex.js';
 import { formatOf } from '../text/sourceText.js';
-import type { Format, SourceText } from '../text/sourceText.js';
+import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri, isBelow } from '../text/uri.js';
 import { findingToDiagnostic, problemToDiagnostic } from './conversion.js';
+import { formatOfDocument, goneFrom, isTermbase } from './folderFiles.js';
+import type { TermbaseText } from './folderFiles.js';
 import type { ServerHost } from './host.js';
 import { CalledOff, drive } from './pace.js';
 import { TERMBASE_NAME } from './protocol.js';
@@ -323,30 +325,4 @@ export class FolderSession {
       this.open.get(uri)?.version,
     );
   }
-}
-
-/** A termbase file's text, or undefined where it is gone. */
-interface TermbaseText {
-  readonly uri: string;
-  readonly text: string | undefined;
-}
-
-/** Those that are known and were not found again, as changes that take them out. */
-function goneFrom(known: readonly { uri: string }[], found: readonly { uri: string }[]): TermbaseText[] {
-  const uris = new Set(found.map(({ uri }) => uri));
-  return known.filter(({ uri }) => !uris.has(uri)).map(({ uri }) => ({ uri, text: undefined }));
-}
-
-/** True for the URI of a termbase file. */
-export function isTermbase(uri: string): boolean {
-  return uri.endsWith(`/${TERMBASE_NAME}`);
-}
-
-/** By the file's extension, as a survey reads it, whatever the editor takes it for; else by the editor's language. */
-function formatOfDocument({ uri, languageId }: TextDocument): Format {
-  const format = formatOf(uri);
-  if (format !== undefined) return format;
-  if (languageId === 'markdown' || languageId === 'mdx') return 'markdown';
-  if (languageId === 'html' || languageId === 'restructuredtext' || languageId === 'asciidoc') return languageId;
-  return ['xml', 'dita', 'docbook'].includes(languageId) ? 'xml' : 'plaintext';
 }

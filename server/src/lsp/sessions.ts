@@ -6,7 +6,8 @@ import {
 } from 'vscode-languageserver';
 import type { ClientCapabilities, Connection } from 'vscode-languageserver';
 import { canonicalUri, isBelow } from '../text/uri.js';
-import { FolderSession, isTermbase } from './folderSession.js';
+import { isTermbase } from './folderFiles.js';
+import { FolderSession } from './folderSession.js';
 import type { SessionEditor } from './folderSession.js';
 import type { ServerHost } from './host.js';
 import { STATE_NOTIFICATION, WATCHED_FILES } from './protocol.js';
