@@ -22,7 +22,7 @@ const ELEMENTS: readonly role.RoleLine[] = [
     role.PARAGRAPH,
     'p shortdesc lines desc info stepresult stepxmp steptroubleshooting tutorialinfo linkinfo stepsection',
   ],
-  [role.PARAGRAPH, 'glossUsage glossScopeNote responsibleParty'],
+  [role.PARAGRAPH, 'glossUsage glossScopeNote responsibleParty itemgroup'],
   [role.LIST_PART, 'step substep'],
   [role.LIST_ITEM, 'li sli choice cmd'],
   [role.DEFINED_TERM, 'dt glossterm glossSurfaceForm glossAcronym glossAbbreviation glossShortForm glossSynonym'],
@@ -61,7 +61,7 @@ const ELEMENTS: readonly role.RoleLine[] = [
   [role.QUOTE, 'q cite'],
   [role.link('href', 'keyref'), 'xref'],
   [{ ...role.PARAGRAPH, targets: ['href', 'keyref'] }, 'link'],
-  [role.INLINE, 'ph keyword b i u sub tm text linktext overline itemgroup'],
+  [role.INLINE, 'ph keyword b i u sub tm text linktext overline'],
 ];
 
 export const DITA = role.vocabulary('dita', ELEMENTS, { 'image@alt': 'alternativeText', spectitle: 'caption' }, 'read');
