@@ -21,6 +21,7 @@ const READS: readonly (readonly [string, string, string])[] = [
   ['nor without an end', 'a *b and _c', 'a *b and _c'],
   ['roles vanish too', '[.path]#text# and [red]*bold*', 'text and bold'],
   ['monospace is opaque', 'Set `a b` or ``c``d; [.x]`e`.', 'Set @ or @d; @.'],
+  ['also before letters and apostrophes', "The `Key`s and `Lock`'s ends", "The @s and @'s ends"],
   ['passthroughs are opaque', 'Of +a+ ++b++ +++c+++ $$d$$ pass:q[e] `+f+`', 'Of @ @ @ @ @ @'],
   ['formulas are opaque', 'Of stem:[x^2] latexmath:[y] asciimath:[z]', 'Of @ @ @'],
   ['attribute references are opaque', 'The {name} of {a-b} {counter:x}', 'The @ of @ @'],

@@ -24,6 +24,7 @@ const LITERAL = /[`+$]|pass:/;
 const FORMATTING = /[*_#^~]/;
 const LETTER = /[\p{L}\p{N}\p{M}]/u;
 const LONGEST_ROLE = 100;
+const LONGEST_TIGHT = 200;
 
 /**
  * Finds the marks of a paragraph's text. Rules as in AsciiDoc's "constrained" and "unconstrained" marks: a single mark opens
@@ -88,8 +89,23 @@ class MarkFinder implements Marks {
       const end = this.doubled(i, '``');
       if (end > i + 1) return end;
     }
-    const close = this.opens(i) && !/["'`]/.test(quote ?? '') ? this.closing('`', i, /["'`]/) : -1;
+    if (!this.opens(i) || /["'`]/.test(quote ?? '')) return i;
+    const tight = this.tightCode(i);
+    const close = tight < 0 ? this.closing('`', i, /["'`]/) : tight;
     return close < 0 ? i : this.opaque(i, close + 1);
+  }
+
+  /**
+   * The mark that ends code without a blank in it, whatever stands behind, or -1. AsciiDoc takes `` `Key`s `` and `` `Key`'s `` for text with
+   * backticks in it, but their writers mean code.
+   */
+  private tightCode(i: number): number {
+    const { text } = this;
+    const most = Math.min(text.length, i + LONGEST_TIGHT);
+    let close = i + 1;
+    while (close < most && text[close] !== '`' && !isSpace(text, close)) close++;
+    const ends = close > i + 1 && text[close] === '`' && text[close + 1] !== '`' && this.at[close] === Mark.text;
+    return ends ? close : -1;
   }
 
   private curved(i: number, quote: '"' | "'"): boolean {
