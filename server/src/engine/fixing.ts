@@ -2,7 +2,9 @@
 import type { Finding } from '../findings/finding.js';
 import { isRefusal, replaceTerm } from '../rewrite/replaceTerm.js';
 import { sourceEdits } from '../rewrite/sourceEdits.js';
+import type { BlockKind } from '../prose/prose.js';
 import type { TextEdit } from '../text/edits.js';
+import type { Format } from '../text/sourceText.js';
 import type { Snapshot } from './snapshot.js';
 
 /** The edits of a fix, or why there is none, as a sentence for the writer. Not certain: a person should look first. */
@@ -14,8 +16,7 @@ export type Fix =
 export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding): Fix {
   const reading = snapshot.readingOf(uri);
   const block = reading?.prose.blocks[finding.block];
-  const source = reading?.source.text;
-  if (block === undefined || source === undefined || finding.preferred === undefined)
+  if (reading === undefined || block === undefined || finding.preferred === undefined)
     return { kind: 'refused', reason: 'There is no preferred term.' };
   const checked = snapshot.checkerAt(uri).terms.terms.find((term) => term.checked.id === finding.termId)?.checked;
   const replaced = replaceTerm({
@@ -29,7 +30,19 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
     ...(checked?.partOfSpeech && { partOfSpeech: checked.partOfSpeech }),
   });
   if (isRefusal(replaced)) return { kind: 'refused', reason: replaced.refused };
-  const edits = sourceEdits(block, replaced.span, replaced.edits, source);
+  const edits = sourceEdits(block, replaced.span, replaced.edits, reading.source.text);
   if (isRefusal(edits)) return { kind: 'refused', reason: edits.refused };
+  const broken = brokenLayout(reading.source.format, block.content.kind, edits);
+  if (broken !== undefined) return { kind: 'refused', reason: broken };
   return { kind: 'edits', edits, certain: replaced.certain };
+}
+
+/** Why edits would break what a format draws with characters: columns of a table, the line under a title. */
+function brokenLayout(format: Format, kind: BlockKind, edits: readonly TextEdit[]): string | undefined {
+  if (format !== 'restructuredtext') return undefined;
+  const grown = edits.reduce((sum, { span, newText }) => sum + newText.length - (span.end - span.start), 0);
+  if (kind === 'tableCell' && grown !== 0)
+    return 'A word of another length would shift the columns of the drawn table.';
+  if (kind === 'heading' && grown > 0) return 'The line under the title would be too short: change both by hand.';
+  return undefined;
 }

@@ -1,0 +1,43 @@
+// Fixes in formats that draw with characters: nothing that is drawn is broken.
+import { describe, expect, it } from 'vitest';
+import { Engine } from '../../../server/src/engine/engine.js';
+import { Profiles } from '../../../server/src/engine/factsOf.js';
+import { preferredEdits } from '../../../server/src/engine/fixing.js';
+
+const TERMBASE =
+  'evenword: 1\nconcepts:\n  - preferred: access token\n    deprecated: [API token]\n  - preferred: hut\n    deprecated: [hat]\n';
+
+const PAGE = `API token
+=========
+
+Use the API token.
+
+=========  ====
+Name       Use
+=========  ====
+API token  one
+hat        two
+=========  ====
+`;
+
+describe('a fix in reStructuredText', () => {
+  const engine = new Engine(new Profiles());
+  const uri = 'file:///docs/page.rst';
+  const snapshot = engine.apply({
+    documents: [{ uri, source: { uri, format: 'restructuredtext', text: PAGE } }],
+    termbases: [{ uri: 'file:///docs/termbase.yaml', text: TERMBASE }],
+  });
+
+  it('changes running text, and cells where the columns stay', () => {
+    const fixes = snapshot.findingsIn(uri).map((finding) => {
+      const fix = preferredEdits(snapshot, uri, finding);
+      return [PAGE.slice(0, finding.span.start).split('\n').length, fix.kind === 'edits' ? fix.kind : fix.reason];
+    });
+    expect(fixes).toEqual([
+      [1, 'The line under the title would be too short: change both by hand.'],
+      [4, 'edits'],
+      [9, 'A word of another length would shift the columns of the drawn table.'],
+      [10, 'edits'],
+    ]);
+  });
+});
