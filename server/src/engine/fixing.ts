@@ -37,8 +37,11 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
   return { kind: 'edits', edits, certain: replaced.certain };
 }
 
-/** Why edits would break what a format draws with characters: columns of a table, the line under a title. */
+/** Why edits would break the format: signs that act as markup, columns of a drawn table, the line under a title. */
 function brokenLayout(format: Format, kind: BlockKind, edits: readonly TextEdit[]): string | undefined {
+  if ((format === 'html' || format === 'xml') && edits.some(({ newText }) => /[&<>"]/.test(newText))) {
+    return 'The preferred term has signs that act as markup here: change it by hand.';
+  }
   if (format !== 'restructuredtext') return undefined;
   const grown = edits.reduce((sum, { span, newText }) => sum + newText.length - (span.end - span.start), 0);
   if (kind === 'tableCell' && grown !== 0)

@@ -41,3 +41,22 @@ describe('a fix in reStructuredText', () => {
     ]);
   });
 });
+
+describe('a fix in XML', () => {
+  it('writes no sign that acts as markup', () => {
+    const engine = new Engine(new Profiles());
+    const uri = 'file:///docs/topic.dita';
+    const text =
+      '<topic id="t"><title>Parts</title><body><p>Ask the workshop, then the research team.</p></body></topic>';
+    const termbase =
+      'evenword: 1\nconcepts:\n  - preferred: R&D\n    deprecated: [research team]\n  - preferred: yard\n    deprecated: [workshop]\n';
+    const snapshot = engine.apply({
+      documents: [{ uri, source: { uri, format: 'xml', text } }],
+      termbases: [{ uri: 'file:///docs/termbase.yaml', text: termbase }],
+    });
+    expect(snapshot.findingsIn(uri).map((finding) => preferredEdits(snapshot, uri, finding).kind)).toEqual([
+      'edits',
+      'refused',
+    ]);
+  });
+});
