@@ -1,4 +1,5 @@
 // The engine's one writer: takes changes, hands out immutable snapshots, and settles relations as work that can rest.
+import { LayeredMap } from '../base/layeredMap.js';
 import type { Work } from '../base/work.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
 import { DEFAULT_KINDS } from '../mining/question.js';
@@ -51,7 +52,7 @@ export class Engine {
     this.state = {
       revision: 0,
       settings: DEFAULT_SETTINGS,
-      documents: new Map(),
+      documents: LayeredMap.empty(),
       termbases: [],
       relations: Relations.none,
       agendaRevision: 0,
@@ -114,17 +115,18 @@ export class Engine {
     return factsOfProse((reading ?? startReading(source)).prose, this.profiles);
   }
 
-  private changedDocuments(updates: readonly DocumentUpdate[]): ReadonlyMap<string, EngineDocument> {
-    if (updates.length === 0) return this.state.documents;
-    const documents = new Map(this.state.documents);
+  private changedDocuments(updates: readonly DocumentUpdate[]): LayeredMap<string, EngineDocument> {
+    const before = this.state.documents;
+    const changes = new Map<string, EngineDocument | undefined>();
     for (const { uri, source, facts, open, counted = true } of updates) {
-      const known = documents.get(uri);
+      const known = changes.has(uri) ? changes.get(uri) : before.get(uri);
       if (source === undefined) {
-        if (documents.delete(uri) && known!.counted) this.unsettled.set(uri, undefined);
+        changes.set(uri, undefined);
+        if (known?.counted === true) this.unsettled.set(uri, undefined);
         continue;
       }
       const same = known?.source.text === source.text && known.source.format === source.format;
-      documents.set(uri, {
+      changes.set(uri, {
         source: same ? known.source : source,
         reading: readingAfter(known, source, same, open === true),
         counted,
@@ -132,7 +134,7 @@ export class Engine {
       if (counted ? !same || !known.counted || facts !== undefined : known?.counted === true)
         this.unsettled.set(uri, facts);
     }
-    return documents;
+    return before.with(changes);
   }
 
   private commit(parts: Partial<EngineState>, newAgenda: boolean): void {

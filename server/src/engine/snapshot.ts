@@ -1,4 +1,5 @@
 // What everyone reads: the state of the engine at one revision; it never changes.
+import type { LayeredMap } from '../base/layeredMap.js';
 import type { Span } from '../base/span.js';
 import { decide } from '../decisions/decide.js';
 import type { Agenda } from '../decisions/decide.js';
@@ -44,7 +45,7 @@ export interface EngineSettings {
 export interface EngineState {
   readonly revision: number;
   readonly settings: EngineSettings;
-  readonly documents: ReadonlyMap<string, EngineDocument>;
+  readonly documents: LayeredMap<string, EngineDocument>;
   readonly termbases: readonly LoadedTermbase[];
   readonly relations: Relations;
   /** Counts the settlements and changes of termbases and settings: equal numbers mean equal agendas. */
