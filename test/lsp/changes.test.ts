@@ -41,6 +41,12 @@ async function write(name: string, text = PAGE): Promise<string> {
 const notify = (...changes: { uri: string; type: 1 | 2 | 3 }[]): Promise<void> =>
   client.connection.sendNotification('workspace/didChangeWatchedFiles', { changes });
 
+const folders = (added: string[], removed: string[]): Promise<void> => {
+  const named = (paths: string[]): object[] => paths.map((path) => ({ uri: pathToFileURL(path).href, name: path }));
+  const event = { added: named(added), removed: named(removed) };
+  return client.connection.sendNotification('workspace/didChangeWorkspaceFolders', { event });
+};
+
 const close = (uri: string): Promise<void> =>
   client.connection.sendNotification('textDocument/didClose', { textDocument: { uri } });
 
@@ -206,14 +212,7 @@ describe('workspace folders', () => {
       const uri = other.uri('installing.md');
       const text = PAGES['installing.md']!;
       await client.open(uri, text);
-      const event = (added: string[], removed: string[]): Promise<void> =>
-        client.connection.sendNotification('workspace/didChangeWorkspaceFolders', {
-          event: {
-            added: added.map((path) => ({ uri: pathToFileURL(path).href, name: path })),
-            removed: removed.map((path) => ({ uri: pathToFileURL(path).href, name: path })),
-          },
-        });
-      await event([other.path], []);
+      await folders([other.path], []);
       await eventually('hints', () => codes(uri).includes('mixed-terms'));
       const actions = await actionsAt(uri, text, 'datalogger');
       const chosen = actions.find(({ title }) => title === 'Prefer “data logger”')!;
@@ -231,11 +230,33 @@ describe('workspace folders', () => {
       await writeFile(join(other.path, 'termbase.yaml'), applied('', resolved));
       await notify({ uri: made, type: 1 });
       await close(made);
-      await event([], [other.path]);
+      await folders([], [other.path]);
       await eventually('nothing shown', () => codes(uri).length === 0);
       await eventually('the end of the folder', () => client.states.at(-1)!.state === 'ended');
     } finally {
       await other.dispose();
+    }
+  });
+
+  it('are held to the termbase above them in their repository, saved or not, as on the command line', async () => {
+    const repository = await temporaryFolder({ '.git/HEAD': '', 'termbase.yaml': TERMBASE, 'docs/page.md': PAGE });
+    try {
+      const docs = join(repository.path, 'docs');
+      const [uri, termbase] = [repository.uri('docs/page.md'), repository.uri('termbase.yaml')];
+      await folders([docs], []);
+      await client.open(uri, PAGE);
+      await eventually('warnings', () => codes(uri).length === 2);
+      await client.open(termbase, TERMBASE, 'yaml');
+      await client.change(termbase, TERMBASE.replace('API key', 'API token'));
+      await eventually('no warnings', () => codes(uri).length === 0);
+      await client.connection.sendRequest('evenword/survey', { uri });
+      expect(codes(uri)).toEqual([]);
+      await close(termbase);
+      await eventually('warnings again', () => codes(uri).length === 2);
+      await folders([], [docs]);
+      await eventually('nothing shown', () => codes(uri).length === 0);
+    } finally {
+      await repository.dispose();
     }
   });
 });

@@ -191,8 +191,13 @@ export class FolderSession {
     for (const uri of new Set(changed.flatMap((each) => this.filesAt(each)))) {
       this.renewed.add(uri);
       if (this.open.has(uri)) continue;
-      if (isTermbase(uri)) termbases.push({ uri, text: await this.host.readTermbase(this.uri, uri) });
-      else documents.push({ uri, source: this.uri === '' ? undefined : await this.host.readDocument(this.uri, uri) });
+      // Outside all folders only what is open counts: nothing there is surveyed.
+      const isLoose = this.uri === '';
+      if (isTermbase(uri)) {
+        termbases.push({ uri, text: isLoose ? undefined : await this.host.readTermbase(this.uri, uri) });
+      } else {
+        documents.push({ uri, source: isLoose ? undefined : await this.host.readDocument(this.uri, uri) });
+      }
     }
     if (this.ended.signal.aborted) return;
     const isClosed = ({ uri }: { uri: string }): boolean => !this.open.has(uri);
