@@ -19,6 +19,9 @@ import type { Publisher } from './publisher.js';
 /** Pause in typing, in milliseconds, after which relations are settled. */
 const IDLE = 500;
 
+/** Pause in typing in a termbase, in milliseconds, after which its decisions are renewed: a thousand concepts take a tenth of a second. */
+const TERMBASE_IDLE = 100;
+
 /** What a session tells the editor. */
 export interface SessionEditor {
   /** Shows a task's progress while it runs; the signal is aborted where the user cancels it. */
@@ -49,6 +52,9 @@ export class FolderSession {
   /** Changed files are read one change after the other, so that the last text read is the last one written. */
   private reading: Promise<void> = Promise.resolve();
   private told: FolderStateParams | undefined;
+  /** Open termbases that were edited since their decisions were taken. */
+  private readonly waiting = new Set<string>();
+  private pause: NodeJS.Timeout | undefined;
 
   constructor(
     /** Canonical, without a closing slash. */
@@ -60,7 +66,9 @@ export class FolderSession {
     this.engine = new Engine(host.profiles);
   }
 
+  /** The state with everything that was edited so far. */
   get snapshot(): Snapshot {
+    this.takeEditedTermbases();
     return this.engine.snapshot;
   }
 
@@ -81,7 +89,7 @@ export class FolderSession {
 
   /** True where a termbase is loaded, be it one above the folder. */
   holds(termbaseUri: string): boolean {
-    return this.snapshot.termbases.some(({ uri }) => uri === termbaseUri);
+    return this.open.has(termbaseUri) || this.engine.snapshot.termbases.some(({ uri }) => uri === termbaseUri);
   }
 
   configure(settings: FolderSettings): void {
@@ -146,11 +154,19 @@ export class FolderSession {
     const isNew = !this.open.has(uri);
     this.open.set(uri, document);
     if (this.surveying !== undefined) this.renewed.add(uri);
-    const text = document.getText();
     if (isTermbase(uri)) {
-      this.takeTermbases([{ uri, text }]);
+      this.waiting.add(uri);
+      clearTimeout(this.pause);
+      this.pause = setTimeout(() => {
+        try {
+          this.takeEditedTermbases();
+        } catch (error) {
+          this.editor.log(`${uri}: ${String((error as Error).stack)}`);
+        }
+      }, TERMBASE_IDLE);
       return;
     }
+    const text = document.getText();
     if (isNew && !this.snapshot.documents.has(uri)) this.setAside(uri);
     const source = { uri, format: formatOfDocument(document), text };
     this.engine.apply({ documents: [{ uri, source, open: true, counted: !this.aside.has(uri) }] });
@@ -213,6 +229,17 @@ export class FolderSession {
     return [...documents.keys(), ...termbases.map((termbase) => termbase.uri)].filter((each) => isBelow(uri, each));
   }
 
+  private takeEditedTermbases(): void {
+    if (this.waiting.size === 0) return;
+    clearTimeout(this.pause);
+    const edited = [...this.waiting].flatMap((uri) => {
+      const text = this.open.get(uri)?.getText();
+      return text === undefined ? [] : [{ uri, text }];
+    });
+    this.waiting.clear();
+    this.takeTermbases(edited);
+  }
+
   private takeTermbases(termbases: readonly TermbaseText[]): void {
     this.engine.apply({ termbases });
     for (const { uri, text } of termbases) if (text === undefined) this.publisher.clear(uri);
@@ -249,6 +276,7 @@ export class FolderSession {
     this.ended.abort();
     this.surveying?.abort();
     this.callOffSettling();
+    clearTimeout(this.pause);
     for (const uri of this.open.keys()) this.publisher.clear(uri);
     for (const { uri } of this.snapshot.termbases) this.publisher.clear(uri);
     if (this.uri !== '') this.tellState('ended');
