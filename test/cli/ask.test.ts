@@ -60,7 +60,7 @@ describe('evenword ask', () => {
     const { code, out, err } = await evenword(['ask', folder.path]);
     expect(code).toBe(0);
     expect(out).toMatch(/^7 pages, [\d,]+ words: \d+ open questions?\.\n/);
-    expect(out).toMatch(/“data ?logger” and “data ?logger”\?/);
+    expect(out).toMatch(/“data ?logger” or “data ?logger”\?/);
     expect(out).toMatch(/service\.md:3/);
     expect(err).toContain('latin.md');
     const quiet = await evenword(['ask', folder.path, '--quiet']);

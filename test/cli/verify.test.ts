@@ -12,7 +12,7 @@ afterEach(async () => {
   for (const end of ending.splice(0).reverse()) await end();
 });
 
-async function folderOf(files: Record<string, string>): Promise<Folder> {
+async function folderOf(files: Record<string, string | Uint8Array>): Promise<Folder> {
   const folder = await temporaryFolder(files);
   ending.push(folder.dispose);
   return folder;
@@ -42,6 +42,12 @@ describe('evenword verify', () => {
     const { code, out, err } = await evenword(['verify', '.'], folder.path);
     expect({ code, out }).toEqual({ code: 2, out: '' });
     expect(err).toMatch(/^termbase\.yaml:4:5: (error|warning): /m);
+    const latin = Uint8Array.from([...Buffer.from(TERMBASE), 0x23, 0xe9, 0x0a]);
+    const other = await folderOf({ ...PAGES, 'termbase.yaml': latin });
+    expect(await evenword(['verify', '.'], other.path)).toMatchObject({
+      ...{ code: 2, out: '' },
+      err: expect.stringMatching(/termbase\.yaml: is not in UTF-8 \(line 6/) as string,
+    });
     // Silence is for notes: why nothing was checked is said all the same.
     const broken = await folderOf({ ...PAGES, 'termbase.yaml': 'concepts: [broken\n' });
     const quiet = await evenword(['verify', '.', '--quiet'], broken.path);

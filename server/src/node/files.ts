@@ -68,18 +68,23 @@ export function uriOfPath(path: string): string {
 /** A file's text, or why it cannot be had. */
 export type ReadFile = { readonly source: SourceText } | { readonly leftOut: LeftOut };
 
-/** Reads one document. Only UTF-8 (with or without a byte order mark) is taken: a wrong guess would spoil every offset. */
+/** Reads one document. */
 export async function readDocument(path: string): Promise<ReadFile> {
+  const file = await readText(path);
+  if ('reason' in file) return { leftOut: { path, reason: file.reason } };
+  return { source: { uri: uriOfPath(path), format: formatOf(path) ?? 'plaintext', text: file.text } };
+}
+
+/** Reads a file. Only UTF-8 (with or without a byte order mark) is taken: a wrong guess would spoil every offset. */
+export async function readText(path: string): Promise<{ readonly text: string } | { readonly reason: string }> {
   try {
-    if ((await stat(path)).size > LARGEST_FILE) return { leftOut: { path, reason: 'larger than 4 MiB' } };
+    if ((await stat(path)).size > LARGEST_FILE) return { reason: 'larger than 4 MiB' };
     const bytes = await readFile(path);
     const reason = unreadable(bytes);
-    if (reason !== undefined) return { leftOut: { path, reason } };
-    const text = new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes);
-    return { source: { uri: uriOfPath(path), format: formatOf(path) ?? 'plaintext', text } };
+    if (reason !== undefined) return { reason };
+    return { text: new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes) };
   } catch (error) {
-    if (error instanceof TypeError) return { leftOut: { path, reason: await encodingReason(path) } };
-    return { leftOut: { path, reason: plainReason(error) } };
+    return { reason: error instanceof TypeError ? await encodingReason(path) : plainReason(error) };
   }
 }
 

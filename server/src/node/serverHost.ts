@@ -1,12 +1,11 @@
 // The language server's world on Node: the file system and worker threads.
-import { readFile } from 'node:fs/promises';
 import { join, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { ServerHost } from '../lsp/host.js';
 import { FactsPool } from './factsPool.js';
 import { Profiles } from '../engine/factsOf.js';
 import { formatOf } from '../text/sourceText.js';
-import { findFiles, plainReason, readDocument, termbasesAbove, uriOfPath, whyLeftOut } from './files.js';
+import { findFiles, readDocument, readText, termbasesAbove, uriOfPath, whyLeftOut } from './files.js';
 
 /** A host over `file:` URIs; folders of other schemes hold nothing that it could read. */
 export function nodeServerHost(): ServerHost {
@@ -27,11 +26,9 @@ export function nodeServerHost(): ServerHost {
       }
       const texts = [];
       for (const file of [...termbases, ...termbasesAbove(path)]) {
-        try {
-          texts.push({ uri: uriOfPath(file), text: await readFile(file, 'utf8') });
-        } catch (error) {
-          missed.push({ path: file, reason: plainReason(error) });
-        }
+        const read = await readText(file);
+        if ('text' in read) texts.push({ uri: uriOfPath(file), text: read.text });
+        else missed.push({ path: file, reason: read.reason });
       }
       return { sources, termbases: texts, leftOut: missed };
     },
@@ -45,7 +42,8 @@ export function nodeServerHost(): ServerHost {
     async readTermbase(folder, uri) {
       const path = pathOf(uri);
       if (path === undefined || (await reasonAgainst(folder, path)) !== undefined) return undefined;
-      return readFile(path, 'utf8').catch(() => undefined);
+      const file = await readText(path);
+      return 'text' in file ? file.text : undefined;
     },
     async whyLeftOut(folder, uri) {
       const path = pathOf(uri);

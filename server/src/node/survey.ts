@@ -1,13 +1,13 @@
 // Reading folders into an engine: documents found and read, facts gathered on workers, relations settled.
 import { existsSync } from 'node:fs';
-import { readFile, stat } from 'node:fs/promises';
+import { stat } from 'node:fs/promises';
 import { dirname, join, resolve } from 'node:path';
 import { finish } from '../base/work.js';
 import { Engine } from '../engine/engine.js';
 import type { Profiles } from '../engine/factsOf.js';
 import type { SourceText } from '../text/sourceText.js';
 import { FactsPool } from './factsPool.js';
-import { CannotRead, findFiles, plainReason, readDocument, termbasesAbove, uriOfPath } from './files.js';
+import { CannotRead, findFiles, readDocument, readText, termbasesAbove, uriOfPath } from './files.js';
 import type { LeftOut } from './files.js';
 
 /** How far a survey has come. */
@@ -71,9 +71,9 @@ export async function surveyFolders(
 }
 
 async function readTermbase(path: string): Promise<string> {
-  return readFile(path, 'utf8').catch((error: unknown) => {
-    throw new CannotRead(`${path}: ${plainReason(error)}`);
-  });
+  const file = await readText(path);
+  if ('reason' in file) throw new CannotRead(`${path}: ${file.reason}`);
+  return file.text;
 }
 
 /** The folder of each path: a folder itself, or the one that holds a file. */
