@@ -38,7 +38,9 @@ async function main(): Promise<void> {
   const line = (cells: readonly string[]): string => cells.map((cell, at) => cell.padEnd(widths[at]!)).join('  ');
   console.log(line(columns));
   for (const row of rows)
-    console.log(`${line(columns.map((column) => row[column]))}  ${row.reached ? 'reached' : 'MISSED'}`);
+    console.log(
+      `${line(columns.map((column) => row[column]))}  ${row.reached === undefined ? '' : row.reached ? 'reached' : 'MISSED'}`,
+    );
   writeFileSync('benchmark.json', `${JSON.stringify({ node: process.version, rows }, undefined, 2)}\n`);
 }
 

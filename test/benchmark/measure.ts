@@ -7,7 +7,8 @@ export interface Row {
   readonly reference: string;
   readonly figure: string;
   readonly target: string;
-  readonly reached: boolean;
+  /** Undefined for a figure without a goal. */
+  readonly reached?: boolean;
 }
 
 /** Processor milliseconds (user and system) that a piece of work takes. */

@@ -19,10 +19,13 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
       .blocks.map(({ content }) => content.text)
       .join('\n\n'),
   );
+  // Runs that bare wink is superlinear on would only flatter us.
+  const documents = sources.map(({ text }) => text.replace(/\S{65,}/g, (run) => run.slice(0, 64)));
   const wink = winkNLP(winkModel, ['sbd', 'pos']);
-  const bare = (): void => {
-    for (const text of prose) wink.readDoc(text);
+  const bareOn = (texts: readonly string[]): void => {
+    for (const text of texts) wink.readDoc(text);
   };
+  const bare = (): void => bareOn(documents);
   const profiles = new Profiles();
   let corpus = Corpus.create();
   const survey = (): void => {
@@ -37,6 +40,7 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
   await pool.gather(sources);
   const times = {
     bare: [] as number[],
+    bareProse: [] as number[],
     bareWall: [] as number[],
     survey: [] as number[],
     workers: [] as number[],
@@ -44,6 +48,7 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
   };
   for (let round = 0; round < rounds; round++) {
     times.bare.push(cpuMs(bare));
+    times.bareProse.push(cpuMs(() => bareOn(prose)));
     times.survey.push(cpuMs(survey));
     times.bareWall.push(
       await wallMs(() => {
@@ -60,33 +65,39 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
     times.mining.push(cpuMs(() => void finish(mine(corpus))));
   }
   await pool.end();
-  const speed = median(times.bare) / median(times.survey);
-  const withWorkers = median(times.bareWall) / median(times.workers);
+  const ratio = (reference: readonly number[], ours: readonly number[]): number => median(reference) / median(ours);
+  const speed = (reference: readonly number[], ours: readonly number[]): string =>
+    `${(100 * ratio(reference, ours)).toFixed(0)} % of its speed`;
   const words = corpus.words.toLocaleString('en');
   return [
     {
-      goal: `Cold survey of ${name} (${words} words), one thread`,
+      goal: `Cold survey of ${name} (${words} words), one thread, against the same documents`,
       ours: `${ms(median(times.survey))} CPU`,
       reference: `bare wink ${ms(median(times.bare))} CPU`,
-      figure: `${(100 * speed).toFixed(0)} % of its speed`,
+      figure: speed(times.bare, times.survey),
       target: '≥ 75 %',
-      reached: speed >= 0.75,
+      reached: ratio(times.bare, times.survey) >= 0.75,
     },
     {
-      goal: 'The same on workers, model loading included',
+      goal: 'The same against their prose alone, markup taken out for wink',
+      ours: `${ms(median(times.survey))} CPU`,
+      reference: `bare wink ${ms(median(times.bareProse))} CPU`,
+      figure: speed(times.bareProse, times.survey),
+      target: '–',
+    },
+    {
+      goal: 'The same on warm workers, against the same documents',
       ours: `${ms(median(times.workers))} elapsed`,
       reference: `bare wink ${ms(median(times.bareWall))} elapsed`,
-      figure: `${(100 * withWorkers).toFixed(0)} % of its speed`,
+      figure: speed(times.bareWall, times.workers),
       target: '–',
-      reached: true,
     },
     {
       goal: 'Mining all questions of it',
       ours: `${ms(median(times.mining))} CPU`,
-      reference: `bare wink ${ms(median(times.bare))} CPU`,
-      figure: `${(median(times.mining) / median(times.bare)).toFixed(2)} ×`,
+      reference: `bare wink on prose ${ms(median(times.bareProse))} CPU`,
+      figure: `${ratio(times.mining, times.bareProse).toFixed(2)} ×`,
       target: '–',
-      reached: true,
     },
   ];
 }

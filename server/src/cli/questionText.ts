@@ -39,6 +39,8 @@ export function titleOf({ kind, terms, objects }: Question): string {
   if (kind === 'ambiguous-abbreviation') return `Does ${names.join(', ')} mean one thing everywhere?`;
   const last = names[names.length - 1]!;
   const list = names.length < 2 ? last : `${names.slice(0, -1).join(', ')} and ${last}`;
+  if (kind === 'variant')
+    return `Which way of writing: ${names.slice(0, -1).join(', ')} or ${names[names.length - 1]!}?`;
   if (objects !== undefined) {
     const [object, ...more] = objects.map((noun) => `“${noun}”`);
     const others = more.length > 0 ? ` (also with ${more.join(', ')})` : '';

@@ -103,7 +103,7 @@ describe('a short and a long form', () => {
     expect(question!.reasons.map(({ text }) => text)).toEqual([
       'the documents explain “CR” as “custom resource” once',
       '“custom resource” is spelled out 3 times on 2 pages where it is no explanation',
-      '2 pages go on with “custom resource” beside “CR”',
+      '2 pages write “CR” and then “custom resource” again',
     ]);
   });
 

@@ -135,7 +135,7 @@ describe('verbs with their object', () => {
       ['raise', 4, 'verb'],
       ['throw', 4, 'verb'],
     ]);
-    expect(questions[0]!.reasons[0]!.text).toContain('“error”');
+    expect(questions[0]!.reasons[0]!.text).toContain('“throw … error”');
   });
 
   it('asks about a verb with its particle', () => {

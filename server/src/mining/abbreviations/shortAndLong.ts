@@ -149,12 +149,10 @@ function reasonsOf(
     },
   ];
   if (free.onItsPages.length > 0) {
+    const mixed = countDocuments(stream, free.onItsPages);
     reasons.push({
       kind: 'mixed-page',
-      text: `${pages(countDocuments(stream, free.onItsPages))} go on with “${long}” beside “${short}”`.replace(
-        '1 page go ',
-        '1 page goes ',
-      ),
+      text: `${pages(mixed)} ${mixed === 1 ? 'writes' : 'write'} “${short}” and then “${long}” again`,
       value: free.onItsPages.length,
     });
   }

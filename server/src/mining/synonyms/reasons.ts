@@ -24,7 +24,7 @@ export function reasonsOf(pairs: readonly JudgedPair[], contexts: Contexts): Rea
     if (rankOfA <= NEAREST && rankOfB <= NEAREST) {
       say({
         kind: 'likeness',
-        text: 'of all terms here, each is among those used most like the other',
+        text: 'few other terms here are used in sentences so alike',
         value: Math.max(rankOfA, rankOfB),
       });
     }

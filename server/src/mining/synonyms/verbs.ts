@@ -146,7 +146,7 @@ function questionOf(corpus: Corpus, operations: readonly Operation[]): Question 
   const leading = ordered[0]!;
   const reasons: Reason[] = ordered.map((operation) => ({
     kind: 'shared-object',
-    text: `each is said of “${operation.object}”: ${operation.verbs.map(({ text, uses }) => `“${text}” ${times(uses.length)}`).join(', ')}`,
+    text: `the documents say ${operation.verbs.map(({ text, uses }) => `“${text} … ${operation.object}” ${times(uses.length)}`).join(' and ')}`,
     value: usesOf(operation),
   }));
   reasons.push(...leading.links.map(({ kind, text, strength }) => ({ kind, text, value: strength })));
