@@ -13,8 +13,11 @@ import type { FormUses } from './longForms.js';
 /** The least that is asked about: uses of the short form, and free uses of the long one. */
 const LEAST = { short: 2, freeOnItsPages: 2, free: 3, freePages: 3, freeOnFewPages: 5 } as const;
 
-/** How sure an explanation makes that both forms name one thing. */
-const CONFIDENCE = { once: 0.85, more: 0.92 } as const;
+/**
+ * How sure it is that the two forms are mixed: sure where pages that have the short form go on with the long one; less so
+ * where the long form stands on other pages alone, which may have no need of the short one.
+ */
+const CONFIDENCE = { explainedOnce: 0.85, explainedMore: 0.92, onePlace: 0.75, elsewhere: 0.6 } as const;
 
 /** How the long form is used beside the short one. */
 export interface FreeUse {
@@ -57,7 +60,7 @@ export function askExplained(
       uses: free.all,
     },
   ].sort((a, b) => byUses(a.term, b.term));
-  const confidence = expansion.definitions.length > 1 ? CONFIDENCE.more : CONFIDENCE.once;
+  const confidence = confidenceOf(expansion, free);
   return {
     id: questionId(
       'abbreviation',
@@ -70,6 +73,12 @@ export function askExplained(
     reasons: reasonsOf(corpus, short, expansion, free, longUses),
     places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
   };
+}
+
+function confidenceOf({ definitions }: Expansion, { onItsPages }: FreeUse): number {
+  if (onItsPages.length === 0) return CONFIDENCE.elsewhere;
+  if (onItsPages.length === 1) return CONFIDENCE.onePlace;
+  return definitions.length > 1 ? CONFIDENCE.explainedMore : CONFIDENCE.explainedOnce;
 }
 
 /** Uses that are no explanation, nor right after a parenthesis, not the first on a page with the short form, in no heading. */
