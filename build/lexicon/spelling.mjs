@@ -4,6 +4,9 @@ import { moduleText } from './moduleText.mjs';
 /** Words rarer than this level of VarCon's are left out: nobody documents software with them. */
 const rarestLevel = 70;
 
+/** Spellings that the trade parts by meaning though dictionaries do not: a disc is a round thing, a disk stores data. */
+const partedByTheTrade = new Set(['disc', 'discs']);
+
 /**
  * Two spellings are joined only where every line that has one has the other, so that words of several senses (check and
  * cheque, tire and tyre, meter and metre) stay apart. Possessives, names and forms marked improper are left out.
@@ -27,7 +30,7 @@ export function compileSpelling(text, licence) {
   }
   const lines = [...leader.keys()]
     .map((word) => [word, find(word)])
-    .filter(([word, canonical]) => byRule(word) !== byRule(canonical))
+    .filter(([word, canonical]) => byRule(word) !== byRule(canonical) && !partedByTheTrade.has(word))
     .map(([word, canonical]) => `${word} ${canonical}`)
     .sort((a, b) => (a < b ? -1 : 1));
   return moduleText(

@@ -875,14 +875,12 @@ dietician dietitian
 dieticians dietitians
 dioptre diopter
 dioptres diopters
-disc disk
 discolour discolor
 discolouration discoloration
 discolourations discolorations
 discoloured discolored
 discolouring discoloring
 discolours discolors
-discs disks
 disembowelled disemboweled
 disembowelling disemboweling
 dises disses
