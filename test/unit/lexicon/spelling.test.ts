@@ -32,7 +32,6 @@ const same = [
   ['favourite', 'favorite'],
   ['neighbour', 'neighbor'],
   ['fibre', 'fiber'],
-  ['disc', 'disk'],
   ['colour-blind', 'color-blind'],
   ['serialise', 'serialize'],
   ['parameterisation', 'parameterization'],
@@ -41,6 +40,7 @@ const same = [
 // Words of their own, though letters or sounds are alike.
 const different = [
   ['check', 'cheque'],
+  ['disc', 'disk'],
   ['tire', 'tyre'],
   ['meter', 'metre'],
   ['program', 'programme'],
