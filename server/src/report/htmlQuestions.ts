@@ -26,7 +26,7 @@ function glance(questions: readonly ReportQuestion[]): Markup {
     (question, index) =>
       html`<tr>
         <td class="number">${index + 1}</td>
-        <th scope="row"><a href="#question-${index + 1}">${question.terms.map(({ text }) => text).join(' / ')}</a></th>
+        <th scope="row"><a href="#question-${index + 1}">${namesOf(question)}</a></th>
         <td class="bar">${sharesBar(question.terms.map(({ uses }, series) => ({ uses, series })))}</td>
         <td class="number extra">${question.terms.map(({ uses }) => grouped(uses)).join(' / ')}</td>
         <td class="number">${grouped(question.settles)}</td>
@@ -133,4 +133,10 @@ function evidence(term: string, series: number, examples: readonly ReportExample
 /** A reason is a fragment; as an item of a list it begins with a capital unless it begins with a quoted name. */
 function sentence(text: string): string {
   return text.slice(0, 1).toUpperCase() + text.slice(1);
+}
+
+/** The names of a question in a word or two; for verbs with the object that makes them one operation. */
+function namesOf({ terms, objects }: ReportQuestion): string {
+  const names = terms.map(({ text }) => text).join(' / ');
+  return objects === undefined ? names : `${names} (${objects[0]!}${objects.length > 1 ? ' …' : ''})`;
 }
