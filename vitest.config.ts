@@ -4,6 +4,7 @@ import { defineConfig } from 'vitest/config';
 export default defineConfig({
   test: {
     include: ['test/{architecture,unit,property,truth,fixtures,lsp,cli}/**/*.test.ts'],
+    setupFiles: ['test/support/propertySeed.ts'],
     testTimeout: 30_000,
     hookTimeout: 60_000,
     maxWorkers: 2,
