@@ -43,7 +43,7 @@ export class ExampleFinder {
     if (found === undefined || document === undefined) return undefined;
     const block = document.reading.prose.blocks.find((each) => holds(each, found.span));
     if (block === undefined) return undefined;
-    const { text, highlight } = sentenceAround(block, found.span);
+    const { text, highlight } = sentenceAround(block, found.span, document.reading.source.text);
     const line = document.lines.positionAt(found.span.start).line + 1;
     return { term: question.terms[place.term]!.text, uri: found.uri, line, text, highlight, source: found.span };
   }
@@ -64,8 +64,8 @@ function holds(block: ProseBlock, span: Span): boolean {
   return overlaps({ start: block.start, end: block.start + block.content.sourceLength }, span);
 }
 
-/** The sentence of a block that holds a span of the source, made readable: opaque things as …, white space folded. */
-function sentenceAround(block: ProseBlock, span: Span): { text: string; highlight: Span } {
+/** The sentence of a block that holds a span of the source, made readable on one line. */
+function sentenceAround(block: ProseBlock, span: Span, source: string): { text: string; highlight: Span } {
   const { text } = block.content;
   const start = textOffset(block, span.start, sourceStart);
   const end = Math.max(start, textOffset(block, span.end, sourceEnd));
@@ -78,9 +78,9 @@ function sentenceAround(block: ProseBlock, span: Span): { text: string; highligh
       break;
     }
   }
-  const before = readable(text.slice(from, start)).trimStart();
-  const term = readable(text.slice(start, end));
-  const after = readable(text.slice(end, until)).trimEnd();
+  const before = readable(block, from, start, source).trimStart();
+  const term = readable(block, start, end, source);
+  const after = readable(block, end, until, source).trimEnd();
   const room = Math.max(40, (LONGEST_EXAMPLE - term.length) / 2);
   const cutBefore = before.length > room ? `… ${before.slice(before.indexOf(' ', before.length - room) + 1)}` : before;
   const lastSpace = after.lastIndexOf(' ', room);
@@ -103,6 +103,16 @@ function textOffset(block: ProseBlock, source: number, place: (block: ProseBlock
   return low;
 }
 
-function readable(text: string): string {
-  return text.replace(/\uFFFC/g, '…').replace(/\s+/g, ' ');
+/** A stretch of a block for reading: short inline code as it reads, other opaque things as …, white space folded. */
+function readable(block: ProseBlock, from: number, until: number, source: string): string {
+  return block.content.text
+    .slice(from, until)
+    .replace(/\uFFFC/g, (_, at: number) => {
+      const written = source.slice(sourceStart(block, from + at), sourceEnd(block, from + at + 1));
+      return INLINE_CODE.exec(written)?.[2]?.trim() ?? '…';
+    })
+    .replace(/\s+/g, ' ');
 }
+
+/** Code of at most 40 units between backticks, as Markdown, reStructuredText and AsciiDoc write it. */
+const INLINE_CODE = /^(`+)([^`\n]{1,40})\1$/;
