@@ -115,7 +115,7 @@ export class Workbench {
     for (let i = 0; i < steps; i++) await this.page.keyboard.press('ArrowDown');
     await this.page.locator('.action-widget .monaco-list-row.action.focused', { hasText: title }).waitFor();
     await this.page.keyboard.press('Enter');
-    await this.page.locator('.action-widget').waitFor({ state: 'hidden' });
+    await this.page.locator('.action-widget').first().waitFor({ state: 'hidden' });
   }
 
   private actionRows(): Locator {
