@@ -1,6 +1,7 @@
 // Concordance: where a sequence of words stands in a corpus, found through its rarest word.
-import { TokenFlag } from '../tokens/tokens.js';
 import type { Corpus } from './corpus.js';
+import { firstRowOfBlock, followsOn } from './stream.js';
+import type { TokenStream } from './stream.js';
 
 /** The uses of one spelling of a term. */
 export interface Uses {
@@ -21,29 +22,28 @@ export function findUses(corpus: Corpus, term: string): Uses {
     .filter((word) => word !== '');
   const ids = words.map((word) => corpus.vocabulary.find(word));
   if (ids.length === 0 || ids.some((id) => id === undefined)) return { rows: [], documents: 0 };
-  const { stream } = corpus;
-  const rarest = ids.reduce<number>(
-    (best, id, at) => (stream.rowsOf(id!).length < stream.rowsOf(ids[best]!).length ? at : best),
-    0,
-  );
-  const rows: number[] = [];
-  const documents = new Set<number>();
-  for (const row of stream.rowsOf(ids[rarest]!)) {
-    const first = row - rarest;
-    if (first < 0 || !ids.every((id, at) => stream.fold[first + at] === id && (at === 0 || joined(corpus, first + at))))
-      continue;
-    rows.push(first);
-    documents.add(stream.documentOf(first));
-  }
-  return { rows, documents: documents.size };
+  const rows = rowsOfSequence(corpus.stream, ids as number[]);
+  return { rows, documents: new Set(rows.map((row) => corpus.stream.documentOf(row))).size };
 }
 
-/** True where a row's word follows the one before it with nothing but white space between. */
-function joined({ stream }: Corpus, row: number): boolean {
-  const wanted = TokenFlag.word | TokenFlag.spaceBefore;
-  return (
-    stream.counted[row] === 1 &&
-    (stream.flags[row]! & (wanted | TokenFlag.sentenceStart)) === wanted &&
-    (stream.flags[row - 1]! & TokenFlag.possessive) === 0
-  );
+/** The rows, ascending, at which a sequence of lower-case words begins, with nothing but white space inside it. */
+export function rowsOfSequence(stream: TokenStream, folds: readonly number[]): number[] {
+  let rarest = 0;
+  for (let i = 1; i < folds.length; i++) {
+    if (stream.rowsOf(folds[i]!).length < stream.rowsOf(folds[rarest]!).length) rarest = i;
+  }
+  const found: number[] = [];
+  for (const at of stream.rowsOf(folds[rarest]!)) {
+    const first = at - rarest;
+    if (first >= 0 && standsAt(stream, folds, first)) found.push(first);
+  }
+  return found;
+}
+
+function standsAt(stream: TokenStream, folds: readonly number[], first: number): boolean {
+  if (first + folds.length > stream.length || stream.counted[first] !== 1) return false;
+  for (let i = 0; i < folds.length; i++) {
+    if (stream.fold[first + i] !== folds[i] || (i > 0 && !followsOn(stream, first + i))) return false;
+  }
+  return firstRowOfBlock(stream, first + folds.length - 1) <= first;
 }

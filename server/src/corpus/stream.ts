@@ -1,5 +1,7 @@
 // All tokens of a corpus in one row of columns, and where each word stands: derived whole from a snapshot's documents.
+import { FactFlag } from '../facts/flags.js';
 import { isOpen } from '../prose/zones.js';
+import { TokenFlag } from '../tokens/tokens.js';
 import type { CorpusDocument } from './corpusDocument.js';
 import type { Vocabulary } from './vocabulary.js';
 
@@ -29,6 +31,34 @@ export interface TokenStream {
   documentOf(row: number): number;
   /** The block (numbered through) of a row. */
   blockOf(row: number): number;
+}
+
+/** True where a counted word follows the row before it with nothing but white space between. */
+export function followsOn(stream: TokenStream, row: number): boolean {
+  const flags = stream.flags[row]!;
+  return (
+    (flags & TokenFlag.word) !== 0 &&
+    (flags & TokenFlag.spaceBefore) !== 0 &&
+    (flags & TokenFlag.sentenceStart) === 0 &&
+    (stream.flags[row - 1]! & TokenFlag.possessive) === 0 &&
+    stream.counted[row] === 1
+  );
+}
+
+/** True for a counted word that is not one of grammar. */
+export function isContent(stream: TokenStream, row: number): boolean {
+  const wanted = TokenFlag.word | FactFlag.functionWord;
+  return stream.counted[row] === 1 && (stream.flags[row]! & wanted) === TokenFlag.word;
+}
+
+/** The first row of the block that a row stands in. */
+export function firstRowOfBlock(stream: TokenStream, row: number): number {
+  return stream.blockFirst[stream.blockOf(row)]!;
+}
+
+/** One after the last row of the block that a row stands in. */
+export function endRowOfBlock(stream: TokenStream, row: number): number {
+  return stream.blockFirst[stream.blockOf(row) + 1]!;
 }
 
 /** Lays the documents' columns end to end and indexes the counted tokens by word. */

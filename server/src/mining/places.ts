@@ -1,5 +1,6 @@
 // Where a form stands: its uses as rows of the token stream, how many documents hold them, and the places to show.
 import { Zone } from '../prose/zones.js';
+import { firstRowOfBlock } from '../corpus/stream.js';
 import type { TokenStream } from '../corpus/stream.js';
 import { TokenFlag } from '../tokens/tokens.js';
 import type { UsePlace } from './question.js';
@@ -8,50 +9,6 @@ import type { UsePlace } from './question.js';
 export interface Use {
   readonly row: number;
   readonly length: number;
-}
-
-/** True where a counted word follows the row before it with nothing but white space between. */
-export function followsOn(stream: TokenStream, row: number): boolean {
-  const flags = stream.flags[row]!;
-  return (
-    (flags & TokenFlag.word) !== 0 &&
-    (flags & TokenFlag.spaceBefore) !== 0 &&
-    (flags & TokenFlag.sentenceStart) === 0 &&
-    (stream.flags[row - 1]! & TokenFlag.possessive) === 0 &&
-    stream.counted[row] === 1
-  );
-}
-
-/** The rows, ascending, at which a sequence of lower-case words begins, with nothing but white space inside it. */
-export function rowsOfSequence(stream: TokenStream, folds: readonly number[]): number[] {
-  let rarest = 0;
-  for (let i = 1; i < folds.length; i++) {
-    if (stream.rowsOf(folds[i]!).length < stream.rowsOf(folds[rarest]!).length) rarest = i;
-  }
-  const found: number[] = [];
-  for (const at of stream.rowsOf(folds[rarest]!)) {
-    const first = at - rarest;
-    if (first >= 0 && standsAt(stream, folds, first)) found.push(first);
-  }
-  return found;
-}
-
-function standsAt(stream: TokenStream, folds: readonly number[], first: number): boolean {
-  if (first + folds.length > stream.length || stream.counted[first] !== 1) return false;
-  for (let i = 0; i < folds.length; i++) {
-    if (stream.fold[first + i] !== folds[i] || (i > 0 && !followsOn(stream, first + i))) return false;
-  }
-  return firstRowOfBlock(stream, first + folds.length - 1) <= first;
-}
-
-/** The first row of the block that a row stands in. */
-export function firstRowOfBlock(stream: TokenStream, row: number): number {
-  return stream.blockFirst[stream.blockOf(row)]!;
-}
-
-/** One after the last row of the block that a row stands in. */
-export function endRowOfBlock(stream: TokenStream, row: number): number {
-  return stream.blockFirst[stream.blockOf(row) + 1]!;
 }
 
 /** How many documents hold at least one of the uses. */

@@ -1,7 +1,7 @@
 // Where the documents explain their abbreviations: "long form (LF)", "LF (long form)", "LF stands for long form".
 import type { Corpus } from '../../corpus/corpus.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, followsOn } from '../places.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn } from '../../corpus/stream.js';
 import { singularKey } from '../wording.js';
 import { aligns, longestAlignment } from './alignment.js';
 

@@ -2,7 +2,7 @@
 import type { Corpus } from '../../corpus/corpus.js';
 import { FactFlag } from '../../facts/flags.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, followsOn } from '../places.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn } from '../../corpus/stream.js';
 import type { Use } from '../places.js';
 
 /** Kinds of frame with the number of uses in each: a neighbour's lower-case word, doubled, plus 1 where it follows. */

@@ -1,6 +1,6 @@
 // The uses of a long form and of a short one: every way of writing that the corpus has, singular and plural.
 import type { Corpus } from '../../corpus/corpus.js';
-import { rowsOfSequence } from '../places.js';
+import { rowsOfSequence } from '../../corpus/concordance.js';
 import type { Use } from '../places.js';
 import { numberForms } from '../wording.js';
 import { shortFormOf } from './definitions.js';

@@ -1,8 +1,9 @@
 // A cluster of noun terms as a question: its terms with their forms, the reasons in plain words, the places to show.
-import { byCountThenText, compareCodeUnits } from '../../base/order.js';
+import { byCountThenText } from '../../base/order.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { singularOf } from '../../lexicon/plurals.js';
 import type { Use } from '../places.js';
+import { questionId } from '../question.js';
 import type { Question, QuestionKind, QuestionTerm, Reason } from '../question.js';
 import { tellingPlaces } from './tellingPlaces.js';
 import { byUses, displayText, makeTerm, spelledAt } from '../wording.js';
@@ -31,10 +32,10 @@ export function makeQuestion(
   );
   const outside = terms.slice(1).reduce((sum, { term }) => sum + term.uses, 0);
   return {
-    id: `${kind}:${terms
-      .map(({ term }) => term.text)
-      .sort(compareCodeUnits)
-      .join('|')}`,
+    id: questionId(
+      kind,
+      terms.map(({ term }) => term),
+    ),
     kind,
     confidence,
     worth: confidence * outside,

@@ -2,9 +2,7 @@
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { LONGEST_GRAM } from '../../corpus/grams.js';
-import type { TokenStream } from '../../corpus/stream.js';
-import { FactFlag } from '../../facts/flags.js';
-import { TokenFlag } from '../../tokens/tokens.js';
+import { followsOn, isContent } from '../../corpus/stream.js';
 import type { Term } from './terms.js';
 
 /** The places of terms in a stream: occurrence `i` is term `term[i]` in the rows `[first[i], first[i] + length[i])`. */
@@ -70,28 +68,10 @@ function longestAt(
   let gram: number | undefined = word;
   for (let length = 2; length <= LONGEST_GRAM; length++) {
     const next = row + length - 1;
-    if (!follows(stream, next)) break;
+    if (!followsOn(stream, next)) break;
     gram = grams.findExtension(gram, stream.fold[next]!, length);
     if (gram === undefined) break;
     if (ofGram[gram] !== 0) found = { term: ofGram[gram]!, length };
   }
   return found;
-}
-
-/** True where the row's word follows the one before it with nothing but white space between them. */
-export function follows(stream: TokenStream, row: number): boolean {
-  const flags = stream.flags[row] ?? 0;
-  return (
-    stream.counted[row] === 1 &&
-    (flags & (TokenFlag.word | TokenFlag.spaceBefore | TokenFlag.sentenceStart)) ===
-      (TokenFlag.word | TokenFlag.spaceBefore) &&
-    (stream.flags[row - 1]! & TokenFlag.possessive) === 0
-  );
-}
-
-/** True for a counted word that is not one of grammar. */
-export function isContent(stream: TokenStream, row: number): boolean {
-  return (
-    stream.counted[row] === 1 && (stream.flags[row]! & (TokenFlag.word | FactFlag.functionWord)) === TokenFlag.word
-  );
 }

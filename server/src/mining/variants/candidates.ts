@@ -4,7 +4,7 @@ import type { Corpus } from '../../corpus/corpus.js';
 import { singularOf } from '../../lexicon/plurals.js';
 import { spellingKey } from '../../lexicon/spelling.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { rowsOfSequence } from '../places.js';
+import { rowsOfSequence } from '../../corpus/concordance.js';
 import { singularKey } from '../wording.js';
 
 /** How the parts of a compound stand together: `dataset`, `data-set`, `data set`. */

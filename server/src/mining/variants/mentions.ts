@@ -1,7 +1,7 @@
 // Uses of a form that are no use as a word: quoted, glued to signs, or in a line of code that is not marked as such.
 import type { Corpus } from '../../corpus/corpus.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock } from '../places.js';
+import { endRowOfBlock, firstRowOfBlock } from '../../corpus/stream.js';
 
 /** What a sign beside a form makes of it, as bits; `known` marks a word of the vocabulary that was looked at. */
 const Sign = { known: 1, quote: 2, assignment: 4, mayOpen: 8, mayClose: 16 } as const;

@@ -6,14 +6,9 @@ import { LONGEST_GRAM } from '../../corpus/grams.js';
 import { FactFlag } from '../../facts/flags.js';
 import { Zone } from '../../prose/zones.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import {
-  countDocuments,
-  endRowOfBlock,
-  examplePlaces,
-  followsOn,
-  isInsideSentence,
-  rowsOfSequence,
-} from '../places.js';
+import { rowsOfSequence } from '../../corpus/concordance.js';
+import { endRowOfBlock, followsOn } from '../../corpus/stream.js';
+import { countDocuments, examplePlaces, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question } from '../question.js';

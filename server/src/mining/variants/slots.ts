@@ -5,7 +5,7 @@ import type { Vocabulary } from '../../corpus/vocabulary.js';
 import { FactFlag } from '../../facts/flags.js';
 import { Zone } from '../../prose/zones.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, followsOn } from '../places.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn } from '../../corpus/stream.js';
 
 /** The slots, by code. `lone`: nothing but the form stands there; `unclear`: its neighbours do not tell. */
 export const SLOTS = ['attributive', 'predicate', 'noun', 'verb', 'unclear', 'lone'] as const;
