@@ -1,7 +1,6 @@
 // The card of the term at a place: its status, its concept's names with their uses, its companions, and what is asked.
 import type { Span } from '../base/span.js';
 import { contains, touches } from '../base/span.js';
-import { findUses } from '../corpus/concordance.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
 import { companionsOf } from '../mining/companions.js';
 import type { Companion } from '../mining/companions.js';
@@ -12,6 +11,7 @@ import { termForms } from '../rewrite/inflect.js';
 import type { PartOfSpeech } from '../rewrite/inflect.js';
 import type { TermStatus } from '../termbase/termbase.js';
 import type { Snapshot } from './snapshot.js';
+import { countUses, countedNames } from './usage.js';
 
 /** How many companions a card shows. */
 const SHOWN_COMPANIONS = 5;
@@ -77,34 +77,17 @@ export function cardOf(snapshot: Snapshot, uri: string, { checked }: TermAtPlace
   }
   const decided = decisions.termsOf(checked.text, checked.partOfSpeech)[0];
   const entries = decided === undefined ? [] : decided.names.terms;
-  const names = entries.map(({ text, status, partOfSpeech }) => ({
-    text,
-    status,
-    ...countUses(snapshot, text, partOfSpeech),
-  }));
+  const usage = countUses(snapshot.relations, countedNames(entries, decided?.names.with ?? [], String));
+  const names = entries.map(({ text, status }, index) => {
+    const { uses, byDocument } = usage.get(String(index))!;
+    return { text, status, uses, documents: byDocument.size };
+  });
   const { definition, note } = decided?.names ?? {};
   return {
     ...{ text: checked.text, names, companions: companions(snapshot, formsOf(checked.text, checked.partOfSpeech)) },
     ...(definition !== undefined && { definition }),
     ...(note !== undefined && { note }),
   };
-}
-
-/** The uses of a term in every inflected form, over all languages. */
-export function countUses(
-  snapshot: Snapshot,
-  text: string,
-  partOfSpeech?: PartOfSpeech,
-): { uses: number; documents: number } {
-  let uses = 0;
-  let documents = 0;
-  for (const { corpus } of snapshot.relations.languages) {
-    const { stream } = corpus;
-    const rows = formsOf(text, partOfSpeech).flatMap((form) => findUses(corpus, form).rows);
-    uses += rows.length;
-    documents += new Set(rows.map((row) => stream.documentOf(row))).size;
-  }
-  return { uses, documents };
 }
 
 function formsOf(text: string, partOfSpeech?: PartOfSpeech): string[] {

@@ -1,8 +1,9 @@
-// The report's door to the corpus: how often decided and asked names are used, and where, in all their inflected forms.
+// How often decided and asked names are used, and where, in all their inflected forms.
 import type { Corpus } from '../corpus/corpus.js';
 import { findUses } from '../corpus/concordance.js';
 import { ObjectSet } from '../findings/objectOfVerb.js';
 import { termForms, type Form, type PartOfSpeech } from '../rewrite/inflect.js';
+import type { TermEntry, TermRef } from '../termbase/termbase.js';
 import { termKey, termText } from '../termbase/termKey.js';
 import { TAG, TokenFlag } from '../tokens/tokens.js';
 import type { Relations } from './relations.js';
@@ -23,6 +24,21 @@ export interface CountedTerm {
   readonly objects?: readonly string[];
   /** The language that the name belongs to (BCP 47 primary subtag); every language where it is missing. */
   readonly language?: string;
+}
+
+/** The names of a decided concept, to be counted under ids by their place in it. */
+export function countedNames(
+  terms: readonly TermEntry[],
+  objects: readonly TermRef[],
+  idOf: (index: number) => string,
+): CountedTerm[] {
+  return terms.map((entry, index) => ({
+    ...{ id: idOf(index), text: entry.text },
+    ...(entry.partOfSpeech && { partOfSpeech: entry.partOfSpeech }),
+    // Names that differ in capitals alone: the first takes what is written in no one's capitals.
+    exact: entry.caseSensitive || terms.slice(0, index).some((other) => other.key === entry.key),
+    ...(objects.length > 0 && { objects: objects.map(({ text }) => text) }),
+  }));
 }
 
 /** The uses of one name. */

@@ -4,7 +4,7 @@ import type { Agenda } from '../decisions/decide.js';
 import type { DecidedConcept } from '../decisions/decisions.js';
 import { ExampleFinder } from '../engine/examples.js';
 import type { Snapshot } from '../engine/snapshot.js';
-import { countUses } from '../engine/usage.js';
+import { countUses, countedNames } from '../engine/usage.js';
 import type { CountedTerm, TermUsage } from '../engine/usage.js';
 import type { Question } from '../mining/question.js';
 import { driftOf, whereDriftLives } from './drift.js';
@@ -97,13 +97,11 @@ const askedId = (question: Question, term: number): string => `asked ${term} ${q
 
 function decidedTerms({ decisions }: Agenda): CountedTerm[] {
   return decisions.concepts.flatMap(({ concept, terms }, at) =>
-    terms.map(({ entry }, index): CountedTerm => ({
-      ...{ id: decidedId(at, index), text: entry.text },
-      ...(entry.partOfSpeech && { partOfSpeech: entry.partOfSpeech }),
-      // Names that differ in capitals alone: the first takes what is written in no one's capitals.
-      exact: entry.caseSensitive || terms.slice(0, index).some((other) => other.entry.key === entry.key),
-      ...(concept.with.length > 0 && { objects: concept.with.map(({ text }) => text) }),
-    })),
+    countedNames(
+      terms.map(({ entry }) => entry),
+      concept.with,
+      (index) => decidedId(at, index),
+    ),
   );
 }
 
