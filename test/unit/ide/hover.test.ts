@@ -66,3 +66,24 @@ describe('the hover', () => {
     expect(hoverAt(engine.snapshot, `${root}nowhere.md`, 0)).toBeUndefined();
   });
 });
+
+describe('the counts of a card', () => {
+  it('tell capitals apart, and verbs by the objects they were decided for', () => {
+    const own = new Engine(new Profiles());
+    const page = `${root}page.md`;
+    const text = 'We use GitHub and GitHub, and he uses Github. Launch the job. You launch the rocket.\n';
+    own.apply({
+      documents: [{ uri: page, source: { uri: page, format: 'markdown', text } }],
+      termbases: [
+        {
+          uri: `${root}termbase.yaml`,
+          text: 'evenword: 1\nconcepts:\n  - preferred: GitHub\n    deprecated: [Github]\n  - preferred: start\n    deprecated: [launch]\n    with: [job]\n',
+        },
+      ],
+    });
+    finish(own.settle());
+    const card = (word: string): string => hoverAt(own.snapshot, page, text.indexOf(word) + 1)!.markdown;
+    expect(card('GitHub')).toMatch(/\| GitHub \| preferred \| 2 \| 1 \|\n\| Github \| deprecated \| 1 \| 1 \|/);
+    expect(card('Launch')).toContain('| launch | deprecated | 1 | 1 |');
+  });
+});
