@@ -16,7 +16,6 @@ const shared = {
   minify: !watching,
   legalComments: 'none',
   define: { EVENWORD_VERSION: JSON.stringify(version) },
-  loader: { '.css': 'text', '.html': 'text' },
   logLevel: 'warning',
 };
 const bundles = [

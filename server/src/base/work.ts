@@ -10,12 +10,3 @@ export function finish<T>(work: Work<T>): T {
     if (step.done === true) return step.value;
   }
 }
-
-/** Work that rests after every `stride` items of a list. */
-export function* inStrides<T>(items: Iterable<T>, stride: number, each: (item: T, index: number) => void): Work<void> {
-  let index = 0;
-  for (const item of items) {
-    each(item, index++);
-    if (index % stride === 0) yield;
-  }
-}

@@ -1,4 +1,5 @@
 // evenword ask: the undecided mixes of a documentation set, most worth first, with their evidence.
+import { QUESTION_KINDS } from '../engine/engine.js';
 import { ExampleFinder } from '../engine/examples.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import type { Question, QuestionKind } from '../mining/question.js';
@@ -8,21 +9,15 @@ import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
 import { renderQuestions } from './questionText.js';
 
-const KINDS: readonly QuestionKind[] = [
-  'variant',
-  'abbreviation',
-  'ambiguous-abbreviation',
-  'synonym',
-  'verb-object',
-  'look-alike',
-];
-
 export const ask: Subcommand = {
   summary: 'lists the undecided mixes: terms that may name one thing',
   operands: 'DIR…',
   options: {
     format: { value: 'FORMAT', choices: ['text', 'json'], help: 'text for people (default), json for programs' },
-    kinds: { value: 'KINDS', help: `kinds of question, by commas: ${KINDS.join(', ')}; all but look-alike by default` },
+    kinds: {
+      value: 'KINDS',
+      help: `kinds of question, by commas: ${QUESTION_KINDS.join(', ')}; all but look-alike by default`,
+    },
     most: { value: 'N', help: 'list no more than N questions (all by default)' },
     'explain-files': { help: 'also say which files were left out, and why' },
   },
@@ -69,9 +64,10 @@ function toJson(snapshot: Snapshot, questions: readonly Question[]): object {
 function readKinds(value: string | true | undefined): readonly QuestionKind[] | undefined {
   if (typeof value !== 'string') return undefined;
   const names = value.split(',').map((name) => name.trim());
-  const unknown = names.find((name) => !KINDS.some((kind) => kind === name));
-  if (unknown !== undefined) throw new UsageError(`There is no kind “${unknown}”. There are: ${KINDS.join(', ')}.`);
-  return KINDS.filter((kind) => names.includes(kind));
+  const unknown = names.find((name) => !QUESTION_KINDS.some((kind) => kind === name));
+  if (unknown !== undefined)
+    throw new UsageError(`There is no kind “${unknown}”. There are: ${QUESTION_KINDS.join(', ')}.`);
+  return QUESTION_KINDS.filter((kind) => names.includes(kind));
 }
 
 function readCount(value: string | true | undefined): number | undefined {

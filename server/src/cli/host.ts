@@ -23,8 +23,6 @@ export interface CliHost {
   note(text: string, weight?: 'error'): void;
   /** Shows how far a survey has come; overwrites itself on a terminal. */
   progress(text: string): void;
-  /** Width of the terminal in columns. */
-  readonly width: number;
   /** Makes text stand out where the output is a terminal that can. */
   emphasise(text: string): string;
   faint(text: string): string;

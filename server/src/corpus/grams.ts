@@ -36,10 +36,6 @@ export class GramTable {
     return this.pairs.find(leftKey(prefix, length), word);
   }
 
-  lengthOf(id: number): number {
-    return this.lengths[id]!;
-  }
-
   /** The word ids of a gram, in order. */
   wordsOf(id: number): number[] {
     const words: number[] = [];

@@ -33,6 +33,8 @@ export interface EngineChange {
   readonly settings?: EngineSettings;
 }
 
+export { QUESTION_KINDS } from '../mining/question.js';
+
 /** What is asked unless settings say otherwise. */
 export const DEFAULT_SETTINGS: EngineSettings = { kinds: DEFAULT_KINDS, leastConfidence: 0.5 };
 
@@ -55,7 +57,6 @@ export class Engine {
       documents: LayeredMap.empty(),
       termbases: [],
       relations: Relations.none,
-      agendaRevision: 0,
     };
   }
 
@@ -138,12 +139,10 @@ export class Engine {
   }
 
   private commit(parts: Partial<EngineState>, newAgenda: boolean): void {
-    const { revision, agendaRevision } = this.state;
     this.state = {
       ...this.state,
       ...parts,
-      revision: revision + 1,
-      agendaRevision: agendaRevision + (newAgenda ? 1 : 0),
+      revision: this.state.revision + 1,
     };
     if (newAgenda) this.scopes = new Map();
   }

@@ -48,15 +48,13 @@ export interface EngineState {
   readonly documents: LayeredMap<string, EngineDocument>;
   readonly termbases: readonly LoadedTermbase[];
   readonly relations: Relations;
-  /** Counts the settlements and changes of termbases and settings: equal numbers mean equal agendas. */
-  readonly agendaRevision: number;
 }
 
 /** One revision of the engine, with everything that can be asked of it. */
 export class Snapshot {
   constructor(
     private readonly state: EngineState,
-    /** Agendas and checkers by scope: shared by all snapshots of one agenda revision. */
+    /** Agendas and checkers by scope: shared by all snapshots of equal relations, termbases and settings. */
     private readonly scopes: Map<string, Scoped>,
   ) {}
 

@@ -2,17 +2,18 @@
 import { compareCodeUnits } from '../base/order.js';
 
 /** What kind of mix a question is about. */
-export type QuestionKind =
-  'variant' | 'abbreviation' | 'ambiguous-abbreviation' | 'synonym' | 'verb-object' | 'look-alike';
-
-/** The kinds that are asked unless a caller selects others. */
-export const DEFAULT_KINDS: readonly QuestionKind[] = [
+export const QUESTION_KINDS = [
   'variant',
   'abbreviation',
   'ambiguous-abbreviation',
   'synonym',
   'verb-object',
-];
+  'look-alike',
+] as const;
+export type QuestionKind = (typeof QUESTION_KINDS)[number];
+
+/** The kinds that are asked unless a caller selects others. */
+export const DEFAULT_KINDS: readonly QuestionKind[] = QUESTION_KINDS.filter((kind) => kind !== 'look-alike');
 
 /** One spelling of a term as it stands in the documents, with its number of uses. */
 export interface TermForm {

@@ -21,7 +21,6 @@ export function nodeHost(): CliHost {
     write: (text) => void process.stdout.write(text),
     note: (text) => void process.stderr.write(text),
     progress,
-    width: process.stdout.columns || 100,
     emphasise: (text) => (colours ? `\u001b[1m${text}\u001b[22m` : text),
     faint: (text) => (colours ? `\u001b[2m${text}\u001b[22m` : text),
     survey(paths, mine) {

@@ -5,6 +5,7 @@ import { basename, dirname, join, relative, sep } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import ignore from 'ignore';
 import type { Ignore } from 'ignore';
+import { compareCodeUnits } from '../base/order.js';
 import { FORMATS, formatOf } from '../text/sourceText.js';
 import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri } from '../text/uri.js';
@@ -55,8 +56,8 @@ export async function findFiles(path: string): Promise<FoundFiles> {
     return { ...found, documents: [path] };
   }
   await walk(path, [], new Set(), found);
-  found.documents.sort(byCodeUnits);
-  found.termbases.sort(byCodeUnits);
+  found.documents.sort(compareCodeUnits);
+  found.termbases.sort(compareCodeUnits);
   return found;
 }
 
@@ -150,7 +151,7 @@ async function walk(
       entries.some((entry) => entry.name === '.gitignore'),
     )),
   ];
-  for (const entry of entries.sort((a, b) => byCodeUnits(a.name, b.name))) {
+  for (const entry of entries.sort((a, b) => compareCodeUnits(a.name, b.name))) {
     const path = join(folder, entry.name);
     const kind = entry.isSymbolicLink() ? await stat(path).catch(() => undefined) : entry;
     if (kind === undefined) {
@@ -220,8 +221,4 @@ export function plainReason(error: unknown): string {
   if (code === 'ENOTDIR') return 'a part of the path is no folder';
   if (code === 'ELOOP') return 'a link leads back to itself';
   return error instanceof Error ? error.message : String(error);
-}
-
-function byCodeUnits(a: string, b: string): number {
-  return a < b ? -1 : a > b ? 1 : 0;
 }
