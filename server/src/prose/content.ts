@@ -1,5 +1,6 @@
 // Builds one block's content: text, its map back to the source, zones and links, in one pass from left to right.
-import { OPAQUE, type BlockContent, type BlockKind, type LinkMark, type ZoneMark } from './prose.js';
+import { OPAQUE } from './prose.js';
+import type { BlockContent, BlockKind, GlossaryPart, LinkMark, ZoneMark } from './prose.js';
 import type { ZoneSet } from './zones.js';
 
 const LETTER_OR_DIGIT = /[\p{L}\p{N}]/u;
@@ -12,6 +13,8 @@ export interface BlockRole {
   /** The heading's level from 1, else 0. */
   readonly level: number;
   readonly zones: ZoneSet;
+  readonly language?: string | undefined;
+  readonly glossary?: GlossaryPart | undefined;
 }
 
 /**
@@ -101,6 +104,8 @@ export class ContentBuilder {
       level: role.level,
       text: this.text,
       zones: role.zones,
+      language: role.language,
+      glossary: role.glossary,
       marks: this.marks ?? NO_MARKS,
       links: this.links ?? NO_LINKS,
       pieces: new Uint32Array(this.pieces),

@@ -17,6 +17,12 @@ export const BLOCK_KINDS = [
 ] as const;
 export type BlockKind = (typeof BLOCK_KINDS)[number];
 
+/**
+ * What a block is in a glossary, where its format says that there is one. An entry is one or more headwords and then what is
+ * said of them, in the order of the document: its definition, the name that it sends the reader to (*see*), other names of it.
+ */
+export type GlossaryPart = 'headword' | 'definition' | 'see' | 'alsoCalled';
+
 /** Stands in a block's text, one code unit each, for inline code, URLs, markup and other things that are no prose. */
 export const OPAQUE = '\uFFFC';
 const OPAQUE_UNIT = 0xfffc;
@@ -43,6 +49,9 @@ export interface BlockContent {
   readonly level: number;
   readonly text: string;
   readonly zones: ZoneSet;
+  /** BCP 47 tag where the source gives this block a language of its own; else the document's holds. */
+  readonly language?: string | undefined;
+  readonly glossary?: GlossaryPart | undefined;
   /** Ascending, not overlapping. */
   readonly marks: readonly ZoneMark[];
   readonly links: readonly LinkMark[];

@@ -66,6 +66,8 @@ export function sameContent(a: BlockContent, b: BlockContent): boolean {
       a.kind === b.kind &&
       a.level === b.level &&
       a.zones === b.zones &&
+      a.language === b.language &&
+      a.glossary === b.glossary &&
       a.sourceLength === b.sourceLength &&
       a.pieces.length === b.pieces.length &&
       a.marks.length === b.marks.length &&
