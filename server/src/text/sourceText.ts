@@ -1,7 +1,17 @@
 // One document's text at one moment, and the format it is written in.
 
 /** The formats that a reader exists for. */
-export type Format = 'markdown' | 'plaintext' | 'restructuredtext' | 'asciidoc' | 'html' | 'xml';
+export type Format =
+  | 'markdown'
+  | 'mdx'
+  | 'notebook'
+  | 'plaintext'
+  | 'restructuredtext'
+  | 'asciidoc'
+  | 'html'
+  | 'xml'
+  | 'latex'
+  | 'apiDescription';
 
 /** An immutable text. Offsets into it are UTF-16 code units everywhere in the engine. */
 export interface SourceText {
