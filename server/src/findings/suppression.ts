@@ -1,8 +1,10 @@
-// Places that a document asks to be left as they are, by a comment in its source: <!-- evenword: keep -->.
+// Places that a document asks to be left as they are, by a comment in its source that says `evenword: keep`.
 import type { Span } from '../base/span.js';
 import { LineIndex } from '../text/lineIndex.js';
 import type { SourceText } from '../text/sourceText.js';
 import { foldText } from './foldWord.js';
+import { commentSyntaxOf } from './keepComments.js';
+import type { CommentSyntax } from './keepComments.js';
 
 /** What a document keeps, and comments of ours that say nothing we know. */
 export interface Kept {
@@ -27,20 +29,20 @@ interface KeptLines {
 /** A document without such comments. */
 export const NOTHING_KEPT: Kept = { isKept: () => false, problems: [] };
 
-const COMMENT = /<!--\s*evenword:\s*([^]*?)\s*-->|\{\/\*\s*evenword:\s*([^]*?)\s*\*\/\}/g;
-
 /**
- * Reads the comments `<!-- evenword: keep -->` of a Markdown source (in MDX also as a JSX comment). Alone on its line, one keeps
- * everything from the next line to the next blank line; beside text, its own line. `keep "API key", "data centre"` keeps these terms only.
+ * Reads the comments `evenword: keep` of a source, written as its format writes comments. Alone on its line, one keeps what
+ * follows: the paragraph, in HTML and XML the element, in YAML the node. Beside text it keeps its own line.
+ * `keep "API key", "data centre"` keeps these terms only.
  */
 export function readKept({ text, format }: SourceText): Kept {
-  if (format !== 'markdown' || !text.includes('evenword:')) return NOTHING_KEPT;
+  const syntax = commentSyntaxOf(format);
+  if (syntax === undefined || !text.includes('evenword:')) return NOTHING_KEPT;
   const lines = new LineIndex(text);
   const ranges: KeptLines[] = [];
   const problems: KeepProblem[] = [];
-  for (const match of text.matchAll(COMMENT)) {
+  for (const match of text.matchAll(syntax.comment)) {
     const span = { start: match.index, end: match.index + match[0].length };
-    const request = match[1] ?? match[2] ?? '';
+    const request = (match[1] ?? match[2] ?? '').replaceAll('\\"', '"');
     const keep = /^keep(?:\s+((?:["“][^"”]+["”]\s*,?\s*)+))?$/.exec(request);
     if (!keep) {
       problems.push({
@@ -50,7 +52,7 @@ export function readKept({ text, format }: SourceText): Kept {
       continue;
     }
     const terms = [...(keep[1] ?? '').matchAll(/["“]([^"”]+)["”]/g)].map((quoted) => foldText(quoted[1]!.trim()));
-    ranges.push({ ...linesKept(lines, span), terms });
+    ranges.push({ ...linesKept(lines, span, syntax), terms });
   }
   return {
     problems,
@@ -68,19 +70,16 @@ export function readKept({ text, format }: SourceText): Kept {
   };
 }
 
-function linesKept(lines: LineIndex, span: Span): { first: number; last: number } {
+function linesKept(lines: LineIndex, span: Span, syntax: CommentSyntax): { first: number; last: number } {
+  const { reach, isNothing = isBlank } = syntax;
   const from = lines.positionAt(span.start);
   const to = lines.positionAt(span.end);
   const before = lines.lineText(from.line).slice(0, from.character);
   const after = lines.lineText(to.line).slice(to.character);
-  if (before.trim() !== '' || after.trim() !== '') return { first: from.line, last: to.line };
-  let last = to.line;
-  // The blank line that Markdown wants behind an HTML block is no end yet.
-  if (last + 1 < lines.lineCount && isBlank(lines.lineText(last + 1))) last++;
-  while (last + 1 < lines.lineCount && !isBlank(lines.lineText(last + 1))) last++;
-  return { first: from.line, last };
+  const alone = isNothing(before) && isNothing(after);
+  return { first: from.line, last: alone ? reach(lines, to.line) : to.line };
 }
 
-function isBlank(line: string): boolean {
-  return line.trim() === '';
+function isBlank(text: string): boolean {
+  return text.trim() === '';
 }
