@@ -2,6 +2,8 @@
 import { LayeredMap } from '../base/layeredMap.js';
 import type { Work } from '../base/work.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
+import { DEFAULT_MINING, sameMining } from '../mining/options.js';
+import type { MiningOptions } from '../mining/options.js';
 import { DEFAULT_KINDS } from '../mining/question.js';
 import { reread, startReading } from '../prose/read.js';
 import type { SourceText } from '../text/sourceText.js';
@@ -31,6 +33,8 @@ export interface EngineChange {
   /** Texts of termbase files; undefined for one that is gone. */
   readonly termbases?: readonly { readonly uri: string; readonly text: string | undefined }[];
   readonly settings?: EngineSettings;
+  /** What to mine with from the next settlement on. */
+  readonly mining?: MiningOptions;
 }
 
 export { QUESTION_KINDS } from '../mining/question.js';
@@ -54,6 +58,7 @@ export class Engine {
     this.state = {
       revision: 0,
       settings: DEFAULT_SETTINGS,
+      mining: DEFAULT_MINING,
       documents: LayeredMap.empty(),
       termbases: [],
       relations: Relations.none,
@@ -67,7 +72,7 @@ export class Engine {
 
   /** True where {@link settle} has something to do. */
   get needsSettling(): boolean {
-    return this.unsettled.size > 0;
+    return this.unsettled.size > 0 || !sameMining(this.state.mining, this.state.relations.mining);
   }
 
   /** Takes a change in and returns the snapshot after it. Applying a text that is there already changes nothing. */
@@ -76,7 +81,8 @@ export class Engine {
     const termbases = changedTermbases(this.state.termbases, change.termbases ?? []);
     const settings = change.settings ?? this.state.settings;
     const newAgenda = termbases !== this.state.termbases || settings !== this.state.settings;
-    this.commit({ documents, termbases, settings }, newAgenda);
+    const mining = change.mining ?? this.state.mining;
+    this.commit({ documents, termbases, settings, mining }, newAgenda);
     return this.snapshot;
   }
 
@@ -98,7 +104,8 @@ export class Engine {
       yield;
       if (mine !== this.settlement) return this.snapshot;
     }
-    const work = this.state.relations.settle(changes);
+    const { relations, mining } = this.state;
+    const work = relations.settle(changes, mining);
     let step = work.next();
     while (step.done !== true) {
       yield;
@@ -108,12 +115,12 @@ export class Engine {
     for (const [uri, document] of began) {
       if (this.state.documents.get(uri)?.source === document?.source) this.unsettled.delete(uri);
     }
-    if (changes.size > 0) this.commit({ relations: step.value }, true);
+    if (changes.size > 0 || !sameMining(mining, relations.mining)) this.commit({ relations: step.value }, true);
     return this.snapshot;
   }
 
   private factsOf({ source, reading }: EngineDocument): DocumentFacts {
-    return factsOfProse((reading ?? startReading(source)).prose, this.profiles);
+    return factsOfProse((reading ?? startReading(source)).prose, this.profiles, source.text);
   }
 
   private changedDocuments(updates: readonly DocumentUpdate[]): LayeredMap<string, EngineDocument> {

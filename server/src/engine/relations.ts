@@ -4,6 +4,8 @@ import type { Work } from '../base/work.js';
 import { Corpus } from '../corpus/corpus.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
 import { mine } from '../mining/mine.js';
+import { DEFAULT_MINING, sameMining } from '../mining/options.js';
+import type { MiningOptions } from '../mining/options.js';
 import type { Question, UsePlace } from '../mining/question.js';
 import type { Span } from '../base/span.js';
 
@@ -22,9 +24,13 @@ export interface LanguageRelations {
 
 /** Everything mined from a set of documents; immutable. */
 export class Relations {
-  static readonly none = new Relations([]);
+  static readonly none = new Relations([], DEFAULT_MINING);
 
-  private constructor(readonly languages: readonly LanguageRelations[]) {}
+  private constructor(
+    readonly languages: readonly LanguageRelations[],
+    /** What they were mined with. */
+    readonly mining: MiningOptions,
+  ) {}
 
   /** All questions, by worth, ties by code units of their ids. */
   get questions(): readonly Question[] {
@@ -53,8 +59,15 @@ export class Relations {
     return start === undefined || end === undefined ? undefined : { uri: document.uri, span: { start, end } };
   }
 
-  /** The next state: facts by URI, undefined for a document that is gone. Only languages that changed are mined anew. */
-  *settle(changes: ReadonlyMap<string, DocumentFacts | undefined>): Work<Relations> {
+  /**
+   * The next state: facts by URI, undefined for a document that is gone. Only languages that changed are mined anew; all of
+   * them where the options changed.
+   */
+  *settle(
+    changes: ReadonlyMap<string, DocumentFacts | undefined>,
+    options: MiningOptions = this.mining,
+  ): Work<Relations> {
+    const minesAlike = sameMining(options, this.mining);
     const corpora = new Map(this.languages.map((each) => [each.language, each]));
     const languages = new Set(corpora.keys());
     for (const facts of changes.values()) if (facts !== undefined) languages.add(facts.language);
@@ -64,15 +77,16 @@ export class Relations {
       const own = [...changes]
         .map(([uri, facts]) => ({ uri, facts: facts?.language === language ? facts : undefined }))
         .filter(({ uri, facts }) => facts !== undefined || known?.corpus.has(uri) === true);
-      if (own.length === 0) {
+      if (own.length === 0 && (known === undefined || minesAlike)) {
         if (known !== undefined) next.push(known);
         continue;
       }
-      const corpus = yield* (known?.corpus ?? Corpus.create()).apply(own);
+      const before = known?.corpus ?? Corpus.create();
+      const corpus = own.length === 0 ? before : yield* before.apply(own);
       if (corpus.documents.length === 0) continue;
-      const questions = yield* mine(corpus);
+      const questions = yield* mine(corpus, options);
       next.push({ language, corpus, questions: questions.map((question) => ({ ...question, language })) });
     }
-    return new Relations(next);
+    return new Relations(next, options);
   }
 }

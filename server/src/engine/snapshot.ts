@@ -6,6 +6,7 @@ import type { Agenda } from '../decisions/decide.js';
 import { scopeOf } from '../decisions/scope.js';
 import type { PlacedTermbase } from '../decisions/scope.js';
 import type { Finding } from '../findings/finding.js';
+import type { MiningOptions } from '../mining/options.js';
 import type { QuestionKind } from '../mining/question.js';
 import { startReading } from '../prose/read.js';
 import type { Reading } from '../prose/read.js';
@@ -45,6 +46,8 @@ export interface EngineSettings {
 export interface EngineState {
   readonly revision: number;
   readonly settings: EngineSettings;
+  /** What the next settlement mines with. */
+  readonly mining: MiningOptions;
   readonly documents: LayeredMap<string, EngineDocument>;
   readonly termbases: readonly LoadedTermbase[];
   readonly relations: Relations;

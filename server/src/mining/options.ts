@@ -9,3 +9,9 @@ export interface MiningOptions {
 
 /** Nothing but the documents. */
 export const DEFAULT_MINING: MiningOptions = {};
+
+/** True where two options mine alike. What is compared by identity may say false of equals, never true of others. */
+export function sameMining(a: MiningOptions, b: MiningOptions): boolean {
+  const names = new Set([...Object.keys(a), ...Object.keys(b)]) as Set<keyof MiningOptions>;
+  return [...names].every((name) => a[name] === b[name]);
+}

@@ -43,4 +43,21 @@ describe('a settlement', () => {
     expect(counted.gathered).toBe(3);
     expect(engine.snapshot.relations.size.documents).toBe(3);
   });
+
+  it('mines anew with other options, and takes equal ones for the same', () => {
+    const engine = new Engine(profiles);
+    engine.apply(update(page('a', 'One two.')));
+    finish(engine.settle());
+    const { relations } = engine.snapshot;
+    engine.apply({ mining: { pastEdits: undefined } });
+    expect(engine.needsSettling).toBe(false);
+    const pastEdits = { replacements: [] };
+    engine.apply({ mining: { pastEdits } });
+    expect(engine.needsSettling).toBe(true);
+    finish(engine.settle());
+    expect(engine.needsSettling).toBe(false);
+    expect(engine.snapshot.relations).not.toBe(relations);
+    expect(engine.snapshot.relations.mining.pastEdits).toBe(pastEdits);
+    expect(engine.snapshot.relations.languages[0]?.corpus).toBe(relations.languages[0]?.corpus);
+  });
 });

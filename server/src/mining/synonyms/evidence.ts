@@ -1,7 +1,8 @@
 // What speaks for two terms being one concept: pairs of terms, each with its evidence from independent sources.
 
 /** Where evidence comes from. */
-export type EvidenceKind = 'list' | 'dictionary' | 'component' | 'definition' | 'link-target' | 'neighbours';
+export type EvidenceKind =
+  'list' | 'dictionary' | 'component' | 'definition' | 'link-target' | 'past-edit' | 'neighbours';
 
 /** One piece of evidence for a pair, with a sentence fragment for a writer. */
 export interface Evidence {

@@ -1,6 +1,7 @@
 // Synonymous noun terms: candidates from every source, refused, confirmed by their contexts, scored and joined.
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
+import type { MiningOptions } from '../options.js';
 import type { Question } from '../question.js';
 import { clusterPairs } from './clusters.js';
 import { pairByComponents } from './components.js';
@@ -12,6 +13,7 @@ import { pairByLists } from './lexical.js';
 import { pairByLinkTargets } from './linkTargets.js';
 import { pairByLooks } from './lookAlikes.js';
 import { indexOccurrences } from './occurrences.js';
+import { pairByPastEdits } from './pastEdits.js';
 import { makeQuestion } from './question.js';
 import { reasonsOf } from './reasons.js';
 import { confidenceOf } from './score.js';
@@ -20,7 +22,7 @@ import { findNounTerms } from './terms.js';
 import { countWordUses } from './wordUse.js';
 
 /** Asks about noun terms of one concept, and about terms that are alike in use alone. */
-export function* askNouns(corpus: Corpus, uses: Uint8Array): Work<Question[]> {
+export function* askNouns(corpus: Corpus, uses: Uint8Array, options: MiningOptions): Work<Question[]> {
   const terms = yield* findNounTerms(corpus, countWordUses(corpus, uses));
   const segments = yield* segment(corpus, terms, uses);
   const occurrences = indexOccurrences(segments);
@@ -33,6 +35,7 @@ export function* askNouns(corpus: Corpus, uses: Uint8Array): Work<Question[]> {
   yield;
   pairByLinkTargets(corpus, segments, collector);
   yield;
+  pairByPastEdits(terms, options.pastEdits, collector);
   const judge = new Judge(corpus, terms, segments, occurrences);
   const judged = yield* judge.judge(collector.pairs());
   const looks = yield* pairByLooks(judge, judged);
