@@ -43,7 +43,7 @@ export const ROOMS: Readonly<Record<string, RoomRule>> = {
   node: {
     rooms: ['base', 'text', 'engine', 'lsp', 'cli'],
     types: upToRewrite,
-    packages: [/^node:/, /^ignore$/, /^vscode-languageserver/],
+    packages: [/^node:/, /^ignore$/, /^chardet$/, /^iconv-lite$/, /^vscode-languageserver/],
   },
 };
 

@@ -24,7 +24,7 @@ beforeAll(async () => {
     '.gitignore': 'drafts/\n',
     'drafts/draft.md': 'The datalogger of the draft.\n',
     'node_modules/x/README.md': 'The datalogger of a package.\n',
-    'latin.md': Uint8Array.from([0x63, 0x61, 0x66, 0xe9, 0x0a]),
+    'noise.md': Uint8Array.from([0x63, 0x0a, 0xff, 0x81, 0x8d, 0x9d]),
     'zip.md': Uint8Array.from([0x50, 0x4b, 0x03, 0x04, 0x00, 0x00]),
     'line.txt': 'QUJDREVG'.repeat(12_800),
     'empty.md': '',
@@ -62,14 +62,14 @@ describe('evenword ask', () => {
     expect(out).toMatch(/^7 pages, [\d,]+ words: \d+ open questions?\.\n/);
     expect(out).toMatch(/“data ?logger” or “data ?logger”\?/);
     expect(out).toMatch(/service\.md:3/);
-    expect(err).toContain('latin.md');
+    expect(err).toContain('noise.md');
     const quiet = await evenword(['ask', folder.path, '--quiet']);
     expect(quiet).toEqual({ code: 0, out, err: '' });
   });
 
   it('says by name what it left out, and why', async () => {
     const { err } = await evenword(['ask', folder.path, '--explain-files']);
-    expect(err).toMatch(/latin\.md: is not in UTF-8 \(line 1; perhaps Latin-1\)/);
+    expect(err).toMatch(/noise\.md: is not in UTF-8 \(line 2\)/);
     expect(err).toMatch(/zip\.md: is a binary file/);
     expect(err).toMatch(/drafts: ignored by \.gitignore/);
     expect(err).toMatch(/node_modules: a folder of dependencies/);

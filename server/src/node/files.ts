@@ -9,6 +9,8 @@ import { compareCodeUnits } from '../base/order.js';
 import { FORMATS, formatOf } from '../text/sourceText.js';
 import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri } from '../text/uri.js';
+import { decode } from './decoding.js';
+import type { Decoded } from './decoding.js';
 
 /** Files larger than this are left out: prose is never so long, data often is. In bytes. */
 export const LARGEST_FILE = 4 * 1024 * 1024;
@@ -76,16 +78,13 @@ export async function readDocument(path: string): Promise<ReadFile> {
   return { source: { uri: uriOfPath(path), format: formatOf(path) ?? 'plaintext', text: file.text } };
 }
 
-/** Reads a file. Only UTF-8 (with or without a byte order mark) is taken: a wrong guess would spoil every offset. */
-export async function readText(path: string): Promise<{ readonly text: string } | { readonly reason: string }> {
+/** Reads a file as text; see {@link decode} for the encodings. */
+export async function readText(path: string): Promise<Decoded> {
   try {
     if ((await stat(path)).size > LARGEST_FILE) return { reason: 'larger than 4 MiB' };
-    const bytes = await readFile(path);
-    const reason = unreadable(bytes);
-    if (reason !== undefined) return { reason };
-    return { text: new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes) };
+    return decode(await readFile(path));
   } catch (error) {
-    return { reason: error instanceof TypeError ? await encodingReason(path) : plainReason(error) };
+    return { reason: plainReason(error) };
   }
 }
 
@@ -184,33 +183,6 @@ function isIgnored(path: string, folder: boolean, rules: readonly Rules[]): bool
     else if (verdict.unignored) ignored = false;
   }
   return ignored;
-}
-
-function unreadable(bytes: Uint8Array): string | undefined {
-  if ((bytes[0] === 0xff && bytes[1] === 0xfe) || (bytes[0] === 0xfe && bytes[1] === 0xff)) {
-    return 'is in UTF-16; save it as UTF-8 to have it read';
-  }
-  if (bytes.subarray(0, 8192).includes(0)) return 'is a binary file';
-  return undefined;
-}
-
-/** Names the line of the first byte that is no UTF-8. */
-async function encodingReason(path: string): Promise<string> {
-  const bytes = await readFile(path);
-  let line = 1;
-  let start = 0;
-  const decoder = new TextDecoder('utf-8', { fatal: true });
-  for (let i = 0; i <= bytes.length; i++) {
-    if (i < bytes.length && bytes[i] !== 10) continue;
-    try {
-      decoder.decode(bytes.subarray(start, i));
-    } catch {
-      break;
-    }
-    start = i + 1;
-    line++;
-  }
-  return `is not in UTF-8 (line ${line}; perhaps Latin-1); save it as UTF-8 to have it read`;
 }
 
 /** The system's reason for a failed call, in plain words. */
