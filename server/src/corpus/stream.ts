@@ -31,6 +31,8 @@ export interface TokenStream {
   documentOf(row: number): number;
   /** The block (numbered through) of a row. */
   blockOf(row: number): number;
+  /** True where the word of a row, spelled so, is a name in its document's code as well. */
+  isNameInCode(row: number): boolean;
 }
 
 /** True where a counted word follows the row before it with nothing but white space between. */
@@ -101,11 +103,17 @@ export function makeStream(documents: readonly CorpusDocument[], vocabulary: Voc
   });
   blockFirst[blockCount] = row;
   const index = indexRows(fold, counted, vocabulary.size);
+  const documentOf = (at: number): number => lastAtOrBefore(documentFirst, at);
   return {
     ...{ length, spelling, fold, lemma, tag, flags, zones, counted, documentFirst, blockFirst, blockKind },
     rowsOf: (word) => index.rows.subarray(index.first[word] ?? 0, index.first[word + 1] ?? 0),
-    documentOf: (at) => lastAtOrBefore(documentFirst, at),
+    documentOf,
     blockOf: (at) => lastAtOrBefore(blockFirst, at),
+    isNameInCode: (at) => {
+      const document = documentOf(at);
+      const { facts } = documents[document]!;
+      return facts.inCode[facts.word[at - documentFirst[document]!]!] === 1;
+    },
   };
 }
 

@@ -26,10 +26,10 @@ export class Profiles {
 
 /** Reads a document and gathers its facts. Never fails: what cannot be read as prose yields no tokens. */
 export function factsOf(source: SourceText, profiles: Profiles): DocumentFacts {
-  return factsOfProse(read(source), profiles);
+  return factsOfProse(read(source), profiles, source.text);
 }
 
-/** Gathers the facts of a document that was read already. */
-export function factsOfProse(prose: Prose, profiles: Profiles): DocumentFacts {
-  return gatherFacts(prose, profiles.for(prose.language));
+/** Gathers the facts of a document that was read already, from its text. */
+export function factsOfProse(prose: Prose, profiles: Profiles, text: string): DocumentFacts {
+  return gatherFacts(prose, profiles.for(prose.language), text);
 }

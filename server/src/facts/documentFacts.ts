@@ -4,6 +4,7 @@ import { isFunctionWord } from '../lexicon/functionWords.js';
 import { BLOCK_KINDS, SourceCursor } from '../prose/prose.js';
 import type { BlockContent, Prose, ProseBlock } from '../prose/prose.js';
 import type { BlockTokens, LanguageProfile } from '../tokens/tokens.js';
+import { findCodeWords } from './codeWords.js';
 import { FactFlag } from './flags.js';
 
 /** A link of the document: the tokens of its text and its target as written. */
@@ -22,6 +23,8 @@ export interface LinkFact {
 export interface DocumentFacts {
   readonly language: string;
   readonly words: readonly string[];
+  /** 1 for each of `words` that, spelled so, is a name in the document's code as well. */
+  readonly inCode: Uint8Array;
   readonly word: Uint32Array;
   readonly lemma: Uint32Array;
   readonly tag: Uint8Array;
@@ -37,20 +40,25 @@ export interface DocumentFacts {
   readonly links: readonly LinkFact[];
 }
 
-/** Gathers the facts of a document that a reader has read. */
-export function gatherFacts(prose: Prose, profile: LanguageProfile): DocumentFacts {
+/**
+ * Gathers the facts of a document that a reader has read.
+ * @param source the text that it was read from; without it no word is known to stand in code
+ */
+export function gatherFacts(prose: Prose, profile: LanguageProfile, source = ''): DocumentFacts {
   const tokens = profile.tokens(prose.blocks.map((block) => block.content));
   const facts = new FactsBuilder(
     tokens.reduce((sum, block) => sum + block.start.length, 0),
     prose.blocks.length,
   );
   prose.blocks.forEach((block, index) => facts.add(block, tokens[index]!));
+  if (source !== '') findCodeWords(prose, source, (word) => facts.addCodeWord(word));
   return facts.finish(profile.language);
 }
 
 class FactsBuilder {
   private readonly localIds = new Map<string, number>();
   private readonly words: string[] = [];
+  private readonly inCode = new Set<number>();
   private readonly isFunction: boolean[] = [];
   private readonly word: Uint32Array;
   private readonly lemma: Uint32Array;
@@ -109,12 +117,20 @@ class FactsBuilder {
     this.blockFirst[++this.block] = this.row;
   }
 
+  addCodeWord(text: string): void {
+    const id = this.localIds.get(text);
+    if (id !== undefined) this.inCode.add(id);
+  }
+
   finish(language: string): DocumentFacts {
+    const inCode = new Uint8Array(this.words.length);
+    for (const id of this.inCode) inCode[id] = 1;
     const { words, word, lemma, tag, flags, zones, start, end, blockFirst, blockKind, blockLevel, blockHash, links } =
       this;
     return {
       language,
       words,
+      inCode,
       word,
       lemma,
       tag,
