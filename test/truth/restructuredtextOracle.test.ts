@@ -9,10 +9,11 @@ import { commonWords } from './commonWords.js';
 
 const WORD = /[\p{L}\p{N}]+/gu;
 const root = path.resolve(import.meta.dirname, '../..');
-const PYTHON = '/usr/bin/python3';
+/** Debian's own Python has docutils from its packages; another may have it from elsewhere. */
+const PYTHON = ['/usr/bin/python3', 'python3'].find((one) => spawnSync(one, ['-c', 'import docutils']).status === 0);
 const SAMPLE = Number(process.env.ORACLE_FILES ?? 40);
 
-const hasOracle = spawnSync(PYTHON, ['-c', 'import docutils']).status === 0;
+const hasOracle = PYTHON !== undefined;
 if (!hasOracle) console.info('docutils (python3-docutils) is not installed: its comparison is skipped.');
 
 interface OracleResult {
@@ -22,7 +23,7 @@ interface OracleResult {
 
 function oracle(texts: readonly string[]): OracleResult {
   const script = path.join(root, 'test/truth/restructuredtextOracle.py');
-  const run = spawnSync(PYTHON, [script], { input: JSON.stringify(texts), maxBuffer: 1 << 28, encoding: 'utf8' });
+  const run = spawnSync(PYTHON!, [script], { input: JSON.stringify(texts), maxBuffer: 1 << 28, encoding: 'utf8' });
   if (run.status !== 0) throw new Error(run.stderr);
   return JSON.parse(run.stdout) as OracleResult;
 }

@@ -27,11 +27,36 @@ export function readBody(
     cx.problems.push({ span, message: `Text nested more than ${DEEPEST} levels deep is not read.` });
     return;
   }
+  const outer = cx.nextLanguage;
+  cx.nextLanguage = undefined;
   for (let line = from; line < to;) {
     if (lines.isBlank(line)) line++;
-    else if (lines.column[line]! > base) line = blockQuote(cx, lines, line, to, base, setting);
-    else line = element(cx, lines, line, to, base, setting) ?? textElement(cx, lines, line, to, base, setting);
+    else line = readElement(cx, lines, line, to, base, setting);
   }
+  cx.nextLanguage = outer;
+}
+
+/** Reads the element that begins on `line`, which is not blank; the line behind it. */
+export function readElement(
+  cx: DocumentContext,
+  lines: Lines,
+  line: number,
+  to: number,
+  base: number,
+  around: Setting,
+): number {
+  const language = cx.nextLanguage;
+  const setting = language === undefined ? around : { ...around, language };
+  const { length } = cx.blocks;
+  const silent = language !== undefined && cx.text.startsWith('..', lines.at[line]);
+  cx.nextLanguage = undefined;
+  const behind =
+    lines.column[line]! > base
+      ? blockQuote(cx, lines, line, to, base, setting)
+      : (element(cx, lines, line, to, base, setting) ?? textElement(cx, lines, line, to, base, setting));
+  // Comments and targets do not use up what was said of the element below them.
+  if (silent && cx.blocks.length === length) cx.nextLanguage ??= language;
+  return behind;
 }
 
 /** The line behind the element that begins with a mark on `line`, or undefined where the line is text. */

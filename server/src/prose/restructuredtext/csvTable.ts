@@ -1,13 +1,13 @@
 // The records of a `csv-table` directive, on lines of their own: fields between commas, which may be quoted.
 import { Zone } from '../zones.js';
-import type { DocumentContext, Setting } from './context.js';
+import { roleOf, type DocumentContext, type Setting } from './context.js';
 import { readPhrase } from './leaf.js';
 import { isBlank, type Lines } from './lines.js';
 
 /** Reads each field as a cell. A quoted field that goes on over a line's end is read line by line. */
 export function readRecords(cx: DocumentContext, lines: Lines, from: number, to: number, setting: Setting): void {
   const { text } = cx;
-  const role = { kind: 'tableCell', level: 0, zones: setting.zones | Zone.tableCell } as const;
+  const role = roleOf(setting, 'tableCell', Zone.tableCell);
   let quoted = false;
   for (let line = from; line < to; line++) {
     const lineEnd = lines.end[line]!;

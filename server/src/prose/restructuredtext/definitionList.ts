@@ -1,8 +1,9 @@
 // Definition lists and glossaries: terms with their definitions indented below.
+import { sendsOn } from '../glossary.js';
 import { Zone } from '../zones.js';
-import { inside, type DocumentContext, type Setting } from './context.js';
+import { inside, roleOf, type DocumentContext, type Setting } from './context.js';
 import { readPhrase } from './leaf.js';
-import { indentedBlock, type Lines } from './lines.js';
+import { indentedBlock, type Indented, type Lines } from './lines.js';
 
 /** A longer line above an indented one is a sentence whose author only indented what follows. In words. */
 const LONGEST_TERM = 8;
@@ -19,11 +20,28 @@ export function definitionItem(
 ): number {
   const at = lines.at[line]!;
   const end = classifierStart(cx.text, at, lines.end[line]!);
-  if (isTerm(cx.text.slice(at, end))) readTerm(cx, at, end, setting);
+  const term = isTerm(cx.text.slice(at, end));
+  const entry = term && cx.glossaryLevel > 0 && setting.glossary === undefined && setting.kind === 'paragraph';
+  if (term) readTerm(cx, at, end, entry ? { ...setting, glossary: 'headword' } : setting);
   else readPhrase(cx, at, end, setting);
   const block = indentedBlock(lines, line + 1, to, base);
-  cx.readBody(lines, line + 1, block.to, block.margin, inside(setting, { kind: 'definition' }));
+  if (entry) readMeaning(cx, lines, line + 1, block, setting);
+  else cx.readBody(lines, line + 1, block.to, block.margin, inside(setting, { kind: 'definition' }));
   return block.next;
+}
+
+/** Reads what a glossary says of a headword: a definition, or no more than another headword to look at. */
+function readMeaning(
+  cx: DocumentContext,
+  lines: Lines,
+  from: number,
+  { to, margin }: Pick<Indented, 'to' | 'margin'>,
+  setting: Setting,
+): void {
+  const first = cx.blocks.length;
+  cx.readBody(lines, from, to, margin, inside(setting, { kind: 'definition', glossary: 'definition' }));
+  const only = cx.blocks.length === first + 1 ? cx.blocks[first]! : undefined;
+  if (only && sendsOn(only.content.text)) cx.blocks[first] = { ...only, content: { ...only.content, glossary: 'see' } };
 }
 
 /** Reads a `glossary` directive's body: one or more terms, each on a line, above each definition. */
@@ -37,20 +55,20 @@ export function readGlossary(
 ): void {
   for (let line = from; line < to;) {
     const block = indentedBlock(lines, line, to, base);
-    if (block.to > line) cx.readBody(lines, line, block.to, block.margin, inside(setting, { kind: 'definition' }));
+    if (block.to > line) readMeaning(cx, lines, line, block, setting);
     line = block.next;
     if (line >= to) break;
     const at = lines.at[line]!;
     if (cx.text.startsWith('.. ', at)) line = indentedBlock(lines, line + 1, to, base).next;
     else {
-      readTerm(cx, at, classifierStart(cx.text, at, lines.end[line]!), setting);
+      readTerm(cx, at, classifierStart(cx.text, at, lines.end[line]!), { ...setting, glossary: 'headword' });
       line++;
     }
   }
 }
 
 function readTerm(cx: DocumentContext, start: number, end: number, setting: Setting): void {
-  readPhrase(cx, start, end, { kind: 'definedTerm', level: 0, zones: setting.zones | Zone.definedTerm });
+  readPhrase(cx, start, end, roleOf(setting, 'definedTerm', Zone.definedTerm));
 }
 
 function isTerm(text: string): boolean {

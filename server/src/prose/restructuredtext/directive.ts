@@ -1,6 +1,6 @@
 // One directive: its argument, its options and its body, each read for what it is.
 import { Zone } from '../zones.js';
-import { inside, type DocumentContext, type Setting } from './context.js';
+import { inside, roleOf, type DocumentContext, type Setting } from './context.js';
 import { readRecords } from './csvTable.js';
 import { readGlossary } from './definitionList.js';
 import { directiveKind, type DirectiveKind } from './directiveKinds.js';
@@ -19,6 +19,9 @@ export interface DirectiveLines {
 
 const UNKNOWN: DirectiveKind = { argument: 'opaque', body: 'prose' };
 const SAFETY_TITLE = /^(?:danger|warning|caution|notice)\b/i;
+const SAFETY_CLASS = /(?:^|\s)(?:danger|warning|caution|notice)(?:\s|$)/i;
+/** A class that says which language an element is in (docutils, "Document Tree", `classes`). */
+const LANGUAGE_CLASS = /(?:^|\s)language-([A-Za-z]{2,3}(?:-[A-Za-z0-9]{1,8})*)(?:\s|$)/;
 
 /** Reads the directive `name`, whose matter begins behind offset `after`. */
 export function readDirective(
@@ -38,12 +41,16 @@ export function readDirective(
   let options = first;
   while (options < headEnd && !isOption(text, lines, options, base)) options++;
   const head = { lines, from: first, to: options };
+  const title = text.slice(lines.at[first], lines.at[first]! + 9);
+  const classes = classesOf(cx, { lines, from: options, to: headEnd });
   let zones = setting.zones;
-  if (kind.safety || (name === 'admonition' && SAFETY_TITLE.test(text.slice(lines.at[first], lines.at[first]! + 9)))) {
+  if (kind.safety || (name === 'admonition' && (SAFETY_TITLE.test(title) || SAFETY_CLASS.test(classes)))) {
     zones |= Zone.safetyMessage;
   }
   if (name === 'epigraph' || name === 'pull-quote') zones |= Zone.quotation;
-  const within = { ...setting, zones };
+  const named = kind.argument === 'classes' ? text.slice(lines.at[first], lines.end[first]) : '';
+  const language = LANGUAGE_CLASS.exec(`${classes} ${named}`)?.[1] ?? setting.language;
+  const within = { ...setting, zones, language };
   if (kind.argument !== 'none') readArgument(cx, head, kind, within);
   else if (options > first && kind.body === 'prose') {
     // Without options between them, the first lines and the rest are one body.
@@ -53,12 +60,23 @@ export function readDirective(
   }
   if (kind.options) readOptions(cx, lines, options, headEnd, kind.options, within);
   const from = skipBlank(lines, kind.body === 'meta' || kind.body === 'glossary' ? options : headEnd, to);
+  // Classes without a body are those of the element that follows.
+  if (from >= to && name.endsWith('class') && language !== setting.language) cx.nextLanguage = language;
   if (from >= to || (!known && !looksLikeProse(text, lines, from))) return;
   readDirectiveBody(cx, kind, { lines, line: from, to, margin: base }, within);
 }
 
 function isOption(text: string, lines: Lines, line: number, base: number): boolean {
   return lines.column[line]! <= base && fieldMarkEnd(text, lines.at[line]!, lines.end[line]!) >= 0;
+}
+
+/** What the option `:class:` says. */
+function classesOf(cx: DocumentContext, { lines, from, to }: Range): string {
+  for (let line = from; line < to; line++) {
+    const at = lines.at[line]!;
+    if (cx.text.startsWith(':class:', at)) return cx.text.slice(at + 7, lines.end[line]);
+  }
+  return '';
 }
 
 interface Range {
@@ -71,14 +89,14 @@ function readArgument(cx: DocumentContext, { lines, from, to }: Range, kind: Dir
   if (from >= to) return;
   switch (kind.argument) {
     case 'caption':
-      readLeaf(cx, lines, from, to, { kind: 'caption', level: 0, zones: setting.zones });
+      readLeaf(cx, lines, from, to, roleOf(setting, 'caption'));
       break;
     case 'title':
     case 'paragraph':
-      readLeaf(cx, lines, from, to, { kind: kind.argument, level: 0, zones: setting.zones });
+      readLeaf(cx, lines, from, to, roleOf(setting, kind.argument));
       break;
     case 'heading':
-      readLeaf(cx, lines, from, to, { kind: 'heading', level: 6, zones: setting.zones | Zone.heading });
+      readLeaf(cx, lines, from, to, { ...roleOf(setting, 'heading', Zone.heading), level: 6 });
       break;
     case 'version':
       readBehindVersion(cx, { lines, from, to }, setting);
@@ -115,10 +133,10 @@ function readOptions(
     if (Object.hasOwn(wanted, name)) {
       const kind = wanted[name]!;
       moveStart(cx.text, lines, line, colon + 1, lines.column[line]!);
-      const zones = setting.zones | (kind === 'alternativeText' ? Zone.alternativeText : 0);
+      const role = roleOf(setting, kind, kind === 'alternativeText' ? Zone.alternativeText : 0);
       const start = lines.isBlank(line) ? line + 1 : line;
       if (kind === 'tableCell') readRecords(cx, lines, start, next, setting);
-      else if (start < next) readLeaf(cx, lines, start, next, { kind, level: 0, zones });
+      else if (start < next) readLeaf(cx, lines, start, next, role);
     }
     line = next;
   }
@@ -173,11 +191,9 @@ function readMeta(cx: DocumentContext, lines: Lines, from: number, to: number, s
     if (colon < 0 || !/^description(?: |$)/.test(cx.text.slice(at + 1, colon))) continue;
     let start = colon + 1;
     while (start < lines.end[line]! && isBlank(cx.text.charCodeAt(start))) start++;
-    readPhrase(cx, start, lines.end[line]!, {
-      kind: 'description',
-      level: 0,
-      zones: setting.zones | Zone.frontMatter,
-    });
+    const role = roleOf(setting, 'description', Zone.frontMatter);
+    const tag = /\slang=([\w-]+)/.exec(cx.text.slice(at, colon))?.[1];
+    readPhrase(cx, start, lines.end[line]!, { ...role, language: tag ?? role.language });
   }
 }
 

@@ -1,7 +1,7 @@
 // The directives of docutils, Sphinx and its common extensions: what of them is prose.
 
-/** What a directive's argument is: nothing it takes, no prose, a title over what follows, or text behind a version number. */
-export type Argument = 'none' | 'opaque' | 'caption' | 'heading' | 'title' | 'paragraph' | 'version';
+/** What a directive's argument is: nothing it takes, no prose, names of classes, a title over what follows, or text behind a version number. */
+export type Argument = 'none' | 'opaque' | 'classes' | 'caption' | 'heading' | 'title' | 'paragraph' | 'version';
 
 /** What a directive's body is. */
 export type Body = 'none' | 'prose' | 'caption' | 'cells' | 'records' | 'glossary' | 'meta';
@@ -49,7 +49,8 @@ define('centered', { argument: 'paragraph', body: 'none' });
 define('title', { argument: 'title', body: 'none' });
 define('glossary', { argument: 'none', body: 'glossary' });
 define('meta', { argument: 'none', body: 'meta' });
-define('container class rst-class only ifconfig grid grid-item tab-content', { argument: 'opaque', body: 'prose' });
+define('container class rst-class', { argument: 'classes', body: 'prose' });
+define('only ifconfig grid grid-item tab-content', { argument: 'opaque', body: 'prose' });
 // What describes an object names it in its argument, in code, and says the rest in prose.
 define('function method classmethod staticmethod attribute property data exception decorator decoratormethod module', {
   argument: 'opaque',
@@ -63,19 +64,18 @@ define('automodule autoclass autofunction automethod autoattribute autodata auto
   argument: 'opaque',
   body: 'prose',
 });
-define('code code-block sourcecode code-tab highlight literalinclude include raw math parsed-literal productionlist', {
+define('code code-block sourcecode literalinclude graphviz digraph graph mermaid uml plantuml inheritance-diagram', {
   argument: 'opaque',
   body: 'none',
+  options: { caption: 'caption', alt: 'alternativeText' },
 });
-define('testcode testsetup testoutput testcleanup doctest prompt console graphviz digraph graph mermaid uml plantuml', {
-  argument: 'opaque',
-  body: 'none',
-});
+define('code-tab highlight include raw math parsed-literal productionlist', { argument: 'opaque', body: 'none' });
+define('testcode testsetup testoutput testcleanup doctest prompt console', { argument: 'opaque', body: 'none' });
 define('role default-role default-domain index tabularcolumns sectnum currentmodule plot ipython jinja autosummary', {
   argument: 'opaque',
   body: 'none',
 });
-define('codeauthor sectionauthor moduleauthor acks target-notes todolist inheritance-diagram aafig ditaa', {
+define('codeauthor sectionauthor moduleauthor acks target-notes todolist aafig ditaa', {
   argument: 'opaque',
   body: 'none',
 });

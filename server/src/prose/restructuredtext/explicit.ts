@@ -5,6 +5,7 @@ import { indentedBlock, indentedLinesEnd, isBlank, type Lines } from './lines.js
 
 const NAME = '[\\p{L}\\p{N}]+(?:[-._+:][\\p{L}\\p{N}]+)*';
 const FOOTNOTE = new RegExp(`\\[(?:#(?:${NAME})?|\\*|[0-9]+|${NAME})\\](?=[ \\t\\n]|$)`, 'yu');
+const SUBSTITUTE_IMAGE = /\|[^|\n]+\|[ \t]+image::(?=[ \t])/y;
 const DIRECTIVE = new RegExp(`(${NAME}) ?::(?=[ \\t\\n\\f\\v]|$)`, 'yu');
 
 /** Reads the explicit markup block that begins on `line`; the line behind it. */
@@ -30,7 +31,13 @@ export function readExplicit(
   const named = at + 1 < end && !isBlank(second);
   if (unit === 95 && named) return indentedLinesEnd(lines, line + 1, to, base);
   const block = indentedBlock(lines, line + 1, to, base);
-  if (unit === 124 && named) return block.next;
+  if (unit === 124 && named) {
+    SUBSTITUTE_IMAGE.lastIndex = at;
+    const image = SUBSTITUTE_IMAGE.exec(text);
+    const parts = { lines, line, to: Math.max(block.to, line + 1), margin: block.margin };
+    if (image) readDirective(cx, 'image', at + image[0].length, parts, setting);
+    return block.next;
+  }
   if (unit === 91) {
     FOOTNOTE.lastIndex = at;
     const label = FOOTNOTE.exec(text);

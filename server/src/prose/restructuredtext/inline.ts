@@ -274,10 +274,13 @@ class InlineReader {
     const words = this.text.slice(inner, close);
     // Without a role a single word is most often meant as code.
     const kind = name === '' ? (/\s/.test(words) ? 'text' : 'code') : roleKind(name);
-    const parts = kind === 'code' || kind === 'text' ? undefined : this.titleAndTarget(inner, close);
+    const parts = kind === 'code' || kind === 'text' || kind === 'work' ? undefined : this.titleAndTarget(inner, close);
     switch (kind) {
       case 'text':
         this.inner(from, inner, close, to, 0, IN_TEXT);
+        return;
+      case 'work':
+        this.inner(from, inner, close, to, Zone.quotation, IN_TEXT);
         return;
       case 'uiLabel':
         this.inner(from, inner, close, to, Zone.uiLabel, name === 'kbd' ? IN_TEXT : IN_LABEL);

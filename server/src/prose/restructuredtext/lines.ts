@@ -27,10 +27,10 @@ export class Lines {
   }
 }
 
-/** The lines of a text whose line breaks are `\n`. */
-export function linesOf(text: string): Lines {
+/** The lines of `[from, to)` of a text, whose line breaks are `\n`; both stand at a line's start or at the text's end. */
+export function linesOf(text: string, from: number, to: number): Lines {
   const lines = new Lines();
-  for (let start = text.charCodeAt(0) === 0xfeff ? 1 : 0; start < text.length;) {
+  for (let start = from; start < to;) {
     let stop = text.indexOf('\n', start);
     if (stop < 0) stop = text.length;
     let at = start;

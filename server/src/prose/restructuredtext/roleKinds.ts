@@ -1,10 +1,10 @@
 // The interpreted text roles of docutils, Sphinx and its common extensions: what of them is prose.
 
 /**
- * What interpreted text is: text; a user interface's label; a term where it is defined or used; a reference or the name of
+ * What interpreted text is: text; the title of a work; a user interface's label; a term where it is defined or used; a reference or the name of
  * an object in code, prose only where they carry a text of their own; or code.
  */
-export type RoleKind = 'text' | 'uiLabel' | 'definedTerm' | 'term' | 'reference' | 'object' | 'code';
+export type RoleKind = 'text' | 'work' | 'uiLabel' | 'definedTerm' | 'term' | 'reference' | 'object' | 'code';
 
 const KINDS = new Map<string, RoleKind>();
 
@@ -12,8 +12,8 @@ function define(names: string, kind: RoleKind): void {
   for (const name of names.split(' ')) KINDS.set(name, kind);
 }
 
-define('emphasis strong sub subscript sup superscript title title-reference t abbr abbreviation ac acronym', 'text');
-define('index', 'text');
+define('emphasis strong sub subscript sup superscript abbr abbreviation ac acronym index', 'text');
+define('title title-reference t', 'work');
 define('guilabel menuselection kbd', 'uiLabel');
 define('dfn', 'definedTerm');
 define('term', 'term');

@@ -23,6 +23,7 @@ export function simpleTable(
 ): number {
   const bottom = lastBorder(cx.text, lines, line, to, base);
   if (bottom === undefined) {
+    if (setting.depth === 0) cx.reach = Number.POSITIVE_INFINITY;
     const end = paragraphEnd(lines, line, to);
     const span = { start: lines.at[line]!, end: lines.end[end - 1]! };
     cx.problems.push({ span, message: 'This table has no line of “=” at its end, so it is not read.' });

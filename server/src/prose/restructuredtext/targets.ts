@@ -2,10 +2,15 @@
 
 const TARGET = /^[ \t]*\.\. +_(`[^`\n]+`|(?:[^:`\\\n]|:(?!\s)|\\.)+):[ \t]+(\S.*)$/gm;
 
+/** True where a text may hold targets. */
+export function hasTargets(text: string): boolean {
+  return text.includes('.. _');
+}
+
 /** Folded name → address, of all targets on lines of their own that name an address. The first of a name counts. */
 export function targetsIn(text: string): Map<string, string> {
   const targets = new Map<string, string>();
-  if (!text.includes('.. _')) return targets;
+  if (!hasTargets(text)) return targets;
   for (const [, name, address] of text.matchAll(TARGET)) {
     const folded = foldName(name!.replace(/^`|`$/g, ''));
     if (!targets.has(folded)) targets.set(folded, address!.trimEnd());

@@ -1,6 +1,7 @@
 // Section titles: a line with an adornment under it, or over and under it; and lines that merely divide.
 import { Zone } from '../zones.js';
-import type { DocumentContext, Setting } from './context.js';
+import { isGlossaryTitle } from '../glossary.js';
+import { roleOf, type DocumentContext, type Setting } from './context.js';
 import { readLeaf } from './leaf.js';
 import { widthOf, type Lines } from './lines.js';
 import { isAdornment } from './markers.js';
@@ -48,6 +49,14 @@ export function overlinedTitle(
 /** Levels are given to adornments in the order in which a document first uses them. */
 function readTitle(cx: DocumentContext, lines: Lines, line: number, style: string, setting: Setting): void {
   let level = cx.titleStyles.indexOf(style) + 1;
-  if (level === 0) level = cx.titleStyles.push(style);
-  readLeaf(cx, lines, line, line + 1, { kind: 'heading', level, zones: setting.zones | Zone.heading });
+  if (level === 0) {
+    cx.titleStyles = [...cx.titleStyles, style];
+    level = cx.titleStyles.length;
+  }
+  const { length } = cx.blocks;
+  readLeaf(cx, lines, line, line + 1, { ...roleOf(setting, 'heading', Zone.heading), level });
+  if (setting.depth > 0) return;
+  const title = cx.blocks[length]?.content.text;
+  if (title !== undefined && isGlossaryTitle(title)) cx.glossaryLevel = level;
+  else if (level <= cx.glossaryLevel) cx.glossaryLevel = 0;
 }
