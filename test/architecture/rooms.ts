@@ -43,7 +43,7 @@ export const ROOMS: Readonly<Record<string, RoomRule>> = {
   node: {
     rooms: ['base', 'text', 'engine', 'lsp', 'cli'],
     types: upToRewrite,
-    packages: [/^node:/, /^ignore$/, /^chardet$/, /^iconv-lite$/, /^vscode-languageserver/],
+    packages: [/^node:/, /^ignore$/, /^picomatch$/, /^chardet$/, /^iconv-lite$/, /^vscode-languageserver/],
   },
 };
 

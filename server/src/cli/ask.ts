@@ -3,7 +3,7 @@ import { QUESTION_KINDS } from '../engine/engine.js';
 import { ExampleFinder } from '../engine/examples.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import type { Question, QuestionKind } from '../mining/question.js';
-import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
@@ -19,17 +19,16 @@ export const ask: Subcommand = {
       help: `kinds of question, by commas: ${QUESTION_KINDS.join(', ')}; all but look-alike by default`,
     },
     most: { value: 'N', help: 'list no more than N questions (all by default)' },
-    'explain-files': { help: 'also say which files were left out, and why' },
+    ...FILE_OPTIONS,
   },
-  async run({ options, operands }, host) {
-    const folders = requireFolders(operands);
+  async run(given, host) {
+    const { options } = given;
     const kinds = readKinds(options.get('kinds'));
     const most = readCount(options.get('most'));
-    const survey = await surveyOrStop(host, folders, true);
+    const survey = await surveyOrStop(host, given, true);
     if (survey === undefined) return Exit.cannotRun;
     const snapshot = kinds === undefined ? survey.snapshot : survey.snapshot.asking(kinds);
     const open = snapshot.agendaAt(survey.rootUri).open.slice(0, most);
-    sayLeftOut(host, survey.leftOut, options.has('explain-files'));
     if (options.get('format') === 'json') host.write(`${JSON.stringify(toJson(snapshot, open), undefined, 2)}\n`);
     else host.write(renderQuestions(snapshot, open, host));
     return Exit.clean;

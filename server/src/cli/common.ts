@@ -2,23 +2,39 @@
 import { LineIndex } from '../text/lineIndex.js';
 import type { CliHost, LeftOutFile, Survey } from './host.js';
 import { UsageError } from './options.js';
+import type { Given, OptionRule } from './options.js';
 
 /** At most this many left-out files are named without being asked. */
 const NAMED_LEFT_OUT = 5;
 
+/** The options by which a subcommand that reads folders lets files be chosen. */
+export const FILE_OPTIONS: Readonly<Record<string, OptionRule>> = {
+  exclude: {
+    value: 'GLOBS',
+    help: 'leave out what these globs match below a folder, by commas: "archive/**,*.draft.md"',
+  },
+  'change-logs': { help: 'read change logs too' },
+  'explain-files': { help: 'say which files were left out, and why' },
+};
+
 /** The operands of a subcommand that takes folders. @throws UsageError where none is named. */
-export function requireFolders(operands: readonly string[]): readonly string[] {
+function requireFolders(operands: readonly string[]): readonly string[] {
   if (operands.length === 0) throw new UsageError('Name a folder (or a file) of documentation.');
   return operands;
 }
 
-/** Surveys the folders; where a termbase is broken, says so by file and line and gives nothing. */
+/** Surveys the folders and says what was left out; where a termbase is broken, says so by file and line and gives nothing. */
 export async function surveyOrStop(
   host: CliHost,
-  folders: readonly string[],
+  { options, operands }: Given,
   mine: boolean,
 ): Promise<Survey | undefined> {
-  const survey = await host.survey(folders, mine);
+  const exclude = options.get('exclude');
+  const survey = await host.survey(requireFolders(operands), mine, {
+    exclude: typeof exclude === 'string' ? splitGlobs(exclude) : [],
+    changeLogs: options.has('change-logs'),
+  });
+  sayLeftOut(host, survey.leftOut, options.has('explain-files'));
   let broken = false;
   for (const { uri, text, problems } of survey.snapshot.termbases) {
     const lines = new LineIndex(text);
@@ -32,13 +48,34 @@ export async function surveyOrStop(
   return broken ? undefined : survey;
 }
 
+/** Globs by commas; those inside braces part none. */
+function splitGlobs(globs: string): string[] {
+  return (globs.match(/(?:\{[^}]*\}|[^,])+/g) ?? []).map((glob) => glob.trim()).filter((glob) => glob !== '');
+}
+
+/** Beginnings of reasons that say what a file is: such files are left out by rule, and counted rather than named. */
+const BY_RULE = [
+  ['an older copy', 'older copies of pages'],
+  ['a change log', 'change logs'],
+  ['says that it is generated', 'generated pages'],
+  ['excluded', 'excluded files and folders'],
+] as const;
+
 /** Says what was not read. Files that the user would miss are named at once, ignored ones only where `all` is asked for. */
-export function sayLeftOut(host: CliHost, leftOut: readonly LeftOutFile[], all: boolean): void {
-  const missed = leftOut.filter(
-    ({ reason }) => all || (!reason.startsWith('ignored') && !reason.startsWith('a folder')),
-  );
-  for (const { path, reason } of all ? missed : missed.slice(0, NAMED_LEFT_OUT))
-    host.note(`left out: ${path}: ${reason}\n`);
-  const more = all ? 0 : missed.length - NAMED_LEFT_OUT;
-  if (more > 0) host.note(`left out: ${more} more; --explain-files names all\n`);
+function sayLeftOut(host: CliHost, leftOut: readonly LeftOutFile[], all: boolean): void {
+  if (all) {
+    for (const { path, reason } of leftOut) host.note(`left out: ${path}: ${reason}\n`);
+    return;
+  }
+  const isByRule = ({ reason }: LeftOutFile): boolean => BY_RULE.some(([start]) => reason.startsWith(start));
+  const isUsual = ({ reason }: LeftOutFile): boolean => reason.startsWith('ignored') || reason.startsWith('a folder');
+  const missed = leftOut.filter((each) => !isByRule(each) && !isUsual(each));
+  for (const { path, reason } of missed.slice(0, NAMED_LEFT_OUT)) host.note(`left out: ${path}: ${reason}\n`);
+  const counted = BY_RULE.map(([start, plural]) => {
+    const files = leftOut.filter(({ reason }) => reason.startsWith(start)).length;
+    return files === 0 ? '' : `${files} ${plural}`;
+  });
+  const more = missed.length - NAMED_LEFT_OUT;
+  const rest = [...counted, more > 0 ? `${more} more` : ''].filter((part) => part !== '');
+  if (rest.length > 0) host.note(`left out: ${rest.join(', ')}; --explain-files names all\n`);
 }

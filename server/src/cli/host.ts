@@ -1,4 +1,5 @@
 // What the command line needs of the world outside: two streams, documents, and a place to write.
+import type { FilePolicy } from '../text/filePolicy.js';
 import type { Snapshot } from '../engine/snapshot.js';
 
 /** A file or folder that was not read, and why. */
@@ -27,10 +28,10 @@ export interface CliHost {
   emphasise(text: string): string;
   faint(text: string): string;
   /**
-   * Reads documents and termbases under the paths; `mine` says whether questions are wanted.
+   * Reads documents and termbases under the paths; `mine` says whether questions are wanted, `files` what is left out by choice.
    * @throws CannotSurvey where a path is missing or cannot be read.
    */
-  survey(paths: readonly string[], mine: boolean): Promise<Survey>;
+  survey(paths: readonly string[], mine: boolean, files: FilePolicy): Promise<Survey>;
   /** A file's path as the user would write it: relative to the working folder where it lies below it. */
   pathOf(uri: string): string;
   /**

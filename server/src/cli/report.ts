@@ -1,6 +1,6 @@
 // evenword report: the state of a documentation set's wording, written as files to keep and to forward.
 import { makeReport } from '../report/report.js';
-import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
@@ -10,17 +10,15 @@ export const report: Subcommand = {
   operands: 'DIR…',
   options: {
     out: { value: 'FOLDER', help: 'where to write; made where it is missing' },
-    'explain-files': { help: 'also say which files were left out, and why' },
+    ...FILE_OPTIONS,
   },
-  async run({ options, operands }, host) {
-    const folders = requireFolders(operands);
-    const out = options.get('out');
+  async run(given, host) {
+    const out = given.options.get('out');
     if (typeof out !== 'string' || out === '') {
       throw new UsageError('Say where to write the report: evenword report DIR --out FOLDER.');
     }
-    const survey = await surveyOrStop(host, folders, true);
+    const survey = await surveyOrStop(host, given, true);
     if (survey === undefined) return Exit.cannotRun;
-    sayLeftOut(host, survey.leftOut, options.has('explain-files'));
     const files = makeReport(survey.snapshot, survey.rootUri, { generatedAt: host.now() });
     await host.writeFiles(out, files);
     for (const name of files.keys()) host.note(`wrote ${out.replace(/[\\/]+$/, '')}/${name}\n`);

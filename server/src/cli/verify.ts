@@ -3,7 +3,7 @@ import type { Finding } from '../findings/finding.js';
 import { LineIndex } from '../text/lineIndex.js';
 import type { Position } from '../text/lineIndex.js';
 import { toSarif } from '../report/sarif.js';
-import { requireFolders, sayLeftOut, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 
@@ -26,11 +26,12 @@ export const verify: Subcommand = {
       choices: ['text', 'json', 'sarif'],
       help: 'text for people (default), json for programs, sarif (2.1.0) for code review',
     },
+    ...FILE_OPTIONS,
   },
-  async run({ options, operands }, host) {
-    const survey = await surveyOrStop(host, requireFolders(operands), false);
+  async run(given, host) {
+    const { options } = given;
+    const survey = await surveyOrStop(host, given, false);
     if (survey === undefined) return Exit.cannotRun;
-    sayLeftOut(host, survey.leftOut, false);
     const { snapshot } = survey;
     const found: PlacedFinding[] = [];
     for (const [uri, { source }] of [...snapshot.documents].sort(([a], [b]) => (a < b ? -1 : 1))) {

@@ -4,6 +4,8 @@ import { Engine, DEFAULT_SETTINGS } from '../engine/engine.js';
 import type { DocumentUpdate } from '../engine/engine.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import { LineIndex } from '../text/lineIndex.js';
+import { DEFAULT_FILES } from '../text/filePolicy.js';
+import type { FilePolicy } from '../text/filePolicy.js';
 import { formatOf } from '../text/sourceText.js';
 import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri, isBelow } from '../text/uri.js';
@@ -45,6 +47,7 @@ export class FolderSession {
   private readonly renewed = new Set<string>();
   private readonly lines = new WeakMap<SourceText, LineIndex>();
   private settings: FolderSettings = {};
+  private files: FilePolicy = DEFAULT_FILES;
   private idle: NodeJS.Timeout | undefined;
   private surveying: AbortController | undefined;
   private settling: AbortController | undefined;
@@ -92,11 +95,17 @@ export class FolderSession {
     return this.open.has(termbaseUri) || this.engine.snapshot.termbases.some(({ uri }) => uri === termbaseUri);
   }
 
-  configure(settings: FolderSettings): void {
+  /** Takes settings in. True where they choose other files than before: a survey must find them. */
+  configure(settings: FolderSettings, excluded: readonly string[] = []): boolean {
     this.settings = settings;
+    const files = { exclude: excluded, changeLogs: settings.read?.changeLogs === true };
+    const otherFiles =
+      files.changeLogs !== this.files.changeLogs || files.exclude.join('\n') !== this.files.exclude.join('\n');
+    this.files = files;
     const least = settings.questions?.leastConfidence;
     this.engine.apply({ settings: { ...DEFAULT_SETTINGS, ...(least !== undefined && { leastConfidence: least }) } });
     this.showDecisions();
+    return otherFiles;
   }
 
   /**
@@ -131,7 +140,7 @@ export class FolderSession {
   }
 
   private async readAll(report: (message: string, percent: number) => void, signal: AbortSignal): Promise<void> {
-    const { sources, termbases, leftOut } = await this.host.readFolder(this.uri, signal);
+    const { sources, termbases, leftOut } = await this.host.readFolder(this.uri, this.files, signal);
     signal.throwIfAborted();
     for (const { path, reason } of leftOut) this.editor.log(`Left out: ${path}: ${reason}`);
     const isOld = ({ uri }: { uri: string }): boolean => !this.open.has(uri) && !this.renewed.has(uri);
@@ -210,9 +219,9 @@ export class FolderSession {
       // Outside all folders only what is open counts: nothing there is surveyed.
       const isLoose = this.uri === '';
       if (isTermbase(uri)) {
-        termbases.push({ uri, text: isLoose ? undefined : await this.host.readTermbase(this.uri, uri) });
+        termbases.push({ uri, text: isLoose ? undefined : await this.host.readTermbase(this.uri, uri, this.files) });
       } else {
-        documents.push({ uri, source: isLoose ? undefined : await this.host.readDocument(this.uri, uri) });
+        documents.push({ uri, source: isLoose ? undefined : await this.host.readDocument(this.uri, uri, this.files) });
       }
     }
     if (this.ended.signal.aborted) return;
@@ -250,7 +259,7 @@ export class FolderSession {
   private setAside(uri: string): void {
     this.aside.add(uri);
     if (this.uri === '') return;
-    this.host.whyLeftOut(this.uri, uri).then(
+    this.host.whyLeftOut(this.uri, uri, this.files).then(
       (reason) => {
         const document = this.open.get(uri);
         if (reason === undefined && this.aside.delete(uri) && document !== undefined) this.edited(document);

@@ -1,6 +1,7 @@
 // What the language server needs of the world outside an editor: documents on disk and workers.
 import type { Profiles } from '../engine/factsOf.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
+import type { FilePolicy } from '../text/filePolicy.js';
 import type { SourceText } from '../text/sourceText.js';
 
 /** The files of a workspace folder. */
@@ -15,13 +16,13 @@ export interface ServerHost {
   /** Language profiles, made once: the English one takes half a second and some megabytes. */
   readonly profiles: Profiles;
   /** Reads all documents and termbases of a folder. */
-  readFolder(uri: string, signal: AbortSignal): Promise<FolderFiles>;
+  readFolder(uri: string, files: FilePolicy, signal: AbortSignal): Promise<FolderFiles>;
   /** Reads one document of a folder again; undefined where it is gone, unreadable or left out. */
-  readDocument(folder: string, uri: string): Promise<SourceText | undefined>;
+  readDocument(folder: string, uri: string, files: FilePolicy): Promise<SourceText | undefined>;
   /** Reads one termbase file again; undefined where it is gone or lies in a part of the folder that is left out. */
-  readTermbase(folder: string, uri: string): Promise<string | undefined>;
+  readTermbase(folder: string, uri: string, files: FilePolicy): Promise<string | undefined>;
   /** Why a survey of the folder would not come to a document, or undefined where it would. */
-  whyLeftOut(folder: string, uri: string): Promise<string | undefined>;
+  whyLeftOut(folder: string, uri: string, files: FilePolicy): Promise<string | undefined>;
   /** Gathers facts, on workers where that pays. */
   gather(
     sources: readonly SourceText[],

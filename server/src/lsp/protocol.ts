@@ -35,6 +35,7 @@ export interface ClientOptions {
 export interface FolderSettings {
   readonly hints?: { readonly mixedTerms?: boolean };
   readonly questions?: { readonly leastConfidence?: number };
+  readonly read?: { readonly changeLogs?: boolean };
 }
 
 /** Request `evenword/report`: the terminology report of a workspace folder. */

@@ -14,6 +14,9 @@ import { STATE_NOTIFICATION, WATCHED_FILES } from './protocol.js';
 import type { FolderSettings } from './protocol.js';
 import { Publisher } from './publisher.js';
 
+/** The editor's own setting for files that it does not show: an object from globs to true. */
+const EXCLUDED = 'files.exclude';
+
 /** The sessions of one connection. A document belongs to the deepest folder that holds it, or to none. */
 export class Sessions {
   private readonly folders = new Map<string, FolderSession>();
@@ -89,7 +92,9 @@ export class Sessions {
       await this.connection.client.register(DidChangeWatchedFilesNotification.type, { watchers });
     }
     if (workspace?.didChangeConfiguration?.dynamicRegistration === true) {
-      await this.connection.client.register(DidChangeConfigurationNotification.type, { section: 'evenword' });
+      await this.connection.client.register(DidChangeConfigurationNotification.type, {
+        section: ['evenword', EXCLUDED],
+      });
     }
     if (workspace?.workspaceFolders === true) {
       this.connection.workspace.onDidChangeWorkspaceFolders(({ added, removed }) => {
@@ -112,7 +117,9 @@ export class Sessions {
 
   /** Reads the settings of all folders anew. */
   async configureAll(): Promise<void> {
-    for (const session of [this.loose, ...this.folders.values()]) await this.configure(session);
+    for (const session of [this.loose, ...this.folders.values()]) {
+      if (await this.configure(session)) void session.survey();
+    }
   }
 
   end(): void {
@@ -132,14 +139,18 @@ export class Sessions {
     }
   }
 
-  private async configure(session: FolderSession): Promise<void> {
-    if (this.client.workspace?.configuration !== true) return;
+  /** True where a session's settings choose other files than before. */
+  private async configure(session: FolderSession): Promise<boolean> {
+    if (this.client.workspace?.configuration !== true) return false;
     const scope = session.uri === '' ? {} : { scopeUri: session.uri };
-    const settings = (await this.connection.workspace.getConfiguration({
-      section: 'evenword',
-      ...scope,
-    })) as FolderSettings | null;
-    session.configure(settings ?? {});
+    const [settings, excluded] = (await this.connection.workspace.getConfiguration(
+      ['evenword', EXCLUDED].map((section) => ({ section, ...scope })),
+    )) as [FolderSettings | null, Readonly<Record<string, unknown>> | null];
+    const globs = Object.entries(excluded ?? {}).filter(([, value]) => value === true);
+    return session.configure(
+      settings ?? {},
+      globs.map(([glob]) => glob),
+    );
   }
 
   private remove(folderUri: string): void {

@@ -5,6 +5,7 @@ import { fileURLToPath } from 'node:url';
 import type { CliHost, Survey } from '../cli/host.js';
 import { CannotSurvey } from '../cli/host.js';
 import { Profiles } from '../engine/factsOf.js';
+import type { FilePolicy } from '../text/filePolicy.js';
 import { CannotRead, plainReason } from './files.js';
 import { surveyFolders } from './survey.js';
 
@@ -23,8 +24,8 @@ export function nodeHost(): CliHost {
     progress,
     emphasise: (text) => (colours ? `\u001b[1m${text}\u001b[22m` : text),
     faint: (text) => (colours ? `\u001b[2m${text}\u001b[22m` : text),
-    survey(paths, mine) {
-      return surveyForCli(paths, mine, this.progress.bind(this));
+    survey(paths, mine, files) {
+      return surveyForCli(paths, mine, files, this.progress.bind(this));
     },
     pathOf(uri) {
       if (!uri.startsWith('file:')) return uri;
@@ -68,11 +69,13 @@ async function makeFolder(folder: string): Promise<void> {
 async function surveyForCli(
   paths: readonly string[],
   mine: boolean,
+  files: FilePolicy,
   progress: (text: string) => void,
 ): Promise<Survey> {
   try {
     const { engine, rootUri, leftOut } = await surveyFolders(paths, new Profiles(), {
       mine,
+      files,
       progress: (stage, done, all) =>
         progress(stage === 'reading' ? `Reading ${done} of ${all} pages` : 'Comparing terms …'),
     });

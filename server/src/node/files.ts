@@ -3,22 +3,24 @@ import { existsSync } from 'node:fs';
 import { readdir, readFile, realpath, stat } from 'node:fs/promises';
 import { basename, dirname, join, relative, sep } from 'node:path';
 import { pathToFileURL } from 'node:url';
-import ignore from 'ignore';
-import type { Ignore } from 'ignore';
 import { compareCodeUnits } from '../base/order.js';
+import { DEFAULT_FILES } from '../text/filePolicy.js';
+import type { FilePolicy } from '../text/filePolicy.js';
 import { FORMATS, formatOf } from '../text/sourceText.js';
 import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri } from '../text/uri.js';
 import { decode } from './decoding.js';
 import type { Decoded } from './decoding.js';
+import { FolderRules, slashed } from './fileRules.js';
+import { saysGenerated } from './generated.js';
+import { newerCopy } from './versions.js';
 
 /** Files larger than this are left out: prose is never so long, data often is. In bytes. */
 export const LARGEST_FILE = 4 * 1024 * 1024;
 
 const TERMBASE = 'termbase.yaml';
 
-/** Folders that hold no documentation of the project's own. */
-const NEVER_ENTERED = new Set(['node_modules', '.git', '.hg', '.svn', '.venv', '__pycache__', '.vscode-test', '.idea']);
+const GENERATED = 'says that it is generated';
 
 /** A file or folder that was not read, and why, in words for a person. */
 export interface LeftOut {
@@ -39,12 +41,11 @@ export class CannotRead extends Error {
 }
 
 /**
- * Lists the documents under a folder (or the one file named), in order. Honours `.gitignore` files, follows no link out of
- * a loop and enters no dependency folder.
+ * Lists the documents under a folder (or the one file named), in order. Leaves out what {@link FolderRules} speak against and
+ * older copies of pages, and follows no link out of a loop. Other files than documents are passed over.
  * @throws CannotRead where the path does not exist or cannot be listed.
  */
-export async function findFiles(path: string): Promise<FoundFiles> {
-  const found = { documents: [] as string[], termbases: [] as string[], leftOut: [] as LeftOut[] };
+export async function findFiles(path: string, policy: FilePolicy = DEFAULT_FILES): Promise<FoundFiles> {
   const status = await stat(path).catch((error: unknown) => {
     throw new CannotRead(`${path}: ${plainReason(error)}`);
   });
@@ -55,12 +56,31 @@ export async function findFiles(path: string): Promise<FoundFiles> {
           .map((extension) => `.${extension}`)
           .join(' ')})`,
       );
-    return { ...found, documents: [path] };
+    return { documents: [path], termbases: [], leftOut: [] };
   }
-  await walk(path, [], new Set(), found);
-  found.documents.sort(compareCodeUnits);
-  found.termbases.sort(compareCodeUnits);
-  return found;
+  const walk = new Walk(policy);
+  await walk.enter(path, undefined);
+  const all = new Set(walk.documents);
+  const documents: string[] = [];
+  for (const document of walk.documents) {
+    const newer = await newerCopy(
+      path,
+      document,
+      (folder) => walk.names.get(folder) ?? [],
+      (other) => all.has(other),
+    );
+    if (newer === undefined) documents.push(document);
+    else walk.leftOut.push({ path: document, reason: olderCopy(path, newer) });
+  }
+  return {
+    documents: documents.sort(compareCodeUnits),
+    termbases: walk.termbases.sort(compareCodeUnits),
+    leftOut: walk.leftOut,
+  };
+}
+
+function olderCopy(root: string, newer: string): string {
+  return `an older copy of ${slashed(root, newer)}`;
 }
 
 /** The canonical URI of a file. */
@@ -75,6 +95,7 @@ export type ReadFile = { readonly source: SourceText } | { readonly leftOut: Lef
 export async function readDocument(path: string): Promise<ReadFile> {
   const file = await readText(path);
   if ('reason' in file) return { leftOut: { path, reason: file.reason } };
+  if (saysGenerated(file.text)) return { leftOut: { path, reason: GENERATED } };
   return { source: { uri: uriOfPath(path), format: formatOf(path) ?? 'plaintext', text: file.text } };
 }
 
@@ -89,22 +110,37 @@ export async function readText(path: string): Promise<Decoded> {
 }
 
 /**
- * Why {@link findFiles} of a folder would not come to a path below it: the folders and `.gitignore` files in between say so.
- * Undefined where nothing is against it.
+ * Why {@link findFiles} of a folder would not come to a path below it, or {@link readDocument} not read it. Undefined where
+ * nothing is against it.
  */
-export async function whyLeftOut(root: string, path: string): Promise<string | undefined> {
+export async function whyLeftOut(root: string, path: string, policy = DEFAULT_FILES): Promise<string | undefined> {
+  const reason = await reasonByRules(root, path, policy);
+  // A termbase is law wherever it stands among the documents.
+  if (reason !== undefined || basename(path) === TERMBASE) return reason;
+  const isDocument = async (other: string): Promise<boolean> =>
+    existsSync(other) && (await reasonByRules(root, other, policy)) === undefined;
+  const newer = await newerCopy(root, path, namesIn, isDocument);
+  if (newer !== undefined) return olderCopy(root, newer);
+  const file = await readText(path);
+  return 'text' in file && saysGenerated(file.text) ? GENERATED : undefined;
+}
+
+async function reasonByRules(root: string, path: string, policy: FilePolicy): Promise<string | undefined> {
   const names = relative(root, path).split(sep);
-  const rules: Rules[] = [];
+  const last = names.pop()!;
+  let rules = await FolderRules.ofRoot(root, await namesIn(root), policy);
   let folder = root;
-  for (const [index, name] of names.entries()) {
-    const isFolder = index < names.length - 1;
-    rules.push(...(await rulesOf(folder, true)));
+  for (const name of names) {
     folder = join(folder, name);
-    if (isFolder && NEVER_ENTERED.has(name)) return 'a folder of dependencies or tools';
-    // A termbase is law wherever it stands among the documents.
-    if ((isFolder || name !== TERMBASE) && isIgnored(folder, isFolder, rules)) return 'ignored by .gitignore';
+    const reason = rules.againstFolder(folder, name);
+    if (reason !== undefined) return reason;
+    rules = await rules.within(folder, await namesIn(folder));
   }
-  return undefined;
+  return last === TERMBASE ? undefined : rules.againstFile(path, last);
+}
+
+async function namesIn(folder: string): Promise<string[]> {
+  return readdir(folder).catch(() => []);
 }
 
 /** Termbases of the folders above, nearest first, up to the root of the repository; none where there is no repository. */
@@ -117,72 +153,54 @@ export function termbasesAbove(folder: string): string[] {
   }
 }
 
-interface Rules {
-  readonly folder: string;
-  readonly rules: Ignore;
-}
+/** One walk through a folder and all below it. */
+class Walk {
+  readonly documents: string[] = [];
+  readonly termbases: string[] = [];
+  readonly leftOut: LeftOut[] = [];
+  /** The names in each folder that was entered. */
+  readonly names = new Map<string, readonly string[]>();
+  private readonly visited = new Set<string>();
 
-async function walk(
-  folder: string,
-  outer: readonly Rules[],
-  visited: Set<string>,
-  found: { documents: string[]; termbases: string[]; leftOut: LeftOut[] },
-): Promise<void> {
-  // A folder may vanish between being listed and being entered, as when a branch is switched.
-  const real = await realpath(folder).catch((error: unknown) => {
-    found.leftOut.push({ path: folder, reason: plainReason(error) });
-  });
-  if (real === undefined) return;
-  if (visited.has(real)) {
-    found.leftOut.push({ path: folder, reason: 'a link to a folder that was read already' });
-    return;
-  }
-  visited.add(real);
-  const entries = await readdir(folder, { withFileTypes: true }).catch((error: unknown) => {
-    if (outer.length === 0 && visited.size === 1) throw new CannotRead(`${folder}: ${plainReason(error)}`);
-    found.leftOut.push({ path: folder, reason: plainReason(error) });
-    return [];
-  });
-  const rules = [
-    ...outer,
-    ...(await rulesOf(
-      folder,
-      entries.some((entry) => entry.name === '.gitignore'),
-    )),
-  ];
-  for (const entry of entries.sort((a, b) => compareCodeUnits(a.name, b.name))) {
-    const path = join(folder, entry.name);
-    const kind = entry.isSymbolicLink() ? await stat(path).catch(() => undefined) : entry;
-    if (kind === undefined) {
-      found.leftOut.push({ path, reason: 'a link that leads nowhere' });
-    } else if (kind.isDirectory()) {
-      if (NEVER_ENTERED.has(entry.name)) found.leftOut.push({ path, reason: 'a folder of dependencies or tools' });
-      else if (isIgnored(path, true, rules)) found.leftOut.push({ path, reason: 'ignored by .gitignore' });
-      else await walk(path, rules, visited, found);
-    } else if (kind.isFile()) {
-      if (basename(path) === TERMBASE) found.termbases.push(path);
-      else if (formatOf(path) === undefined) continue;
-      else if (isIgnored(path, false, rules)) found.leftOut.push({ path, reason: 'ignored by .gitignore' });
-      else found.documents.push(path);
+  constructor(private readonly policy: FilePolicy) {}
+
+  async enter(folder: string, outer: FolderRules | undefined): Promise<void> {
+    const leaveOut = (path: string, reason: string): undefined => {
+      this.leftOut.push({ path, reason });
+    };
+    // A folder may vanish between being listed and being entered, as when a branch is switched.
+    const real = await realpath(folder).catch((error: unknown) => leaveOut(folder, plainReason(error)));
+    if (real === undefined) return;
+    if (this.visited.has(real)) {
+      leaveOut(folder, 'a link to a folder that was read already');
+      return;
+    }
+    this.visited.add(real);
+    const entries = await readdir(folder, { withFileTypes: true }).catch((error: unknown) => {
+      if (outer === undefined) throw new CannotRead(`${folder}: ${plainReason(error)}`);
+      leaveOut(folder, plainReason(error));
+      return [];
+    });
+    const names = entries.map(({ name }) => name);
+    this.names.set(folder, names);
+    const rules = await (outer?.within(folder, names) ?? FolderRules.ofRoot(folder, names, this.policy));
+    for (const entry of entries.sort((a, b) => compareCodeUnits(a.name, b.name))) {
+      const { name } = entry;
+      const path = join(folder, name);
+      const kind = entry.isSymbolicLink() ? await stat(path).catch(() => undefined) : entry;
+      if (kind === undefined) leaveOut(path, 'a link that leads nowhere');
+      else if (kind.isDirectory()) {
+        const reason = rules.againstFolder(path, name);
+        if (reason === undefined) await this.enter(path, rules);
+        else leaveOut(path, reason);
+      } else if (kind.isFile() && name === TERMBASE) this.termbases.push(path);
+      else if (kind.isFile() && formatOf(path) !== undefined) {
+        const reason = rules.againstFile(path, name);
+        if (reason === undefined) this.documents.push(path);
+        else leaveOut(path, reason);
+      }
     }
   }
-}
-
-async function rulesOf(folder: string, present: boolean): Promise<Rules[]> {
-  if (!present) return [];
-  const text = await readFile(join(folder, '.gitignore'), 'utf8').catch(() => '');
-  return [{ folder, rules: ignore().add(text) }];
-}
-
-function isIgnored(path: string, folder: boolean, rules: readonly Rules[]): boolean {
-  let ignored = false;
-  for (const { folder: base, rules: own } of rules) {
-    const name = relative(base, path).split(sep).join('/') + (folder ? '/' : '');
-    const verdict = own.test(name);
-    if (verdict.ignored) ignored = true;
-    else if (verdict.unignored) ignored = false;
-  }
-  return ignored;
 }
 
 /** The system's reason for a failed call, in plain words. */

@@ -4,6 +4,7 @@ import { fileURLToPath } from 'node:url';
 import type { ServerHost } from '../lsp/host.js';
 import { FactsPool } from './factsPool.js';
 import { Profiles } from '../engine/factsOf.js';
+import type { FilePolicy } from '../text/filePolicy.js';
 import { formatOf } from '../text/sourceText.js';
 import { findFiles, readDocument, readText, termbasesAbove, uriOfPath, whyLeftOut } from './files.js';
 
@@ -12,10 +13,10 @@ export function nodeServerHost(): ServerHost {
   const profiles = new Profiles();
   return {
     profiles,
-    async readFolder(uri, signal) {
+    async readFolder(uri, files, signal) {
       const path = pathOf(uri);
       if (path === undefined) return { sources: [], termbases: [], leftOut: [] };
-      const { documents, termbases, leftOut } = await findFiles(path);
+      const { documents, termbases, leftOut } = await findFiles(path, files);
       const sources = [];
       const missed = [...leftOut];
       for (const document of documents) {
@@ -32,22 +33,22 @@ export function nodeServerHost(): ServerHost {
       }
       return { sources, termbases: texts, leftOut: missed };
     },
-    async readDocument(folder, uri) {
+    async readDocument(folder, uri, files) {
       const path = pathOf(uri);
       if (path === undefined || formatOf(path) === undefined) return undefined;
-      if ((await reasonAgainst(folder, path)) !== undefined) return undefined;
+      if ((await reasonAgainst(folder, path, files)) !== undefined) return undefined;
       const file = await readDocument(path);
       return 'source' in file ? file.source : undefined;
     },
-    async readTermbase(folder, uri) {
+    async readTermbase(folder, uri, files) {
       const path = pathOf(uri);
-      if (path === undefined || (await reasonAgainst(folder, path)) !== undefined) return undefined;
+      if (path === undefined || (await reasonAgainst(folder, path, files)) !== undefined) return undefined;
       const file = await readText(path);
       return 'text' in file ? file.text : undefined;
     },
-    async whyLeftOut(folder, uri) {
+    async whyLeftOut(folder, uri, files) {
       const path = pathOf(uri);
-      return path === undefined ? undefined : reasonAgainst(folder, path);
+      return path === undefined ? undefined : reasonAgainst(folder, path, files);
     },
     async gather(sources, progress, signal) {
       // The workers' memory is wanted back: after a survey there is little left for them to do.
@@ -62,10 +63,10 @@ export function nodeServerHost(): ServerHost {
 }
 
 /** Files outside the folder, such as a termbase above it, are left out by nothing in it. */
-async function reasonAgainst(folder: string, path: string): Promise<string | undefined> {
+async function reasonAgainst(folder: string, path: string, files: FilePolicy): Promise<string | undefined> {
   const root = folder === '' ? undefined : pathOf(folder);
   if (root === undefined || !path.startsWith(join(root, sep))) return undefined;
-  return whyLeftOut(root, path);
+  return whyLeftOut(root, path, files);
 }
 
 function pathOf(uri: string): string | undefined {

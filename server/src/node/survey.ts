@@ -5,6 +5,7 @@ import { dirname, join, resolve } from 'node:path';
 import { finish } from '../base/work.js';
 import { Engine } from '../engine/engine.js';
 import type { Profiles } from '../engine/factsOf.js';
+import type { FilePolicy } from '../text/filePolicy.js';
 import type { SourceText } from '../text/sourceText.js';
 import { FactsPool } from './factsPool.js';
 import { CannotRead, findFiles, readDocument, readText, termbasesAbove, uriOfPath } from './files.js';
@@ -28,12 +29,17 @@ export interface SurveyedFolders {
 export async function surveyFolders(
   paths: readonly string[],
   profiles: Profiles,
-  options: { readonly mine: boolean; readonly progress?: SurveyProgress; readonly signal?: AbortSignal },
+  options: {
+    readonly mine: boolean;
+    readonly files?: FilePolicy;
+    readonly progress?: SurveyProgress;
+    readonly signal?: AbortSignal;
+  },
 ): Promise<SurveyedFolders> {
-  const { mine, progress, signal } = options;
+  const { mine, files, progress, signal } = options;
   const absolute = paths.map((path) => resolve(path));
   const found = [];
-  for (const path of absolute) found.push(await findFiles(path));
+  for (const path of absolute) found.push(await findFiles(path, files));
   const root = await commonFolder(absolute);
   const documents = [...new Set(found.flatMap((each) => each.documents))];
   const above = [...new Set((await foldersOf(absolute)).flatMap((folder) => termbasesInForce(folder, root)))];
