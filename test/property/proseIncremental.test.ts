@@ -95,6 +95,20 @@ const SNIPPETS = [
     '---\ntitle: New\n---\n',
     'title: x\n',
   ],
+  ...[
+    'Term\n',
+    ': definition\n',
+    ':   more\n',
+    '{% highlight c %}\n',
+    '{% endhighlight %}\n',
+    '{{< highlight >}}\n',
+    '{{< /highlight >}}',
+    '<div class="warning">\n\n',
+    '<blockquote lang="de">\n',
+    '</blockquote>\n\n',
+    '<details><summary>Sum</summary>\n',
+    '<td>`cell`',
+  ],
 ];
 
 function markdown(text: string): SourceText {

@@ -76,6 +76,16 @@ const PARTS = [
     '\0',
     '\ud800',
   ],
+  ...[
+    'Term\n: ',
+    '{% highlight %}\n',
+    '{% endhighlight %}\n',
+    '<div>\n',
+    '</div>\n\n',
+    '<table><tr><td>',
+    '<p title="n o">',
+    '> <blockquote>\n> ',
+  ],
 ];
 
 const soups = fc.array(fc.constantFrom(...PARTS), { maxLength: 40 }).map((parts) => parts.join(''));

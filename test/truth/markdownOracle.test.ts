@@ -1,4 +1,4 @@
-// Real Markdown held against micromark 4 with its GFM extension: the words that are prose, and where they stand.
+// Real Markdown held against micromark 4 with its GFM extension, and parse5 in HTML blocks: the words that are prose, and where they stand.
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { parse, postprocess, preprocess } from 'micromark';
@@ -6,6 +6,7 @@ import { gfm } from 'micromark-extension-gfm';
 import { describe, expect, it } from 'vitest';
 import { sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
+import { judgeHtml } from './htmlInMarkdown.js';
 import { maskGenerators } from './markdownOracleMask.js';
 
 const WORD = /[\p{L}\p{N}]+/gu;
@@ -26,9 +27,10 @@ const CLOSED = new Set([
   ...['literalAutolink', 'gfmFootnoteCall', 'gfmFootnoteDefinitionLabel', 'taskListCheck'],
 ]);
 
-/** The source offsets of the code units that micromark takes for text. */
-function oracleUnits(text: string): Set<number> {
+/** The source offsets of the code units that are text to micromark, or in HTML blocks to parse5; and those that neither judges. */
+function oracleUnits(text: string): { units: Set<number>; unjudged: Set<number> } {
   const units = new Set<number>();
+  const unjudged = new Set<number>();
   const events = postprocess(
     parse({ extensions: [gfm()] })
       .document()
@@ -37,12 +39,19 @@ function oracleUnits(text: string): Set<number> {
   let closed = 0;
   for (const [phase, token] of events) {
     if (CLOSED.has(token.type)) closed += phase === 'enter' ? 1 : -1;
+    if (token.type === 'htmlFlow' && phase === 'enter') {
+      const from = token.start.offset;
+      judgeHtml(text.slice(from, token.end.offset)).forEach((mark, i) => {
+        if (mark === 1) units.add(from + i);
+        else if (mark === 2) unjudged.add(from + i);
+      });
+    }
     if (phase === 'exit' || closed > 0) continue;
     if (token.type === 'data' || token.type === 'characterEscapeValue') {
       for (let i = token.start.offset; i < token.end.offset; i++) units.add(i);
     }
   }
-  return units;
+  return { units, unjudged };
 }
 
 interface Score {
@@ -57,7 +66,7 @@ interface Score {
 
 function compare(file: string, source: string, score: Score): void {
   const { text, opened } = maskGenerators(source);
-  const units = oracleUnits(text);
+  const { units, unjudged } = oracleUnits(text);
   const inOracle = (from: number, to: number): boolean => {
     for (let i = from; i < to; i++) if (!units.has(i)) return false;
     return true;
@@ -76,7 +85,7 @@ function compare(file: string, source: string, score: Score): void {
       }
       ours.fill(1, from, to);
       // Bodies of generators' containers are prose that CommonMark alone cannot see.
-      if (opened(from)) continue;
+      if (opened(from) || unjudged.has(from)) continue;
       score.ours++;
       if (inOracle(from, to)) score.right++;
       else score.extra.push(`${file}@${from}: ${word}`);

@@ -5,13 +5,19 @@ import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import { Zone, type ZoneSet } from '../zones.js';
 import { DEEPEST } from './containers.js';
+import { readHtmlBlock } from './htmlBlocks.js';
 import { readInline, type InlineContext } from './inline.js';
 import { LEVEL_OF, Role, ROLE_OF } from './roles.js';
+import type { Step } from './wrappers.js';
 
 /** What reading blocks leaves behind. */
 export interface BlockContext extends InlineContext {
   readonly blocks: ProseBlock[];
   readonly problems: ReadingProblem[];
+  /** Tags that other blocks close or open. */
+  readonly steps: Step[];
+  /** Set where text behind the block, however far, could make something else of it. */
+  openEnded: boolean;
 }
 
 const SAFETY = /^(?:danger|warning|caution|notice)$/i;
@@ -46,6 +52,18 @@ export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, 
       break;
     case Role.tableCell:
       readLeaf(cx, cursor, zones | Zone.tableCell, 'tableCell', cursor.from);
+      break;
+    case Role.definedTerm:
+      readLeaf(cx, cursor, zones | Zone.definedTerm, 'definedTerm', cursor.from);
+      break;
+    case Role.definitionBody:
+      readChildren(cx, cursor, zones, 'definition');
+      break;
+    case Role.htmlBlock:
+      readHtmlBlock(cx, cursor, zones, kind);
+      break;
+    case Role.unended:
+      cx.openEnded = true;
       break;
     case Role.tooDeep:
       reportTooDeep(cx.problems, cursor.from, cursor.to);

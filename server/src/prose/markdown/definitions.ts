@@ -25,7 +25,8 @@ export function definitionsIn(tree: Tree, text: string): { at: number; definitio
   tree.iterate({
     enter(node) {
       const role = ROLE_OF[node.type.id]!;
-      if (role !== Role.definition) return role >= Role.container && role <= Role.admonition;
+      if (role !== Role.definition)
+        return (role >= Role.container && role <= Role.admonition) || role === Role.definitionBody;
       let label = '';
       let target = '';
       for (let child = node.node.firstChild; child; child = child.nextSibling) {

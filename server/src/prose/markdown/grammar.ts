@@ -10,7 +10,9 @@ import {
 } from '@lezer/markdown';
 import { brackets } from './brackets.js';
 import { containers } from './containers.js';
+import { definitionLists } from './definitionLists.js';
 import { parsePlainRun } from './plainRun.js';
+import { templateBlocks } from './templateBlocks.js';
 import { templates } from './templates.js';
 
 /**
@@ -61,7 +63,9 @@ function parseLongHtml(cx: BlockContext, line: Line): boolean {
 }
 
 /** The configured parser. It is stateless: parsing one text never affects another. */
-export const markdownParser = commonMark.configure([GFM, templates, brackets, guards, containers]);
+export const markdownParser = commonMark.configure([
+  ...[GFM, templates, templateBlocks, brackets, guards, containers, definitionLists],
+]);
 
 const parseWhole = markdownParser.parseInline.bind(markdownParser);
 

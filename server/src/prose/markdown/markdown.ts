@@ -4,6 +4,7 @@ import { normalise } from '../normalise.js';
 import type { Prose, ProseBlock, ReadingProblem } from '../prose.js';
 import { changeBetween, keepContents, type Change, type Reading } from '../reading.js';
 import { readFrontMatter, type FrontMatter } from './frontMatter.js';
+import { wrap, type Step } from './wrappers.js';
 import { definitionTable, parseStretch, readUnits, shifted, type Stretch, type Unit } from './units.js';
 
 /** A Markdown document read. The fields beside the prose are the reader's own. */
@@ -72,7 +73,8 @@ function rereadBody(
   const old = previous.units;
   const shift = change.newEnd - change.oldEnd;
   const touched = lastWhere(old, (unit) => unit.lineStart <= change.start);
-  const first = Math.max(0, touched - MARGIN);
+  const openEnded = old.findIndex((unit) => unit.openEnded);
+  const first = Math.max(0, Math.min(touched - MARGIN, openEnded < 0 ? touched : openEnded));
   const from = first === 0 ? bodyStart : old[first]!.lineStart;
   const behind = lastWhere(old, (unit) => unit.lineStart <= change.oldEnd) + 1;
   for (let ahead = 2 * MARGIN; ; ahead *= 4) {
@@ -85,6 +87,8 @@ function rereadBody(
     if (!met && !atEnd) continue;
     const count = met ? met.fresh : stretch.outline.length;
     const kept = met ? met.old : old.length;
+    const fresh = readUnits(stretch, previous.definitions, count);
+    if (!atEnd && fresh.some((unit) => unit.openEnded)) continue;
     const definitions = definitionTable([
       ...old.slice(0, first).map((unit) => unit.definitions),
       ...stretch.definitions.slice(0, count),
@@ -92,7 +96,7 @@ function rereadBody(
     ]);
     if (!sameTable(definitions, previous.definitions)) return undefined;
     const units = old.slice(0, first);
-    for (const unit of readUnits(stretch, definitions, count)) units.push(unit);
+    for (const unit of fresh) units.push(unit);
     for (let i = kept; i < old.length; i++) units.push(shifted(old[i]!, shift));
     return assemble(source, text, previous.frontMatter, units, previous.definitions, previous.prose.blocks);
   }
@@ -144,10 +148,13 @@ function assemble(
 ): MarkdownReading {
   const blocks: ProseBlock[] = frontMatter ? [...frontMatter.blocks] : [];
   const problems: ReadingProblem[] = [];
+  const steps: Step[] = [];
   for (const unit of units) {
+    for (const step of unit.steps) steps.push({ ...step, at: step.at + blocks.length });
     for (const block of unit.blocks) blocks.push(block);
     for (const problem of unit.problems) problems.push(problem);
   }
+  wrap(blocks, steps);
   const prose: Prose = {
     blocks: previous ? keepContents(previous, blocks) : blocks,
     problems,

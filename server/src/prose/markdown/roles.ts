@@ -30,6 +30,10 @@ export const Role = {
   linkMark: 20,
   linkLabel: 21,
   url: 22,
+  htmlBlock: 23,
+  definedTerm: 24,
+  definitionBody: 25,
+  unended: 26,
 } as const;
 
 const NAMES: Record<string, number> = {
@@ -52,6 +56,12 @@ const NAMES: Record<string, number> = {
   TableCell: Role.tableCell,
   LinkReference: Role.definition,
   TooDeep: Role.tooDeep,
+  HTMLBlock: Role.htmlBlock,
+  LongHtml: Role.htmlBlock,
+  DefinedTerms: Role.container,
+  DefinedTerm: Role.definedTerm,
+  Definition: Role.definitionBody,
+  UnendedTemplate: Role.unended,
   Emphasis: Role.styled,
   StrongEmphasis: Role.styled,
   Strikethrough: Role.styled,

@@ -5,6 +5,7 @@ import { readBlock } from './blocks.js';
 import { definitionsIn, type Definition } from './definitions.js';
 import { markdownParser } from './grammar.js';
 import { closeMarkers } from './templates.js';
+import type { Step } from './wrappers.js';
 
 /** An outermost block and the prose in it; blocks and problems count offsets from the document's start. */
 export interface Unit {
@@ -16,6 +17,10 @@ export interface Unit {
   readonly definitions: readonly Definition[];
   /** True where the unit's prose depends on the document's link reference definitions. */
   readonly usesDefinitions: boolean;
+  /** Tags that other units close or open; `at` counts this unit's blocks. */
+  readonly steps: readonly Step[];
+  /** True where text behind the unit, however far, could make something else of it. */
+  readonly openEnded: boolean;
 }
 
 /** A parsed stretch of a text, and where its outermost blocks begin. */
@@ -64,6 +69,8 @@ export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, str
       inner: [],
       blocks: [] as ProseBlock[],
       problems: [] as ReadingProblem[],
+      steps: [] as Step[],
+      openEnded: false,
     };
     readBlock(cx, cursor, 0);
     const unit: Unit = {
@@ -73,6 +80,8 @@ export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, str
       problems: cx.problems,
       definitions: stretch.definitions[i]!,
       usesDefinitions: cx.usesDefinitions,
+      steps: cx.steps,
+      openEnded: cx.openEnded,
     };
     units.push(shifted(unit, from));
   } while (units.length < count && cursor.nextSibling());
@@ -88,6 +97,8 @@ export function shifted(unit: Unit, by: number): Unit {
     blocks: unit.blocks.map(({ start, content }) => ({ start: start + by, content })),
     definitions: unit.definitions,
     usesDefinitions: unit.usesDefinitions,
+    steps: unit.steps,
+    openEnded: unit.openEnded,
     problems: unit.problems.map(({ span, message }) => ({
       span: { start: span.start + by, end: span.end + by },
       message,
