@@ -3,6 +3,9 @@
 /** Words that an abbreviation may pass over or take a letter of. */
 const SMALL = new Set('a an the of and or for to in on at by with from per as vs via'.split(' '));
 
+/** Marks a part that stands behind a hyphen: it is no small word of its own (single sign-on). */
+export const JOINED = '-';
+
 /** Words that begin with an x in abbreviations (Extensible Markup Language). */
 const SOUNDS_X = /^ex|^cross|^trans/;
 
@@ -11,7 +14,7 @@ const SOUNDS_X = /^ex|^cross|^trans/;
  * matched in order, a word may give more than its first; after Schwartz & Hearst 2003 (A simple algorithm for identifying
  * abbreviation definitions in biomedical text), but from left to right and with no content word left out.
  * @param letters the short form's letters and digits in lower case
- * @param words the parts of the long form in lower case, hyphens resolved
+ * @param words the parts of the long form in lower case, hyphens resolved, those behind one marked with {@link JOINED}
  */
 export function aligns(letters: string, words: readonly string[]): boolean {
   if (words.length === 0 || SMALL.has(words[0]!) || SMALL.has(words[words.length - 1]!)) return false;
@@ -21,8 +24,9 @@ export function aligns(letters: string, words: readonly string[]): boolean {
 function alignsFrom(letters: string, at: number, words: readonly string[], word: number): boolean {
   if (word === words.length) return at === letters.length;
   if (at === letters.length) return false;
-  const text = words[word]!;
-  if (SMALL.has(text) && alignsFrom(letters, at, words, word + 1)) return true;
+  const part = words[word]!;
+  const text = part.startsWith(JOINED) ? part.slice(1) : part;
+  if (SMALL.has(part) && alignsFrom(letters, at, words, word + 1)) return true;
   const first = text[0]!;
   if (letters[at] !== first && !(letters[at] === 'x' && SOUNDS_X.test(text))) return false;
   // The rest of the word gives as many further letters as it can or as few: try every number of them.

@@ -21,6 +21,12 @@ import { termOf, usesOf } from './shortAndLong.js';
  */
 const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33, usesInFew: 4, shareInFew: 0.6 } as const;
 
+/** How sure it is, by the share of the rarer form's uses in frames that both have; least where the clipping is mostly a name of code. */
+const CONFIDENCE = { least: 0.5, shared: 0.4 } as const;
+
+/** From this share of uses on pages where the code has the word, a clipping is mostly a name there. */
+const MOSTLY_NAME = 0.58;
+
 /** Words between two resting points. */
 const STRIDE = 5000;
 
@@ -66,7 +72,17 @@ function askClipping(corpus: Corpus, clipping: string): Question | undefined {
   candidates.sort((a, b) => b.shared.kinds.length - a.shared.kinds.length);
   const best = candidates[0];
   if (best === undefined || !standAlike(best.shared)) return undefined;
-  return makeQuestion(corpus, short, best.long, best.shared);
+  // Where two full words fit about as well, the clipping is short for both.
+  const second = candidates[1]?.shared;
+  if (second !== undefined && standAlike(second) && second.kinds.length * 2 >= best.shared.kinds.length)
+    return undefined;
+  // Without the uses that may be a name of the page's code it must stand alike as well.
+  const words = short.uses.filter((use) => !isName(corpus, use));
+  const shared = sharedFrames(corpus, framesOf(corpus, words), framesOf(corpus, best.long.uses));
+  if (!standAlike(shared) || countDocuments(corpus.stream, words) < LEAST.documents) return undefined;
+  const isMostlyName = short.uses.length - words.length > MOSTLY_NAME * short.uses.length;
+  const confidence = CONFIDENCE.least + (isMostlyName ? 0 : CONFIDENCE.shared * shared.share);
+  return makeQuestion(corpus, short, words, best.long, shared, confidence);
 }
 
 function standAlike({ kinds, uses, share }: SharedFrames): boolean {
@@ -92,11 +108,23 @@ function isPlain(corpus: Corpus, { row, length }: Use): boolean {
   return !/\p{Lu}\p{Lu}/u.test(vocabulary.textOf(stream.spelling[row]!));
 }
 
-function makeQuestion(corpus: Corpus, short: Side, long: Side, shared: SharedFrames): Question {
-  const sides = [short, long]
-    .map(({ forms, uses, words }) => ({ term: termOf(corpus, forms, words.join(' ')), uses }))
+/** A use on a page where the code has the word as a name: as likely that name without its marks. */
+function isName(corpus: Corpus, { row, length }: Use): boolean {
+  return length === 1 && corpus.stream.isNameInCode(row);
+}
+
+/** `words` are the clipping's uses that are no names of code. */
+function makeQuestion(
+  corpus: Corpus,
+  short: Side,
+  words: readonly Use[],
+  long: Side,
+  shared: SharedFrames,
+  confidence: number,
+): Question {
+  const sides = [{ ...short, uses: words }, long]
+    .map(({ forms, uses, words: lead }) => ({ term: termOf(corpus, forms, lead.join(' ')), uses }))
     .sort((a, b) => byUses(a.term, b.term));
-  const confidence = 0.5 + 0.4 * shared.share;
   const [clip, full] = [short, long].map(({ forms, words }) => termOf(corpus, forms, words.join(' '))) as [
     QuestionTerm,
     QuestionTerm,
@@ -109,7 +137,7 @@ function makeQuestion(corpus: Corpus, short: Side, long: Side, shared: SharedFra
     ),
     kind: 'abbreviation',
     confidence,
-    worth: confidence * sides[1]!.term.uses,
+    worth: confidence * Math.min(words.length, long.uses.length),
     terms: sides.map(({ term }) => term),
     reasons: [
       {

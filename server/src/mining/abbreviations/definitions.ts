@@ -3,7 +3,7 @@ import type { Corpus } from '../../corpus/corpus.js';
 import { TokenFlag } from '../../tokens/tokens.js';
 import { endRowOfBlock, firstRowOfBlock, followsOn } from '../../corpus/stream.js';
 import { singularKey } from '../wording.js';
-import { aligns, longestAlignment } from './alignment.js';
+import { aligns, JOINED, longestAlignment } from './alignment.js';
 
 /** One explanation of a short form. */
 export interface Definition {
@@ -57,13 +57,14 @@ export function lettersOf(short: string): string {
   return short.toLowerCase().replace(/[^\p{L}\p{N}]/gu, '');
 }
 
-/** The parts of a word that may give letters: cut at hyphens, slashes and before inner capitals. */
+/** The parts of a word that may give letters: cut at hyphens, slashes and before inner capitals; see {@link JOINED}. */
 export function partsOf(spelling: string): string[] {
   return spelling
     .replace(/(\p{Ll})(\p{Lu})/gu, '$1-$2')
     .toLowerCase()
     .split(/[-/]/)
-    .filter((part) => part !== '');
+    .filter((part) => part !== '')
+    .map((part, index) => (index === 0 ? part : JOINED + part));
 }
 
 function longThenShort(corpus: Corpus, opening: number): Definition | undefined {

@@ -1,25 +1,29 @@
 // Frames: the content words that stand right beside the uses of a form, and how far two forms share them.
 import type { Corpus } from '../../corpus/corpus.js';
-import { FactFlag } from '../../facts/flags.js';
-import { TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, followsOn } from '../../corpus/stream.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn, isContent } from '../../corpus/stream.js';
 import type { Use } from '../places.js';
 
 /** Kinds of frame with the number of uses in each: a neighbour's lower-case word, doubled, plus 1 where it follows. */
 export type Frames = ReadonlyMap<number, number>;
 
-/** The frames of uses: a content word right before, and one right after, with nothing but white space between. */
-export function framesOf(corpus: Corpus, uses: readonly Use[]): Frames {
+/**
+ * The frames of uses: a content word right before, and one right after, with nothing but white space between.
+ * @param overGrammar whether a word of grammar between is passed over on the left ("open a ___")
+ */
+export function framesOf(corpus: Corpus, uses: readonly Use[], overGrammar = false): Frames {
   const { stream } = corpus;
   const frames = new Map<number, number>();
   const count = (row: number, side: 0 | 1): void => {
-    const flags = stream.flags[row]!;
-    if ((flags & TokenFlag.word) === 0 || (flags & FactFlag.functionWord) !== 0 || stream.counted[row] !== 1) return;
+    if (!isContent(stream, row)) return;
     const frame = stream.fold[row]! * 2 + side;
     frames.set(frame, (frames.get(frame) ?? 0) + 1);
   };
   for (const { row, length } of uses) {
-    if (row > firstRowOfBlock(stream, row) && followsOn(stream, row)) count(row - 1, 0);
+    const first = firstRowOfBlock(stream, row);
+    if (row > first && followsOn(stream, row)) {
+      const passes = overGrammar && row - 1 > first && !isContent(stream, row - 1) && followsOn(stream, row - 1);
+      count(passes ? row - 2 : row - 1, 0);
+    }
     const end = row + length;
     if (end < endRowOfBlock(stream, row) && followsOn(stream, end)) count(end, 1);
   }

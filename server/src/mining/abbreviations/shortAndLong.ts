@@ -7,17 +7,25 @@ import { questionId } from '../question.js';
 import type { Question, QuestionTerm, Reason } from '../question.js';
 import { byUses, displayText, makeTerm, pages, times } from '../wording.js';
 import type { Explained, Expansion } from './explained.js';
+import { framesOf, sharedFrames } from './frames.js';
 import { formsOfLong, formsOfShort } from './longForms.js';
 import type { FormUses } from './longForms.js';
 
-/** The least that is asked about: uses of the short form, and free uses of the long one. */
-const LEAST = { short: 2, freeOnItsPages: 2, free: 3, freePages: 3, freeOnFewPages: 5 } as const;
-
 /**
- * How sure it is that the two forms are mixed: sure where pages that have the short form go on with the long one; less so
- * where the long form stands on other pages alone, which may have no need of the short one.
+ * The least that is asked about: uses of the short form, and free uses of the long one. A mix is plain where so many of the
+ * pages with the short form, and such a share of them, either never explain it or go on with the long form; or where a few pages
+ * go on with the long form so often, and in such a share of what they say; else a few slips are left.
  */
-const CONFIDENCE = { explainedOnce: 0.85, explainedMore: 0.92, onePlace: 0.75, elsewhere: 0.6 } as const;
+const LEAST = {
+  short: 2,
+  free: 3,
+  mixed: { pages: 3, share: 0.55 },
+  goingOn: { uses: 6, share: 0.3 },
+  slips: 3,
+} as const;
+
+/** How sure it is that the two forms are mixed and not explained where they need be. */
+const CONFIDENCE = { onItsPages: 0.92, onOtherPages: 0.8, onFewPages: 0.75, slips: 0.5 } as const;
 
 /** How the long form is used beside the short one. */
 export interface FreeUse {
@@ -40,12 +48,8 @@ export function askExplained(
   const longForms = formsOfLong(corpus, expansion.words);
   const longUses = withoutLonger(corpus, usesOf(longForms), expansion, others);
   const free = freeUses(corpus, longUses, shortUses, expansion);
-  const freePages = countDocuments(corpus.stream, free.all);
-  const enough =
-    free.onItsPages.length >= LEAST.freeOnItsPages ||
-    (free.all.length >= LEAST.free && freePages >= LEAST.freePages) ||
-    free.all.length >= LEAST.freeOnFewPages;
-  if (!enough) return undefined;
+  const mix = mixOf(corpus, shortUses, longUses, free);
+  if (mix === undefined) return undefined;
   const kept = new Set(longUses.map((use) => use.row));
   const shortRows = new Set(expansion.definitions.map((definition) => definition.shortRow));
   const unexplained = shortUses.filter((use) => !shortRows.has(use.row));
@@ -60,7 +64,7 @@ export function askExplained(
       uses: free.all,
     },
   ].sort((a, b) => byUses(a.term, b.term));
-  const confidence = confidenceOf(expansion, free);
+  const { confidence } = mix;
   return {
     id: questionId(
       'abbreviation',
@@ -68,17 +72,41 @@ export function askExplained(
     ),
     kind: 'abbreviation',
     confidence,
-    worth: confidence * Math.min(free.all.length, shortUses.length),
+    worth: confidence * mix.settles,
     terms: sides.map(({ term }) => term),
     reasons: reasonsOf(corpus, short, expansion, free, longUses),
     places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
   };
 }
 
-function confidenceOf({ definitions }: Expansion, { onItsPages }: FreeUse): number {
-  if (onItsPages.length === 0) return CONFIDENCE.elsewhere;
-  if (onItsPages.length === 1) return CONFIDENCE.onePlace;
-  return definitions.length > 1 ? CONFIDENCE.explainedMore : CONFIDENCE.explainedOnce;
+/** How sure a mix is, and the uses that an answer would settle; undefined where the forms are right as they are. */
+function mixOf(
+  corpus: Corpus,
+  short: readonly Use[],
+  long: readonly Use[],
+  free: FreeUse,
+): { readonly confidence: number; readonly settles: number } | undefined {
+  const { stream } = corpus;
+  const pageOf = ({ row }: Use): number => stream.documentOf(row);
+  const shortPages = new Set(short.map(pageOf));
+  const longPages = new Set(long.map(pageOf));
+  const goingOn = new Set(free.onItsPages.map(pageOf));
+  const mixed = [...shortPages].filter((page) => goingOn.has(page) || !longPages.has(page)).length;
+  const slips = free.onItsPages.length;
+  const isPlain = mixed >= LEAST.mixed.pages && mixed >= LEAST.mixed.share * shortPages.size;
+  if (isPlain && free.all.length >= LEAST.free && (goingOn.size > 0 || areAlike(corpus, short, free.all))) {
+    const confidence = goingOn.size > 1 ? CONFIDENCE.onItsPages : CONFIDENCE.onOtherPages;
+    return { confidence, settles: Math.min(free.all.length, short.length) };
+  }
+  const beside = short.filter((use) => goingOn.has(pageOf(use))).length;
+  if (slips >= LEAST.goingOn.uses && slips >= LEAST.goingOn.share * (slips + beside))
+    return { confidence: CONFIDENCE.onFewPages, settles: Math.min(slips, beside) };
+  return slips >= LEAST.slips ? { confidence: CONFIDENCE.slips, settles: slips } : undefined;
+}
+
+/** True where both stand beside a like word: where no page has both, the long form may mean another thing. */
+function areAlike(corpus: Corpus, short: readonly Use[], long: readonly Use[]): boolean {
+  return sharedFrames(corpus, framesOf(corpus, short, true), framesOf(corpus, long, true)).kinds.length > 0;
 }
 
 /** Uses that are no explanation, nor right after a parenthesis, not the first on a page with the short form, in no heading. */

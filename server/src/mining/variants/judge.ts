@@ -36,6 +36,9 @@ const LIKE_SLOTS: readonly Slot[] = ['attributive', 'predicate', 'noun', 'verb']
 /** An open form that begins with a quantifier must be as frequent before a noun as 1 / this of the joined one. */
 const QUANTIFIED_SHARE = 4;
 
+/** At most so many places, and less than such a share of the rarer way's uses, are slips. */
+const SLIPS = { most: 3, share: 0.25 } as const;
+
 /** Judges two ways of writing one key, or returns undefined where they are right as they are. */
 export function judge(a: Style, b: Style): Mix | undefined {
   if (a.uses.length === 0 || b.uses.length === 0) return undefined;
@@ -75,7 +78,13 @@ function judgeOpen(chunk: Style, open: Style): Mix | undefined {
   // Lone uses in two slots are as easily two misread sentences.
   if (Math.max(...slots.map((slot) => shared(chunk, open, [slot]))) < 2) return undefined;
   const exchangeable = shared(chunk, open, slots);
+  if (chunk.shape === 'hyphened' && areSlips(exchangeable, chunk, open)) return undefined;
   return { lane: chunk.shape === 'hyphened' ? 'hyphen' : 'space', exchangeable };
+}
+
+/** A hyphen before a noun and none elsewhere is the rule: a few places where it is not kept are slips of it, no mix. */
+function areSlips(exchangeable: number, a: Style, b: Style): boolean {
+  return exchangeable <= SLIPS.most && exchangeable < SLIPS.share * Math.min(a.uses.length, b.uses.length);
 }
 
 /** A kind or class beside the concept it stands for: a mix only where prose uses the joined form as a noun of its own. */

@@ -43,7 +43,7 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
     id: questionId('variant', terms),
     kind: 'variant',
     confidence,
-    worth: confidence * outside,
+    worth: confidence * Math.min(outside, mix.exchangeable),
     terms,
     reasons: reasonsOf(corpus, mix, sides, slot),
     places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, inSlot(uses, slot))),

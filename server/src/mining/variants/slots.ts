@@ -68,7 +68,9 @@ export class SlotReader {
     const { stream } = this;
     const takesObject = end < blockEnd && followsOn(stream, end) && this.is('objectStart', end);
     // The tagger knows a verb by more than its neighbours; participles it takes for verbs before their nouns as well.
-    if (end === row + 1 && stream.tag[row] === TAG.VERB && !this.isParticiple(row)) return true;
+    if (end === row + 1 && stream.tag[row] === TAG.VERB && !this.isParticiple(row)) {
+      return starts || !this.follows(row) || !this.isBeforeNouns(row - 1);
+    }
     if (starts) return takesObject;
     if (!this.follows(row)) return false;
     const before = stream.fold[row - 1]!;
@@ -114,6 +116,12 @@ export class SlotReader {
 
   private is(name: WordClass, row: number): boolean {
     return this.classes[name].has(this.stream.fold[row]!);
+  }
+
+  /** A determiner, preposition or adjective: what it stands before is no verb, whatever the tagger takes it for. */
+  private isBeforeNouns(row: number): boolean {
+    const tag = this.stream.tag[row]!;
+    return tag === TAG.DET || tag === TAG.ADJ || (tag === TAG.ADP && this.stream.fold[row] !== this.to);
   }
 
   private isParticiple(row: number): boolean {

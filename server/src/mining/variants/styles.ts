@@ -23,7 +23,7 @@ export interface Style {
   readonly forms: readonly Form[];
   /** Uses that count as evidence, in document order, each with its slot. */
   readonly uses: readonly SlottedUse[];
-  /** Uses that count, by slot; those that stand alone as labels are left out. */
+  /** Uses by slot, without those that may be a name of the page's code: they are as right as they are in code. */
   readonly slots: Readonly<Record<Slot, number>>;
   /** Uses inside sentences of running text; the counts below are among them. */
   readonly inside: number;
@@ -85,13 +85,19 @@ function makeStyle(corpus: Corpus, readers: Readers, text: string, forms: readon
       const found = readers.slots.slotOf(row, length);
       // An open plural before a noun is not its modifier: "two elements follow".
       const slot = found === 'attributive' && form.shape === 'open' && form.plural ? 'unclear' : found;
-      slots[slot]++;
+      if (!isName(corpus, row, form)) slots[slot]++;
       uses.push({ row, length, slot });
       countCase(corpus, row, length, cases);
     }
   }
   uses.sort((a, b) => a.row - b.row);
   return { shape: forms[0]!.shape, text, forms, uses, slots, ...cases };
+}
+
+/** A word in small letters, or with a first capital alone, that the code of its page has too; kinds and classes are judged by their capitals. */
+function isName({ stream, vocabulary }: Corpus, row: number, { shape }: Form): boolean {
+  if (shape === 'open' || !stream.isNameInCode(row)) return false;
+  return stream.spelling[row] === stream.fold[row] || !/^.+\p{Lu}/u.test(vocabulary.textOf(stream.spelling[row]!));
 }
 
 function countCase(corpus: Corpus, row: number, length: number, cases: Cases): void {
