@@ -6,6 +6,7 @@ import { sourceEnd, sourceStart } from '../prose/prose.js';
 import type { ProseBlock } from '../prose/prose.js';
 import type { Reading } from '../prose/read.js';
 import { LineIndex } from '../text/lineIndex.js';
+import type { SourcePlace } from './relations.js';
 import type { Snapshot } from './snapshot.js';
 
 /** Longer sentences are cut around the term, in UTF-16 units. */
@@ -37,15 +38,19 @@ export class ExampleFinder {
     return question.places.flatMap((place) => this.example(question, place) ?? []);
   }
 
+  /** The sentence around a use of a term; undefined where no block of the document holds the place. */
+  at(term: string, { uri, span }: SourcePlace): Example | undefined {
+    const document = this.document(uri);
+    const block = document?.reading.prose.blocks.find((each) => holds(each, span));
+    if (document === undefined || block === undefined) return undefined;
+    const { text, highlight } = sentenceAround(block, span, document.reading.source.text);
+    const line = document.lines.positionAt(span.start).line + 1;
+    return { term, uri, line, text, highlight, source: span };
+  }
+
   private example(question: Question, place: UsePlace): Example | undefined {
     const found = this.snapshot.relations.placeOf(question, place);
-    const document = found && this.document(found.uri);
-    if (found === undefined || document === undefined) return undefined;
-    const block = document.reading.prose.blocks.find((each) => holds(each, found.span));
-    if (block === undefined) return undefined;
-    const { text, highlight } = sentenceAround(block, found.span, document.reading.source.text);
-    const line = document.lines.positionAt(found.span.start).line + 1;
-    return { term: question.terms[place.term]!.text, uri: found.uri, line, text, highlight, source: found.span };
+    return found && this.at(question.terms[place.term]!.text, found);
   }
 
   private document(uri: string): { reading: Reading; lines: LineIndex } | undefined {

@@ -2,8 +2,8 @@
 import type { Span } from '../base/span.js';
 import { contains, touches } from '../base/span.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
-import { companionsOf } from '../mining/companions.js';
-import type { Companion } from '../mining/companions.js';
+import { companionsOf } from '../mining/companions/companions.js';
+import type { RelatedCompanion } from '../mining/companions/companions.js';
 import type { Question } from '../mining/question.js';
 import { sourceEnd, sourceStart } from '../prose/prose.js';
 import { isOpen } from '../prose/zones.js';
@@ -30,7 +30,7 @@ export interface TermCard {
   /** The term as decided or asked, not as inflected in the text. */
   readonly text: string;
   readonly names: readonly NameOnCard[];
-  readonly companions: readonly Companion[];
+  readonly companions: readonly RelatedCompanion[];
   readonly definition?: string;
   readonly note?: string;
   readonly question?: Question;
@@ -94,7 +94,7 @@ function formsOf(text: string, partOfSpeech?: PartOfSpeech): string[] {
   return [...new Set(termForms(text, partOfSpeech).map((form) => form.text.toLowerCase()))];
 }
 
-function companions(snapshot: Snapshot, forms: readonly string[]): Companion[] {
+function companions(snapshot: Snapshot, forms: readonly string[]): RelatedCompanion[] {
   return snapshot.relations.languages
     .flatMap(({ corpus }) => companionsOf(corpus, forms, SHOWN_COMPANIONS))
     .sort((a, b) => b.strength - a.strength)

@@ -1,7 +1,8 @@
 // The hover: a term's card as Markdown.
 import type { Span } from '../base/span.js';
-import type { Companion } from '../mining/companions.js';
 import { cardOf, termAt } from '../engine/termCard.js';
+import { isBehind } from '../engine/companions.js';
+import type { RelatedCompanion } from '../mining/companions/companions.js';
 import type { NameOnCard, TermCard } from '../engine/termCard.js';
 import type { Snapshot } from '../engine/snapshot.js';
 
@@ -55,8 +56,8 @@ function table(names: readonly NameOnCard[]): string {
   return ['| Name | Status | Uses | Pages |', '|---|---|--:|--:|', ...rows].join('\n');
 }
 
-function companion({ word, place, count }: Companion): string {
-  return `${place === 'after' ? `___ ${escape(word)}` : `${escape(word)} ___`} (${count})`;
+function companion({ word, relation, count }: RelatedCompanion): string {
+  return `${isBehind(relation) ? `___ ${escape(word)}` : `${escape(word)} ___`} (${count})`;
 }
 
 function listed(words: readonly string[]): string {

@@ -1,0 +1,40 @@
+// Segments: the stretches of text within which words may meet, from a few words to a whole document.
+import { BLOCK_KINDS } from '../../prose/prose.js';
+import type { TokenStream } from '../../corpus/stream.js';
+import { TokenFlag } from '../../tokens/tokens.js';
+
+/** The kinds of segment, narrowest first. */
+export const SEGMENT_KINDS = ['window', 'sentence', 'paragraph', 'section', 'document'] as const;
+export type SegmentKind = (typeof SEGMENT_KINDS)[number];
+
+/** The segments of a stream of one kind: every row's number, from 0, rising with the rows. */
+export interface Segmentation {
+  readonly of: Uint32Array;
+  readonly count: number;
+}
+
+const HEADING = BLOCK_KINDS.indexOf('heading');
+const TITLE = BLOCK_KINDS.indexOf('title');
+
+/** Cuts a stream into sentences, paragraphs (blocks), sections (from heading to heading) or documents. */
+export function cutInto(stream: TokenStream, kind: Exclude<SegmentKind, 'window'>): Segmentation {
+  const starts = new Uint8Array(stream.length + 1);
+  for (const first of stream.documentFirst) starts[first] = 1;
+  for (let block = 0; block < stream.blockKind.length && kind !== 'document'; block++) {
+    const first = stream.blockFirst[block]!;
+    if (first === stream.blockFirst[block + 1]!) continue;
+    if (kind !== 'section' || opensSection(stream.blockKind[block]!)) starts[first] = 1;
+  }
+  const of = new Uint32Array(stream.length);
+  let number = -1;
+  for (let row = 0; row < stream.length; row++) {
+    const opensSentence = kind === 'sentence' && (stream.flags[row]! & TokenFlag.sentenceStart) !== 0;
+    if (starts[row] === 1 || opensSentence) number++;
+    of[row] = number;
+  }
+  return { of, count: number + 1 };
+}
+
+function opensSection(blockKind: number): boolean {
+  return blockKind === HEADING || blockKind === TITLE;
+}
