@@ -30,7 +30,7 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
   let corpus = Corpus.create();
   const survey = (): void => {
     corpus = finish(
-      Corpus.create().apply(sources.map((source) => ({ uri: source.uri, facts: factsOf(source, profiles) }))),
+      Corpus.create().apply(sources.map((source) => ({ uri: source.uri, facts: factsOf(source, profiles)[0] }))),
     );
   };
   const pool = new FactsPool(profiles);
@@ -59,7 +59,7 @@ export async function measureSurvey(rounds: number): Promise<Row[]> {
     times.workers.push(
       await wallMs(async () => {
         const facts = await pool.gather(sources);
-        finish(Corpus.create().apply(sources.map(({ uri }, index) => ({ uri, facts: facts[index]! }))));
+        finish(Corpus.create().apply(sources.map(({ uri }, index) => ({ uri, facts: facts[index]![0] }))));
       }),
     );
     times.mining.push(cpuMs(() => void finish(mine(corpus))));

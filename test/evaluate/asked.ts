@@ -40,7 +40,7 @@ export async function sourcesUnder(folder: string): Promise<{ sources: SourceTex
 export function ask(
   sources: readonly SourceText[],
   profiles = new Profiles(),
-  facts: readonly DocumentFacts[] = [],
+  facts: readonly (readonly DocumentFacts[])[] = [],
 ): Asked {
   const start = process.cpuUsage();
   const engine = new Engine(profiles);

@@ -32,7 +32,7 @@ const facts = files.map((uri) => ({
   facts: factsOf(
     { uri, format: uri.endsWith('.md') ? 'markdown' : 'plaintext', text: readFileSync(join(folder, uri), 'utf8') },
     profiles,
-  ),
+  )[0],
 }));
 const corpus = finish(Corpus.create().apply(facts));
 const { stream } = corpus;

@@ -43,7 +43,7 @@ export interface PseudoBand {
 /** Renames half of the uses of some nouns of each band, in both modes, and asks the whole pipeline. */
 export function recoverPseudoSynonyms(sources: readonly SourceText[]): PseudoBand[] {
   const profiles = new Profiles();
-  const facts = sources.map((source) => factsOf(source, profiles));
+  const facts = sources.map((source) => factsOf(source, profiles)[0]!);
   const corpus = finish(Corpus.create().apply(sources.map(({ uri }, index) => ({ uri, facts: facts[index]! }))));
   const bands = BANDS.map(([from, to]) => ({ from, terms: chooseTerms(corpus, from, to) }));
   const renamings: Renaming[] = [];

@@ -12,7 +12,7 @@ export function corpusOf(documents: readonly string[] | Readonly<Record<string, 
     : documents;
   const changes = Object.entries(named as Readonly<Record<string, string>>).map(([uri, text]) => ({
     uri,
-    facts: factsOf({ uri, format: 'markdown', text }, profiles),
+    facts: factsOf({ uri, format: 'markdown', text }, profiles)[0],
   }));
   return finish(Corpus.create().apply(changes));
 }

@@ -49,7 +49,7 @@ function readPackages(): SourceText[] {
 
 describe('questions on documentation from npm packages', { timeout: 60_000 }, () => {
   const profiles = new Profiles();
-  let facts: DocumentFacts[];
+  let facts: (readonly DocumentFacts[])[];
   let mixed: SourceText[];
   let asked: Asked;
   let used: (readonly [string, string])[];
@@ -64,7 +64,12 @@ describe('questions on documentation from npm packages', { timeout: 60_000 }, ()
         [`${term}s`, `${other}s`],
       ]),
     }));
-    mixed = rename(sources, read, renamings, 'occurrence');
+    mixed = rename(
+      sources,
+      read.map((each) => each[0]!),
+      renamings,
+      'occurrence',
+    );
     facts = mixed.map((source, index) =>
       source.text === sources[index]!.text ? read[index]! : factsOf(source, profiles),
     );

@@ -98,7 +98,7 @@ describe('renaming', () => {
       (_, i) => `Page ${at} says that widget ${i} turns. Use \`widget\` here.`,
     ).join('\n\n'),
   }));
-  const facts = sources.map((source) => factsOf(source, profiles));
+  const facts = sources.map((source) => factsOf(source, profiles)[0]!);
   const renamings = [{ term: 'widget', forms: new Map([['widget', 'gomp']]) }];
   const uses = (mode: 'document' | 'occurrence'): number[] =>
     rename(sources, facts, renamings, mode).map(({ text }) => text.match(/gomp/g)?.length ?? 0);

@@ -19,8 +19,8 @@ import type { EngineDocument, EngineSettings, EngineState, LoadedTermbase, Scope
 export interface DocumentUpdate {
   readonly uri: string;
   readonly source: SourceText | undefined;
-  /** Facts of exactly this text, where a worker has gathered them already. */
-  readonly facts?: DocumentFacts;
+  /** Facts of exactly this text, one for each language, where a worker has gathered them already. */
+  readonly facts?: readonly DocumentFacts[];
   /** True while an editor holds the document: its reading is kept for the next edit. */
   readonly open?: boolean;
   /** False for a document that is no part of the set: it is checked, but nothing is mined from it. */
@@ -51,7 +51,7 @@ export class Engine {
   private state: EngineState;
   private scopes = new Map<string, Scoped>();
   /** Documents whose facts are not in the relations yet, with their facts where they came along. */
-  private readonly unsettled = new Map<string, DocumentFacts | undefined>();
+  private readonly unsettled = new Map<string, readonly DocumentFacts[] | undefined>();
   private settlement = 0;
 
   constructor(private readonly profiles: Profiles) {
@@ -92,7 +92,7 @@ export class Engine {
    */
   *settle(): Work<Snapshot> {
     const mine = ++this.settlement;
-    const changes = new Map<string, DocumentFacts | undefined>();
+    const changes = new Map<string, readonly DocumentFacts[] | undefined>();
     const began = new Map<string, EngineDocument | undefined>();
     for (const uri of [...this.unsettled.keys()]) {
       // Read anew after each rest: an edit meanwhile has thrown away facts that came with the text before it.
@@ -119,8 +119,8 @@ export class Engine {
     return this.snapshot;
   }
 
-  private factsOf({ source, reading }: EngineDocument): DocumentFacts {
-    return factsOfProse((reading ?? startReading(source)).prose, this.profiles, source.text);
+  private factsOf({ source, reading }: EngineDocument): readonly DocumentFacts[] {
+    return factsOfProse((reading ?? startReading(source)).prose, this.profiles, source);
   }
 
   private changedDocuments(updates: readonly DocumentUpdate[]): LayeredMap<string, EngineDocument> {
@@ -133,7 +133,10 @@ export class Engine {
         if (known?.counted === true) this.unsettled.set(uri, undefined);
         continue;
       }
-      const same = known?.source.text === source.text && known.source.format === source.format;
+      const same =
+        known?.source.text === source.text &&
+        known.source.format === source.format &&
+        known.source.pathLanguage === source.pathLanguage;
       changes.set(uri, {
         source: same ? known.source : source,
         reading: readingAfter(known, source, same, open === true),

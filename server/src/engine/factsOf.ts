@@ -1,9 +1,11 @@
 // From a document's text to its facts, in one step: what a worker does for each file.
 import { gatherFacts } from '../facts/documentFacts.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
+import { languagesOf } from '../facts/languages.js';
 import { read } from '../prose/read.js';
 import type { Prose } from '../prose/prose.js';
 import type { SourceText } from '../text/sourceText.js';
+import { primaryLanguage } from '../text/language.js';
 import { createEnglishProfile } from '../tokens/english.js';
 import { createNeutralProfile } from '../tokens/neutral.js';
 import type { LanguageProfile } from '../tokens/tokens.js';
@@ -14,7 +16,7 @@ export class Profiles {
 
   /** The profile for a BCP 47 tag; without a tag a document is English. */
   for(tag: string | undefined): LanguageProfile {
-    const language = (tag ?? 'en').toLowerCase().split(/[-_]/)[0]!;
+    const language = primaryLanguage(tag) ?? 'en';
     let profile = this.made.get(language);
     if (profile === undefined) {
       profile = language === 'en' ? createEnglishProfile() : createNeutralProfile(language);
@@ -24,12 +26,18 @@ export class Profiles {
   }
 }
 
-/** Reads a document and gathers its facts. Never fails: what cannot be read as prose yields no tokens. */
-export function factsOf(source: SourceText, profiles: Profiles): DocumentFacts {
-  return factsOfProse(read(source), profiles, source.text);
+/**
+ * Reads a document and gathers its facts, apart for each language that it has blocks in; the document's own language first.
+ * Never fails: what cannot be read as prose yields no tokens.
+ */
+export function factsOf(source: SourceText, profiles: Profiles): readonly DocumentFacts[] {
+  return factsOfProse(read(source), profiles, source);
 }
 
-/** Gathers the facts of a document that was read already, from its text. */
-export function factsOfProse(prose: Prose, profiles: Profiles, text: string): DocumentFacts {
-  return gatherFacts(prose, profiles.for(prose.language), text);
+/** Gathers the facts of a document that was read already. */
+export function factsOfProse(prose: Prose, profiles: Profiles, source: SourceText): readonly DocumentFacts[] {
+  const { document, blocks } = languagesOf(prose, source.pathLanguage);
+  return [...new Set([document, ...blocks])].map((language) =>
+    gatherFacts(prose, profiles.for(language), source.text, (block) => blocks[block] === language),
+  );
 }

@@ -40,13 +40,12 @@ export class Relations {
 
   /** Number of documents and of counted words, over all languages. */
   get size(): { readonly documents: number; readonly words: number } {
-    let documents = 0;
     let words = 0;
-    for (const { corpus } of this.languages) {
-      documents += corpus.documents.length;
-      words += corpus.words;
-    }
-    return { documents, words };
+    for (const { corpus } of this.languages) words += corpus.words;
+    const [first, ...others] = this.languages;
+    if (others.length === 0) return { documents: first?.corpus.documents.length ?? 0, words };
+    const uris = new Set(this.languages.flatMap(({ corpus }) => corpus.documents.map(({ uri }) => uri)));
+    return { documents: uris.size, words };
   }
 
   /** Where a use that a question of this mining names stands in its source. */
@@ -64,18 +63,18 @@ export class Relations {
    * them where the options changed.
    */
   *settle(
-    changes: ReadonlyMap<string, DocumentFacts | undefined>,
+    changes: ReadonlyMap<string, readonly DocumentFacts[] | undefined>,
     options: MiningOptions = this.mining,
   ): Work<Relations> {
     const minesAlike = sameMining(options, this.mining);
     const corpora = new Map(this.languages.map((each) => [each.language, each]));
     const languages = new Set(corpora.keys());
-    for (const facts of changes.values()) if (facts !== undefined) languages.add(facts.language);
+    for (const facts of changes.values()) for (const { language } of facts ?? []) languages.add(language);
     const next: LanguageRelations[] = [];
     for (const language of [...languages].sort(compareCodeUnits)) {
       const known = corpora.get(language);
       const own = [...changes]
-        .map(([uri, facts]) => ({ uri, facts: facts?.language === language ? facts : undefined }))
+        .map(([uri, facts]) => ({ uri, facts: facts?.find((each) => each.language === language) }))
         .filter(({ uri, facts }) => facts !== undefined || known?.corpus.has(uri) === true);
       if (own.length === 0 && (known === undefined || minesAlike)) {
         if (known !== undefined) next.push(known);

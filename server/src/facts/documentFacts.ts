@@ -1,6 +1,6 @@
 // What is known of one document by its text alone: its tokens and blocks as columns.
 import { hashText } from '../base/hash.js';
-import { isFunctionWord } from '../lexicon/functionWords.js';
+import { isStopWord } from '../lexicon/stopWords.js';
 import { BLOCK_KINDS, SourceCursor } from '../prose/prose.js';
 import type { BlockContent, Prose, ProseBlock } from '../prose/prose.js';
 import type { BlockTokens, LanguageProfile } from '../tokens/tokens.js';
@@ -16,7 +16,8 @@ export interface LinkFact {
 }
 
 /**
- * The facts of one document, a function of its text, format, language and the engine's version alone.
+ * The facts of one document in one language, a function of its text, format, the language that its path names and the engine's
+ * version alone. A document with blocks in several languages has facts for each, of those blocks alone.
  * One row a token; `word` and `lemma` are indexes into `words`; `start` and `end` are UTF-16 offsets into the source.
  * Block `b` holds the tokens `[blockFirst[b], blockFirst[b + 1])`.
  */
@@ -43,16 +44,24 @@ export interface DocumentFacts {
 /**
  * Gathers the facts of a document that a reader has read.
  * @param source the text that it was read from; without it no word is known to stand in code
+ * @param isOwn whether a block (by its index) is in the profile's language; without it all are
  */
-export function gatherFacts(prose: Prose, profile: LanguageProfile, source = ''): DocumentFacts {
-  const tokens = profile.tokens(prose.blocks.map((block) => block.content));
+export function gatherFacts(
+  prose: Prose,
+  profile: LanguageProfile,
+  source = '',
+  isOwn: (block: number) => boolean = () => true,
+): DocumentFacts {
+  const blocks = prose.blocks.filter((_, index) => isOwn(index));
+  const tokens = profile.tokens(blocks.map((block) => block.content));
   const facts = new FactsBuilder(
+    profile.language,
     tokens.reduce((sum, block) => sum + block.start.length, 0),
-    prose.blocks.length,
+    blocks.length,
   );
-  prose.blocks.forEach((block, index) => facts.add(block, tokens[index]!));
+  blocks.forEach((block, index) => facts.add(block, tokens[index]!));
   if (source !== '') findCodeWords(prose, source, (word) => facts.addCodeWord(word));
-  return facts.finish(profile.language);
+  return facts.finish();
 }
 
 class FactsBuilder {
@@ -75,7 +84,11 @@ class FactsBuilder {
   private row = 0;
   private block = 0;
 
-  constructor(tokenCount: number, blockCount: number) {
+  constructor(
+    private readonly language: string,
+    tokenCount: number,
+    blockCount: number,
+  ) {
     this.word = new Uint32Array(tokenCount);
     this.lemma = new Uint32Array(tokenCount);
     this.tag = new Uint8Array(tokenCount);
@@ -122,13 +135,13 @@ class FactsBuilder {
     if (id !== undefined) this.inCode.add(id);
   }
 
-  finish(language: string): DocumentFacts {
+  finish(): DocumentFacts {
     const inCode = new Uint8Array(this.words.length);
     for (const id of this.inCode) inCode[id] = 1;
     const { words, word, lemma, tag, flags, zones, start, end, blockFirst, blockKind, blockLevel, blockHash, links } =
       this;
     return {
-      language,
+      language: this.language,
       words,
       inCode,
       word,
@@ -163,7 +176,7 @@ class FactsBuilder {
       id = this.words.length;
       this.localIds.set(text, id);
       this.words.push(text);
-      this.isFunction.push(isFunctionWord(text.toLowerCase()));
+      this.isFunction.push(isStopWord(text.toLowerCase(), this.language));
     }
     return id;
   }

@@ -6,6 +6,7 @@ import type { Snapshot } from '../engine/snapshot.js';
 import { LineIndex } from '../text/lineIndex.js';
 import { DEFAULT_FILES } from '../text/filePolicy.js';
 import type { FilePolicy } from '../text/filePolicy.js';
+import { withPathLanguage } from '../text/language.js';
 import { formatOf } from '../text/sourceText.js';
 import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri, isBelow } from '../text/uri.js';
@@ -145,7 +146,9 @@ export class FolderSession {
     for (const { path, reason } of leftOut) this.editor.log(`Left out: ${path}: ${reason}`);
     const isOld = ({ uri }: { uri: string }): boolean => !this.open.has(uri) && !this.renewed.has(uri);
     this.takeTermbases([...termbases, ...goneFrom(this.snapshot.termbases, termbases)].filter(isOld));
-    const closed = sources.filter(({ uri }) => !this.open.has(uri) && this.editor.owns(uri));
+    const closed = sources
+      .filter(({ uri }) => !this.open.has(uri) && this.editor.owns(uri))
+      .map((source) => withPathLanguage(source, this.uri));
     const facts = await this.host.gather(
       closed,
       (done, all) => report(`${done} of ${all} pages`, (80 * done) / all),
@@ -177,7 +180,7 @@ export class FolderSession {
     }
     const text = document.getText();
     if (isNew && !this.snapshot.documents.has(uri)) this.setAside(uri);
-    const source = { uri, format: formatOfDocument(document), text };
+    const source = withPathLanguage({ uri, format: formatOfDocument(document), text }, this.uri);
     this.engine.apply({ documents: [{ uri, source, open: true, counted: !this.aside.has(uri) }] });
     this.publish(uri);
     this.settleWhenIdle();
@@ -221,7 +224,8 @@ export class FolderSession {
       if (isTermbase(uri)) {
         termbases.push({ uri, text: isLoose ? undefined : await this.host.readTermbase(this.uri, uri, this.files) });
       } else {
-        documents.push({ uri, source: isLoose ? undefined : await this.host.readDocument(this.uri, uri, this.files) });
+        const source = isLoose ? undefined : await this.host.readDocument(this.uri, uri, this.files);
+        documents.push({ uri, source: source && withPathLanguage(source, this.uri) });
       }
     }
     if (this.ended.signal.aborted) return;

@@ -28,5 +28,5 @@ export interface ServerHost {
     sources: readonly SourceText[],
     progress: (done: number, all: number) => void,
     signal: AbortSignal,
-  ): Promise<readonly DocumentFacts[]>;
+  ): Promise<readonly (readonly DocumentFacts[])[]>;
 }

@@ -33,11 +33,14 @@ export class FactsPool {
     private readonly size = Math.min(4, availableParallelism()),
   ) {}
 
-  /** The facts of each document, in order. One call at a time. */
-  async gather(sources: readonly SourceText[], { progress, signal }: GatherOptions = {}): Promise<DocumentFacts[]> {
+  /** The facts of each document in each of its languages, in order. One call at a time. */
+  async gather(
+    sources: readonly SourceText[],
+    { progress, signal }: GatherOptions = {},
+  ): Promise<(readonly DocumentFacts[])[]> {
     const size = sources.reduce((sum, source) => sum + source.text.length, 0);
     if (size >= WORTH_WORKERS && this.size > 0) return this.gatherOnWorkers(sources, progress, signal);
-    const all: DocumentFacts[] = [];
+    const all: (readonly DocumentFacts[])[] = [];
     for (const source of sources) {
       signal?.throwIfAborted();
       all.push(factsOf(source, this.profiles));
@@ -57,9 +60,9 @@ export class FactsPool {
     sources: readonly SourceText[],
     progress: Progress | undefined,
     signal: AbortSignal | undefined,
-  ): Promise<DocumentFacts[]> {
+  ): Promise<(readonly DocumentFacts[])[]> {
     signal?.throwIfAborted();
-    const results = new Array<DocumentFacts>(sources.length);
+    const results = new Array<readonly DocumentFacts[]>(sources.length);
     const batches = inBatches(sources);
     while (this.workers.length < Math.min(this.size, batches.length)) {
       this.workers.push(new Worker(__filename, { workerData: ROLE }));
@@ -86,7 +89,11 @@ export class FactsPool {
 }
 
 /** Sends a worker one task and waits for its answer. */
-function answerOf(worker: Worker, task: Task, signal: AbortSignal | undefined): Promise<readonly DocumentFacts[]> {
+function answerOf(
+  worker: Worker,
+  task: Task,
+  signal: AbortSignal | undefined,
+): Promise<readonly (readonly DocumentFacts[])[]> {
   return new Promise((resolve, reject) => {
     const settle = (finish: () => void): void => {
       worker.off('message', answered);
@@ -94,7 +101,7 @@ function answerOf(worker: Worker, task: Task, signal: AbortSignal | undefined): 
       signal?.removeEventListener('abort', aborted);
       finish();
     };
-    const answered = (facts: readonly DocumentFacts[]): void => settle(() => resolve(facts));
+    const answered = (facts: readonly (readonly DocumentFacts[])[]): void => settle(() => resolve(facts));
     const failed = (error: Error): void => settle(() => reject(error));
     const aborted = (): void => settle(() => reject(signal?.reason as Error));
     worker.on('message', answered);
@@ -130,7 +137,7 @@ export function serveAsWorker(): boolean {
   const profiles = new Profiles();
   port.on('message', ({ sources }: Task) => {
     const facts = sources.map((source) => factsOf(source, profiles));
-    port.postMessage(facts, facts.flatMap(buffersOf));
+    port.postMessage(facts, facts.flat().flatMap(buffersOf));
   });
   return true;
 }

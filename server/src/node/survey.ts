@@ -6,6 +6,7 @@ import { finish } from '../base/work.js';
 import { Engine } from '../engine/engine.js';
 import type { Profiles } from '../engine/factsOf.js';
 import type { FilePolicy } from '../text/filePolicy.js';
+import { withPathLanguage } from '../text/language.js';
 import type { SourceText } from '../text/sourceText.js';
 import { FactsPool } from './factsPool.js';
 import { CannotRead, findFiles, readDocument, readText, termbasesAbove, uriOfPath } from './files.js';
@@ -45,10 +46,11 @@ export async function surveyFolders(
   const above = [...new Set((await foldersOf(absolute)).flatMap((folder) => termbasesInForce(folder, root)))];
   const termbases = [...new Set([...above, ...found.flatMap((each) => each.termbases)])];
   const leftOut = found.flatMap((each) => each.leftOut);
+  const rootUri = uriOfPath(join(root, '/'));
   const sources: SourceText[] = [];
   for (const path of documents) {
     const file = await readDocument(path);
-    if ('source' in file) sources.push(file.source);
+    if ('source' in file) sources.push(withPathLanguage(file.source, rootUri));
     else leftOut.push(file.leftOut);
   }
   const pool = new FactsPool(profiles);
@@ -73,7 +75,7 @@ export async function surveyFolders(
     progress?.('mining', 0, 1);
     finish(engine.settle());
   }
-  return { engine, rootUri: uriOfPath(join(root, '/')), leftOut };
+  return { engine, rootUri, leftOut };
 }
 
 async function readTermbase(path: string): Promise<string> {

@@ -18,6 +18,8 @@ export interface SourceText {
   readonly uri: string;
   readonly format: Format;
   readonly text: string;
+  /** The language (BCP 47 primary subtag) that the path below the documentation's root names, where it names one. */
+  readonly pathLanguage?: string;
 }
 
 /** The formats by file extension, in lower case: the one table for editor, command line and watchers. */
@@ -31,7 +33,7 @@ export const FORMATS: Readonly<Record<string, Format>> = {
   dbk: 'xml',
   md: 'markdown',
   markdown: 'markdown',
-  mdx: 'markdown',
+  mdx: 'mdx',
   txt: 'plaintext',
   text: 'plaintext',
   rst: 'restructuredtext',
@@ -39,6 +41,11 @@ export const FORMATS: Readonly<Record<string, Format>> = {
   adoc: 'asciidoc',
   asciidoc: 'asciidoc',
   asc: 'asciidoc',
+  tex: 'latex',
+  latex: 'latex',
+  yaml: 'apiDescription',
+  yml: 'apiDescription',
+  json: 'apiDescription',
 };
 
 /** The format of a file by the extension of its path or URI, or undefined for other files. */
