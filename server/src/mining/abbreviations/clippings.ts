@@ -21,7 +21,10 @@ import { termOf, usesOf } from './shortAndLong.js';
  */
 const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33, usesInFew: 4, shareInFew: 0.6 } as const;
 
-/** How sure it is, by the share of the rarer form's uses in frames that both have; least where the clipping is mostly a name of code. */
+/**
+ * How sure it is, by the share of the rarer form's uses in frames that both have; least where the clipping is mostly a name of
+ * code or one frame says it all.
+ */
 const CONFIDENCE = { least: 0.5, shared: 0.4 } as const;
 
 /** From this share of uses on pages where the code has the word, a clipping is mostly a name there. */
@@ -81,7 +84,8 @@ function askClipping(corpus: Corpus, clipping: string): Question | undefined {
   const shared = sharedFrames(corpus, framesOf(corpus, words), framesOf(corpus, best.long.uses));
   if (!standAlike(shared) || countDocuments(corpus.stream, words) < LEAST.documents) return undefined;
   const isMostlyName = short.uses.length - words.length > MOSTLY_NAME * short.uses.length;
-  const confidence = CONFIDENCE.least + (isMostlyName ? 0 : CONFIDENCE.shared * shared.share);
+  const confidence =
+    CONFIDENCE.least + (isMostlyName || shared.kinds.length < 2 ? 0 : CONFIDENCE.shared * shared.share);
   return makeQuestion(corpus, short, words, best.long, shared, confidence);
 }
 

@@ -13,8 +13,8 @@ import type { FormUses } from './longForms.js';
 
 /**
  * The least that is asked about: uses of the short form, and free uses of the long one. A mix is plain where so many of the
- * pages with the short form, and such a share of them, either never explain it or go on with the long form; or where a few pages
- * go on with the long form so often, and in such a share of what they say; else a few slips are left.
+ * pages with the short form, and such a share of them, either never explain it or go on with the long form; or where half of
+ * them go on with the long form so often, and in such a share of what they say; else a few slips are left.
  */
 const LEAST = {
   short: 2,
@@ -46,9 +46,10 @@ export function askExplained(
   const shortUses = usesOf(shortForms);
   if (shortUses.length < LEAST.short) return undefined;
   const longForms = formsOfLong(corpus, expansion.words);
-  const longUses = withoutLonger(corpus, usesOf(longForms), expansion, others);
+  const written = usesOf(longForms);
+  const longUses = withoutLonger(corpus, written, expansion, others);
   const free = freeUses(corpus, longUses, shortUses, expansion);
-  const mix = mixOf(corpus, shortUses, longUses, free);
+  const mix = mixOf(corpus, shortUses, written, free);
   if (mix === undefined) return undefined;
   const kept = new Set(longUses.map((use) => use.row));
   const shortRows = new Set(expansion.definitions.map((definition) => definition.shortRow));
@@ -99,7 +100,8 @@ function mixOf(
     return { confidence, settles: Math.min(free.all.length, short.length) };
   }
   const beside = short.filter((use) => goingOn.has(pageOf(use))).length;
-  if (slips >= LEAST.goingOn.uses && slips >= LEAST.goingOn.share * (slips + beside))
+  const isFallingBack = slips >= LEAST.goingOn.uses && slips >= LEAST.goingOn.share * (slips + beside);
+  if (isFallingBack && goingOn.size * 2 >= shortPages.size)
     return { confidence: CONFIDENCE.onFewPages, settles: Math.min(slips, beside) };
   return slips >= LEAST.slips ? { confidence: CONFIDENCE.slips, settles: slips } : undefined;
 }

@@ -101,12 +101,14 @@ function isWord(key: string): boolean {
 }
 
 function isMix(corpus: Corpus, lead: Way, way: Way, share: number, lower: Way | undefined): boolean {
-  const documents = countDocuments(corpus.stream, way.uses);
   if (way === lower) {
-    const { share: leastShare, uses, documents: leastDocuments, leading } = LEAST.lower;
-    const enough = way.uses.length >= uses && documents >= leastDocuments && lead.uses.length >= leading;
-    return share >= leastShare && enough;
+    const { share: leastShare, uses: leastUses, documents: leastDocuments, leading } = LEAST.lower;
+    // Small letters on a page whose code has them as well are a command's or a file's name.
+    const uses = way.uses.filter(({ row }) => !corpus.stream.isNameInCode(row));
+    const enough = uses.length >= leastUses && countDocuments(corpus.stream, uses) >= leastDocuments;
+    return share >= leastShare && enough && lead.uses.length >= leading;
   }
+  const documents = countDocuments(corpus.stream, way.uses);
   if (way.uses.length < LEAST.inner.uses || documents < LEAST.inner.documents || share < LEAST.inner.share)
     return false;
   if (lower !== undefined && lower.uses.length > way.uses.length) return false;

@@ -22,6 +22,12 @@ const CONFIDENCE: Readonly<Record<Lane, number>> = {
 /** The least number of uses in which two ways could be exchanged. */
 const LEAST_EXCHANGEABLE = 2;
 
+/**
+ * Two slips of the pen are found in any larger set of documents: so few places of a way with less uses than this are asked
+ * about only where someone wants to see more. A plain spelling is excused by no position.
+ */
+const SLIPS = { words: 30_000, exchangeable: 2, uses: 5, confidence: 0.45 } as const;
+
 interface SideTerm {
   readonly term: QuestionTerm;
   readonly side: Side;
@@ -36,8 +42,8 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
   const least = Math.min(...sides.map(({ term }) => term.documents));
   if (least < 2 && mix.exchangeable < leastOnOnePage(mix.lane)) return undefined;
   const slot = commonSlot(sides);
-  const confidence = confidenceOf(mix);
   const terms = sides.map(({ term }) => term);
+  const confidence = areSlips(corpus, mix, terms) ? SLIPS.confidence : confidenceOf(mix);
   const outside = terms.slice(1).reduce((sum, term) => sum + term.uses, 0);
   return {
     id: questionId('variant', terms),
@@ -53,6 +59,11 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
 /** A way of writing that one page alone has may be that page's own: it takes more of it, save for a plain spelling. */
 function leastOnOnePage(lane: Lane): number {
   return lane === 'spelling' ? 2 : 3;
+}
+
+function areSlips(corpus: Corpus, { lane, exchangeable }: Mix, terms: readonly QuestionTerm[]): boolean {
+  const isRare = exchangeable <= SLIPS.exchangeable && Math.min(...terms.map(({ uses }) => uses)) < SLIPS.uses;
+  return isRare && lane !== 'spelling' && corpus.stream.length > SLIPS.words;
 }
 
 function confidenceOf({ lane, exchangeable }: Mix): number {
