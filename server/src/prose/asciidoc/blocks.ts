@@ -1,5 +1,6 @@
 // From lines to prose blocks: which lines are which kind of block, in which zones.
 import type { BlockRole } from '../content.js';
+import { isGlossaryTitle, sendsOn } from '../glossary.js';
 import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
 import { Zone, type ZoneSet } from '../zones.js';
 import { namedAttribute, NO_ATTRIBUTES, withAttributes, type BlockAttributes } from './attributes.js';
@@ -19,6 +20,7 @@ import {
   type Delimited,
   type Line,
 } from './lines.js';
+import { NOTHING_KNOWN, type KnownInStretch, type Surroundings } from './known.js';
 import { listMark, type ListMark } from './lists.js';
 import { alternativeText } from './macros.js';
 import { cellsOf } from './tables.js';
@@ -26,12 +28,8 @@ import { cellsOf } from './tables.js';
 /** Blocks within blocks deeper than this are not read: each level costs time on every line. */
 export const DEEPEST = 24;
 
-/** What is around the blocks being read: zones, the kind of its paragraphs, and how many blocks it lies in. */
-export interface Surroundings {
-  readonly zones: ZoneSet;
-  readonly kind: BlockKind;
-  readonly depth: number;
-}
+const QUESTIONS = '?';
+const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:[-_][A-Za-z0-9]{1,8})*$/;
 
 const CODE_STYLES = new Set(
   (
@@ -69,7 +67,7 @@ export class BlockReader {
     if (!entry) return at;
     if (entry.name === 'lang') {
       const tag = text.slice(entry.value, line.end).trim();
-      if (/^[A-Za-z]{2,3}(?:[-_][A-Za-z0-9]+)*$/.test(tag)) this.language ??= tag.replaceAll('_', '-');
+      if (LANGUAGE_TAG.test(tag)) this.language ??= tag.replaceAll('_', '-');
     }
     let last = at;
     while (last + 1 < to && endsWithContinuation(text, lines[last]!)) last++;
@@ -98,14 +96,14 @@ function closingLine(text: string, lines: readonly Line[], at: number, to: numbe
 }
 
 /** Reads some lines at one depth. */
-class Stretch {
-  private attributes: BlockAttributes = NO_ATTRIBUTES;
-  /** Kind of the paragraphs of the list item that was read last, while its list goes on. */
-  private item: BlockKind | undefined;
-  /** True where what comes belongs to that item: behind `+`, or behind a term without text. */
-  private attached = false;
-  /** True behind a described term until its definition begins. */
-  private awaitsText = false;
+export class Stretch implements KnownInStretch {
+  attributes: BlockAttributes;
+  item: BlockKind | undefined;
+  attached: boolean;
+  awaitsText: boolean;
+  list: string;
+  listLanguage: string | undefined;
+  glossaryLevel: number;
 
   constructor(
     private readonly reader: BlockReader,
@@ -113,14 +111,29 @@ class Stretch {
     private readonly lines: readonly Line[],
     private readonly to: number,
     private readonly around: Surroundings,
-  ) {}
+    known = NOTHING_KNOWN,
+  ) {
+    this.attributes = known.attributes;
+    this.item = known.item;
+    this.attached = known.attached;
+    this.awaitsText = known.awaitsText;
+    this.list = known.list;
+    this.listLanguage = known.listLanguage;
+    this.glossaryLevel = known.glossaryLevel;
+  }
+
+  /** What is known now. */
+  known(): KnownInStretch {
+    const { attributes, item, attached, awaitsText, list, listLanguage, glossaryLevel } = this;
+    return { attributes, item, attached, awaitsText, list, listLanguage, glossaryLevel };
+  }
 
   read(from: number): void {
     for (let at = from; at < this.to;) at = this.step(at);
   }
 
   /** Reads what begins at a line; the index of the line behind it. */
-  private step(at: number): number {
+  step(at: number): number {
     const { text, lines, to } = this;
     const line = lines[at]!;
     if (line.start === line.end || isInclude(text, line)) return at + 1;
@@ -150,13 +163,13 @@ class Stretch {
     if (CODE_STYLES.has(style)) return this.done(this.paragraphEnd(at, false));
     const title = sectionTitle(text, line);
     if (title) {
-      this.reader.add([title], this.heading(title.level));
+      this.section(title, title.level);
       return this.done(at + 1, false);
     }
     if (this.around.depth === 0 && !this.attached && at + 1 < to) {
       const level = underlinedLevel(text, line, lines[at + 1]!);
       if (level > 0 && !listMark(text, line)) {
-        this.reader.add([line], this.heading(level));
+        this.section(line, level);
         return this.done(at + 2, false);
       }
     }
@@ -192,17 +205,42 @@ class Stretch {
         content.pop();
       }
     }
-    this.reader.add(content, this.role(this.innerKind(), zones));
+    this.addSaid(content, this.role(this.innerKind(), zones), this.awaitsText);
     return this.done(end);
+  }
+
+  private section(title: Line, level: number): void {
+    const { depth, zones } = this.around;
+    this.reader.add([title], { ...this.role('heading'), level, zones: zones | Zone.heading });
+    if (depth > 0) return;
+    const { style } = this.attributes;
+    if (style === 'glossary' || isGlossaryTitle(this.text.slice(title.start, title.end))) this.glossaryLevel = level;
+    else if (level <= this.glossaryLevel) this.glossaryLevel = 0;
+  }
+
+  /** Adds a paragraph. The first that is said of a glossary's term may be no more than another term to look at. */
+  private addSaid(lines: readonly Line[], role: BlockRole, first: boolean): void {
+    const at = this.reader.blocks.length;
+    this.reader.add(lines, role);
+    const block = this.reader.blocks[at];
+    if (!first || block?.content.glossary !== 'definition' || !sendsOn(block.content.text)) return;
+    this.reader.blocks[at] = { ...block, content: { ...block.content, glossary: 'see' } };
   }
 
   /** One item's first paragraph; what follows it may belong to it too. */
   private listItem(at: number, line: Line, mark: ListMark): number {
     const hasText = mark.start < line.end;
-    this.item = mark.term ? 'definition' : 'listItem';
+    const written = mark.term ? this.text.slice(mark.term.end, mark.start).trim() : '';
+    if (this.item === undefined || (this.attributes.style !== '' && !this.attached)) this.beginList(written);
+    const asked = mark.term !== undefined && this.list === QUESTIONS;
+    this.item = asked ? 'paragraph' : mark.term ? 'definition' : 'listItem';
     this.attached = true;
-    this.awaitsText = !hasText;
-    if (mark.term) this.reader.add([mark.term], this.role('definedTerm', Zone.definedTerm));
+    this.awaitsText = !hasText && mark.term !== undefined;
+    if (asked) this.reader.add([mark.term], this.role('paragraph'));
+    else if (mark.term) {
+      const role = this.role('definedTerm', Zone.definedTerm);
+      this.reader.add([mark.term], written === this.list ? { ...role, glossary: 'headword' } : role);
+    }
     if (!hasText) {
       this.attributes = NO_ATTRIBUTES;
       return at + 1;
@@ -210,10 +248,24 @@ class Stretch {
     const end = this.paragraphEnd(at, true);
     const content = this.contentLines(at, end);
     content[0] = { start: mark.start, end: line.end };
-    this.reader.add(content, this.role(this.item));
+    this.addSaid(content, this.role(this.item), written !== '');
     this.attributes = NO_ATTRIBUTES;
     this.attached = false;
     return end;
+  }
+
+  /** What the lines above a list say holds for all its items. */
+  private beginList(termMark: string): void {
+    const { style } = this.attributes;
+    const entries = termMark !== '' && (style === 'glossary' || (this.glossaryLevel > 0 && style !== 'qanda'));
+    this.list = entries ? termMark : style === 'qanda' ? QUESTIONS : '';
+    this.listLanguage = this.ownLanguage();
+  }
+
+  /** The language that the lines above a block give it. */
+  private ownLanguage(): string | undefined {
+    const tag = this.attributes.written === '' ? undefined : namedAttribute(this.attributes.written, 'lang');
+    return tag !== undefined && LANGUAGE_TAG.test(tag) ? tag.replaceAll('_', '-') : undefined;
   }
 
   private delimited(at: number, kind: Delimited): number {
@@ -228,7 +280,7 @@ class Stretch {
     else if (kind !== 'verbatim' && !CODE_STYLES.has(style)) {
       const quoted = kind === 'quote' || style === 'quote' || style === 'verse';
       const zones = styleZones(style) | (quoted ? Zone.quotation : 0);
-      this.inner(lines, at + 1, close, { zones: this.around.zones | zones, kind: this.innerKind() });
+      this.inner(lines, at + 1, close, { ...this.role(this.innerKind(), zones) });
     }
     return this.done(Math.min(to, close + 1));
   }
@@ -245,17 +297,17 @@ class Stretch {
   }
 
   private table(at: number, close: number): void {
-    const { text, lines, around } = this;
+    const { text, lines } = this;
     const opening = text[lines[at]!.start]!;
-    const zones = around.zones | Zone.tableCell;
+    const role = this.role('tableCell', Zone.tableCell);
     for (const cell of cellsOf(text, lines, at + 1, close, opening, this.attributes)) {
       if (cell.style === 'l' || cell.style === 'm') continue;
       if (cell.style === 'a') {
-        this.inner(withoutIndent(text, cell.lines), 0, cell.lines.length, { zones, kind: 'tableCell' });
+        this.inner(withoutIndent(text, cell.lines), 0, cell.lines.length, role);
         continue;
       }
       for (const paragraph of paragraphs(cell.lines)) {
-        this.reader.add(paragraph, { kind: 'tableCell', level: 0, zones });
+        this.reader.add(paragraph, role);
       }
     }
   }
@@ -302,16 +354,27 @@ class Stretch {
   }
 
   private role(kind: BlockKind, zones: ZoneSet = 0): BlockRole {
-    return { kind, level: 0, zones: this.around.zones | zones };
+    const { around } = this;
+    const inList = this.attached && this.item !== undefined;
+    const said = inList && this.list !== '' && this.list !== QUESTIONS;
+    return {
+      kind,
+      level: 0,
+      zones: around.zones | zones,
+      language: this.ownLanguage() ?? (inList ? this.listLanguage : undefined) ?? around.language,
+      glossary: said ? 'definition' : around.glossary,
+    };
   }
 
-  private heading(level: number): BlockRole {
-    return { kind: 'heading', level, zones: this.around.zones | Zone.heading };
+  private endList(): void {
+    this.item = undefined;
+    this.list = '';
+    this.listLanguage = undefined;
   }
 
   /** A block was read: its attributes are used up, and it ended the list unless it belongs to an item. */
   private done(next: number, inList = this.attached): number {
-    if (!inList) this.item = undefined;
+    if (!inList) this.endList();
     this.attributes = NO_ATTRIBUTES;
     this.attached = false;
     this.awaitsText = false;

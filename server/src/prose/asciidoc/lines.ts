@@ -10,12 +10,12 @@ export interface Line {
 export type Delimited = 'verbatim' | 'comment' | 'example' | 'sidebar' | 'open' | 'quote' | 'table';
 
 /**
- * The lines of the text from an offset on. Preprocessor conditionals (`ifdef::`, `endif::` …) are left out, so that every
+ * The lines of `[from, to)` of a text, which stand at a line's start or at the text's end. Preprocessor conditionals (`ifdef::`, `endif::` …) are left out, so that every
  * branch is read; of the one-line form `ifdef::name[content]` the content is left.
  */
-export function linesOf(text: string, from: number): Line[] {
+export function linesOf(text: string, from: number, to: number): Line[] {
   const lines: Line[] = [];
-  for (let start = from; start < text.length;) {
+  for (let start = from; start < to;) {
     let next = text.indexOf('\n', start);
     if (next < 0) next = text.length;
     let end = next;
