@@ -13,6 +13,6 @@ import { readUses } from './wordUse.js';
 export function* askSynonyms(corpus: Corpus, options: MiningOptions = DEFAULT_MINING): Work<Question[]> {
   const uses = readUses(corpus);
   yield;
-  const questions = [...(yield* askNouns(corpus, uses, options)), ...(yield* askVerbs(corpus, uses))];
+  const questions = [...(yield* askNouns(corpus, uses, options)), ...(yield* askVerbs(corpus, uses, options))];
   return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }

@@ -4,9 +4,12 @@ import { PairTable } from '../../base/pairTable.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import type { SparseVector } from '../../corpus/statistics/similarity.js';
-import { dampedTfIdf } from '../../corpus/statistics/weights.js';
+import { isContent } from '../../corpus/stream.js';
 import type { TokenStream } from '../../corpus/stream.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
+import { usageMeasures } from '../options.js';
+import type { UsageMeasures, Weighting } from '../options.js';
+import { weigher } from './contextWeights.js';
 import type { Segments } from './segment.js';
 
 /** The kinds of context. Words are compared by their dictionary forms. */
@@ -20,6 +23,7 @@ const Relation = {
   governedBy: 7,
   modifiedBy: 8,
   modifies: 9,
+  near: 10,
 } as const;
 
 /** Stands for the start or end of a sentence among neighbouring words. */
@@ -40,7 +44,7 @@ export interface Contexts {
 }
 
 /**
- * Gathers the contexts of every occurrence of every term. Weights: ln(1 + c) · ln(n/df) over the terms met.
+ * Gathers the contexts of every occurrence of every term. Usual weights: ln(1 + c) · ln(n/df) over the terms met.
  * @param halved terms that get two more vectors each, in this order: of their uses in every other of their documents, and
  *   of the rest; they show how alike two names of one thing are used here. They count in no df.
  */
@@ -49,8 +53,11 @@ export function* gatherContexts(
   segments: Segments,
   terms: number,
   halved: readonly number[] = [],
+  measures: UsageMeasures = usageMeasures({}),
 ): Work<Contexts> {
   const { stream, vocabulary } = corpus;
+  const isAdjacent = measures.contexts === 'all' || measures.contexts === 'adjacent';
+  const isSyntactic = measures.contexts === 'all' || measures.contexts === 'syntactic';
   const features = new PairTable();
   const pairs = new PairTable();
   const cells = new PairTable();
@@ -59,13 +66,18 @@ export function* gatherContexts(
     counts.add(cells.idOf(term, features.idOf(relation, word)));
   };
   const gather = (term: number, first: number, end: number): void => {
+    if (isAdjacent) gatherAdjacent(term, first, end);
+    if (isSyntactic) relate(stream, first, end, (relation, word) => put(term, relation, word));
+    if (measures.contexts === 'window')
+      visitWindow(stream, first, end, measures.windowWords, (word) => put(term, Relation.near, word));
+  };
+  const gatherAdjacent = (term: number, first: number, end: number): void => {
     const before = neighbour(stream, first, -1);
     const after = neighbour(stream, end - 1, 1);
     put(term, Relation.before, before);
     put(term, Relation.after, after);
     if (before !== EDGE) put(term, Relation.twoBefore, pairs.idOf(neighbour(stream, first - 1, -1), before));
     if (after !== EDGE) put(term, Relation.twoAfter, pairs.idOf(after, neighbour(stream, end, 1)));
-    relate(stream, first, end, (relation, word) => put(term, relation, word));
   };
   const halves = halvesOf(stream, segments, terms, halved);
   for (let i = 0; i < segments.count; i++) {
@@ -83,6 +95,8 @@ export function* gatherContexts(
     const relation = features.leftOf(feature);
     const code = features.rightOf(feature);
     switch (relation) {
+      case Relation.near:
+        return frame(`${word(code)} …`, '');
       case Relation.twoBefore:
         return frame(`${word(pairs.leftOf(code))} ${word(pairs.rightOf(code))}`, '');
       case Relation.twoAfter:
@@ -95,7 +109,8 @@ export function* gatherContexts(
         return frame(word(code), '');
     }
   };
-  return { vectors: weigh(cells, counts, features.size, terms, terms + 2 * halved.length), describe };
+  const vectors = weigh(cells, counts, features.size, terms, terms + 2 * halved.length, measures.weighting);
+  return { vectors, describe };
 }
 
 /** The commonest written form of each dictionary form: readers know “qualified”, not “qualify”, where that is what stands. */
@@ -157,6 +172,21 @@ function neighbour(stream: TokenStream, row: number, step: -1 | 1): number {
   return stream.lemma[at]! + 1;
 }
 
+/** The words of content within so many words of a term, in its sentence. */
+function visitWindow(
+  stream: TokenStream,
+  first: number,
+  end: number,
+  width: number,
+  visit: (word: number) => void,
+): void {
+  const starts = (row: number): boolean => (stream.flags[row]! & TokenFlag.sentenceStart) !== 0;
+  for (let row = first, steps = 0; steps < width && row > 0 && !starts(row); steps++)
+    if (isContent(stream, --row)) visit(stream.lemma[row]! + 1);
+  for (let row = end, steps = 0; steps < width && row < stream.length && !starts(row); row++, steps++)
+    if (isContent(stream, row)) visit(stream.lemma[row]! + 1);
+}
+
 /** Grammatical relations read off the tags around a noun phrase. */
 function relate(stream: TokenStream, first: number, end: number, put: (relation: number, word: number) => void): void {
   const { tag, flags, lemma } = stream;
@@ -202,7 +232,14 @@ function isPhrasePart(tag: number): boolean {
  * Weighs the cells of `all` rows, of which the first `terms` are terms and make the df. Cells are visited in order of
  * their features, so that every vector comes out sorted.
  */
-function weigh(cells: PairTable, counts: CountColumn, features: number, terms: number, all: number): SparseVector[] {
+function weigh(
+  cells: PairTable,
+  counts: CountColumn,
+  features: number,
+  terms: number,
+  all: number,
+  weighting: Weighting,
+): SparseVector[] {
   const df = new Uint32Array(features);
   const sizes = new Uint32Array(all);
   const isMet = new Uint8Array(terms);
@@ -226,13 +263,14 @@ function weigh(cells: PairTable, counts: CountColumn, features: number, terms: n
   }
   const rows = Array.from(sizes, (size) => ({ ids: new Uint32Array(size), weights: new Float64Array(size) }));
   const filled = new Uint32Array(all);
+  const weight = weigher(weighting, cells, (cell) => counts.get(cell), { features, terms, rows: all, df, met });
   for (const cell of byFeature) {
     const feature = cells.rightOf(cell);
     if (!says(feature)) continue;
     const row = cells.leftOf(cell);
     const at = filled[row]!++;
     rows[row]!.ids[at] = feature;
-    rows[row]!.weights[at] = dampedTfIdf(counts.get(cell), df[feature]!, met);
+    rows[row]!.weights[at] = weight(cell);
   }
   return rows;
 }

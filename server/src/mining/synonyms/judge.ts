@@ -1,6 +1,8 @@
 // Pairs of noun terms before the judge: what must not be asked is refused, the rest gets its facts and a score.
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
+import { usageMeasures } from '../options.js';
+import type { UsageMeasures } from '../options.js';
 import { isRefused, readSeparations } from './apart.js';
 import type { Separations } from './apart.js';
 import { gatherContexts } from './contexts.js';
@@ -8,9 +10,8 @@ import type { Contexts } from './contexts.js';
 import { countSideBySide } from './coordination.js';
 import type { Pair } from './evidence.js';
 import { isGeneralNoun } from './generalWords.js';
-import { selfSimilarity, termsToHalve } from './likeness.js';
+import { SIMILARITY_OF, selfSimilarity, termsToHalve } from './likeness.js';
 import { compareTerms } from './neighbours.js';
-import { lin } from '../../corpus/statistics/similarity.js';
 import type { SparseVector } from '../../corpus/statistics/similarity.js';
 import type { Neighbours } from './neighbours.js';
 import type { Occurrences } from './occurrences.js';
@@ -49,6 +50,7 @@ export class Judge {
     readonly terms: readonly Term[],
     readonly segments: Segments,
     private readonly occurrences: Occurrences,
+    private readonly measures: UsageMeasures = usageMeasures({}),
   ) {
     this.separations = readSeparations(corpus, segments);
   }
@@ -63,7 +65,7 @@ export class Judge {
     if (this.gathered === undefined) yield* this.gather();
     const able = pairs.filter((pair) => this.isAble(pair));
     yield;
-    const { likeness } = yield* compareTerms(this.vectors, able, [], 0);
+    const { likeness } = yield* compareTerms(this.vectors, able, [], 0, this.measures.similarity);
     const wanted = new Set(able.map((pair) => this.keyOf(pair)));
     const sideBySide = countSideBySide(this.corpus, this.segments, this.terms, wanted);
     yield;
@@ -88,13 +90,14 @@ export class Judge {
     if (this.gathered === undefined) yield* this.gather();
     const wanted = new Set(some);
     const vectors = this.vectors.map((vector, term) => (wanted.has(term) ? vector : EMPTY));
-    return (yield* compareTerms(vectors, [], some, keep)).nearest;
+    return (yield* compareTerms(vectors, [], some, keep, this.measures.similarity)).nearest;
   }
 
   /** The similarity of two terms as a share of what two names of one thing have here; once contexts are gathered. */
   shareOf(a: number, b: number): number {
     const { vectors } = this.gathered!;
-    return lin(vectors[a]!, vectors[b]!) / this.self(Math.min(this.segments.uses[a]!, this.segments.uses[b]!));
+    const similarity = SIMILARITY_OF[this.measures.similarity];
+    return similarity(vectors[a]!, vectors[b]!) / this.self(Math.min(this.segments.uses[a]!, this.segments.uses[b]!));
   }
 
   private get vectors(): readonly SparseVector[] {
@@ -104,10 +107,11 @@ export class Judge {
   private *gather(): Work<void> {
     const { corpus, segments, terms } = this;
     const halved = termsToHalve(segments.uses);
-    const contexts = yield* gatherContexts(corpus, segments, terms.length, halved);
+    const contexts = yield* gatherContexts(corpus, segments, terms.length, halved, this.measures);
     const half = (at: number) => contexts.vectors[terms.length + at]!;
     this.self = selfSimilarity(
       halved.map((term, at) => ({ one: half(2 * at), other: half(2 * at + 1), uses: segments.uses[term]! })),
+      SIMILARITY_OF[this.measures.similarity],
     );
     this.gathered = contexts;
   }

@@ -1,6 +1,10 @@
 // How alike two names of one thing are used in this corpus, by how often they are used: the yardstick of similarity.
-import { lin } from '../../corpus/statistics/similarity.js';
-import type { SparseVector } from '../../corpus/statistics/similarity.js';
+import { cosine, jaccard, lin } from '../../corpus/statistics/similarity.js';
+import type { Similarity, SparseVector } from '../../corpus/statistics/similarity.js';
+import type { SimilarityName } from '../options.js';
+
+/** The measures of likeness by name. */
+export const SIMILARITY_OF: Readonly<Record<SimilarityName, Similarity>> = { lin, cosine, jaccard };
 
 /** Terms that are halved for the yardstick, at most. */
 const HALVED = 300;
@@ -25,10 +29,11 @@ export function termsToHalve(uses: Uint32Array): number[] {
  */
 export function selfSimilarity(
   halves: readonly { readonly one: SparseVector; readonly other: SparseVector; readonly uses: number }[],
+  similarity: Similarity = lin,
 ): (uses: number) => number {
   const points = halves
     .filter(({ one, other }) => one.ids.length > 0 && other.ids.length > 0)
-    .map(({ one, other, uses }) => ({ x: Math.log(uses / 2), y: lin(one, other) }));
+    .map(({ one, other, uses }) => ({ x: Math.log(uses / 2), y: similarity(one, other) }));
   const mean = (pick: (point: { x: number; y: number }) => number): number =>
     points.reduce((sum, point) => sum + pick(point), 0) / Math.max(1, points.length);
   const x = mean((point) => point.x);

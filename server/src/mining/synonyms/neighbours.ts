@@ -1,8 +1,9 @@
 // How alike two terms are used, and their places among each other's neighbours: by their contexts, through an inverted index.
 import type { Work } from '../../base/work.js';
 import type { SparseVector } from '../../corpus/statistics/similarity.js';
+import type { SimilarityName } from '../options.js';
 
-/** How two terms compare by Lin's measure. */
+/** How two terms compare. */
 export interface Likeness {
   /** From 0 to 1. */
   readonly similarity: number;
@@ -20,7 +21,7 @@ export interface Neighbours {
 }
 
 /**
- * Compares pairs of terms against all other terms by Lin's measure (Lin 1998, eq. 4), one row a term that some pair holds.
+ * Compares pairs of terms against all other terms, usually by Lin's measure (Lin 1998, eq. 4), one row a term that some pair holds.
  * Terms must come in an order that depends on their texts alone, since ties are broken by it.
  * @param listed terms for which the `keep` nearest neighbours are wanted
  */
@@ -29,8 +30,9 @@ export function* compareTerms(
   pairs: readonly { readonly a: number; readonly b: number }[],
   listed: readonly number[],
   keep: number,
+  similarity: SimilarityName = 'lin',
 ): Work<Neighbours> {
-  const totals = vectors.map(({ weights }) => weights.reduce((sum, weight) => sum + weight, 0));
+  const totals = vectors.map(({ weights }) => sizeOf(weights, similarity));
   const index = invert(vectors);
   const shared = new Float64Array(vectors.length);
   const partners = new Map<number, number[]>();
@@ -38,6 +40,7 @@ export function* compareTerms(
     partners.set(a, [...(partners.get(a) ?? []), b]);
     partners.set(b, [...(partners.get(b) ?? []), a]);
   }
+  const isLin = similarity === 'lin';
   const wanted = new Set(listed);
   const rows = [...new Set([...partners.keys(), ...listed])].sort((x, y) => x - y);
   const places = new Map<number, { similarity: number; rank: number }>();
@@ -52,10 +55,17 @@ export function* compareTerms(
       for (let at = from; at < until; at++) {
         const other = index.terms[at]!;
         if (shared[other] === 0) touched.push(other);
-        shared[other]! += weights[i]! + index.weights[at]!;
+        if (isLin) shared[other]! += weights[i]! + index.weights[at]!;
+        else if (similarity === 'cosine') shared[other]! += weights[i]! * index.weights[at]!;
+        else shared[other]! += Math.min(weights[i]!, index.weights[at]!);
       }
     }
-    for (const other of touched) shared[other]! /= totals[term]! + totals[other]!;
+    for (const other of touched) {
+      const sum = totals[term]! + totals[other]!;
+      if (isLin) shared[other]! /= sum;
+      else if (similarity === 'cosine') shared[other]! /= totals[term]! * totals[other]!;
+      else shared[other]! /= sum - shared[other]!;
+    }
     shared[term] = 0;
     for (const other of partners.get(term) ?? []) {
       const similarity = shared[other]!;
@@ -81,6 +91,12 @@ export function* compareTerms(
     });
   }
   return { likeness, nearest };
+}
+
+/** What a vector's weights come to in the denominator of a measure: their sum, or their length for the cosine. */
+function sizeOf(weights: Float64Array, similarity: SimilarityName): number {
+  if (similarity === 'cosine') return Math.sqrt(weights.reduce((sum, weight) => sum + weight * weight, 0));
+  return weights.reduce((sum, weight) => sum + weight, 0);
 }
 
 /** The `keep` most alike, by insertion: few are kept of many. */

@@ -1,6 +1,7 @@
 // Synonymous noun terms: candidates from every source, refused, confirmed by their contexts, scored and joined.
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
+import { usageMeasures } from '../options.js';
 import type { MiningOptions } from '../options.js';
 import type { Question } from '../question.js';
 import { clusterPairs } from './clusters.js';
@@ -36,7 +37,7 @@ export function* askNouns(corpus: Corpus, uses: Uint8Array, options: MiningOptio
   pairByLinkTargets(corpus, segments, collector);
   yield;
   pairByPastEdits(terms, options.pastEdits, collector);
-  const judge = new Judge(corpus, terms, segments, occurrences);
+  const judge = new Judge(corpus, terms, segments, occurrences, usageMeasures(options));
   const judged = yield* judge.judge(collector.pairs());
   const looks = yield* pairByLooks(judge, judged);
   const questions: Question[] = [];

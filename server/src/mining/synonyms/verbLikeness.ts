@@ -4,8 +4,9 @@ import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import type { SparseVector } from '../../corpus/statistics/similarity.js';
 import { sparseVector } from '../../corpus/statistics/similarity.js';
-import { dampedTfIdf } from '../../corpus/statistics/weights.js';
 import { TAG } from '../../tokens/tokens.js';
+import type { UsageMeasures, Weighting } from '../options.js';
+import { weigher } from './contextWeights.js';
 import { compareTerms } from './neighbours.js';
 import type { Likeness } from './neighbours.js';
 import type { VerbUses } from './verbUses.js';
@@ -15,32 +16,39 @@ export function* compareVerbs(
   corpus: Corpus,
   read: VerbUses,
   pairs: readonly { readonly a: number; readonly b: number }[],
+  { weighting, similarity }: UsageMeasures,
 ): Work<ReadonlyMap<number, Likeness>> {
-  const vectors = yield* vectorsOf(corpus, read);
-  const { likeness } = yield* compareTerms(vectors, pairs, [], 0);
+  const vectors = yield* vectorsOf(corpus, read, weighting);
+  const { likeness } = yield* compareTerms(vectors, pairs, [], 0, similarity);
   return likeness;
 }
 
-function* vectorsOf({ stream }: Corpus, { verbs, pairs, uses }: VerbUses): Work<SparseVector[]> {
+function* vectorsOf({ stream }: Corpus, { verbs, pairs, uses }: VerbUses, weighting: Weighting): Work<SparseVector[]> {
   const features = new PairTable();
-  const cells = new Map<number, Map<number, number>>();
+  const cells = new PairTable();
+  const counts: number[] = [];
+  const add = (verb: number, feature: number, count: number): void => {
+    const cell = cells.idOf(verb, feature);
+    counts[cell] = (counts[cell] ?? 0) + count;
+  };
   for (let pair = 0; pair < uses.length; pair++) {
     const verb = pairs.leftOf(pair);
-    const row = cells.get(verb) ?? new Map<number, number>();
-    cells.set(verb, row);
-    const add = (feature: number, count: number): void => void row.set(feature, (row.get(feature) ?? 0) + count);
-    add(features.idOf(0, pairs.rightOf(pair)), uses[pair]!.length);
+    add(verb, features.idOf(0, pairs.rightOf(pair)), uses[pair]!.length);
     for (const { object } of uses[pair]!) {
       const next = object + 1;
-      if (next < stream.length && stream.tag[next] === TAG.ADP) add(features.idOf(1, stream.fold[next]!), 1);
+      if (next < stream.length && stream.tag[next] === TAG.ADP) add(verb, features.idOf(1, stream.fold[next]!), 1);
     }
     if (pair % 10_000 === 0) yield;
   }
   const df = new Uint32Array(features.size);
-  for (const row of cells.values()) for (const feature of row.keys()) df[feature]!++;
-  return Array.from({ length: verbs.size }, (_, verb) => {
-    const row = cells.get(verb) ?? new Map<number, number>();
-    const shared = [...row].filter(([feature]) => df[feature]! > 1);
-    return sparseVector(shared.map(([feature, count]) => [feature, dampedTfIdf(count, df[feature]!, cells.size)]));
-  });
+  const rows: [feature: number, weight: number][][] = Array.from({ length: verbs.size }, () => []);
+  for (let cell = 0; cell < cells.size; cell++) df[cells.rightOf(cell)]!++;
+  const met = new Set(uses.map((_, pair) => pairs.leftOf(pair))).size;
+  const totals = { features: features.size, terms: verbs.size, rows: verbs.size, df, met };
+  const weight = weigher(weighting, cells, (cell) => counts[cell]!, totals);
+  for (let cell = 0; cell < cells.size; cell++) {
+    const feature = cells.rightOf(cell);
+    if (df[feature]! > 1) rows[cells.leftOf(cell)]!.push([feature, weight(cell)]);
+  }
+  return rows.map((row) => sparseVector(row));
 }

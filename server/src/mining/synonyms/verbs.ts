@@ -3,6 +3,8 @@ import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { pmi } from '../../corpus/statistics/association.js';
+import { DEFAULT_MINING, usageMeasures } from '../options.js';
+import type { MiningOptions } from '../options.js';
 import type { Question, Reason } from '../question.js';
 import { times } from '../wording.js';
 import { clusterPairs } from './clusters.js';
@@ -45,7 +47,7 @@ interface Operation {
 }
 
 /** Asks about verbs that are said of the same object. */
-export function* askVerbs(corpus: Corpus, uses: Uint8Array): Work<Question[]> {
+export function* askVerbs(corpus: Corpus, uses: Uint8Array, options: MiningOptions = DEFAULT_MINING): Work<Question[]> {
   const read = yield* readVerbUses(corpus, uses);
   const objects = byObject(read);
   yield;
@@ -68,7 +70,7 @@ export function* askVerbs(corpus: Corpus, uses: Uint8Array): Work<Question[]> {
     return { object, verbs, links };
   });
   yield;
-  const likeness = yield* compareVerbs(corpus, read, [...candidates.values()]);
+  const likeness = yield* compareVerbs(corpus, read, [...candidates.values()], usageMeasures(options));
   const operations: Operation[] = [];
   for (const { object, verbs, links } of linked) {
     if (links.size > 0) operations.push(...operationsOn(object, verbs, links, likeness, read.verbs.size));
