@@ -1,10 +1,19 @@
 // Reads plain text: paragraphs between blank lines, list items, underlined headings; indented and code-like lines stay out.
 import type { SourceText } from '../text/sourceText.js';
+import {
+  gathered,
+  readUnits,
+  rereadUnits,
+  type Blockwise,
+  type BlockwiseReading,
+  type Unit,
+  type UnitWalk,
+} from './blockwise.js';
 import { ContentBuilder, type BlockRole } from './content.js';
 import { normalise } from './normalise.js';
 import type { ProseBlock } from './prose.js';
 import { markQuotations } from './quotations.js';
-import { keepContents, type Reading } from './reading.js';
+import { changeBetween, type Reading } from './reading.js';
 import { Zone } from './zones.js';
 
 const LIST_MARK = /^[ \t]*(?:[-*+•]|\(?(?:\d{1,3}|[a-zA-Z])[.)])[ \t]+(?=\S)/;
@@ -29,52 +38,122 @@ interface Line {
   readonly indent: number;
 }
 
+/** A plain text read; `margin` is the least indentation of its lines. */
+export interface PlaintextReading extends BlockwiseReading<undefined> {
+  readonly margin: number;
+}
+
 /**
  * Reads a plain text. The rules: a blank line ends a paragraph, and so does a list mark; a paragraph of which every line is
  * indented four columns or more beyond the text's own margin is code; a line of marks under a line makes that a
  * heading; a line that looks like a command, a directive, an assignment or the end of a statement is left out.
  */
-export function readPlaintext(source: SourceText): Reading {
+export function readPlaintext(source: SourceText): PlaintextReading {
   const text = normalise(source.text);
-  const lines = linesOf(text);
-  const margin = lines.reduce((least, line) => Math.min(least, line.indent), Number.POSITIVE_INFINITY);
-  const blocks: ProseBlock[] = [];
-  for (let from = 0; from < lines.length;) {
-    if (lines[from]!.indent === Number.POSITIVE_INFINITY) {
-      from++;
-      continue;
-    }
-    let to = from + 1;
-    while (to < lines.length && lines[to]!.indent !== Number.POSITIVE_INFINITY) to++;
-    readParagraph(text, lines.slice(from, to), margin, blocks);
-    from = to;
+  const start = textStart(text);
+  const margin = leastIndent(text, start);
+  return assemble(source, text, margin, readUnits(new Paragraphs(text, margin), text, start, undefined));
+}
+
+/** Reads a text again after an edit, with the same result as {@link readPlaintext} gives for the new one. */
+export function rereadPlaintext(previous: Reading, source: SourceText): PlaintextReading {
+  if (!isOurs(previous)) return readPlaintext(source);
+  const text = normalise(source.text);
+  const change = changeBetween(previous.text, text);
+  if (!change) return { ...previous, source };
+  const start = textStart(text);
+  const margin = leastIndent(text, start);
+  const same = margin === previous.margin && start === textStart(previous.text);
+  const reread = same ? rereadUnits(new Paragraphs(text, margin), previous, text, change, start) : undefined;
+  return assemble(source, text, margin, reread ?? readPlaintext(source), previous);
+}
+
+/** False for what stands in the place of a reading that failed. */
+function isOurs(reading: Reading): reading is PlaintextReading {
+  return 'units' in reading;
+}
+
+function textStart(text: string): number {
+  return text.charCodeAt(0) === 0xfeff ? 1 : 0;
+}
+
+function assemble(
+  source: SourceText,
+  text: string,
+  margin: number,
+  { units, final }: Pick<PlaintextReading, 'units' | 'final'>,
+  previous?: PlaintextReading,
+): PlaintextReading {
+  const prose = { ...gathered(units, [], previous?.prose.blocks), language: undefined };
+  return { source, text, margin, units, final, prose };
+}
+
+/** The stretches between blank lines. Each depends on its own lines and on the margin of the text. */
+class Paragraphs implements Blockwise<undefined> {
+  constructor(
+    private readonly text: string,
+    private readonly margin: number,
+  ) {}
+
+  walk(from: number, to: number): UnitWalk<undefined> {
+    const { text, margin } = this;
+    const lines = linesOf(text, from, to);
+    let at = 0;
+    const next = (): number | undefined => {
+      while (lines[at]?.indent === Number.POSITIVE_INFINITY) at++;
+      return lines[at]?.start;
+    };
+    const step = (): Unit<undefined> => {
+      const start = next()!;
+      const first = at;
+      while (at < lines.length && lines[at]!.indent !== Number.POSITIVE_INFINITY) at++;
+      const blocks: ProseBlock[] = [];
+      readParagraph(text, lines.slice(first, at), margin, blocks);
+      const reach = at < lines.length ? lines[at]!.end + 1 : Number.POSITIVE_INFINITY;
+      return { start, reach, state: undefined, blocks, problems: [] };
+    };
+    return { next, step, state: undefined };
   }
-  return { source, prose: { blocks, problems: [], language: undefined } };
+
+  sameState(): boolean {
+    return true;
+  }
 }
 
-/** Reads again; equal blocks at either end keep their content objects. */
-export function rereadPlaintext(previous: Reading, source: SourceText): Reading {
-  const reading = readPlaintext(source);
-  return { source, prose: { ...reading.prose, blocks: keepContents(previous.prose.blocks, reading.prose.blocks) } };
+/** Columns of white space before the first visible character of the line that has the fewest. */
+function leastIndent(text: string, from: number): number {
+  let least = Number.POSITIVE_INFINITY;
+  for (let start = from; start < text.length && least > 0;) {
+    const line = lineAt(text, start);
+    least = Math.min(least, line.indent);
+    start = line.end + 1;
+  }
+  return least;
 }
 
-function linesOf(text: string): Line[] {
+/** The lines of `[from, to)`, which stand at a line's start or at the text's end. */
+function linesOf(text: string, from: number, to: number): Line[] {
   const lines: Line[] = [];
-  for (let start = text.charCodeAt(0) === 0xfeff ? 1 : 0; start < text.length;) {
-    let end = text.indexOf('\n', start);
-    if (end < 0) end = text.length;
-    let indent = 0;
-    let at = start;
-    for (; at < end; at++) {
-      const unit = text.charCodeAt(at);
-      if (unit === 9) indent += 8 - (indent % 8);
-      else if (unit === 32 || unit === 12) indent++;
-      else break;
-    }
-    lines.push({ start, end, indent: at < end ? indent : Number.POSITIVE_INFINITY });
-    start = end + 1;
+  for (let start = from; start < to;) {
+    const line = lineAt(text, start);
+    lines.push(line);
+    start = line.end + 1;
   }
   return lines;
+}
+
+function lineAt(text: string, start: number): Line {
+  let end = text.indexOf('\n', start);
+  if (end < 0) end = text.length;
+  let indent = 0;
+  let at = start;
+  for (; at < end; at++) {
+    const unit = text.charCodeAt(at);
+    if (unit === 9) indent += 8 - (indent % 8);
+    else if (unit === 32 || unit === 12) indent++;
+    else break;
+  }
+  return { start, end, indent: at < end ? indent : Number.POSITIVE_INFINITY };
 }
 
 function readParagraph(text: string, lines: readonly Line[], margin: number, blocks: ProseBlock[]): void {
