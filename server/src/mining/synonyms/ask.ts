@@ -5,7 +5,7 @@ import type { Corpus } from '../../corpus/corpus.js';
 import { DEFAULT_MINING } from '../options.js';
 import type { MiningOptions } from '../options.js';
 import type { Question } from '../question.js';
-import { askNouns } from './nouns.js';
+import { askNouns, readNouns } from './nouns.js';
 import { askVerbs } from './verbs.js';
 import { readUses } from './wordUse.js';
 
@@ -13,6 +13,7 @@ import { readUses } from './wordUse.js';
 export function* askSynonyms(corpus: Corpus, options: MiningOptions = DEFAULT_MINING): Work<Question[]> {
   const uses = readUses(corpus);
   yield;
-  const questions = [...(yield* askNouns(corpus, uses, options)), ...(yield* askVerbs(corpus, uses, options))];
+  const nouns = yield* readNouns(corpus, uses);
+  const questions = [...(yield* askNouns(corpus, nouns, options)), ...(yield* askVerbs(corpus, uses, nouns, options))];
   return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }

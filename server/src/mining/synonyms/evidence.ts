@@ -2,7 +2,16 @@
 
 /** Where evidence comes from. */
 export type EvidenceKind =
-  'list' | 'dictionary' | 'component' | 'definition' | 'link-target' | 'past-edit' | 'neighbours';
+  | 'list'
+  | 'dictionary'
+  | 'component'
+  | 'definition'
+  | 'link-target'
+  | 'parallel-place'
+  | 'near-sentence'
+  | 'past-edit'
+  | 'containment'
+  | 'neighbours';
 
 /** One piece of evidence for a pair, with a sentence fragment for a writer. */
 export interface Evidence {

@@ -18,7 +18,8 @@ const NOUNS = words(
   role rule sake sample scenario section sense series set share side sign significance similarity situation solution sort
   specific stage standard start state statement step strategy structure style subject suggestion summary support technique
   tendency term thing thought time tip topic trade-off type understanding update usage use user value variant variation
-  variety version view way while whole will word work world year constraint component`,
+  variety version view way while whole will word work world year constraint component
+  call consumption data document documentation frame guide release request site space utilization website`,
 );
 
 /** Verbs that say of any object that it is there, is used, is shown or is spoken of. */
@@ -29,7 +30,7 @@ const VERBS = words(
   tell ask try attempt choose pick prefer like follow find notice observe think believe expect assume ensure guarantee
   determine decide become remain stay come go bring put change modify alter adjust improve enhance increase reduce affect
   influence cause produce yield result face encounter experience meet address handle solve tackle support come happen occur
-  appear seem look set specify define configure name add avoid prevent`,
+  appear seem look set specify define configure name add avoid prevent perform get do`,
 );
 
 /** True for a noun, in its singular, that names no concept of a field by itself. */

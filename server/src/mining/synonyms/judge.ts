@@ -19,6 +19,7 @@ import { properShare } from './properNames.js';
 import { bestScoreOf, scoreOf } from './score.js';
 import type { Known, Shape } from './score.js';
 import type { Segments } from './segment.js';
+import type { Siblings } from './siblings.js';
 import type { Term } from './terms.js';
 
 /** A pair with all that is known of it. */
@@ -33,8 +34,10 @@ const FEWEST_USES = 3;
 const LEAST_ALONE = 0.15;
 /** From this share of capitalised uses a term is a proper name. */
 const PROPER = 0.5;
-/** Least score of a pair that is asked about. */
-export const THRESHOLD = 0.1;
+/** Least score of a pair that is asked about by default, … */
+export const THRESHOLD = 0.3;
+/** … and of one that is asked about on request. */
+export const THRESHOLD_ON_REQUEST = -0.3;
 
 const EMPTY: SparseVector = { ids: new Uint32Array(0), weights: new Float64Array(0) };
 
@@ -50,6 +53,7 @@ export class Judge {
     readonly terms: readonly Term[],
     readonly segments: Segments,
     private readonly occurrences: Occurrences,
+    private readonly siblings: Siblings,
     private readonly measures: UsageMeasures = usageMeasures({}),
   ) {
     this.separations = readSeparations(corpus, segments);
@@ -77,7 +81,7 @@ export class Judge {
         likeness: likeness.get(key)!,
         self: this.self(fewest),
         sideBySide: sideBySide.get(key) ?? { coordinated: 0, contrasted: 0 },
-        siblings: this.separations.siblings(pair.a, pair.b),
+        siblings: this.separations.siblings(pair.a, pair.b) + this.siblings.ofTerms(pair.a, pair.b),
         properNames: Number(this.isProper(pair.a)) + Number(this.isProper(pair.b)),
         fewest,
       };
@@ -121,9 +125,9 @@ export class Judge {
     if (!this.isOften(a) || !this.isOften(b) || this.separations.areSeparate(a, b)) return false;
     if (pair.evidence[0]?.kind !== 'neighbours') {
       const words = this.wordsOf(pair);
-      if (bestScoreOf(words, 1) < THRESHOLD) return false;
+      if (bestScoreOf(words, 1) < THRESHOLD_ON_REQUEST) return false;
       // Likeness costs little; the places among all neighbours, which the judgement also needs, cost much.
-      if (bestScoreOf(words, this.shareOf(a, b)) < THRESHOLD) return false;
+      if (bestScoreOf(words, this.shareOf(a, b)) < THRESHOLD_ON_REQUEST) return false;
     }
     return !isRefused(this.terms[a]!, this.terms[b]!);
   }
@@ -143,7 +147,8 @@ export class Judge {
 
   private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general'> {
     const [one, other] = [this.terms[a]!, this.terms[b]!];
-    return { evidence, shape: shapeOf(one, other), general: Number(isGeneral(one)) + Number(isGeneral(other)) };
+    const general = Number(differsGenerally(one, other)) + Number(differsGenerally(other, one));
+    return { evidence, shape: shapeOf(one, other), general };
   }
 
   private keyOf({ a, b }: { readonly a: number; readonly b: number }): number {
@@ -157,9 +162,11 @@ function shapeOf({ words: a }: Term, { words: b }: Term): Shape {
   // A compound written as one word holds its parts as much as one written as two.
   const isEnd = short.length === 1 && long.length === 1 && long[0]!.endsWith(short[0]!);
   if (isWhole || isEnd) return 'contained';
-  return short.length > 1 ? 'multiword' : 'words';
+  return a.length > 1 && b.length > 1 ? 'multiword' : 'words';
 }
 
-function isGeneral({ words }: Term): boolean {
-  return words.length === 1 && isGeneralNoun(words[0]!);
+/** True where what a term has and the other lacks ends in a word of general English (data, as in sensitive data). */
+function differsGenerally({ words }: Term, { words: others }: Term): boolean {
+  const last = words.filter((word) => !others.includes(word)).at(-1);
+  return last !== undefined && isGeneralNoun(last);
 }

@@ -1,5 +1,6 @@
-// Terms alike in use alone: mutual nearest neighbours that no other source speaks for; asked only on request.
+// Questions on request: pairs that a source speaks for, but too weakly to ask unasked, and terms alike in use alone.
 import type { Work } from '../../base/work.js';
+import { THRESHOLD_ON_REQUEST } from './judge.js';
 import type { Judge, JudgedPair } from './judge.js';
 import type { Pair } from './evidence.js';
 
@@ -11,11 +12,32 @@ const MOST_TERMS = 200;
 const NEAREST = 2;
 /** Least share of the similarity that two names of one thing have. */
 const LEAST_SHARE = 0.6;
-/** Questions at most. */
-const MOST = 12;
+/** Questions at most for likeness alone, … */
+const MOST_ALIKE = 12;
+/** … and for pairs that another source speaks for. */
+const MOST_WEAK = 40;
 
-/** The pairs most alike in use that `judged` does not hold, strongest first. */
-export function* pairByLooks(judge: Judge, judged: readonly JudgedPair[]): Work<JudgedPair[]> {
+/** The pairs that are not sure: those with some evidence, then those most alike in use; the strongest first. */
+export function* pairByLooks(
+  judge: Judge,
+  judged: readonly JudgedPair[],
+  sure: readonly JudgedPair[],
+): Work<JudgedPair[]> {
+  const isSure = new Set(sure);
+  const strongestFirst = (x: JudgedPair, y: JudgedPair): number => y.score - x.score || x.a - y.a || x.b - y.b;
+  const weak = judged
+    .filter((pair) => !isSure.has(pair) && pair.score >= THRESHOLD_ON_REQUEST)
+    .sort(strongestFirst)
+    .slice(0, MOST_WEAK);
+  const alike = yield* judge.judge(yield* findAlike(judge, judged));
+  const unparted = alike.filter(({ known: { sideBySide, siblings, properNames } }) => {
+    return sideBySide.coordinated + sideBySide.contrasted + siblings + properNames === 0;
+  });
+  return [...weak, ...unparted.sort(strongestFirst).slice(0, MOST_ALIKE)];
+}
+
+/** Mutual nearest neighbours among the most used terms. */
+function* findAlike(judge: Judge, judged: readonly JudgedPair[]): Work<Pair[]> {
   const known = new Set(judged.map(({ a, b }) => `${a} ${b}`));
   const { uses } = judge.segments;
   const frequent = Array.from(uses.keys())
@@ -26,22 +48,11 @@ export function* pairByLooks(judge: Judge, judged: readonly JudgedPair[]): Work<
   const pairs: Pair[] = [];
   for (const a of frequent) {
     for (const b of nearest.get(a) ?? []) {
-      if (
-        a < b &&
-        nearest.get(b)?.includes(a) === true &&
-        !known.has(`${a} ${b}`) &&
-        judge.shareOf(a, b) >= LEAST_SHARE
-      ) {
-        const text = 'no other source speaks for it: they are merely used alike';
-        pairs.push({ a, b, evidence: [{ kind: 'neighbours', strength: 0, text, value: NEAREST }] });
-      }
+      if (a >= b || nearest.get(b)?.includes(a) !== true || known.has(`${a} ${b}`)) continue;
+      if (judge.shareOf(a, b) < LEAST_SHARE) continue;
+      const text = 'no other source speaks for it: they are merely used alike';
+      pairs.push({ a, b, evidence: [{ kind: 'neighbours', strength: 0, text, value: NEAREST }] });
     }
   }
-  const found = yield* judge.judge(pairs);
-  return found
-    .filter(({ known: { sideBySide, siblings, properNames } }) => {
-      return sideBySide.coordinated + sideBySide.contrasted + siblings + properNames === 0;
-    })
-    .sort((x, y) => y.score - x.score || x.a - y.a || x.b - y.b)
-    .slice(0, MOST);
+  return pairs;
 }

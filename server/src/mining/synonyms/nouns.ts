@@ -6,6 +6,7 @@ import type { MiningOptions } from '../options.js';
 import type { Question } from '../question.js';
 import { clusterPairs } from './clusters.js';
 import { pairByComponents } from './components.js';
+import { pairByContainment } from './containment.js';
 import { pairByStatements } from './definitions.js';
 import { PairCollector } from './evidence.js';
 import { Judge, THRESHOLD } from './judge.js';
@@ -17,15 +18,36 @@ import { indexOccurrences } from './occurrences.js';
 import { pairByPastEdits } from './pastEdits.js';
 import { makeQuestion } from './question.js';
 import { reasonsOf } from './reasons.js';
-import { confidenceOf } from './score.js';
+import { findSubstitutions, pairByParallels } from './parallel/evidence.js';
+import type { Substitution } from './parallel/passages.js';
+import { confidenceOf, isGrounded } from './score.js';
 import { segment } from './segment.js';
+import type { Segments } from './segment.js';
+import { readSiblings } from './siblings.js';
+import type { Siblings } from './siblings.js';
 import { findNounTerms } from './terms.js';
+import type { Term } from './terms.js';
 import { countWordUses } from './wordUse.js';
 
-/** Asks about noun terms of one concept, and about terms that are alike in use alone. */
-export function* askNouns(corpus: Corpus, uses: Uint8Array, options: MiningOptions): Work<Question[]> {
+/** The noun terms of a corpus, where they stand, and what the documents' parallel places and headings say of them. */
+export interface Nouns {
+  readonly terms: readonly Term[];
+  readonly segments: Segments;
+  readonly substitutions: readonly Substitution[];
+  readonly siblings: Siblings;
+}
+
+/** Reads the noun terms and their places. */
+export function* readNouns(corpus: Corpus, uses: Uint8Array): Work<Nouns> {
   const terms = yield* findNounTerms(corpus, countWordUses(corpus, uses));
   const segments = yield* segment(corpus, terms, uses);
+  const substitutions = yield* findSubstitutions(corpus, segments);
+  return { terms, segments, substitutions, siblings: readSiblings(corpus, segments) };
+}
+
+/** Asks about noun terms of one concept; those that too little speaks for are asked about on request alone. */
+export function* askNouns(corpus: Corpus, nouns: Nouns, options: MiningOptions): Work<Question[]> {
+  const { terms, segments, substitutions, siblings } = nouns;
   const occurrences = indexOccurrences(segments);
   const collector = new PairCollector(terms.length);
   pairByLists(terms, collector);
@@ -36,13 +58,17 @@ export function* askNouns(corpus: Corpus, uses: Uint8Array, options: MiningOptio
   yield;
   pairByLinkTargets(corpus, segments, collector);
   yield;
+  pairByParallels(corpus, terms, substitutions, collector);
+  pairByContainment(corpus, terms, segments, occurrences, collector);
+  yield;
   pairByPastEdits(terms, options.pastEdits, collector);
-  const judge = new Judge(corpus, terms, segments, occurrences, usageMeasures(options));
+  const judge = new Judge(corpus, terms, segments, occurrences, siblings, usageMeasures(options));
   const judged = yield* judge.judge(collector.pairs());
-  const looks = yield* pairByLooks(judge, judged);
+  const sure = judged.filter((pair) => pair.score >= THRESHOLD && isGrounded(pair.known));
+  const looks = yield* pairByLooks(judge, judged, sure);
   const questions: Question[] = [];
   for (const [kind, pairs] of [
-    ['synonym', judged.filter(({ score }) => score >= THRESHOLD)],
+    ['synonym', sure],
     ['look-alike', looks],
   ] as const) {
     const byKey = new Map<number, JudgedPair>(pairs.map((pair) => [pair.a * terms.length + pair.b, pair]));

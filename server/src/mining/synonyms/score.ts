@@ -1,4 +1,4 @@
-// How sure the evidence makes it that two terms name one concept.
+// How sure the evidence makes it that two terms name one concept, and whether it is of a kind that may be asked about unasked.
 import type { SideBySide } from './coordination.js';
 import type { Evidence, EvidenceKind } from './evidence.js';
 import type { Likeness } from './neighbours.js';
@@ -13,13 +13,13 @@ export interface Known {
   /** The similarity that two names of one thing have here, at the uses of the rarer term. */
   readonly self: number;
   readonly sideBySide: SideBySide;
-  /** Lists, tables and pages in which each has an entry of its own. */
+  /** Lists, tables and pages in which each has an entry of its own, and headings alike but for them. */
   readonly siblings: number;
-  /** Single words; terms of several words; or one term the other with a word more. */
+  /** At least one a single word; both of several words; or one term the other with a word more. */
   readonly shape: Shape;
   /** How many of the two are proper names. */
   readonly properNames: number;
-  /** How many of the two are words of general English. */
+  /** How many of the two differ from the other by a word of general English. */
   readonly general: number;
   /** Uses of the rarer term. */
   readonly fewest: number;
@@ -29,6 +29,12 @@ export interface Known {
 const BASE = -1.2;
 /** What each word of general English costs. */
 const GENERAL = 0.8;
+/** Uses below which chance plays along, and what that costs. */
+const FEW = { uses: 4, cost: 0.5 };
+/** More places than this are those of a template, and say no more. */
+const MOST_PLACES = 3;
+
+const LEXICAL: readonly EvidenceKind[] = ['list', 'dictionary', 'component'];
 
 /** The score of a pair, in logits: 0 is as likely right as wrong. Weights fitted by reading; see the evaluation. */
 export function scoreOf(known: Known): number {
@@ -40,6 +46,7 @@ export function scoreOf(known: Known): number {
   score -= 1.8 * Math.log1p(known.siblings);
   score -= known.properNames === 2 ? 2.5 : known.properNames;
   score -= GENERAL * known.general;
+  if (fewest < FEW.uses) score -= FEW.cost;
   return score;
 }
 
@@ -49,23 +56,49 @@ export function bestScoreOf(known: Pick<Known, 'evidence' | 'shape' | 'general'>
   return BASE + lexicalWeight(known) + statementWeight(known) + best - GENERAL * known.general;
 }
 
+/**
+ * Whether a pair may be asked about by default. The documents say so outright in two places; or a list agrees with them;
+ * or two terms of several words differ in words that a list calls one, which use confirms. Single words of a list are as
+ * often sisters as twins.
+ */
+export function isGrounded({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): boolean {
+  if (evidence.some(({ kind, strength }) => kind === 'definition' && strength >= (shape === 'multiword' ? 0.9 : 1)))
+    return true;
+  if (strongest(evidence, LEXICAL) === 0) return false;
+  return (
+    shape === 'multiword' ||
+    evidence.some(({ kind, value }) => isOfDocuments(kind) && (kind !== 'near-sentence' || value > 1))
+  );
+}
+
+function isOfDocuments(kind: EvidenceKind): boolean {
+  return ['definition', 'link-target', 'parallel-place', 'near-sentence', 'past-edit'].includes(kind);
+}
+
 /** List, dictionary and differing parts say the same of a pair: the strongest counts. */
 function lexicalWeight({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): number {
-  const strength = strongest(evidence, ['list', 'dictionary', 'component']);
+  const strength = strongest(evidence, LEXICAL);
   if (strength === 0) return shape === 'contained' ? -1.3 : 0;
   // A general dictionary calls the terms of a field by one name that the field tells apart (alarm, alert).
   if (shape === 'words') return -0.8 + 1.6 * strength - (strongest(evidence, ['list']) > 0 ? 0 : 0.3);
   return 0.3 + 1.8 * strength - (shape === 'contained' ? 1.3 : 0);
 }
 
-/** What the documents themselves say and do: statements, and links to one place. */
+/** What the documents themselves say and do: statements, links to one place, passages that differ in the pair alone. */
 function statementWeight({ evidence }: Pick<Known, 'evidence'>): number {
   let weight = 0;
-  // A mere parenthesis says more where a list or dictionary agrees.
-  const agrees = strongest(evidence, ['list', 'dictionary', 'component']) > 0;
+  // What says little by itself (a mere parenthesis, a sentence that may be a template) says more where a list agrees.
+  const agrees = strongest(evidence, LEXICAL) > 0;
   for (const { kind, strength, value } of evidence) {
-    if (kind === 'definition') weight += (strength >= 0.8 ? 1.7 : agrees ? 0.7 : 0.4) + 0.3 * Math.min(4, value - 1);
-    else if (kind === 'link-target') weight += 0.5 * Math.min(2, value);
+    const places = Math.min(MOST_PLACES, value);
+    if (kind === 'definition') {
+      weight += (strength >= 1 ? 2.7 : strength >= 0.8 ? 1.7 : agrees ? 0.7 : 0.4) + 0.3 * Math.min(4, value - 1);
+    } else if (kind === 'link-target') weight += 0.5 * Math.min(2, value);
+    else if (kind === 'parallel-place') weight += 0.5 * Math.log1p(places);
+    else if (kind === 'near-sentence') weight += (agrees ? 0.6 : 0.4) * Math.log1p(places);
+    else if (kind === 'containment') weight += 1.6 * strength;
+    // Editors also correct one thing to another: raw, one pair in four is right.
+    else if (kind === 'past-edit' && (agrees || value > 1)) weight += 0.4 * Math.log1p(value);
   }
   return weight;
 }

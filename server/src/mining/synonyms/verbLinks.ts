@@ -19,6 +19,8 @@ export interface VerbLink {
 
 /** Fewer uses than this with one object may be chance. */
 const FEW = 4;
+/** More places than this are those of a template, and say no more. */
+const MOST_PLACES = 3;
 
 /** The link of two verbs, or undefined where there is none or they must stay apart. */
 export function linkVerbs(one: string, other: string, object: string): VerbLink | undefined {
@@ -52,23 +54,27 @@ function fitOf(object: string, objects: readonly string[]): number {
   return objects.some((each) => synonymy(each, object, 'noun') !== undefined) ? 0.6 : 0.3;
 }
 
-/**
- * The score of two verbs with an object, in logits: 0 is as likely right as wrong.
- * @param fewest uses of the rarer verb with the object
- */
-export function scoreOfVerbs(
-  one: string,
-  other: string,
-  object: string,
-  link: VerbLink,
-  likeness: Likeness,
-  fewest: number,
-): number {
+/** Everything that is known of two verbs with an object when they are judged. */
+export interface KnownVerbs {
+  readonly link: VerbLink;
+  readonly likeness: Likeness;
+  /** Uses of the rarer verb with the object. */
+  readonly fewest: number;
+  /** The share, from 0 to 1, of its uses in which the object has the same modifiers as with the other verb. */
+  readonly sharedPhrases: number;
+  /** Passages of the documents that differ in these two verbs alone. */
+  readonly substitutions: number;
+}
+
+/** The score of two verbs with an object, in logits: 0 is as likely right as wrong. */
+export function scoreOfVerbs(one: string, other: string, object: string, known: KnownVerbs): number {
+  const { link, likeness, fewest, sharedPhrases, substitutions } = known;
   let score = -1.6 + 3 * link.strength;
   const rank = Math.sqrt(likeness.rankOfA * likeness.rankOfB);
   score -= 0.45 * Math.log(rank);
+  score += 0.6 * (sharedPhrases - 0.5) + 0.3 * Math.log1p(Math.min(MOST_PLACES, substitutions));
   if (fewest < FEW) score -= 0.3;
-  if (isGeneralNoun(object)) score -= 0.8;
-  if (isGeneralVerb(one) || isGeneralVerb(other)) score -= 1.2;
+  if (isGeneralNoun(object)) score -= 1.2;
+  score -= 1.2 * (Number(isGeneralVerb(one)) + Number(isGeneralVerb(other)));
   return score;
 }

@@ -3,17 +3,19 @@ import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { pmi } from '../../corpus/statistics/association.js';
-import { DEFAULT_MINING, usageMeasures } from '../options.js';
+import { usageMeasures } from '../options.js';
 import type { MiningOptions } from '../options.js';
 import type { Question, Reason } from '../question.js';
 import { times } from '../wording.js';
 import { clusterPairs } from './clusters.js';
 import { forEachPair } from './lexical.js';
 import { Meanings } from './links.js';
-import type { Likeness } from './neighbours.js';
+import type { Nouns } from './nouns.js';
+import { countVerbSubstitutions } from './parallel/evidence.js';
 import { makeQuestion } from './question.js';
 import { confidenceOf } from './score.js';
 import { compareVerbs } from './verbLikeness.js';
+import { compareObjects } from './verbPhrases.js';
 import { linkVerbs, scoreOfVerbs } from './verbLinks.js';
 import type { VerbLink } from './verbLinks.js';
 import { readVerbUses } from './verbUses.js';
@@ -27,10 +29,19 @@ const LEAST_PMI = 0.3;
 const MOST_COORDINATED = 2;
 /** What being set side by side once takes from the strength of a link. */
 const COORDINATED = 0.15;
-/** The best that a comparison can yield. */
-const NEAREST: Likeness = { similarity: 1, rankOfA: 1, rankOfB: 1 };
+/** The best that comparisons can yield. */
+const BEST = {
+  likeness: { similarity: 1, rankOfA: 1, rankOfB: 1 },
+  fewest: FEWEST_USES + 1,
+  sharedPhrases: 1,
+  substitutions: 3,
+};
+/** Least share of the rarer verb's uses whose object has the same modifiers as with the other verb. */
+const LEAST_SHARED = 1 / 3;
+/** Verbs that have the object in one sentence more often are steps of one procedure. */
+const MOST_IN_ONE_SENTENCE = 1;
 /** Least score of a pair that is asked about. */
-const THRESHOLD = 0.2;
+const THRESHOLD = 0.4;
 
 /** A verb as it is used with one object. */
 interface VerbWithObject {
@@ -47,8 +58,14 @@ interface Operation {
 }
 
 /** Asks about verbs that are said of the same object. */
-export function* askVerbs(corpus: Corpus, uses: Uint8Array, options: MiningOptions = DEFAULT_MINING): Work<Question[]> {
+export function* askVerbs(
+  corpus: Corpus,
+  uses: Uint8Array,
+  { substitutions, siblings }: Nouns,
+  options: MiningOptions,
+): Work<Question[]> {
   const read = yield* readVerbUses(corpus, uses);
+  const substituted = countVerbSubstitutions(corpus, substitutions);
   const objects = byObject(read);
   yield;
   const candidates = new Map<number, { a: number; b: number }>();
@@ -61,8 +78,11 @@ export function* askVerbs(corpus: Corpus, uses: Uint8Array, options: MiningOptio
       const link = linkVerbs(left.text, right.text, object);
       const coordinated = read.coordinated(left.text, right.text);
       if (link === undefined || coordinated >= MOST_COORDINATED) return;
+      // A dictionary's word is taken for verbs that the documents themselves put for one another.
+      if (link.kind === 'dictionary' && substituted(left.text, right.text) === 0) return;
+      if (siblings.ofVerbs(left.text, right.text) > 0) return;
       const isCoordinated = coordinated > 0;
-      if (scoreOfVerbs(left.text, right.text, object, link, NEAREST, FEWEST_USES + 1) < THRESHOLD) return;
+      if (scoreOfVerbs(left.text, right.text, object, { link, ...BEST }) < THRESHOLD) return;
       const key = keyOf(left.verb, right.verb, read.verbs.size);
       links.set(key, isCoordinated ? { ...link, strength: link.strength - COORDINATED } : link);
       candidates.set(key, { a: Math.min(left.verb, right.verb), b: Math.max(left.verb, right.verb) });
@@ -73,7 +93,23 @@ export function* askVerbs(corpus: Corpus, uses: Uint8Array, options: MiningOptio
   const likeness = yield* compareVerbs(corpus, read, [...candidates.values()], usageMeasures(options));
   const operations: Operation[] = [];
   for (const { object, verbs, links } of linked) {
-    if (links.size > 0) operations.push(...operationsOn(object, verbs, links, likeness, read.verbs.size));
+    if (links.size === 0) continue;
+    const judge = (one: VerbWithObject, other: VerbWithObject): { link: VerbLink; score: number } | undefined => {
+      const key = keyOf(one.verb, other.verb, read.verbs.size);
+      const link = links.get(key);
+      if (link === undefined) return undefined;
+      const { share, sameSentence } = compareObjects(corpus, one.uses, other.uses);
+      if (share < LEAST_SHARED || sameSentence > MOST_IN_ONE_SENTENCE) return undefined;
+      const score = scoreOfVerbs(one.text, other.text, object, {
+        link,
+        likeness: likeness.get(key)!,
+        fewest: Math.min(one.uses.length, other.uses.length),
+        sharedPhrases: share,
+        substitutions: substituted(one.text, other.text),
+      });
+      return { link, score };
+    };
+    operations.push(...operationsOn(object, verbs, judge));
   }
   yield;
   return groupByVerbs(operations).map((same) => questionOf(corpus, same));
@@ -86,18 +122,12 @@ function keyOf(one: number, other: number, verbs: number): number {
 function operationsOn(
   object: string,
   verbs: readonly VerbWithObject[],
-  links: ReadonlyMap<number, VerbLink>,
-  likeness: ReadonlyMap<number, Likeness>,
-  size: number,
+  judge: (one: VerbWithObject, other: VerbWithObject) => { link: VerbLink; score: number } | undefined,
 ): Operation[] {
   const holding: { a: number; b: number; score: number; link: VerbLink }[] = [];
   forEachPair([...verbs.keys()], (a, b) => {
-    const key = keyOf(verbs[a]!.verb, verbs[b]!.verb, size);
-    const link = links.get(key);
-    if (link === undefined) return;
-    const fewest = Math.min(verbs[a]!.uses.length, verbs[b]!.uses.length);
-    const score = scoreOfVerbs(verbs[a]!.text, verbs[b]!.text, object, link, likeness.get(key)!, fewest);
-    if (score >= THRESHOLD) holding.push({ a, b, score, link });
+    const judged = judge(verbs[a]!, verbs[b]!);
+    if (judged !== undefined && judged.score >= THRESHOLD) holding.push({ a, b, ...judged });
   });
   return clusterPairs(holding, verbs.length).map(({ members, weakest }) => ({
     verbs: members.map((at) => verbs[at]!),
