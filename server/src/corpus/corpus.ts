@@ -45,6 +45,11 @@ export class Corpus {
     private readonly gramUses: PagedColumn,
   ) {}
 
+  /** The language of its documents, as a BCP 47 primary subtag; English while it has none. */
+  get language(): string {
+    return this.documents[0]?.facts.language ?? 'en';
+  }
+
   get vocabulary(): Vocabulary {
     return this.tables.vocabulary;
   }
