@@ -56,4 +56,17 @@ describe('words in code', () => {
     expect(inCode(factsOfProse(again.prose, profiles, after)[0]!)).toEqual(['mast', 'buoy']);
     expect(factsOfProse(again.prose, profiles, after)).toEqual(factsOf(after, profiles));
   });
+
+  test('tags are none, what they hold is; a lone sign of one is no tag', () => {
+    expect(
+      namesIn('markdown', '```html\n<chain light="x">buoy</chain> x <mast\n```\n\nA chain, a light, a buoy, a mast.'),
+    ).toEqual(['buoy', 'mast']);
+  });
+
+  test.each(['<a', 'ab-', '# ', '/', 'a_'])('a long line of %j costs no more than its length', (sign) => {
+    const start = performance.now();
+    namesIn('markdown', `\`\`\`\n${sign.repeat(300_000)}\n\`\`\`\n`);
+    // A cost that grows with the square would take minutes.
+    expect(performance.now() - start).toBeLessThan(5000);
+  });
 });
