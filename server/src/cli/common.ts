@@ -61,6 +61,9 @@ const BY_RULE = [
   ['excluded', 'excluded files and folders'],
 ] as const;
 
+/** Beginnings of reasons for which nobody looks for a file. */
+const USUAL = ['ignored', 'a folder', 'a data file'];
+
 /** Says what was not read. Files that the user would miss are named at once, ignored ones only where `all` is asked for. */
 function sayLeftOut(host: CliHost, leftOut: readonly LeftOutFile[], all: boolean): void {
   if (all) {
@@ -68,7 +71,7 @@ function sayLeftOut(host: CliHost, leftOut: readonly LeftOutFile[], all: boolean
     return;
   }
   const isByRule = ({ reason }: LeftOutFile): boolean => BY_RULE.some(([start]) => reason.startsWith(start));
-  const isUsual = ({ reason }: LeftOutFile): boolean => reason.startsWith('ignored') || reason.startsWith('a folder');
+  const isUsual = ({ reason }: LeftOutFile): boolean => USUAL.some((start) => reason.startsWith(start));
   const missed = leftOut.filter((each) => !isByRule(each) && !isUsual(each));
   for (const { path, reason } of missed.slice(0, NAMED_LEFT_OUT)) host.note(`left out: ${path}: ${reason}\n`);
   const counted = BY_RULE.map(([start, plural]) => {

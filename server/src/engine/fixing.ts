@@ -37,9 +37,20 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
   return { kind: 'edits', edits, certain: replaced.certain };
 }
 
+/** Signs that may act as markup in a format wherever prose stands. */
+const SIGNS: Readonly<Partial<Record<Format, RegExp>>> = {
+  html: /[&<>"]/,
+  xml: /[&<>"]/,
+  mdx: /[<>{}]/,
+  notebook: /["\\]/,
+  latex: /[\\{}$&#%_^~]/,
+  apiDescription: /["'\\:#]/,
+};
+
 /** Why edits would break the format: signs that act as markup, columns of a drawn table, the line under a title. */
 function brokenLayout(format: Format, kind: BlockKind, edits: readonly TextEdit[]): string | undefined {
-  if ((format === 'html' || format === 'xml') && edits.some(({ newText }) => /[&<>"]/.test(newText))) {
+  const signs = SIGNS[format];
+  if (signs !== undefined && edits.some(({ newText }) => signs.test(newText))) {
     return 'The preferred term has signs that act as markup here: change it by hand.';
   }
   if (format !== 'restructuredtext') return undefined;

@@ -21,11 +21,14 @@ export function isTermbase(uri: string): boolean {
   return uri.endsWith(`/${TERMBASE_NAME}`);
 }
 
+/** Formats by the editor's identifiers of languages, for documents whose name tells none. */
+const BY_LANGUAGE: Readonly<Partial<Record<string, Format>>> = {
+  ...{ markdown: 'markdown', mdx: 'mdx', html: 'html', xml: 'xml', dita: 'xml', docbook: 'xml' },
+  ...{ restructuredtext: 'restructuredtext', asciidoc: 'asciidoc', latex: 'latex', tex: 'latex' },
+  ...{ yaml: 'apiDescription', json: 'apiDescription', jsonc: 'apiDescription' },
+};
+
 /** By the file's extension, as a survey reads it, whatever the editor takes it for; else by the editor's language. */
 export function formatOfDocument({ uri, languageId }: TextDocument): Format {
-  const format = formatOf(uri);
-  if (format !== undefined) return format;
-  if (languageId === 'markdown' || languageId === 'mdx') return 'markdown';
-  if (languageId === 'html' || languageId === 'restructuredtext' || languageId === 'asciidoc') return languageId;
-  return ['xml', 'dita', 'docbook'].includes(languageId) ? 'xml' : 'plaintext';
+  return formatOf(uri) ?? BY_LANGUAGE[languageId] ?? 'plaintext';
 }

@@ -11,6 +11,11 @@ export const DOCUMENT_LANGUAGES = [
   'plaintext',
   'restructuredtext',
   'asciidoc',
+  'latex',
+  'tex',
+  'yaml',
+  'json',
+  'jsonc',
 ] as const;
 
 /** The file name of a termbase. */
@@ -19,6 +24,7 @@ export const TERMBASE_NAME = 'termbase.yaml';
 /** Files whose changes on disk the client reports. */
 export const WATCHED_FILES = [
   '**/*.{md,markdown,mdx,html,htm,xhtml,xml,dita,page,dbk,txt,text,rst,rest,adoc,asciidoc,asc}',
+  '**/*.{ipynb,tex,latex,yaml,yml,json}',
   `**/${TERMBASE_NAME}`,
 ] as const;
 
@@ -33,7 +39,7 @@ export interface ClientOptions {
 
 /** Settings of a workspace folder, as `workspace/configuration` gives section `evenword`. */
 export interface FolderSettings {
-  readonly hints?: { readonly mixedTerms?: boolean };
+  readonly hints?: { readonly mixedTerms?: boolean; readonly oddCompanions?: boolean };
   readonly questions?: { readonly leastConfidence?: number };
   readonly read?: { readonly changeLogs?: boolean };
 }

@@ -1,9 +1,10 @@
 // Finding the documents of a folder and reading them, with a reason for everything that is left out.
 import { existsSync } from 'node:fs';
-import { readdir, readFile, realpath, stat } from 'node:fs/promises';
+import { open, readdir, readFile, realpath, stat } from 'node:fs/promises';
 import { basename, dirname, join, relative, sep } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { compareCodeUnits } from '../base/order.js';
+import { TELLING_START, describesInterface } from '../text/apiDescription.js';
 import { DEFAULT_FILES } from '../text/filePolicy.js';
 import type { FilePolicy } from '../text/filePolicy.js';
 import { FORMATS, formatOf } from '../text/sourceText.js';
@@ -21,6 +22,7 @@ export const LARGEST_FILE = 4 * 1024 * 1024;
 const TERMBASE = 'termbase.yaml';
 
 const GENERATED = 'says that it is generated';
+const DATA = 'a data file: it describes no interface';
 
 /** A file or folder that was not read, and why, in words for a person. */
 export interface LeftOut {
@@ -93,10 +95,25 @@ export type ReadFile = { readonly source: SourceText } | { readonly leftOut: Lef
 
 /** Reads one document. */
 export async function readDocument(path: string): Promise<ReadFile> {
+  // Most files in YAML and JSON are data: their start tells, and the rest need not be read.
+  if (formatOf(path) === 'apiDescription' && !(await startDescribesInterface(path)))
+    return { leftOut: { path, reason: DATA } };
   const file = await readText(path);
   if ('reason' in file) return { leftOut: { path, reason: file.reason } };
   if (saysGenerated(file.text)) return { leftOut: { path, reason: GENERATED } };
   return { source: { uri: uriOfPath(path), format: formatOf(path) ?? 'plaintext', text: file.text } };
+}
+
+async function startDescribesInterface(path: string): Promise<boolean> {
+  const file = await open(path).catch(() => undefined);
+  // A file that cannot be opened says why when it is read.
+  if (file === undefined) return true;
+  try {
+    const { buffer, bytesRead } = await file.read(Buffer.alloc(TELLING_START), 0, TELLING_START, 0);
+    return describesInterface(buffer.toString('utf8', 0, bytesRead));
+  } finally {
+    await file.close();
+  }
 }
 
 /** Reads a file as text; see {@link decode} for the encodings. */
@@ -122,7 +139,9 @@ export async function whyLeftOut(root: string, path: string, policy = DEFAULT_FI
   const newer = await newerCopy(root, path, namesIn, isDocument);
   if (newer !== undefined) return olderCopy(root, newer);
   const file = await readText(path);
-  return 'text' in file && saysGenerated(file.text) ? GENERATED : undefined;
+  if (!('text' in file)) return undefined;
+  if (formatOf(path) === 'apiDescription' && !describesInterface(file.text)) return DATA;
+  return saysGenerated(file.text) ? GENERATED : undefined;
 }
 
 async function reasonByRules(root: string, path: string, policy: FilePolicy): Promise<string | undefined> {

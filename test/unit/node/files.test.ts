@@ -37,6 +37,7 @@ beforeAll(async () => {
     'api/3.0/list.md': PAGE,
     'generated.md': `<!--\nThis file was generated from the schema.\n-->\n${PAGE}`,
     'picture.png': 'x',
+    'openapi.json': '{ "openapi": "3.1.0", "info": { "title": "Buoys" } }',
     'noise.md': Uint8Array.from([0xff, 0x81]),
   });
   await mkdir(join(folder.path, 'loop'));
@@ -67,6 +68,7 @@ describe('the files of a folder', () => {
       'history.md',
       'index.md',
       'keep.tmp.md',
+      'openapi.json',
       'site/docs/build/page.md',
       'v1.10/mooring.md',
       'v1.10/only-here.md',
@@ -78,6 +80,7 @@ describe('the files of a folder', () => {
       'CHANGELOG.md': 'a change log',
       'changelog-1.2.rst': 'a change log',
       'guide/change-log.md': 'a change log',
+      'site/package.json': 'a data file: it describes no interface',
       'site/dist': 'a folder that a build writes',
       vendor: 'a folder of others’ works',
       node_modules: 'a folder of dependencies or tools',
