@@ -3,6 +3,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { read, reread, startReading } from '../../server/src/prose/read.js';
 import type { SourceText } from '../../server/src/text/sourceText.js';
+import type { Format } from '../../server/src/text/sourceText.js';
+import { MDX_PAGE } from '../unit/prose/mdxPage.js';
 import { PAGE } from '../unit/prose/page.js';
 
 const SNIPPETS = [
@@ -111,8 +113,15 @@ const SNIPPETS = [
   ],
 ];
 
-function markdown(text: string): SourceText {
-  return { uri: 'file:///page.md', format: 'markdown', text };
+/** What MDX adds. */
+const MDX_SNIPPETS = [
+  ...['import A from "a"\n', 'export const a = {\n', '};\n', '`', '{', '}', '{/* ', ' */}', "{' '}", '<Tabs>\n'],
+  ...['</Tabs>\n', '<Tab label="One two">', '</Tab>', '<Warning>', '</Warning>\n', '<Card\n  title="A card"\n', '/>\n'],
+  ...['>\n', "Don't", '        deep\n', '<td>cell</td>', '<CodeBlock>\n', '</CodeBlock>\n', '    ```\n', '// no\n'],
+];
+
+function markdown(text: string, format: Format = 'markdown'): SourceText {
+  return { uri: 'file:///page.md', format, text };
 }
 
 interface Edit {
@@ -121,33 +130,36 @@ interface Edit {
   readonly insert: readonly string[];
 }
 
-const edits = fc.array(
-  fc.record<Edit>({
-    at: fc.double({ min: 0, max: 1, noNaN: true }),
-    remove: fc.oneof(
-      { weight: 3, arbitrary: fc.constant(0) },
-      fc.integer({ min: 1, max: 12 }),
-      fc.integer({ min: 1, max: 300 }),
-    ),
-    insert: fc.array(fc.constantFrom(...SNIPPETS), { maxLength: 4 }),
-  }),
-  { minLength: 1, maxLength: 8 },
-);
+const editsOf = (snippets: readonly string[]): fc.Arbitrary<Edit[]> =>
+  fc.array(
+    fc.record<Edit>({
+      at: fc.double({ min: 0, max: 1, noNaN: true }),
+      remove: fc.oneof(
+        { weight: 3, arbitrary: fc.constant(0) },
+        fc.integer({ min: 1, max: 12 }),
+        fc.integer({ min: 1, max: 300 }),
+      ),
+      insert: fc.array(fc.constantFrom(...snippets), { maxLength: 4 }),
+    }),
+    { minLength: 1, maxLength: 8 },
+  );
+const edits = editsOf(SNIPPETS);
+const mdxEdits = editsOf([...SNIPPETS, ...MDX_SNIPPETS, ...MDX_SNIPPETS]);
 
 function apply(text: string, { at, remove, insert }: Edit): string {
   const offset = Math.floor(at * text.length);
   return text.slice(0, offset) + insert.join('') + text.slice(offset + remove);
 }
 
-function expectIncrementalEqualsWhole(start: string, script: readonly Edit[]): void {
+function expectIncrementalEqualsWhole(start: string, script: readonly Edit[], format: Format = 'markdown'): void {
   let text = start;
-  let reading = startReading(markdown(text));
+  let reading = startReading(markdown(text, format));
   for (const edit of script) {
     text = apply(text, edit);
     const before = reading;
     const proseBefore = before.prose;
-    reading = reread(reading, markdown(text));
-    const fresh = JSON.stringify(read(markdown(text)));
+    reading = reread(reading, markdown(text, format));
+    const fresh = JSON.stringify(read(markdown(text, format)));
     expect(JSON.stringify(reading.prose) === fresh, JSON.stringify({ text, edit })).toBe(true);
     expect(before.prose).toBe(proseBefore);
   }
@@ -172,6 +184,22 @@ describe('reread', () => {
     const soup = fc.array(fc.constantFrom(...SNIPPETS), { maxLength: 60 }).map((parts) => parts.join(''));
     fc.assert(
       fc.property(soup, edits, (text, script) => expectIncrementalEqualsWhole(text, script)),
+      { numRuns: 400 },
+    );
+  });
+
+  it('equals reading the whole page after random edits of a realistic page of MDX', () => {
+    fc.assert(
+      fc.property(mdxEdits, (script) => expectIncrementalEqualsWhole(MDX_PAGE, script, 'mdx')),
+      { numRuns: 250 },
+    );
+  });
+
+  it('equals reading the whole of texts made of the markup of MDX alone', () => {
+    const parts = fc.constantFrom(...SNIPPETS, ...MDX_SNIPPETS, ...MDX_SNIPPETS);
+    const soup = fc.array(parts, { maxLength: 60 }).map((all) => all.join(''));
+    fc.assert(
+      fc.property(soup, mdxEdits, (text, script) => expectIncrementalEqualsWhole(text, script, 'mdx')),
       { numRuns: 400 },
     );
   });

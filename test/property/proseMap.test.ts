@@ -86,6 +86,18 @@ const PARTS = [
     '<p title="n o">',
     '> <blockquote>\n> ',
   ],
+  ...[
+    '{x}',
+    "{' '}",
+    '{',
+    '}',
+    '<A b="c &lt; d" title="e f">',
+    '</A>',
+    '<B/>',
+    'import C from "d"\n\n',
+    '<td>',
+    '</td>',
+  ],
 ];
 
 const soups = fc.array(fc.constantFrom(...PARTS), { maxLength: 40 }).map((parts) => parts.join(''));
@@ -124,7 +136,7 @@ function expectSoundMap(text: string, format: Format): void {
   }
 }
 
-describe.each<Format>(['markdown', 'plaintext'])('the prose of any %s', (format) => {
+describe.each<Format>(['markdown', 'mdx', 'plaintext'])('the prose of any %s', (format) => {
   it('maps unit by unit to its source', () => {
     fc.assert(
       fc.property(soups, (text) => expectSoundMap(text, format)),

@@ -46,6 +46,24 @@ const HOSTILE: Record<string, string> = {
   'open containers': fill(':::a\n'),
   'front matter that never ends': `---\n${fill('a: b\n')}`,
   'an unclosed title': `---\ntitle: "${fill('x\\')}\n---\n`,
+  'terms before colons': fill('a\n: b\n'),
+  'colons behind blank lines': fill('a\n\n: b\n\n'),
+  'template blocks that never end': fill('{% highlight %}\n'),
+  'tags of HTML blocks': fill('<div>\n\n'),
+  'attributes that never end': fill('<div "\n'),
+  'elements in elements': fill('<div><b>'),
+  'end tags': fill('</div>\n\n'),
+  cells: fill('<td>a'),
+  braces: fill('{'),
+  'braces on lines': fill('{\n\n'),
+  'templates on lines': fill('{`a\n\n'),
+  'comments in braces': fill('{/*\n\n'),
+  'tags that never end': fill('<A\n\n'),
+  'attributes of components': fill('<A b="\n\n'),
+  'one tag': `<A ${fill('b ')}`,
+  'module code that never ends': fill('export const a = {\n\n'),
+  'module code with strings': fill("import 'a\n\n"),
+  'components in lines': fill('<A b="c">d</A>'),
   'NUL units': fill('\0'),
   'lone surrogates': fill('\ud800'),
   'byte order marks': fill('\uFEFF'),
@@ -60,7 +78,7 @@ function milliseconds(text: string, format: Format): number {
   return (user + system) / 1000;
 }
 
-describe.each<Format>(['markdown', 'plaintext'])('reading 100 KB as %s', (format) => {
+describe.each<Format>(['markdown', 'mdx', 'plaintext'])('reading 100 KB as %s', (format) => {
   for (let i = 0; i < 10; i++) milliseconds(PROSE, format);
   const usual = Math.max(4, Array.from({ length: 5 }, () => milliseconds(PROSE, format)).sort((a, b) => a - b)[2]!);
 

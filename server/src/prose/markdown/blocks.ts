@@ -7,6 +7,7 @@ import { Zone, type ZoneSet } from '../zones.js';
 import { DEEPEST } from './containers.js';
 import { readHtmlBlock } from './htmlBlocks.js';
 import { readInline, type InlineContext } from './inline.js';
+import { readMdxFlow, stretches } from './mdxBlocks.js';
 import { LEVEL_OF, Role, ROLE_OF } from './roles.js';
 import type { Step } from './wrappers.js';
 
@@ -14,12 +15,15 @@ import type { Step } from './wrappers.js';
 export interface BlockContext extends InlineContext {
   readonly blocks: ProseBlock[];
   readonly problems: ReadingProblem[];
+  /** True where the document is MDX. */
+  readonly mdx: boolean;
   /** Tags that other blocks close or open. */
   readonly steps: Step[];
   /** Set where text behind the block, however far, could make something else of it. */
   openEnded: boolean;
 }
 
+const BROKEN = 'Code or a tag begins here and does not end: nothing is read up to the next blank line.';
 const SAFETY = /^(?:danger|warning|caution|notice)$/i;
 const CONTAINER_KIND = /[:!?=+\s]*(?:\{\s*\.?(?:callout-)?)?([A-Za-z]+)/y;
 const ALERT = /\[!([A-Za-z]+)\][+-]?[ \t]*/y;
@@ -61,6 +65,13 @@ export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, 
       break;
     case Role.htmlBlock:
       readHtmlBlock(cx, cursor, zones, kind);
+      break;
+    case Role.mdxFlow:
+      readMdxFlow(cx, cursor, zones);
+      break;
+    case Role.brokenMdx:
+      cx.openEnded = true;
+      cx.problems.push({ span: { start: cursor.from, end: cursor.to }, message: BROKEN });
       break;
     case Role.unended:
       cx.openEnded = true;
@@ -119,15 +130,18 @@ function matchAt(pattern: RegExp, text: string, at: number): RegExpExecArray | n
 }
 
 function readLeaf(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind, from: number): void {
-  const { to } = cursor;
-  const start = cursor.from;
-  const builder = new ContentBuilder(cx.text, start);
-  readInline(cx, cursor, builder, from, to);
-  const content = builder.finish({ kind, level: LEVEL_OF[cursor.type.id]!, zones }, to);
-  if (content) cx.blocks.push({ start, content: markQuotations(content) });
-  for (const block of cx.inner) {
-    const inherited = block.content.zones | (zones & (Zone.quotation | Zone.safetyMessage));
-    cx.blocks.push({ start: block.start, content: { ...block.content, zones: inherited } });
+  const whole = { from, to: cursor.to, role: { kind, level: LEVEL_OF[cursor.type.id]!, zones } };
+  const parts = cx.mdx ? stretches(cx.text, cursor, whole) : [whole];
+  for (const { from: partFrom, to, role } of parts) {
+    const start = parts.length === 1 ? cursor.from : partFrom;
+    const builder = new ContentBuilder(cx.text, start);
+    readInline(cx, cursor, builder, partFrom, to);
+    const content = builder.finish(role, to);
+    if (content) cx.blocks.push({ start, content: markQuotations(content) });
+    for (const block of cx.inner) {
+      const inherited = block.content.zones | (zones & (Zone.quotation | Zone.safetyMessage));
+      cx.blocks.push({ start: block.start, content: { ...block.content, zones: inherited } });
+    }
+    cx.inner.length = 0;
   }
-  cx.inner.length = 0;
 }

@@ -7,10 +7,12 @@ import {
   type LeafBlock,
   type Line,
   type MarkdownConfig,
+  type MarkdownParser,
 } from '@lezer/markdown';
 import { brackets } from './brackets.js';
 import { containers } from './containers.js';
 import { definitionLists } from './definitionLists.js';
+import { mdx } from './mdx.js';
 import { parsePlainRun } from './plainRun.js';
 import { templateBlocks } from './templateBlocks.js';
 import { templates } from './templates.js';
@@ -62,23 +64,27 @@ function parseLongHtml(cx: BlockContext, line: Line): boolean {
   return true;
 }
 
-/** The configured parser. It is stateless: parsing one text never affects another. */
-export const markdownParser = commonMark.configure([
-  ...[GFM, templates, templateBlocks, brackets, guards, containers, definitionLists],
-]);
+/** The configured parsers. They are stateless: parsing one text never affects another. */
+export const markdownParser = inStretches(
+  commonMark.configure([...[GFM, templates, templateBlocks, brackets, guards, containers, definitionLists]]),
+);
+export const mdxParser = inStretches(markdownParser.configure(mdx));
 
-const parseWhole = markdownParser.parseInline.bind(markdownParser);
-
-markdownParser.parseInline = (text: string, offset: number): Element[] => {
-  if (text.length <= LONGEST_INLINE) return parseWhole(text, offset);
-  const elements: Element[] = [];
-  for (let from = 0; from < text.length;) {
-    const to = cut(text, from);
-    for (const element of parseWhole(text.slice(from, to), offset + from)) elements.push(element);
-    from = to;
-  }
-  return elements;
-};
+/** The parser, with the inline markup of long blocks resolved by stretches. */
+function inStretches(parser: MarkdownParser): MarkdownParser {
+  const parseWhole = parser.parseInline.bind(parser);
+  parser.parseInline = (text: string, offset: number): Element[] => {
+    if (text.length <= LONGEST_INLINE) return parseWhole(text, offset);
+    const elements: Element[] = [];
+    for (let from = 0; from < text.length;) {
+      const to = cut(text, from);
+      for (const element of parseWhole(text.slice(from, to), offset + from)) elements.push(element);
+      from = to;
+    }
+    return elements;
+  };
+  return parser;
+}
 
 /**
  * Where the stretch that begins at `from` ends: in its second half behind the last blank or line break at which no bracket,

@@ -2,12 +2,16 @@
 import type { TreeCursor } from '@lezer/common';
 import { decodeReference } from '../characterReferences.js';
 import { ContentBuilder } from '../content.js';
-import type { ProseBlock } from '../prose.js';
+import type { ProseBlock, ReadingProblem } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import { Zone } from '../zones.js';
 import { bareTarget, foldLabel } from './definitions.js';
 import { InlineHtml } from './inlineHtml.js';
+import { attributeBlocks } from './jsxProse.js';
+import { scanTag } from './jsxTag.js';
 import { Role, ROLE_OF } from './roles.js';
+
+const BROKEN = 'A tag or an expression begins here and does not end: the rest of the line is not read.';
 
 /** What reading inline content needs to know of the document, and what it leaves behind. */
 export interface InlineContext {
@@ -17,8 +21,9 @@ export interface InlineContext {
   readonly definitions: ReadonlyMap<string, string>;
   /** Set where a link depends on the definitions. */
   usesDefinitions: boolean;
-  /** Blocks that lie in the block being read: images' alternative texts. */
+  /** Blocks that lie in the block being read: images' alternative texts, attributes. */
   readonly inner: ProseBlock[];
+  readonly problems: ReadingProblem[];
 }
 
 /** Reads the children of the cursor's node between `from` and `to` into the builder. The cursor comes back to its node. */
@@ -95,9 +100,35 @@ class InlineReader {
         this.html ??= new InlineHtml(this.cx.text, this.out, this.end);
         this.at = this.html.tag(from, to);
         return;
+      case Role.jsxTag:
+        this.jsx(from);
+        return;
+      case Role.expression:
+        this.expression(from, to);
+        break;
+      case Role.brokenInline:
+        this.out.opaque(from, to);
+        this.cx.problems.push({ span: { start: from, end: to }, message: BROKEN });
+        break;
       default:
     }
     this.at = to;
+  }
+
+  private jsx(from: number): void {
+    const { text } = this.cx;
+    const tag = scanTag(text, from);
+    if (typeof tag === 'number') return;
+    for (const block of attributeBlocks(text, tag)) this.cx.inner.push(block);
+    this.html ??= new InlineHtml(text, this.out, this.end);
+    this.at = this.html.jsx(tag, from);
+  }
+
+  /** A comment vanishes, a blank in quotation marks is one, all else is code. */
+  private expression(from: number, to: number): void {
+    const body = this.cx.text.slice(from + 1, to - 1).trim();
+    if (/^(["'`])\s+\1$/.test(body)) this.out.space(from, to);
+    else if (!/^(?:\/\*[^]*\*\/)?$/.test(body)) this.out.opaque(from, to);
   }
 
   /** Text as written up to `to`. Line breaks and the blanks around them fold, and so do blanks at markup. */

@@ -1,6 +1,9 @@
 // HTML tags inside a paragraph: which vanish, which hide what they enclose, which put it into a zone.
 import type { ContentBuilder } from '../content.js';
 import { Zone, type ZoneSet } from '../zones.js';
+import { attributeOf, componentTarget, componentZones, isLink } from './jsxProse.js';
+import type { JsxTag } from './jsxTag.js';
+import { effectOf, holdsCode } from './wrappers.js';
 
 const NAME = /<\/?([A-Za-z][A-Za-z0-9-]*)/y;
 const HREF = /\shref\s*=\s*(?:"([^"]*)"|'([^']*)'|([^\s"'=<>`]+))/i;
@@ -18,6 +21,8 @@ export class InlineHtml {
   private zones: ZoneSet = 0;
   /** Names that nothing closes in the rest of the block. */
   private unclosed: Set<string> | undefined;
+  /** Zones of the components opened last, by name. */
+  private readonly opened = new Map<string, ZoneSet>();
   private anchor: { start: number; target: string } | undefined;
 
   constructor(
@@ -46,8 +51,27 @@ export class InlineHtml {
     }
     const zone = ZONES[name];
     if (zone !== undefined) this.switchZone(zone, !closing);
-    else if (name === 'a') this.switchAnchor(closing ? undefined : HREF.exec(this.text.slice(from, to)));
+    else if (name === 'a') this.switchAnchor(closing ? undefined : targetOf(HREF.exec(this.text.slice(from, to))));
     return to;
+  }
+
+  /** Takes a tag of JSX, likewise. Names without a capital are those of HTML; of components, the children run on in the text. */
+  jsx(tag: JsxTag, from: number): number {
+    const { name, closes, isEmpty, end } = tag;
+    if (!/^[A-Z]/.test(name) && !name.includes('.')) return name === '' ? end : this.tag(from, end);
+    if (isEmpty || holdsCode(name)) {
+      const to = isEmpty || closes ? end : this.elementEnd(name, end);
+      this.out.opaque(from, to);
+      return to;
+    }
+    // Children of neighbours are no one word.
+    if (closes && this.text.charCodeAt(end) === 60) this.out.space(from, end);
+    if (isLink(name)) this.switchAnchor(closes ? undefined : componentTarget(this.text, tag));
+    const zones = componentZones(name) | (effectOf(name, (key) => attributeOf(this.text, tag, key), true)?.zones ?? 0);
+    if (!closes) this.opened.set(name, zones);
+    const own = this.opened.get(name) ?? 0;
+    if (own !== 0) this.switchZone(own, !closes);
+    return end;
   }
 
   /** Ends what is still open where the block ends. */
@@ -61,15 +85,15 @@ export class InlineHtml {
     this.out.setZones(on ? this.out.currentZones | zone : this.out.currentZones & ~zone);
   }
 
-  private switchAnchor(href: RegExpExecArray | null | undefined): void {
+  private switchAnchor(target: string | undefined): void {
     if (this.anchor) {
       this.out.link(this.anchor.start, this.anchor.target);
       this.anchor = undefined;
       this.switchZone(Zone.linkText, false);
     }
-    if (!href) return;
+    if (target === undefined) return;
     this.switchZone(Zone.linkText, true);
-    this.anchor = { start: this.out.length, target: href[1] ?? href[2] ?? href[3] ?? '' };
+    this.anchor = { start: this.out.length, target };
   }
 
   /** The end of the element whose opening tag ends at `from`; the tag's own end where nothing closes it in this block. */
@@ -82,4 +106,8 @@ export class InlineHtml {
     (this.unclosed ??= new Set()).add(name);
     return from;
   }
+}
+
+function targetOf(href: RegExpExecArray | null): string | undefined {
+  return href ? (href[1] ?? href[2] ?? href[3] ?? '') : undefined;
 }

@@ -1,4 +1,4 @@
-// Reads Markdown: the whole document, or what an edit touched.
+// Reads Markdown and MDX: the whole document, or what an edit touched.
 import type { SourceText } from '../../text/sourceText.js';
 import { normalise } from '../normalise.js';
 import type { Prose, ProseBlock, ReadingProblem } from '../prose.js';
@@ -23,7 +23,7 @@ export function readMarkdown(source: SourceText): MarkdownReading {
   const text = normalise(source.text);
   const bodyStart = text.charCodeAt(0) === 0xfeff ? 1 : 0;
   const frontMatter = readFrontMatter(text, bodyStart);
-  const stretch = parseStretch(text, frontMatter?.end ?? bodyStart, text.length);
+  const stretch = parseStretch(text, source.format, frontMatter?.end ?? bodyStart, text.length);
   const definitions = definitionTable(stretch.definitions);
   const units = readUnits(stretch, definitions, stretch.outline.length);
   return assemble(source, text, frontMatter, units, definitions);
@@ -80,7 +80,7 @@ function rereadBody(
   for (let ahead = 2 * MARGIN; ; ahead *= 4) {
     const stop = behind + ahead;
     const atEnd = stop >= old.length;
-    const stretch = parseStretch(text, from, atEnd ? text.length : old[stop]!.lineStart + shift);
+    const stretch = parseStretch(text, source.format, from, atEnd ? text.length : old[stop]!.lineStart + shift);
     const met = atEnd
       ? meet(stretch, old, behind, old.length, shift)
       : meet(stretch, old, behind, stop - MARGIN, shift);

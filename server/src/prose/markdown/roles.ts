@@ -1,5 +1,5 @@
 // What each kind of syntax node means to the reader, looked up by the node type's number.
-import { markdownParser } from './grammar.js';
+import { mdxParser } from './grammar.js';
 
 /** The reader's view of a syntax node. */
 export const Role = {
@@ -34,6 +34,11 @@ export const Role = {
   definedTerm: 24,
   definitionBody: 25,
   unended: 26,
+  mdxFlow: 27,
+  brokenMdx: 28,
+  jsxTag: 29,
+  expression: 30,
+  brokenInline: 31,
 } as const;
 
 const NAMES: Record<string, number> = {
@@ -62,6 +67,11 @@ const NAMES: Record<string, number> = {
   DefinedTerm: Role.definedTerm,
   Definition: Role.definitionBody,
   UnendedTemplate: Role.unended,
+  MdxFlow: Role.mdxFlow,
+  BrokenMdx: Role.brokenMdx,
+  JsxTag: Role.jsxTag,
+  MdxExpression: Role.expression,
+  BrokenInline: Role.brokenInline,
   Emphasis: Role.styled,
   StrongEmphasis: Role.styled,
   Strikethrough: Role.styled,
@@ -81,7 +91,8 @@ const NAMES: Record<string, number> = {
   URL: Role.url,
 };
 
-const types = markdownParser.nodeSet.types;
+// MDX has every type of node that Markdown has, by the same number.
+const types = mdxParser.nodeSet.types;
 
 /** Node type id → {@link Role}. */
 export const ROLE_OF = Uint8Array.from(types, ({ name }) =>

@@ -3,7 +3,8 @@ import type { Tree } from '@lezer/common';
 import type { ProseBlock, ReadingProblem } from '../prose.js';
 import { readBlock } from './blocks.js';
 import { definitionsIn, type Definition } from './definitions.js';
-import { markdownParser } from './grammar.js';
+import type { Format } from '../../text/sourceText.js';
+import { markdownParser, mdxParser } from './grammar.js';
 import { closeMarkers } from './templates.js';
 import type { Step } from './wrappers.js';
 
@@ -26,6 +27,7 @@ export interface Unit {
 /** A parsed stretch of a text, and where its outermost blocks begin. */
 export interface Stretch {
   readonly from: number;
+  readonly mdx: boolean;
   readonly text: string;
   readonly tree: Tree;
   /** The outermost blocks as offsets into `text`: the start of the first line, the end. */
@@ -35,9 +37,9 @@ export interface Stretch {
 }
 
 /** Parses `[from, to)` of a text, which begins at the start of a line. */
-export function parseStretch(whole: string, from: number, to: number): Stretch {
+export function parseStretch(whole: string, format: Format, from: number, to: number): Stretch {
   const text = from === 0 && to === whole.length ? whole : whole.slice(from, to);
-  const tree = markdownParser.parse(closeMarkers(text));
+  const tree = (format === 'mdx' ? mdxParser : markdownParser).parse(closeMarkers(text));
   const outline: { lineStart: number; end: number }[] = [];
   const definitions: Definition[][] = [];
   const found = definitionsIn(tree, text);
@@ -51,12 +53,12 @@ export function parseStretch(whole: string, from: number, to: number): Stretch {
       definitions.push(own);
     } while (cursor.nextSibling());
   }
-  return { from, text, tree, outline, definitions };
+  return { from, mdx: format === 'mdx', text, tree, outline, definitions };
 }
 
 /** Reads the first `count` outermost blocks of a stretch. */
 export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, string>, count: number): Unit[] {
-  const { from, text, tree, outline } = stretch;
+  const { from, mdx, text, tree, outline } = stretch;
   const units: Unit[] = [];
   const cursor = tree.cursor();
   if (count === 0 || !cursor.firstChild()) return units;
@@ -64,6 +66,7 @@ export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, str
     const i = units.length;
     const cx = {
       text,
+      mdx,
       definitions,
       usesDefinitions: false,
       inner: [],
