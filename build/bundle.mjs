@@ -15,6 +15,8 @@ const shared = {
   sourcemap: process.argv.includes('--source-maps') || watching ? 'linked' : false,
   minify: !watching,
   legalComments: 'none',
+  // Its other form looks for its parts in a way that cannot be bundled.
+  alias: { 'jsonc-parser': 'jsonc-parser/lib/esm/main.js' },
   define: { EVENWORD_VERSION: JSON.stringify(version) },
   logLevel: 'warning',
 };

@@ -19,6 +19,7 @@ await build({
   target: 'node20',
   format: 'cjs',
   sourcemap: 'inline',
+  alias: { 'jsonc-parser': 'jsonc-parser/lib/esm/main.js' },
   define: { 'import.meta.dirname': '__dirname' },
   logLevel: 'warning',
 });
