@@ -27,6 +27,8 @@ export class TestClient {
   readonly states: ReportedState[] = [];
   readonly published: { uri: string; diagnostics: Diagnostic[] }[] = [];
   readonly messages: string[] = [];
+  /** What the editor answers when it is asked for settings, by section. */
+  readonly settings = new Map<string, unknown>();
   capabilities: ServerCapabilities = {};
   private readonly versions = new Map<string, number>();
 
@@ -60,7 +62,9 @@ export class TestClient {
     });
     connection.onRequest('window/workDoneProgress/create', () => null);
     connection.onRequest('client/registerCapability', () => null);
-    connection.onRequest('workspace/configuration', ({ items }: { items: unknown[] }) => items.map(() => null));
+    connection.onRequest('workspace/configuration', ({ items }: { items: { section: string }[] }) =>
+      items.map(({ section }) => client.settings.get(section) ?? null),
+    );
     connection.listen();
     const workspaceFolders = folders.map((folder) => ({ uri: pathToFileURL(folder).href, name: folder }));
     const result = await connection.sendRequest<InitializeResult>('initialize', {
