@@ -7,17 +7,24 @@ import { TermSet } from '../findings/termSet.js';
 import type { BlockContent } from '../prose/prose.js';
 import type { Reading } from '../prose/read.js';
 import { checkedTerms } from './checkedTerms.js';
+import { oddCompanions } from './oddCompanions.js';
+import type { Relations } from './relations.js';
 
 /** The terms of one agenda, and what they found. */
 export class Checker {
   private compiled: TermSet | undefined;
   private readonly ofBlock = new WeakMap<BlockContent, readonly BlockFinding[]>();
 
-  constructor(private readonly agenda: Agenda) {}
+  /** @param relations of the documents, by which an admitted verb can be odd with an object */
+  constructor(
+    private readonly agenda: Agenda,
+    private readonly relations: Relations,
+  ) {}
 
   /** The terms that are looked for. Compiled when first asked for: thousands of terms take some milliseconds. */
   get terms(): TermSet {
-    this.compiled ??= new TermSet(checkedTerms(this.agenda));
+    const { agenda, relations } = this;
+    this.compiled ??= new TermSet([...checkedTerms(agenda), ...oddCompanions(agenda.decisions, relations)]);
     return this.compiled;
   }
 

@@ -133,7 +133,7 @@ export class Snapshot {
         ({ kind, confidence }) => kinds.includes(kind) && (kind === 'look-alike' || confidence >= leastConfidence),
       );
       const agenda = decide(scope.chain.length > 0 ? scope.chain : [emptyTermbase('')], asked);
-      scoped = { agenda, checker: new Checker(agenda) };
+      scoped = { agenda, checker: new Checker(agenda, this.state.relations) };
       this.scopes.set(scope.id, scoped);
     }
     return scoped;

@@ -4,6 +4,7 @@ import { isOpen } from '../prose/zones.js';
 import { deprecatedTerm } from './deprecatedTerm.js';
 import type { BlockFinding, Finding } from './finding.js';
 import { mixedTerms } from './mixedTerms.js';
+import { oddCompanion } from './oddCompanion.js';
 import { NOTHING_KEPT, type Kept } from './suppression.js';
 import type { Form } from '../rewrite/inflect.js';
 import { formAt, type CompiledTerm, type TermSet } from './termSet.js';
@@ -11,7 +12,7 @@ import { useOfMatch, type TermUse } from './termUse.js';
 import type { TagAt } from './useOfWord.js';
 
 /** Every rule that judges the use of a term; the first that speaks is heard. */
-const RULES: readonly ((use: TermUse) => BlockFinding | undefined)[] = [deprecatedTerm, mixedTerms];
+const RULES: readonly ((use: TermUse) => BlockFinding | undefined)[] = [deprecatedTerm, mixedTerms, oddCompanion];
 
 /**
  * The findings of one block, in the order of the text, in offsets of the block's text. They depend on the content, the terms and
@@ -25,7 +26,8 @@ export function checkBlock(content: BlockContent, terms: TermSet, tagAt?: TagAt)
   terms.scan(content.text, (index, start, end, formIndex) => {
     const term = terms.terms[index]!;
     const { status } = term.checked;
-    if (status === 'deprecated' || status === 'undecided') matches.push({ term, start, end, form: formAt(formIndex) });
+    if (status === 'deprecated' || status === 'undecided' || status === 'odd')
+      matches.push({ term, start, end, form: formAt(formIndex) });
   });
   const findings: BlockFinding[] = [];
   for (const { term, start, end, form } of matches) {

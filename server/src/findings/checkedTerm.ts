@@ -3,9 +3,10 @@ import type { PartOfSpeech } from '../rewrite/inflect.js';
 
 /**
  * What is known about a term. `apart` marks a term of two concepts kept apart: it is never reported, and protects its words.
- * `undecided` marks a name that an open question asks about.
+ * `undecided` marks a name that an open question asks about. `odd` marks an admitted verb with one object that it hardly ever
+ * has, beside the entry that admits it.
  */
-export type CheckedStatus = 'preferred' | 'admitted' | 'deprecated' | 'apart' | 'undecided';
+export type CheckedStatus = 'preferred' | 'admitted' | 'deprecated' | 'apart' | 'undecided' | 'odd';
 
 /** One term to look for. */
 export interface CheckedTerm {
@@ -13,7 +14,7 @@ export interface CheckedTerm {
   /** The term in its base form, as its termbase or question writes it. */
   readonly text: string;
   readonly status: CheckedStatus;
-  /** For a deprecated term the term to use; for an undecided one the rival that leads, absent on the leading one itself. */
+  /** For a deprecated or odd term the term to use; for an undecided one the rival that leads, absent on the leading one itself. */
   readonly preferred?: string;
   /** The concept, or for an undecided term the question. */
   readonly conceptId: string;
@@ -22,4 +23,6 @@ export interface CheckedTerm {
   readonly withObjects?: readonly string[];
   /** Only this very case is meant. */
   readonly caseSensitive?: boolean;
+  /** For an odd verb: how often it has its object, and how often the usual verb has it. */
+  readonly companionUses?: { readonly uses: number; readonly usualUses: number };
 }

@@ -4,9 +4,9 @@ import type { ZoneSet } from '../prose/zones.js';
 import type { Form } from '../rewrite/inflect.js';
 
 /** Stable names of the rules, as editors and reports show them. */
-export type FindingCode = 'deprecated-term' | 'mixed-terms';
+export type FindingCode = 'deprecated-term' | 'mixed-terms' | 'odd-companion';
 
-/** A decided thing is a warning; an undecided one is a hint and no more. */
+/** A decided thing is a warning; an undecided one, or a matter of habit, is a hint and no more. */
 export type Severity = 'hint' | 'information' | 'warning';
 
 /** A finding within one block: `span` counts UTF-16 units of the block's text. */

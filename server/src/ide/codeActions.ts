@@ -33,7 +33,7 @@ export function quickFixesAt(snapshot: Snapshot, uri: string, span: Span): Quick
     .filter((finding) => overlaps(finding.span, span) || touches(finding.span, span.start));
   const fixes: QuickFix[] = [];
   for (const finding of findings) {
-    if (finding.code !== 'deprecated-term' || finding.preferred === undefined) continue;
+    if (finding.code === 'mixed-terms' || finding.preferred === undefined) continue;
     const fix = preferredEdits(snapshot, uri, finding);
     if (fix.kind === 'edits') {
       fixes.push({

@@ -363,7 +363,8 @@ export class FolderSession {
     if (document === undefined) return;
     const shown = snapshot
       .findingsIn(uri)
-      .filter(({ code }) => code !== 'mixed-terms' || this.settings.hints?.mixedTerms !== false);
+      .filter(({ code }) => code !== 'mixed-terms' || this.settings.hints?.mixedTerms !== false)
+      .filter(({ code }) => code !== 'odd-companion' || this.settings.hints?.oddCompanions !== false);
     const lines = shown.length === 0 ? undefined : this.linesOf(document.source);
     this.publisher.publish(
       uri,

@@ -22,4 +22,10 @@ export const RULES: Readonly<Record<FindingCode, RuleText>> = {
     help: 'Answer the question once: prefer one name, admit both, or keep two concepts apart. The answer is kept in termbase.yaml.',
     level: 'note',
   },
+  'odd-companion': {
+    short: 'A word with a companion that it hardly ever has.',
+    full: 'The termbase admits several verbs for one operation, and the documentation nearly always uses another one of them with this object.',
+    help: 'Use the usual verb that the message names, or keep this one where the difference is meant.',
+    level: 'note',
+  },
 };
