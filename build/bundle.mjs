@@ -10,8 +10,6 @@ const shared = {
   absWorkingDir: root,
   bundle: true,
   platform: 'node',
-  // Some libraries' main files are made for loaders in browsers and cannot be bundled.
-  mainFields: ['module', 'main'],
   target: 'node20',
   format: 'cjs',
   sourcemap: process.argv.includes('--source-maps') || watching ? 'linked' : false,

@@ -16,8 +16,6 @@ await build({
   outfile,
   bundle: true,
   platform: 'node',
-  // Some libraries' main files are made for loaders in browsers and cannot be bundled.
-  mainFields: ['module', 'main'],
   target: 'node20',
   format: 'cjs',
   sourcemap: 'inline',
