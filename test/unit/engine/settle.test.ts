@@ -51,7 +51,7 @@ describe('a settlement', () => {
     const { relations } = engine.snapshot;
     engine.apply({ mining: { pastEdits: undefined } });
     expect(engine.needsSettling).toBe(false);
-    const pastEdits = { replacements: [] };
+    const pastEdits = { commits: [] };
     engine.apply({ mining: { pastEdits } });
     expect(engine.needsSettling).toBe(true);
     finish(engine.settle());

@@ -1,0 +1,110 @@
+// Counting past replacements of terms, and what the counts say to the engine of synonyms.
+import { describe, expect, it } from 'vitest';
+import { alignmentDistance } from '../../../server/src/base/editDistance.js';
+import { countReplacements, replacedBetween } from '../../../server/src/mining/pastEdits.js';
+import type { PastEdits, Replacement } from '../../../server/src/mining/pastEdits.js';
+import { PairCollector } from '../../../server/src/mining/synonyms/evidence.js';
+import { pairByPastEdits, pastEditKey } from '../../../server/src/mining/synonyms/pastEdits.js';
+import type { Term } from '../../../server/src/mining/synonyms/terms.js';
+
+let sentence = 0;
+const replacement = (from: string, to: string, more: Partial<Replacement> = {}): Replacement => ({
+  ...{ from, to, before: '', after: '', mends: false, page: 1, sentences: [sentence++] },
+  ...more,
+});
+const edits = (...commits: Replacement[][]): PastEdits => ({ commits });
+
+describe('replacements are counted', () => {
+  it('by direction, in commits, pages and sentences', () => {
+    const past = edits(
+      [replacement('folder', 'directory', { sentences: [-1, -2] }), replacement('folder', 'directory', { page: 2 })],
+      [replacement('folder', 'directory'), replacement('directory', 'folder')],
+    );
+    const { aByB, bByA } = replacedBetween(past, ['folder', 'folders'], ['Directory']);
+    expect(aByB).toMatchObject({ commits: 2, pages: 2, sentences: 4, mended: 0 });
+    expect(bByA).toMatchObject({ commits: 1, pages: 1, sentences: 1, mended: 0 });
+    expect(replacedBetween(past, ['page'], ['file']).aByB).toEqual({ commits: 0, pages: 0, sentences: 0, mended: 0 });
+  });
+
+  it('once where several commits changed the same sentence, and apart where a mistake was mended', () => {
+    const same = replacement('folder', 'directory');
+    const past = edits([same], [same], [replacement('folder', 'directory', { mends: true })]);
+    expect(replacedBetween(past, ['folder'], ['directory']).aByB).toMatchObject({
+      commits: 1,
+      sentences: 1,
+      mended: 1,
+    });
+  });
+
+  it('between the longest terms that the words and those beside them make', () => {
+    const past = edits([replacement('query', 'url', { before: 'set the', after: 'parameter of' })]);
+    const terms = new Set(['query', 'url', 'query parameter', 'url parameter']);
+    const pairs = countReplacements(past, (words) => (terms.has(words) ? words : undefined));
+    expect(pairs).toMatchObject([{ from: 'query parameter', to: 'url parameter', commits: 1 }]);
+    terms.delete('url parameter');
+    expect(countReplacements(past, (words) => (terms.has(words) ? words : undefined))).toMatchObject([
+      { from: 'query', to: 'url' },
+    ]);
+  });
+});
+
+describe('as evidence of synonyms', () => {
+  const terms = ['folder', 'directory', 'worker', 'work', 'plug-in'].map((text): Term => ({
+    key: pastEditKey(text),
+    words: text.split(' '),
+    forms: [],
+    uses: 9,
+  }));
+  const evidenceOf = (past: PastEdits | undefined): object[] => {
+    const pairs = new PairCollector(terms.length);
+    pairByPastEdits(terms, past, pairs);
+    return pairs.pairs();
+  };
+
+  it('speak the louder the more often they were made on their own', () => {
+    const many = Array.from({ length: 6 }, () => [replacement('folders', 'directories')]);
+    expect(evidenceOf(edits(...many))).toMatchObject([
+      {
+        a: 0,
+        b: 1,
+        evidence: [
+          {
+            kind: 'past-edit',
+            strength: 0.75,
+            value: 6,
+            text: 'writers replaced “folder” by “directory” 6 times, never the other way round',
+          },
+        ],
+      },
+    ]);
+    expect(evidenceOf(edits(many.flat()))).toMatchObject([{ evidence: [{ strength: 0.2, value: 1 }] }]);
+    const onPages = many.flat().map((one, page) => ({ ...one, page }));
+    expect(evidenceOf(edits(onPages))).toMatchObject([{ evidence: [{ value: 6 }] }]);
+  });
+
+  it('say nothing where writers went both ways or mended mistakes', () => {
+    const there = [replacement('folder', 'directory')];
+    expect(evidenceOf(edits(there, [replacement('directory', 'folder')]))).toEqual([]);
+    expect(evidenceOf(edits(there, [replacement('folder', 'directory', { mends: true })]))).toEqual([]);
+    expect(evidenceOf(undefined)).toEqual([]);
+  });
+
+  it('say nothing of two forms of a word, of slips, and of terms that are no longer used', () => {
+    expect(evidenceOf(edits([replacement('worker', 'work'), replacement('plug-in', 'plugin')]))).toEqual([]);
+    expect(evidenceOf(edits([replacement('folder', 'catalogue')]))).toEqual([]);
+  });
+});
+
+describe('the alignment distance', () => {
+  // Common examples of the measure (from memory): one swap, one substitution, and the textbook's kitten and sitting.
+  it.each([
+    ['from', 'form', 1],
+    ['stat', 'start', 1],
+    ['kitten', 'sitting', 3],
+    ['', 'abc', 3],
+    ['ca', 'abc', 3],
+  ])('of %j and %j is %d', (a, b, expected) => {
+    expect(alignmentDistance(a, b)).toBe(expected);
+    expect(alignmentDistance(b, a)).toBe(expected);
+  });
+});
