@@ -28,6 +28,12 @@ export interface JudgedPair extends Pair {
   readonly score: number;
 }
 
+/**
+ * Why a pair is not judged: used too seldom on its own, an entry or heading each, too little evidence whatever usage says, too
+ * unlike in use, or opposites and the like by the lexicon.
+ */
+export type Refusal = 'rare' | 'separate' | 'evidence' | 'usage' | 'lexicon';
+
 /** Fewest uses of a term outside longer terms, … */
 const FEWEST_USES = 3;
 /** … as a share of all its uses. */
@@ -37,7 +43,7 @@ const PROPER = 0.5;
 /** Least score of a pair that is asked about by default, … */
 export const THRESHOLD = 0.3;
 /** … and of one that is asked about on request. */
-export const THRESHOLD_ON_REQUEST = -0.3;
+export const THRESHOLD_ON_REQUEST = -0.6;
 
 const EMPTY: SparseVector = { ids: new Uint32Array(0), weights: new Float64Array(0) };
 
@@ -67,13 +73,19 @@ export class Judge {
   /** Judges the pairs that are not refused outright, in their order. */
   *judge(pairs: readonly Pair[]): Work<JudgedPair[]> {
     if (this.gathered === undefined) yield* this.gather();
-    const able = pairs.filter((pair) => this.isAble(pair));
+    const able = pairs.filter((pair) => this.refusalOf(pair) === undefined);
     yield;
-    const { likeness } = yield* compareTerms(this.vectors, able, [], 0, this.measures.similarity);
-    const wanted = new Set(able.map((pair) => this.keyOf(pair)));
+    return yield* this.weighUp(able);
+  }
+
+  /** All that is known of pairs, in their order, of refused ones too. */
+  *weighUp(pairs: readonly Pair[]): Work<JudgedPair[]> {
+    if (this.gathered === undefined) yield* this.gather();
+    const { likeness } = yield* compareTerms(this.vectors, pairs, [], 0, this.measures.similarity);
+    const wanted = new Set(pairs.map((pair) => this.keyOf(pair)));
     const sideBySide = countSideBySide(this.corpus, this.segments, this.terms, wanted);
     yield;
-    return able.map((pair) => {
+    return pairs.map((pair) => {
       const key = this.keyOf(pair);
       const fewest = Math.min(this.segments.uses[pair.a]!, this.segments.uses[pair.b]!);
       const known: Known = {
@@ -120,16 +132,18 @@ export class Judge {
     this.gathered = contexts;
   }
 
-  private isAble(pair: Pair): boolean {
+  /** Why a pair is not judged, or undefined where it is; once contexts are gathered. */
+  refusalOf(pair: Pair): Refusal | undefined {
     const { a, b } = pair;
-    if (!this.isOften(a) || !this.isOften(b) || this.separations.areSeparate(a, b)) return false;
+    if (!this.isOften(a) || !this.isOften(b)) return 'rare';
+    if (this.separations.areSeparate(a, b)) return 'separate';
     if (pair.evidence[0]?.kind !== 'neighbours') {
       const words = this.wordsOf(pair);
-      if (bestScoreOf(words, 1) < THRESHOLD_ON_REQUEST) return false;
+      if (bestScoreOf(words, 1) < THRESHOLD_ON_REQUEST) return 'evidence';
       // Likeness costs little; the places among all neighbours, which the judgement also needs, cost much.
-      if (bestScoreOf(words, this.shareOf(a, b)) < THRESHOLD_ON_REQUEST) return false;
+      if (bestScoreOf(words, this.shareOf(a, b)) < THRESHOLD_ON_REQUEST) return 'usage';
     }
-    return !isRefused(this.terms[a]!, this.terms[b]!);
+    return isRefused(this.terms[a]!, this.terms[b]!) ? 'lexicon' : undefined;
   }
 
   private isOften(term: number): boolean {
@@ -145,10 +159,11 @@ export class Judge {
     return proper;
   }
 
-  private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general'> {
+  private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general' | 'sharesWord'> {
     const [one, other] = [this.terms[a]!, this.terms[b]!];
     const general = Number(differsGenerally(one, other)) + Number(differsGenerally(other, one));
-    return { evidence, shape: shapeOf(one, other), general };
+    const sharesWord = one.words.some((word) => other.words.includes(word));
+    return { evidence, shape: shapeOf(one, other), general, sharesWord };
   }
 
   private keyOf({ a, b }: { readonly a: number; readonly b: number }): number {

@@ -45,9 +45,9 @@ export function* readNouns(corpus: Corpus, uses: Uint8Array): Work<Nouns> {
   return { terms, segments, substitutions, siblings: readSiblings(corpus, segments) };
 }
 
-/** Asks about noun terms of one concept; those that too little speaks for are asked about on request alone. */
-export function* askNouns(corpus: Corpus, nouns: Nouns, options: MiningOptions): Work<Question[]> {
-  const { terms, segments, substitutions, siblings } = nouns;
+/** Gathers the evidence of every source for pairs of noun terms. */
+export function* gatherEvidence(corpus: Corpus, nouns: Nouns, options: MiningOptions): Work<PairCollector> {
+  const { terms, segments, substitutions } = nouns;
   const occurrences = indexOccurrences(segments);
   const collector = new PairCollector(terms.length);
   pairByLists(terms, collector);
@@ -62,6 +62,14 @@ export function* askNouns(corpus: Corpus, nouns: Nouns, options: MiningOptions):
   pairByContainment(corpus, terms, segments, occurrences, collector);
   yield;
   pairByPastEdits(terms, options.pastEdits, collector);
+  return collector;
+}
+
+/** Asks about noun terms of one concept; those that too little speaks for are asked about on request alone. */
+export function* askNouns(corpus: Corpus, nouns: Nouns, options: MiningOptions): Work<Question[]> {
+  const { terms, segments, siblings } = nouns;
+  const occurrences = indexOccurrences(segments);
+  const collector = yield* gatherEvidence(corpus, nouns, options);
   const judge = new Judge(corpus, terms, segments, occurrences, siblings, usageMeasures(options));
   const judged = yield* judge.judge(collector.pairs());
   const sure = judged.filter((pair) => pair.score >= THRESHOLD && isGrounded(pair.known));
