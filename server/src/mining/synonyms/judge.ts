@@ -43,7 +43,7 @@ const PROPER = 0.5;
 /** Least score of a pair that is asked about by default, … */
 export const THRESHOLD = 0.3;
 /** … and of one that is asked about on request. */
-export const THRESHOLD_ON_REQUEST = -0.6;
+export const THRESHOLD_ON_REQUEST = -0.3;
 
 const EMPTY: SparseVector = { ids: new Uint32Array(0), weights: new Float64Array(0) };
 
@@ -159,11 +159,10 @@ export class Judge {
     return proper;
   }
 
-  private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general' | 'sharesWord'> {
+  private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general'> {
     const [one, other] = [this.terms[a]!, this.terms[b]!];
     const general = Number(differsGenerally(one, other)) + Number(differsGenerally(other, one));
-    const sharesWord = one.words.some((word) => other.words.includes(word));
-    return { evidence, shape: shapeOf(one, other), general, sharesWord };
+    return { evidence, shape: shapeOf(one, other), general };
   }
 
   private keyOf({ a, b }: { readonly a: number; readonly b: number }): number {
