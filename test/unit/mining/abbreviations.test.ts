@@ -25,6 +25,7 @@ describe('alignment', () => {
     ['xml', 'extensible markup language'],
     ['genai', 'generative ai'],
     ['oidc', 'open id connect'],
+    ['sso', 'single sign -on'],
   ])('%s is made of %s', (short, long) => {
     expect(aligns(short, long.split(' '))).toBe(true);
   });
@@ -34,6 +35,7 @@ describe('alignment', () => {
     ['ca', 'custom resource'],
     ['pit', 'in time'],
     ['ml', 'machine learning model'],
+    ['sso', 'single sign on'],
   ])('%s is not made of %s', (short, long) => {
     expect(aligns(short, long.split(' '))).toBe(false);
   });
@@ -105,6 +107,27 @@ describe('a short and a long form', () => {
       '“custom resource” is spelled out 3 times on 2 pages where it is no explanation',
       '2 pages write “CR” and then “custom resource” again',
     ]);
+  });
+
+  it('are asked where most pages leave the short form unexplained and both stand beside the same words', () => {
+    const short = ['Open a CR today. The CR waits.', 'Delete a CR. The CR goes.', 'Read each CR, then the CR list.'];
+    const long = ['Open a custom resource. Delete a custom resource. Read each custom resource.'];
+    expect(ask(explained, ...short, ...long).map(({ id }) => id)).toEqual(['abbreviation:CR|custom resource']);
+    // Comma-separated values are seldom a file in that format: what has no neighbour in common may be two things.
+    const other = ['These are custom resources of ours. Those were custom resources too. Our custom resources ended.'];
+    expect(ask(explained, ...short, ...other)).toEqual([]);
+  });
+
+  it('are right where the long form stands on pages that have no need of the short one', () => {
+    const long = Array.from(
+      { length: 5 },
+      (_, i) => `A custom resource is read here ${i}. The custom resource is open.`,
+    );
+    expect(ask(explained, `${explained} Add a CR.`, ...long)).toEqual([]);
+  });
+
+  it('are read across hyphens', () => {
+    expect(definitionsIn('Log in by single sign-on (SSO) once.')).toEqual(['SSO = single sign on']);
   });
 
   it('are right where the long form is explained and the short one goes on', () => {

@@ -1,7 +1,7 @@
 // A short form that the documents explain in two ways: two concepts under one abbreviation, or one name gone astray.
 import type { Corpus } from '../../corpus/corpus.js';
 import { spellingKey } from '../../lexicon/spelling.js';
-import { examplePlaces } from '../places.js';
+import { examplePlacesOf } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question } from '../question.js';
 import { byUses, singularKey, times } from '../wording.js';
@@ -47,7 +47,10 @@ export function askAmbiguous(corpus: Corpus, { short, expansions }: Explained): 
         value: distinct.length,
       },
     ],
-    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
+    places: examplePlacesOf(
+      corpus.stream,
+      sides.map(({ uses }) => uses),
+    ),
   };
 }
 

@@ -4,7 +4,7 @@ import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { fullFormsOf } from '../../lexicon/clippings.js';
 import { TokenFlag } from '../../tokens/tokens.js';
-import { countDocuments, examplePlaces } from '../places.js';
+import { countDocuments, examplePlacesOf } from '../places.js';
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question, QuestionTerm } from '../question.js';
@@ -155,6 +155,9 @@ function makeQuestion(
         value: shared.kinds.length,
       },
     ],
-    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
+    places: examplePlacesOf(
+      corpus.stream,
+      sides.map(({ uses }) => uses),
+    ),
   };
 }

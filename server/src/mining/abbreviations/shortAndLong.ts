@@ -1,7 +1,7 @@
 // A short form and its one expansion, both in free use: asked where the long form goes on after it was explained.
 import type { Corpus } from '../../corpus/corpus.js';
 import { Zone } from '../../prose/zones.js';
-import { countDocuments, examplePlaces } from '../places.js';
+import { countDocuments, examplePlacesOf } from '../places.js';
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question, QuestionTerm, Reason } from '../question.js';
@@ -76,7 +76,10 @@ export function askExplained(
     worth: confidence * mix.settles,
     terms: sides.map(({ term }) => term),
     reasons: reasonsOf(corpus, short, expansion, free, longUses),
-    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, uses)),
+    places: examplePlacesOf(
+      corpus.stream,
+      sides.map(({ uses }) => uses),
+    ),
   };
 }
 

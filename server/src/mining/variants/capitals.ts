@@ -3,7 +3,7 @@ import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { isKnown } from '../../lexicon/synonyms.js';
-import { countDocuments, examplePlaces, isInsideSentence } from '../places.js';
+import { countDocuments, examplePlacesOf, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question } from '../question.js';
@@ -150,6 +150,9 @@ function makeQuestion(corpus: Corpus, lead: Way, others: readonly Way[]): Questi
         value: outside,
       },
     ],
-    places: sides.flatMap(({ way }, index) => examplePlaces(stream, index, way.uses)),
+    places: examplePlacesOf(
+      stream,
+      sides.map(({ way }) => way.uses),
+    ),
   };
 }

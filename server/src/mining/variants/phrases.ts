@@ -8,7 +8,7 @@ import { Zone } from '../../prose/zones.js';
 import { TokenFlag } from '../../tokens/tokens.js';
 import { rowsOfSequence } from '../../corpus/concordance.js';
 import { endRowOfBlock, followsOn } from '../../corpus/stream.js';
-import { countDocuments, examplePlaces, isInsideSentence } from '../places.js';
+import { countDocuments, examplePlacesOf, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question } from '../question.js';
@@ -124,7 +124,10 @@ function askPhrase(corpus: Corpus, key: string, capitalised: readonly Use[]): Qu
         value: sides[1]!.term.uses,
       },
     ],
-    places: sides.flatMap(({ uses }, index) => examplePlaces(stream, index, uses)),
+    places: examplePlacesOf(
+      stream,
+      sides.map(({ uses }) => uses),
+    ),
   };
 }
 

@@ -1,6 +1,6 @@
 // A family of ways of writing as a question: its terms, the reasons in plain words, its worth.
 import type { Corpus } from '../../corpus/corpus.js';
-import { countDocuments, examplePlaces } from '../places.js';
+import { countDocuments, examplePlacesOf } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question, QuestionTerm, Reason } from '../question.js';
 import { byUses, displayText, makeTerm, pages, times } from '../wording.js';
@@ -52,7 +52,10 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
     worth: confidence * Math.min(outside, mix.exchangeable),
     terms,
     reasons: reasonsOf(corpus, mix, sides, slot),
-    places: sides.flatMap(({ uses }, index) => examplePlaces(corpus.stream, index, inSlot(uses, slot))),
+    places: examplePlacesOf(
+      corpus.stream,
+      sides.map(({ uses }) => inSlot(uses, slot)),
+    ),
   };
 }
 

@@ -23,7 +23,7 @@ export interface Style {
   readonly forms: readonly Form[];
   /** Uses that count as evidence, in document order, each with its slot. */
   readonly uses: readonly SlottedUse[];
-  /** Uses by slot, without those that may be a name of the page's code: they are as right as they are in code. */
+  /** Uses by slot; those that may be a name of the page's code are as right as they are, and count as standing alone. */
   readonly slots: Readonly<Record<Slot, number>>;
   /** Uses inside sentences of running text; the counts below are among them. */
   readonly inside: number;
@@ -82,10 +82,10 @@ function makeStyle(corpus: Corpus, readers: Readers, text: string, forms: readon
     for (const row of form.rows) {
       const length = form.folds.length;
       if (readers.mentions.isMention(row, length)) continue;
-      const found = readers.slots.slotOf(row, length);
+      const found = isName(corpus, row, form) ? 'lone' : readers.slots.slotOf(row, length);
       // An open plural before a noun is not its modifier: "two elements follow".
       const slot = found === 'attributive' && form.shape === 'open' && form.plural ? 'unclear' : found;
-      if (!isName(corpus, row, form)) slots[slot]++;
+      slots[slot]++;
       uses.push({ row, length, slot });
       countCase(corpus, row, length, cases);
     }
