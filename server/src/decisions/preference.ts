@@ -18,12 +18,14 @@ const HABIT_COUNT = 2;
 const HABIT_RATIO = 2;
 
 /**
- * Suggests a term: the preferred term of a concept that the question touches; else the one that earlier decisions speak for,
- * by a word within it or by its manner of writing; else the most used; ties by documents, then by code units.
+ * Suggests a term: the preferred term of a concept that the question touches; else the one that the documents' own glossary
+ * prefers; else the one that earlier decisions speak for, by a word within it or by its manner of writing; else the most used;
+ * ties by documents, then by code units.
  */
 export function preferenceOf(question: Question, decisions: Decisions, precedents: Precedents): Preference {
   return (
     decidedPreference(question, decisions) ??
+    glossaryPreference(question) ??
     partPreference(question, precedents) ??
     habitPreference(question, precedents) ??
     mostUsed(question)
@@ -80,6 +82,11 @@ function decidedPreference(question: Question, decisions: Decisions): Preference
     return { text: preferred.text, reason: { kind: 'termbase', text, value: 1 } };
   }
   return undefined;
+}
+
+/** Of a question that decisions have cut down, the glossary's term may be gone. */
+function glossaryPreference({ preferred, terms }: Question): Preference | undefined {
+  return terms.some(({ text }) => text === preferred?.text) ? preferred : undefined;
 }
 
 function partPreference({ terms }: Question, precedents: Precedents): Preference | undefined {

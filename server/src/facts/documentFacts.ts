@@ -2,10 +2,12 @@
 import { hashText } from '../base/hash.js';
 import { isStopWord } from '../lexicon/stopWords.js';
 import { BLOCK_KINDS, SourceCursor } from '../prose/prose.js';
-import type { BlockContent, Prose, ProseBlock } from '../prose/prose.js';
+import type { BlockContent, GlossaryPart, Prose, ProseBlock } from '../prose/prose.js';
 import type { BlockTokens, LanguageProfile } from '../tokens/tokens.js';
 import { findCodeWords } from './codeWords.js';
 import { FactFlag } from './flags.js';
+import { readGlossary } from './glossary.js';
+import type { GlossaryEntry } from './glossary.js';
 
 /** A link of the document: the tokens of its text and its target as written. */
 export interface LinkFact {
@@ -39,6 +41,8 @@ export interface DocumentFacts {
   /** Identity of the block's prose: equal texts in equal zones have equal hashes, wherever they stand. */
   readonly blockHash: Float64Array;
   readonly links: readonly LinkFact[];
+  /** Entries of glossaries, in order. */
+  readonly glossary: readonly GlossaryEntry[];
 }
 
 /**
@@ -81,6 +85,7 @@ class FactsBuilder {
   private readonly blockLevel: Uint8Array;
   private readonly blockHash: Float64Array;
   private readonly links: LinkFact[] = [];
+  private readonly parts: (GlossaryPart | undefined)[] = [];
   private row = 0;
   private block = 0;
 
@@ -124,6 +129,7 @@ class FactsBuilder {
       this.end[row] = cursor.end(end);
     }
     this.addLinks(content, tokens, first);
+    this.parts.push(content.glossary);
     this.blockKind[this.block] = BLOCK_KINDS.indexOf(content.kind);
     this.blockLevel[this.block] = content.level;
     this.blockHash[this.block] = hashOf(content);
@@ -156,6 +162,9 @@ class FactsBuilder {
       blockLevel,
       blockHash,
       links,
+      glossary: this.parts.some((part) => part !== undefined)
+        ? readGlossary({ parts: this.parts, blockFirst, flags, wordAt: (token) => words[word[token]!]! })
+        : [],
     };
   }
 

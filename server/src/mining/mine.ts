@@ -3,6 +3,9 @@ import { compareCodeUnits } from '../base/order.js';
 import type { Work } from '../base/work.js';
 import type { Corpus } from '../corpus/corpus.js';
 import { askAbbreviations } from './abbreviations/ask.js';
+import { askGlossary } from './glossary/ask.js';
+import { Glossary } from './glossary/glossary.js';
+import { heedGlossary } from './glossary/heed.js';
 import { askNeutral } from './neutral/ask.js';
 import { DEFAULT_MINING } from './options.js';
 import type { MiningOptions } from './options.js';
@@ -15,9 +18,16 @@ import { askVariants } from './variants/ask.js';
  * variants, abbreviations and synonyms know of grammar and words is English: other languages are asked about ways of writing alone.
  */
 export function* mine(corpus: Corpus, options: MiningOptions = DEFAULT_MINING): Work<readonly Question[]> {
-  if (corpus.language !== 'en') return yield* askNeutral(corpus);
+  const mined = corpus.language === 'en' ? yield* mineEnglish(corpus, options) : yield* askNeutral(corpus);
+  const glossary = new Glossary(corpus);
+  const questions = heedGlossary(corpus, glossary, mined);
+  questions.push(...askGlossary(corpus, glossary, questions));
+  return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
+}
+
+function* mineEnglish(corpus: Corpus, options: MiningOptions): Work<Question[]> {
   const variants = yield* askVariants(corpus);
   const abbreviations = yield* askAbbreviations(corpus);
   const synonyms = yield* askSynonyms(corpus, options);
-  return [...variants, ...abbreviations, ...synonyms].sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
+  return [...variants, ...abbreviations, ...synonyms];
 }

@@ -63,6 +63,8 @@ export interface Question {
   /** Most used first, ties by code units. */
   readonly terms: readonly QuestionTerm[];
   readonly reasons: readonly Reason[];
+  /** The term that the documents' own glossary prefers, and why. */
+  readonly preferred?: { readonly text: string; readonly reason: Reason };
   readonly places: readonly UsePlace[];
 }
 
