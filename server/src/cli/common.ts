@@ -1,4 +1,6 @@
 // What the subcommands share: their folders, the survey, and what is said about files left out and broken termbases.
+import { SWITCHED_ZONES, closedZones } from '../engine/engine.js';
+import type { ZoneSet } from '../prose/zones.js';
 import { LineIndex } from '../text/lineIndex.js';
 import type { CliHost, LeftOutFile, Survey } from './host.js';
 import { UsageError } from './options.js';
@@ -14,6 +16,10 @@ export const FILE_OPTIONS: Readonly<Record<string, OptionRule>> = {
     help: 'leave out what these globs match below a folder, by commas: "archive/**,*.draft.md"',
   },
   'change-logs': { help: 'read change logs too' },
+  zones: {
+    value: 'ZONES',
+    help: `open or close zones, by commas: quotation=on,heading=off; of ${SWITCHED_ZONES.join(', ')}`,
+  },
   'explain-files': { help: 'say which files were left out, and why' },
 };
 
@@ -30,9 +36,14 @@ export async function surveyOrStop(
   mine: boolean,
 ): Promise<Survey | undefined> {
   const exclude = options.get('exclude');
-  const survey = await host.survey(requireFolders(operands), mine, {
-    exclude: typeof exclude === 'string' ? splitGlobs(exclude) : [],
-    changeLogs: options.has('change-logs'),
+  const zones = options.get('zones');
+  const survey = await host.survey(requireFolders(operands), {
+    mine,
+    files: {
+      exclude: typeof exclude === 'string' ? splitGlobs(exclude) : [],
+      changeLogs: options.has('change-logs'),
+    },
+    mining: typeof zones === 'string' ? { closedZones: readZones(zones) } : {},
   });
   sayLeftOut(host, survey.leftOut, options.has('explain-files'));
   let broken = false;
@@ -46,6 +57,20 @@ export async function surveyOrStop(
     }
   }
   return broken ? undefined : survey;
+}
+
+/** @throws UsageError where a zone is not known or is neither on nor off. */
+function readZones(value: string): ZoneSet {
+  const switches: Record<string, boolean> = {};
+  for (const part of value.split(',')) {
+    const [name = '', state] = part.trim().split('=');
+    if (!SWITCHED_ZONES.some((zone) => zone === name)) {
+      throw new UsageError(`There is no zone “${name}” to switch. There are: ${SWITCHED_ZONES.join(', ')}.`);
+    }
+    if (state !== 'on' && state !== 'off') throw new UsageError(`Write --zones ${name}=on or --zones ${name}=off.`);
+    switches[name] = state === 'on';
+  }
+  return closedZones(switches);
 }
 
 /** Globs by commas; those inside braces part none. */

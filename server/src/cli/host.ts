@@ -1,6 +1,7 @@
 // What the command line needs of the world outside: two streams, documents, and a place to write.
 import type { FilePolicy } from '../text/filePolicy.js';
 import type { Snapshot } from '../engine/snapshot.js';
+import type { MiningOptions } from '../mining/options.js';
 
 /** A file or folder that was not read, and why. */
 export interface LeftOutFile {
@@ -16,6 +17,15 @@ export interface Survey {
   readonly leftOut: readonly LeftOutFile[];
 }
 
+/** What is wanted of a survey. */
+export interface SurveyRequest {
+  /** True where questions are wanted, and not only decisions. */
+  readonly mine: boolean;
+  /** What is left out by choice. */
+  readonly files: FilePolicy;
+  readonly mining: MiningOptions;
+}
+
 /** The world as the command line sees it. */
 export interface CliHost {
   /** Writes the result: standard output. */
@@ -28,10 +38,10 @@ export interface CliHost {
   emphasise(text: string): string;
   faint(text: string): string;
   /**
-   * Reads documents and termbases under the paths; `mine` says whether questions are wanted, `files` what is left out by choice.
+   * Reads documents and termbases under the paths.
    * @throws CannotSurvey where a path is missing or cannot be read.
    */
-  survey(paths: readonly string[], mine: boolean, files: FilePolicy): Promise<Survey>;
+  survey(paths: readonly string[], request: SurveyRequest): Promise<Survey>;
   /** A file's path as the user would write it: relative to the working folder where it lies below it. */
   pathOf(uri: string): string;
   /**

@@ -3,6 +3,8 @@ import { compareCodeUnits } from '../base/order.js';
 import { PagedColumn } from '../base/pagedColumn.js';
 import type { Work } from '../base/work.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
+import { CLOSED_ZONES } from '../prose/zones.js';
+import type { ZoneSet } from '../prose/zones.js';
 import { TokenFlag } from '../tokens/tokens.js';
 import type { CorpusDocument } from './corpusDocument.js';
 import { countBlock } from './counting.js';
@@ -19,6 +21,7 @@ export interface DocumentChange {
 
 /** Tables that only grow: shared by all snapshots of one corpus, and written by its one writer alone. */
 interface Tables {
+  readonly closed: ZoneSet;
   readonly vocabulary: Vocabulary;
   readonly grams: GramTable;
   readonly blockIds: Map<number, number>;
@@ -29,8 +32,14 @@ interface Tables {
  * open zones count. Every count is a function of the set of documents alone, whatever the order of changes was.
  */
 export class Corpus {
-  static create(): Corpus {
-    const tables = { vocabulary: new Vocabulary(), grams: new GramTable(), blockIds: new Map<number, number>() };
+  /** An empty corpus that counts no words in the given zones. */
+  static create(closed: ZoneSet = CLOSED_ZONES): Corpus {
+    const tables = {
+      closed,
+      vocabulary: new Vocabulary(),
+      grams: new GramTable(),
+      blockIds: new Map<number, number>(),
+    };
     return new Corpus(tables, [], PagedColumn.empty, PagedColumn.empty, PagedColumn.empty);
   }
 
@@ -54,6 +63,11 @@ export class Corpus {
     return this.tables.vocabulary;
   }
 
+  /** The zones whose words do not count. */
+  get closed(): ZoneSet {
+    return this.tables.closed;
+  }
+
   get grams(): GramTable {
     return this.tables.grams;
   }
@@ -70,7 +84,7 @@ export class Corpus {
 
   /** All tokens in one row of columns, in document order; made when first asked for. */
   get stream(): TokenStream {
-    this.cachedStream ??= makeStream(this.documents, this.vocabulary);
+    this.cachedStream ??= makeStream(this.documents, this.vocabulary, this.closed);
     return this.cachedStream;
   }
 

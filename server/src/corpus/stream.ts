@@ -1,6 +1,7 @@
 // All tokens of a corpus in one row of columns, and where each word stands: derived whole from a snapshot's documents.
 import { FactFlag } from '../facts/flags.js';
 import { isOpen } from '../prose/zones.js';
+import type { ZoneSet } from '../prose/zones.js';
 import { TokenFlag } from '../tokens/tokens.js';
 import type { CorpusDocument } from './corpusDocument.js';
 import type { Vocabulary } from './vocabulary.js';
@@ -64,7 +65,7 @@ export function endRowOfBlock(stream: TokenStream, row: number): number {
 }
 
 /** Lays the documents' columns end to end and indexes the counted tokens by word. */
-export function makeStream(documents: readonly CorpusDocument[], vocabulary: Vocabulary): TokenStream {
+export function makeStream(documents: readonly CorpusDocument[], vocabulary: Vocabulary, closed: ZoneSet): TokenStream {
   const length = documents.reduce((sum, { facts }) => sum + facts.word.length, 0);
   const blockCount = documents.reduce((sum, { facts }) => sum + facts.blockKind.length, 0);
   const spelling = new Uint32Array(length);
@@ -93,7 +94,7 @@ export function makeStream(documents: readonly CorpusDocument[], vocabulary: Voc
         spelling[row + i] = id;
         fold[row + i] = vocabulary.foldOf(id);
         lemma[row + i] = ids[facts.lemma[i]!]!;
-        counted[row + i] = first && isOpen(facts.zones[i]!) ? 1 : 0;
+        counted[row + i] = first && isOpen(facts.zones[i]!, closed) ? 1 : 0;
       }
       blockFirst[block + b] = row + facts.blockFirst[b]!;
     }

@@ -4,6 +4,8 @@ import { checkBlock, checkProse } from '../findings/check.js';
 import type { BlockFinding, Finding } from '../findings/finding.js';
 import { readKept } from '../findings/suppression.js';
 import { TermSet } from '../findings/termSet.js';
+import { CLOSED_ZONES } from '../prose/zones.js';
+import type { ZoneSet } from '../prose/zones.js';
 import type { BlockContent } from '../prose/prose.js';
 import type { Reading } from '../prose/read.js';
 import { checkedTerms } from './checkedTerms.js';
@@ -19,12 +21,13 @@ export class Checker {
   constructor(
     private readonly agenda: Agenda,
     private readonly relations: Relations,
+    private readonly closed: ZoneSet = CLOSED_ZONES,
   ) {}
 
   /** The terms that are looked for. Compiled when first asked for: thousands of terms take some milliseconds. */
   get terms(): TermSet {
-    const { agenda, relations } = this;
-    this.compiled ??= new TermSet([...checkedTerms(agenda), ...oddCompanions(agenda.decisions, relations)]);
+    const { agenda, relations, closed } = this;
+    this.compiled ??= new TermSet([...checkedTerms(agenda), ...oddCompanions(agenda.decisions, relations)], closed);
     return this.compiled;
   }
 

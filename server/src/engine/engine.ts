@@ -38,6 +38,7 @@ export interface EngineChange {
 }
 
 export { QUESTION_KINDS } from '../mining/question.js';
+export { SWITCHED_ZONES, closedZones } from '../prose/zones.js';
 
 /** What is asked unless settings say otherwise. */
 export const DEFAULT_SETTINGS: EngineSettings = { kinds: DEFAULT_KINDS, leastConfidence: 0.5 };
@@ -80,8 +81,11 @@ export class Engine {
     const documents = this.changedDocuments(change.documents ?? []);
     const termbases = changedTermbases(this.state.termbases, change.termbases ?? []);
     const settings = change.settings ?? this.state.settings;
-    const newAgenda = termbases !== this.state.termbases || settings !== this.state.settings;
     const mining = change.mining ?? this.state.mining;
+    const newAgenda =
+      termbases !== this.state.termbases ||
+      settings !== this.state.settings ||
+      mining.closedZones !== this.state.mining.closedZones;
     this.commit({ documents, termbases, settings, mining }, newAgenda);
     return this.snapshot;
   }

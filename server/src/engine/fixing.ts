@@ -18,11 +18,13 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
   const block = reading?.prose.blocks[finding.block];
   if (reading === undefined || block === undefined || finding.preferred === undefined)
     return { kind: 'refused', reason: 'There is no preferred term.' };
-  const checked = snapshot.checkerAt(uri).terms.terms.find((term) => term.checked.id === finding.termId)?.checked;
+  const { terms, closed } = snapshot.checkerAt(uri).terms;
+  const checked = terms.find((term) => term.checked.id === finding.termId)?.checked;
   const replaced = replaceTerm({
     ...{
       text: block.content.text,
-      zones: finding.zones,
+      // A zone that the user has opened is prose like any other.
+      zones: finding.zones & closed,
       span: finding.proseSpan,
       from: finding.term,
       to: finding.preferred,

@@ -8,6 +8,8 @@ import { DEFAULT_MINING, sameMining } from '../mining/options.js';
 import type { MiningOptions } from '../mining/options.js';
 import type { Question, UsePlace } from '../mining/question.js';
 import type { Span } from '../base/span.js';
+import { CLOSED_ZONES } from '../prose/zones.js';
+import type { ZoneSet } from '../prose/zones.js';
 
 /** A place in a document by its URI; offsets into its source. */
 export interface SourcePlace {
@@ -80,7 +82,7 @@ export class Relations {
         if (known !== undefined) next.push(known);
         continue;
       }
-      const before = known?.corpus ?? Corpus.create();
+      const before = yield* countedIn(known?.corpus, options.closedZones);
       const corpus = own.length === 0 ? before : yield* before.apply(own);
       if (corpus.documents.length === 0) continue;
       const questions = yield* mine(corpus, options);
@@ -88,4 +90,10 @@ export class Relations {
     }
     return new Relations(next, options);
   }
+}
+
+/** A corpus of the same documents that counts the words of the zones that are open now. */
+function* countedIn(corpus: Corpus | undefined, closed: ZoneSet = CLOSED_ZONES): Work<Corpus> {
+  if (corpus?.closed === closed) return corpus;
+  return yield* Corpus.create(closed).apply(corpus?.documents ?? []);
 }

@@ -77,6 +77,10 @@ export class Snapshot {
     return this.state.relations;
   }
 
+  get mining(): MiningOptions {
+    return this.state.mining;
+  }
+
   get settings(): EngineSettings {
     return this.state.settings;
   }
@@ -133,7 +137,7 @@ export class Snapshot {
         ({ kind, confidence }) => kinds.includes(kind) && (kind === 'look-alike' || confidence >= leastConfidence),
       );
       const agenda = decide(scope.chain.length > 0 ? scope.chain : [emptyTermbase('')], asked);
-      scoped = { agenda, checker: new Checker(agenda, this.state.relations) };
+      scoped = { agenda, checker: new Checker(agenda, this.state.relations, this.state.mining.closedZones) };
       this.scopes.set(scope.id, scoped);
     }
     return scoped;

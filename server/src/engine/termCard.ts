@@ -50,12 +50,15 @@ export function termAt(snapshot: Snapshot, uri: string, offset: number): TermAtP
   const { terms } = snapshot.checkerAt(uri);
   for (const block of reading.prose.blocks) {
     const { content } = block;
-    if (!touches({ start: block.start, end: block.start + content.sourceLength }, offset) || !isOpen(content.zones))
+    if (
+      !touches({ start: block.start, end: block.start + content.sourceLength }, offset) ||
+      !isOpen(content.zones, terms.closed)
+    )
       continue;
     let found: TermAtPlace | undefined;
     terms.scan(content.text, (index, start, end) => {
       const span = { start: sourceStart(block, start), end: sourceEnd(block, end) };
-      const closed = content.marks.some((mark) => !isOpen(mark.zones) && contains(mark, { start, end }));
+      const closed = content.marks.some((mark) => !isOpen(mark.zones, terms.closed) && contains(mark, { start, end }));
       if (found === undefined && !closed && touches(span, offset))
         found = { checked: terms.terms[index]!.checked, span };
     });

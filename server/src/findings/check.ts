@@ -20,7 +20,7 @@ const RULES: readonly ((use: TermUse) => BlockFinding | undefined)[] = [deprecat
  * @param tagAt the tagger's part of speech by token start; without it, ambiguous words go unreported more often.
  */
 export function checkBlock(content: BlockContent, terms: TermSet, tagAt?: TagAt): readonly BlockFinding[] {
-  if (!isOpen(content.zones)) return [];
+  if (!isOpen(content.zones, terms.closed)) return [];
   // The matches are gathered first: judging one scans its surroundings with the same matcher.
   const matches: { term: CompiledTerm; start: number; end: number; form: Form }[] = [];
   terms.scan(content.text, (index, start, end, formIndex) => {

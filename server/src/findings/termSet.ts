@@ -1,5 +1,7 @@
 // The compiled terms: one matcher over all statuses, so that the longest term decides, and what the rules ask of each term.
 import { FORMS, inflectsAs, termForms } from '../rewrite/inflect.js';
+import { CLOSED_ZONES } from '../prose/zones.js';
+import type { ZoneSet } from '../prose/zones.js';
 import type { CheckedTerm } from './checkedTerm.js';
 import { foldText } from './foldWord.js';
 import { ObjectSet } from './objectOfVerb.js';
@@ -25,7 +27,11 @@ export class TermSet {
   readonly terms: readonly CompiledTerm[];
   private readonly matcher: TermMatcher;
 
-  constructor(terms: readonly CheckedTerm[]) {
+  /** @param closed zones in which nothing is checked */
+  constructor(
+    terms: readonly CheckedTerm[],
+    readonly closed: ZoneSet = CLOSED_ZONES,
+  ) {
     const spellings = new Map<string, Set<string>>();
     const uses = new Map<string, Set<string>>();
     for (const { text, partOfSpeech } of terms) {

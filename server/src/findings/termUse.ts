@@ -1,6 +1,6 @@
 // One match that is truly a use of its term: what the rules turn into findings.
 import type { BlockContent } from '../prose/prose.js';
-import { CLOSED_ZONES, Zone, type ZoneSet } from '../prose/zones.js';
+import { isOpen, Zone, type ZoneSet } from '../prose/zones.js';
 import type { Form } from '../rewrite/inflect.js';
 import { startsSentence } from '../rewrite/sentence.js';
 import { isMention } from './mention.js';
@@ -44,7 +44,7 @@ export function useOfMatch(
   const { text } = content;
   const { checked } = term;
   const zones = zonesOf(content, start, end);
-  if ((zones & CLOSED_ZONES) !== 0) return undefined;
+  if (!isOpen(zones, terms.closed)) return undefined;
   if (!standsAlone(text, start, end, checked.text) || isMention(text, start, end)) return undefined;
   const surface = text.slice(start, end);
   if (term.caseSensitive && hasForcedCapital(content, start, surface, zones)) return undefined;

@@ -1,6 +1,6 @@
 // One workspace folder in the server: its engine, its survey, and the two phases of an edit.
 import type { TextDocument } from 'vscode-languageserver-textdocument';
-import { Engine, DEFAULT_SETTINGS } from '../engine/engine.js';
+import { Engine, DEFAULT_SETTINGS, closedZones } from '../engine/engine.js';
 import type { DocumentUpdate } from '../engine/engine.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import { LineIndex } from '../text/lineIndex.js';
@@ -11,12 +11,13 @@ import { formatOf } from '../text/sourceText.js';
 import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri, isBelow } from '../text/uri.js';
 import { findingToDiagnostic, problemToDiagnostic } from './conversion.js';
+import { FolderHistory } from './folderHistory.js';
 import { formatOfDocument, goneFrom, isTermbase } from './folderFiles.js';
 import type { TermbaseText } from './folderFiles.js';
 import type { ServerHost } from './host.js';
 import { CalledOff, drive } from './pace.js';
 import { TERMBASE_NAME } from './protocol.js';
-import type { FolderSettings, FolderStateParams } from './protocol.js';
+import type { FolderSettings, FolderStateParams, TrustParams } from './protocol.js';
 import type { Publisher } from './publisher.js';
 
 /** Pause in typing, in milliseconds, after which relations are settled. */
@@ -34,6 +35,7 @@ export interface SessionEditor {
   ): Promise<T>;
   state(state: FolderStateParams): void;
   log(message: string): void;
+  trust(): TrustParams;
   /** True where no deeper workspace folder of its own holds a document of this folder. */
   owns(uri: string): boolean;
 }
@@ -59,6 +61,7 @@ export class FolderSession {
   /** Open termbases that were edited since their decisions were taken. */
   private readonly waiting = new Set<string>();
   private pause: NodeJS.Timeout | undefined;
+  private readonly history: FolderHistory;
 
   constructor(
     /** Canonical, without a closing slash. */
@@ -68,6 +71,15 @@ export class FolderSession {
     private readonly editor: SessionEditor,
   ) {
     this.engine = new Engine(host.profiles);
+    this.history = new FolderHistory(host, {
+      folder: uri,
+      trust: () => editor.trust(),
+      take: (pastEdits) => {
+        this.engine.apply({ mining: { ...this.engine.snapshot.mining, pastEdits } });
+        this.settleWhenIdle();
+      },
+      log: (message) => editor.log(message),
+    });
   }
 
   /** The state with everything that was edited so far. */
@@ -98,14 +110,21 @@ export class FolderSession {
 
   /** Takes settings in. True where they choose other files than before: a survey must find them. */
   configure(settings: FolderSettings, excluded: readonly string[] = []): boolean {
+    const otherHistory = settings.history !== this.settings.history;
     this.settings = settings;
     const files = { exclude: excluded, changeLogs: settings.read?.changeLogs === true };
     const otherFiles =
       files.changeLogs !== this.files.changeLogs || files.exclude.join('\n') !== this.files.exclude.join('\n');
     this.files = files;
     const least = settings.questions?.leastConfidence;
-    this.engine.apply({ settings: { ...DEFAULT_SETTINGS, ...(least !== undefined && { leastConfidence: least }) } });
+    const zones = settings.read?.zones;
+    this.engine.apply({
+      settings: { ...DEFAULT_SETTINGS, ...(least !== undefined && { leastConfidence: least }) },
+      mining: { ...this.engine.snapshot.mining, closedZones: zones && closedZones(zones) },
+    });
     this.showDecisions();
+    this.settleWhenIdle();
+    if (otherHistory) this.readHistory();
     return otherFiles;
   }
 
@@ -131,6 +150,7 @@ export class FolderSession {
       if (this.surveying !== mine) return;
       this.surveying = undefined;
       this.settleWhenIdle();
+      this.readHistory();
     } catch (error) {
       if (this.surveying !== mine || this.ended.signal.aborted) return;
       this.surveying = undefined;
@@ -287,12 +307,19 @@ export class FolderSession {
   /** Ends the session and takes back what it published. */
   end(): void {
     this.ended.abort();
+    this.history.callOff();
     this.surveying?.abort();
     this.callOffSettling();
     clearTimeout(this.pause);
     for (const uri of this.open.keys()) this.publisher.clear(uri);
     for (const { uri } of this.snapshot.termbases) this.publisher.clear(uri);
     if (this.uri !== '') this.tellState('ended');
+  }
+
+  /** Reads the folder's history where that is wanted; a survey that is under way does so when it is done. */
+  readHistory(): void {
+    if (this.uri === '' || this.told === undefined || this.told.state !== 'ready') return;
+    void this.history.read(this.settings);
   }
 
   private settleWhenIdle(): void {

@@ -35,13 +35,25 @@ export const SAVE_TERMBASE_COMMAND = 'evenword.saveTermbase';
 export interface ClientOptions {
   /** True where the client knows {@link SAVE_TERMBASE_COMMAND}. */
   readonly savesTermbase?: boolean;
+  /** Whether the user trusts the workspace; not where it is left out. */
+  readonly trust?: TrustParams;
+}
+
+/** Notification `evenword/trust`: the user has come to trust the workspace. */
+export const TRUST_NOTIFICATION = 'evenword/trust';
+export interface TrustParams {
+  /** True where programs of this computer may read what the folders hold. */
+  readonly trusted: boolean;
+  /** A path of the server's computer, outside all folders, where what was read of their history is kept. */
+  readonly cacheFolder?: string;
 }
 
 /** Settings of a workspace folder, as `workspace/configuration` gives section `evenword`. */
 export interface FolderSettings {
   readonly hints?: { readonly mixedTerms?: boolean; readonly oddCompanions?: boolean };
   readonly questions?: { readonly leastConfidence?: number };
-  readonly read?: { readonly changeLogs?: boolean };
+  readonly history?: boolean;
+  readonly read?: { readonly changeLogs?: boolean; readonly zones?: Readonly<Record<string, boolean>> };
 }
 
 /** Request `evenword/report`: the terminology report of a workspace folder. */

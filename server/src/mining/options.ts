@@ -1,10 +1,13 @@
 // What mining may draw on besides the documents, and how it compares the use of terms.
+import type { ZoneSet } from '../prose/zones.js';
 import type { PastEdits } from './pastEdits.js';
 
 /** Equal options and equal documents give equal questions. */
 export interface MiningOptions {
   /** What earlier versions of the documents tell, where there are any. */
   readonly pastEdits?: PastEdits | undefined;
+  /** Zones whose words do not count: code, labels, quotations and targets of links where missing. */
+  readonly closedZones?: ZoneSet | undefined;
   /** How much a context says about a term: damped tf-idf where missing. */
   readonly weighting?: Weighting | undefined;
   /** How alike two terms' contexts are: Lin's measure where missing. */

@@ -2,10 +2,9 @@
 import { mkdir, writeFile } from 'node:fs/promises';
 import { dirname, join, relative } from 'node:path';
 import { fileURLToPath } from 'node:url';
-import type { CliHost, Survey } from '../cli/host.js';
+import type { CliHost, Survey, SurveyRequest } from '../cli/host.js';
 import { CannotSurvey } from '../cli/host.js';
 import { Profiles } from '../engine/factsOf.js';
-import type { FilePolicy } from '../text/filePolicy.js';
 import { CannotRead, plainReason } from './files.js';
 import { surveyFolders } from './survey.js';
 
@@ -24,8 +23,8 @@ export function nodeHost(): CliHost {
     progress,
     emphasise: (text) => (colours ? `\u001b[1m${text}\u001b[22m` : text),
     faint: (text) => (colours ? `\u001b[2m${text}\u001b[22m` : text),
-    survey(paths, mine, files) {
-      return surveyForCli(paths, mine, files, this.progress.bind(this));
+    survey(paths, request) {
+      return surveyForCli(paths, request, this.progress.bind(this));
     },
     pathOf(uri) {
       if (!uri.startsWith('file:')) return uri;
@@ -68,14 +67,12 @@ async function makeFolder(folder: string): Promise<void> {
 
 async function surveyForCli(
   paths: readonly string[],
-  mine: boolean,
-  files: FilePolicy,
+  request: SurveyRequest,
   progress: (text: string) => void,
 ): Promise<Survey> {
   try {
     const { engine, rootUri, leftOut } = await surveyFolders(paths, new Profiles(), {
-      mine,
-      files,
+      ...request,
       progress: (stage, done, all) =>
         progress(stage === 'reading' ? `Reading ${done} of ${all} pages` : 'Comparing terms …'),
     });

@@ -4,6 +4,7 @@ import { stat } from 'node:fs/promises';
 import { dirname, join, resolve } from 'node:path';
 import { finish } from '../base/work.js';
 import { Engine } from '../engine/engine.js';
+import type { MiningOptions } from '../mining/options.js';
 import type { Profiles } from '../engine/factsOf.js';
 import type { FilePolicy } from '../text/filePolicy.js';
 import { withPathLanguage } from '../text/language.js';
@@ -33,11 +34,12 @@ export async function surveyFolders(
   options: {
     readonly mine: boolean;
     readonly files?: FilePolicy;
+    readonly mining?: MiningOptions;
     readonly progress?: SurveyProgress;
     readonly signal?: AbortSignal;
   },
 ): Promise<SurveyedFolders> {
-  const { mine, files, progress, signal } = options;
+  const { mine, files, mining, progress, signal } = options;
   const absolute = paths.map((path) => resolve(path));
   const found = [];
   for (const path of absolute) found.push(await findFiles(path, files));
@@ -63,6 +65,7 @@ export async function surveyFolders(
   await pool.end();
   const engine = new Engine(profiles);
   engine.apply({
+    ...(mining && { mining }),
     documents: sources.map((source, index) => {
       const known = facts[index];
       return { uri: source.uri, source, ...(known && { facts: known }) };

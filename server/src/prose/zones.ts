@@ -23,6 +23,32 @@ export type ZoneSet = number;
 export const CLOSED_ZONES: ZoneSet = Zone.code | Zone.uiLabel | Zone.quotation | Zone.linkTarget;
 
 /** True where words of these zones are counted, asked about and fixed. */
-export function isOpen(zones: ZoneSet): boolean {
-  return (zones & CLOSED_ZONES) === 0;
+export function isOpen(zones: ZoneSet, closed: ZoneSet = CLOSED_ZONES): boolean {
+  return (zones & closed) === 0;
+}
+
+/** The zones that a user may open and close. Code and targets of links are never prose. */
+export const SWITCHED_ZONES = [
+  'heading',
+  'uiLabel',
+  'quotation',
+  'linkText',
+  'definedTerm',
+  'tableCell',
+  'alternativeText',
+  'safetyMessage',
+  'frontMatter',
+] as const satisfies readonly (keyof typeof Zone)[];
+
+/** Which zones a user has opened (true) or closed (false), by name. */
+export type ZoneSwitches = Readonly<Partial<Record<(typeof SWITCHED_ZONES)[number], boolean>>>;
+
+/** The closed zones after some were switched. */
+export function closedZones(switches: ZoneSwitches): ZoneSet {
+  let closed = CLOSED_ZONES;
+  for (const name of SWITCHED_ZONES) {
+    if (switches[name] === true) closed &= ~Zone[name];
+    else if (switches[name] === false) closed |= Zone[name];
+  }
+  return closed;
 }
