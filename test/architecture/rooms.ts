@@ -23,7 +23,10 @@ const upToRewrite = [
 export const ROOMS: Readonly<Record<string, RoomRule>> = {
   base: { rooms: [] },
   text: { rooms: ['base'] },
-  prose: { rooms: ['base', 'text'], packages: [/^@lezer\//, /^yaml$/, /^character-entities$/, /^htmlparser2$/] },
+  prose: {
+    rooms: ['base', 'text'],
+    packages: [/^@lezer\//, /^yaml$/, /^character-entities$/, /^htmlparser2$/, /^jsonc-parser$/],
+  },
   tokens: { rooms: ['base', 'text', 'prose'], packages: [/^wink-/] },
   lexicon: { rooms: ['base'], packages: [/^franc$/, /^stopwords-iso$/] },
   facts: { rooms: ['base', 'text', 'prose', 'tokens', 'lexicon'] },

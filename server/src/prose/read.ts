@@ -1,8 +1,10 @@
 // The door to the readers: a text in, its prose out, whatever the format.
 import type { SourceText } from '../text/sourceText.js';
+import { readApiDescription, rereadApiDescription } from './apiDescription/apiDescription.js';
 import { readAsciidoc, rereadAsciidoc } from './asciidoc/asciidoc.js';
 import { readMarkup, rereadMarkup } from './markup/markup.js';
 import { readMarkdown, rereadMarkdown, type MarkdownReading } from './markdown/markdown.js';
+import { readNotebook, rereadNotebook, type NotebookReading } from './notebook/notebook.js';
 import { readPlaintext, rereadPlaintext } from './plaintext.js';
 import type { Prose } from './prose.js';
 import type { Reading } from './reading.js';
@@ -21,7 +23,9 @@ export function startReading(source: SourceText): Reading {
     if (source.format === 'asciidoc') return readAsciidoc(source);
     if (source.format === 'restructuredtext') return readRestructuredText(source);
     if (source.format === 'html' || source.format === 'xml') return readMarkup(source);
-    return source.format === 'markdown' ? readMarkdown(source) : readPlaintext(source);
+    if (source.format === 'notebook') return readNotebook(source);
+    if (source.format === 'apiDescription') return readApiDescription(source);
+    return source.format === 'markdown' || source.format === 'mdx' ? readMarkdown(source) : readPlaintext(source);
   } catch (error) {
     return unreadable(source, error);
   }
@@ -37,6 +41,9 @@ export function reread(previous: Reading, source: SourceText): Reading {
   try {
     if (source.format === 'plaintext') return rereadPlaintext(previous, source);
     if (source.format === 'html' || source.format === 'xml') return rereadMarkup(previous, source);
+    if (source.format === 'notebook')
+      return 'cells' in previous ? rereadNotebook(previous as NotebookReading, source) : startReading(source);
+    if (source.format === 'apiDescription') return rereadApiDescription(previous, source);
     if (source.format === 'restructuredtext') return rereadRestructuredText(previous, source);
     if (source.format === 'asciidoc') return rereadAsciidoc(previous, source);
     return 'units' in previous ? rereadMarkdown(previous as MarkdownReading, source) : startReading(source);

@@ -34,6 +34,7 @@ export const FORMATS: Readonly<Record<string, Format>> = {
   md: 'markdown',
   markdown: 'markdown',
   mdx: 'mdx',
+  ipynb: 'notebook',
   txt: 'plaintext',
   text: 'plaintext',
   rst: 'restructuredtext',

@@ -18,11 +18,17 @@ export interface MarkdownReading extends Reading {
 /** How many unchanged outermost blocks are parsed again on either side of an edit. See {@link rereadMarkdown}. */
 const MARGIN = 2;
 
+/** How a text that is part of another document is read. */
+export interface MarkdownOptions {
+  /** False where the text cannot begin with front matter. */
+  readonly frontMatter?: boolean;
+}
+
 /** Reads a whole document. */
-export function readMarkdown(source: SourceText): MarkdownReading {
+export function readMarkdown(source: SourceText, options: MarkdownOptions = {}): MarkdownReading {
   const text = normalise(source.text);
   const bodyStart = text.charCodeAt(0) === 0xfeff ? 1 : 0;
-  const frontMatter = readFrontMatter(text, bodyStart);
+  const frontMatter = options.frontMatter === false ? undefined : readFrontMatter(text, bodyStart);
   const stretch = parseStretch(text, source.format, frontMatter?.end ?? bodyStart, text.length);
   const definitions = definitionTable(stretch.definitions);
   const units = readUnits(stretch, definitions, stretch.outline.length);
