@@ -17,6 +17,8 @@ export function placeAsked(questions: readonly Question[], a: string, b: string,
 
 /** Whether a question holds both terms as different ones. */
 export function asks(question: Question, a: string, b: string, hyphens: Hyphens): boolean {
+  // A question about a habit of writing names the other words that it is about.
+  if (question.alike?.some((terms) => asks({ ...question, terms, alike: [] }, a, b, hyphens)) === true) return true;
   const left = holders(question, a, hyphens);
   if (left.length === 0) return false;
   const right = holders(question, b, hyphens);

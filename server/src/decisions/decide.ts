@@ -3,6 +3,7 @@ import { compareCodeUnits } from '../base/order.js';
 import type { Question } from '../mining/question.js';
 import type { Termbase } from '../termbase/termbase.js';
 import { Decisions } from './decisions.js';
+import { byHabit, habitOf } from './habits.js';
 import { Precedents } from './precedents.js';
 import { narrow, type Settlement } from './narrow.js';
 
@@ -19,6 +20,8 @@ export interface Agenda {
   readonly precedents: Precedents;
   /** Still asked, reduced to what is undecided; by worth, ties by id. */
   readonly open: readonly Question[];
+  /** Undecided, and asked when an open one about the same habit of writing is answered. */
+  readonly waiting: readonly Question[];
   /** No longer asked, in the order given. */
   readonly settled: readonly SettledQuestion[];
 }
@@ -36,6 +39,15 @@ export function decide(chain: readonly Termbase[], questions: readonly Question[
     if (rest.settled === undefined) open.push(...rest.open);
     else settled.push({ question, settled: rest.settled });
   }
-  open.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
-  return { decisions, precedents: new Precedents(decisions.concepts), open, settled };
+  open.sort(byWorth);
+  const putOff = settled.flatMap(({ question, settled: how }) => (how === 'later' ? (habitOf(question) ?? []) : []));
+  const asked = byHabit(open, new Set(putOff));
+  return {
+    ...{ decisions, precedents: new Precedents(decisions.concepts), settled, waiting: asked.waiting },
+    open: [...asked.open].sort(byWorth),
+  };
+}
+
+function byWorth(a: Question, b: Question): number {
+  return b.worth - a.worth || compareCodeUnits(a.id, b.id);
 }

@@ -66,6 +66,8 @@ export interface Question {
   /** The term that the documents' own glossary prefers, and why. */
   readonly preferred?: { readonly text: string; readonly reason: Reason };
   readonly places: readonly UsePlace[];
+  /** The terms of questions about the same habit of writing, which wait until this one is answered. Set by the decisions. */
+  readonly alike?: readonly (readonly QuestionTerm[])[];
 }
 
 /** The id of a question of a kind about some terms: their texts in order of code units, whatever their uses are. */
