@@ -1,7 +1,7 @@
 // Entry of the extension in the desktop's and the remote's extension host.
 import * as vscode from 'vscode';
 import { TransportKind } from 'vscode-languageclient/node';
-import { startClient } from './client.js';
+import { startClient, tellTrust } from './client.js';
 import { registerCommands } from './commands.js';
 import { StatusItem } from './statusItem.js';
 
@@ -12,9 +12,10 @@ export function activate(context: vscode.ExtensionContext): void {
   const status = new StatusItem();
   const client = startClient(
     { run, debug: { ...run, options: { execArgv: ['--nolazy', '--inspect=6009'] } } },
+    context.globalStorageUri,
     (state) => status.show(state),
   );
   // A client that is still starting, or failed to, cannot be stopped; there is nothing to do about it then.
   const ending = { dispose: () => void client.dispose().catch(() => undefined) };
-  context.subscriptions.push(status, ending, ...registerCommands(client));
+  context.subscriptions.push(status, ending, tellTrust(client, context.globalStorageUri), ...registerCommands(client));
 }

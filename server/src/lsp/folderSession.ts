@@ -10,7 +10,7 @@ import { withPathLanguage } from '../text/language.js';
 import { formatOf } from '../text/sourceText.js';
 import type { SourceText } from '../text/sourceText.js';
 import { canonicalUri, isBelow } from '../text/uri.js';
-import { findingToDiagnostic, problemToDiagnostic } from './conversion.js';
+import { findingToDiagnostic, problemToDiagnostic, readingProblemToDiagnostic } from './conversion.js';
 import { FolderHistory } from './folderHistory.js';
 import { formatOfDocument, goneFrom, isTermbase } from './folderFiles.js';
 import type { TermbaseText } from './folderFiles.js';
@@ -35,6 +35,7 @@ export interface SessionEditor {
   ): Promise<T>;
   state(state: FolderStateParams): void;
   log(message: string): void;
+  /** Whether the user trusts the workspace. */
   trust(): TrustParams;
   /** True where no deeper workspace folder of its own holds a document of this folder. */
   owns(uri: string): boolean;
@@ -392,10 +393,16 @@ export class FolderSession {
       .findingsIn(uri)
       .filter(({ code }) => code !== 'mixed-terms' || this.settings.hints?.mixedTerms !== false)
       .filter(({ code }) => code !== 'odd-companion' || this.settings.hints?.oddCompanions !== false);
-    const lines = shown.length === 0 ? undefined : this.linesOf(document.source);
+    const problems = snapshot.problemsIn(uri);
+    const lines = shown.length + problems.length === 0 ? undefined : this.linesOf(document.source);
     this.publisher.publish(
       uri,
-      lines === undefined ? [] : shown.map((finding) => findingToDiagnostic(finding, lines)),
+      lines === undefined
+        ? []
+        : [
+            ...shown.map((finding) => findingToDiagnostic(finding, lines)),
+            ...problems.map((problem) => readingProblemToDiagnostic(problem, lines)),
+          ],
       this.open.get(uri)?.version,
     );
   }

@@ -2,6 +2,7 @@
 import type { Profiles } from '../engine/factsOf.js';
 import type { DocumentFacts } from '../facts/documentFacts.js';
 import type { FilePolicy } from '../text/filePolicy.js';
+import type { PastEdits } from '../mining/pastEdits.js';
 import type { SourceText } from '../text/sourceText.js';
 
 /** The files of a workspace folder. */
@@ -23,6 +24,15 @@ export interface ServerHost {
   readTermbase(folder: string, uri: string, files: FilePolicy): Promise<string | undefined>;
   /** Why a survey of the folder would not come to a document, or undefined where it would. */
   whyLeftOut(folder: string, uri: string, files: FilePolicy): Promise<string | undefined>;
+  /**
+   * Reads what the history of a folder tells, from the version control that it lies in; undefined where there is none. `key`
+   * stands for what was read: equal keys, equal edits. What is found is kept in the cache folder, if one is given.
+   */
+  readHistory(
+    folder: string,
+    cacheFolder: string | undefined,
+    signal: AbortSignal,
+  ): Promise<{ readonly key: string; readonly edits: PastEdits } | undefined>;
   /** Gathers facts, on workers where that pays. */
   gather(
     sources: readonly SourceText[],

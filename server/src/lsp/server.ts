@@ -14,8 +14,8 @@ import { provideCodeActions, resolveCodeAction } from './handlers/codeAction.js'
 import { provideHover } from './handlers/hover.js';
 import { provideReport } from './handlers/report.js';
 import type { ServerHost } from './host.js';
-import { REPORT_REQUEST, SURVEY_REQUEST } from './protocol.js';
-import type { ClientOptions, ReportParams, SurveyParams } from './protocol.js';
+import { REPORT_REQUEST, SURVEY_REQUEST, TRUST_NOTIFICATION } from './protocol.js';
+import type { ClientOptions, ReportParams, SurveyParams, TrustParams } from './protocol.js';
 import { Sessions } from './sessions.js';
 
 /** Serves a connection until it is closed. */
@@ -27,6 +27,7 @@ export function serve(connection: Connection, host: ServerHost, version: string)
   connection.onInitialize((params: InitializeParams): InitializeResult => {
     options = (params.initializationOptions as ClientOptions | null | undefined) ?? {};
     sessions.setClient(params.capabilities);
+    if (options.trust !== undefined) sessions.setTrust(options.trust);
     for (const { uri } of params.workspaceFolders ?? []) sessions.add(uri);
     return {
       serverInfo: { name: SOURCE, version },
@@ -62,6 +63,7 @@ export function serve(connection: Connection, host: ServerHost, version: string)
   });
   connection.onRequest(REPORT_REQUEST, (params: ReportParams | undefined) => provideReport(sessions, params ?? {}));
   connection.onRequest(SURVEY_REQUEST, ({ uri }: SurveyParams) => guarded(() => sessions.of(uri).survey()));
+  connection.onNotification(TRUST_NOTIFICATION, (trust: TrustParams) => sessions.setTrust(trust));
   connection.onShutdown(() => sessions.end());
   documents.listen(connection);
   connection.listen();

@@ -11,7 +11,7 @@ import { FolderSession } from './folderSession.js';
 import type { SessionEditor } from './folderSession.js';
 import type { ServerHost } from './host.js';
 import { STATE_NOTIFICATION, WATCHED_FILES } from './protocol.js';
-import type { FolderSettings } from './protocol.js';
+import type { FolderSettings, TrustParams } from './protocol.js';
 import { Publisher } from './publisher.js';
 
 /** The editor's own setting for files that it does not show: an object from globs to true. */
@@ -23,6 +23,7 @@ export class Sessions {
   private readonly publisher: Publisher;
   private readonly loose: FolderSession;
   private client: ClientCapabilities = {};
+  private trust: TrustParams = { trusted: false };
 
   constructor(
     private readonly connection: Connection,
@@ -36,6 +37,12 @@ export class Sessions {
 
   setClient(capabilities: ClientCapabilities): void {
     this.client = capabilities;
+  }
+
+  /** Takes in whether the user trusts the workspace; where that is new, the folders' history can be read. */
+  setTrust(trust: TrustParams): void {
+    this.trust = trust;
+    for (const session of this.folders.values()) session.readHistory();
   }
 
   /** Adds a workspace folder; its survey is started apart. */
@@ -186,6 +193,7 @@ export class Sessions {
       owns: (uri) => this.of(uri).uri === folder,
       state: (state) => void connection.sendNotification(STATE_NOTIFICATION, state),
       log: (message) => connection.console.log(message),
+      trust: () => this.trust,
       withProgress: async (title, task) => {
         const none = new AbortController().signal;
         if (this.client.window?.workDoneProgress !== true) return task(() => undefined, none);

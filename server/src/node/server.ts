@@ -9,5 +9,5 @@ declare const EVENWORD_VERSION: string;
 if (!serveAsWorker()) {
   // A promise that nobody waits for must not end the server: the failure is logged, and work goes on.
   process.on('unhandledRejection', (reason) => console.error(reason));
-  serve(createConnection(ProposedFeatures.all), nodeServerHost(), EVENWORD_VERSION);
+  serve(createConnection(ProposedFeatures.all), nodeServerHost(EVENWORD_VERSION), EVENWORD_VERSION);
 }

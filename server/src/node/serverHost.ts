@@ -2,14 +2,16 @@
 import { join, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { ServerHost } from '../lsp/host.js';
+import { decodeUtf8 } from './decoding.js';
 import { FactsPool } from './factsPool.js';
+import { readHistory } from './history/history.js';
 import { Profiles } from '../engine/factsOf.js';
 import type { FilePolicy } from '../text/filePolicy.js';
 import { formatOf } from '../text/sourceText.js';
 import { findFiles, readDocument, readText, termbasesAbove, uriOfPath, whyLeftOut } from './files.js';
 
-/** A host over `file:` URIs; folders of other schemes hold nothing that it could read. */
-export function nodeServerHost(): ServerHost {
+/** A host over `file:` URIs; folders of other schemes hold nothing that it could read. `version` is the engine's. */
+export function nodeServerHost(version: string): ServerHost {
   const profiles = new Profiles();
   return {
     profiles,
@@ -27,7 +29,7 @@ export function nodeServerHost(): ServerHost {
       }
       const texts = [];
       for (const file of [...termbases, ...termbasesAbove(path)]) {
-        const read = await readText(file);
+        const read = await readText(file, decodeUtf8);
         if ('text' in read) texts.push({ uri: uriOfPath(file), text: read.text });
         else missed.push({ path: file, reason: read.reason });
       }
@@ -43,12 +45,16 @@ export function nodeServerHost(): ServerHost {
     async readTermbase(folder, uri, files) {
       const path = pathOf(uri);
       if (path === undefined || (await reasonAgainst(folder, path, files)) !== undefined) return undefined;
-      const file = await readText(path);
+      const file = await readText(path, decodeUtf8);
       return 'text' in file ? file.text : undefined;
     },
     async whyLeftOut(folder, uri, files) {
       const path = pathOf(uri);
       return path === undefined ? undefined : reasonAgainst(folder, path, files);
+    },
+    async readHistory(folder, cacheFolder, signal) {
+      const path = pathOf(folder);
+      return path === undefined ? undefined : readHistory(path, { cacheFolder, version, signal });
     },
     async gather(sources, progress, signal) {
       // The workers' memory is wanted back: after a survey there is little left for them to do.

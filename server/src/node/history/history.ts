@@ -1,4 +1,5 @@
 // What earlier versions of a folder's documents tell: its repository's recent commits, read once and kept by commit.
+import { createHash } from 'node:crypto';
 import type { PastEdits, Replacement } from '../../mining/pastEdits.js';
 import { RevisionReader } from '../../revisions/replacements.js';
 import { formatOf } from '../../text/sourceText.js';
@@ -42,6 +43,8 @@ export interface HistoryOptions {
 /** What was read, and how much of it this time. */
 export interface ReadHistory {
   readonly edits: PastEdits;
+  /** Stands for the commits that count: equal keys, equal edits. */
+  readonly key: string;
   /** Commits within the bounds. */
   readonly commits: number;
   /** Of these, the ones read now; the others were known. */
@@ -73,6 +76,9 @@ export async function readHistory(folder: string, options: HistoryOptions): Prom
   if (place !== undefined && read.size > 0) await writeCache(place, all);
   return {
     edits: { commits: [...all.values()].filter((replacements) => replacements.length > 0) },
+    key: createHash('sha256')
+      .update([...all.keys()].join('\n'))
+      .digest('hex'),
     ...{ commits: commits.length, readNow: read.size, leftOver: wanted.length - read.size },
   };
 }
