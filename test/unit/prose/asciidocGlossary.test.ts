@@ -1,4 +1,4 @@
-// AsciiDoc: glossaries, lists of questions, languages.
+// AsciiDoc: glossaries, lists of questions, languages, labels of menus.
 import { describe, expect, it } from 'vitest';
 import type { Prose } from '../../../server/src/prose/prose.js';
 import { read } from '../../../server/src/prose/read.js';
@@ -94,6 +94,15 @@ describe('lists of questions', () => {
       'paragraph: Text.',
       'definedTerm[definedTerm]: key',
       'definition: Opens.',
+    ]);
+  });
+});
+
+describe('labels', () => {
+  // AsciiDoc documentation, "UI Macros": menu, submenu and item between double quotation marks.
+  it('are paths through menus in quotation marks', () => {
+    expect(outline('Choose "File > Save all" now. Is "a" > "b" or "a>b"?\n')).toEqual([
+      'paragraph: Choose <uiLabel:File > Save all> now. Is "a" > "b" or "a>b"?',
     ]);
   });
 });

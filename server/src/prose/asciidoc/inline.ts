@@ -27,10 +27,11 @@ export function readBlockText(source: string, lines: readonly Line[], role: Bloc
 }
 
 const SPECIAL = new Uint8Array(128);
-for (const mark of '\n\\{:<([&@+') SPECIAL[mark.charCodeAt(0)] = 1;
+for (const mark of '\n\\{:<([&@+"') SPECIAL[mark.charCodeAt(0)] = 1;
 
 const CHARACTER_REFERENCE = /&(?:#\d{1,7}|#[xX][\da-fA-F]{1,6}|[a-zA-Z][a-zA-Z\d]{1,31});/y;
 const ANCHOR = /\[\[\[?[\p{L}_:][^\]\n]{0,300}\]\]\]?/uy;
+const MENU_PATH = /"[\p{L}\p{N}&][^"\n]{0,100}?[ \n]+>[ \n]+[^"\n]{1,100}"/uy;
 const SYMBOLS: readonly (readonly [string, string])[] = [
   ['(C)', '©'],
   ['(R)', '®'],
@@ -193,6 +194,8 @@ export class InlineReader {
         return this.reference(i, to);
       case 58:
         return this.macro(i, to);
+      case 34:
+        return this.menuPath(i, to);
       case 60:
         return this.crossReference(i, to);
       case 40:
@@ -257,6 +260,17 @@ export class InlineReader {
     this.flush(macro.start);
     macro.read(this);
     return macro.end;
+  }
+
+  /** `"File > Save"`, the short form of the menu macro. */
+  private menuPath(i: number, to: number): number {
+    MENU_PATH.lastIndex = i;
+    const found = MENU_PATH.exec(this.text);
+    const end = found ? i + found[0].length : 0;
+    if (!found || end > to) return -1;
+    this.flush(i);
+    this.within(Zone.uiLabel, [i + 1, end - 1]);
+    return end;
   }
 
   /** `<<id>>` and `<<id,text>>`. */

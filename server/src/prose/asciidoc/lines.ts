@@ -42,9 +42,9 @@ function conditional(text: string, start: number, end: number): Line | undefined
   return found[1] !== undefined && inner < end - 1 ? { start: inner, end: end - 1 } : undefined;
 }
 
-/** True on a space, a tab or a form feed. */
+/** True for white space within a line. */
 export function isBlank(unit: number): boolean {
-  return unit === 32 || unit === 9 || unit === 12;
+  return unit === 32 || unit === 9 || unit === 12 || unit === 11;
 }
 
 /** The offset of the first visible unit of a line. */
