@@ -109,7 +109,7 @@ function textOffset(block: ProseBlock, source: number, place: (block: ProseBlock
 }
 
 /** A stretch of a block for reading: short inline code as it reads, other opaque things as …, white space folded. */
-function readable(block: ProseBlock, from: number, until: number, source: string): string {
+export function readable(block: ProseBlock, from: number, until: number, source: string): string {
   return block.content.text
     .slice(from, until)
     .replace(/\uFFFC/g, (_, at: number) => {

@@ -1,5 +1,7 @@
 // The hover: a term's card as Markdown.
 import type { Span } from '../base/span.js';
+import { definedAt, definitionOf } from '../engine/glossaryCard.js';
+import type { DefinedAtPlace, GlossaryDefinition } from '../engine/glossaryCard.js';
 import { cardOf, termAt } from '../engine/termCard.js';
 import { isBehind } from '../engine/companions.js';
 import type { RelatedCompanion } from '../mining/companions/companions.js';
@@ -12,16 +14,47 @@ export interface HoverCard {
   readonly markdown: string;
 }
 
-/** The hover at a place of a document, or undefined where no known term stands. */
+/** The hover at a place of a document, or undefined where no known term and no headword of a glossary stands. */
 export function hoverAt(snapshot: Snapshot, uri: string, offset: number): HoverCard | undefined {
   const found = termAt(snapshot, uri, offset);
-  if (found === undefined) return undefined;
-  return { span: found.span, markdown: render(cardOf(snapshot, uri, found)) };
+  const defined = definedAt(snapshot, uri, offset);
+  if (found === undefined) return defined && glossaryCard(snapshot, defined);
+  const card = cardOf(snapshot, uri, found);
+  const names = [card.text, ...card.names.map(({ text }) => text)];
+  const definition =
+    card.definition === undefined && defined !== undefined && names.some((name) => isSameName(name, defined.name))
+      ? definitionOf(snapshot, defined.name, defined.language)
+      : undefined;
+  return { span: found.span, markdown: render(card, definition) };
 }
 
-function render(card: TermCard): string {
+/** The hover of a term that nothing is decided or asked about: its definition in the documents' own glossary. */
+function glossaryCard(snapshot: Snapshot, { name, language, span }: DefinedAtPlace): HoverCard | undefined {
+  const definition = definitionOf(snapshot, name, language);
+  return definition && { span, markdown: `**${escape(definition.headword)}**\n\n${definitionText(definition)}` };
+}
+
+function definitionText({ text, uri, line }: GlossaryDefinition): string {
+  const page = uri.slice(uri.lastIndexOf('/') + 1);
+  return `${escape(text)}\n\n[Glossary: ${escape(unescaped(page))}](<${uri}#L${line}>)`;
+}
+
+function isSameName(a: string, b: string): boolean {
+  return a.toLowerCase() === b.toLowerCase();
+}
+
+function unescaped(page: string): string {
+  try {
+    return decodeURIComponent(page);
+  } catch {
+    return page;
+  }
+}
+
+function render(card: TermCard, definition?: GlossaryDefinition): string {
   const parts = [headline(card), table(card.names)];
   if (card.definition !== undefined) parts.push(escape(card.definition));
+  if (definition !== undefined) parts.push(definitionText(definition));
   if (card.note !== undefined) parts.push(`*${escape(card.note)}*`);
   if (card.question !== undefined) {
     parts.push(card.question.reasons.map(({ text }) => `- ${escape(text)}`).join('\n'));

@@ -19,6 +19,8 @@ export interface GlossaryLink {
 
 /** A headword's entry and where it stands. */
 export interface PlacedEntry {
+  /** The headword that the entry was looked up by. */
+  readonly name: string;
   readonly document: number;
   readonly entry: GlossaryEntry;
 }
@@ -43,9 +45,9 @@ export class Glossary {
     return this.explained.size === 0 && this.links.length === 0;
   }
 
-  /** Number of names that have an entry which explains them. */
-  get size(): number {
-    return this.explained.size;
+  /** The names, as written, that have an entry which explains them, in order of documents. */
+  get explainedNames(): readonly string[] {
+    return [...this.explained.values()].map(({ name }) => name);
   }
 
   /** The key of a name. */
@@ -87,7 +89,7 @@ export class Glossary {
     if (entry.see === undefined) {
       for (const name of names) {
         const key = this.keyOf(name);
-        if (!this.explained.has(key)) this.explained.set(key, { document, entry });
+        if (!this.explained.has(key)) this.explained.set(key, { name, document, entry });
       }
     }
     const others: { kind: GlossaryLink['kind']; to: string }[] = names.slice(1).map((to) => ({ kind: 'also', to }));
