@@ -2,6 +2,7 @@
 import type { SourceText } from '../text/sourceText.js';
 import { readApiDescription, rereadApiDescription } from './apiDescription/apiDescription.js';
 import { readAsciidoc, rereadAsciidoc } from './asciidoc/asciidoc.js';
+import { readLatex, rereadLatex } from './latex/latex.js';
 import { readMarkup, rereadMarkup } from './markup/markup.js';
 import { readMarkdown, rereadMarkdown, type MarkdownReading } from './markdown/markdown.js';
 import { readNotebook, rereadNotebook, type NotebookReading } from './notebook/notebook.js';
@@ -23,6 +24,7 @@ export function startReading(source: SourceText): Reading {
     if (source.format === 'asciidoc') return readAsciidoc(source);
     if (source.format === 'restructuredtext') return readRestructuredText(source);
     if (source.format === 'html' || source.format === 'xml') return readMarkup(source);
+    if (source.format === 'latex') return readLatex(source);
     if (source.format === 'notebook') return readNotebook(source);
     if (source.format === 'apiDescription') return readApiDescription(source);
     return source.format === 'markdown' || source.format === 'mdx' ? readMarkdown(source) : readPlaintext(source);
@@ -41,6 +43,7 @@ export function reread(previous: Reading, source: SourceText): Reading {
   try {
     if (source.format === 'plaintext') return rereadPlaintext(previous, source);
     if (source.format === 'html' || source.format === 'xml') return rereadMarkup(previous, source);
+    if (source.format === 'latex') return rereadLatex(previous, source);
     if (source.format === 'notebook')
       return 'cells' in previous ? rereadNotebook(previous as NotebookReading, source) : startReading(source);
     if (source.format === 'apiDescription') return rereadApiDescription(previous, source);
