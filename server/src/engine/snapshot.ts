@@ -8,6 +8,8 @@ import type { PlacedTermbase } from '../decisions/scope.js';
 import type { Finding } from '../findings/finding.js';
 import type { MiningOptions } from '../mining/options.js';
 import type { QuestionKind } from '../mining/question.js';
+import { readKept } from '../findings/suppression.js';
+import type { ReadingProblem } from '../prose/prose.js';
 import { startReading } from '../prose/read.js';
 import type { Reading } from '../prose/read.js';
 import type { SourceText } from '../text/sourceText.js';
@@ -116,6 +118,14 @@ export class Snapshot {
   findingsIn(uri: string): readonly Finding[] {
     const reading = this.readingOf(uri);
     return reading === undefined ? [] : this.checkerAt(uri).check(reading);
+  }
+
+  /** What could not be read of a document, and comments to us that say nothing we know; in order of their places. */
+  problemsIn(uri: string): readonly ReadingProblem[] {
+    const reading = this.readingOf(uri);
+    if (reading === undefined) return [];
+    const problems = [...reading.prose.problems, ...readKept(reading.source).problems];
+    return problems.sort((a, b) => a.span.start - b.span.start);
   }
 
   /** The text of a span of a document, or undefined where the document is unknown. */

@@ -4,6 +4,7 @@ import type { Diagnostic, Range, TextEdit as ProtocolEdit } from 'vscode-languag
 import type { Span } from '../base/span.js';
 import type { TermbaseProblem } from '../termbase/termbase.js';
 import type { Finding } from '../findings/finding.js';
+import type { ReadingProblem } from '../prose/prose.js';
 import type { TextEdit } from '../text/edits.js';
 import type { LineIndex } from '../text/lineIndex.js';
 
@@ -37,6 +38,11 @@ export function findingToDiagnostic(finding: Finding, lines: LineIndex): Diagnos
     code: finding.code,
     message: finding.message,
   };
+}
+
+/** Something on a page that could not be read: the writer's to know, not to be scolded for. */
+export function readingProblemToDiagnostic({ span, message }: ReadingProblem, lines: LineIndex): Diagnostic {
+  return { range: toRange(span, lines), severity: DiagnosticSeverity.Information, source: SOURCE, message };
 }
 
 export function problemToDiagnostic(problem: TermbaseProblem, lines: LineIndex): Diagnostic {

@@ -23,7 +23,17 @@ export function decode(bytes: Uint8Array): Decoded {
   const marked = utf16Label(bytes);
   if (marked !== undefined) return decodeAs(marked, bytes) ?? { reason: 'is in UTF-16, but damaged' };
   if (bytes.subarray(0, BINARY_PROBE).includes(0)) return { reason: 'is a binary file, or UTF-16 without its mark' };
-  return decodeAs('utf-8', bytes) ?? decodeGuessed(bytes) ?? { reason: refusal(bytes) };
+  return (
+    decodeAs('utf-8', bytes) ??
+    decodeGuessed(bytes) ?? {
+      reason: `is not in UTF-8 (line ${brokenLine(bytes)}) and its encoding cannot be told; save it as UTF-8 to have it read`,
+    }
+  );
+}
+
+/** Decodes UTF-8 alone: for files that we write ourselves. */
+export function decodeUtf8(bytes: Uint8Array): Decoded {
+  return decodeAs('utf-8', bytes) ?? { reason: `is not in UTF-8 (line ${brokenLine(bytes)}); save it as UTF-8` };
 }
 
 function utf16Label(bytes: Uint8Array): 'utf-16le' | 'utf-16be' | undefined {
@@ -49,8 +59,8 @@ function decodeAs(label: 'utf-8' | 'utf-16le' | 'utf-16be', bytes: Uint8Array): 
   }
 }
 
-/** Names the line of the first byte that is no UTF-8. */
-function refusal(bytes: Uint8Array): string {
+/** The line, from 1, of the first byte that is no UTF-8. */
+function brokenLine(bytes: Uint8Array): number {
   const decoder = new TextDecoder('utf-8', { fatal: true });
   let line = 1;
   let start = 0;
@@ -64,5 +74,5 @@ function refusal(bytes: Uint8Array): string {
     start = i + 1;
     line++;
   }
-  return `is not in UTF-8 (line ${line}) and its encoding cannot be told; save it as UTF-8 to have it read`;
+  return line;
 }

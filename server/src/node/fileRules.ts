@@ -1,6 +1,7 @@
 // What a folder's names and ignore files say against reading a path in it, each with a reason for a person.
+import { existsSync } from 'node:fs';
 import { readFile } from 'node:fs/promises';
-import { join, relative, sep } from 'node:path';
+import { dirname, join, relative, sep } from 'node:path';
 import ignore from 'ignore';
 import type { Ignore } from 'ignore';
 import picomatch from 'picomatch';
@@ -35,7 +36,10 @@ export class FolderRules {
   /** The rules of a folder that a survey begins with. `names` are the names in it. */
   static async ofRoot(root: string, names: readonly string[], policy: FilePolicy): Promise<FolderRules> {
     const excluded = picomatch([...policy.exclude], { dot: true });
-    return new FolderRules(root, policy, excluded, [], false).within(root, names);
+    const above = new FolderRules(root, policy, excluded, await ignoresAbove(root), false);
+    // A folder that is ignored itself was named all the same: its user wants it read.
+    const outer = above.isIgnored(root, true) ? new FolderRules(root, policy, excluded, [], false) : above;
+    return outer.within(root, names);
   }
 
   /** The rules of a folder below. */
@@ -73,6 +77,17 @@ export class FolderRules {
     }
     return ignored;
   }
+}
+
+/** The ignore files of the folders above, up to the root of the repository; none where there is no repository. */
+async function ignoresAbove(root: string): Promise<{ folder: string; rules: Ignore }[]> {
+  const found: { folder: string; rules: Ignore }[] = [];
+  for (let at = root; !existsSync(join(at, '.git'));) {
+    if (dirname(at) === at) return [];
+    at = dirname(at);
+    if (existsSync(join(at, '.gitignore'))) found.unshift(await ignoreFile(at));
+  }
+  return found;
 }
 
 async function ignoreFile(folder: string): Promise<{ folder: string; rules: Ignore }> {

@@ -116,11 +116,11 @@ async function startDescribesInterface(path: string): Promise<boolean> {
   }
 }
 
-/** Reads a file as text; see {@link decode} for the encodings. */
-export async function readText(path: string): Promise<Decoded> {
+/** Reads a file as text; in the encodings of {@link decode}, unless others are asked for. */
+export async function readText(path: string, decoding = decode): Promise<Decoded> {
   try {
     if ((await stat(path)).size > LARGEST_FILE) return { reason: 'larger than 4 MiB' };
-    return decode(await readFile(path));
+    return decoding(await readFile(path));
   } catch (error) {
     return { reason: plainReason(error) };
   }

@@ -9,6 +9,7 @@ import type { Profiles } from '../engine/factsOf.js';
 import type { FilePolicy } from '../text/filePolicy.js';
 import { withPathLanguage } from '../text/language.js';
 import type { SourceText } from '../text/sourceText.js';
+import { decodeUtf8 } from './decoding.js';
 import { FactsPool } from './factsPool.js';
 import { CannotRead, findFiles, readDocument, readText, termbasesAbove, uriOfPath } from './files.js';
 import type { LeftOut } from './files.js';
@@ -82,7 +83,7 @@ export async function surveyFolders(
 }
 
 async function readTermbase(path: string): Promise<string> {
-  const file = await readText(path);
+  const file = await readText(path, decodeUtf8);
   if ('reason' in file) throw new CannotRead(`${path}: ${file.reason}`);
   return file.text;
 }

@@ -111,6 +111,23 @@ describe('the files of a folder', () => {
   });
 });
 
+describe('a folder within a repository', () => {
+  it('follows the ignore files above it, unless it is ignored as a whole', async () => {
+    const repository = await temporaryFolder({
+      ...{ '.git/HEAD': 'ref: refs/heads/main\n', '.gitignore': '*.draft.md\nprivate/\n' },
+      ...{ 'docs/a.md': PAGE, 'docs/b.draft.md': PAGE, 'private/c.md': PAGE, 'private/d.draft.md': PAGE },
+    });
+    const found = async (name: string) =>
+      (await findFiles(join(repository.path, name))).documents.map((path) => relative(repository.path, path));
+    expect(await found('docs')).toEqual(['docs/a.md']);
+    expect(await found('private')).toEqual(['private/c.md', 'private/d.draft.md']);
+    expect(await whyLeftOut(join(repository.path, 'docs'), join(repository.path, 'docs/b.draft.md'))).toBe(
+      'ignored by .gitignore',
+    );
+    await repository.dispose();
+  });
+});
+
 describe('versions', () => {
   it('are ordered by the numbers of their parts; names follow numbers', () => {
     const names = ['v1.9', '1.10', '1.10.1', 'version-2.0', '2.x', 'v3', 'stable', 'latest', 'main', 'next'];
