@@ -5,6 +5,7 @@ import { describe, expect, it } from 'vitest';
 import { sourceEnd, sourceStart, type ProseBlock } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
 import { commonLength, oracleWords, WORD } from './asciidocOracle.js';
+import { tell } from './oracleTable.js';
 
 /*
  * Where the two differ on purpose: a sentence right below a document's title is text here and an author's name there (many such files
@@ -67,7 +68,7 @@ function difference(theirs: readonly string[], ours: readonly string[]): string 
   return `MISSING ${show(1).slice(0, 400)} EXTRA ${show(-1).slice(0, 400)}`;
 }
 
-async function scoreOf(files: readonly (readonly [string, string])[]): Promise<Score> {
+async function scoreOf(set: string, files: readonly (readonly [string, string])[]): Promise<Score> {
   const score: Score = {
     oracle: 0,
     ours: 0,
@@ -79,11 +80,19 @@ async function scoreOf(files: readonly (readonly [string, string])[]): Promise<S
     details: [],
   };
   for (const [name, text] of files) await compare(name, text, score);
-  const recall = score.common / score.oracle;
-  const precision = score.common / score.ours;
-  console.info(`${score.oracle} words, recall ${recall.toFixed(4)}, precision ${precision.toFixed(4)}`);
-  const speed = (time: number): string => `${(score.units / 1000 / time).toFixed(2)} MB/s`;
-  console.info(`Asciidoctor ${speed(score.oracleTime)}, this reader ${speed(score.ourTime)}`);
+  tell({
+    format: 'AsciiDoc',
+    oracle: 'Asciidoctor',
+    set,
+    theirs: score.oracle,
+    ours: score.ours,
+    found: score.common,
+    right: score.common,
+    misplaced: score.misplaced.length,
+    units: score.units,
+    ourTime: score.ourTime,
+    theirTime: score.oracleTime,
+  });
   if (process.env.ORACLE_DETAILS) console.info(score.details.join('\n'));
   return score;
 }
@@ -196,7 +205,7 @@ const SAMPLE = Number(process.env.ORACLE_FILES ?? 40);
 
 describe('AsciiDoc against Asciidoctor', () => {
   it('agrees word by word on a page with every construct', async () => {
-    const score = await scoreOf([['page', SMALL]]);
+    const score = await scoreOf('a page', [['page', SMALL]]);
     expect(score.misplaced).toEqual([]);
     expect(score.details).toEqual([]);
     expect(score.oracle).toBeGreaterThan(100);
@@ -210,7 +219,10 @@ describe('AsciiDoc against Asciidoctor', () => {
         const files = adocFiles(folder);
         const stride = Math.max(1, Math.ceil(files.length / SAMPLE));
         const sample = files.filter((_, i) => i % stride === 0);
-        const score = await scoreOf(sample.map((file) => [file, readFileSync(file, 'utf8')] as const));
+        const score = await scoreOf(
+          set,
+          sample.map((file) => [file, readFileSync(file, 'utf8')] as const),
+        );
         const { oracle, ours, common, misplaced, details } = score;
         expect(misplaced).toEqual([]);
         expect(oracle).toBeGreaterThan(1000);

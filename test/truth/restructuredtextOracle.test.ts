@@ -6,6 +6,7 @@ import { describe, expect, it } from 'vitest';
 import { sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
 import { commonWords } from './commonWords.js';
+import { tell } from './oracleTable.js';
 
 const WORD = /[\p{L}\p{N}]+/gu;
 const root = path.resolve(import.meta.dirname, '../..');
@@ -48,7 +49,7 @@ function wordsOf(text: string, misplaced: string[]): Word[] {
   return words;
 }
 
-function expectAgreement(files: readonly string[], texts: readonly string[]): void {
+function expectAgreement(set: string, files: readonly string[], texts: readonly string[]): void {
   const { words: theirs, seconds } = oracle(texts);
   const misplaced: string[] = [];
   const [missing, extra]: [string[], string[]] = [[], []];
@@ -76,11 +77,19 @@ function expectAgreement(files: readonly string[], texts: readonly string[]): vo
   });
   const recall = found / all;
   const precision = found / own;
-  const size = texts.reduce((sum, text) => sum + text.length, 0) / 1e6;
-  console.info(
-    `${all} words, recall ${recall.toFixed(4)}, precision ${precision.toFixed(4)}; ` +
-      `${(size / ownSeconds).toFixed(1)} MB/s, docutils ${(size / seconds).toFixed(2)} MB/s`,
-  );
+  tell({
+    format: 'reStructuredText',
+    oracle: 'docutils',
+    set,
+    theirs: all,
+    ours: own,
+    found,
+    right: found,
+    misplaced: misplaced.length,
+    units: texts.reduce((sum, text) => sum + text.length, 0),
+    ourTime: ownSeconds * 1000,
+    theirTime: seconds * 1000,
+  });
   if (process.env.ORACLE_DETAILS) {
     console.info(['missing', ...missing.slice(0, Number(process.env.ORACLE_DETAILS))].join('\n'));
     console.info(['extra', ...extra.slice(0, Number(process.env.ORACLE_DETAILS))].join('\n'));
@@ -194,6 +203,7 @@ describe.skipIf(!hasOracle)('reStructuredText against docutils', () => {
         const stride = Math.max(1, Math.ceil(files.length / SAMPLE));
         const chosen = files.filter((_, i) => i % stride === 0);
         expectAgreement(
+          set,
           chosen.map((file) => path.relative(folder, file)),
           chosen.map((file) => readFileSync(file, 'utf8')),
         );
