@@ -98,6 +98,10 @@ const SNIPPETS = [
     'title: x\n',
   ],
   ...[
+    '# Glossary\n\n',
+    '**term**: said\n',
+    '- **one** – two\n',
+    '| Term | Said |\n|--|--|\n| a | b |\n',
     'Term\n',
     ': definition\n',
     ':   more\n',

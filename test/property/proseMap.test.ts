@@ -77,6 +77,9 @@ const PARTS = [
     '\ud800',
   ],
   ...[
+    '# Glossary\n\n',
+    '**term** 🙂**: said ',
+    '- **one** – `two` &amp; ',
     'Term\n: ',
     '{% highlight %}\n',
     '{% endhighlight %}\n',

@@ -5,6 +5,7 @@ import type { Prose, ProseBlock, ReadingProblem } from '../prose.js';
 import { changeBetween, keepContents, type Change, type Reading } from '../reading.js';
 import { readFrontMatter, type FrontMatter } from './frontMatter.js';
 import { wrap, type Step } from './wrappers.js';
+import { withGlossary } from './glossary.js';
 import { definitionTable, parseStretch, readUnits, shifted, type Stretch, type Unit } from './units.js';
 
 /** A Markdown document read. The fields beside the prose are the reader's own. */
@@ -22,6 +23,8 @@ const MARGIN = 2;
 export interface MarkdownOptions {
   /** False where the text cannot begin with front matter. */
   readonly frontMatter?: boolean;
+  /** False where the glossaries of the document are looked for in it as a whole. */
+  readonly glossary?: boolean;
 }
 
 /** Reads a whole document. */
@@ -32,7 +35,7 @@ export function readMarkdown(source: SourceText, options: MarkdownOptions = {}):
   const stretch = parseStretch(text, source.format, frontMatter?.end ?? bodyStart, text.length);
   const definitions = definitionTable(stretch.definitions);
   const units = readUnits(stretch, definitions, stretch.outline.length);
-  return assemble(source, text, frontMatter, units, definitions);
+  return assemble(source, text, frontMatter, units, definitions, undefined, options.glossary);
 }
 
 /**
@@ -151,6 +154,7 @@ function assemble(
   units: readonly Unit[],
   definitions: ReadonlyMap<string, string>,
   previous?: readonly ProseBlock[],
+  glossary = true,
 ): MarkdownReading {
   const blocks: ProseBlock[] = frontMatter ? [...frontMatter.blocks] : [];
   const problems: ReadingProblem[] = [];
@@ -161,8 +165,9 @@ function assemble(
     for (const problem of unit.problems) problems.push(problem);
   }
   wrap(blocks, steps);
+  const marked = glossary ? withGlossary(blocks, text) : blocks;
   const prose: Prose = {
-    blocks: previous ? keepContents(previous, blocks) : blocks,
+    blocks: previous ? keepContents(previous, marked) : marked,
     problems,
     language: frontMatter?.language,
   };

@@ -3,6 +3,7 @@ import { printParseErrorCode, visit, type ParseErrorCode } from 'jsonc-parser';
 import type { Span } from '../../base/span.js';
 import type { SourceText } from '../../text/sourceText.js';
 import { liftBlocks } from '../embedded.js';
+import { withGlossary } from '../markdown/glossary.js';
 import { readMarkdown, type MarkdownOptions } from '../markdown/markdown.js';
 import { normalise } from '../normalise.js';
 import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
@@ -51,7 +52,7 @@ export function readNotebook(source: SourceText, previous?: NotebookReading): No
   });
   if (title) blocks.push(...readTitle(text, title));
   blocks.sort((a, b) => a.start - b.start);
-  return { source, cells: known, prose: { blocks, problems, language } };
+  return { source, cells: known, prose: { blocks: withGlossary(blocks, text), problems, language } };
 }
 
 /** Reads a notebook again; cells that an edit left alone are not read. */
@@ -67,7 +68,7 @@ function isRead({ type }: Cell, index: number): boolean {
 
 function readCell(text: string, cell: Cell, isFirst: boolean): CellReading {
   const embedded = decodeStrings(text, cell.source);
-  const options: MarkdownOptions = { frontMatter: isFirst };
+  const options: MarkdownOptions = { frontMatter: isFirst, glossary: false };
   const { prose, frontMatter } = readMarkdown({ uri: '', format: 'markdown', text: embedded.text }, options);
   const kept = cell.type === 'raw' ? (frontMatter?.blocks ?? []) : prose.blocks;
   const from = cell.source[0]!.start;
@@ -90,7 +91,10 @@ function asHeading(block: ProseBlock, level: number): ProseBlock {
 
 function readTitle(text: string, string: Span): ProseBlock[] {
   const embedded = decodeStrings(text, [string]);
-  const { prose } = readMarkdown({ uri: '', format: 'markdown', text: embedded.text }, { frontMatter: false });
+  const { prose } = readMarkdown(
+    { uri: '', format: 'markdown', text: embedded.text },
+    { frontMatter: false, glossary: false },
+  );
   const kind: BlockKind = 'title';
   return liftBlocks(prose.blocks, embedded).map(({ start, content }) => ({
     start,
