@@ -19,13 +19,13 @@ const HABIT_RATIO = 2;
 
 /**
  * Suggests a term: the preferred term of a concept that the question touches; else the one that the documents' own glossary
- * prefers; else the one that earlier decisions speak for, by a word within it or by its manner of writing; else the most used;
- * ties by documents, then by code units.
+ * prefers or that past edits moved to; else the one that earlier decisions speak for, by a word within it or by its manner of
+ * writing; else the most used; ties by documents, then by code units.
  */
 export function preferenceOf(question: Question, decisions: Decisions, precedents: Precedents): Preference {
   return (
     decidedPreference(question, decisions) ??
-    glossaryPreference(question) ??
+    minedPreference(question) ??
     partPreference(question, precedents) ??
     habitPreference(question, precedents) ??
     mostUsed(question)
@@ -84,8 +84,8 @@ function decidedPreference(question: Question, decisions: Decisions): Preference
   return undefined;
 }
 
-/** Of a question that decisions have cut down, the glossary's term may be gone. */
-function glossaryPreference({ preferred, terms }: Question): Preference | undefined {
+/** Of a question that decisions have cut down, the preferred term may be gone. */
+function minedPreference({ preferred, terms }: Question): Preference | undefined {
   return terms.some(({ text }) => text === preferred?.text) ? preferred : undefined;
 }
 

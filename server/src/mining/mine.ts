@@ -6,6 +6,7 @@ import { askAbbreviations } from './abbreviations/ask.js';
 import { askGlossary } from './glossary/ask.js';
 import { Glossary } from './glossary/glossary.js';
 import { heedGlossary } from './glossary/heed.js';
+import { heedPastEdits } from './heedPastEdits.js';
 import { askNeutral } from './neutral/ask.js';
 import { DEFAULT_MINING } from './options.js';
 import type { MiningOptions } from './options.js';
@@ -22,7 +23,7 @@ export function* mine(corpus: Corpus, options: MiningOptions = DEFAULT_MINING): 
   const glossary = new Glossary(corpus);
   const questions = heedGlossary(corpus, glossary, mined);
   questions.push(...askGlossary(corpus, glossary, questions));
-  return questions.sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
+  return heedPastEdits(questions, options.pastEdits).sort((a, b) => b.worth - a.worth || compareCodeUnits(a.id, b.id));
 }
 
 function* mineEnglish(corpus: Corpus, options: MiningOptions): Work<Question[]> {

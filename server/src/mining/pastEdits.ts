@@ -1,4 +1,5 @@
 // What writers replaced in earlier versions of the documents: one term by another, in an otherwise unchanged sentence.
+import { times } from './wording.js';
 
 /** A term that a commit replaced by another one in a document. All words in lower case as written, one space apart. */
 export interface Replacement {
@@ -100,6 +101,34 @@ export function countReplacements<T>(edits: PastEdits, termOf: (words: string) =
       mended,
     })),
   );
+}
+
+/** What edits between two terms come to: one way, and seldom or never against it. */
+export interface Direction {
+  /** How often it was done independently: by commits, or on pages where one commit went over several. */
+  readonly times: number;
+  /** True from {@link FEWEST_TIMES} times on: once it may have been anything. */
+  readonly isHabit: boolean;
+  /** The clause that tells a writer, without the terms: how often one way, and how often the other. */
+  readonly text: string;
+}
+
+/** From so many times on, replacing is a habit. */
+export const FEWEST_TIMES = 2;
+/** Of replacements one way, at most this share may stand against them: the other way round, or in sentences that held both. */
+const MOST_AGAINST = 1 / 3;
+
+/** Judges replacements one way by those the other way; undefined where they do not clearly go this way. */
+export function directionOf(forth: ReplacementCount, back: ReplacementCount = NEVER): Direction | undefined {
+  const against = forth.mended + back.sentences + back.mended;
+  if (forth.sentences === 0 || against > MOST_AGAINST * forth.sentences) return undefined;
+  const number = Math.max(forth.commits, forth.pages);
+  const other = back.sentences === 0 ? 'never' : times(back.sentences);
+  return {
+    times: number,
+    isHabit: number >= FEWEST_TIMES,
+    text: `${times(forth.sentences)}, ${other} the other way round`,
+  };
 }
 
 /** How often one of two terms, each given by all its ways of writing, was replaced by the other. */

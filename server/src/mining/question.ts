@@ -63,7 +63,7 @@ export interface Question {
   /** Most used first, ties by code units. */
   readonly terms: readonly QuestionTerm[];
   readonly reasons: readonly Reason[];
-  /** The term that the documents' own glossary prefers, and why. */
+  /** The term that the documents' own glossary prefers, or that writers moved to, and why. */
   readonly preferred?: { readonly text: string; readonly reason: Reason };
   readonly places: readonly UsePlace[];
   /** The terms of questions about the same habit of writing, which wait until this one is answered. Set by the decisions. */

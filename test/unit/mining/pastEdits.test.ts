@@ -1,8 +1,10 @@
 // Counting past replacements of terms, and what the counts say to the engine of synonyms.
 import { describe, expect, it } from 'vitest';
 import { alignmentDistance } from '../../../server/src/base/editDistance.js';
+import { heedPastEdits } from '../../../server/src/mining/heedPastEdits.js';
 import { countReplacements, replacedBetween } from '../../../server/src/mining/pastEdits.js';
 import type { PastEdits, Replacement } from '../../../server/src/mining/pastEdits.js';
+import type { Question, QuestionTerm } from '../../../server/src/mining/question.js';
 import { PairCollector } from '../../../server/src/mining/synonyms/evidence.js';
 import { pairByPastEdits, pastEditKey } from '../../../server/src/mining/synonyms/pastEdits.js';
 import type { Term } from '../../../server/src/mining/synonyms/terms.js';
@@ -92,6 +94,52 @@ describe('as evidence of synonyms', () => {
   it('say nothing of two forms of a word, of slips, and of terms that are no longer used', () => {
     expect(evidenceOf(edits([replacement('worker', 'work'), replacement('plug-in', 'plugin')]))).toEqual([]);
     expect(evidenceOf(edits([replacement('folder', 'catalogue')]))).toEqual([]);
+  });
+});
+
+describe('questions heed past edits', () => {
+  const term = (text: string, uses: number, ...forms: string[]): QuestionTerm => ({
+    ...{ text, uses, documents: 1 },
+    forms: [text, ...forms].map((form) => ({ text: form, uses })),
+  });
+  const question = (...terms: QuestionTerm[]): Question => ({
+    ...{ id: 'q', kind: 'variant', confidence: 0.9, worth: 1, terms, places: [] },
+    reasons: [{ kind: 'spelling', text: 'one word, two spellings', value: 1 }],
+  });
+  const plugins = question(term('plug-in', 9, 'plug-ins'), term('plugin', 4, 'Plugins'));
+  const moved = edits([replacement('plug-ins', 'plugins')], [replacement('plug-in', 'plugin')]);
+
+  it('with a reason, and the name that writers moved to', () => {
+    const [heeded] = heedPastEdits([plugins], moved);
+    expect(heeded?.reasons.map(({ text }) => text)).toEqual([
+      'one word, two spellings',
+      'writers replaced “plug-in” by “plugin” twice, never the other way round',
+    ]);
+    expect(heeded?.preferred).toMatchObject({ text: 'plugin', reason: { kind: 'past-edit', value: 2 } });
+  });
+
+  it('without a name to prefer where it was done once, or something else prefers one', () => {
+    const [once] = heedPastEdits([plugins], edits([replacement('plug-in', 'plugin')]));
+    expect(once?.reasons).toHaveLength(2);
+    expect(once?.preferred).toBeUndefined();
+    const preferred = { text: 'plug-in', reason: { kind: 'glossary', text: 'it has an entry', value: 1 } };
+    expect(heedPastEdits([{ ...plugins, preferred }], moved)[0]?.preferred).toBe(preferred);
+  });
+
+  it('of several names the one that none left', () => {
+    const three = question(term('file', 9), term('page', 5), term('sheet', 3));
+    const chain = edits(
+      ...[1, 2, 3].map(() => [replacement('file', 'page')]),
+      ...[1, 2].map(() => [replacement('page', 'sheet')]),
+    );
+    expect(heedPastEdits([three], chain)[0]?.preferred?.text).toBe('sheet');
+  });
+
+  it('and stay as they are where nothing was replaced, or both ways', () => {
+    expect(heedPastEdits([plugins], undefined)).toEqual([plugins]);
+    expect(heedPastEdits([plugins], edits([replacement('page', 'file')]))).toEqual([plugins]);
+    const both = edits([replacement('plug-in', 'plugin')], [replacement('plugin', 'plug-in')]);
+    expect(heedPastEdits([plugins], both)).toEqual([plugins]);
   });
 });
 
