@@ -1,17 +1,52 @@
 // The door to the readers: a text in, its prose out, whatever the format.
-import type { SourceText } from '../text/sourceText.js';
+import type { Format, SourceText } from '../text/sourceText.js';
 import { readApiDescription, rereadApiDescription } from './apiDescription/apiDescription.js';
 import { readAsciidoc, rereadAsciidoc } from './asciidoc/asciidoc.js';
 import { readLatex, rereadLatex } from './latex/latex.js';
 import { readMarkup, rereadMarkup } from './markup/markup.js';
-import { readMarkdown, rereadMarkdown, type MarkdownReading } from './markdown/markdown.js';
-import { readNotebook, rereadNotebook, type NotebookReading } from './notebook/notebook.js';
+import { readMarkdown, rereadMarkdown } from './markdown/markdown.js';
+import { readNotebook, rereadNotebook } from './notebook/notebook.js';
 import { readPlaintext, rereadPlaintext } from './plaintext.js';
 import type { Prose } from './prose.js';
 import type { Reading } from './reading.js';
 import { readRestructuredText, rereadRestructuredText } from './restructuredtext/restructuredtext.js';
 
 export type { Reading } from './reading.js';
+
+/** How one format is read, and read again. */
+interface Reader {
+  read(source: SourceText): Reading;
+  reread(previous: Reading, source: SourceText): Reading;
+}
+
+/** A reader; where it keeps more than every reading has, `own` is a property by which its readings are known. */
+function reader<Own extends Reading>(
+  readWhole: (source: SourceText) => Own,
+  reread: (previous: Own, source: SourceText) => Reading,
+  own?: keyof Own & string,
+): Reader {
+  return {
+    read: readWhole,
+    reread: (previous, source) =>
+      own === undefined || own in previous ? reread(previous as Own, source) : readWhole(source),
+  };
+}
+
+const markdown = reader(readMarkdown, rereadMarkdown, 'units');
+const markup = reader(readMarkup, rereadMarkup);
+
+const READERS: Readonly<Record<Format, Reader>> = {
+  markdown,
+  mdx: markdown,
+  notebook: reader(readNotebook, rereadNotebook, 'cells'),
+  restructuredtext: reader(readRestructuredText, rereadRestructuredText),
+  asciidoc: reader(readAsciidoc, rereadAsciidoc),
+  html: markup,
+  xml: markup,
+  latex: reader(readLatex, rereadLatex),
+  apiDescription: reader(readApiDescription, rereadApiDescription),
+  plaintext: reader(readPlaintext, rereadPlaintext),
+};
 
 /** The prose of a document. Never throws: what cannot be read is left out and said in `problems`. */
 export function read(source: SourceText): Prose {
@@ -21,13 +56,7 @@ export function read(source: SourceText): Prose {
 /** Reads a document and keeps what {@link reread} needs. Never throws. */
 export function startReading(source: SourceText): Reading {
   try {
-    if (source.format === 'asciidoc') return readAsciidoc(source);
-    if (source.format === 'restructuredtext') return readRestructuredText(source);
-    if (source.format === 'html' || source.format === 'xml') return readMarkup(source);
-    if (source.format === 'latex') return readLatex(source);
-    if (source.format === 'notebook') return readNotebook(source);
-    if (source.format === 'apiDescription') return readApiDescription(source);
-    return source.format === 'markdown' || source.format === 'mdx' ? readMarkdown(source) : readPlaintext(source);
+    return READERS[source.format].read(source);
   } catch (error) {
     return unreadable(source, error);
   }
@@ -41,15 +70,7 @@ export function startReading(source: SourceText): Reading {
 export function reread(previous: Reading, source: SourceText): Reading {
   if (source.format !== previous.source.format) return startReading(source);
   try {
-    if (source.format === 'plaintext') return rereadPlaintext(previous, source);
-    if (source.format === 'html' || source.format === 'xml') return rereadMarkup(previous, source);
-    if (source.format === 'latex') return rereadLatex(previous, source);
-    if (source.format === 'notebook')
-      return 'cells' in previous ? rereadNotebook(previous as NotebookReading, source) : startReading(source);
-    if (source.format === 'apiDescription') return rereadApiDescription(previous, source);
-    if (source.format === 'restructuredtext') return rereadRestructuredText(previous, source);
-    if (source.format === 'asciidoc') return rereadAsciidoc(previous, source);
-    return 'units' in previous ? rereadMarkdown(previous as MarkdownReading, source) : startReading(source);
+    return READERS[source.format].reread(previous, source);
   } catch (error) {
     return unreadable(source, error);
   }
