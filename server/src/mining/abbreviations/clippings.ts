@@ -25,7 +25,7 @@ const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33, usesInFew: 4, shar
  * How sure it is, by the share of the rarer form's uses in frames that both have; least where the clipping is mostly a name of
  * code or one frame says it all.
  */
-const CONFIDENCE = { least: 0.5, shared: 0.4 } as const;
+const CONFIDENCE = { unsure: 0.45, least: 0.5, shared: 0.4 } as const;
 
 /** From this share of uses on pages where the code has the word, a clipping is mostly a name there. */
 const MOSTLY_NAME = 0.58;

@@ -14,14 +14,15 @@ import type { FormUses } from './longForms.js';
 /**
  * The least that is asked about: uses of the short form, and free uses of the long one. A mix is plain where so many of the
  * pages with the short form, and such a share of them, either never explain it or go on with the long form; or where half of
- * them go on with the long form so often, and in such a share of what they say; else a few slips are left.
+ * them go on with the long form so often, and in such a share of what they say; else slips on a few pages, which are
+ * worth no more than these pages, are left.
  */
 const LEAST = {
   short: 2,
   free: 3,
   mixed: { pages: 3, share: 0.55 },
   goingOn: { uses: 6, share: 0.3 },
-  slips: 3,
+  slips: { uses: 3, pages: 2 },
 } as const;
 
 /** How sure it is that the two forms are mixed and not explained where they need be. */
@@ -106,7 +107,8 @@ function mixOf(
   const isFallingBack = slips >= LEAST.goingOn.uses && slips >= LEAST.goingOn.share * (slips + beside);
   if (isFallingBack && goingOn.size * 2 >= shortPages.size)
     return { confidence: CONFIDENCE.onFewPages, settles: Math.min(slips, beside) };
-  return slips >= LEAST.slips ? { confidence: CONFIDENCE.slips, settles: slips } : undefined;
+  const areSeveral = slips >= LEAST.slips.uses && goingOn.size >= LEAST.slips.pages;
+  return areSeveral ? { confidence: CONFIDENCE.slips, settles: goingOn.size } : undefined;
 }
 
 /** True where both stand beside a like word: where no page has both, the long form may mean another thing. */

@@ -31,7 +31,7 @@ export interface Style {
   readonly capitalised: number;
   /** Any letter is a capital. */
   readonly withCapital: number;
-  /** A capital inside a word (ConfigMap, configMap). */
+  /** A capital inside a word, and small letters behind it (ConfigMap, configMap, JSONPath). */
   readonly camel: number;
   /** A capital inside a word that begins with a small letter (configMap). */
   readonly lowerCamel: number;
@@ -113,7 +113,7 @@ function countCase(corpus: Corpus, row: number, length: number, cases: Cases): v
   if (capitals === length) cases.capitalised++;
   if (capitals === 0 || length > 1) return;
   const text = vocabulary.textOf(stream.spelling[row]!);
-  if (/\p{Ll}\p{Lu}/u.test(text)) {
+  if (/\p{Ll}\p{Lu}|\p{Lu}{2}\p{Ll}{2}/u.test(text)) {
     cases.camel++;
     if (/^\p{Ll}/u.test(text)) cases.lowerCamel++;
   } else if (/^[^\p{Ll}]*$/u.test(text)) cases.shouted++;
