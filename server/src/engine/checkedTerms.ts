@@ -3,6 +3,7 @@ import { compareCodeUnits } from '../base/order.js';
 import type { Agenda } from '../decisions/decide.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
 import type { Question, QuestionTerm } from '../mining/question.js';
+import { primaryLanguage } from '../text/language.js';
 import { termKey } from '../termbase/termKey.js';
 
 /**
@@ -17,11 +18,19 @@ export function checkedTerms(agenda: Agenda): CheckedTerm[] {
   return terms;
 }
 
-function decidedTerms({ decisions }: Agenda): CheckedTerm[] {
-  return decisions.concepts.flatMap(({ concept, uri, terms }) =>
+/** The languages of the termbases in force that state one, by their URIs. */
+function languagesByFile({ decisions }: Agenda): ReadonlyMap<string, string | undefined> {
+  return new Map(decisions.chain.map(({ uri, language }) => [uri, primaryLanguage(language)]));
+}
+
+function decidedTerms(agenda: Agenda): CheckedTerm[] {
+  const languages = languagesByFile(agenda);
+  return agenda.decisions.concepts.flatMap(({ concept, uri, terms }) =>
     terms.map(({ entry, preferred }): CheckedTerm => {
       const conceptId = concept.id ?? `${uri}#${concept.preferred.key}`;
+      const language = languages.get(uri);
       return {
+        ...(language !== undefined && { language }),
         ...{ id: `${conceptId} ${entry.text}`, text: entry.text, status: entry.status, conceptId },
         ...(entry.status !== 'preferred' && { preferred: preferred.text }),
         ...(entry.partOfSpeech && { partOfSpeech: entry.partOfSpeech }),
@@ -35,11 +44,15 @@ function decidedTerms({ decisions }: Agenda): CheckedTerm[] {
 
 function apartTerms({ decisions }: Agenda): CheckedTerm[] {
   const known = new Map<string, CheckedTerm>();
-  for (const { apart } of decisions.chain) {
+  for (const { apart, language: stated } of decisions.chain) {
+    const language = primaryLanguage(stated);
     for (const { terms } of apart) {
       for (const { text, key } of terms) {
         if (decisions.termsOf(text).length > 0 || known.has(key)) continue;
-        known.set(key, { id: `apart ${key}`, text, status: 'apart', conceptId: `apart ${key}` });
+        known.set(key, {
+          ...{ id: `apart ${key}`, text, status: 'apart', conceptId: `apart ${key}` },
+          ...(language !== undefined && { language }),
+        });
       }
     }
   }
@@ -54,6 +67,7 @@ function undecidedTerms(question: Question, decided: ReadonlySet<string>): Check
       ...{ id: `${question.id} ${term.text}`, text: term.text, status: 'undecided', conceptId: question.id },
       ...(term !== leading && { preferred: leading!.text }),
       ...(term.partOfSpeech && { partOfSpeech: term.partOfSpeech }),
+      ...(question.language !== undefined && { language: question.language }),
       ...(question.objects !== undefined && { withObjects: question.objects }),
       ...(differsByCaseAlone(term, question) && { caseSensitive: true }),
     }));

@@ -1,4 +1,5 @@
 // Replacing a finding's term by the preferred one, as edits of the document's source.
+import { languagesOf } from '../facts/languages.js';
 import type { Finding } from '../findings/finding.js';
 import { isRefusal, replaceTerm } from '../rewrite/replaceTerm.js';
 import { sourceEdits } from '../rewrite/sourceEdits.js';
@@ -18,7 +19,8 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
   const block = reading?.prose.blocks[finding.block];
   if (reading === undefined || block === undefined || finding.preferred === undefined)
     return { kind: 'refused', reason: 'There is no preferred term.' };
-  const { terms, closed } = snapshot.checkerAt(uri).terms;
+  const language = languagesOf(reading.prose, reading.source.pathLanguage).blocks[finding.block]!;
+  const { terms, closed } = snapshot.checkerAt(uri).termsIn(language);
   const checked = terms.find((term) => term.checked.id === finding.termId)?.checked;
   const replaced = replaceTerm({
     ...{
@@ -30,6 +32,7 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
       to: finding.preferred,
     },
     ...(checked?.partOfSpeech && { partOfSpeech: checked.partOfSpeech }),
+    inflects: language === 'en',
   });
   if (isRefusal(replaced)) return { kind: 'refused', reason: replaced.refused };
   const edits = sourceEdits(block, replaced.span, replaced.edits, reading.source.text);

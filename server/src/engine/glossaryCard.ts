@@ -37,8 +37,10 @@ export interface DefinedAtPlace {
 export function definedAt(snapshot: Snapshot, uri: string, offset: number): DefinedAtPlace | undefined {
   const reading = snapshot.readingOf(uri);
   if (reading === undefined) return undefined;
+  const { closed } = snapshot.checkerAt(uri);
   const at = reading.prose.blocks.findIndex(
-    ({ start, content }) => isOpen(content.zones) && touches({ start, end: start + content.sourceLength }, offset),
+    ({ start, content }) =>
+      isOpen(content.zones, closed) && touches({ start, end: start + content.sourceLength }, offset),
   );
   if (at < 0) return undefined;
   const { content } = reading.prose.blocks[at]!;
@@ -50,8 +52,9 @@ export function definedAt(snapshot: Snapshot, uri: string, offset: number): Defi
   let found: DefinedAtPlace | undefined;
   names.matcher.scan(content.text, 0, content.text.length, (index, start, end) => {
     const span = { start: sourceStart(block, start), end: sourceEnd(block, end) };
-    const closed = content.marks.some((mark) => !isOpen(mark.zones) && contains(mark, { start, end }));
-    if (found === undefined && !closed && touches(span, offset)) found = { name: names.texts[index]!, language, span };
+    const isClosed = content.marks.some((mark) => !isOpen(mark.zones, closed) && contains(mark, { start, end }));
+    if (found === undefined && !isClosed && touches(span, offset))
+      found = { name: names.texts[index]!, language, span };
   });
   return found;
 }

@@ -1,6 +1,7 @@
 // The card of the term at a place: its status, its concept's names with their uses, its companions, and what is asked.
 import type { Span } from '../base/span.js';
 import { contains, touches } from '../base/span.js';
+import { languagesOf } from '../facts/languages.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
 import { companionsOf } from '../mining/companions/companions.js';
 import type { RelatedCompanion } from '../mining/companions/companions.js';
@@ -47,20 +48,22 @@ export interface TermAtPlace {
 export function termAt(snapshot: Snapshot, uri: string, offset: number): TermAtPlace | undefined {
   const reading = snapshot.readingOf(uri);
   if (reading === undefined) return undefined;
-  const { terms } = snapshot.checkerAt(uri);
-  for (const block of reading.prose.blocks) {
+  const checker = snapshot.checkerAt(uri);
+  const languages = languagesOf(reading.prose, reading.source.pathLanguage);
+  for (const [index, block] of reading.prose.blocks.entries()) {
     const { content } = block;
+    const terms = checker.termsIn(languages.blocks[index]!);
     if (
       !touches({ start: block.start, end: block.start + content.sourceLength }, offset) ||
       !isOpen(content.zones, terms.closed)
     )
       continue;
     let found: TermAtPlace | undefined;
-    terms.scan(content.text, (index, start, end) => {
+    terms.scan(content.text, (term, start, end) => {
       const span = { start: sourceStart(block, start), end: sourceEnd(block, end) };
       const closed = content.marks.some((mark) => !isOpen(mark.zones, terms.closed) && contains(mark, { start, end }));
       if (found === undefined && !closed && touches(span, offset))
-        found = { checked: terms.terms[index]!.checked, span };
+        found = { checked: terms.terms[term]!.checked, span };
     });
     if (found !== undefined) return found;
   }

@@ -70,7 +70,9 @@ export function countUses(relations: Relations, terms: readonly CountedTerm[]): 
   const objects = new Map(terms.flatMap(({ id, objects: some }) => (some ? [[id, new ObjectSet(some)] as const] : [])));
   for (const { language, corpus } of relations.languages) {
     const own = terms.filter((term) => term.language === undefined || term.language === language);
-    const matches = [...spellingsOf(own)].flatMap(([key, spelling]) => matchesOf(corpus, key, spelling, objects));
+    const matches = [...spellingsOf(own, language === 'en')].flatMap(([key, spelling]) =>
+      matchesOf(corpus, key, spelling, objects),
+    );
     matches.sort((a, b) => a.row - b.row || b.words - a.words);
     let free = 0;
     for (const { row, words, owners } of matches) {
@@ -87,12 +89,13 @@ export function countUses(relations: Relations, terms: readonly CountedTerm[]): 
   return counts;
 }
 
-function spellingsOf(terms: readonly CountedTerm[]): ReadonlyMap<string, Spelling> {
+/** @param inflects false in languages of which no inflection is known: names count as they are written */
+function spellingsOf(terms: readonly CountedTerm[], inflects: boolean): ReadonlyMap<string, Spelling> {
   const spellings = new Map<string, Spelling>();
   for (const term of terms) {
     const given = (term.forms ?? []).map((text) => ({ form: 'base' as const, text }));
     const seen = new Set<string>();
-    for (const { form, text } of [...termForms(term.text, term.partOfSpeech), ...given]) {
+    for (const { form, text } of [...termForms(term.text, inflects ? term.partOfSpeech : 'other'), ...given]) {
       const key = termKey(text);
       if (key === '' || seen.has(termText(text))) continue;
       seen.add(termText(text));
@@ -115,7 +118,7 @@ function matchesOf(
   for (const row of findUses(corpus, key).rows) {
     const meant = (needsCase ? ownersBySpelling(corpus, row, words, owners) : owners).filter(
       ({ term, form }) =>
-        fitsPartOfSpeech(corpus, row, words, term) &&
+        (corpus.language !== 'en' || fitsPartOfSpeech(corpus, row, words, term)) &&
         (!objects.has(term.id) || hasObject(corpus, row, words, form, objects.get(term.id)!)),
     );
     const claiming = [...new Set(meant.map(({ term }) => term))];

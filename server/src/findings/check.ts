@@ -51,7 +51,7 @@ function firstOf(use: TermUse): BlockFinding | undefined {
 /** What a document's check may draw on besides its prose and terms. */
 export interface CheckOptions {
   /** The findings of a block, from a cache or from {@link checkBlock}. */
-  readonly ofBlock?: (content: BlockContent, terms: TermSet) => readonly BlockFinding[];
+  readonly ofBlock?: (content: BlockContent, terms: TermSet, block: number) => readonly BlockFinding[];
   /** The tags of a block's tokens. */
   readonly tagsOf?: (content: BlockContent) => TagAt | undefined;
   /** Places that the document itself asks to be left as they are. */
@@ -64,7 +64,7 @@ export function checkProse(prose: Prose, terms: TermSet, options: CheckOptions =
   const ofBlock = options.ofBlock ?? ((content: BlockContent) => checkBlock(content, terms, tagsOf?.(content)));
   const findings: Finding[] = [];
   for (const [index, block] of prose.blocks.entries()) {
-    for (const found of ofBlock(block.content, terms)) {
+    for (const found of ofBlock(block.content, terms, index)) {
       const span = { start: sourceStart(block, found.span.start), end: sourceEnd(block, found.span.end) };
       if (kept.isKept(span, found)) continue;
       // Spreading objects of several shapes is some twenty times slower, on the path of each keystroke.

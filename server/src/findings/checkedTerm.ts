@@ -19,6 +19,8 @@ export interface CheckedTerm {
   /** The concept, or for an undecided term the question. */
   readonly conceptId: string;
   readonly partOfSpeech?: PartOfSpeech;
+  /** The language (BCP 47 primary subtag) whose pages the term is looked for in; every language where it is missing. */
+  readonly language?: string;
   /** For verbs: only uses with one of these objects are meant (*launch* a job); absent or empty: every use. */
   readonly withObjects?: readonly string[];
   /** Only this very case is meant. */

@@ -1,5 +1,5 @@
 // The compiled terms: one matcher over all statuses, so that the longest term decides, and what the rules ask of each term.
-import { FORMS, inflectsAs, termForms } from '../rewrite/inflect.js';
+import { FORMS, inflectsAs, termForms, type PartOfSpeech } from '../rewrite/inflect.js';
 import { CLOSED_ZONES } from '../prose/zones.js';
 import type { ZoneSet } from '../prose/zones.js';
 import type { CheckedTerm } from './checkedTerm.js';
@@ -27,20 +27,28 @@ export class TermSet {
   readonly terms: readonly CompiledTerm[];
   private readonly matcher: TermMatcher;
 
-  /** @param closed zones in which nothing is checked */
+  /**
+   * @param closed zones in which nothing is checked
+   * @param inflects false in languages of which no inflection is known: terms are found as they are written, in any case
+   */
   constructor(
     terms: readonly CheckedTerm[],
     readonly closed: ZoneSet = CLOSED_ZONES,
+    inflects = true,
   ) {
+    const inflected = (partOfSpeech: PartOfSpeech | undefined): PartOfSpeech | undefined =>
+      inflects ? partOfSpeech : 'other';
     const spellings = new Map<string, Set<string>>();
     const uses = new Map<string, Set<string>>();
-    for (const { text, partOfSpeech } of terms) {
+    for (const { text, partOfSpeech: stated } of terms) {
+      const partOfSpeech = inflected(stated);
       gather(spellings, foldText(text), text);
       for (const form of termForms(text, partOfSpeech))
         gather(uses, foldText(form.text), inflectsAs(text, partOfSpeech));
     }
     this.terms = terms.map((checked): CompiledTerm => {
-      const { text, partOfSpeech, withObjects, caseSensitive } = checked;
+      const { text, withObjects, caseSensitive } = checked;
+      const partOfSpeech = inflected(checked.partOfSpeech);
       return {
         checked,
         as: inflectsAs(text, partOfSpeech),
@@ -50,11 +58,10 @@ export class TermSet {
       };
     });
     this.matcher = new TermMatcher(
-      this.terms.map(({ checked: { text, partOfSpeech }, caseSensitive }) => ({
-        text,
-        caseSensitive,
-        ...(partOfSpeech === undefined ? {} : { partOfSpeech }),
-      })),
+      this.terms.map(({ checked: { text, partOfSpeech: stated }, caseSensitive }) => {
+        const partOfSpeech = inflected(stated);
+        return { text, caseSensitive, ...(partOfSpeech === undefined ? {} : { partOfSpeech }) };
+      }),
     );
   }
 

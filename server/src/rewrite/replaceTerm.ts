@@ -22,6 +22,8 @@ export interface ReplaceRequest {
   readonly to: string;
   /** Of both terms. */
   readonly partOfSpeech?: PartOfSpeech;
+  /** False in a language of which no grammar is known: one written form takes the place of the other. */
+  readonly inflects?: boolean;
 }
 
 /** The edits of the text, ascending; `span` is the replaced term's own range. Not certain: a person should look before it is applied. */
@@ -42,7 +44,9 @@ export function isRefusal(result: Replacement | Refusal | readonly TextEdit[]): 
 }
 
 /** Replaces the use of `from` at `span` by `to`. Refuses wherever the sentence would come out wrong or in doubt of its meaning. */
-export function replaceTerm({ text, zones = 0, span, from, to, partOfSpeech }: ReplaceRequest): Replacement | Refusal {
+export function replaceTerm(request: ReplaceRequest): Replacement | Refusal {
+  const { text, zones = 0, span, from, to, inflects = true } = request;
+  const partOfSpeech = inflects ? request.partOfSpeech : 'other';
   const surface = text.slice(span.start, span.end);
   if ((zones & CLOSED_ZONES) !== 0)
     return { refused: 'This place is code, a quotation, a label or a link target, which stay as they are.' };
@@ -60,15 +64,16 @@ export function replaceTerm({ text, zones = 0, span, from, to, partOfSpeech }: R
   const moved = as === 'verb' ? aroundPronoun(text, span, replacement) : undefined;
   const ownEdits = wordEdits(text, span, moved?.verb ?? replacement);
   const edits = [
-    ...articleEdit(text, span, replacement),
+    ...(inflects ? articleEdit(text, span, replacement) : []),
     ...ownEdits,
     ...(moved ? [moved.edit] : []),
-    ...possessiveEdit(text, span, surface, replacement),
+    ...(inflects ? possessiveEdit(text, span, surface, replacement) : []),
   ];
   if (edits.length === 0) return { refused: `“${surface}” already stands there.` };
   // Which form it was does not matter where the new term writes them alike too.
   const certain = found.certain || found.forms.every((form) => inflect(form) === inflected);
-  return { span, edits, certain };
+  // Words around it may have to agree with the new term.
+  return { span, edits, certain: certain && inflects };
 }
 
 /** Reasons against the replacement that lie in the sentence around it. */
