@@ -8,6 +8,7 @@ import { read } from '../../server/src/prose/read.js';
 import { Zone } from '../../server/src/prose/zones.js';
 import { commonLength } from './asciidocOracle.js';
 import { hasPandoc, oracleWords, WORD } from './latexOracle.js';
+import { tell } from './oracleTable.js';
 
 /*
  * Where the two differ on purpose: lists of works are no prose here; a command that the document defines without arguments is one
@@ -105,10 +106,9 @@ function newScore(): Score {
   return { theirs: 0, ours: 0, common: 0, misplaced: [], theirTime: 0, ourTime: 0, units: 0 };
 }
 
-function say({ theirs, ours, common, theirTime, ourTime, units }: Score): string {
-  const speed = (time: number): string => `${(units / 1000 / time).toFixed(2)} MB/s`;
-  const rates = `recall ${(common / theirs).toFixed(4)}, precision ${(common / ours).toFixed(4)}`;
-  return `${theirs} words, ${rates}; Pandoc ${speed(theirTime)}, this reader ${speed(ourTime)}`;
+function report(set: string, score: Score): void {
+  const { common, misplaced } = score;
+  tell({ ...score, format: 'LaTeX', oracle: 'Pandoc', set, found: common, right: common, misplaced: misplaced.length });
 }
 
 /** Documentation of the set `../shared` written in LaTeX by Pandoc itself, without colours for code. */
@@ -146,7 +146,7 @@ describe('LaTeX against Pandoc', () => {
       if (!existsSync(folder)) return context.skip('needs ../shared');
       const score = newScore();
       for (const [name, text] of converted(folder, ending, from, 6)) compare(name, text, score);
-      console.info(say(score));
+      report(set, score);
       expect(score.misplaced).toEqual([]);
       expect(score.theirs).toBeGreaterThan(3000);
       expect(score.common / score.theirs).toBeGreaterThanOrEqual(0.995);
@@ -161,7 +161,7 @@ describe('LaTeX against Pandoc', () => {
     for (const name of readdirSync(handwritten, { recursive: true, encoding: 'utf8' })) {
       if (/\.(?:tex|latex)$/.test(name)) compare(name, readFileSync(path.join(handwritten, name), 'utf8'), score);
     }
-    console.info(say(score));
+    report('LATEX_DOCS', score);
     expect(score.misplaced).toEqual([]);
   }, 600_000);
 });

@@ -8,6 +8,7 @@ import { sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
 import { judgeHtml } from './htmlInMarkdown.js';
 import { maskGenerators } from './markdownOracleMask.js';
+import { tell } from './oracleTable.js';
 
 const WORD = /[\p{L}\p{N}]+/gu;
 
@@ -59,6 +60,10 @@ interface Score {
   found: number;
   ours: number;
   right: number;
+  /** Milliseconds, and the text read in them. */
+  theirTime: number;
+  ourTime: number;
+  units: number;
   misplaced: string[];
   missing: string[];
   extra: string[];
@@ -66,13 +71,19 @@ interface Score {
 
 function compare(file: string, source: string, score: Score): void {
   const { text, opened } = maskGenerators(source);
+  const started = performance.now();
   const { units, unjudged } = oracleUnits(text);
+  score.theirTime += performance.now() - started;
   const inOracle = (from: number, to: number): boolean => {
     for (let i = from; i < to; i++) if (!units.has(i)) return false;
     return true;
   };
   const ours = new Uint8Array(source.length);
-  for (const block of read({ uri: file, format: 'markdown', text: source }).blocks) {
+  const begun = performance.now();
+  const { blocks } = read({ uri: file, format: 'markdown', text: source });
+  score.ourTime += performance.now() - begun;
+  score.units += source.length;
+  for (const block of blocks) {
     if (block.content.kind === 'title' || block.content.kind === 'description') continue;
     for (const { 0: word, index } of block.content.text.matchAll(WORD)) {
       const from = sourceStart(block, index);
@@ -109,13 +120,15 @@ function markdownFiles(folder: string): string[] {
     });
 }
 
-function expectAgreement(files: readonly string[], sample: number): void {
-  const score: Score = { words: 0, found: 0, ours: 0, right: 0, misplaced: [], missing: [], extra: [] };
+function expectAgreement(set: string, files: readonly string[], sample: number): void {
+  const counts = { words: 0, found: 0, ours: 0, right: 0, theirTime: 0, ourTime: 0, units: 0 };
+  const score: Score = { ...counts, misplaced: [], missing: [], extra: [] };
   const stride = Math.max(1, Math.ceil(files.length / sample));
   for (let i = 0; i < files.length; i += stride) compare(files[i]!, readFileSync(files[i]!, 'utf8'), score);
   const recall = score.found / score.words;
   const precision = score.right / score.ours;
-  console.info(`${score.words} words, recall ${recall.toFixed(4)}, precision ${precision.toFixed(4)}`);
+  const misplaced = score.misplaced.length;
+  tell({ ...score, format: 'Markdown', oracle: 'micromark', set, theirs: score.words, misplaced });
   if (process.env.ORACLE_DETAILS)
     console.info({ missing: score.missing.slice(0, 80), extra: score.extra.slice(0, 80) });
   expect(score.misplaced).toEqual([]);
@@ -146,7 +159,7 @@ describe('Markdown against micromark', () => {
       .concat(path.join(root, 'node_modules/micromark/readme.md'))
       .filter((file) => existsSync(file));
     expect(files.length).toBeGreaterThan(4);
-    expectAgreement(files, files.length);
+    expectAgreement('read-me files', files, files.length);
   }, 60_000);
 
   for (const set of ['knative', 'redis', 'rust-book', 'argo-cd']) {
@@ -154,7 +167,7 @@ describe('Markdown against micromark', () => {
     it.skipIf(!existsSync(folder))(
       `agrees on the documentation set ${set} (needs ../shared)`,
       () => {
-        expectAgreement(markdownFiles(folder), SAMPLE);
+        expectAgreement(set, markdownFiles(folder), SAMPLE);
       },
       120_000,
     );

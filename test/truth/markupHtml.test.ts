@@ -8,7 +8,7 @@ import { defaultTreeAdapter as tree, parse, type DefaultTreeAdapterTypes } from 
 import { describe, expect, it } from 'vitest';
 import { sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
-import { compare, expectAgreement, newScore, type Judged } from './markupOracle.js';
+import { compare, expectAgreement, newScore, type Judged, type Score } from './markupOracle.js';
 
 /** Elements in which text is no prose: code and what pages hold for machines (HTML Standard), navigation, superscripts. */
 const CLOSED = new Set(
@@ -67,6 +67,13 @@ function judged(name: string, source: string): Judged {
   return { name, format: 'html', source, prose: textOf(source) };
 }
 
+function compareTimed(name: string, source: string, score: Score): void {
+  const begun = performance.now();
+  const theirs = judged(name, source);
+  score.theirTime += performance.now() - begun;
+  compare(theirs, score);
+}
+
 const PAGE = `<!doctype html>
 <html lang=en><head><meta charset=utf-8><title>Keys &amp; locks</title>
 <style>p { color: red }</style><script>document.write("<p>not prose</p>")</script></head>
@@ -86,7 +93,7 @@ describe('HTML against parse5', () => {
     const score = newScore();
     compare(judged('page.html', PAGE), score);
     compare(judged('page.html', PAGE.replaceAll('\n', '\r\n')), score);
-    expectAgreement(score, 80);
+    expectAgreement(score, 80, 'HTML', 'parse5', 'a page');
     expect({ missing: score.missing, extra: score.extra }).toEqual({ missing: [], extra: [] });
     expect(torn(PAGE)).toEqual([]);
   });
@@ -113,10 +120,10 @@ describe('HTML against parse5', () => {
         extensions: [gfm()],
         htmlExtensions: [gfmHtml()],
       });
-      compare(judged(`${name}.html`, page), score);
+      compareTimed(`${name}.html`, page, score);
       expect(torn(page)).toEqual([]);
     }
-    expectAgreement(score, 1000);
+    expectAgreement(score, 1000, 'HTML', 'parse5', 'read-me files');
   }, 60_000);
 
   it('agrees on pages of the documentation of Rust', (context) => {
@@ -132,10 +139,10 @@ describe('HTML against parse5', () => {
       for (let i = 0; i < files.length; i += stride) {
         const source = readFileSync(path.join(inside, files[i]!), 'utf8');
         if (source.length > 400_000) continue;
-        compare(judged(`${book}/${files[i]}`, source), score);
+        compareTimed(`${book}/${files[i]}`, source, score);
         expect(torn(source)).toEqual([]);
       }
     }
-    expectAgreement(score, 1000);
+    expectAgreement(score, 1000, 'HTML', 'parse5', 'Rust');
   }, 60_000);
 });

@@ -3,6 +3,7 @@ import { expect } from 'vitest';
 import { sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
 import type { Format } from '../../server/src/text/sourceText.js';
+import { tell } from './oracleTable.js';
 
 const WORD = /[\p{L}\p{N}]+/gu;
 /** What stands in text and is no prose by the rules of every format: URLs, addresses, template markers, tags that are shown; and references. */
@@ -15,13 +16,18 @@ export interface Score {
   found: number;
   ours: number;
   right: number;
+  /** Milliseconds, and the text read in them. */
+  theirTime: number;
+  ourTime: number;
+  units: number;
   readonly misplaced: string[];
   readonly missing: string[];
   readonly extra: string[];
 }
 
 export function newScore(): Score {
-  return { words: 0, found: 0, ours: 0, right: 0, misplaced: [], missing: [], extra: [] };
+  const counts = { words: 0, found: 0, ours: 0, right: 0, theirTime: 0, ourTime: 0, units: 0 };
+  return { ...counts, misplaced: [], missing: [], extra: [] };
 }
 
 /** A file, and the stretches of it that the other parser takes for prose. */
@@ -41,7 +47,11 @@ export function compare({ name, format, source, prose }: Judged, score: Score): 
     return true;
   };
   const ours = new Uint8Array(source.length);
-  for (const block of read({ uri: `file:///${name}`, format, text: source }).blocks) {
+  const begun = performance.now();
+  const { blocks } = read({ uri: `file:///${name}`, format, text: source });
+  score.ourTime += performance.now() - begun;
+  score.units += source.length;
+  for (const block of blocks) {
     for (const { 0: word, index } of block.content.text.matchAll(WORD)) {
       const from = sourceStart(block, index);
       const to = sourceEnd(block, index + word.length);
@@ -73,11 +83,11 @@ function isAttribute(source: string, offset: number): boolean {
   return /[A-Za-z]/.test(source[opening + 1] ?? '') && source.lastIndexOf('>', offset) < opening;
 }
 
-/** Expects the agreement that the reader promises. */
-export function expectAgreement(score: Score, leastWords: number): void {
+/** Expects the agreement that the reader promises on a set of files. */
+export function expectAgreement(score: Score, leastWords: number, format: string, oracle: string, set: string): void {
   const recall = score.found / score.words;
   const precision = score.right / score.ours;
-  console.info(`${score.words} words, recall ${recall.toFixed(4)}, precision ${precision.toFixed(4)}`);
+  tell({ ...score, format, oracle, set, theirs: score.words, misplaced: score.misplaced.length });
   if (process.env.ORACLE_DETAILS)
     console.info({ missing: score.missing.slice(0, 80), extra: score.extra.slice(0, 80) });
   expect(score.misplaced).toEqual([]);

@@ -20,16 +20,18 @@ export interface OracleRow {
 
 /** Prints the row, and adds it to the file that ORACLE_TABLE names. */
 export function tell(row: OracleRow): void {
-  const { format, set, theirs, found, right, ours, misplaced } = row;
+  const { format, oracle, set, theirs, found, right, ours, misplaced, units, ourTime, theirTime } = row;
   console.info(
     `${format}, ${set}: ${theirs} words, recall ${(found / theirs).toFixed(4)}, precision ${(right / ours).toFixed(4)}, ` +
-      `${misplaced} misplaced; ${speedOf(row.units, row.ourTime)}, ${row.oracle} ${speedOf(row.units, row.theirTime)}`,
+      `${misplaced} misplaced; ${speedOf(units, ourTime)}, ${oracle} ${speedOf(units, theirTime)}`,
   );
   const table = process.env.ORACLE_TABLE;
-  if (table !== undefined) appendFileSync(table, `${JSON.stringify(row)}\n`);
+  if (table === undefined) return;
+  const plain: OracleRow = { format, oracle, set, theirs, ours, found, right, misplaced, units, ourTime, theirTime };
+  appendFileSync(table, `${JSON.stringify(plain)}\n`);
 }
 
 /** A speed for reading. */
 export function speedOf(units: number, milliseconds: number | undefined): string {
-  return milliseconds === undefined ? '–' : `${(units / 1000 / milliseconds).toFixed(2)} MB/s`;
+  return milliseconds === undefined || milliseconds === 0 ? '–' : `${(units / 1000 / milliseconds).toFixed(2)} MB/s`;
 }

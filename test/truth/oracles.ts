@@ -52,7 +52,7 @@ const cells = rows.map((row) => [
   String(row.misplaced),
   speedOf(row.units, row.ourTime),
   speedOf(row.units, row.theirTime),
-  row.ourTime === undefined || row.theirTime === undefined ? '–' : `${(row.theirTime / row.ourTime).toFixed(1)} ×`,
+  !row.ourTime || !row.theirTime ? '–' : `${(row.theirTime / row.ourTime).toFixed(1)} ×`,
 ]);
 const widths = HEAD.map((head, at) => Math.max(head.length, ...cells.map((row) => row[at]!.length)));
 for (const row of [HEAD, ...cells])
