@@ -3,7 +3,8 @@ import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { fullFormsOf } from '../../lexicon/clippings.js';
-import { TokenFlag } from '../../tokens/tokens.js';
+import { TAG, TokenFlag } from '../../tokens/tokens.js';
+import { endRowOfBlock, followsOn, isContent } from '../../corpus/stream.js';
 import { countDocuments, examplePlacesOf } from '../places.js';
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
@@ -23,9 +24,10 @@ const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33, usesInFew: 4, shar
 
 /**
  * How sure it is, by the share of the rarer form's uses in frames that both have; least where the clipping is mostly a name of
- * code or one frame says it all.
+ * code or one frame says it all. Adjectives, which labels and names of features clip (max size, auto mode), are for those who
+ * want to see more.
  */
-const CONFIDENCE = { unsure: 0.45, least: 0.5, shared: 0.4 } as const;
+const CONFIDENCE = { modifier: 0.45, least: 0.5, shared: 0.4 } as const;
 
 /** From this share of uses on pages where the code has the word, a clipping is mostly a name there. */
 const MOSTLY_NAME = 0.58;
@@ -84,8 +86,10 @@ function askClipping(corpus: Corpus, clipping: string): Question | undefined {
   const shared = sharedFrames(corpus, framesOf(corpus, words), framesOf(corpus, best.long.uses));
   if (!standAlike(shared) || countDocuments(corpus.stream, words) < LEAST.documents) return undefined;
   const isMostlyName = short.uses.length - words.length > MOSTLY_NAME * short.uses.length;
-  const confidence =
-    CONFIDENCE.least + (isMostlyName || shared.kinds.length < 2 ? 0 : CONFIDENCE.shared * shared.share);
+  const isSure = !isMostlyName && shared.kinds.length > 1;
+  const confidence = isModifier(corpus, best.long.uses)
+    ? CONFIDENCE.modifier
+    : CONFIDENCE.least + (isSure ? CONFIDENCE.shared * shared.share : 0);
   return makeQuestion(corpus, short, words, best.long, shared, confidence);
 }
 
@@ -110,6 +114,16 @@ function isPlain(corpus: Corpus, { row, length }: Use): boolean {
   if ((stream.flags[row]! & TokenFlag.identifier) !== 0)
     return length === 1 && /\d/.test(vocabulary.textOf(stream.fold[row]!));
   return !/\p{Lu}\p{Lu}/u.test(vocabulary.textOf(stream.spelling[row]!));
+}
+
+/** True where most uses stand before a noun, as adjectives. */
+function isModifier({ stream }: Corpus, uses: readonly Use[]): boolean {
+  const modifying = uses.filter(({ row, length }) => {
+    const end = row + length;
+    if (stream.tag[end - 1] !== TAG.ADJ || end >= endRowOfBlock(stream, row)) return false;
+    return followsOn(stream, end) && isContent(stream, end);
+  });
+  return modifying.length * 2 > uses.length;
 }
 
 /** A use on a page where the code has the word as a name: as likely that name without its marks. */

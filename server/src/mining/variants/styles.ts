@@ -83,8 +83,7 @@ function makeStyle(corpus: Corpus, readers: Readers, text: string, forms: readon
       const length = form.folds.length;
       if (readers.mentions.isMention(row, length)) continue;
       const found = isName(corpus, row, form) ? 'lone' : readers.slots.slotOf(row, length);
-      // An open plural before a noun is not its modifier: "two elements follow".
-      const slot = found === 'attributive' && form.shape === 'open' && form.plural ? 'unclear' : found;
+      const slot = found === 'attributive' && form.plural ? beforeNoun(form) : found;
       slots[slot]++;
       uses.push({ row, length, slot });
       countCase(corpus, row, length, cases);
@@ -92,6 +91,11 @@ function makeStyle(corpus: Corpus, readers: Readers, text: string, forms: readon
   }
   uses.sort((a, b) => a.row - b.row);
   return { shape: forms[0]!.shape, text, forms, uses, slots, ...cases };
+}
+
+/** A plural is no modifier: "two elements follow" leaves it open, "it bulk-loads data" is a verb, "the webservers group" a name. */
+function beforeNoun({ shape }: Form): Slot {
+  return shape === 'open' ? 'unclear' : shape === 'hyphened' ? 'verb' : 'attributive';
 }
 
 /** A word in small letters, or with a first capital alone, that the code of its page has too; kinds and classes are judged by their capitals. */
