@@ -162,7 +162,7 @@ describe('Markdown against micromark', () => {
     expectAgreement('read-me files', files, files.length);
   }, 60_000);
 
-  for (const set of ['knative', 'redis', 'rust-book', 'argo-cd']) {
+  for (const set of ['knative', 'redis', 'rust-book', 'argo-cd', 'opensearch', 'wagtail']) {
     const folder = path.join(root, '../shared/data/docs', set);
     it.skipIf(!existsSync(folder))(
       `agrees on the documentation set ${set} (needs ../shared)`,
