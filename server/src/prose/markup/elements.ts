@@ -1,11 +1,13 @@
 // From a stream of tags and text to blocks of prose: which elements are open, and which block their text belongs to.
 import { ContentBuilder, type BlockRole } from '../content.js';
-import type { ProseBlock } from '../prose.js';
+import { isGlossaryTitle, sendsOn } from '../glossary.js';
+import type { BlockContent, ProseBlock } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import { Zone } from '../zones.js';
 import { closedFrame, ground, openFrame, State, type Frame } from './frames.js';
 import { HTML } from './htmlElements.js';
-import { CONTAINER, Flow, HIDDEN, PARAGRAPH, type ElementRole, type Vocabulary } from './roles.js';
+import { CLOSED, CONTAINER, Flow, HEADWORD, HIDDEN, OPAQUE_INLINE, PARAGRAPH, TERM } from './roles.js';
+import type { ElementRole, Vocabulary } from './roles.js';
 import type { TextReader } from './runningText.js';
 import type { StartTag } from './startTag.js';
 
@@ -32,12 +34,16 @@ export class Elements {
   readonly frames: Frame[];
   /** Elements met that are paragraphs: where there is none, titles alone make no documentation. */
   paragraphs = 0;
+  /** The language that the document states for itself. */
+  language: string | undefined;
   private readonly blocks: ProseBlock[] = [];
   private pending: Pending | undefined;
   private link: OpenLink | undefined;
   private readonly suspended: { readonly pending: Pending | undefined; readonly link: OpenLink | undefined }[] = [];
   /** Counts what became visible, by which an element without text is known. */
   private shown = 0;
+  /** The level of the heading that says that its section is a glossary, or 0. */
+  private glossaryLevel = 0;
   /** The end of the last white space between elements. */
   private spacedTo = 0;
 
@@ -45,7 +51,7 @@ export class Elements {
     private readonly text: string,
     private readonly reader: TextReader,
     /** True where text outside all elements is prose. */
-    takesText: boolean,
+    private readonly takesText: boolean,
   ) {
     this.frames = [ground(CONTAINER, takesText)];
   }
@@ -62,8 +68,9 @@ export class Elements {
   }
 
   /** Opens an element whose start tag ends before `tagEnd`. */
-  open(tag: StartTag, role: ElementRole, vocabulary: Vocabulary, tagEnd: number): void {
+  open(tag: StartTag, ofName: ElementRole, vocabulary: Vocabulary, tagEnd: number): void {
     const parent = this.top;
+    const role = this.roleHere(tag, ofName, vocabulary);
     const { flow } = role;
     const { name, start } = tag;
     if (parent.state === State.none) {
@@ -88,9 +95,16 @@ export class Elements {
     }
     if (flow === Flow.picture) this.opaque(start, tagEnd);
     const target = tag.target(role);
-    const zones = role.zones | tag.zones(role, vocabulary);
+    const language = this.isRoot(tag) ? undefined : tag.language();
+    const isForeign = flow === Flow.inline && language !== undefined && this.isForeign(language);
+    const zones = role.zones | tag.zones(role, vocabulary) | (isForeign ? Zone.quotation : 0);
     const refers = vocabulary !== HTML && (target !== undefined || tag.isReused());
     const frame = openFrame(parent, name, role, zones, start, this.shown, refers);
+    if (flow !== Flow.inline) {
+      if (language !== undefined) frame.language = language;
+      if (tag.isGlossary()) frame.isGlossary = true;
+      if (this.glossaryLevel > 0) frame.glossary = role.glossary ?? role.listed ?? frame.glossary;
+    }
     this.frames.push(frame);
     if (flow === Flow.aside) this.suspend();
     if (target !== undefined && this.link === undefined) this.openLink(frame, target);
@@ -136,6 +150,35 @@ export class Elements {
     }
   }
 
+  /** The role of an element by its name, unless its attributes or its place say otherwise. */
+  private roleHere(tag: StartTag, role: ElementRole, vocabulary: Vocabulary): ElementRole {
+    const parent = this.top;
+    if (tag.isUntranslated(vocabulary) && !this.isRoot(tag) && tag.name !== 'body') {
+      if (role.flow === Flow.inline) return OPAQUE_INLINE;
+      if (role.flow === Flow.container || role.flow === Flow.block || role.flow === Flow.aside) return CLOSED;
+    }
+    // A paragraph of a glossary that begins with the term that it defines.
+    const isEntry = role === TERM && tag.name === 'dfn' && parent.role === PARAGRAPH && !this.pending;
+    if (!isEntry || (!parent.isGlossary && this.glossaryLevel === 0)) return role;
+    parent.glossary = 'definition';
+    return HEADWORD;
+  }
+
+  /** True for the element that holds the whole document, of which the stream reads what it states. */
+  private isRoot({ name }: StartTag): boolean {
+    return name === 'html' || (this.frames.length === 1 && !this.takesText);
+  }
+
+  private isForeign(language: string): boolean {
+    const own = this.top.language ?? this.language ?? 'en';
+    return own.split('-', 1)[0]!.toLowerCase() !== language.split('-', 1)[0]!.toLowerCase();
+  }
+
+  /** A language as a block has it: only where it is not the document's. */
+  private ownLanguage(language: string | undefined): string | undefined {
+    return language === this.language ? undefined : language;
+  }
+
   private suspend(): void {
     this.suspended.push({ pending: this.pending, link: this.link });
     this.pending = undefined;
@@ -164,11 +207,12 @@ export class Elements {
   /** The pending block; a new one, if need be, begins at `at`. */
   private begin(at: number): Pending {
     if (this.pending) return this.pending;
-    const { kind, level, blockZones } = this.top;
+    const { kind, level, blockZones: zones, glossary, language } = this.top;
     const out = new ContentBuilder(this.text, at);
     out.setZones(this.zones());
     if (this.link) this.link.from = 0;
-    return (this.pending = { out, role: { kind, level, zones: blockZones }, end: at, spaced: true });
+    const role = { kind, level, zones, glossary, language: this.ownLanguage(language) };
+    return (this.pending = { out, role, end: at, spaced: true });
   }
 
   /** Ends the pending block. */
@@ -178,7 +222,16 @@ export class Elements {
     this.endLink();
     this.pending = undefined;
     const content = pending.out.finish(pending.role, pending.end);
-    if (content) this.blocks.push({ start: pending.out.start, content: markQuotations(content) });
+    if (!content) return;
+    if (content.kind === 'heading') this.enterSection(content);
+    const isReference = content.glossary === 'definition' && sendsOn(content.text);
+    const block = isReference ? { ...content, glossary: 'see' as const } : content;
+    this.blocks.push({ start: pending.out.start, content: markQuotations(block) });
+  }
+
+  private enterSection({ text, level }: BlockContent): void {
+    if (isGlossaryTitle(text)) this.glossaryLevel = level;
+    else if (level <= this.glossaryLevel) this.glossaryLevel = 0;
   }
 
   private zones(): number {
@@ -201,6 +254,7 @@ export class Elements {
   private readAttributes(tag: StartTag, vocabulary: Vocabulary, isRead: boolean): void {
     const { attributes } = vocabulary;
     if (attributes.size === 0) return;
+    const stated = this.isRoot(tag) ? undefined : tag.language();
     tag.forEach((name, from, to) => {
       const kind = attributes.get(`${tag.name}@${name}`) ?? (isRead ? attributes.get(name) : undefined);
       if (kind === undefined || from === to) return;
@@ -210,7 +264,8 @@ export class Elements {
       this.reader.read(start, to, out, false);
       const own = kind === 'alternativeText' ? Zone.alternativeText : kind === 'description' ? Zone.frontMatter : 0;
       const zones = own | (this.top.blockZones & (Zone.quotation | Zone.safetyMessage));
-      const content = out.finish({ kind, level: 0, zones }, this.reader.visibleEnd(start, to));
+      const language = this.ownLanguage(stated ?? this.top.language);
+      const content = out.finish({ kind, level: 0, zones, language }, this.reader.visibleEnd(start, to));
       if (content) this.blocks.push({ start, content: markQuotations(content) });
     });
   }

@@ -1,5 +1,5 @@
 // The open elements of a document, and what each means for the text in it.
-import type { BlockKind } from '../prose.js';
+import type { BlockKind, GlossaryPart } from '../prose.js';
 import { Zone, type ZoneSet } from '../zones.js';
 import { VOID, ENDS_PARAGRAPH, IMPLIED_ENDS, IN_HEAD } from './htmlElements.js';
 import { Flow, type ElementRole } from './roles.js';
@@ -38,6 +38,12 @@ export interface Frame {
   readonly shown: number;
   /** True where a text is made for it if it has none. */
   readonly refers: boolean;
+  /** BCP 47 tag of the blocks in it where the source states one; else the document's holds. */
+  language: string | undefined;
+  /** What the blocks in it are in a glossary. */
+  glossary: GlossaryPart | undefined;
+  /** True where attributes say that it is a glossary. */
+  isGlossary: boolean;
 }
 
 /** Zones that a block has from what it lies in, whatever it is. */
@@ -47,7 +53,8 @@ const INHERITED: ZoneSet = Zone.quotation | Zone.safetyMessage;
 export function ground(role: ElementRole, takesText: boolean): Frame {
   const zones = { blockZones: 0, inlineZones: 0 };
   const place = { depth: 0, titled: 'heading', start: 0, shown: 0, refers: false } as const;
-  return { name: '', role, state: State.read, kind: 'paragraph', level: 0, ...zones, ...place, takesText };
+  const own = { language: undefined, glossary: undefined, isGlossary: false };
+  return { ...own, name: '', role, state: State.read, kind: 'paragraph', level: 0, ...zones, ...place, takesText };
 }
 
 /** The frame of an element of which nothing is read. */
@@ -95,7 +102,18 @@ export function openFrame(
     start,
     shown,
     refers,
+    language: parent.language,
+    glossary: glossaryPart(parent, role),
+    isGlossary: parent.isGlossary,
   };
+}
+
+/** What lies in a definition is part of it, but for notes. */
+function glossaryPart(parent: Frame, role: ElementRole): GlossaryPart | undefined {
+  if (role.glossary !== undefined) return role.glossary;
+  if (role.listed !== undefined && parent.isGlossary) return role.listed;
+  const goesOn = role.kind === undefined || parent.glossary === 'definition';
+  return goesOn && role.flow !== Flow.aside ? parent.glossary : undefined;
 }
 
 /** A frame whose blocks are what its parent's are. Fields are named one by one: spreading costs a multiple. */
@@ -124,6 +142,9 @@ function like(
     start,
     shown,
     refers,
+    language: parent.language,
+    glossary: parent.glossary,
+    isGlossary: parent.isGlossary,
   };
 }
 

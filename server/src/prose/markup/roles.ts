@@ -1,5 +1,5 @@
 // What an element means to the reader of markup: the shape of the tables of elements, one for each vocabulary.
-import type { BlockKind } from '../prose.js';
+import type { BlockKind, GlossaryPart } from '../prose.js';
 import { Zone, type ZoneSet } from '../zones.js';
 
 /** How an element lies in the text around it. */
@@ -45,6 +45,10 @@ export interface ElementRole {
   readonly parts?: true;
   /** Attributes of which the first present is a link's target. */
   readonly targets?: readonly string[];
+  /** What the blocks in it are in a glossary. */
+  readonly glossary?: GlossaryPart;
+  /** The same, but only where what it lies in is a glossary by its title or its attributes. */
+  readonly listed?: GlossaryPart;
   /** The attribute whose value tells whether this is a safety message. */
   readonly safetyBy?: string;
 }
@@ -113,8 +117,17 @@ export const DESCRIPTION: ElementRole = {
   kind: 'description',
   inMetadata: true,
 };
-export const DEFINED_TERM: ElementRole = { flow: Flow.block, zones: Zone.definedTerm, kind: 'definedTerm' };
-export const DEFINITION: ElementRole = { flow: Flow.block, zones: 0, kind: 'definition' };
+export const DEFINED_TERM: ElementRole = {
+  flow: Flow.block,
+  zones: Zone.definedTerm,
+  kind: 'definedTerm',
+  listed: 'headword',
+};
+export const DEFINITION: ElementRole = { flow: Flow.block, zones: 0, kind: 'definition', listed: 'definition' };
+export const HEADWORD: ElementRole = { ...DEFINED_TERM, glossary: 'headword' };
+export const ALSO_CALLED: ElementRole = { ...DEFINED_TERM, glossary: 'alsoCalled' };
+/** The name of another entry, to which this one sends the reader. */
+export const SEE: ElementRole = { ...DEFINITION, glossary: 'see' };
 export const QUOTATION: ElementRole = { flow: Flow.container, zones: Zone.quotation };
 export const SAFETY: ElementRole = { flow: Flow.container, zones: Zone.safetyMessage, titled: 'caption' };
 export const ASIDE: ElementRole = { flow: Flow.aside, zones: 0, kind: 'paragraph' };

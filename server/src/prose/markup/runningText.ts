@@ -16,6 +16,8 @@ export interface References {
   readonly xml: boolean;
   /** Names that the document itself defines. */
   readonly defined: ReadonlySet<string>;
+  /** Those of them that stand for a character alone. */
+  readonly characters?: ReadonlyMap<string, string> | undefined;
 }
 
 /** Reads stretches of one document's character data, from left to right. */
@@ -98,10 +100,11 @@ export class TextReader {
   }
 
   private decode(reference: string): string | undefined {
-    const { xml, defined } = this.references;
+    const { xml, defined, characters } = this.references;
     if (!xml || reference.charCodeAt(1) === 35) return decodeReference(reference);
     if (PREDEFINED.has(reference)) return decodeReference(reference);
-    if (defined.has(reference.slice(1, -1))) return OPAQUE;
+    const name = reference.slice(1, -1);
+    if (defined.has(name)) return characters?.get(name) ?? OPAQUE;
     const decoded = decodeReference(reference);
     return decoded !== undefined && isCommon(decoded) ? decoded : OPAQUE;
   }

@@ -1,8 +1,15 @@
 // A start tag's attributes by their places, and the role of the element that it starts.
 import { ADMONITION_CLASSES, HTML, LABEL_CLASSES, SAFETY_CLASSES } from './htmlElements.js';
 import { Zone, type ZoneSet } from '../zones.js';
-import { Flow, INLINE, CONTAINER, type ElementRole, type Vocabulary } from './roles.js';
+import { CLOSED, CONTAINER, Flow, INLINE, OPAQUE_INLINE, type ElementRole, type Vocabulary } from './roles.js';
 
+const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/;
+/** The tag of a language that is not known (BCP 47); so HTML and XML mean an empty one. */
+const UNDETERMINED = 'und';
+/** Words in the names of custom elements that hold code; those of the second kind are displayed. */
+const CODE_ELEMENT = /(?:^|-)(?:code|pre|codeblock|snippet|highlight|terminal|console|playground|syntax)(?:-|$)/;
+const CODE_DISPLAY =
+  /block|snippet|example|sample|listing|editor|terminal|console|playground|highlight|tab|group|pre\b/;
 const SAFETY = /^(?:danger|warning|caution|notice)$/i;
 
 /** A start tag while it is read; used again for the next. */
@@ -61,6 +68,30 @@ export class StartTag {
     return isNotice || classes.some((word) => SAFETY_CLASSES.has(word)) ? Zone.safetyMessage : 0;
   }
 
+  /** The language that the element states, as a BCP 47 tag, or undefined. */
+  language(): string | undefined {
+    if (this.names.length === 0) return undefined;
+    const written = this.attribute('xml:lang') ?? this.attribute('lang');
+    if (written === undefined) return undefined;
+    const tag = written.trim().replaceAll('_', '-');
+    return tag === '' ? UNDETERMINED : LANGUAGE_TAG.test(tag) ? tag : undefined;
+  }
+
+  /** True where the element is not to be translated (HTML; ITS 2.0, section 8.1), such as a name: no prose of ours. */
+  isUntranslated(vocabulary: Vocabulary): boolean {
+    if (this.names.length === 0) return false;
+    const translate = this.attribute('translate') ?? this.attribute('its:translate');
+    if (translate !== undefined) return translate.toLowerCase() === 'no';
+    return vocabulary === HTML && /(?:^|\s)notranslate(?:\s|$)/.test(this.attribute('class') ?? '');
+  }
+
+  /** True where attributes say that the element is a glossary (DPUB-ARIA 1.1, `doc-glossary`; else common practice). */
+  isGlossary(): boolean {
+    if (this.names.length === 0) return false;
+    if (this.attribute('role') === 'doc-glossary') return true;
+    return /(?:^|\s)glossary(?:\s|$)/i.test(`${this.attribute('class') ?? ''} ${this.attribute('id') ?? ''}`);
+  }
+
   /** True where the element's text may come from elsewhere (DITA 1.3, content references and keys). */
   isReused(): boolean {
     return this.names.some((name) => name === 'keyref' || name === 'conref' || name === 'conkeyref');
@@ -87,5 +118,7 @@ export function roleOf(
     const role = elements.get(`${parent.name.slice(parent.name.indexOf(':') + 1)}>${name}`);
     if (role) return role;
   }
+  if (vocabulary === HTML && CODE_ELEMENT.test(name) && !elements.has(name))
+    return CODE_DISPLAY.test(name) ? CLOSED : OPAQUE_INLINE;
   return elements.get(name) ?? (vocabulary.unknown === 'inline' || parent.takesText ? INLINE : CONTAINER);
 }

@@ -14,12 +14,9 @@ import { roleOf, StartTag } from './startTag.js';
 /** Elements nested deeper than this are not read: each level costs time at every end tag. */
 const DEEPEST = 256;
 
-const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/;
-
 /** What the tokenizer calls; its offsets count from `base`. */
 export class MarkupStream {
   readonly problems: ReadingProblem[] = [];
-  language: string | undefined;
   private readonly tag: StartTag;
   private readonly elements: Elements;
   /** Undefined until the root element is known. */
@@ -39,9 +36,14 @@ export class MarkupStream {
     private readonly xml: boolean,
   ) {
     this.tag = new StartTag(text, xml);
-    const reader = new TextReader(text, { xml, defined: prolog.entities });
+    const reader = new TextReader(text, { xml, defined: prolog.entities, characters: prolog.characters });
     this.elements = new Elements(text, reader, !xml);
     if (!xml) this.vocabulary = HTML;
+  }
+
+  /** The document's own language. */
+  get language(): string | undefined {
+    return this.elements.language;
   }
 
   read(from: number): void {
@@ -131,8 +133,9 @@ export class MarkupStream {
     }
     if (!this.xml) {
       if (this.foreign === 0) this.closeTo(keptAtStart(elements.frames, tag.name), tag.start);
-      if (tag.name === 'html') this.language ??= languageOf(tag);
+      if (tag.name === 'html' || tag.name === 'body') elements.language ??= tag.language();
     }
+    if (vocabulary === HTML && tag.name === 'meta') elements.language ??= metaLanguage(tag);
     const role = this.roleOf(vocabulary);
     elements.open(tag, role, vocabulary, tagEnd);
     if (isEmpty) this.closeTo(elements.frames.length - 1, tagEnd);
@@ -152,7 +155,7 @@ export class MarkupStream {
     this.vocabulary = vocabulary;
     this.ended = vocabulary === undefined;
     this.rootPrefix = tag.name.slice(0, tag.name.indexOf(':') + 1);
-    this.language = languageOf(tag);
+    this.elements.language = tag.language();
     return !this.ended;
   }
 
@@ -173,7 +176,9 @@ export class MarkupStream {
   }
 }
 
-function languageOf(tag: StartTag): string | undefined {
-  const language = tag.attribute('xml:lang') ?? tag.attribute('lang');
-  return language !== undefined && LANGUAGE_TAG.test(language) ? language : undefined;
+/** The language that a page's head states for want of an attribute (HTML Standard, "Pragma directives"). */
+function metaLanguage(tag: StartTag): string | undefined {
+  if (tag.attribute('http-equiv')?.toLowerCase() !== 'content-language') return undefined;
+  const content = tag.attribute('content')?.trim();
+  return content !== undefined && /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/.test(content) ? content : undefined;
 }
