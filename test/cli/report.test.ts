@@ -20,7 +20,7 @@ const SOUND = 'concepts:\n  - preferred: access key\n    deprecated: [API key]\n
 
 /** Runs a command line over pages in memory; files are written by the real host. */
 async function run(words: readonly string[], termbase?: string): Promise<{ code: number; out: string; notes: string }> {
-  const real = nodeHost();
+  const real = nodeHost('0');
   let out = '';
   let notes = '';
   const host: CliHost = {

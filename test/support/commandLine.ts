@@ -11,12 +11,16 @@ export interface Run {
   readonly err: string;
 }
 
-/** Runs `evenword …words` in a folder. */
-export function evenword(words: readonly string[], cwd = projectRoot): Promise<Run> {
+/** Runs `evenword …words` in a folder, with further variables of the environment. */
+export function evenword(words: readonly string[], cwd = projectRoot, variables: NodeJS.ProcessEnv = {}): Promise<Run> {
   const file = join(projectRoot, 'dist/cli.js');
   if (!existsSync(file)) throw new Error('dist/cli.js is missing: run npm run build first');
   return new Promise((resolve) => {
-    const child = spawn(process.execPath, [file, ...words], { cwd, stdio: ['ignore', 'pipe', 'pipe'] });
+    const child = spawn(process.execPath, [file, ...words], {
+      cwd,
+      env: { ...process.env, ...variables },
+      stdio: ['ignore', 'pipe', 'pipe'],
+    });
     let out = '';
     let err = '';
     child.stdout.setEncoding('utf8').on('data', (text: string) => (out += text));

@@ -20,6 +20,7 @@ export const FILE_OPTIONS: Readonly<Record<string, OptionRule>> = {
     value: 'ZONES',
     help: `open or close zones, by commas: quotation=on,heading=off; of ${SWITCHED_ZONES.join(', ')}`,
   },
+  'no-history': { help: 'do not read in the git history what writers replaced' },
   'explain-files': { help: 'say which files were left out, and why' },
 };
 
@@ -43,6 +44,7 @@ export async function surveyOrStop(
       exclude: typeof exclude === 'string' ? splitGlobs(exclude) : [],
       changeLogs: options.has('change-logs'),
     },
+    history: mine && !options.has('no-history'),
     mining: typeof zones === 'string' ? { closedZones: readZones(zones) } : {},
   });
   sayLeftOut(host, survey.leftOut, options.has('explain-files'));

@@ -24,6 +24,8 @@ export interface SurveyRequest {
   /** What is left out by choice. */
   readonly files: FilePolicy;
   readonly mining: MiningOptions;
+  /** True where the history of the folders is read as well. */
+  readonly history: boolean;
 }
 
 /** The world as the command line sees it. */

@@ -1,15 +1,17 @@
 // The command line's world on Node: standard streams, the file system, colours where the terminal has them.
-import { mkdir, writeFile } from 'node:fs/promises';
-import { dirname, join, relative } from 'node:path';
+import { writeFile } from 'node:fs/promises';
+import { homedir, tmpdir } from 'node:os';
+import { dirname, isAbsolute, join, relative } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { CliHost, Survey, SurveyRequest } from '../cli/host.js';
 import { CannotSurvey } from '../cli/host.js';
 import { Profiles } from '../engine/factsOf.js';
 import { CannotRead, plainReason } from './files.js';
+import { makeFolder } from './makeFolder.js';
 import { surveyFolders } from './survey.js';
 
-/** The host of a process. Colours are off where NO_COLOR is set (no-color.org) or output is no terminal. */
-export function nodeHost(): CliHost {
+/** The host of a process. Colours are off where NO_COLOR is set (no-color.org) or output is no terminal. `version` is the engine's. */
+export function nodeHost(version: string): CliHost {
   const colours = process.stdout.isTTY && process.env.NO_COLOR === undefined;
   let shown = 0;
   const progress = (text: string): void => {
@@ -24,7 +26,7 @@ export function nodeHost(): CliHost {
     emphasise: (text) => (colours ? `\u001b[1m${text}\u001b[22m` : text),
     faint: (text) => (colours ? `\u001b[2m${text}\u001b[22m` : text),
     survey(paths, request) {
-      return surveyForCli(paths, request, this.progress.bind(this));
+      return surveyForCli(paths, request, version, this.progress.bind(this));
     },
     pathOf(uri) {
       if (!uri.startsWith('file:')) return uri;
@@ -50,29 +52,17 @@ export function nodeHost(): CliHost {
   };
 }
 
-/** Makes a folder and those above it. Node's own recursive mkdir never returns where a file system answers ENOENT to mkdir. */
-async function makeFolder(folder: string): Promise<void> {
-  const codeOf = (error: unknown): unknown => (error as NodeJS.ErrnoException).code;
-  const make = async (): Promise<void> => {
-    await mkdir(folder).catch((error: unknown) => {
-      if (codeOf(error) !== 'EEXIST') throw error;
-    });
-  };
-  await make().catch(async (error: unknown) => {
-    if (codeOf(error) !== 'ENOENT' || dirname(folder) === folder) throw error;
-    await makeFolder(dirname(folder));
-    await make();
-  });
-}
-
 async function surveyForCli(
   paths: readonly string[],
   request: SurveyRequest,
+  version: string,
   progress: (text: string) => void,
 ): Promise<Survey> {
+  const { history, ...wanted } = request;
   try {
     const { engine, rootUri, leftOut } = await surveyFolders(paths, new Profiles(), {
-      ...request,
+      ...wanted,
+      ...(history && { history: { version, cacheFolder: userCacheFolder() } }),
       progress: (stage, done, all) =>
         progress(stage === 'reading' ? `Reading ${done} of ${all} pages` : 'Comparing terms …'),
     });
@@ -82,4 +72,13 @@ async function surveyForCli(
     if (error instanceof CannotRead) throw new CannotSurvey(error.message);
     throw error;
   }
+}
+
+/** Where programs keep what they can find anew: by the XDG Base Directory Specification 0.8, or the platform's own place. */
+function userCacheFolder(): string {
+  const { XDG_CACHE_HOME: cache, LOCALAPPDATA: local } = process.env;
+  const place = process.platform === 'win32' ? local : cache;
+  if (place !== undefined && isAbsolute(place)) return join(place, 'evenword');
+  const home = homedir();
+  return isAbsolute(home) ? join(home, '.cache', 'evenword') : join(tmpdir(), 'evenword');
 }

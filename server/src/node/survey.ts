@@ -5,12 +5,15 @@ import { dirname, join, resolve } from 'node:path';
 import { finish } from '../base/work.js';
 import { Engine } from '../engine/engine.js';
 import type { MiningOptions } from '../mining/options.js';
+import type { PastEdits } from '../mining/pastEdits.js';
 import type { Profiles } from '../engine/factsOf.js';
 import type { FilePolicy } from '../text/filePolicy.js';
 import { withPathLanguage } from '../text/language.js';
 import type { SourceText } from '../text/sourceText.js';
 import { decodeUtf8 } from './decoding.js';
 import { FactsPool } from './factsPool.js';
+import { readHistory } from './history/history.js';
+import type { HistoryOptions } from './history/history.js';
 import { CannotRead, findFiles, readDocument, readText, termbasesAbove, uriOfPath } from './files.js';
 import type { LeftOut } from './files.js';
 
@@ -36,11 +39,13 @@ export async function surveyFolders(
     readonly mine: boolean;
     readonly files?: FilePolicy;
     readonly mining?: MiningOptions;
+    /** How the folders' history is read, where it is wanted. */
+    readonly history?: Omit<HistoryOptions, 'signal'>;
     readonly progress?: SurveyProgress;
     readonly signal?: AbortSignal;
   },
 ): Promise<SurveyedFolders> {
-  const { mine, files, mining, progress, signal } = options;
+  const { mine, files, mining, history, progress, signal } = options;
   const absolute = paths.map((path) => resolve(path));
   const found = [];
   for (const path of absolute) found.push(await findFiles(path, files));
@@ -56,6 +61,9 @@ export async function surveyFolders(
     if ('source' in file) sources.push(withPathLanguage(file.source, rootUri));
     else leftOut.push(file.leftOut);
   }
+  const past = mine && history !== undefined ? pastEditsOf(await foldersOf(absolute), history, signal) : undefined;
+  // Where reading pages fails first, that is what is told.
+  past?.catch(() => undefined);
   const pool = new FactsPool(profiles);
   const facts = mine
     ? await pool.gather(sources, {
@@ -66,7 +74,7 @@ export async function surveyFolders(
   await pool.end();
   const engine = new Engine(profiles);
   engine.apply({
-    ...(mining && { mining }),
+    mining: { ...mining, pastEdits: await past },
     documents: sources.map((source, index) => {
       const known = facts[index];
       return { uri: source.uri, source, ...(known && { facts: known }) };
@@ -80,6 +88,19 @@ export async function surveyFolders(
     finish(engine.settle());
   }
   return { engine, rootUri, leftOut };
+}
+
+/** What the history of some folders tells; nothing where there is none. */
+async function pastEditsOf(
+  folders: readonly string[],
+  options: Omit<HistoryOptions, 'signal'>,
+  signal: AbortSignal | undefined,
+): Promise<PastEdits | undefined> {
+  const read = [];
+  for (const folder of new Set(folders))
+    read.push(await readHistory(folder, { ...options, ...(signal && { signal }) }));
+  const commits = read.flatMap((history) => history?.edits.commits ?? []);
+  return commits.length === 0 ? undefined : { commits };
 }
 
 async function readTermbase(path: string): Promise<string> {

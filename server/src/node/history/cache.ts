@@ -1,7 +1,8 @@
 // What was found in commits, kept in a folder outside the repository: a commit never changes, so it is read once.
 import { createHash, randomUUID } from 'node:crypto';
-import { mkdir, readFile, rename, rm, stat, writeFile } from 'node:fs/promises';
+import { readFile, rename, rm, stat, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
+import { makeFolder } from '../makeFolder.js';
 import type { Replacement } from '../../mining/pastEdits.js';
 
 /** Replacements by the name of their commit. */
@@ -63,7 +64,7 @@ export async function writeCache(place: CachePlace, known: KnownCommits): Promis
   const path = pathOf(place);
   const draft = `${path}.${randomUUID()}`;
   try {
-    await mkdir(place.folder, { recursive: true, mode: 0o700 });
+    await makeFolder(place.folder, 0o700);
     // Two programs may write at once: each file that is read is whole.
     await writeFile(draft, `${checksum(text)}\n${text}`, { mode: 0o600, flag: 'wx' });
     await rename(draft, path);

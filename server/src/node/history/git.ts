@@ -110,7 +110,7 @@ export class Git {
     run.stdin.on('error', () => undefined);
     run.stdin.end(input ?? '');
     const ended = new Promise<number | null>((resolve, reject) => {
-      run.on('error', reject);
+      run.on('error', (error) => reject(new GitFailed(error.message)));
       run.on('close', resolve);
     });
     try {

@@ -9,7 +9,7 @@ import type { KnownCommits } from './cache.js';
 import { changesOf, isRepository, listCommits } from './commits.js';
 import { readContents } from './contents.js';
 import type { ReadObject } from './contents.js';
-import { Git } from './git.js';
+import { Git, GitFailed } from './git.js';
 
 /** How much of a history is read. */
 export interface HistoryBounds {
@@ -53,33 +53,51 @@ export interface ReadHistory {
   readonly leftOver: number;
 }
 
+/** A repository may be so large that listing its commits takes longer than this beyond what reading them may take. In milliseconds. */
+const LISTING = 30_000;
+
 /**
  * Reads the past edits of a folder's documents. Undefined where there is nothing to read: no git program, no repository, or one
- * that git refuses to read for this user.
+ * that git cannot read for this user. Never fails but where its signal is aborted.
  */
 export async function readHistory(folder: string, options: HistoryOptions): Promise<ReadHistory | undefined> {
-  const { bounds = DEFAULT_BOUNDS, cacheFolder, version } = options;
-  const signal = options.signal ?? new AbortController().signal;
+  const { bounds = DEFAULT_BOUNDS, signal } = options;
+  const limit = AbortSignal.timeout(bounds.time + LISTING);
+  try {
+    return await read(folder, options, bounds, signal === undefined ? limit : AbortSignal.any([signal, limit]));
+  } catch (error) {
+    signal?.throwIfAborted();
+    if (limit.aborted || error instanceof GitFailed) return undefined;
+    throw error;
+  }
+}
+
+async function read(
+  folder: string,
+  { cacheFolder, version }: HistoryOptions,
+  bounds: HistoryBounds,
+  signal: AbortSignal,
+): Promise<ReadHistory | undefined> {
   const git = Git.find(folder);
   if (git === undefined || !(await isRepository(git, signal))) return undefined;
   const commits = await listCommits(git, bounds.commits, signal);
   const place = cacheFolder === undefined ? undefined : { folder: cacheFolder, documents: folder, version };
   const known = place === undefined ? new Map<string, readonly Replacement[]>() : await readCache(place);
   const wanted = commits.filter((commit) => !known.has(commit));
-  const read = await readCommits(git, wanted, bounds, signal);
+  const found = await readCommits(git, wanted, bounds, signal);
   const all: KnownCommits = new Map(
     commits.flatMap((commit) => {
-      const replacements = read.get(commit) ?? known.get(commit);
+      const replacements = found.get(commit) ?? known.get(commit);
       return replacements === undefined ? [] : [[commit, replacements]];
     }),
   );
-  if (place !== undefined && read.size > 0) await writeCache(place, all);
+  if (place !== undefined && found.size > 0) await writeCache(place, all);
   return {
     edits: { commits: [...all.values()].filter((replacements) => replacements.length > 0) },
     key: createHash('sha256')
       .update([...all.keys()].join('\n'))
       .digest('hex'),
-    ...{ commits: commits.length, readNow: read.size, leftOver: wanted.length - read.size },
+    ...{ commits: commits.length, readNow: found.size, leftOver: wanted.length - found.size },
   };
 }
 
@@ -101,7 +119,7 @@ async function readCommits(
   const reader = new RevisionReader();
   let bytes = 0;
   const isEnough = (): boolean => bytes >= bounds.bytes || Date.now() >= until;
-  const read = async (next: () => Promise<ReadObject>): Promise<void> => {
+  const readAll = async (next: () => Promise<ReadObject>): Promise<void> => {
     for (const { commit, documents } of queue) {
       if (isEnough()) return;
       const own: Replacement[] = [];
@@ -117,7 +135,7 @@ async function readCommits(
       }
     }
   };
-  if (names.length > 0) await readContents(git, names, bounds.largest, read, signal);
+  if (names.length > 0) await readContents(git, names, bounds.largest, readAll, signal);
   else for (const commit of commits) found.set(commit, []);
   return found;
 }
