@@ -140,10 +140,10 @@ describe('verbs with their object', () => {
 
   it('asks about a verb with its particle', () => {
     const questions = ask(
-      ...pagesWith('carry out', 'operation'),
-      ...pagesWith('perform', 'operation').map((text) => `Note. ${text}`),
+      ...pagesWith('set up', 'connection'),
+      ...pagesWith('establish', 'connection').map((text) => `Note. ${text}`),
     );
-    expect(idsOf(questions)).toEqual(['verb-object:carry out|perform:operation']);
+    expect(idsOf(questions)).toEqual(['verb-object:establish|set up:connection']);
   });
 
   it.each([

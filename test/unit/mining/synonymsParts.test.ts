@@ -8,7 +8,7 @@ import { isGeneralNoun, isGeneralVerb } from '../../../server/src/mining/synonym
 import { resolveTarget } from '../../../server/src/mining/synonyms/linkTargets.js';
 import { selfSimilarity, termsToHalve } from '../../../server/src/mining/synonyms/likeness.js';
 import { compareTerms } from '../../../server/src/mining/synonyms/neighbours.js';
-import { bestScoreOf, confidenceOf, scoreOf } from '../../../server/src/mining/synonyms/score.js';
+import { bestScoreOf, confidenceOf, isGrounded, scoreOf } from '../../../server/src/mining/synonyms/score.js';
 import type { Known } from '../../../server/src/mining/synonyms/score.js';
 
 describe('clusters by complete link', () => {
@@ -132,6 +132,7 @@ describe('the score', () => {
     sideBySide: { coordinated: 0, contrasted: 0 },
     siblings: 0,
     shape: 'multiword',
+    sharesWord: true,
     properNames: 0,
     general: 0,
     fewest: 20,
@@ -151,6 +152,25 @@ describe('the score', () => {
     { likeness: { similarity: 0.01, rankOfA: 600, rankOfB: 900 } },
   ])('falls with what speaks against: %o', (against) => {
     expect(scoreOf({ ...known, ...against })).toBeLessThan(scoreOf(known) - 0.5);
+  });
+
+  it('holds single words, and one term inside another, to a word of the documents', () => {
+    const statement = { kind: 'definition' as const, strength: 0.3, text: '', value: 1 };
+    expect(isGrounded(known)).toBe(true);
+    expect(isGrounded({ ...known, shape: 'words' })).toBe(false);
+    expect(isGrounded({ ...known, shape: 'words', evidence: [...known.evidence, statement] })).toBe(true);
+    expect(isGrounded({ ...known, shape: 'contained' })).toBe(false);
+    expect(isGrounded({ ...known, general: 2 })).toBe(false);
+    expect(isGrounded({ ...known, likeness: { similarity: 0.05, rankOfA: 2, rankOfB: 3 } })).toBe(false);
+    expect(isGrounded({ ...known, evidence: [{ ...statement, kind: 'renaming' }] })).toBe(true);
+  });
+
+  it('counts a template once, and siblings of a template not at all', () => {
+    const near = (value: number, sharesWord: boolean): number =>
+      scoreOf({ ...known, sharesWord, evidence: [{ kind: 'near-sentence', strength: 0.2, text: '', value }] });
+    expect(near(3, false)).toBeGreaterThan(near(1, false));
+    expect(near(30, false)).toBe(near(3, false));
+    expect(near(3, true)).toBe(scoreOf({ ...known, evidence: [] }));
   });
 
   it('never exceeds its bound', () => {

@@ -33,13 +33,14 @@ export function pairByContainment(
       if (segments.uses[long]! >= FEWEST_USES) ends.push({ long, short });
     }
   });
-  const pagesOf = (term: number): Set<number> =>
-    new Set(occurrences.usesOf(term).map(({ row }) => corpus.stream.documentOf(row)));
+  const pagesOf = once((term) => new Set(occurrences.usesOf(term).map(({ row }) => corpus.stream.documentOf(row))));
+  const behindOthersOf = once((term) => countBehindModifiers(corpus, occurrences, term));
   for (const { long, short } of ends) {
     const { words } = terms[long]!;
     const modifier = words.slice(0, words.length - terms[short]!.words.length).join(' ');
     if (modifier.endsWith('ing') || isGeneralNoun(terms[short]!.words.join(' '))) continue;
-    const behindOthers = countBehindModifiers(corpus, occurrences, short);
+    if (segments.uses[short]! < FEWEST_USES || segments.uses[long]! < LEAST_SHARE * modified.get(short)!) continue;
+    const behindOthers = behindOthersOf(short);
     const share = segments.uses[long]! / (modified.get(short)! + behindOthers);
     if (share < LEAST_SHARE || segments.uses[short]! - behindOthers < FEWEST_USES) continue;
     const [ofLong, ofShort] = [pagesOf(long), pagesOf(short)];
@@ -52,6 +53,14 @@ export function pairByContainment(
       value: share,
     });
   }
+}
+
+function once<T>(find: (term: number) => T): (term: number) => T {
+  const found = new Map<number, T>();
+  return (term) => {
+    if (!found.has(term)) found.set(term, find(term));
+    return found.get(term)!;
+  };
 }
 
 /** Uses of a term right behind a noun or adjective with which it makes no term. */

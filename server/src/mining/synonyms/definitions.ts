@@ -1,4 +1,4 @@
-// Candidates that the documents themselves declare: "A, also called B", "A (B)", "A, or B,", "A, formerly B".
+// Candidates that the documents themselves declare: "A, also called B", "A (B)", "A, or B,", "A, formerly B", "A was renamed to B".
 import type { Corpus } from '../../corpus/corpus.js';
 import { TokenFlag } from '../../tokens/tokens.js';
 import type { PairCollector } from './evidence.js';
@@ -11,8 +11,8 @@ const REACH = 8;
 export interface Statement {
   readonly a: number;
   readonly b: number;
-  /** An outright statement, or merely parentheses and commas. */
-  readonly outright: boolean;
+  /** An outright statement, one that a name was changed for the other, or merely parentheses and commas. */
+  readonly kind: 'outright' | 'renaming' | 'loose';
   /** Index of the earlier occurrence. */
   readonly at: number;
 }
@@ -42,9 +42,11 @@ export function findStatements(corpus: Corpus, segments: Segments): Statement[] 
     const ends = starts(after) || /^[,.;:)\]–—]$/.test(textAt(after));
     const isParenthesis = between === '(' && textAt(after) === ')';
     const isApposition = between === ', or' && /^[,;]$/.test(textAt(after)) && !listsThree(corpus, from, segments, i);
-    if (isOutright(words)) {
-      if (ends) found.push({ a: left, b: right, outright: true, at: i - 1 });
-    } else if (isParenthesis || isApposition) found.push({ a: left, b: right, outright: false, at: i - 1 });
+    if (RENAMING.test(between)) {
+      if (ends) found.push({ a: left, b: right, kind: 'renaming', at: i - 1 });
+    } else if (isOutright(words)) {
+      if (ends) found.push({ a: left, b: right, kind: 'outright', at: i - 1 });
+    } else if (isParenthesis || isApposition) found.push({ a: left, b: right, kind: 'loose', at: i - 1 });
   }
   return found;
 }
@@ -58,6 +60,10 @@ const OPENING = new Set([
   'are',
   'was',
   'were',
+  'has',
+  'have',
+  'had',
+  'used',
   'which',
   'that',
   'also',
@@ -72,6 +78,9 @@ const OPENING = new Set([
   '”',
   '"',
 ]);
+/** What stands between the two names where one took the other's place; words that pass are left out. */
+const RENAMING =
+  /^(?:(?:has|have|had) been|was|were|,|\() (?:(?:recently|since|now|later) )?renamed (?:to|as|from)$|^(?:\(|,|,? ?which|that)? ?(?:(?:was|were|is|are) )?(?:formerly|previously|originally)(?: (?:known|named|called))?(?: as)?$|^used to be (?:called|known as|named)$/;
 const DETERMINERS = new Set(['a', 'an', 'the', 'your', 'its', 'their', '“', '"', "'", '”']);
 const NAMING = new Set([
   'called',
@@ -128,18 +137,20 @@ function listsThree(corpus: Corpus, from: number, segments: Segments, i: number)
   return at.some((row) => vocabulary.textOf(stream.fold[row]!) === ',');
 }
 
+/** Kinds of statement, the one that tells most first. */
+const TELLING: readonly Statement['kind'][] = ['renaming', 'outright', 'loose'];
+
 /** Adds each stated pair once, with the number of its statements and the document of the first. */
 export function pairByStatements(corpus: Corpus, segments: Segments, pairs: PairCollector): void {
-  const byPair = new Map<string, { first: Statement; outright: number; loose: number }>();
+  const byPair = new Map<string, { first: Statement; outright: number; renaming: number; loose: number }>();
   for (const statement of findStatements(corpus, segments)) {
     const key = `${Math.min(statement.a, statement.b)} ${Math.max(statement.a, statement.b)}`;
-    const known = byPair.get(key) ?? { first: statement, outright: 0, loose: 0 };
-    if (statement.outright) known.outright++;
-    else known.loose++;
-    if (statement.outright && !known.first.outright) known.first = statement;
+    const known = byPair.get(key) ?? { first: statement, outright: 0, renaming: 0, loose: 0 };
+    known[statement.kind]++;
+    if (TELLING.indexOf(statement.kind) < TELLING.indexOf(known.first.kind)) known.first = statement;
     byPair.set(key, known);
   }
-  for (const { first, outright, loose } of byPair.values()) {
+  for (const { first, outright, renaming, loose } of byPair.values()) {
     const { stream } = corpus;
     const page = corpus.documents[stream.documentOf(segments.first[first.at]!)]!.uri;
     const rows = {
@@ -147,10 +158,11 @@ export function pairByStatements(corpus: Corpus, segments: Segments, pairs: Pair
       until: segments.first[first.at + 1]! + segments.length[first.at + 1]!,
     };
     const quoted = quote(corpus, rows.from, rows.until);
-    const count = outright + loose;
+    const count = outright + renaming + loose;
     pairs.add(first.a, first.b, {
-      kind: 'definition',
-      strength: outright > 0 ? Math.min(1, 0.8 + 0.1 * outright) : Math.min(0.6, 0.2 + 0.1 * loose),
+      kind: renaming > 0 ? 'renaming' : 'definition',
+      strength:
+        outright + renaming > 0 ? Math.min(1, 0.8 + 0.1 * (outright + renaming)) : Math.min(0.6, 0.2 + 0.1 * loose),
       text: `${shortName(page)} says “${quoted}”${count > 1 ? `, and so do ${count - 1} more places` : ''}`,
       value: count,
     });

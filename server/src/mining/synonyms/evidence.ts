@@ -6,6 +6,7 @@ export type EvidenceKind =
   | 'dictionary'
   | 'component'
   | 'definition'
+  | 'renaming'
   | 'link-target'
   | 'parallel-place'
   | 'near-sentence'

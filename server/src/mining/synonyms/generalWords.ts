@@ -19,7 +19,7 @@ const NOUNS = words(
   specific stage standard start state statement step strategy structure style subject suggestion summary support technique
   tendency term thing thought time tip topic trade-off type understanding update usage use user value variant variation
   variety version view way while whole will word work world year constraint component
-  call consumption data document documentation frame guide release request site space utilization website`,
+  call consumption data document documentation frame guide release request site utilization website`,
 );
 
 /** Verbs that say of any object that it is there, is used, is shown or is spoken of. */

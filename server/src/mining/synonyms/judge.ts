@@ -16,7 +16,7 @@ import type { SparseVector } from '../../corpus/statistics/similarity.js';
 import type { Neighbours } from './neighbours.js';
 import type { Occurrences } from './occurrences.js';
 import { properShare } from './properNames.js';
-import { bestScoreOf, scoreOf } from './score.js';
+import { bestScoreOf, confidenceOf, isGrounded, scoreOf } from './score.js';
 import type { Known, Shape } from './score.js';
 import type { Segments } from './segment.js';
 import type { Siblings } from './siblings.js';
@@ -40,10 +40,12 @@ const FEWEST_USES = 3;
 const LEAST_ALONE = 0.15;
 /** From this share of capitalised uses a term is a proper name. */
 const PROPER = 0.5;
+/** So many pairs at most that can only be asked about on request are compared with all other terms, which costs most. */
+const MOST_ON_REQUEST = 150;
 /** Least score of a pair that is asked about by default, … */
 export const THRESHOLD = 0.3;
 /** … and of one that is asked about on request. */
-export const THRESHOLD_ON_REQUEST = -0.3;
+export const THRESHOLD_ON_REQUEST = -0.8;
 
 const EMPTY: SparseVector = { ids: new Uint32Array(0), weights: new Float64Array(0) };
 
@@ -75,7 +77,22 @@ export class Judge {
     if (this.gathered === undefined) yield* this.gather();
     const able = pairs.filter((pair) => this.refusalOf(pair) === undefined);
     yield;
-    return yield* this.weighUp(able);
+    return yield* this.weighUp(this.mostPromising(able));
+  }
+
+  /** Pairs that may be asked about by default, and of those that can only be on request the ones most worth, in their order. */
+  private mostPromising(pairs: readonly Pair[]): Pair[] {
+    const nearest = { similarity: 1, rankOfA: 1, rankOfB: 1 };
+    const bounded = pairs.map((pair, at) => {
+      const words = this.wordsOf(pair);
+      const score = pair.evidence[0]?.kind === 'neighbours' ? 0 : bestScoreOf(words, this.shareOf(pair.a, pair.b));
+      const fewest = Math.min(this.segments.uses[pair.a]!, this.segments.uses[pair.b]!);
+      const maySure = score >= THRESHOLD && isGrounded({ ...words, likeness: nearest, self: 1 });
+      return { pair, at, maySure, worth: confidenceOf(score) * fewest };
+    });
+    const onRequest = bounded.filter(({ maySure }) => !maySure).sort((x, y) => y.worth - x.worth || x.at - y.at);
+    const dropped = new Set(onRequest.slice(MOST_ON_REQUEST));
+    return bounded.filter((each) => !dropped.has(each)).map(({ pair }) => pair);
   }
 
   /** All that is known of pairs, in their order, of refused ones too. */
@@ -159,10 +176,11 @@ export class Judge {
     return proper;
   }
 
-  private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general'> {
+  private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general' | 'sharesWord'> {
     const [one, other] = [this.terms[a]!, this.terms[b]!];
     const general = Number(differsGenerally(one, other)) + Number(differsGenerally(other, one));
-    return { evidence, shape: shapeOf(one, other), general };
+    const sharesWord = one.words.some((word) => other.words.includes(word));
+    return { evidence, shape: shapeOf(one, other), general, sharesWord };
   }
 
   private keyOf({ a, b }: { readonly a: number; readonly b: number }): number {

@@ -3,6 +3,7 @@ import type { Work } from '../../base/work.js';
 import { THRESHOLD_ON_REQUEST } from './judge.js';
 import type { Judge, JudgedPair } from './judge.js';
 import type { Pair } from './evidence.js';
+import { confidenceOf } from './score.js';
 
 /** Below so many uses, likeness in use is chance. */
 const FEWEST_USES = 100;
@@ -15,9 +16,9 @@ const LEAST_SHARE = 0.6;
 /** Questions at most for likeness alone, … */
 const MOST_ALIKE = 12;
 /** … and for pairs that another source speaks for. */
-const MOST_WEAK = 40;
+const MOST_WEAK = 60;
 
-/** The pairs that are not sure: those with some evidence, then those most alike in use; the strongest first. */
+/** The pairs that are not sure: those with some evidence that are most worth, then those most alike in use. */
 export function* pairByLooks(
   judge: Judge,
   judged: readonly JudgedPair[],
@@ -25,9 +26,10 @@ export function* pairByLooks(
 ): Work<JudgedPair[]> {
   const isSure = new Set(sure);
   const strongestFirst = (x: JudgedPair, y: JudgedPair): number => y.score - x.score || x.a - y.a || x.b - y.b;
+  const worth = ({ score, known }: JudgedPair): number => confidenceOf(score) * known.fewest;
   const weak = judged
     .filter((pair) => !isSure.has(pair) && pair.score >= THRESHOLD_ON_REQUEST)
-    .sort(strongestFirst)
+    .sort((x, y) => worth(y) - worth(x) || strongestFirst(x, y))
     .slice(0, MOST_WEAK);
   const alike = yield* judge.judge(yield* findAlike(judge, judged));
   const unparted = alike.filter(({ known: { sideBySide, siblings, properNames } }) => {

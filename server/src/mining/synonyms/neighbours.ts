@@ -37,9 +37,16 @@ export function* compareTerms(
   const shared = new Float64Array(vectors.length);
   const partners = new Map<number, number[]>();
   for (const { a, b } of pairs) {
-    partners.set(a, [...(partners.get(a) ?? []), b]);
-    partners.set(b, [...(partners.get(b) ?? []), a]);
+    for (const [one, other] of [
+      [a, b],
+      [b, a],
+    ] as const) {
+      const known = partners.get(one);
+      if (known === undefined) partners.set(one, [other]);
+      else known.push(other);
+    }
   }
+  const touchedTerms = new Uint32Array(vectors.length);
   const isLin = similarity === 'lin';
   const wanted = new Set(listed);
   const rows = [...new Set([...partners.keys(), ...listed])].sort((x, y) => x - y);
@@ -47,21 +54,24 @@ export function* compareTerms(
   const nearest = new Map<number, readonly number[]>();
   let steps = 0;
   for (const term of rows) {
-    const touched: number[] = [];
+    let met = 0;
     const { ids, weights } = vectors[term]!;
     for (let i = 0; i < ids.length; i++) {
       const from = index.first[ids[i]!]!;
       const until = index.first[ids[i]! + 1]!;
       for (let at = from; at < until; at++) {
         const other = index.terms[at]!;
-        if (shared[other] === 0) touched.push(other);
+        if (shared[other] === 0) touchedTerms[met++] = other;
         if (isLin) shared[other]! += weights[i]! + index.weights[at]!;
         else if (similarity === 'cosine') shared[other]! += weights[i]! * index.weights[at]!;
         else shared[other]! += Math.min(weights[i]!, index.weights[at]!);
       }
     }
+    const touched = touchedTerms.subarray(0, met);
     for (const other of touched) {
       const sum = totals[term]! + totals[other]!;
+      // Contexts that all terms share weigh nothing: nothing is shared.
+      if (shared[other] === 0) continue;
       if (isLin) shared[other]! /= sum;
       else if (similarity === 'cosine') shared[other]! /= totals[term]! * totals[other]!;
       else shared[other]! /= sum - shared[other]!;
@@ -100,7 +110,7 @@ function sizeOf(weights: Float64Array, similarity: SimilarityName): number {
 }
 
 /** The `keep` most alike, by insertion: few are kept of many. */
-function mostAlike(touched: readonly number[], score: Float64Array, keep: number): number[] {
+function mostAlike(touched: Uint32Array, score: Float64Array, keep: number): number[] {
   const best: number[] = [];
   for (const other of touched) {
     const at = best.findIndex((each) => score[other]! > score[each]! || (score[other] === score[each] && other < each));

@@ -17,6 +17,8 @@ export interface Known {
   readonly siblings: number;
   /** At least one a single word; both of several words; or one term the other with a word more. */
   readonly shape: Shape;
+  /** Whether they have a word in common. */
+  readonly sharesWord: boolean;
   /** How many of the two are proper names. */
   readonly properNames: number;
   /** How many of the two differ from the other by a word of general English. */
@@ -27,6 +29,8 @@ export interface Known {
 
 /** Two unrelated terms, before any evidence. */
 const BASE = -1.2;
+/** What being set side by side costs, by the square root of its share of the rarer term's uses. */
+const BESIDE = 8;
 /** What each word of general English costs. */
 const GENERAL = 0.8;
 /** Uses below which chance plays along, and what that costs. */
@@ -34,24 +38,33 @@ const FEW = { uses: 4, cost: 0.5 };
 /** More places than this are those of a template, and say no more. */
 const MOST_PLACES = 3;
 
+/** Least share of the similarity that two names of one thing have, where a list alone speaks for terms of several words. */
+const LEAST_CONFIRMED = 0.4;
+
 const LEXICAL: readonly EvidenceKind[] = ['list', 'dictionary', 'component'];
 
 /** The score of a pair, in logits: 0 is as likely right as wrong. Weights fitted by reading; see the evaluation. */
 export function scoreOf(known: Known): number {
   const { sideBySide, fewest } = known;
   let score = BASE + lexicalWeight(known) + statementWeight(known) + contextWeight(known);
-  const beside = sideBySide.coordinated + sideBySide.contrasted;
-  score -= 8 * Math.sqrt(beside / fewest);
+  // A statement that one took the other's place sets them side by side itself.
+  const told = known.evidence.find(({ kind }) => kind === 'renaming')?.value ?? 0;
+  const beside = Math.max(0, sideBySide.coordinated + sideBySide.contrasted - told);
+  score -= BESIDE * Math.sqrt(beside / fewest);
   if (beside >= 3) score -= 1;
   score -= 1.8 * Math.log1p(known.siblings);
-  score -= known.properNames === 2 ? 2.5 : known.properNames;
+  // Proper names are mostly names of different things, but for those of which one took the other's place.
+  if (!isRenamed(known)) score -= known.properNames === 2 ? 2.5 : known.properNames;
   score -= GENERAL * known.general;
   if (fewest < FEW.uses) score -= FEW.cost;
   return score;
 }
 
 /** The most that a pair can score whose similarity is a share of `self`, whatever else is found. */
-export function bestScoreOf(known: Pick<Known, 'evidence' | 'shape' | 'general'>, share: number): number {
+export function bestScoreOf(
+  known: Pick<Known, 'evidence' | 'shape' | 'general' | 'sharesWord'>,
+  share: number,
+): number {
   const best = contextWeight({ likeness: { similarity: share, rankOfA: 1, rankOfB: 1 }, self: 1, shape: known.shape });
   return BASE + lexicalWeight(known) + statementWeight(known) + best - GENERAL * known.general;
 }
@@ -61,14 +74,16 @@ export function bestScoreOf(known: Pick<Known, 'evidence' | 'shape' | 'general'>
  * or two terms of several words differ in words that a list calls one, which use confirms. Single words of a list are as
  * often sisters as twins.
  */
-export function isGrounded({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): boolean {
+export function isGrounded(known: Pick<Known, 'evidence' | 'shape' | 'general' | 'likeness' | 'self'>): boolean {
+  const { evidence, shape, general, likeness, self } = known;
+  if (isRenamed(known)) return true;
+  // A choice between two words of general English is one of style.
+  if (general === 2) return false;
   if (evidence.some(({ kind, strength }) => kind === 'definition' && strength >= (shape === 'multiword' ? 0.9 : 1)))
     return true;
   if (strongest(evidence, LEXICAL) === 0) return false;
-  return (
-    shape === 'multiword' ||
-    evidence.some(({ kind, value }) => isOfDocuments(kind) && (kind !== 'near-sentence' || value > 1))
-  );
+  if (shape === 'multiword') return likeness.similarity / self >= LEAST_CONFIRMED;
+  return evidence.some(({ kind, value }) => isOfDocuments(kind) && (kind !== 'near-sentence' || value > 1));
 }
 
 function isOfDocuments(kind: EvidenceKind): boolean {
@@ -78,14 +93,14 @@ function isOfDocuments(kind: EvidenceKind): boolean {
 /** List, dictionary and differing parts say the same of a pair: the strongest counts. */
 function lexicalWeight({ evidence, shape }: Pick<Known, 'evidence' | 'shape'>): number {
   const strength = strongest(evidence, LEXICAL);
-  if (strength === 0) return shape === 'contained' ? -1.3 : 0;
+  if (strength === 0) return shape === 'contained' ? (strongest(evidence, ['containment']) > 0 ? -0.3 : -1.3) : 0;
   // A general dictionary calls the terms of a field by one name that the field tells apart (alarm, alert).
   if (shape === 'words') return -0.8 + 1.6 * strength - (strongest(evidence, ['list']) > 0 ? 0 : 0.3);
   return 0.3 + 1.8 * strength - (shape === 'contained' ? 1.3 : 0);
 }
 
 /** What the documents themselves say and do: statements, links to one place, passages that differ in the pair alone. */
-function statementWeight({ evidence }: Pick<Known, 'evidence'>): number {
+function statementWeight({ evidence, sharesWord }: Pick<Known, 'evidence' | 'sharesWord'>): number {
   let weight = 0;
   // What says little by itself (a mere parenthesis, a sentence that may be a template) says more where a list agrees.
   const agrees = strongest(evidence, LEXICAL) > 0;
@@ -93,14 +108,20 @@ function statementWeight({ evidence }: Pick<Known, 'evidence'>): number {
     const places = Math.min(MOST_PLACES, value);
     if (kind === 'definition') {
       weight += (strength >= 1 ? 2.7 : strength >= 0.8 ? 1.7 : agrees ? 0.7 : 0.4) + 0.3 * Math.min(4, value - 1);
-    } else if (kind === 'link-target') weight += 0.5 * Math.min(2, value);
+    } else if (kind === 'renaming') weight += 3.2 + 0.3 * Math.min(4, value - 1);
+    else if (kind === 'link-target') weight += 0.5 * Math.min(2, value);
     else if (kind === 'parallel-place') weight += 0.5 * Math.log1p(places);
-    else if (kind === 'near-sentence') weight += (agrees ? 0.6 : 0.4) * Math.log1p(places);
-    else if (kind === 'containment') weight += 1.6 * strength;
+    // Terms that share a word are siblings in a template (login form, password reset form).
+    else if (kind === 'near-sentence' && (agrees || !sharesWord)) weight += (agrees ? 0.6 : 0.4) * Math.log1p(places);
+    else if (kind === 'containment') weight += 2 * strength;
     // Editors also correct one thing to another: raw, one pair in four is right.
     else if (kind === 'past-edit' && (agrees || value > 1)) weight += 0.4 * Math.log1p(value);
   }
   return weight;
+}
+
+function isRenamed({ evidence }: Pick<Known, 'evidence'>): boolean {
+  return evidence.some(({ kind }) => kind === 'renaming');
 }
 
 /** Usage confirms or refuses: against the yardstick of one term's own halves, and by mutual rank. */

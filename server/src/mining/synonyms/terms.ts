@@ -73,11 +73,12 @@ export function* findNounTerms(corpus: Corpus, uses: WordUses): Work<Term[]> {
     if (count >= FEWEST_FORM_USES && isTermWord(text(word))) add([word], count);
   }
   yield;
+  const places = placesOfWords(vocabulary.size, uses, text);
   for (let gram = 0; gram < grams.size; gram++) {
     const count = corpus.usesOfGram(gram);
     if (count >= FEWEST_FORM_USES) {
       const words = grams.wordsOf(gram);
-      if (isNounShaped(words, uses, text)) add(words, count);
+      if (isNounShaped(words, places)) add(words, count);
     }
     if (gram % 50_000 === 0) yield;
   }
@@ -133,15 +134,29 @@ function isTermWord(text: string): boolean {
   return text.length > 1 && /^\p{L}[\p{L}\p{M}\d'’+#.-]*$/u.test(text);
 }
 
-/** (adjective | noun | participle)* noun, judged by how each word is used in the whole corpus, not by one tag. */
-function isNounShaped(words: readonly number[], uses: WordUses, text: (word: number) => string): boolean {
+/** Where in a noun term a word may stand. */
+const Place = { first: 1, inside: 2, last: 4 } as const;
+
+/** The places of every word, judged by how it is used in the whole corpus, not by one tag. */
+function placesOfWords(words: number, uses: WordUses, text: (word: number) => string): Uint8Array {
+  const places = new Uint8Array(words);
+  for (let word = 0; word < words; word++) {
+    const spelled = text(word);
+    if (!isTermWord(spelled)) continue;
+    const noun = uses.share(word, 'noun');
+    const isModifier =
+      noun + uses.share(word, 'adjective') >= 0.5 || (uses.share(word, 'verb') >= 0.3 && /(ed|ing|en)$/.test(spelled));
+    if (noun >= 0.4) places[word]! |= Place.last;
+    if (isModifier) places[word]! |= GENERIC.has(spelled) ? Place.inside : Place.inside | Place.first;
+  }
+  return places;
+}
+
+/** (adjective | noun | participle)* noun. */
+function isNounShaped(words: readonly number[], places: Uint8Array): boolean {
   const last = words.length - 1;
   return words.every((word, index) => {
-    const spelled = text(word);
-    if (!isTermWord(spelled)) return false;
-    if (index === last) return uses.share(word, 'noun') >= 0.4;
-    if (index === 0 && GENERIC.has(spelled)) return false;
-    const nominal = uses.share(word, 'noun') + uses.share(word, 'adjective');
-    return nominal >= 0.5 || (uses.share(word, 'verb') >= 0.3 && /(ed|ing|en)$/.test(spelled));
+    const place = index === last ? Place.last : index === 0 ? Place.first : Place.inside;
+    return (places[word]! & place) !== 0;
   });
 }

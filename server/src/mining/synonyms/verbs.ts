@@ -41,7 +41,7 @@ const LEAST_SHARED = 1 / 3;
 /** Verbs that have the object in one sentence more often are steps of one procedure. */
 const MOST_IN_ONE_SENTENCE = 1;
 /** Least score of a pair that is asked about. */
-const THRESHOLD = 0.4;
+const THRESHOLD = 0.5;
 
 /** A verb as it is used with one object. */
 interface VerbWithObject {

@@ -8,7 +8,7 @@ import type { PassageReader, Reading, Substitution } from './passages.js';
 /** Fewest units that two sentences have in common. */
 const FEWEST_COMMON = 3;
 /** Longest sentence that is looked at, in units. */
-const LONGEST = 40;
+const LONGEST = 25;
 /** A sentence in which more terms stand by turns is a template for several things. */
 const MOST_FILLERS = 2;
 
