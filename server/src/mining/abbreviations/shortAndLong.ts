@@ -12,7 +12,8 @@ import { formsOfLong, formsOfShort } from './longForms.js';
 import type { FormUses } from './longForms.js';
 
 /**
- * The least that is asked about: uses of the short form, and free uses of the long one. A mix is plain where so many of the
+ * The least that is asked about: uses of the short form, and free uses of the long one or the
+ * pages that have them. A mix is plain where so many of the
  * pages with the short form, and such a share of them, either never explain it or go on with the long form; or where half of
  * them go on with the long form so often, and in such a share of what they say; else slips on a few pages, which are
  * worth no more than these pages, are left.
@@ -20,6 +21,7 @@ import type { FormUses } from './longForms.js';
 const LEAST = {
   short: 2,
   free: 3,
+  freePages: 2,
   mixed: { pages: 3, share: 0.55 },
   goingOn: { uses: 6, share: 0.3 },
   slips: { uses: 3, pages: 2 },
@@ -99,7 +101,9 @@ function mixOf(
   const mixed = [...shortPages].filter((page) => goingOn.has(page) || !longPages.has(page)).length;
   const slips = free.onItsPages.length;
   const isPlain = mixed >= LEAST.mixed.pages && mixed >= LEAST.mixed.share * shortPages.size;
-  if (isPlain && free.all.length >= LEAST.free && (goingOn.size > 0 || areAlike(corpus, short, free.all))) {
+  const freePages = new Set(free.all.map(pageOf)).size;
+  const isFree = free.all.length >= LEAST.free || freePages >= LEAST.freePages;
+  if (isPlain && isFree && (goingOn.size > 0 || areAlike(corpus, short, free.all))) {
     const confidence = goingOn.size > 1 ? CONFIDENCE.onItsPages : CONFIDENCE.onOtherPages;
     return { confidence, settles: Math.min(free.all.length, short.length) };
   }
