@@ -25,10 +25,16 @@ class Failure extends Error {}
 function tryText(text: string, format: Format, tally: Tally): void {
   const before = performance.now();
   const prose = read(sourceOf(text, format));
-  const milliseconds = performance.now() - before;
+  let milliseconds = performance.now() - before;
   tally.inputs++;
   tally.units += text.length;
   tally.milliseconds += milliseconds;
+  for (let again = 0; again < 3 && milliseconds > tally.slowest.milliseconds; again++) {
+    // What took long once may have waited for something else.
+    const start = performance.now();
+    read(sourceOf(text, format));
+    milliseconds = Math.min(milliseconds, performance.now() - start);
+  }
   if (milliseconds > tally.slowest.milliseconds) tally.slowest = { text, milliseconds };
   const wrong = unsound(text, prose);
   if (wrong !== undefined) throw new Failure(wrong);

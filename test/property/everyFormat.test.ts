@@ -5,10 +5,10 @@ import { read } from '../../server/src/prose/read.js';
 import type { Format } from '../../server/src/text/sourceText.js';
 import { pagesOf } from '../fuzz/pages.js';
 import { sourceOf, unlikeWhole, unsound, type Edit } from '../fuzz/sound.js';
-import { TEXTS } from '../fuzz/texts.js';
+import { ALL_FORMATS, TEXTS } from '../fuzz/texts.js';
 import { ASCIIDOC_PAGE } from '../unit/prose/asciidocPage.js';
 
-const FORMATS: readonly Format[] = ['markdown', 'plaintext', 'restructuredtext', 'asciidoc', 'html', 'xml'];
+const FORMATS = ALL_FORMATS.filter((format) => format !== 'apiDescription');
 
 function expectSound(text: string, format: Format): void {
   expect(unsound(text, read(sourceOf(text, format)))).toBeUndefined();
