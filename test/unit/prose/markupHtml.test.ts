@@ -126,8 +126,10 @@ describe('HTML inside a block', () => {
 
   it('has addresses and template markers as opaque units', () => {
     expect(
-      html('<p>Open https://a.example/b?c=d&amp;e=f, www.a.example/x. Write to a.b@c.example. {{ page.x }} {% if y %}'),
-    ).toEqual(['paragraph: Open @, @. Write to @. @ @']);
+      html(
+        '<p>Open https://a.example/b?c=d&amp;e=f, www.a.example/x. Write to a.b@c.example. {{ page.x }} {% if y %} <%= z %>',
+      ),
+    ).toEqual(['paragraph: Open @, @. Write to @. @ @ @']);
     expect(html('<p>The &lt;p&gt; and &lt;/br &gt; elements; a &lt; b.')).toEqual([
       'paragraph: The @ and @ elements; a < b.',
     ]);

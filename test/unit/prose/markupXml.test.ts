@@ -88,6 +88,15 @@ describe('DITA', () => {
     ).toEqual(['paragraph: Choose <uiLabel:File Save as> now.', 'paragraph: It saves.']);
   });
 
+  it('keeps names with a trademark sign closed', () => {
+    expect(dita('<p>The <tm tmtype="reg">Main Gate</tm> key.</p>')).toEqual([
+      'paragraph: The <quotation:Main Gate> key.',
+    ]);
+    expect(docbook('<para>The <trademark class="registered">Main Gate</trademark> key.</para>')).toEqual([
+      'paragraph: The <quotation:Main Gate> key.',
+    ]);
+  });
+
   it('is no prose in maps', () => {
     expect(xml('<!DOCTYPE map PUBLIC "-//OASIS//DTD DITA Map//EN" "map.dtd"><map><title>Book</title></map>')).toEqual(
       [],

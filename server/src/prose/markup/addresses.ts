@@ -24,6 +24,7 @@ const FINDERS: readonly (readonly [string, Finder])[] = [
   ['@', mailAddress],
   ['{{', (text, mark) => marker(text, mark, '}}')],
   ['{%', (text, mark) => marker(text, mark, '%}')],
+  ['<%', (text, mark) => marker(text, mark, '%>')],
   ['${', (text, mark) => marker(text, mark, '}')],
   ['&lt;', shownTag],
 ];

@@ -62,9 +62,10 @@ const ELEMENTS: readonly role.RoleLine[] = [
   [role.UI_PATH, 'menucascade'],
   [role.TERM, 'term'],
   [role.QUOTE, 'q cite'],
+  [role.NAME, 'tm'],
   [role.link('href', 'keyref'), 'xref'],
   [{ ...role.PARAGRAPH, targets: ['href', 'keyref'] }, 'link'],
-  [role.INLINE, 'ph keyword b i u sub tm text linktext overline'],
+  [role.INLINE, 'ph keyword b i u sub text linktext overline'],
 ];
 
 export const DITA = role.vocabulary('dita', ELEMENTS, { 'image@alt': 'alternativeText', spectitle: 'caption' }, 'read');

@@ -86,11 +86,9 @@ const ELEMENTS: readonly role.RoleLine[] = [
   [role.UI_PATH, 'menuchoice keycombo shortcut'],
   [role.TERM, 'firstterm glossterm'],
   [role.QUOTE, 'quote citetitle foreignphrase wordasword'],
+  [role.NAME, 'trademark'],
   [role.link('xlink:href', 'linkend', 'url', 'targetdoc'), 'link ulink olink'],
-  [
-    role.INLINE,
-    'emphasis phrase abbrev acronym application productname productnumber trademark subscript database hardware',
-  ],
+  [role.INLINE, 'emphasis phrase abbrev acronym application productname productnumber subscript database hardware'],
   [
     role.INLINE,
     'accel date personname firstname surname orgname inlinemediaobject optional medialabel person org city country',

@@ -140,6 +140,8 @@ export const UI_LABEL: ElementRole = { flow: Flow.inline, zones: Zone.uiLabel };
 export const UI_PATH: ElementRole = { flow: Flow.inline, zones: Zone.uiLabel, parts: true };
 export const TERM: ElementRole = { flow: Flow.inline, zones: Zone.definedTerm };
 export const QUOTE: ElementRole = { flow: Flow.inline, zones: Zone.quotation };
+/** A name whose wording is its owner's: closed as a quotation is. */
+export const NAME: ElementRole = { flow: Flow.inline, zones: Zone.quotation };
 export const OPAQUE_INLINE: ElementRole = { flow: Flow.opaque, zones: 0 };
 export const HIDDEN: ElementRole = { flow: Flow.hidden, zones: 0 };
 export const LINE_BREAK: ElementRole = { flow: Flow.lineBreak, zones: 0 };
