@@ -37,8 +37,8 @@ export class TestClient {
     readonly connection: MessageConnection,
   ) {}
 
-  /** Starts the server and initializes it with workspace folders. */
-  static async start(folders: readonly string[], capabilities: object = {}): Promise<TestClient> {
+  /** Starts the server and initializes it with workspace folders, telling it further options. */
+  static async start(folders: readonly string[], capabilities: object = {}, options: object = {}): Promise<TestClient> {
     if (!existsSync(serverFile)) throw new Error('dist/server.js is missing: run npm run build first');
     const child = spawn(process.execPath, [serverFile, '--stdio'], { stdio: 'pipe' });
     const connection = createMessageConnection(
@@ -71,7 +71,7 @@ export class TestClient {
       processId: process.pid,
       rootUri: null,
       workspaceFolders,
-      initializationOptions: { savesTermbase: true },
+      initializationOptions: { savesTermbase: true, ...options },
       capabilities: {
         workspace: {
           configuration: true,
