@@ -33,7 +33,7 @@ export const ROOMS: Readonly<Record<string, RoomRule>> = {
   corpus: { rooms: ['base', 'text', 'prose', 'tokens', 'facts'] },
   mining: { rooms: ['base', 'prose', 'tokens', 'facts', 'corpus', 'lexicon'] },
   termbase: { rooms: ['base', 'text'], packages: [/^yaml$/] },
-  decisions: { rooms: ['base', 'corpus', 'mining', 'termbase'] },
+  decisions: { rooms: ['base', 'text', 'corpus', 'mining', 'termbase'] },
   findings: {
     rooms: ['base', 'text', 'prose', 'tokens', 'lexicon', 'facts', 'corpus', 'termbase', 'decisions', 'rewrite'],
   },

@@ -39,6 +39,7 @@ const concept = fc.record(
     admitted: mostly(terms),
     deprecated: mostly(terms),
     id: mostly(fc.constantFrom('a', '_b', 'c.1-x')),
+    language: mostly(fc.constantFrom('fr', 'pt-BR')),
     partOfSpeech: mostly(fc.constantFrom('verb', 'other')),
     with: mostly(fc.uniqueArray(name)),
     definition: mostly(name),

@@ -1,6 +1,7 @@
 // From termbases and mined questions to what is decided and what is still asked.
 import { compareCodeUnits } from '../base/order.js';
 import type { Question } from '../mining/question.js';
+import { inLanguage } from '../termbase/language.js';
 import type { Termbase } from '../termbase/termbase.js';
 import { Decisions } from './decisions.js';
 import { byHabit, habitOf } from './habits.js';
@@ -16,6 +17,8 @@ export interface SettledQuestion {
 /** The questions of a corpus, sorted by the decisions. */
 export interface Agenda {
   readonly decisions: Decisions;
+  /** What of it holds for a question: decisions about its language, and about none. */
+  readonly decisionsFor: (question: Question) => Decisions;
   /** What earlier decisions have in common, for suggesting an answer. */
   readonly precedents: Precedents;
   /** Still asked, reduced to what is undecided; by worth, ties by id. */
@@ -32,10 +35,20 @@ export interface Agenda {
  */
 export function decide(chain: readonly Termbase[], questions: readonly Question[]): Agenda {
   const decisions = new Decisions(chain);
+  const byLanguage = new Map<string | undefined, Decisions>();
+  const decisionsFor = ({ language }: Question): Decisions => {
+    let found = byLanguage.get(language);
+    if (found === undefined) {
+      const own = chain.map((termbase) => inLanguage(termbase, language));
+      found = own.every((termbase, index) => termbase === chain[index]) ? decisions : new Decisions(own);
+      byLanguage.set(language, found);
+    }
+    return found;
+  };
   const open: Question[] = [];
   const settled: SettledQuestion[] = [];
   for (const question of questions) {
-    const rest = narrow(question, decisions);
+    const rest = narrow(question, decisionsFor(question));
     if (rest.settled === undefined) open.push(...rest.open);
     else settled.push({ question, settled: rest.settled });
   }
@@ -43,7 +56,7 @@ export function decide(chain: readonly Termbase[], questions: readonly Question[
   const putOff = settled.flatMap(({ question, settled: how }) => (how === 'later' ? (habitOf(question) ?? []) : []));
   const asked = byHabit(open, new Set(putOff));
   return {
-    ...{ decisions, precedents: new Precedents(decisions.concepts), settled, waiting: asked.waiting },
+    ...{ decisions, decisionsFor, precedents: new Precedents(decisions.concepts), settled, waiting: asked.waiting },
     open: [...asked.open].sort(byWorth),
   };
 }

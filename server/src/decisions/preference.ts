@@ -1,6 +1,7 @@
 // Which of a question's terms to suggest, and why; and which answers the termbase would accept.
 import { compareCodeUnits } from '../base/order.js';
 import type { Question, QuestionTerm, Reason } from '../mining/question.js';
+import { primaryLanguage } from '../text/language.js';
 import type { Answer } from '../termbase/answer.js';
 import type { PartOfSpeech } from '../termbase/termbase.js';
 import type { Decisions } from './decisions.js';
@@ -43,7 +44,7 @@ export function answersOf(question: Question, decisions: Decisions, precedents: 
   const open = question.terms.filter((_, index) => decided[index] === undefined).map(({ text }) => text);
   const known = decided.find((term) => term !== undefined);
   const uses = question.terms.reduce((sum, term) => sum + term.uses, 0);
-  const scope = scopeOfAnswer(question, known);
+  const scope = { ...scopeOfAnswer(question, known), ...languageOfAnswer(question, decisions) };
   // Decided terms keep their status; their concept takes part in the answer under its preferred term.
   const terms = known === undefined ? open : [known.preferred.text, ...open];
   const preferable = known === undefined ? [suggested, ...open.filter((text) => text !== suggested)] : [suggested];
@@ -60,6 +61,12 @@ export function answersOf(question: Question, decisions: Decisions, precedents: 
 interface AnswerScope {
   readonly partOfSpeech?: PartOfSpeech;
   readonly with?: readonly string[];
+}
+
+/** Stated where the file's language, or English where it states none, is another than the question's. */
+function languageOfAnswer({ language }: Question, { chain }: Decisions): { readonly language?: string } {
+  const usual = primaryLanguage(chain[0]?.language) ?? 'en';
+  return language === undefined || language === usual ? {} : { language };
 }
 
 /** The objects, and the part of speech to write down: a verb's alone, since most terms are nouns, and only where all terms are verbs. */

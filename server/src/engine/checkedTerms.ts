@@ -3,6 +3,7 @@ import { compareCodeUnits } from '../base/order.js';
 import type { Agenda } from '../decisions/decide.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
 import type { Question, QuestionTerm } from '../mining/question.js';
+import { languageOfConcept } from '../termbase/language.js';
 import { primaryLanguage } from '../text/language.js';
 import { termKey } from '../termbase/termKey.js';
 
@@ -18,17 +19,13 @@ export function checkedTerms(agenda: Agenda): CheckedTerm[] {
   return terms;
 }
 
-/** The languages of the termbases in force that state one, by their URIs. */
-function languagesByFile({ decisions }: Agenda): ReadonlyMap<string, string | undefined> {
-  return new Map(decisions.chain.map(({ uri, language }) => [uri, primaryLanguage(language)]));
-}
-
 function decidedTerms(agenda: Agenda): CheckedTerm[] {
-  const languages = languagesByFile(agenda);
+  const files = new Map(agenda.decisions.chain.map((termbase) => [termbase.uri, termbase]));
   return agenda.decisions.concepts.flatMap(({ concept, uri, terms }) =>
     terms.map(({ entry, preferred }): CheckedTerm => {
       const conceptId = concept.id ?? `${uri}#${concept.preferred.key}`;
-      const language = languages.get(uri);
+      const file = files.get(uri);
+      const language = file && languageOfConcept(concept, file);
       return {
         ...(language !== undefined && { language }),
         ...{ id: `${conceptId} ${entry.text}`, text: entry.text, status: entry.status, conceptId },

@@ -26,8 +26,8 @@ export type AnswerEdit =
 
 /** The answers that contradict nothing decided where the URI stands, the suggested one first. */
 export function offeredAnswers(snapshot: Snapshot, uri: string, question: Question): OfferedAnswer[] {
-  const { decisions, precedents } = snapshot.agendaAt(uri);
-  return answersOf(question, decisions, precedents).map((answer) => ({
+  const { decisionsFor, precedents } = snapshot.agendaAt(uri);
+  return answersOf(question, decisionsFor(question), precedents).map((answer) => ({
     title: titleOf(answer),
     choice: { kind: answer.kind, ...(answer.kind === 'prefer' && { preferred: answer.preferred }) },
   }));
@@ -44,11 +44,11 @@ export function answerQuestion(
   id: string,
   choice: Choice,
 ): AnswerEdit {
-  const { open, decisions, precedents } = snapshot.agendaAt(uri);
+  const { open, decisionsFor, precedents } = snapshot.agendaAt(uri);
   const question = open.find((each) => each.id === id);
   const answer =
     question &&
-    answersOf(question, decisions, precedents).find(
+    answersOf(question, decisionsFor(question), precedents).find(
       (each) => each.kind === choice.kind && (each.kind !== 'prefer' || each.preferred === choice.preferred),
     );
   if (answer === undefined) return { kind: 'refused', message: 'This question is no longer open.' };

@@ -1,11 +1,14 @@
 // A writer's answer to a question, and what it changes in a termbase: nothing, an addition, or a contradiction.
 import type { Span } from '../base/span.js';
+import { inLanguage } from './language.js';
 import { TermIndex, type TermPlace } from './termIndex.js';
 import type { ApartEntry, ConceptEntry, LaterEntry, PartOfSpeech, Termbase, TermRef, TermStatus } from './termbase.js';
 import { termKey, termText } from './termKey.js';
 
 interface ConceptAnswer {
   readonly terms: readonly string[];
+  /** The language of the terms (BCP 47 primary subtag), where the answer is about pages in a language other than the file's. */
+  readonly language?: string;
   readonly partOfSpeech?: PartOfSpeech;
   /** For verbs: the objects that the answer is about; none for all objects. */
   readonly with?: readonly string[];
@@ -82,10 +85,13 @@ export type Change =
 export function planAnswer(termbase: Termbase, answer: Answer): Change | Refusal | undefined {
   const terms = distinct(answer.kind === 'prefer' ? [answer.preferred, ...answer.terms] : answer.terms);
   if (terms.length < 2) return { code: 'too-few-terms', message: 'An answer needs at least two different terms.' };
+  if (answer.kind === 'prefer' || answer.kind === 'either') {
+    const own = inLanguage(termbase, answer.language);
+    return planConcept(own, terms, answer, new LookUp(own, terms));
+  }
   const lookUp = new LookUp(termbase, terms);
   if (answer.kind === 'apart') return planApart(termbase, terms, lookUp);
-  if (answer.kind === 'later') return planLater(termbase, terms, answer.uses, lookUp);
-  return planConcept(termbase, terms, answer, lookUp);
+  return planLater(termbase, terms, answer.uses, lookUp);
 }
 
 /** True for what {@link planAnswer} refuses. */

@@ -116,9 +116,10 @@ function makeChange(tree: TreeEdits, root: YAMLMap.Parsed, change: Change): void
 function newEntry(change: Change): [key: string, value: Value] {
   switch (change.kind) {
     case 'new-concept': {
-      const { partOfSpeech, with: objects = [] } = change.answer;
+      const { language, partOfSpeech, with: objects = [] } = change.answer;
       const [preferred, ...others] = change.terms;
       const concept: Record<string, Value> = { preferred: preferred!, [change.status]: others };
+      if (language !== undefined) concept['language'] = language;
       if (partOfSpeech !== undefined) concept['partOfSpeech'] = partOfSpeech;
       if (objects.length > 0) concept['with'] = objects;
       return ['concepts', concept];

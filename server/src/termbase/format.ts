@@ -9,6 +9,7 @@ export const CONCEPT_KEYS = [
   'preferred',
   'admitted',
   'deprecated',
+  'language',
   'partOfSpeech',
   'with',
   'subject',

@@ -2,8 +2,8 @@
 import { isMap, isScalar, isSeq, type ParsedNode } from 'yaml';
 import type { Span } from '../base/span.js';
 import { checkConsistency } from './consistency.js';
-import { APART_KEYS, LANGUAGE_PATTERN, LATER_KEYS, TOP_KEYS } from './format.js';
-import { readConcept, readNames } from './readConcept.js';
+import { APART_KEYS, LATER_KEYS, TOP_KEYS } from './format.js';
+import { readConcept, readLanguage, readNames } from './readConcept.js';
 import { isEmpty, Reading, spanOf, type Field } from './reading.js';
 import {
   emptyTermbase,
@@ -88,14 +88,6 @@ function readVersion(reading: Reading, field: Field | undefined): boolean {
     : `“evenword” gives the version of the file format, which must be the number ${FORMAT_VERSION}. Write “evenword: ${FORMAT_VERSION}”.`;
   reading.error('format-version', span, message);
   return false;
-}
-
-function readLanguage(reading: Reading, field: Field | undefined): string | undefined {
-  const language = reading.text(field, 'The language');
-  if (language === undefined || LANGUAGE_PATTERN.test(language)) return language;
-  const message = `“${language}” is not a language tag (BCP 47). Write one such as “en”, “en-GB” or “de”.`;
-  reading.error('unknown-value', spanOf(field!.value), message);
-  return undefined;
 }
 
 function readApart(reading: Reading, node: ParsedNode): ApartEntry | undefined {

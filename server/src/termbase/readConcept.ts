@@ -1,7 +1,7 @@
 // One concept of the file: its terms by status and what is said about it.
 import { isMap, isScalar, isSeq, type ParsedNode } from 'yaml';
 import type { Span } from '../base/span.js';
-import { CONCEPT_KEYS, ID_PATTERN, TERM_KEYS } from './format.js';
+import { CONCEPT_KEYS, ID_PATTERN, LANGUAGE_PATTERN, TERM_KEYS } from './format.js';
 import { isEmpty, spanOf, type Field, type Node, type Reading } from './reading.js';
 import {
   PARTS_OF_SPEECH,
@@ -26,6 +26,7 @@ export function readConcept(reading: Reading, node: ParsedNode): ConceptEntry | 
   const admitted = readTerms(reading, fields.get('admitted'), 'admitted', partOfSpeech);
   const deprecated = readTerms(reading, fields.get('deprecated'), 'deprecated', partOfSpeech);
   const id = readId(reading, fields.get('id'));
+  const language = readLanguage(reading, fields.get('language'));
   const subject = reading.text(fields.get('subject'), 'The subject');
   const definition = reading.text(fields.get('definition'), 'The definition');
   const note = reading.text(fields.get('note'), 'The note');
@@ -36,6 +37,7 @@ export function readConcept(reading: Reading, node: ParsedNode): ConceptEntry | 
     ...(id !== undefined && { id }),
     terms: [preferred, ...admitted, ...deprecated],
     preferred,
+    ...(language !== undefined && { language }),
     ...(partOfSpeech && { partOfSpeech }),
     ...(subject !== undefined && { subject }),
     ...(definition !== undefined && { definition }),
@@ -44,6 +46,15 @@ export function readConcept(reading: Reading, node: ParsedNode): ConceptEntry | 
     with: objects,
     span,
   };
+}
+
+/** A language tag; its subtags are not looked up. */
+export function readLanguage(reading: Reading, field: Field | undefined): string | undefined {
+  const language = reading.text(field, 'The language');
+  if (language === undefined || LANGUAGE_PATTERN.test(language)) return language;
+  const message = `“${language}” is not a language tag (BCP 47). Write one such as “en”, “en-GB” or “de”.`;
+  reading.error('unknown-value', spanOf(field!.value), message);
+  return undefined;
 }
 
 /** Objects can only go with a verb, so `with` implies it where nothing else is said. */

@@ -46,6 +46,8 @@ export interface ConceptEntry {
   readonly terms: readonly TermEntry[];
   /** The one preferred term; it is also the first of `terms`. */
   readonly preferred: TermEntry;
+  /** The language of the terms (BCP 47), where it is stated for this concept. */
+  readonly language?: string;
   readonly partOfSpeech?: PartOfSpeech;
   readonly subject?: string;
   readonly definition?: string;
@@ -119,8 +121,8 @@ export function emptyTermbase(uri: string): Termbase {
 }
 
 /**
- * Whether two entries of one spelling may stand side by side as homonyms (ISO 1087): both give a part of speech or a
- * subject, and these differ; or both are case-sensitive and spelt differently; or they are verbs decided for different
+ * Whether two entries of one spelling may stand side by side as homonyms (ISO 1087): their languages differ; both give a part
+ * of speech or a subject, and these differ; or both are case-sensitive and spelt differently; or they are verbs decided for different
  * objects, where a decision for some objects is an exception to one for all.
  */
 export function areHomonyms(
@@ -130,7 +132,7 @@ export function areHomonyms(
   const differ = (x: string | undefined, y: string | undefined): boolean =>
     x !== undefined && y !== undefined && x !== y;
   if (differ(a.term.partOfSpeech, b.term.partOfSpeech)) return true;
-  if (differ(a.concept.subject, b.concept.subject)) return true;
+  if (differ(a.concept.subject, b.concept.subject) || a.concept.language !== b.concept.language) return true;
   if (a.term.caseSensitive && b.term.caseSensitive && a.term.text !== b.term.text) return true;
   if (a.concept.with.length === 0 && b.concept.with.length === 0) return false;
   return !a.concept.with.some((object) => b.concept.with.some((other) => other.key === object.key));

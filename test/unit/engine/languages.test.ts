@@ -6,6 +6,7 @@ import { Profiles } from '../../../server/src/engine/factsOf.js';
 import { preferredEdits } from '../../../server/src/engine/fixing.js';
 import type { Snapshot } from '../../../server/src/engine/snapshot.js';
 import { countUses } from '../../../server/src/engine/usage.js';
+import { answerQuestion } from '../../../server/src/ide/answers.js';
 import { hoverAt } from '../../../server/src/ide/hover.js';
 
 const root = 'file:///docs/';
@@ -73,5 +74,51 @@ describe('a termbase with a language', () => {
     const french = survey(`language: fr\n${CONCEPT}`);
     expect(found(french, 'start.md')).toEqual([]);
     expect(french.findingsIn(`${root}both.md`).map(({ block }) => block)).toEqual([1]);
+  });
+});
+
+describe('an answer about another language than the file’s', () => {
+  const german = [
+    'Die Boje schreibt jede Stunde in die Logdatei. Wenn die Logdatei voll ist, legt die Station eine neue Log-Datei an, und die alte Log-Datei wird gelöscht.',
+    'Öffnen Sie die Logdatei auf der Station. In der Log-Datei steht, wann die Boje zuletzt gesendet hat, und die Logdatei ist nur für den Betreiber.',
+  ];
+  const english = 'concepts:\n  - preferred: log file\n    deprecated: [Logdatei]\n';
+
+  function ask(termbase: string): { engine: Engine; ids: string[] } {
+    const engine = new Engine(profiles);
+    engine.apply({
+      documents: german.map((text, index) => {
+        const uri = `${root}${index}.md`;
+        return { uri, source: { uri, format: 'markdown', text } };
+      }),
+      termbases: [{ uri: `${root}termbase.yaml`, text: termbase }],
+    });
+    const { open } = finish(engine.settle()).agendaAt(root);
+    return { engine, ids: open.map(({ id }) => id) };
+  }
+
+  it('is written with its language, and then holds there alone', () => {
+    const { engine, ids } = ask(`evenword: 1\nlanguage: en\n${english}`);
+    expect(ids).toEqual(['variant:Log-Datei|Logdatei']);
+    const answer = answerQuestion(engine.snapshot, root, '', ids[0]!, { kind: 'prefer', preferred: 'Logdatei' });
+    if (answer.kind !== 'edit') throw new Error(answer.message);
+    const before = engine.snapshot.termbases[0]!.text;
+    const text = [...answer.edits]
+      .reverse()
+      .reduce((all, { span, newText }) => all.slice(0, span.start) + newText + all.slice(span.end), before);
+    expect(text).toContain('  - preferred: Logdatei\n    deprecated: [Log-Datei]\n    language: de\n');
+    const after = engine.apply({ termbases: [{ uri: `${root}termbase.yaml`, text }] });
+    expect(after.termbases[0]!.problems).toEqual([]);
+    expect(after.agendaAt(root).open).toEqual([]);
+    expect(found(after, '0.md')).toEqual(['Log-Datei', 'Log-Datei']);
+  });
+
+  it('needs no language where the file states it, and is no longer asked for', () => {
+    expect(
+      ask('evenword: 1\nlanguage: de\nconcepts:\n  - preferred: Logdatei\n    deprecated: [Log-Datei]\n').ids,
+    ).toEqual([]);
+    const { engine, ids } = ask('evenword: 1\nlanguage: de\n');
+    const answer = answerQuestion(engine.snapshot, root, '', ids[0]!, { kind: 'prefer', preferred: 'Logdatei' });
+    expect(answer.kind === 'edit' && answer.edits.map(({ newText }) => newText).join('')).not.toContain('language');
   });
 });

@@ -51,6 +51,8 @@ describe('schema and reader agree', () => {
     ['concepts: [{ preferred: a, id: "0" }]', false],
     ['concepts: [{ preferred: a, id: größe.1 }]', true],
     ['concepts: [{ preferred: a, partOfSpeech: verb }]', true],
+    ['concepts: [{ preferred: a, language: pt-BR }]', true],
+    ['concepts: [{ preferred: a, language: Brazil! }]', false],
     ['concepts: [{ preferred: a, partOfSpeech: pronoun }]', false],
     ['concepts: [{ preferred: a, definition: [b] }]', false],
     ['concepts: [{ preferred: a, note: }]', false],
