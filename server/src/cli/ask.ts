@@ -8,6 +8,7 @@ import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
 import { renderQuestions } from './questionText.js';
+import { USAGE_OPTIONS } from './usageOptions.js';
 
 export const ask: Subcommand = {
   summary: 'lists the undecided mixes: terms that may name one thing',
@@ -19,6 +20,7 @@ export const ask: Subcommand = {
       help: `kinds of question, by commas: ${QUESTION_KINDS.join(', ')}; all but look-alike by default`,
     },
     most: { value: 'N', help: 'list no more than N questions (all by default)' },
+    ...USAGE_OPTIONS,
     ...FILE_OPTIONS,
   },
   async run(given, host) {

@@ -5,6 +5,7 @@ import { LineIndex } from '../text/lineIndex.js';
 import type { CliHost, LeftOutFile, Survey } from './host.js';
 import { UsageError } from './options.js';
 import type { Given, OptionRule } from './options.js';
+import { readUsageOptions } from './usageOptions.js';
 
 /** At most this many left-out files are named without being asked. */
 const NAMED_LEFT_OUT = 5;
@@ -45,7 +46,7 @@ export async function surveyOrStop(
       changeLogs: options.has('change-logs'),
     },
     history: mine && !options.has('no-history'),
-    mining: typeof zones === 'string' ? { closedZones: readZones(zones) } : {},
+    mining: { ...readUsageOptions({ options }), ...(typeof zones === 'string' && { closedZones: readZones(zones) }) },
   });
   sayLeftOut(host, survey.leftOut, options.has('explain-files'));
   let broken = false;

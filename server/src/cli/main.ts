@@ -1,6 +1,7 @@
 // The command line's front door: subcommands, help, and how a run ends.
 import { ask } from './ask.js';
 import { companions } from './companions.js';
+import { compare } from './compare.js';
 import type { CliHost } from './host.js';
 import { CannotSurvey, Exit } from './host.js';
 import { UsageError, readOptions } from './options.js';
@@ -9,7 +10,7 @@ import { report } from './report.js';
 import type { Subcommand } from './subcommand.js';
 import { verify } from './verify.js';
 
-const SUBCOMMANDS: Readonly<Record<string, Subcommand>> = { ask, companions, report, verify };
+const SUBCOMMANDS: Readonly<Record<string, Subcommand>> = { ask, companions, compare, report, verify };
 
 const COMMON: Readonly<Record<string, OptionRule>> = {
   quiet: { help: 'write no progress and no notes' },

@@ -37,6 +37,7 @@ export interface EngineChange {
   readonly mining?: MiningOptions;
 }
 
+export { CONTEXT_KINDS, SIMILARITIES, WEIGHTINGS } from '../mining/options.js';
 export { QUESTION_KINDS } from '../mining/question.js';
 export { SWITCHED_ZONES, closedZones } from '../prose/zones.js';
 
