@@ -94,6 +94,13 @@ describe('blocks', () => {
     ]);
   });
 
+  // Asciidoctor takes an indented paragraph for a literal only where no style stands above it.
+  it('that are indented below a style are what the style says', () => {
+    expect(outline('[WARNING]\n   Mind the\n   gap.\n\n[.lead]\n  code\n\n  code\n')).toEqual([
+      'paragraph[safetyMessage]: Mind the gap.',
+    ]);
+  });
+
   it('of warning are safety messages; notes are not', () => {
     const text =
       'WARNING: Hot.\n\nNOTE: Cold.\n\n[CAUTION]\n====\nWet.\n\n* Ice\n====\n\n[WARNING]\nDry.\n\n[TIP]\n--\nMild.\n--';

@@ -177,8 +177,8 @@ export class Stretch implements KnownInStretch {
     if (this.blockMacro(line)) return this.done(at + 1);
     const mark = listMark(text, line);
     if (mark) return this.listItem(at, line, mark);
-    // An indented paragraph is code, unless it is the first text of a described term.
-    if (isBlank(text.charCodeAt(line.start)) && style !== 'normal' && !this.awaitsText) {
+    // An indented paragraph is code, unless a style says what it is, or it is the first text of a described term.
+    if (isBlank(text.charCodeAt(line.start)) && style === '' && !this.awaitsText) {
       return this.done(this.paragraphEnd(at, this.item !== undefined), true);
     }
     return this.paragraph(at, line);
