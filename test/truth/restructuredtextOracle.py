@@ -90,7 +90,9 @@ class TitleOnly(Titled):
         return self.inline(self.arguments[0]) if self.arguments else []
 
 
-class TocTree(Nothing):
+class Captioned(Nothing):
+    """Of code and lists of pages, the caption is shown (Sphinx, "Directives", `caption`)."""
+
     def run(self):
         return self.inline(self.options["caption"]) if "caption" in self.options else []
 
@@ -127,7 +129,7 @@ register(
     " compound header footer hlist tabs tab-set", Content)
 register("admonition topic sidebar tab group-tab tab-item grid-item-card card dropdown details", Titled)
 register("versionadded versionchanged versionremoved deprecated", Version)
-register("toctree", TocTree)
+register("toctree code code-block sourcecode literalinclude graphviz", Captioned)
 register("contents rubric centered title", TitleOnly)
 register("glossary", Glossary)
 register(
@@ -136,8 +138,8 @@ register(
     " program automodule autoclass autofunction automethod autoattribute autodata autoexception py:class py:method"
     " py:function py:attribute py:module py:data py:exception", Described)
 register(
-    "code code-block sourcecode code-tab highlight literalinclude include raw math parsed-literal productionlist"
-    " testcode testoutput doctest prompt graphviz mermaid role default-role default-domain index tabularcolumns sectnum"
+    "code-tab highlight include raw math parsed-literal productionlist"
+    " testcode testoutput doctest prompt mermaid role default-role default-domain index tabularcolumns sectnum"
     " currentmodule codeauthor sectionauthor moduleauthor acks autosummary image meta", Nothing)
 
 

@@ -143,6 +143,7 @@ this.
      goes on
 
 .. code-block:: sh
+   :caption: Turn a key
 
    no prose
 
@@ -178,7 +179,7 @@ brass  iron
 /** What docutils 0.19 makes of it, recorded. */
 const PAGE_WORDS =
   'Gates A gate opens twice see the manual a page and other things It costs 2 3 or some name Term of art Explains itself one two three four A Person wrote this' +
-  ' Mind the gap Line one Line two goes on Left cell Right Both Key Lock brass iron steel Be loud Nobody else key brass key Opens gates A note';
+  ' Mind the gap Line one Line two goes on Turn a key Left cell Right Both Key Lock brass iron steel Be loud Nobody else key brass key Opens gates A note';
 
 it('reads a page as docutils was seen to read it', () => {
   const misplaced: string[] = [];
