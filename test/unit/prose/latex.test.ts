@@ -66,6 +66,22 @@ describe('LaTeX blocks', () => {
     ]);
   });
 
+  it('are frames with their titles', () => {
+    expect(
+      latex(
+        '\\begin{frame}<1->[plain]{The key}{More of it}\n\\frametitle{Use}\\begin{block}{How}Turn it.\\end{block}\\end{frame}',
+      ),
+    ).toEqual([
+      ...[
+        'heading3[heading]: The key',
+        'caption[heading]: More of it',
+        'heading3[heading]: Use',
+        'caption: How',
+        'paragraph: Turn it.',
+      ],
+    ]);
+  });
+
   it('are quotations and safety messages', () => {
     expect(
       latex(
@@ -104,6 +120,7 @@ describe('LaTeX text', () => {
       ),
     ).toEqual(['paragraph: Run @, @, @, @ with @ or @; @ see @, @, @, @. @ <code:o>']);
     expect(latex('\\MakeShortVerb{\\|}\nRun |a b| now.')).toEqual(['paragraph: Run @ now.']);
+    expect(latex('\\documentclass{ltxdoc}\\begin{document}Run |a| now.')).toEqual(['paragraph: Run @ now.']);
   });
 
   it('leaves out listings, displays, comments and what sets things', () => {
@@ -141,6 +158,15 @@ describe('commands of no table', () => {
       'paragraph: The @ server runs @; a main key; press <uiLabel:Save>.',
       ...['paragraph[safetyMessage]: Hot.', 'paragraph[quotation]: Said.'],
     ]);
+  });
+
+  it('leave no trace where their definition only sets something', () => {
+    expect(
+      latex(
+        '\\providecommand{\\tight}{%\n \\setlength{\\itemsep}{0pt}\\vskip 3pt plus 1fil}\\newcommand{\\app}{\\textsf{Evenword}}\n' +
+          '\\begin{itemize}\\tight\\item One \\app.\\end{itemize}\\tight Two',
+      ),
+    ).toEqual(['listItem: One @.', 'paragraph: Two']);
   });
 
   it('are opaque, but for arguments that are prose', () => {

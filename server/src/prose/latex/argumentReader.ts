@@ -133,7 +133,7 @@ export class ArgumentReader {
       if (flow === 'aside') page.out.suspend();
       else page.out.flush();
       frame.kind = kinds[Math.min(index, kinds.length - 1)]!;
-      frame.level = level;
+      frame.level = frame.kind === 'heading' ? level : 0;
       frame.glossary = glossary?.[Math.min(index, glossary.length - 1)];
       frame.blockZones = (frame.blockZones & (Zone.quotation | Zone.safetyMessage)) | zones;
       frame.inlineZones = 0;

@@ -89,7 +89,7 @@ const COMMANDS: readonly Line<Command>[] = [
   [command('opaque', '*oom'), 'includegraphics includesvg'],
   [command('opaque'), 'today thepage thesection thechapter thefigure thetable the number arabic roman'],
 
-  [command('inline', 'm'), 'label index sindex pagestyle thispagestyle phantom hphantom vphantom color'],
+  [command('inline', 'm'), 'noalign label index sindex pagestyle thispagestyle phantom hphantom vphantom color'],
   [command('inline', 'om'), 'usetikzlibrary usecolortheme usefonttheme hypersetup captionsetup cline'],
   [command('inline', 'dm'), 'includeonlyframes transduration'],
   [command('inline', 'pm'), 'cmidrule'],
@@ -117,7 +117,10 @@ const COMMANDS: readonly Line<Command>[] = [
     command('inline'),
     'raggedleft noindent indent sloppy fussy protect relax leavevmode ignorespaces unskip xspace null',
   ],
-  [command('inline'), 'hline toprule midrule bottomrule endhead endfirsthead endfoot endlastfoot nobreak allowbreak'],
+  [
+    command('inline'),
+    'tightlist hline toprule midrule bottomrule endhead endfirsthead endfoot endlastfoot nobreak allowbreak',
+  ],
   [
     command('inline'),
     'selectfont phantomsection frenchspacing nonfrenchspacing flushbottom raggedbottom onecolumn strut',

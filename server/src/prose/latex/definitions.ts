@@ -4,6 +4,7 @@ import { command, type Command, type Environment } from './command.js';
 import { COMMANDS_BY_NAME } from './commands.js';
 import { environmentOf, withArguments } from './environments.js';
 import type { Scanner } from './scanning.js';
+import { DIMENSION } from './unknown.js';
 
 /** What a document defines. */
 export interface Definitions {
@@ -21,8 +22,12 @@ const LISTING =
 const INLINE_LISTING = /\\newmintinline\s*(?:\[([^\]]{1,60})\]\s*)?\{([^{}]{1,60})\}/g;
 const VERBATIM_MARK =
   /\\(?:MakeShortVerb|lstMakeShortInline)\*?\s*(?:\[[^\]]{0,200}\])?\s*\{?\\?([^\sA-Za-z\\{}%])\}?/g;
+/** Classes of LaTeX's own documentation, which make `|` such a mark. */
+const MARKING_CLASS = /\\documentclass\s*(?:\[[^\]]{0,200}\])?\s*\{(?:ltxguide|ltxdoc|ltnews|l3doc)\}/;
 const COUNT = /\[(\d)\]\s*(\[)?/y;
 const XPARSE = /\{([^{}]{0,60})\}/y;
+const CALL = /\\([A-Za-z@]+)\*?(?:\s*(?:\[[^[\]]{0,200}\]|\{[^{}]{0,200}\}))*/g;
+const LENGTH = /-?[\d.]+\s*(?:pt|em|ex|cm|mm|in|bp|fil+)|\b(?:plus|minus)\b/g;
 const LONGEST_BODY = 4_000;
 const LISTING_ROLE = environmentOf('lstlisting');
 
@@ -31,7 +36,10 @@ export function definitionsIn(scanner: Scanner): Definitions {
   const commands = new Map<string, Command>();
   const environments = new Map<string, Environment>();
   const { text } = scanner;
-  const verbatimMarks = [...text.matchAll(VERBATIM_MARK)].map(([, mark]) => mark!).join('');
+  const verbatimMarks = [...text.matchAll(VERBATIM_MARK)]
+    .map(([, mark]) => mark!)
+    .join('')
+    .concat(MARKING_CLASS.test(text) ? '|' : '');
   if (!/\\(?:re)?new|\\provide|\\[A-Z][a-z]+[A-Z]|\\lstnew/.test(text))
     return { commands, environments, verbatimMarks };
   for (const match of text.matchAll(COMMAND)) {
@@ -86,10 +94,7 @@ function signature(scanner: Scanner, from: number, isXparse: boolean): Defined {
 
 /** A command by its body: an argument is read where the body shows it as text. */
 function roleOf(body: string, count: number, optional: boolean): Command {
-  if (count === 0)
-    return /^\s*(?:\\(?:[a-z]*(?:skip|space|page|par)|centering|hline)\b[^A-Za-z]*)*$/.test(body)
-      ? command('inline')
-      : command('opaque');
+  if (count === 0) return command(hasText(body) ? 'opaque' : 'inline');
   const uses = Array.from({ length: count }, (_, i) => useOf(body, i + 1));
   const letters = uses.map((use, i) => (i === 0 && optional ? 'o' : use === undefined ? 'm' : 't')).join('');
   if (!letters.includes('t')) return command('opaque', letters);
@@ -121,4 +126,14 @@ function useOf(body: string, argument: number): number | undefined {
 /** True where what follows is part of a control sequence that is put together from text. */
 function isInName(before: string): boolean {
   return before.lastIndexOf('\\csname') > before.lastIndexOf('\\endcsname');
+}
+
+/** True where a body puts text into the document rather than setting something. */
+function hasText(body: string): boolean {
+  const left = body.replace(CALL, (call, name: string) => {
+    const known = COMMANDS_BY_NAME.get(name);
+    if (known === undefined) return DIMENSION.test(name) ? ' ' : call;
+    return known.flow === 'opaque' || /[tkg]/.test(known.signature) ? call : ' ';
+  });
+  return /[\p{L}\\]/u.test(left.replace(LENGTH, ' '));
 }

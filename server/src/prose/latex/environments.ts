@@ -5,7 +5,7 @@ import { block, byName, command, environment, type Environment, type Line } from
 const GLOSSARY: Environment = { ...environment('terms', 'o'), isGlossary: true };
 const FRAME: Environment = {
   ...environment('blocks'),
-  opening: block('dottt', ['heading', 'caption'], Zone.heading, 3),
+  opening: block('dott', ['heading', 'caption'], Zone.heading, 3),
 };
 
 const ENVIRONMENTS: readonly Line<Environment>[] = [

@@ -6,7 +6,8 @@ import type { Scanner } from './scanning.js';
 const DEFINES =
   /^(?:(?:re)?newcommand|providecommand|DeclareRobustCommand|(?:re)?newenvironment|(?:New|Renew|Provide|Declare)(?:Document|Expandable\w*)(?:Command|Environment)|(?:lstnew|newtc|DefineVerbatim|RecustomVerbatim)\w+|newtcolorbox|newminted|newmintinline|(?:lst)?(?:Make|Delete)Short\w+)$/;
 const PLAIN_TEX_DEFINITION = /^(?:[gex]def|def)$/;
-const DIMENSION =
+/** Commands and registers of plain TeX that a length follows. */
+export const DIMENSION =
   /^(?:[hv]skip|[m]?kern|parindent|parskip|baselineskip|[hv]size|tabcolsep|itemsep|topsep|textwidth|advance)$/;
 const GLUE =
   /[ \t]*(?:\\[A-Za-z@]+[ \t]*)?=?[ \t]*(?:by[ \t]*)?-?(?:[\d.,]+[ \t]*(?:true[ \t]*)?(?:pt|em|ex|cm|mm|in|bp|pc|dd|cc|sp|mu|fil+|\\[A-Za-z@]+)?|\\[A-Za-z@]+)(?:[ \t]*(?:plus|minus)[ \t]*-?[\d.]*[ \t]*(?:pt|em|ex|cm|mm|in|fil+)?)*[ \t]?/y;
