@@ -208,6 +208,77 @@ describe('reread', () => {
     );
   });
 
+  it('equals reading the whole of lists and tables, whose items and rows are read by themselves', () => {
+    const items = [
+      ...[
+        '- a\n',
+        '  b\n',
+        '* c\n',
+        '1. d\n',
+        '2) e\n',
+        '\n',
+        '    f\n',
+        '- - -\n',
+        '---\n',
+        '===\n',
+        '   - g\n',
+        '  ```\n',
+      ],
+      ...['h\n', '> i\n', '-\n', '\t- j\n', '7. k\n', '  [l]: /m\n', '- [l]\n', '+ n\n  : o\n', '-  - p\n', '  - q\n'],
+    ];
+    const cells = [
+      ...[
+        '| a | b |\n|--|--|\n',
+        '| c | [l] |\n',
+        '| d\n',
+        'e\n',
+        '\n',
+        '|',
+        ': f\n',
+        '===\n',
+        '# g\n',
+        '- h\n',
+        '{i}\n',
+        '{',
+      ],
+      ...[
+        '`',
+        '\n| j | k |',
+        ' \\| ',
+        '> ',
+        '| `x` | **y** |\n',
+        '| ![z](w) | <b>v</b> |\n',
+        '<div>',
+        '[l]: /m\n',
+        '\r\n',
+        '[^1]:',
+      ],
+    ];
+    for (const parts of [items, cells]) {
+      const soup = fc.array(fc.constantFrom(...parts), { maxLength: 40 }).map((all) => all.join(''));
+      const format = fc.constantFrom<Format>('markdown', 'mdx');
+      fc.assert(fc.property(soup, editsOf(parts), format, expectIncrementalEqualsWhole), { numRuns: 400 });
+    }
+  });
+
+  it('reads a row of a long table, or an item of a long list, by itself', () => {
+    const rows = Array.from({ length: 400 }, (_, i) => `| key ${i} | opens ${i} |\n`).join('');
+    const list = Array.from({ length: 400 }, (_, i) => `- item ${i}\n`).join('');
+    const text = `| a | b |\n|---|---|\n${rows}\n${list}`;
+    const before = startReading(markdown(text));
+    const after = reread(
+      before,
+      markdown(text.replace('opens 200', 'opens no 200').replace('item 200', 'item no 200')),
+    );
+    const row = reread(before, markdown(text.replace('opens 200', 'opens no 200')));
+    const old = new Set(before.prose.blocks.map(({ content }) => content));
+    const fresh = (reading: typeof before): string[] =>
+      reading.prose.blocks.filter(({ content }) => !old.has(content)).map(({ content }) => content.text);
+    expect(fresh(row)).toEqual(['opens no 200']);
+    expect(after.prose.blocks).toHaveLength(before.prose.blocks.length);
+    expect('units' in row && (row.units as unknown[]).length).toBe(401);
+  });
+
   it('keeps the content objects of the body when the title changes', () => {
     const before = startReading(markdown(PAGE));
     const after = reread(before, markdown(PAGE.replace('buoy gateway', 'new gateway')));

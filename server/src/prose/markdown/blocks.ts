@@ -33,6 +33,7 @@ const LABELLED = /\*\*(note|tip|hint|info|important|warning|caution|danger|notic
 export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind = 'paragraph'): void {
   switch (ROLE_OF[cursor.type.id]) {
     case Role.container:
+    case Role.list:
     case Role.table:
       readChildren(cx, cursor, zones, kind);
       break;

@@ -26,7 +26,9 @@ export function definitionsIn(tree: Tree, text: string): { at: number; definitio
     enter(node) {
       const role = ROLE_OF[node.type.id]!;
       if (role !== Role.definition)
-        return (role >= Role.container && role <= Role.admonition) || role === Role.definitionBody;
+        return (
+          (role >= Role.container && role <= Role.admonition) || role === Role.definitionBody || role === Role.list
+        );
       let label = '';
       let target = '';
       for (let child = node.node.firstChild; child; child = child.nextSibling) {

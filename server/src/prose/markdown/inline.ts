@@ -19,8 +19,6 @@ export interface InlineContext {
   readonly text: string;
   /** Folded label → target. */
   readonly definitions: ReadonlyMap<string, string>;
-  /** Set where a link depends on the definitions. */
-  usesDefinitions: boolean;
   /** Blocks that lie in the block being read: images' alternative texts, attributes. */
   readonly inner: ProseBlock[];
   readonly problems: ReadingProblem[];
@@ -169,7 +167,6 @@ class InlineReader {
     }
     const parts = this.linkParts();
     const target = inline ? parts.target : this.cx.definitions.get(foldLabel(parts.label));
-    if (!inline) this.cx.usesDefinitions = true;
     if (target === undefined) {
       // Nothing defines the label, so the brackets are text.
       this.out.run(from, from + 1);
@@ -191,7 +188,6 @@ class InlineReader {
   private image(from: number, to: number): void {
     const parts = this.linkParts();
     const defined = this.cx.text.charCodeAt(to - 1) === 41 || this.cx.definitions.has(foldLabel(parts.label));
-    if (this.cx.text.charCodeAt(to - 1) !== 41) this.cx.usesDefinitions = true;
     if (!defined) {
       this.out.run(from, from + 2);
       this.at = from + 2;

@@ -6,6 +6,7 @@ import { changeBetween, keepContents, type Change, type Reading } from '../readi
 import { readFrontMatter, type FrontMatter } from './frontMatter.js';
 import { wrap, type Step } from './wrappers.js';
 import { withGlossary } from './glossary.js';
+import { rereadRows } from './rows.js';
 import { definitionTable, parseStretch, readUnits, shifted, type Stretch, type Unit } from './units.js';
 
 /** A Markdown document read. The fields beside the prose are the reader's own. */
@@ -83,6 +84,14 @@ function rereadBody(
   const shift = change.newEnd - change.oldEnd;
   const touched = lastWhere(old, (unit) => unit.lineStart <= change.start);
   const openEnded = old.findIndex((unit) => unit.openEnded);
+  const row =
+    openEnded < 0 && old[touched]
+      ? rereadRows(old[touched], source.format, previous.text, text, change, previous.definitions)
+      : undefined;
+  if (row) {
+    const units = old.map((unit, i) => (i < touched ? unit : i === touched ? row : shifted(unit, shift)));
+    return assemble(source, text, previous.frontMatter, units, previous.definitions, previous.prose.blocks);
+  }
   const first = Math.max(0, Math.min(touched - MARGIN, openEnded < 0 ? touched : openEnded));
   const from = first === 0 ? bodyStart : old[first]!.lineStart;
   const behind = lastWhere(old, (unit) => unit.lineStart <= change.oldEnd) + 1;

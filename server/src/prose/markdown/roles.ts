@@ -39,12 +39,13 @@ export const Role = {
   jsxTag: 29,
   expression: 30,
   brokenInline: 31,
+  list: 32,
 } as const;
 
 const NAMES: Record<string, number> = {
   Document: Role.container,
-  BulletList: Role.container,
-  OrderedList: Role.container,
+  BulletList: Role.list,
+  OrderedList: Role.list,
   Footnote: Role.container,
   ListItem: Role.listItem,
   Blockquote: Role.blockquote,

@@ -1,14 +1,15 @@
-// The outermost blocks of a Markdown document, each read by itself: what an edit leaves alone is kept.
-import type { Tree } from '@lezer/common';
+// The outermost blocks of a Markdown document, of lists the items, each read by itself: what an edit leaves alone is kept.
+import type { Tree, TreeCursor } from '@lezer/common';
 import type { ProseBlock, ReadingProblem } from '../prose.js';
 import { readBlock } from './blocks.js';
 import { definitionsIn, type Definition } from './definitions.js';
 import type { Format } from '../../text/sourceText.js';
 import { markdownParser, mdxParser } from './grammar.js';
+import { Role, ROLE_OF } from './roles.js';
 import { closeMarkers } from './templates.js';
 import type { Step } from './wrappers.js';
 
-/** An outermost block and the prose in it; blocks and problems count offsets from the document's start. */
+/** An outermost block, or an item of an outermost list, and the prose in it; blocks and problems count offsets from the document's start. */
 export interface Unit {
   /** Where the line begins on which the block begins. At this place the parser knows nothing of what came before. */
   readonly lineStart: number;
@@ -16,8 +17,8 @@ export interface Unit {
   readonly blocks: readonly ProseBlock[];
   readonly problems: readonly ReadingProblem[];
   readonly definitions: readonly Definition[];
-  /** True where the unit's prose depends on the document's link reference definitions. */
-  readonly usesDefinitions: boolean;
+  /** Of a table with rows, where the first line behind the head begins. */
+  readonly rowsStart: number | undefined;
   /** Tags that other units close or open; `at` counts this unit's blocks. */
   readonly steps: readonly Step[];
   /** True where text behind the unit, however far, could make something else of it. */
@@ -30,7 +31,7 @@ export interface Stretch {
   readonly mdx: boolean;
   readonly text: string;
   readonly tree: Tree;
-  /** The outermost blocks as offsets into `text`: the start of the first line, the end. */
+  /** The outermost blocks, of lists the items, as offsets into `text`: the start of the first line, the end. */
   readonly outline: readonly { readonly lineStart: number; readonly end: number }[];
   /** Of each outermost block. */
   readonly definitions: readonly (readonly Definition[])[];
@@ -43,32 +44,47 @@ export function parseStretch(whole: string, format: Format, from: number, to: nu
   const outline: { lineStart: number; end: number }[] = [];
   const definitions: Definition[][] = [];
   const found = definitionsIn(tree, text);
-  const cursor = tree.cursor();
   let next = 0;
-  if (cursor.firstChild()) {
-    do {
-      outline.push({ lineStart: text.lastIndexOf('\n', cursor.from - 1) + 1, end: cursor.to });
-      const own: Definition[] = [];
-      while (next < found.length && found[next]!.at < cursor.to) own.push(found[next++]!.definition);
-      definitions.push(own);
-    } while (cursor.nextSibling());
-  }
+  forEachOutermost(tree, ({ from: start, to: end }) => {
+    outline.push({ lineStart: text.lastIndexOf('\n', start - 1) + 1, end });
+    const own: Definition[] = [];
+    while (next < found.length && found[next]!.at < end) own.push(found[next++]!.definition);
+    definitions.push(own);
+    return true;
+  });
   return { from, mdx: format === 'mdx', text, tree, outline, definitions };
+}
+
+/**
+ * Visits the outermost blocks until `visit` returns false; of a list its items. Where an item begins, what follows does not
+ * depend on the items above it: read by itself, it opens a list of the same kind.
+ */
+function forEachOutermost(tree: Tree, visit: (cursor: TreeCursor) => boolean): void {
+  const cursor = tree.cursor();
+  if (!cursor.firstChild()) return;
+  do {
+    if (ROLE_OF[cursor.type.id] !== Role.list) {
+      if (!visit(cursor)) return;
+      continue;
+    }
+    cursor.firstChild();
+    do if (!visit(cursor)) return;
+    while (cursor.nextSibling());
+    cursor.parent();
+  } while (cursor.nextSibling());
 }
 
 /** Reads the first `count` outermost blocks of a stretch. */
 export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, string>, count: number): Unit[] {
   const { from, mdx, text, tree, outline } = stretch;
   const units: Unit[] = [];
-  const cursor = tree.cursor();
-  if (count === 0 || !cursor.firstChild()) return units;
-  do {
+  if (count === 0) return units;
+  forEachOutermost(tree, (cursor) => {
     const i = units.length;
     const cx = {
       text,
       mdx,
       definitions,
-      usesDefinitions: false,
       inner: [],
       blocks: [] as ProseBlock[],
       problems: [] as ReadingProblem[],
@@ -82,13 +98,20 @@ export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, str
       blocks: cx.blocks,
       problems: cx.problems,
       definitions: stretch.definitions[i]!,
-      usesDefinitions: cx.usesDefinitions,
       steps: cx.steps,
       openEnded: cx.openEnded,
+      rowsStart: ROLE_OF[cursor.type.id] === Role.table ? behindHead(text, outline[i]!) : undefined,
     };
     units.push(shifted(unit, from));
-  } while (units.length < count && cursor.nextSibling());
+    return units.length < count;
+  });
   return units;
+}
+
+/** Where a table's third line begins; undefined where it has two. */
+function behindHead(text: string, { lineStart, end }: { lineStart: number; end: number }): number | undefined {
+  const at = text.indexOf('\n', text.indexOf('\n', lineStart) + 1) + 1;
+  return at > 0 && at < end ? at : undefined;
 }
 
 /** The unit `by` units further on; the same contents. */
@@ -99,9 +122,9 @@ export function shifted(unit: Unit, by: number): Unit {
     end: unit.end + by,
     blocks: unit.blocks.map(({ start, content }) => ({ start: start + by, content })),
     definitions: unit.definitions,
-    usesDefinitions: unit.usesDefinitions,
     steps: unit.steps,
     openEnded: unit.openEnded,
+    rowsStart: unit.rowsStart === undefined ? undefined : unit.rowsStart + by,
     problems: unit.problems.map(({ span, message }) => ({
       span: { start: span.start + by, end: span.end + by },
       message,
