@@ -229,8 +229,8 @@ describe('a question', () => {
   it('says why in plain words', () => {
     const [question] = ask(...Object.values(documents));
     expect(question!.reasons.map(({ kind, text }) => `${kind}: ${text}`)).toEqual([
-      'compound: written as two words (“data set”) 3 times on 2 pages and as one word (“dataset”) 3 times on 2 pages',
       'same-slot: both stand where a noun stands (after “the”, “of” and the like): “data set” 3 times and “dataset” 3 times',
+      'compound: written as two words (“data set”) 3 times on 2 pages and as one word (“dataset”) 3 times on 2 pages',
       'mixed-page: 1 page mixes them',
     ]);
   });

@@ -118,7 +118,8 @@ function reasonsOf(corpus: Corpus, mix: Mix, sides: readonly SideTerm[], slot: S
   const ways = sides.map(
     ({ term, side }) => `${wayOf(side, term.text)} ${times(term.uses)} on ${pages(term.documents)}`,
   );
-  const reasons: Reason[] = [{ kind: kindOf(mix.lane), text: `written ${listed(ways)}`, value: mix.exchangeable }];
+  const reasons: Reason[] = [];
+  // Where the ways stand alike is the point of a question about joining; the totals count other positions too.
   if (slot !== undefined && mix.lane !== 'spelling') {
     const counts = sides.map(({ term, side }) => `“${term.text}” ${times(slotCount(side, slot))}`);
     reasons.push({
@@ -127,6 +128,7 @@ function reasonsOf(corpus: Corpus, mix: Mix, sides: readonly SideTerm[], slot: S
       value: Math.min(...sides.map(({ side }) => slotCount(side, slot))),
     });
   }
+  reasons.push({ kind: kindOf(mix.lane), text: `written ${listed(ways)}`, value: mix.exchangeable });
   const mixed = pagesWithAll(corpus, sides);
   if (mixed > 0)
     reasons.push({
