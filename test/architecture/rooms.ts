@@ -28,7 +28,7 @@ export const ROOMS: Readonly<Record<string, RoomRule>> = {
     packages: [/^@lezer\//, /^yaml$/, /^character-entities$/, /^htmlparser2$/, /^jsonc-parser$/],
   },
   tokens: { rooms: ['base', 'text', 'prose'], packages: [/^wink-/] },
-  lexicon: { rooms: ['base'], packages: [/^franc$/, /^stopwords-iso$/] },
+  lexicon: { rooms: ['base'], packages: [/^franc$/, /^stopword$/] },
   facts: { rooms: ['base', 'text', 'prose', 'tokens', 'lexicon'] },
   corpus: { rooms: ['base', 'text', 'prose', 'tokens', 'facts'] },
   mining: { rooms: ['base', 'prose', 'tokens', 'facts', 'corpus', 'lexicon'] },
