@@ -94,6 +94,14 @@ describe('blocks', () => {
     ]);
   });
 
+  it('of warning have titles that are safety messages, whatever stands first', () => {
+    const block = '====\nSwitch it off.\n====\n';
+    const shown = ['caption[safetyMessage]: High voltage', 'paragraph[safetyMessage]: Switch it off.'];
+    expect(outline(`[CAUTION]\n.High voltage\n${block}`)).toEqual(shown);
+    expect(outline(`.High voltage\n[#v]\n[CAUTION]\n${block}`)).toEqual(shown);
+    expect(outline(`.High voltage\n[NOTE]\n${block}`)[0]).toBe('caption: High voltage');
+  });
+
   // Asciidoctor takes an indented paragraph for a literal only where no style stands above it.
   it('that are indented below a style are what the style says', () => {
     expect(outline('[WARNING]\n   Mind the\n   gap.\n\n[.lead]\n  code\n\n  code\n')).toEqual([

@@ -139,10 +139,7 @@ export class Stretch implements KnownInStretch {
     if (line.start === line.end || isInclude(text, line)) return at + 1;
     const silent = this.reader.behindSilent(lines, at, to);
     if (silent > at) return silent;
-    if (isAttributeLine(text, line)) {
-      this.attributes = withAttributes(this.attributes, text.slice(line.start + 1, line.end - 1));
-      return at + 1;
-    }
+    if (isAttributeLine(text, line)) return this.attributeLines(at);
     if (isContinuation(text, line)) {
       this.attached = this.item !== undefined;
       this.awaitsText = false;
@@ -151,10 +148,26 @@ export class Stretch implements KnownInStretch {
     const opened = delimiter(text, line);
     if (opened) return this.delimited(at, opened.kind);
     if (isBlockTitle(text, line)) {
-      this.reader.add([{ start: line.start + 1, end: line.end }], this.role('caption'));
-      return at + 1;
+      // What the lines below say of the block holds for its title too.
+      const next = this.attributeLines(at + 1);
+      this.reader.add(
+        [{ start: line.start + 1, end: line.end }],
+        this.role('caption', styleZones(this.attributes.style) & Zone.safetyMessage),
+      );
+      return next;
     }
     return this.simple(at, line);
+  }
+
+  /** Takes in what the attribute lines from `at` on say; the line behind them. */
+  private attributeLines(at: number): number {
+    const { text, lines, to } = this;
+    let end = at;
+    for (; end < to && isAttributeLine(text, lines[end]!); end++) {
+      const { start, end: lineEnd } = lines[end]!;
+      this.attributes = withAttributes(this.attributes, text.slice(start + 1, lineEnd - 1));
+    }
+    return end;
   }
 
   private simple(at: number, line: Line): number {
