@@ -8,13 +8,11 @@ import { sourceOf, unlikeWhole, unsound, type Edit } from '../fuzz/sound.js';
 import { ALL_FORMATS, TEXTS } from '../fuzz/texts.js';
 import { ASCIIDOC_PAGE } from '../unit/prose/asciidocPage.js';
 
-const FORMATS = ALL_FORMATS.filter((format) => format !== 'apiDescription');
-
 function expectSound(text: string, format: Format): void {
   expect(unsound(text, read(sourceOf(text, format)))).toBeUndefined();
 }
 
-describe.each(FORMATS)('any text in %s', (format) => {
+describe.each(ALL_FORMATS)('any text in %s', (format) => {
   const soup = TEXTS[format];
 
   it('is read with every unit mapped to its source', () => {

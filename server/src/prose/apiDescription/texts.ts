@@ -102,7 +102,8 @@ export function textsOfYaml(text: string): FoundTexts {
   for (const token of new Parser().parse(text)) {
     if (token.type === 'document') read(token.value, undefined);
     if (token.type === 'error') {
-      problems.push({ span: { start: token.offset, end: token.offset + token.source.length }, message: token.message });
+      const end = Math.min(token.offset + token.source.length, text.length);
+      problems.push({ span: { start: Math.min(token.offset, end), end }, message: token.message });
     }
   }
   return { texts, problems };
@@ -122,7 +123,8 @@ function addScalar(
   problems: ReadingProblem[],
 ): void {
   const { value } = CST.resolveAsScalar(token, true, (offset, _code, message) => {
-    problems.push({ span: { start: offset, end: offset + 1 }, message });
+    const start = Math.min(offset, text.length);
+    problems.push({ span: { start, end: Math.min(start + 1, text.length) }, message });
   });
   let embedded: Embedded;
   if (token.type === 'block-scalar') {
