@@ -30,7 +30,12 @@ function renderOne(question: Question, number: number, examples: readonly Exampl
       text.slice(highlight.end);
     return `      ${host.faint(`${host.pathOf(uri)}:${line}`)}\n        ${marked}`;
   });
-  return `\n${String(number).padStart(3)}. ${titleOf(question)} ${host.faint(`(${question.kind}, ${Math.round(question.confidence * 100)} % sure)`)}\n${[...terms, ...reasons, ...sentences].join('\n')}\n`;
+  return `\n${String(number).padStart(3)}. ${titleOf(question)} ${host.faint(`(${question.kind}${inLanguage(question)}, ${Math.round(question.confidence * 100)} % sure)`)}\n${[...terms, ...reasons, ...sentences].join('\n')}\n`;
+}
+
+/** The language, where it is not English. */
+function inLanguage({ language }: Question): string {
+  return language === undefined || language === 'en' ? '' : ` in ${language}`;
 }
 
 /** The question itself, in one sentence. */
