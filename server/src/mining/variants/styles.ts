@@ -23,7 +23,7 @@ export interface Style {
   readonly forms: readonly Form[];
   /** Uses that count as evidence, in document order, each with its slot. */
   readonly uses: readonly SlottedUse[];
-  /** Uses by slot; those that may be a name of the page's code are as right as they are, and count as standing alone. */
+  /** Uses by slot. Where most may be a name of the page's code, these are as right as they are, and count as standing alone. */
   readonly slots: Readonly<Record<Slot, number>>;
   /** Uses inside sentences of running text; the counts below are among them. */
   readonly inside: number;
@@ -74,23 +74,32 @@ function beginAlike(forms: readonly Form[]): boolean {
   return new Set(forms.map((form) => form.text.slice(0, 3))).size === 1;
 }
 
+/** From this share of uses on pages whose code has it, a form is mostly a name of code. */
+const MOSTLY_NAME = 0.5;
+
 function makeStyle(corpus: Corpus, readers: Readers, text: string, forms: readonly Form[]): Style {
   const slots: Record<Slot, number> = { attributive: 0, predicate: 0, noun: 0, verb: 0, unclear: 0, lone: 0 };
   const uses: SlottedUse[] = [];
   const cases: Cases = { inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0, afterName: 0 };
-  for (const form of forms) {
-    for (const row of form.rows) {
-      const length = form.folds.length;
-      if (readers.mentions.isMention(row, length)) continue;
-      const found = isName(corpus, row, form) ? 'lone' : readers.slots.slotOf(row, length);
-      const slot = found === 'attributive' && form.plural ? beforeNoun(form) : found;
-      slots[slot]++;
-      uses.push({ row, length, slot });
-      countCase(corpus, row, length, cases);
-    }
+  const found = forms.flatMap((form) => usesOf(corpus, readers, form));
+  const named = found.filter(({ isNamed }) => isNamed).length;
+  const isMostlyName = named > 0 && named >= MOSTLY_NAME * found.length;
+  for (const { form, row, isNamed } of found) {
+    const length = form.folds.length;
+    const read = isMostlyName && isNamed ? 'lone' : readers.slots.slotOf(row, length);
+    const slot = read === 'attributive' && form.plural ? beforeNoun(form) : read;
+    slots[slot]++;
+    uses.push({ row, length, slot });
+    countCase(corpus, row, length, cases);
   }
   uses.sort((a, b) => a.row - b.row);
   return { shape: forms[0]!.shape, text, forms, uses, slots, ...cases };
+}
+
+function usesOf(corpus: Corpus, readers: Readers, form: Form): { form: Form; row: number; isNamed: boolean }[] {
+  return form.rows
+    .filter((row) => !readers.mentions.isMention(row, form.folds.length))
+    .map((row) => ({ form, row, isNamed: isName(corpus, row, form) }));
 }
 
 /** A plural is no modifier: "two elements follow" leaves it open, "it bulk-loads data" is a verb, "the webservers group" a name. */
