@@ -55,6 +55,18 @@ describe('evenword verify', () => {
     expect(quiet.err).toMatch(/^termbase\.yaml:\d+:\d+: error: /);
   });
 
+  it('says what it could not read or understand of a page, with its place', async () => {
+    const folder = await folderOf({
+      'openapi.json': '{ "openapi": "3.1.0",\n  "info": { "title" "Buoys" } }',
+      'page.md': 'A buoy.\n\n<!-- evenword: hush -->\n',
+      'termbase.yaml': TERMBASE,
+    });
+    const { code, err } = await evenword(['verify', '.'], folder.path);
+    expect(code).toBe(0);
+    expect(err).toMatch(/^openapi\.json:2:\d+: note: /m);
+    expect(err).toMatch(/^page\.md:3:1: note: “evenword: hush” is not understood/m);
+  });
+
   it('holds single pages and parts of a tree to the termbases above them', async () => {
     const page = PAGES['connecting.md']!;
     const folder = await folderOf({

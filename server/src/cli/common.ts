@@ -1,5 +1,6 @@
 // What the subcommands share: their folders, the survey, and what is said about files left out and broken termbases.
 import { SWITCHED_ZONES, closedZones } from '../engine/engine.js';
+import type { Snapshot } from '../engine/snapshot.js';
 import type { ZoneSet } from '../prose/zones.js';
 import { LineIndex } from '../text/lineIndex.js';
 import type { CliHost, LeftOutFile, Survey } from './host.js';
@@ -59,7 +60,29 @@ export async function surveyOrStop(
       if (severity === 'error') broken = true;
     }
   }
+  if (mine) sayProblems(host, survey.snapshot, wordless(survey.snapshot));
   return broken ? undefined : survey;
+}
+
+/** Says what could not be read of some documents. */
+export function sayProblems(host: CliHost, snapshot: Snapshot, uris: Iterable<string>): void {
+  for (const uri of uris) {
+    const problems = snapshot.problemsIn(uri);
+    if (problems.length === 0) continue;
+    const lines = new LineIndex(snapshot.documents.get(uri)!.source.text);
+    for (const { span, message } of problems) {
+      const { line, character } = lines.positionAt(span.start);
+      host.note(`${host.pathOf(uri)}:${line + 1}:${character + 1}: note: ${message}\n`);
+    }
+  }
+}
+
+/** The documents of which not one word was read: there may be a reason that a writer should know. */
+function* wordless({ documents, relations }: Snapshot): Generator<string> {
+  for (const uri of documents.keys()) {
+    const isRead = relations.languages.some(({ corpus }) => (corpus.find(uri)?.facts.word.length ?? 0) > 0);
+    if (!isRead) yield uri;
+  }
 }
 
 /** @throws UsageError where a zone is not known or is neither on nor off. */

@@ -3,7 +3,7 @@ import type { Finding } from '../findings/finding.js';
 import { LineIndex } from '../text/lineIndex.js';
 import type { Position } from '../text/lineIndex.js';
 import { toSarif } from '../report/sarif.js';
-import { FILE_OPTIONS, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, sayProblems, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 
@@ -49,6 +49,7 @@ export const verify: Subcommand = {
         });
       }
     }
+    sayProblems(host, snapshot, snapshot.documents.keys());
     const pages = new Set(found.map(({ uri }) => uri)).size;
     if (options.get('format') === 'sarif') {
       host.write(toSarif(found, survey.rootUri));
