@@ -5,6 +5,8 @@ import type { Corpus } from '../../server/src/corpus/corpus.js';
 import { Engine } from '../../server/src/engine/engine.js';
 import { Profiles, factsOf } from '../../server/src/engine/factsOf.js';
 import type { DocumentFacts } from '../../server/src/facts/documentFacts.js';
+import { DEFAULT_MINING } from '../../server/src/mining/options.js';
+import type { MiningOptions } from '../../server/src/mining/options.js';
 import type { Question } from '../../server/src/mining/question.js';
 import { findFiles, readDocument } from '../../server/src/node/files.js';
 import type { SourceText } from '../../server/src/text/sourceText.js';
@@ -41,10 +43,12 @@ export function ask(
   sources: readonly SourceText[],
   profiles = new Profiles(),
   facts: readonly (readonly DocumentFacts[])[] = [],
+  mining: MiningOptions = DEFAULT_MINING,
 ): Asked {
   const start = process.cpuUsage();
   const engine = new Engine(profiles);
   engine.apply({
+    mining,
     documents: sources.map((source, index) => ({
       uri: source.uri,
       source,

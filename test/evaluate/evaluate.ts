@@ -20,6 +20,7 @@ const USAGE = `npm run evaluate -- [SET…] [options]
   --json FILE      where the figures go (default: evaluate.json)
   --pseudo SET     the set for pseudo-synonyms (default: redis; "none" leaves them out)
   --no-glossary    leave RFC 4949 out
+  --no-history     leave past edits out, where a set has a history
 `;
 
 void main().catch((error: unknown) => {
@@ -39,6 +40,7 @@ async function main(): Promise<void> {
       json: { type: 'string', default: 'evaluate.json' },
       pseudo: { type: 'string', default: 'redis' },
       glossary: { type: 'boolean', default: true },
+      history: { type: 'boolean', default: true },
       part: { type: 'string' },
       help: { type: 'boolean', default: false },
     },
@@ -48,10 +50,11 @@ async function main(): Promise<void> {
   if (sets === undefined)
     return void process.stdout.write(`Nothing to evaluate: there is no gold-dev.json in ${DATA}\n`);
   if (values.part !== undefined) return runPart(values.part, sets);
+  const setPart = values.history ? 'set' : 'bare set';
   const before = values.against === undefined ? undefined : readEvaluation(values.against);
   const chosen = positionals.length === 0 ? sets : positionals.map((name) => findSet(sets, name));
   if (values.pseudo !== 'none') findSet(sets, values.pseudo);
-  const results = chosen.map(({ name }) => inOwnProcess(`set:${name}`) as SetResult | SkippedSet);
+  const results = chosen.map(({ name }) => inOwnProcess(`${setPart}:${name}`) as SetResult | SkippedSet);
   const glossary = values.glossary ? (inOwnProcess('glossary:') as GlossaryResult | null) : null;
   const evaluation: Evaluation = {
     sets: results.filter((result): result is SetResult => 'questions' in result),
@@ -87,7 +90,7 @@ function readEvaluation(file: string): Evaluation {
 
 /** Runs one part of the evaluation in a child process of the same program and reads its result. */
 function inOwnProcess(part: string): unknown {
-  process.stderr.write(`${part.replace(/^set:|:$/, '')} …\n`);
+  process.stderr.write(`${part.replace(/^(bare )?set:|:$/, '')} …\n`);
   const { status, stdout } = spawnSync(process.execPath, [...process.execArgv, process.argv[1]!, '--part', part], {
     stdio: ['ignore', 'pipe', 'inherit'],
     encoding: 'utf8',
@@ -104,6 +107,6 @@ async function runPart(part: string, sets: readonly GoldSet[]): Promise<void> {
       ? evaluateGlossary()
       : kind === 'pseudo'
         ? recoverPseudoSynonyms((await sourcesUnder(findSet(sets, name).folder)).sources)
-        : await evaluateSet(findSet(sets, name));
+        : await evaluateSet(findSet(sets, name), kind === 'set');
   process.stdout.write(JSON.stringify(result ?? null));
 }

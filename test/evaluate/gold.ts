@@ -41,6 +41,8 @@ export interface GoldSet {
   /** Absolute path of the documents. */
   readonly folder: string;
   readonly format: string;
+  /** The commit that the documents are of. */
+  readonly commit: string;
   readonly positives: readonly GoldPair[];
   readonly negatives: readonly GoldNegative[];
 }
@@ -56,6 +58,7 @@ interface WrittenPair extends Partial<Record<Flag, boolean>> {
 interface WrittenSet {
   readonly folder: string;
   readonly format: string;
+  readonly commit: string;
   readonly positives: readonly WrittenPair[];
   readonly negatives: readonly GoldNegative[];
 }
@@ -64,10 +67,11 @@ interface WrittenSet {
 export function readGold(file = join(DATA, 'gold-dev.json')): readonly GoldSet[] | undefined {
   if (!existsSync(file)) return undefined;
   const written = JSON.parse(readFileSync(file, 'utf8')) as readonly WrittenSet[];
-  return written.map(({ folder, format, positives, negatives }) => ({
+  return written.map(({ folder, format, commit, positives, negatives }) => ({
     name: basename(folder),
     folder: join(DATA, folder),
     format,
+    commit,
     positives: positives.map(readPair),
     negatives,
   }));

@@ -35,6 +35,8 @@ const BESIDE = 8;
 const GENERAL = 0.8;
 /** Uses below which chance plays along, and what that costs. */
 const FEW = { uses: 4, cost: 0.5 };
+/** From this strength up past edits are a habit that went one way. */
+const HABIT = 0.5;
 /** More places than this are those of a template, and say no more. */
 const MOST_PLACES = 3;
 
@@ -76,7 +78,7 @@ export function bestScoreOf(
  */
 export function isGrounded(known: Pick<Known, 'evidence' | 'shape' | 'general' | 'likeness' | 'self'>): boolean {
   const { evidence, shape, general, likeness, self } = known;
-  if (isRenamed(known)) return true;
+  if (isRenamed(known) || strongest(evidence, ['past-edit']) >= HABIT) return true;
   // A choice between two words of general English is one of style.
   if (general === 2) return false;
   if (evidence.some(({ kind, strength }) => kind === 'definition' && strength >= (shape === 'multiword' ? 0.9 : 1)))
@@ -114,8 +116,8 @@ function statementWeight({ evidence, sharesWord }: Pick<Known, 'evidence' | 'sha
     // Terms that share a word are siblings in a template (login form, password reset form).
     else if (kind === 'near-sentence' && (agrees || !sharesWord)) weight += (agrees ? 0.6 : 0.4) * Math.log1p(places);
     else if (kind === 'containment') weight += 2 * strength;
-    // Editors also correct one thing to another: raw, one pair in four is right.
-    else if (kind === 'past-edit' && (agrees || value > 1)) weight += 0.4 * Math.log1p(value);
+    // Editors also correct one thing to another: of single edits one pair in five is right, of habits nearly all.
+    else if (kind === 'past-edit') weight += strength >= HABIT ? 2.6 * strength : agrees ? 0.3 : 0;
   }
   return weight;
 }
