@@ -6,6 +6,8 @@ import { below } from './compare.js';
 import type { CliHost } from './host.js';
 import { count, exampleLines } from './words.js';
 
+/** The folder says which name is used from this share of the choice on. */
+const MOSTLY_FOLDERS = 0.5;
 /** Folders that are listed. */
 const LISTED_FOLDERS = 8;
 
@@ -54,6 +56,10 @@ function folders({ terms, figures: { choice } }: TermComparison, root: string): 
   const more = choice.folders.length - shown.length;
   if (more > 0) lines.push(`    and ${count(more, 'more folder')}\n`);
   lines.push(`    Both stand on ${count(choice.documentsWithBoth, 'page')}.\n`);
+  if (choice.entropy > 0 && choice.byFolder >= MOSTLY_FOLDERS * choice.entropy) {
+    const share = Math.round((100 * choice.byFolder) / choice.entropy);
+    lines.push(`    The folder settles ${share} % of the choice: two teams may name one thing, or write about two.\n`);
+  }
   return lines;
 }
 

@@ -13,8 +13,6 @@ const NEAREST = 3;
 /** Shares of the yardstick: as alike as one term's own halves; and too unlike for two names of one thing. */
 const ALIKE = 0.7;
 const UNLIKE = 0.4;
-/** The folder says which name is used from this share of the choice on. */
-const MOSTLY_FOLDERS = 0.5;
 
 /**
  * Sorts what is known into points for and against; the weightier first.
@@ -33,7 +31,7 @@ export function pointsOf(
 /** Reasons of questions that speak against, which are found here anyway. */
 const NOT_FOR = new Set(['side-by-side']);
 
-function pointsFor({ terms, usage, companions, lexicalLink, pastEdits, choice, together }: Comparison): Reason[] {
+function pointsFor({ terms, usage, companions, lexicalLink, pastEdits, together }: Comparison): Reason[] {
   const [a, b] = terms.map(({ text }) => text) as [string, string];
   const points: Reason[] = [...usage.evidence];
   const has = (kind: string): boolean => points.some((point) => point.kind === kind);
@@ -57,7 +55,7 @@ function pointsFor({ terms, usage, companions, lexicalLink, pastEdits, choice, t
     points.push({ kind: 'link-target', text, value: together.targets.length });
   }
   if (companions.shared.length > 0) {
-    const named = phrases(companions.shared, ({ counts }) => `${counts[0]} and ${counts[1]} times`);
+    const named = phrases(companions.shared, ({ counts }) => timesBoth(counts));
     points.push({ kind: 'shared-companions', text: `both go with ${named}`, value: companions.shared.length });
   }
   if (usage.frames.shared.length > 0) {
@@ -77,12 +75,6 @@ function pointsFor({ terms, usage, companions, lexicalLink, pastEdits, choice, t
       kind: 'likeness',
       text: 'few other terms here are used in sentences so alike',
       value: Math.max(usage.rankOfA, usage.rankOfB),
-    });
-  if (choice.entropy > 0 && choice.byFolder >= MOSTLY_FOLDERS * choice.entropy)
-    points.push({
-      kind: 'folders',
-      text: `which of the two is used is mostly a matter of the folder (${Math.round((100 * choice.byFolder) / choice.entropy)} % of the choice), as where two teams name one thing`,
-      value: choice.byFolder / choice.entropy,
     });
   return points;
 }
@@ -127,6 +119,11 @@ function pointsAgainst({ terms, usage, companions, pastEdits }: Comparison, apar
       `they are used only ${Math.round(share * 100)} % as alike as two halves of one term's own uses`,
     );
   return points;
+}
+
+/** “40 and 18 times”, “once and 7 times”. */
+function timesBoth([a, b]: readonly [number, number]): string {
+  return Math.min(a, b) > 2 ? `${a} and ${b} times` : `${times(a)} and ${times(b)}`;
 }
 
 /** The first companions with the place of the term, “rotate ___”, and how many more there are; each phrase once. */

@@ -90,7 +90,6 @@ describe('for one concept', () => {
       { folder: `${ROOT}app/`, uses: [0, 13] },
       { folder: `${ROOT}web/`, uses: [13, 0] },
     ]);
-    expect(kinds(found.speaksFor)).toContain('folders');
   });
 
   it('ends with the question that is asked, or that the termbase has decided', () => {
