@@ -4,6 +4,7 @@ import { isGlossaryTitle, sendsOn } from '../glossary.js';
 import type { BlockContent, ProseBlock } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import { Zone } from '../zones.js';
+import type { Checkpoint } from './checkpoints.js';
 import { closedFrame, ground, openFrame, State, type Frame } from './frames.js';
 import { HTML } from './htmlElements.js';
 import { CLOSED, CONTAINER, Flow, HEADWORD, HIDDEN, OPAQUE_INLINE, PARAGRAPH, TERM } from './roles.js';
@@ -52,8 +53,23 @@ export class Elements {
     private readonly reader: TextReader,
     /** True where text outside all elements is prose. */
     private readonly takesText: boolean,
+    /** Where reading begins again, if not at the document's start. */
+    from?: Checkpoint,
   ) {
-    this.frames = [ground(CONTAINER, takesText)];
+    this.frames = from ? [...from.frames] : [ground(CONTAINER, takesText)];
+    if (!from) return;
+    this.language = from.language;
+    this.glossaryLevel = from.glossaryLevel;
+    this.shown = from.shown;
+    this.paragraphs = from.paragraphs;
+  }
+
+  /** The state here, at a start tag at `at`; undefined where what follows depends on more than that. */
+  checkpoint(at: number): Checkpoint | undefined {
+    if (this.pending || this.link || this.suspended.length > 0 || this.top.state !== State.read) return undefined;
+    if (this.frames.some(({ refers, role }) => refers || role.parts === true)) return undefined;
+    const { language, glossaryLevel, shown, paragraphs } = this;
+    return { at, frames: [...this.frames], language, glossaryLevel, shown, paragraphs, blocks: this.blocks.length };
   }
 
   get top(): Frame {
@@ -69,8 +85,8 @@ export class Elements {
 
   /** Opens an element whose start tag ends before `tagEnd`. */
   open(tag: StartTag, ofName: ElementRole, vocabulary: Vocabulary, tagEnd: number): void {
-    const parent = this.top;
     const role = this.roleHere(tag, ofName, vocabulary);
+    const parent = this.top;
     const { flow } = role;
     const { name, start } = tag;
     if (parent.state === State.none) {
@@ -160,7 +176,7 @@ export class Elements {
     // A paragraph of a glossary that begins with the term that it defines.
     const isEntry = role === TERM && tag.name === 'dfn' && parent.role === PARAGRAPH && !this.pending;
     if (!isEntry || (!parent.isGlossary && this.glossaryLevel === 0)) return role;
-    parent.glossary = 'definition';
+    this.frames[this.frames.length - 1] = { ...parent, glossary: 'definition' };
     return HEADWORD;
   }
 

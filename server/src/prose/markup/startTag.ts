@@ -44,6 +44,12 @@ export class StartTag {
     this.values[this.values.length - 1] = to;
   }
 
+  /** The tag as it is now, to be kept. */
+  copy(): { readonly name: string; attribute(name: string): string | undefined } {
+    const values = new Map(this.names.map((name) => [name, this.attribute(name)]));
+    return { name: this.name, attribute: (name) => values.get(name) };
+  }
+
   /** The attribute's value as written, or undefined. */
   attribute(name: string): string | undefined {
     const i = this.names.indexOf(name);

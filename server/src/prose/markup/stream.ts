@@ -1,12 +1,13 @@
 // Follows the tokenizer through one document: which element each tag opens or closes, and in which vocabulary.
 import { Tokenizer } from 'htmlparser2';
 import type { ProseBlock, ReadingProblem } from '../prose.js';
+import { isSameState, lastUpTo, LEAST_DISTANCE, type Checkpoint } from './checkpoints.js';
 import { Elements } from './elements.js';
 import { isVoid, keptAtEnd, keptAtStart } from './frames.js';
 import { HTML } from './htmlElements.js';
 import { OTHER } from './otherElements.js';
 import type { Prolog } from './prolog.js';
-import { recognise } from './recognise.js';
+import { recognise, type Root } from './recognise.js';
 import { HIDDEN, type ElementRole, type Vocabulary } from './roles.js';
 import { TextReader } from './runningText.js';
 import { roleOf, StartTag } from './startTag.js';
@@ -14,13 +15,33 @@ import { roleOf, StartTag } from './startTag.js';
 /** Elements nested deeper than this are not read: each level costs time at every end tag. */
 const DEEPEST = 256;
 
+/** A reading made before, of whose text what follows `from` here is what follows `from - delta` there. */
+export interface Before {
+  readonly checkpoints: readonly Checkpoint[];
+  readonly from: number;
+  readonly delta: number;
+}
+
+/** Where a reading met one made before: the same state in both. */
+export interface Meeting {
+  readonly here: Checkpoint;
+  /** Index of the checkpoint there. */
+  readonly there: number;
+}
+
 /** What the tokenizer calls; its offsets count from `base`. */
 export class MarkupStream {
   readonly problems: ReadingProblem[] = [];
+  readonly checkpoints: Checkpoint[] = [];
+  /** Where this reading met the one before and ended. */
+  meeting: Meeting | undefined;
+  /** The root element, once it is known. */
+  root: Root | undefined;
   private readonly tag: StartTag;
   private readonly elements: Elements;
+  private readonly tokenizer: Tokenizer;
   /** Undefined until the root element is known. */
-  private vocabulary: Vocabulary | undefined;
+  vocabulary: Vocabulary | undefined;
   private rootPrefix = '';
   private ended = false;
   private base = 0;
@@ -34,11 +55,19 @@ export class MarkupStream {
     private readonly uri: string,
     private readonly prolog: Prolog,
     private readonly xml: boolean,
+    /** Where reading begins, if not at the document's start: the state there, and the root element. */
+    start?: { readonly checkpoint: Checkpoint; readonly root: Root | undefined; readonly vocabulary: Vocabulary },
+    private readonly before?: Before,
   ) {
+    this.tokenizer = new Tokenizer({ xmlMode: xml, decodeEntities: false }, this);
     this.tag = new StartTag(text, xml);
     const reader = new TextReader(text, { xml, defined: prolog.entities, characters: prolog.characters });
-    this.elements = new Elements(text, reader, !xml);
-    if (!xml) this.vocabulary = HTML;
+    this.elements = new Elements(text, reader, !xml, start?.checkpoint);
+    if (start) {
+      this.vocabulary = start.vocabulary;
+      this.root = start.root;
+      this.rootPrefix = prefixOf(start.root?.name ?? '');
+    } else if (!xml) this.vocabulary = HTML;
   }
 
   /** The document's own language. */
@@ -48,14 +77,22 @@ export class MarkupStream {
 
   read(from: number): void {
     this.base = from;
-    const tokenizer = new Tokenizer({ xmlMode: this.xml, decodeEntities: false }, this);
-    tokenizer.write(this.text.slice(from));
-    tokenizer.end();
+    this.tokenizer.write(this.text.slice(from));
+    if (!this.meeting) this.tokenizer.end();
+  }
+
+  /** The blocks read, whether or not the document is documentation. */
+  allBlocks(): ProseBlock[] {
+    return this.elements.finish();
+  }
+
+  /** How many elements are paragraphs. */
+  get paragraphs(): number {
+    return this.elements.paragraphs;
   }
 
   blocks(): ProseBlock[] {
-    const blocks = this.elements.finish();
-    return this.vocabulary === OTHER && this.elements.paragraphs === 0 ? [] : blocks;
+    return isProse(this.vocabulary, this.paragraphs) ? this.allBlocks() : [];
   }
 
   ontext(start: number, end: number): void {
@@ -125,7 +162,9 @@ export class MarkupStream {
   private opened(tagEnd: number, isEmpty: boolean): void {
     const { tag, elements } = this;
     if (this.ended) return;
-    if (this.vocabulary === undefined && !this.start()) return;
+    if (this.vocabulary === undefined) {
+      if (!this.start()) return;
+    } else if (this.meets()) return;
     const vocabulary = this.vocabulary!;
     if (this.beyond > 0 || elements.frames.length > DEEPEST) {
       if (!isEmpty && this.beyond++ === 0) this.reportTooDeep();
@@ -143,6 +182,27 @@ export class MarkupStream {
       this.foreign = elements.frames.length - 1;
   }
 
+  /** Keeps a checkpoint at the tag, if it is one; true where the reading before can go on for this one. */
+  private meets(): boolean {
+    const { elements, tag, before, checkpoints } = this;
+    if (this.beyond > 0 || this.foreign > 0 || (this.xml && elements.frames.length === 1)) return false;
+    const isDue = tag.start - (checkpoints.at(-1)?.at ?? -LEAST_DISTANCE) >= LEAST_DISTANCE;
+    const candidate = before && tag.start >= before.from ? lastUpTo(before.checkpoints, tag.start - before.delta) : -1;
+    const there = candidate < 0 ? undefined : before!.checkpoints[candidate]!;
+    const isKnown = there !== undefined && there.at === tag.start - before!.delta;
+    if (!isDue && !isKnown) return false;
+    const here = elements.checkpoint(tag.start);
+    if (!here) return false;
+    if (isKnown && isSameState(here, there)) {
+      this.meeting = { here, there: candidate };
+      this.ended = true;
+      this.tokenizer.pause();
+      return true;
+    }
+    if (isDue) checkpoints.push(here);
+    return false;
+  }
+
   private closeTo(kept: number, tagEnd: number): void {
     this.elements.closeTo(kept, tagEnd);
     if (this.foreign >= kept) this.foreign = 0;
@@ -154,7 +214,8 @@ export class MarkupStream {
     const vocabulary = recognise(tag, this.prolog.doctype, this.uri, this.text);
     this.vocabulary = vocabulary;
     this.ended = vocabulary === undefined;
-    this.rootPrefix = tag.name.slice(0, tag.name.indexOf(':') + 1);
+    this.root = tag.copy();
+    this.rootPrefix = prefixOf(tag.name);
     this.elements.language = tag.language();
     return !this.ended;
   }
@@ -174,6 +235,15 @@ export class MarkupStream {
     const span = { start: this.tag.start, end: this.tag.start + this.tag.name.length + 1 };
     this.problems.push({ span, message: `Text nested more than ${DEEPEST} levels deep is not read.` });
   }
+}
+
+/** True where a document holds prose of its own: in a vocabulary that is not known, only by its paragraphs. */
+export function isProse(vocabulary: Vocabulary | undefined, paragraphs: number): boolean {
+  return vocabulary !== OTHER || paragraphs > 0;
+}
+
+function prefixOf(name: string): string {
+  return name.slice(0, name.indexOf(':') + 1);
 }
 
 /** The language that a page's head states for want of an attribute (HTML Standard, "Pragma directives"). */
