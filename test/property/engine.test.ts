@@ -7,7 +7,9 @@ import { finish } from '../../server/src/base/work.js';
 import { Engine } from '../../server/src/engine/engine.js';
 import { Profiles } from '../../server/src/engine/factsOf.js';
 import type { Snapshot } from '../../server/src/engine/snapshot.js';
+import { withPathLanguage } from '../../server/src/text/language.js';
 import type { SourceText } from '../../server/src/text/sourceText.js';
+import { BILINGUAL_PAGES } from '../support/bilingualPages.js';
 
 const profiles = new Profiles();
 const folder = join(import.meta.dirname, '../../samples/buoys');
@@ -25,7 +27,7 @@ const TERMBASES = [
   'evenword: 1\nconcepts: [broken\n',
 ];
 
-const sourceOf = (uri: string, text: string): SourceText => ({ uri, format: 'markdown', text });
+const sourceOf = (uri: string, text: string): SourceText => withPathLanguage({ uri, format: 'markdown', text }, root);
 
 /** Everything that a user can see of a snapshot. */
 function seen(snapshot: Snapshot): unknown {
@@ -34,10 +36,20 @@ function seen(snapshot: Snapshot): unknown {
   return JSON.parse(JSON.stringify({ open, findings, size: snapshot.relations.size })) as unknown;
 }
 
-const uri = fc.integer({ min: 0, max: 5 }).map((n) => `${root}page${n}.md`);
+// Every third page is in a folder of translations, whatever language it comes to be in.
+const uri = fc.integer({ min: 0, max: 5 }).map((n) => `${root}${n % 3 === 0 ? 'fr/' : ''}page${n}.md`);
+const french = Object.entries(BILINGUAL_PAGES).flatMap(([name, page]) =>
+  name.includes('fr') ? page.split(/\n{2,}/) : [],
+);
 const text = fc
-  .array(fc.nat({ max: paragraphs.length - 1 }), { maxLength: 40 })
-  .map((picks) => picks.map((at) => paragraphs[at]!).join('\n\n'));
+  .array(
+    fc.oneof(
+      { weight: 4, arbitrary: fc.nat({ max: paragraphs.length - 1 }).map((at) => paragraphs[at]!) },
+      { weight: 1, arbitrary: fc.constantFrom(...french) },
+    ),
+    { maxLength: 40 },
+  )
+  .map((picks) => picks.join('\n\n'));
 const step = fc.oneof(
   { weight: 4, arbitrary: fc.record({ kind: fc.constant('write' as const), uri, text, open: fc.boolean() }) },
   { weight: 1, arbitrary: fc.record({ kind: fc.constant('delete' as const), uri }) },

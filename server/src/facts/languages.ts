@@ -43,11 +43,10 @@ function blockLanguage(content: BlockContent, document: string): string {
 
 function documentLanguage(contents: readonly BlockContent[], pathLanguage: string | undefined): string {
   const open = contents.filter(({ zones, language }) => isOpen(zones) && language === undefined);
-  const joined = joinedText(open);
-  const told = mostlyTold(open) ?? languageOfText(joined);
+  const told = mostlyTold(open) ?? languageOfText(joinedText(open));
   // A relative that the detector does not know (Indonesian, Galician) is taken for one that it knows, but never for English.
   if (told !== undefined && (told === 'en' || pathLanguage === undefined || canBeTold(pathLanguage))) return told;
-  return pathLanguage !== undefined && mayBeIn(pathLanguage, joined) ? pathLanguage : DEFAULT_LANGUAGE;
+  return pathLanguage !== undefined && mayBeIn(pathLanguage, joinedText(open)) ? pathLanguage : DEFAULT_LANGUAGE;
 }
 
 /** The language of most of the text in sampled blocks that are told. */
