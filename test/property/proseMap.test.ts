@@ -77,6 +77,9 @@ const PARTS = [
     '\ud800',
   ],
   ...[
+    '```{note} a *b*\n:c: d\n',
+    '{{< warning >}}\n',
+    '{: .danger}\n',
     '# Glossary\n\n',
     '**term** 🙂**: said ',
     '- **one** – `two` &amp; ',

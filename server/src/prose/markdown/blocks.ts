@@ -5,10 +5,13 @@ import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import { Zone, type ZoneSet } from '../zones.js';
 import { DEEPEST } from './containers.js';
+import { directiveAt } from './directives.js';
 import { readHtmlBlock } from './htmlBlocks.js';
 import { readInline, type InlineContext } from './inline.js';
+import { labelZones } from './labels.js';
 import { readMdxFlow, stretches } from './mdxBlocks.js';
 import { LEVEL_OF, Role, ROLE_OF } from './roles.js';
+import { templateStep } from './templateTags.js';
 import type { Step } from './wrappers.js';
 
 /** What reading blocks leaves behind. */
@@ -17,6 +20,8 @@ export interface BlockContext extends InlineContext {
   readonly problems: ReadingProblem[];
   /** True where the document is MDX. */
   readonly mdx: boolean;
+  /** Reads `[from, to)` of the text as Markdown of its own; undefined where that is nested too deep already. */
+  readonly readNested: ((from: number, to: number, zones: ZoneSet, kind: BlockKind) => void) | undefined;
   /** Tags that other blocks close or open. */
   readonly steps: Step[];
   /** Set where text behind the block, however far, could make something else of it. */
@@ -74,6 +79,12 @@ export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, 
       cx.openEnded = true;
       cx.problems.push({ span: { start: cursor.from, end: cursor.to }, message: BROKEN });
       break;
+    case Role.fence:
+      readDirective(cx, cursor.from, cursor.to, zones, kind);
+      break;
+    case Role.templateTag:
+      readTemplateTag(cx, cx.text.slice(cursor.from, cursor.to));
+      break;
     case Role.unended:
       cx.openEnded = true;
       break;
@@ -82,6 +93,20 @@ export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, 
       break;
     default:
   }
+}
+
+/** A fenced block is code, unless it is a directive that holds Markdown. */
+function readDirective(cx: BlockContext, from: number, to: number, zones: ZoneSet, kind: BlockKind): void {
+  const directive = cx.readNested && directiveAt(cx.text, from, to);
+  if (!directive) return;
+  const inner = zones | directive.zones;
+  cx.readNested(directive.titleFrom, directive.titleTo, inner, 'caption');
+  cx.readNested(directive.bodyFrom, directive.bodyTo, inner, kind);
+}
+
+function readTemplateTag(cx: BlockContext, marker: string): void {
+  const step = templateStep(marker);
+  if (step) cx.steps.push({ ...step, at: cx.blocks.length });
 }
 
 /** One problem for all lines of an outermost block that are too deep. */
@@ -111,7 +136,13 @@ function readBlockquote(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, ki
       const alert = matchAt(ALERT, cx.text, from);
       const label = alert ?? matchAt(LABELLED, cx.text, from);
       if (label) inner = zones | (SAFETY.test(label[1]!) ? Zone.safetyMessage : 0);
-      if (alert) from += alert[0].length;
+      if (alert) {
+        from += alert[0].length;
+        // Behind the mark stands a title, where the generator has such.
+        const lineEnd = Math.min(cursor.to, endOfLine(cx.text, from));
+        if (cx.text.slice(from, lineEnd).trim() !== '') readLeaf(cx, cursor, inner, 'caption', from, lineEnd);
+        from = lineEnd;
+      }
     }
     first = false;
     if (role === Role.paragraph) readLeaf(cx, cursor, inner, kind, from);
@@ -130,14 +161,27 @@ function matchAt(pattern: RegExp, text: string, at: number): RegExpExecArray | n
   return pattern.exec(text);
 }
 
-function readLeaf(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, kind: BlockKind, from: number): void {
-  const whole = { from, to: cursor.to, role: { kind, level: LEVEL_OF[cursor.type.id]!, zones } };
+function endOfLine(text: string, from: number): number {
+  const end = text.indexOf('\n', from);
+  return end < 0 ? text.length : end;
+}
+
+function readLeaf(
+  cx: BlockContext,
+  cursor: TreeCursor,
+  outer: ZoneSet,
+  kind: BlockKind,
+  from: number,
+  to = cursor.to,
+): void {
+  const isText = kind === 'paragraph' || kind === 'listItem' || kind === 'definition';
+  const zones = isText ? outer | labelZones(cx.text, from, to) : outer;
+  const whole = { from, to, role: { kind, level: LEVEL_OF[cursor.type.id]!, zones } };
   const parts = cx.mdx ? stretches(cx.text, cursor, whole) : [whole];
-  for (const { from: partFrom, to, role } of parts) {
-    const start = parts.length === 1 ? cursor.from : partFrom;
+  for (const { from: start, to: end, role } of parts) {
     const builder = new ContentBuilder(cx.text, start);
-    readInline(cx, cursor, builder, partFrom, to);
-    const content = builder.finish(role, to);
+    readInline(cx, cursor, builder, start, end);
+    const content = builder.finish(role, end);
     if (content) cx.blocks.push({ start, content: markQuotations(content) });
     for (const block of cx.inner) {
       const inherited = block.content.zones | (zones & (Zone.quotation | Zone.safetyMessage));

@@ -1,7 +1,7 @@
 // Glossaries in Markdown: what is a headword and what is said of it, in a section or page whose title says that it is one.
 import { isGlossaryTitle, sendsOn } from '../glossary.js';
 import type { BlockContent, GlossaryPart, ProseBlock } from '../prose.js';
-import { cellOf } from './glossaryTable.js';
+import { CellPlaces } from './glossaryTable.js';
 import { leadOf, splitAt, type Lead } from './lead.js';
 
 /** Titles under which headings stand for entries too; the other titles head other things as often. */
@@ -95,10 +95,11 @@ const OTHER_COLUMNS: readonly (readonly [RegExp, GlossaryPart])[] = [
 ];
 
 function readTables(blocks: readonly ProseBlock[], source: string, parts: (GlossaryPart | undefined)[]): void {
+  const places = new CellPlaces(source);
   let columns: (GlossaryPart | undefined)[] = [];
   let row = -1;
   blocks.forEach((block, i) => {
-    const cell = block.content.kind === 'tableCell' ? cellOf(block.start, source) : undefined;
+    const cell = block.content.kind === 'tableCell' ? places.of(block.start) : undefined;
     if (cell === undefined) {
       columns = [];
       return;
@@ -113,7 +114,7 @@ function readTables(blocks: readonly ProseBlock[], source: string, parts: (Gloss
       return;
     }
     const next = blocks[i + 1];
-    const following = next?.content.kind === 'tableCell' ? cellOf(next.start, source) : undefined;
+    const following = next?.content.kind === 'tableCell' ? places.of(next.start) : undefined;
     const says = following?.lineStart === cell.lineStart && columns[following.column] !== undefined;
     row = columns[0] === 'headword' && says ? cell.lineStart : -1;
     if (row >= 0) parts[i] = 'headword';

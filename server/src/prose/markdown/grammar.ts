@@ -15,6 +15,7 @@ import { definitionLists } from './definitionLists.js';
 import { mdx } from './mdx.js';
 import { parsePlainRun } from './plainRun.js';
 import { templateBlocks } from './templateBlocks.js';
+import { templateTags } from './templateTags.js';
 import { templates } from './templates.js';
 
 /**
@@ -66,7 +67,9 @@ function parseLongHtml(cx: BlockContext, line: Line): boolean {
 
 /** The configured parsers. They are stateless: parsing one text never affects another. */
 export const markdownParser = inStretches(
-  commonMark.configure([...[GFM, templates, templateBlocks, brackets, guards, containers, definitionLists]]),
+  commonMark.configure([
+    ...[GFM, templates, templateBlocks, templateTags, brackets, guards, containers, definitionLists],
+  ]),
 );
 export const mdxParser = inStretches(markdownParser.configure(mdx));
 

@@ -178,7 +178,7 @@ export const mdx: MarkdownConfig = {
       parse: parseFlow,
       endLeaf: (cx, line) => opensFlow(cx, line),
       leaf: () => INDENTED_END,
-      before: 'TemplateBlock',
+      before: 'TemplateTag',
     },
     { name: 'FencedCode', parse: parseFence },
   ],

@@ -40,6 +40,8 @@ export const Role = {
   expression: 30,
   brokenInline: 31,
   list: 32,
+  fence: 33,
+  templateTag: 34,
 } as const;
 
 const NAMES: Record<string, number> = {
@@ -62,6 +64,8 @@ const NAMES: Record<string, number> = {
   TableCell: Role.tableCell,
   LinkReference: Role.definition,
   TooDeep: Role.tooDeep,
+  FencedCode: Role.fence,
+  TemplateTag: Role.templateTag,
   HTMLBlock: Role.htmlBlock,
   LongHtml: Role.htmlBlock,
   DefinedTerms: Role.container,

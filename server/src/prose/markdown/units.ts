@@ -1,13 +1,17 @@
 // The outermost blocks of a Markdown document, of lists the items, each read by itself: what an edit leaves alone is kept.
 import type { Tree, TreeCursor } from '@lezer/common';
-import type { ProseBlock, ReadingProblem } from '../prose.js';
-import { readBlock } from './blocks.js';
+import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
+import type { ZoneSet } from '../zones.js';
+import { readBlock, type BlockContext } from './blocks.js';
 import { definitionsIn, type Definition } from './definitions.js';
 import type { Format } from '../../text/sourceText.js';
 import { markdownParser, mdxParser } from './grammar.js';
 import { Role, ROLE_OF } from './roles.js';
 import { closeMarkers } from './templates.js';
 import type { Step } from './wrappers.js';
+
+/** Directives nested deeper are not read: each is parsed anew. */
+const DEEPEST_DIRECTIVE = 4;
 
 /** An outermost block, or an item of an outermost list, and the prose in it; blocks and problems count offsets from the document's start. */
 export interface Unit {
@@ -76,36 +80,54 @@ function forEachOutermost(tree: Tree, visit: (cursor: TreeCursor) => boolean): v
 
 /** Reads the first `count` outermost blocks of a stretch. */
 export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, string>, count: number): Unit[] {
-  const { from, mdx, text, tree, outline } = stretch;
+  const { from, text, tree, outline } = stretch;
   const units: Unit[] = [];
   if (count === 0) return units;
   forEachOutermost(tree, (cursor) => {
     const i = units.length;
-    const cx = {
-      text,
-      mdx,
-      definitions,
-      inner: [],
-      blocks: [] as ProseBlock[],
-      problems: [] as ReadingProblem[],
-      steps: [] as Step[],
-      openEnded: false,
-    };
-    readBlock(cx, cursor, 0);
+    const { blocks, problems, steps, openEnded } = readOne(stretch, definitions, cursor, 0, 'paragraph', 0);
     const unit: Unit = {
       lineStart: outline[i]!.lineStart,
       end: outline[i]!.end,
-      blocks: cx.blocks,
-      problems: cx.problems,
+      blocks,
+      problems,
       definitions: stretch.definitions[i]!,
-      steps: cx.steps,
-      openEnded: cx.openEnded,
+      steps,
+      openEnded,
       rowsStart: ROLE_OF[cursor.type.id] === Role.table ? behindHead(text, outline[i]!) : undefined,
     };
     units.push(shifted(unit, from));
     return units.length < count;
   });
   return units;
+}
+
+/** Reads the outermost block at the cursor, which lies in `depth` directives. */
+function readOne(
+  { text, mdx }: Stretch,
+  definitions: ReadonlyMap<string, string>,
+  cursor: TreeCursor,
+  zones: ZoneSet,
+  kind: BlockKind,
+  depth: number,
+): BlockContext {
+  const readNested = (from: number, to: number, inner: ZoneSet, innerKind: BlockKind): void => {
+    const stretch = parseStretch(text, mdx ? 'mdx' : 'markdown', from, to);
+    forEachOutermost(stretch.tree, (at) => {
+      const nested = readOne(stretch, definitions, at, inner, innerKind, depth + 1);
+      for (const step of nested.steps) cx.steps.push({ ...step, at: step.at + cx.blocks.length });
+      for (const { start, content } of nested.blocks) cx.blocks.push({ start: start + from, content });
+      for (const { span, message } of nested.problems)
+        cx.problems.push({ span: { start: span.start + from, end: span.end + from }, message });
+      return true;
+    });
+  };
+  const cx: BlockContext = {
+    ...{ text, mdx, definitions, inner: [], blocks: [], problems: [], steps: [], openEnded: false },
+    readNested: depth < DEEPEST_DIRECTIVE ? readNested : undefined,
+  };
+  readBlock(cx, cursor, zones, kind);
+  return cx;
 }
 
 /** Where a table's third line begins; undefined where it has two. */
