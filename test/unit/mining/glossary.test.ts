@@ -60,6 +60,7 @@ describe('an entry', () => {
       reason: { kind: 'glossary', text: 'it has an entry in the glossary on glossary.rst', value: 1 },
     });
     expect(answersOf(open[0]!, decisions, precedents)[0]).toMatchObject({ kind: 'prefer', preferred: 'datalogger' });
+    expect(open[0]!.reasons.at(-1)!.text).toBe('“datalogger” has an entry in the glossary on glossary.rst');
   });
 
   const lines = {

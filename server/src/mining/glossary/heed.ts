@@ -49,9 +49,15 @@ function withGlossary(corpus: Corpus, glossary: Glossary, question: Question): Q
   if (explained.length !== 1) return question;
   const [{ text }] = explained as [QuestionTerm];
   const page = pageOf(corpus, glossary.entryOf(text)!.document);
+  const says = (name: string): Reason => ({
+    kind: 'glossary',
+    text: `${name} has an entry in the glossary on ${page}`,
+    value: 1,
+  });
   return {
     ...question,
-    preferred: { text, reason: { kind: 'glossary', text: `it has an entry in the glossary on ${page}`, value: 1 } },
+    reasons: [...question.reasons, says(`“${text}”`)],
+    preferred: { text, reason: says('it') },
   };
 }
 
