@@ -52,6 +52,8 @@ export function nodeHost(version: string): CliHost {
   };
 }
 
+const STAGES = { history: 'Reading what writers replaced …', mining: 'Comparing terms …' };
+
 async function surveyForCli(
   paths: readonly string[],
   request: SurveyRequest,
@@ -63,8 +65,7 @@ async function surveyForCli(
     const { engine, rootUri, leftOut } = await surveyFolders(paths, new Profiles(), {
       ...wanted,
       ...(history && { history: { version, cacheFolder: userCacheFolder() } }),
-      progress: (stage, done, all) =>
-        progress(stage === 'reading' ? `Reading ${done} of ${all} pages` : 'Comparing terms …'),
+      progress: (stage, done, all) => progress(stage === 'reading' ? `Reading ${done} of ${all} pages` : STAGES[stage]),
     });
     progress('');
     return { snapshot: engine.snapshot, rootUri, leftOut };

@@ -18,7 +18,7 @@ import { CannotRead, findFiles, readDocument, readText, termbasesAbove, uriOfPat
 import type { LeftOut } from './files.js';
 
 /** How far a survey has come. */
-export type SurveyProgress = (stage: 'reading' | 'mining', done: number, all: number) => void;
+export type SurveyProgress = (stage: 'reading' | 'history' | 'mining', done: number, all: number) => void;
 
 /** Folders read into an engine. */
 export interface SurveyedFolders {
@@ -72,9 +72,11 @@ export async function surveyFolders(
       })
     : [];
   await pool.end();
+  if (past !== undefined) progress?.('history', 0, 1);
+  const pastEdits = await past;
   const engine = new Engine(profiles);
   engine.apply({
-    mining: { ...mining, pastEdits: await past },
+    mining: { ...mining, pastEdits },
     documents: sources.map((source, index) => {
       const known = facts[index];
       return { uri: source.uri, source, ...(known && { facts: known }) };

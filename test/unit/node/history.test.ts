@@ -16,6 +16,7 @@ import { afterEach, describe, expect, it } from 'vitest';
 import { Git } from '../../../server/src/node/history/git.js';
 import { readRawChanges } from '../../../server/src/node/history/commits.js';
 import { DEFAULT_BOUNDS, readHistory } from '../../../server/src/node/history/history.js';
+import { nodeServerHost } from '../../../server/src/node/serverHost.js';
 import type { HistoryOptions, ReadHistory } from '../../../server/src/node/history/history.js';
 
 const made: string[] = [];
@@ -251,6 +252,13 @@ describe.skipIf(!hasGit || process.platform === 'win32')('a hostile repository',
     expect(Git.find(temporary(), path([folder]))).toBeDefined();
     expect(Git.find(folder, {})).toBeUndefined();
     expect(existsSync(join(folder, 'ran'))).toBe(false);
+  });
+});
+
+describe('a folder of another scheme than file', () => {
+  it('has no history', async () => {
+    const { signal } = new AbortController();
+    expect(await nodeServerHost('1').readHistory('vscode-vfs://github/a/b', undefined, signal)).toBeUndefined();
   });
 });
 

@@ -26,8 +26,8 @@ export interface HistoryBounds {
 export const DEFAULT_BOUNDS: HistoryBounds = {
   commits: 2000,
   bytes: 256 * 1024 * 1024,
-  largest: 512 * 1024,
-  time: 60_000,
+  largest: 256 * 1024,
+  time: 30_000,
 };
 
 /** What a reading needs besides the folder. */
