@@ -18,6 +18,8 @@ const LONGEST_DEFINITION = 300;
 /** The definition of a headword. */
 export interface GlossaryDefinition {
   readonly headword: string;
+  /** The name that was looked up, where its entry only sends the reader to the headword. */
+  readonly sentFrom?: string;
   /** Its first sentences, as a reader sees them, on one line. */
   readonly text: string;
   readonly uri: string;
@@ -63,14 +65,15 @@ export function definedAt(snapshot: Snapshot, uri: string, offset: number): Defi
 export function definitionOf(snapshot: Snapshot, name: string, language: string): GlossaryDefinition | undefined {
   const relations = relationsOf(snapshot, language);
   const glossary = relations && headwordsOf(snapshot, language)?.glossary;
-  const placed = glossary?.entryOf(name);
+  const target = glossary?.entryOf(name) === undefined ? glossary?.sentOn.get(name) : undefined;
+  const placed = glossary?.entryOf(target ?? name);
   const definition = placed?.entry.definition;
   if (relations === undefined || glossary === undefined || placed === undefined || definition === undefined)
     return undefined;
   const { uri, facts } = relations.corpus.documents[placed.document]!;
   const reading = snapshot.readingOf(uri);
   const range = placed.entry.headwords.find(
-    (each) => glossary.keyOf(glossary.textOf(placed.document, each)) === glossary.keyOf(name),
+    (each) => glossary.keyOf(glossary.textOf(placed.document, each)) === glossary.keyOf(placed.name),
   )!;
   const begins = facts.start[definition.firstToken]!;
   const block = reading?.prose.blocks.find(
@@ -81,6 +84,7 @@ export function definitionOf(snapshot: Snapshot, name: string, language: string)
   if (reading === undefined || block === undefined) return undefined;
   return {
     headword: glossary.textOf(placed.document, range),
+    ...(target !== undefined && { sentFrom: name }),
     text: beginning(block, reading.source.text),
     uri,
     line: new LineIndex(reading.source.text).positionAt(facts.start[range.firstToken]!).line + 1,
@@ -116,7 +120,7 @@ function headwordsOf(snapshot: Snapshot, language: string): Headwords | undefine
   let headwords = compiled.get(relations);
   if (headwords === undefined) {
     const glossary = new Glossary(relations.corpus);
-    const texts = glossary.explainedNames;
+    const texts = [...glossary.explainedNames, ...glossary.sentOn.keys()];
     const forms = texts.map((text) => ({ text, ...(language !== 'en' && { partOfSpeech: 'other' as const }) }));
     compiled.set(relations, (headwords = { glossary, texts, matcher: new TermMatcher(forms) }));
   }

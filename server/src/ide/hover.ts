@@ -31,7 +31,12 @@ export function hoverAt(snapshot: Snapshot, uri: string, offset: number): HoverC
 /** The hover of a term that nothing is decided or asked about: its definition in the documents' own glossary. */
 function glossaryCard(snapshot: Snapshot, { name, language, span }: DefinedAtPlace): HoverCard | undefined {
   const definition = definitionOf(snapshot, name, language);
-  return definition && { span, markdown: `**${escape(definition.headword)}**\n\n${definitionText(definition)}` };
+  return definition && { span, markdown: `${heading(definition)}\n\n${definitionText(definition)}` };
+}
+
+function heading({ headword, sentFrom }: GlossaryDefinition): string {
+  const name = `**${escape(headword)}**`;
+  return sentFrom === undefined ? name : `**${escape(sentFrom)}**: the glossary sends you to ${name}.`;
 }
 
 function definitionText({ text, uri, line }: GlossaryDefinition): string {

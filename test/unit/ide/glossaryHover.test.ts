@@ -24,6 +24,9 @@ const PAGES: Readonly<Record<string, string>> = {
 
    Mast
       See beam.
+
+   Watch
+      See relay station.
 `,
   'fr/debut.md':
     'La bouée flotte dans le port, et elle est reliée à la station par une ligne qui est sur le fond de la mer. La Buoy est un mot dans une autre langue.\n',
@@ -77,8 +80,13 @@ describe('the hover of a headword', () => {
   it('is silent in code, where nothing is explained, and in another language', () => {
     expect(hover('start.md', 'buoy`')).toBeUndefined();
     expect(hover('start.md', 'mast')).toBeUndefined();
-    expect(hover('start.md', 'watch')).toBeUndefined();
     expect(hover('fr/debut.md', 'Buoy')).toBeUndefined();
+  });
+
+  it('follows an entry that only sends the reader to another', () => {
+    expect(hover('start.md', 'watch')).toMatch(
+      /^\*\*Watch\*\*: the glossary sends you to \*\*Relay station\*\*\.\n\nA very long/,
+    );
   });
 
   it('is silent once the entry is gone', () => {

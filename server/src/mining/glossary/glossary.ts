@@ -66,6 +66,11 @@ export class Glossary {
     return this.explained.get(this.keyOf(name));
   }
 
+  /** The names, as written, of entries that only send the reader to another name, with that name. */
+  get sentOn(): ReadonlyMap<string, string> {
+    return new Map(this.links.flatMap(({ kind, from, to }) => (kind === 'see' ? [[from, to]] : [])));
+  }
+
   /** True where each of two names has an entry that explains it, and no entry says that they are one concept. */
   areTwo(a: string, b: string): boolean {
     const [one, other] = [this.keyOf(a), this.keyOf(b)];
