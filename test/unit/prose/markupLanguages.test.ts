@@ -17,6 +17,7 @@ describe('the language of a page', () => {
     // The HTML Standard: a list of languages states none.
     expect(stated('<head><meta http-equiv="content-language" content="nl, de"></head><p>A')).toBeUndefined();
     expect(stated('<html lang="no language"><p>A')).toBeUndefined();
+    expect(stated('<html lang=""><p>A')).toBeUndefined();
     expect(prose('<topic xml:lang="en_us"><title>A</title><body><p>B</p></body></topic>', 'xml').language).toBe(
       'en-us',
     );

@@ -1,4 +1,5 @@
 // Languages by the names that babel and polyglossia give them, and what a document says of its own.
+import { primaryLanguage } from '../../text/language.js';
 
 const TAGS: Readonly<Record<string, string>> = {
   ...{ english: 'en', american: 'en-US', usenglish: 'en-US', british: 'en-GB', ukenglish: 'en-GB', canadian: 'en-CA' },
@@ -40,7 +41,7 @@ export function namedLanguage(name: string): string | undefined {
 
 /** True where two tags name one language, whatever the region. */
 export function isSameLanguage(a: string, b: string): boolean {
-  return a.split('-', 1)[0] === b.split('-', 1)[0];
+  return primaryLanguage(a) === primaryLanguage(b);
 }
 
 const COMMENT = /(?<!\\)%.*/g;

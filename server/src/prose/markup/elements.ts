@@ -1,4 +1,5 @@
 // From a stream of tags and text to blocks of prose: which elements are open, and which block their text belongs to.
+import { primaryLanguage } from '../../text/language.js';
 import { ContentBuilder, type BlockRole } from '../content.js';
 import { isGlossaryTitle, sendsOn } from '../glossary.js';
 import type { BlockContent, ProseBlock } from '../prose.js';
@@ -187,7 +188,7 @@ export class Elements {
 
   private isForeign(language: string): boolean {
     const own = this.top.language ?? this.language ?? 'en';
-    return own.split('-', 1)[0]!.toLowerCase() !== language.split('-', 1)[0]!.toLowerCase();
+    return primaryLanguage(own) !== primaryLanguage(language);
   }
 
   /** A language as a block has it: only where it is not the document's. */

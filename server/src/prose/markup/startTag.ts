@@ -5,11 +5,12 @@ import { CLOSED, CONTAINER, Flow, INLINE, OPAQUE_INLINE, type ElementRole, type 
 
 const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/;
 /** The tag of a language that is not known (BCP 47); so HTML and XML mean an empty one. */
-const UNDETERMINED = 'und';
+export const UNDETERMINED = 'und';
 /** Words in the names of custom elements that hold code; those of the second kind are displayed. */
 const CODE_ELEMENT = /(?:^|-)(?:code|pre|codeblock|snippet|highlight|terminal|console|playground|syntax)(?:-|$)/;
 const CODE_DISPLAY =
   /block|snippet|example|sample|listing|editor|terminal|console|playground|highlight|tab|group|pre\b/;
+const GLOSSARY = /(?:^|\s)glossary(?:\s|$)/i;
 const SAFETY = /^(?:danger|warning|caution|notice)$/i;
 
 /** A start tag while it is read; used again for the next. */
@@ -93,9 +94,10 @@ export class StartTag {
 
   /** True where attributes say that the element is a glossary (DPUB-ARIA 1.1, `doc-glossary`; else common practice). */
   isGlossary(): boolean {
-    if (this.names.length === 0) return false;
-    if (this.attribute('role') === 'doc-glossary') return true;
-    return /(?:^|\s)glossary(?:\s|$)/i.test(`${this.attribute('class') ?? ''} ${this.attribute('id') ?? ''}`);
+    return this.names.some((name) => {
+      if (name === 'role') return this.attribute('role') === 'doc-glossary';
+      return (name === 'class' || name === 'id') && GLOSSARY.test(this.attribute(name)!);
+    });
   }
 
   /** True where the element's text may come from elsewhere (DITA 1.3, content references and keys). */

@@ -10,7 +10,7 @@ import type { Prolog } from './prolog.js';
 import { recognise, type Root } from './recognise.js';
 import { HIDDEN, type ElementRole, type Vocabulary } from './roles.js';
 import { TextReader } from './runningText.js';
-import { roleOf, StartTag } from './startTag.js';
+import { roleOf, StartTag, UNDETERMINED } from './startTag.js';
 
 /** Elements nested deeper than this are not read: each level costs time at every end tag. */
 const DEEPEST = 256;
@@ -172,7 +172,7 @@ export class MarkupStream {
     }
     if (!this.xml) {
       if (this.foreign === 0) this.closeTo(keptAtStart(elements.frames, tag.name), tag.start);
-      if (tag.name === 'html' || tag.name === 'body') elements.language ??= tag.language();
+      if (tag.name === 'html' || tag.name === 'body') elements.language ??= ownLanguage(tag);
     }
     if (vocabulary === HTML && tag.name === 'meta') elements.language ??= metaLanguage(tag);
     const role = this.roleOf(vocabulary);
@@ -216,7 +216,7 @@ export class MarkupStream {
     this.ended = vocabulary === undefined;
     this.root = tag.copy();
     this.rootPrefix = prefixOf(tag.name);
-    this.elements.language = tag.language();
+    this.elements.language = ownLanguage(tag);
     return !this.ended;
   }
 
@@ -244,6 +244,12 @@ export function isProse(vocabulary: Vocabulary | undefined, paragraphs: number):
 
 function prefixOf(name: string): string {
   return name.slice(0, name.indexOf(':') + 1);
+}
+
+/** The language of the whole document; an empty attribute there is rather a template's than a statement. */
+function ownLanguage(tag: StartTag): string | undefined {
+  const language = tag.language();
+  return language === UNDETERMINED ? undefined : language;
 }
 
 /** The language that a page's head states for want of an attribute (HTML Standard, "Pragma directives"). */
