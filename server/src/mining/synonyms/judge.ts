@@ -1,6 +1,7 @@
 // Pairs of noun terms before the judge: what must not be asked is refused, the rest gets its facts and a score.
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
+import { singularOf } from '../../lexicon/plurals.js';
 import { usageMeasures } from '../options.js';
 import type { UsageMeasures } from '../options.js';
 import { isRefused, readSeparations } from './apart.js';
@@ -197,8 +198,12 @@ function shapeOf({ words: a }: Term, { words: b }: Term): Shape {
   return a.length > 1 && b.length > 1 ? 'multiword' : 'words';
 }
 
-/** True where what a term has and the other lacks ends in a word of general English (data, as in sensitive data). */
+/**
+ * True where what a term has and the other lacks ends in a word of general English (data, as in sensitive data). Singular and
+ * plural of one word (detail page, details page) are no choice of words.
+ */
 function differsGenerally({ words }: Term, { words: others }: Term): boolean {
-  const last = words.filter((word) => !others.includes(word)).at(-1);
+  const singulars = others.map(singularOf);
+  const last = words.filter((word) => !singulars.includes(singularOf(word))).at(-1);
   return last !== undefined && isGeneralNoun(last);
 }

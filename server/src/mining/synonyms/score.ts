@@ -41,7 +41,7 @@ const HABIT = 0.5;
 const MOST_PLACES = 3;
 
 /** Least share of the similarity that two names of one thing have, where a list alone speaks for terms of several words. */
-const LEAST_CONFIRMED = 0.4;
+const LEAST_CONFIRMED = 0.5;
 
 const LEXICAL: readonly EvidenceKind[] = ['list', 'dictionary', 'component'];
 
