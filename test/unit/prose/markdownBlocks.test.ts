@@ -125,3 +125,11 @@ describe('elements around blocks', () => {
     expect(outline(text)).toEqual(['paragraph[safetyMessage]: a', 'paragraph[safetyMessage]: b', 'paragraph: c']);
   });
 });
+
+describe('tags in a line', () => {
+  it('close words in another language, and hide what is not to be translated', () => {
+    expect(
+      outline('A <i lang="fr">bon mot</i> and <span lang=en>a word</span>, <b translate="no">Buoy One</b> too.'),
+    ).toEqual(['paragraph: A <quotation:bon mot> and a word, @ too.']);
+  });
+});

@@ -14,14 +14,19 @@ import { LEVEL_OF, Role, ROLE_OF } from './roles.js';
 import { templateStep } from './templateTags.js';
 import type { Step } from './wrappers.js';
 
+/** Reads `[from, to)` of the text as Markdown of its own into `cx`. */
+interface NestedReader {
+  readNested(cx: BlockContext, from: number, to: number, zones: ZoneSet, kind: BlockKind): void;
+}
+
 /** What reading blocks leaves behind. */
 export interface BlockContext extends InlineContext {
   readonly blocks: ProseBlock[];
   readonly problems: ReadingProblem[];
   /** True where the document is MDX. */
   readonly mdx: boolean;
-  /** Reads `[from, to)` of the text as Markdown of its own; undefined where that is nested too deep already. */
-  readonly readNested: ((from: number, to: number, zones: ZoneSet, kind: BlockKind) => void) | undefined;
+  /** Reads Markdown that lies in a directive; undefined where that is nested too deep already. */
+  readonly nested: NestedReader | undefined;
   /** Tags that other blocks close or open. */
   readonly steps: Step[];
   /** Set where text behind the block, however far, could make something else of it. */
@@ -97,11 +102,12 @@ export function readBlock(cx: BlockContext, cursor: TreeCursor, zones: ZoneSet, 
 
 /** A fenced block is code, unless it is a directive that holds Markdown. */
 function readDirective(cx: BlockContext, from: number, to: number, zones: ZoneSet, kind: BlockKind): void {
-  const directive = cx.readNested && directiveAt(cx.text, from, to);
+  const { nested } = cx;
+  const directive = nested && directiveAt(cx.text, from, to);
   if (!directive) return;
   const inner = zones | directive.zones;
-  cx.readNested(directive.titleFrom, directive.titleTo, inner, 'caption');
-  cx.readNested(directive.bodyFrom, directive.bodyTo, inner, kind);
+  nested.readNested(cx, directive.titleFrom, directive.titleTo, inner, 'caption');
+  nested.readNested(cx, directive.bodyFrom, directive.bodyTo, inner, kind);
 }
 
 function readTemplateTag(cx: BlockContext, marker: string): void {

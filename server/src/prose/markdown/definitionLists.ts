@@ -30,32 +30,30 @@ function continueDefinition(_cx: BlockContext, line: Line, value: number): boole
 }
 
 /** Watches a paragraph for the colon that makes terms of its lines. */
-class TermLines implements LeafBlockParser {
-  nextLine(cx: BlockContext, line: Line, leaf: LeafBlock): boolean {
-    return opensDefinition(line) && this.take(cx, leaf);
-  }
+const termLines: LeafBlockParser = {
+  nextLine: (cx, line, leaf) => opensDefinition(line) && takeTerms(cx, leaf),
 
   /** A single line and a blank one may stand before the colon. */
-  finish(cx: BlockContext, leaf: LeafBlock): boolean {
-    if (leaf.content.includes('\n') || !INDENTED_MARKER.test(cx.peekLine())) return false;
+  finish(cx, leaf) {
+    if (leaf.content.length > LONGEST_TERM || leaf.content.includes('\n')) return false;
     const { line } = cx as unknown as { line: Line };
-    return line.next < 0 && this.take(cx, leaf);
-  }
+    return line.next < 0 && INDENTED_MARKER.test(cx.peekLine()) && takeTerms(cx, leaf);
+  },
+};
 
-  private take(cx: BlockContext, leaf: LeafBlock): boolean {
-    const lines = leaf.content.split('\n');
-    if (lines.length > MOST_TERMS || lines.some((line) => line.length > LONGEST_TERM)) return false;
-    const terms: Element[] = [];
-    let at = leaf.start;
-    for (const line of lines) {
-      const from = at + (line.length - line.trimStart().length);
-      const term = line.trim();
-      terms.push(cx.elt('DefinedTerm', from, from + term.length, cx.parser.parseInline(term, from)));
-      at += line.length + 1;
-    }
-    cx.addLeafElement(leaf, cx.elt('DefinedTerms', leaf.start, leaf.start + leaf.content.length, terms));
-    return true;
+function takeTerms(cx: BlockContext, leaf: LeafBlock): boolean {
+  const lines = leaf.content.split('\n');
+  if (lines.length > MOST_TERMS || lines.some((line) => line.length > LONGEST_TERM)) return false;
+  const terms: Element[] = [];
+  let at = leaf.start;
+  for (const line of lines) {
+    const from = at + (line.length - line.trimStart().length);
+    const term = line.trim();
+    terms.push(cx.elt('DefinedTerm', from, from + term.length, cx.parser.parseInline(term, from)));
+    at += line.length + 1;
   }
+  cx.addLeafElement(leaf, cx.elt('DefinedTerms', leaf.start, leaf.start + leaf.content.length, terms));
+  return true;
 }
 
 /** The extension of the Markdown grammar. */
@@ -70,8 +68,8 @@ export const definitionLists: MarkdownConfig = {
     {
       name: 'Definition',
       parse: openDefinition,
-      leaf: () => new TermLines(),
-      endLeaf: (cx, line) => cx.parentType().name === 'Definition' && opensDefinition(line),
+      leaf: () => termLines,
+      endLeaf: (cx, line) => opensDefinition(line) && cx.parentType().name === 'Definition',
       before: 'SetextHeading',
     },
   ],

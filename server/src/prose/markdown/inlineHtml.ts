@@ -6,6 +6,8 @@ import type { JsxTag } from './jsxTag.js';
 import { effectOf, holdsCode } from './wrappers.js';
 
 const NAME = /<\/?([A-Za-z][A-Za-z0-9-]*)/y;
+const LANG = /\slang\s*=\s*["']?([A-Za-z]{2,3})\b/i;
+const UNTRANSLATED = /\stranslate\s*=\s*["']?no\b/i;
 const HREF = /\shref\s*=\s*(?:"([^"]*)"|'([^']*)'|([^\s"'=<>`]+))/i;
 
 const VANISHING = new Set(
@@ -15,6 +17,12 @@ const VANISHING = new Set(
 );
 const HIDING = new Set('code pre samp script style svg tt var math textarea'.split(' '));
 const ZONES: Partial<Record<string, ZoneSet>> = { kbd: Zone.uiLabel, q: Zone.quotation, cite: Zone.quotation };
+
+/** Words in another language than English, which most pages are in, are no words of the page's own. */
+function foreignZone(tag: string): ZoneSet {
+  const language = LANG.exec(tag)?.[1];
+  return language === undefined || /^en$/i.test(language) ? 0 : Zone.quotation;
+}
 
 /** The HTML elements that are open while one block is read. */
 export class InlineHtml {
@@ -40,7 +48,7 @@ export class InlineHtml {
       this.out.space(from, to);
       return to;
     }
-    if (!closing && HIDING.has(name)) {
+    if (!closing && (HIDING.has(name) || UNTRANSLATED.test(this.text.slice(from, to)))) {
       const end = this.elementEnd(name, to);
       this.out.opaque(from, end);
       return end;
@@ -49,9 +57,12 @@ export class InlineHtml {
       this.out.opaque(from, to);
       return to;
     }
-    const zone = ZONES[name];
-    if (zone !== undefined) this.switchZone(zone, !closing);
-    else if (name === 'a') this.switchAnchor(closing ? undefined : targetOf(HREF.exec(this.text.slice(from, to))));
+    const zone = (ZONES[name] ?? 0) | (closing ? 0 : foreignZone(this.text.slice(from, to)));
+    if (!closing && zone !== 0) this.opened.set(name, zone);
+    const own = closing ? this.opened.get(name) : zone;
+    if (closing) this.opened.delete(name);
+    if (own !== undefined && own !== 0) this.switchZone(own, !closing);
+    if (name === 'a') this.switchAnchor(closing ? undefined : targetOf(HREF.exec(this.text.slice(from, to))));
     return to;
   }
 

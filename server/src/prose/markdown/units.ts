@@ -83,9 +83,10 @@ export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, str
   const { from, text, tree, outline } = stretch;
   const units: Unit[] = [];
   if (count === 0) return units;
+  const reader = new StretchReader(stretch, definitions, 0);
   forEachOutermost(tree, (cursor) => {
     const i = units.length;
-    const { blocks, problems, steps, openEnded } = readOne(stretch, definitions, cursor, 0, 'paragraph', 0);
+    const { blocks, problems, steps, openEnded } = reader.read(cursor, 0, 'paragraph');
     const unit: Unit = {
       lineStart: outline[i]!.lineStart,
       end: outline[i]!.end,
@@ -102,32 +103,44 @@ export function readUnits(stretch: Stretch, definitions: ReadonlyMap<string, str
   return units;
 }
 
-/** Reads the outermost block at the cursor, which lies in `depth` directives. */
-function readOne(
-  { text, mdx }: Stretch,
-  definitions: ReadonlyMap<string, string>,
-  cursor: TreeCursor,
-  zones: ZoneSet,
-  kind: BlockKind,
-  depth: number,
-): BlockContext {
-  const readNested = (from: number, to: number, inner: ZoneSet, innerKind: BlockKind): void => {
+/** Reads outermost blocks of a stretch that lies in `depth` directives. */
+class StretchReader {
+  constructor(
+    private readonly stretch: Stretch,
+    private readonly definitions: ReadonlyMap<string, string>,
+    private readonly depth: number,
+  ) {}
+
+  read(cursor: TreeCursor, zones: ZoneSet, kind: BlockKind): BlockContext {
+    const { text, mdx } = this.stretch;
+    const cx: BlockContext = {
+      text,
+      mdx,
+      definitions: this.definitions,
+      inner: [],
+      blocks: [],
+      problems: [],
+      steps: [],
+      openEnded: false,
+      nested: this.depth < DEEPEST_DIRECTIVE ? this : undefined,
+    };
+    readBlock(cx, cursor, zones, kind);
+    return cx;
+  }
+
+  readNested(cx: BlockContext, from: number, to: number, zones: ZoneSet, kind: BlockKind): void {
+    const { text, mdx } = this.stretch;
     const stretch = parseStretch(text, mdx ? 'mdx' : 'markdown', from, to);
-    forEachOutermost(stretch.tree, (at) => {
-      const nested = readOne(stretch, definitions, at, inner, innerKind, depth + 1);
+    const reader = new StretchReader(stretch, this.definitions, this.depth + 1);
+    forEachOutermost(stretch.tree, (cursor) => {
+      const nested = reader.read(cursor, zones, kind);
       for (const step of nested.steps) cx.steps.push({ ...step, at: step.at + cx.blocks.length });
       for (const { start, content } of nested.blocks) cx.blocks.push({ start: start + from, content });
       for (const { span, message } of nested.problems)
         cx.problems.push({ span: { start: span.start + from, end: span.end + from }, message });
       return true;
     });
-  };
-  const cx: BlockContext = {
-    ...{ text, mdx, definitions, inner: [], blocks: [], problems: [], steps: [], openEnded: false },
-    readNested: depth < DEEPEST_DIRECTIVE ? readNested : undefined,
-  };
-  readBlock(cx, cursor, zones, kind);
-  return cx;
+  }
 }
 
 /** Where a table's third line begins; undefined where it has two. */
