@@ -123,11 +123,12 @@ export function directionOf(forth: ReplacementCount, back: ReplacementCount = NE
   const against = forth.mended + back.sentences + back.mended;
   if (forth.sentences === 0 || against > MOST_AGAINST * forth.sentences) return undefined;
   const number = Math.max(forth.commits, forth.pages);
+  const isOnce = forth.sentences === 1 && back.sentences === 0;
   const other = back.sentences === 0 ? 'never' : times(back.sentences);
   return {
     times: number,
     isHabit: number >= FEWEST_TIMES,
-    text: `${times(forth.sentences)}, ${other} the other way round`,
+    text: isOnce ? times(1) : `${times(forth.sentences)}, ${other} the other way round`,
   };
 }
 
