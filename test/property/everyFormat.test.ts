@@ -67,3 +67,11 @@ describe('a page with every construct', () => {
     }
   });
 });
+
+describe('half of a pair of surrogates at the text’s end', () => {
+  it.each(ALL_FORMATS)('is read in %s, behind whatever may take a letter', (format) => {
+    for (const before of ['', 'a', '\\^', "\\'", '\\', '*', '`', '&', ':', '[', '<', '{']) {
+      for (const half of ['\ud800', '\udc00']) expectSound(before + half, format);
+    }
+  });
+});

@@ -85,7 +85,8 @@ export function accented(text: string, at: number, accent: string): { text: stri
   const unit = letter.charCodeAt(0);
   if (unit >= 0xd800 && unit < 0xe000) {
     const pair = text.charCodeAt(end);
-    if (found[4] === undefined || unit >= 0xdc00 || pair < 0xdc00 || pair >= 0xe000) return undefined;
+    // At the text's end there is no second half, and its code is not a number.
+    if (found[4] === undefined || unit >= 0xdc00 || !(pair >= 0xdc00 && pair < 0xe000)) return undefined;
     letter += text[end++]!;
   }
   return { text: (letter + accent).normalize('NFC'), end };
