@@ -104,6 +104,16 @@ export const MARKDOWN_PARTS = [
     '| Term | Means |\n|-|-|\n',
     '+++\n',
     '{{< x >}}',
+    '{{< warning >}}\n',
+    '{% endhint %}\n',
+    '```{note} a *b*\n:c: d\n',
+    '{: .danger}\n',
+    '<div class="warning" lang="fr">\n\n',
+    '<i lang="de">',
+    '<Warning>',
+    '</Warning>',
+    'export const d = {\n',
+    '{/* ',
   ],
 ];
 

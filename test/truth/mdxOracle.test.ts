@@ -8,6 +8,7 @@ import { mdxjs } from 'micromark-extension-mdxjs';
 import { describe, expect, it } from 'vitest';
 import { sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
+import { tell } from './oracleTable.js';
 import { MDX_PAGE } from '../unit/prose/mdxPage.js';
 
 const WORD = /[\p{L}\p{N}]+/gu;
@@ -168,6 +169,7 @@ describe('MDX against its own grammar', () => {
       .filter((file) => existsSync(path.join(root, file)));
     let agreed = 0;
     let judged = 0;
+    let units = 0;
     const differing: string[] = [];
     for (const file of files.sort()) {
       const source = readFileSync(path.join(root, file), 'utf8').replace(/<!--[^]*?-->/g, (what) =>
@@ -177,12 +179,24 @@ describe('MDX against its own grammar', () => {
         const result = differences(source);
         judged++;
         agreed += result.agreed;
+        units += source.length;
         differing.push(...result.differing.map((what) => `${file}: ${what}`));
       } catch {
         // No MDX: an address in angle brackets, say.
       }
     }
     console.info(`${judged} of ${files.length} files are MDX; ${agreed} words agreed on, ${differing.length} not`);
+    const wrong = (what: string): number => differing.filter((line) => line.includes(`: ${what} `)).length;
+    tell({
+      ...{
+        format: 'MDX',
+        oracle: 'micromark-extension-mdxjs',
+        set: 'read-me files',
+        misplaced: wrong('misplaced'),
+        units,
+      },
+      ...{ theirs: agreed + wrong('missing'), found: agreed, ours: agreed + wrong('extra'), right: agreed },
+    });
     expect(differing).toEqual([]);
     expect(agreed).toBeGreaterThan(1000);
   });
