@@ -7,7 +7,7 @@ import type { CompanionFigures } from './companion.js';
 import { REACH } from './grammar.js';
 import type { CompanionRelation, Partner } from './grammar.js';
 import { relationCounts } from './relationCounts.js';
-import type { CountedRelation, RelationCounts } from './relationCounts.js';
+import type { CountedRelation, RelationMargins } from './relationCounts.js';
 import { shownWord } from './shownWord.js';
 
 /** A word that stands in a grammatical relation to a term. */
@@ -28,8 +28,11 @@ interface Found {
 }
 
 /** Every word in a relation to the uses of a term, in no order; a use tagged as a verb has the relations of a verb. */
-export function companionsByRelation(corpus: Corpus, uses: readonly Use[]): RelatedCompanion[] {
-  const counts = relationCounts(corpus);
+export function companionsByRelation(
+  corpus: Corpus,
+  uses: readonly Use[],
+  counts: RelationMargins = relationCounts(corpus),
+): RelatedCompanion[] {
   const { stream } = corpus;
   const found = new Map<string, Found>();
   const totals = new Map<CompanionRelation, number>();
@@ -54,7 +57,7 @@ export function companionsByRelation(corpus: Corpus, uses: readonly Use[]): Rela
     // A term of several words can end in a word that another reading of the phrase pairs otherwise: margins never fall short.
     const cells = cellsOf({ c1: totals.get(relation)!, c2: Math.max(c2, count), c12: count, n: Math.max(n, c2) });
     const strength = attraction(cells);
-    const word = isNounSide ? shownWord(corpus, key) : counts.textOf(key);
+    const word = isNounSide ? shownWord(corpus, key) : counts.keys.textOf(key);
     return { relation, word, count, documents: documents.size, strength, rows };
   });
 }
@@ -71,20 +74,20 @@ const MARGIN: Readonly<Record<CompanionRelation, CountedRelation>> = {
 
 type Visit = (relation: CompanionRelation, key: number) => void;
 
-function visitNoun({ stream }: Corpus, counts: RelationCounts, use: Use, visit: Visit): void {
+function visitNoun({ stream }: Corpus, counts: RelationMargins, use: Use, visit: Visit): void {
   const { grammar } = counts;
   const last = use.row + use.length - 1;
-  if (use.row > 0 && grammar.isModifier(use.row - 1)) visit('modified-by', counts.keyOf({ row: use.row - 1 }));
+  if (use.row > 0 && grammar.isModifier(use.row - 1)) visit('modified-by', counts.keys.of({ row: use.row - 1 }));
   if (grammar.isModifier(last) && grammar.isNoun(last + 1)) visit('modifies', stream.lemma[last + 1]!);
-  if (!grammar.isHead(last)) return;
+  if (!counts.isHead(last)) return;
   grammar.visitHead(last, (relation, partner) => {
     // The verb of a term that holds a verb (“run time”) is no companion.
-    if (partner.row < use.row || partner.row > last) visit(relation, counts.keyOf(partner));
+    if (partner.row < use.row || partner.row > last) visit(relation, counts.keys.of(partner));
   });
 }
 
 /** Finds the heads around a verb whose verb it is. */
-function visitVerb({ stream }: Corpus, counts: RelationCounts, use: Use, visit: Visit): void {
+function visitVerb({ stream }: Corpus, counts: RelationMargins, use: Use, visit: Visit): void {
   const { grammar } = counts;
   const from = Math.max(0, use.row - REACH);
   const until = Math.min(stream.length, use.row + use.length + REACH);

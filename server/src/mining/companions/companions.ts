@@ -12,6 +12,7 @@ import type { Floor } from './companion.js';
 import type { SegmentKind } from './segments.js';
 import { outsideWholes, wholenessOf, wholesAround } from './wholes.js';
 import type { Wholeness } from './wholes.js';
+import { wordMargins } from './wordMargins.js';
 
 export { COMPANION_RELATIONS } from './grammar.js';
 export type { CompanionRelation } from './grammar.js';
@@ -54,9 +55,12 @@ export function findCompanions(corpus: Corpus, forms: readonly string[], kind: S
   };
 }
 
-/** The strongest companions of a term by relation; none where it is not used. */
+/** The strongest companions of a term by relation, measured roughly for showing at once; none where it is not used. */
 export function companionsOf(corpus: Corpus, forms: readonly string[], most: number): RelatedCompanion[] {
-  return ranked(companionsByRelation(corpus, usesOfForms(corpus, forms))).companions.slice(0, most);
+  return ranked(companionsByRelation(corpus, usesOfForms(corpus, forms), wordMargins(corpus))).companions.slice(
+    0,
+    most,
+  );
 }
 
 /** The uses of all forms of a term, in the order of the stream; a form inside a longer one at its place is not counted. */

@@ -3,7 +3,7 @@ import type { Corpus } from '../../corpus/corpus.js';
 import { isContent } from '../../corpus/stream.js';
 import type { TokenStream } from '../../corpus/stream.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
-import { WORD_USES, readUses } from '../synonyms/wordUse.js';
+import { WORD_USES } from '../synonyms/wordUse.js';
 
 /** How a companion stands to its term; the last two are those of a verb. */
 export const COMPANION_RELATIONS = [
@@ -44,13 +44,14 @@ export class Grammar {
   private readonly beforePreposition: ReadonlySet<number>;
 
   private readonly stream: TokenStream;
-  /** Whether each row is used as a noun, a verb, an adjective …: the tagger alone takes many a noun for an adjective. */
-  private readonly classes: Uint8Array;
 
-  constructor(corpus: Corpus) {
+  /** @param classes the class of each row, as an index into `WORD_USES` */
+  constructor(
+    corpus: Corpus,
+    private readonly classes: Uint8Array,
+  ) {
     const { vocabulary } = corpus;
     this.stream = corpus.stream;
-    this.classes = readUses(corpus);
     const known = (words: ReadonlySet<string>): Set<number> =>
       new Set([...words].map((word) => vocabulary.find(word)).filter((id) => id !== undefined));
     this.be = known(BE);
@@ -60,7 +61,12 @@ export class Grammar {
 
   /** True for the last noun of a noun phrase. */
   isHead(row: number): boolean {
-    return this.isNoun(row) && !(this.continues(row + 1) && this.isNoun(row + 1));
+    return this.isNoun(row) && this.endsPhrase(row);
+  }
+
+  /** True where no noun goes on after a row. */
+  endsPhrase(row: number): boolean {
+    return !(this.continues(row + 1) && this.isNoun(row + 1));
   }
 
   /** True where a word and the one behind it are parts of one noun phrase, the first one of content: remote + station. */

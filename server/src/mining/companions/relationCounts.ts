@@ -1,8 +1,9 @@
 // How often each word stands in each relation in a whole corpus: the margins against which a companion is measured.
 import type { Corpus } from '../../corpus/corpus.js';
+import { readUses } from '../synonyms/wordUse.js';
 import { Grammar } from './grammar.js';
 import type { HeadRelation, Partner } from './grammar.js';
-import { shownWord } from './shownWord.js';
+import { PartnerKeys } from './partnerKeys.js';
 
 /** The relations that are counted over a corpus; a verb's relations are the same pairs seen from the other side. */
 export type CountedRelation = HeadRelation | 'pair';
@@ -12,22 +13,37 @@ interface Margins {
   all: number;
   /** By lemma: verbs, governors or modifiers that come without particle and preposition. */
   readonly plain: Uint32Array;
-  /** The others, by {@link RelationCounts.keyOf}. */
+  /** The others, by {@link PartnerKeys.of}. */
   readonly composed: Map<number, number>;
   /** By lemma of the noun. */
   readonly nouns: Uint32Array;
 }
 
-/** The relations of a corpus, counted. */
-export class RelationCounts {
+/** What companions are measured against. */
+export interface RelationMargins {
   readonly grammar: Grammar;
+  readonly keys: PartnerKeys;
+  /** True for a row that ends a noun phrase and can have relations. */
+  isHead(row: number): boolean;
+  /** Instances of a relation in the corpus, or what stands for them. */
+  all(relation: CountedRelation): number;
+  /** Those with a partner, by {@link PartnerKeys.of}; and those with a noun, by its lemma. */
+  ofPartner(relation: CountedRelation, key: number): number;
+  ofNoun(relation: CountedRelation, lemma: number): number;
+}
+
+/** The relations of a corpus, counted. */
+class RelationCounts implements RelationMargins {
+  readonly grammar: Grammar;
+  readonly keys: PartnerKeys;
   private readonly margins: Readonly<Record<CountedRelation, Margins>>;
   private readonly size: number;
 
-  constructor(private readonly corpus: Corpus) {
-    const { stream, vocabulary } = corpus;
-    this.size = vocabulary.size;
-    this.grammar = new Grammar(corpus);
+  constructor(corpus: Corpus) {
+    const { stream } = corpus;
+    this.keys = new PartnerKeys(corpus);
+    this.size = this.keys.size;
+    this.grammar = new Grammar(corpus, readUses(corpus));
     const empty = (): Margins => {
       return { all: 0, plain: new Uint32Array(this.size), composed: new Map(), nouns: new Uint32Array(this.size) };
     };
@@ -35,7 +51,7 @@ export class RelationCounts {
     const { grammar } = this;
     let head = 0;
     const visit = (relation: HeadRelation, partner: Partner): void =>
-      this.count(relation, this.keyOf(partner), stream.lemma[head]!);
+      this.count(relation, this.keys.of(partner), stream.lemma[head]!);
     for (let row = 0; row < stream.length; row++) {
       if (stream.counted[row] === 0) continue;
       if (grammar.isModifier(row)) this.count('pair', stream.lemma[row]!, stream.lemma[row + 1]!);
@@ -45,24 +61,10 @@ export class RelationCounts {
     }
   }
 
-  /** The identity of a partner: its dictionary form with its particle and preposition. */
-  keyOf({ row, particle, preposition }: Partner): number {
-    const { lemma, fold } = this.corpus.stream;
-    const behind = particle === undefined ? 0 : fold[particle]! + 1;
-    const before = preposition === undefined ? 0 : fold[preposition]! + 1;
-    return lemma[row]! + (this.size + 1) * (behind + (this.size + 1) * before);
+  isHead(row: number): boolean {
+    return this.grammar.isHead(row);
   }
 
-  /** The words of a partner: “set up”, “store in”. */
-  textOf(key: number): string {
-    const { corpus } = this;
-    const base = this.size + 1;
-    const rest = Math.floor(key / base);
-    const behind = [(rest % base) - 1, Math.floor(rest / base) - 1].filter((word) => word >= 0);
-    return [shownWord(corpus, key % base), ...behind.map((word) => corpus.vocabulary.textOf(word))].join(' ');
-  }
-
-  /** Instances of a relation in the corpus. */
   all(relation: CountedRelation): number {
     return this.margins[relation].all;
   }
@@ -85,10 +87,10 @@ export class RelationCounts {
   }
 }
 
-const COUNTS = new WeakMap<Corpus, RelationCounts>();
+const COUNTS = new WeakMap<Corpus, RelationMargins>();
 
 /** The relations of a corpus, counted when first asked for. */
-export function relationCounts(corpus: Corpus): RelationCounts {
+export function relationCounts(corpus: Corpus): RelationMargins {
   let counts = COUNTS.get(corpus);
   if (counts === undefined) COUNTS.set(corpus, (counts = new RelationCounts(corpus)));
   return counts;

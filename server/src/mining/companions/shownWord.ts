@@ -2,7 +2,6 @@
 import { byCountThenText } from '../../base/order.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { isKnown } from '../../lexicon/synonyms.js';
-import { wordNetParts } from '../../lexicon/wordnet.js';
 
 const SHOWN = new WeakMap<Corpus, Map<number, string>>();
 
@@ -10,19 +9,21 @@ const SHOWN = new WeakMap<Corpus, Map<number, string>>();
 export function shownWord(corpus: Corpus, lemma: number): string {
   const { stream, vocabulary } = corpus;
   const text = vocabulary.textOf(lemma);
-  if (stream.rowsOf(lemma).length > 0 || wordNetParts.some((part) => isKnown(text, part))) return text;
+  if (stream.rowsOf(lemma).length > 0 || isKnown(text, 'verb') || isKnown(text, 'noun')) return text;
   let shown = SHOWN.get(corpus);
   if (shown === undefined) SHOWN.set(corpus, (shown = commonestForms(corpus)));
   return shown.get(lemma) ?? text;
 }
 
 function commonestForms({ stream, vocabulary }: Corpus): Map<number, string> {
+  const uses = new Uint32Array(vocabulary.size);
+  for (let row = 0; row < stream.length; row++) if (stream.counted[row] === 1) uses[stream.fold[row]!]!++;
   const best = new Map<number, { text: string; count: number }>();
   for (let row = 0; row < stream.length; row++) {
     const lemma = stream.lemma[row]!;
-    if (stream.counted[row] === 0 || stream.rowsOf(lemma).length > 0) continue;
+    if (stream.counted[row] === 0 || uses[lemma]! > 0) continue;
     const fold = stream.fold[row]!;
-    const form = { text: vocabulary.textOf(fold), count: stream.rowsOf(fold).length };
+    const form = { text: vocabulary.textOf(fold), count: uses[fold]! };
     const known = best.get(lemma);
     if (known === undefined || byCountThenText(form, known) < 0) best.set(lemma, form);
   }
