@@ -1,5 +1,6 @@
 // Counting past replacements of terms, and what the counts say to the engine of synonyms.
 import { describe, expect, it } from 'vitest';
+import { finish } from '../../../server/src/base/work.js';
 import { alignmentDistance } from '../../../server/src/base/editDistance.js';
 import { heedPastEdits } from '../../../server/src/mining/heedPastEdits.js';
 import { countReplacements, replacedBetween } from '../../../server/src/mining/pastEdits.js';
@@ -7,7 +8,9 @@ import type { PastEdits, Replacement } from '../../../server/src/mining/pastEdit
 import type { Question, QuestionTerm } from '../../../server/src/mining/question.js';
 import { PairCollector } from '../../../server/src/mining/synonyms/evidence.js';
 import { pairByPastEdits, pastEditKey } from '../../../server/src/mining/synonyms/pastEdits.js';
+import { askSynonyms } from '../../../server/src/mining/synonyms/ask.js';
 import type { Term } from '../../../server/src/mining/synonyms/terms.js';
+import { corpusOf } from '../../support/corpusOf.js';
 
 let sentence = 0;
 const replacement = (from: string, to: string, more: Partial<Replacement> = {}): Replacement => ({
@@ -94,6 +97,30 @@ describe('as evidence of synonyms', () => {
   it('say nothing of two forms of a word, of slips, and of terms that are no longer used', () => {
     expect(evidenceOf(edits([replacement('worker', 'work'), replacement('plug-in', 'plugin')]))).toEqual([]);
     expect(evidenceOf(edits([replacement('folder', 'catalogue')]))).toEqual([]);
+  });
+});
+
+describe('a habit of past edits', () => {
+  const SAID = ['starts the job', 'reads its queue', 'writes a log', 'waits for the server', 'stops after a minute'];
+  const pages = ['runner', 'worker'].flatMap((name) =>
+    SAID.map((said, at) => `Every ${name} ${said}. Then the ${name} ${SAID[(at + 1) % SAID.length]!}.`),
+  );
+  const OTHERS = ['antenna', 'cable', 'battery', 'sensor', 'mast', 'hull'].flatMap((name) =>
+    ['needs care', 'is checked once a year', 'has a number', 'came with a manual'].map(
+      (said) => `The ${name} ${said}.`,
+    ),
+  );
+  const corpus = corpusOf([...pages, ...OTHERS]);
+  const asked = (past: PastEdits | undefined): string[] =>
+    finish(askSynonyms(corpus, { pastEdits: past }))
+      .filter(({ kind }) => kind === 'synonym')
+      .map(({ terms }) => terms.map(({ text }) => text).join(' | '));
+  const many = Array.from({ length: 8 }, () => [replacement('runner', 'worker')]);
+
+  it('has two names asked about that no list knows, and one edit has not', () => {
+    expect(asked(edits(...many))).toEqual(['runner | worker']);
+    expect(asked(edits(many[0]!))).toEqual([]);
+    expect(asked(undefined)).toEqual([]);
   });
 });
 
