@@ -1,6 +1,6 @@
 // Holds documents to one agenda; what it found in a block is kept for as long as the block's content is.
 import type { Agenda } from '../decisions/decide.js';
-import { languagesOf } from '../facts/languages.js';
+import { languagesIn } from './languages.js';
 import { checkBlock, checkProse } from '../findings/check.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
 import type { BlockFinding, Finding } from '../findings/finding.js';
@@ -56,7 +56,7 @@ export class Checker {
 
   /** The findings of a document, in order of their places. Blocks that an edit left alone are not checked again. */
   check({ source, prose }: Reading): readonly Finding[] {
-    const languages = languagesOf(prose, source.pathLanguage);
+    const languages = languagesIn({ source, prose });
     const ofBlock = (content: BlockContent, _: TermSet, block: number): readonly BlockFinding[] => {
       const terms = this.termsIn(languages.blocks[block]!);
       let known = this.ofBlock.get(content);

@@ -1,5 +1,5 @@
 // Replacing a finding's term by the preferred one, as edits of the document's source.
-import { languagesOf } from '../facts/languages.js';
+import { languagesIn } from './languages.js';
 import type { Finding } from '../findings/finding.js';
 import { isRefusal, replaceTerm } from '../rewrite/replaceTerm.js';
 import { sourceEdits } from '../rewrite/sourceEdits.js';
@@ -19,7 +19,7 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
   const block = reading?.prose.blocks[finding.block];
   if (reading === undefined || block === undefined || finding.preferred === undefined)
     return { kind: 'refused', reason: 'There is no preferred term.' };
-  const language = languagesOf(reading.prose, reading.source.pathLanguage).blocks[finding.block]!;
+  const language = languagesIn(reading).blocks[finding.block]!;
   const { terms, closed } = snapshot.checkerAt(uri).termsIn(language);
   const checked = terms.find((term) => term.checked.id === finding.termId)?.checked;
   const replaced = replaceTerm({

@@ -1,7 +1,7 @@
 // What the documents' own glossary says of a term: the start of its definition and where the entry stands.
 import type { Span } from '../base/span.js';
 import { contains, touches } from '../base/span.js';
-import { languagesOf } from '../facts/languages.js';
+import { languagesIn } from './languages.js';
 import { TermMatcher } from '../findings/termMatcher.js';
 import { Glossary } from '../mining/glossary/glossary.js';
 import { sourceEnd, sourceStart } from '../prose/prose.js';
@@ -47,7 +47,7 @@ export function definedAt(snapshot: Snapshot, uri: string, offset: number): Defi
   if (at < 0) return undefined;
   const { content } = reading.prose.blocks[at]!;
   if (content.glossary === 'headword') return undefined;
-  const language = languagesOf(reading.prose, reading.source.pathLanguage).blocks[at]!;
+  const language = languagesIn(reading).blocks[at]!;
   const names = headwordsOf(snapshot, language);
   if (names === undefined) return undefined;
   const block = reading.prose.blocks[at]!;

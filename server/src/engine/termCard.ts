@@ -1,7 +1,7 @@
 // The card of the term at a place: its status, its concept's names with their uses, its companions, and what is asked.
 import type { Span } from '../base/span.js';
 import { contains, touches } from '../base/span.js';
-import { languagesOf } from '../facts/languages.js';
+import { languagesIn } from './languages.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
 import { companionsOf } from '../mining/companions/companions.js';
 import type { RelatedCompanion } from '../mining/companions/companions.js';
@@ -49,7 +49,7 @@ export function termAt(snapshot: Snapshot, uri: string, offset: number): TermAtP
   const reading = snapshot.readingOf(uri);
   if (reading === undefined) return undefined;
   const checker = snapshot.checkerAt(uri);
-  const languages = languagesOf(reading.prose, reading.source.pathLanguage);
+  const languages = languagesIn(reading);
   for (const [index, block] of reading.prose.blocks.entries()) {
     const { content } = block;
     const terms = checker.termsIn(languages.blocks[index]!);

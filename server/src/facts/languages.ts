@@ -28,36 +28,38 @@ const MOST_JOINED = 3000;
  * the document's. That is what the document states, else what its blocks are mostly in, else what its path names, else English.
  * Equal prose and equal paths have equal languages.
  * @param pathLanguage what the document's path names, where it names a language
+ * @param told keeps what blocks are told to be: worth its memory for documents that are being edited alone
  */
-export function languagesOf(prose: Prose, pathLanguage?: string): ProseLanguages {
+export function languagesOf(prose: Prose, pathLanguage?: string, told?: ToldBlocks): ProseLanguages {
+  const tell: Tell = (content, expected) =>
+    told === undefined ? languageOfText(content.text, expected) : told.of(content, expected);
   const contents = prose.blocks.map(({ content }) => content);
-  const document = primaryLanguage(prose.language) ?? documentLanguage(contents, pathLanguage);
-  return { document, blocks: contents.map((content) => blockLanguage(content, document)) };
+  const document = primaryLanguage(prose.language) ?? documentLanguage(contents, pathLanguage, tell);
+  const ofBlock = (content: BlockContent): string =>
+    primaryLanguage(content.language) ?? (isOpen(content.zones) ? tell(content, document) : undefined) ?? document;
+  return { document, blocks: contents.map(ofBlock) };
 }
 
-function blockLanguage(content: BlockContent, document: string): string {
-  return (
-    primaryLanguage(content.language) ?? (isOpen(content.zones) ? toldOf(content, document) : undefined) ?? document
-  );
-}
+/** The language that a block's text is in for certain, where another is expected. */
+type Tell = (content: BlockContent, expected: string) => string | undefined;
 
-function documentLanguage(contents: readonly BlockContent[], pathLanguage: string | undefined): string {
+function documentLanguage(contents: readonly BlockContent[], pathLanguage: string | undefined, tell: Tell): string {
   const open = contents.filter(({ zones, language }) => isOpen(zones) && language === undefined);
-  const told = mostlyTold(open) ?? languageOfText(joinedText(open));
+  const told = mostlyTold(open, tell) ?? languageOfText(joinedText(open));
   // A relative that the detector does not know (Indonesian, Galician) is taken for one that it knows, but never for English.
   if (told !== undefined && (told === 'en' || pathLanguage === undefined || canBeTold(pathLanguage))) return told;
   return pathLanguage !== undefined && mayBeIn(pathLanguage, joinedText(open)) ? pathLanguage : DEFAULT_LANGUAGE;
 }
 
 /** The language of most of the text in sampled blocks that are told. */
-function mostlyTold(contents: readonly BlockContent[]): string | undefined {
+function mostlyTold(contents: readonly BlockContent[], tell: Tell): string | undefined {
   const long = contents.filter(({ text }) => text.length >= SHORTEST_SAMPLE);
   const step = Math.max(1, long.length / SAMPLED);
   const sizes = new Map<string, number>();
   let all = 0;
   for (let at = 0; at < long.length; at += step) {
     const content = long[Math.floor(at)]!;
-    const language = toldOf(content, DEFAULT_LANGUAGE);
+    const language = tell(content, DEFAULT_LANGUAGE);
     if (language === undefined) continue;
     all += content.text.length;
     sizes.set(language, (sizes.get(language) ?? 0) + content.text.length);
@@ -75,13 +77,20 @@ function joinedText(contents: readonly BlockContent[]): string {
   return text;
 }
 
-const told = new WeakMap<BlockContent, { readonly expected: string; readonly language: string | undefined }[]>();
+/** What {@link languageOfText} says of blocks, kept as long as the blocks are: an edit leaves most of them alone. */
+export class ToldBlocks {
+  private readonly known = new WeakMap<BlockContent, Told[]>();
 
-/** {@link languageOfText} of a block, kept as long as the block is: an edit leaves most blocks alone. */
-function toldOf(content: BlockContent, expected: string): string | undefined {
-  let known = told.get(content);
-  if (known === undefined) told.set(content, (known = []));
-  let found = known.find((each) => each.expected === expected);
-  if (found === undefined) known.push((found = { expected, language: languageOfText(content.text, expected) }));
-  return found.language;
+  of(content: BlockContent, expected: string): string | undefined {
+    let known = this.known.get(content);
+    if (known === undefined) this.known.set(content, (known = []));
+    let found = known.find((each) => each.expected === expected);
+    if (found === undefined) known.push((found = { expected, language: languageOfText(content.text, expected) }));
+    return found.language;
+  }
+}
+
+interface Told {
+  readonly expected: string;
+  readonly language: string | undefined;
 }

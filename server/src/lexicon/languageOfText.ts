@@ -4,6 +4,8 @@ import { hasStopWords, isStopWord } from './stopWords.js';
 
 /** Fewest words of a text that is told; characters of scripts without spaces count as half a word each. */
 const FEWEST_WORDS = 20;
+/** No text of fewer UTF-16 units has so many words, in any script. */
+const SHORTEST_TEXT = 2 * FEWEST_WORDS;
 /** So many words say enough, … */
 const MOST_WORDS = 150;
 /** … and so many at the start where their share of English grammar is as high as English prose has it. */
@@ -13,6 +15,8 @@ const PLAINLY_ENGLISH = 0.35;
 const MOST_UNITS = 1000;
 /** From this share of words of grammar up a text is English: in other languages look-alikes (in, die, a) make up a tenth. */
 const SURELY_ENGLISH = 0.25;
+/** From this share up a text in plain letters is told by nothing else. */
+const MAYBE_ENGLISH = 0.12;
 /** Least share of words of grammar by which a language with spaces confirms what its letters say. */
 const LEAST_GRAMMAR = 0.18;
 /** From this share of letters beyond ASCII up a text is not English, and no further witness is wanted. */
@@ -32,6 +36,8 @@ const DETECTED: Readonly<Record<string, string>> = {
 const TOLD = new Set(Object.values(DETECTED));
 const OPTIONS = { only: Object.keys(DETECTED) };
 
+/** Stands for code and other things that are no prose. */
+const OPAQUE_UNIT = 0xfffc;
 const WORD = /\p{L}[\p{L}\p{M}]*/gu;
 const UNSPACED = /[\p{sc=Han}\p{sc=Hira}\p{sc=Kana}\p{sc=Thai}\p{sc=Lao}\p{sc=Khmr}\p{sc=Mymr}]/gu;
 
@@ -43,10 +49,15 @@ const UNSPACED = /[\p{sc=Han}\p{sc=Hira}\p{sc=Kana}\p{sc=Thai}\p{sc=Lao}\p{sc=Kh
  * @param expected where its words of grammar fit this language well, the trigrams are not asked
  */
 export function languageOfText(text: string, expected = 'en'): string | undefined {
+  if (text.length < SHORTEST_TEXT) return undefined;
+  const first = atFirstSight(text);
+  if (first !== 'open') return first === 'en' ? 'en' : undefined;
   const { words, size, unspaced } = wordsOf(text);
   if (size < FEWEST_WORDS) return undefined;
   const english = shareOfGrammar(words, 'en');
   if (english >= SURELY_ENGLISH) return 'en';
+  // Lists and names thin English out; what has so much of it is not in another language of plain letters.
+  if (english >= MAYBE_ENGLISH && unspaced === 0 && shareBeyondAscii(words) === 0) return undefined;
   const mostlyUnspaced = unspaced * 2 > size;
   if (!mostlyUnspaced && expected !== 'en' && shareOfGrammar(words, expected) >= 2 * LEAST_GRAMMAR) return expected;
   const language = byTrigrams(text);
@@ -56,6 +67,31 @@ export function languageOfText(text: string, expected = 'en'): string | undefine
   return own >= LEAST_GRAMMAR && own > english ? language : undefined;
 }
 
+/** The quick answer for nearly every block of English documents: so few words, or the first of them as English prose has them. */
+function atFirstSight(text: string): 'short' | 'en' | 'open' {
+  let words = 0;
+  let grammar = 0;
+  let isAscii = true;
+  for (let at = 0; at < text.length && words < FIRST_WORDS;) {
+    const start = at;
+    while (at < text.length && isAsciiLetter(text.charCodeAt(at))) at++;
+    if (at === start) {
+      const unit = text.charCodeAt(at++);
+      // Dashes, quotation marks and the like (U+2000 to U+206F) are of no script.
+      if (unit > 0x7f && (unit < 0x2000 || unit > 0x206f) && unit !== OPAQUE_UNIT) isAscii = false;
+    } else {
+      words++;
+      if (isStopWord(text.slice(start, at).toLowerCase(), 'en')) grammar++;
+    }
+  }
+  if (words === FIRST_WORDS && grammar >= PLAINLY_ENGLISH * words) return 'en';
+  return isAscii && words < FEWEST_WORDS ? 'short' : 'open';
+}
+
+function isAsciiLetter(unit: number): boolean {
+  return (unit >= 97 && unit <= 122) || (unit >= 65 && unit <= 90);
+}
+
 function wordsOf(text: string): { words: readonly string[]; size: number; unspaced: number } {
   const words: string[] = [];
   let unspaced = 0;
@@ -63,7 +99,6 @@ function wordsOf(text: string): { words: readonly string[]; size: number; unspac
     const characters = word.charCodeAt(0) < 0xe00 ? 0 : (word.match(UNSPACED)?.length ?? 0);
     if (characters > 0) unspaced += characters / 2;
     else words.push(word.toLowerCase());
-    if (words.length === FIRST_WORDS && shareOfGrammar(words, 'en') >= PLAINLY_ENGLISH) break;
     if (words.length + unspaced >= MOST_WORDS) break;
   }
   return { words, size: words.length + unspaced, unspaced };
