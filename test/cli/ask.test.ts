@@ -61,7 +61,7 @@ describe('evenword ask', () => {
     expect(code).toBe(0);
     expect(out).toMatch(/^7 pages, [\d,]+ words: \d+ open questions?\.\n/);
     expect(out).toMatch(/“data ?logger” or “data ?logger”\?/);
-    expect(out).toMatch(/service\.md:3/);
+    expect(out).toMatch(/service\.md:5$/m);
     expect(err).toContain('noise.md');
     const quiet = await evenword(['ask', folder.path, '--quiet']);
     expect(quiet).toEqual({ code: 0, out, err: '' });
