@@ -24,7 +24,7 @@ export function pairByComponents(terms: readonly Term[], pairs: PairCollector): 
     const isHead = gap === terms[members[0]!]!.words.length - 1;
     const words = members.map((term) => terms[term]!.words[gap]!);
     (isHead ? ofHeads : ofModifiers).forEachRelated(words, (i, j) => {
-      const link = linkOfParts(words[i]!, words[j]!, isHead);
+      const link = linkOfParts(words[i]!, words[j]!, isHead, ofModifiers.keyOf);
       if (link === undefined) return;
       const says = link.source === 'list' ? 'the trade often uses for one thing' : 'a dictionary gives as synonyms';
       pairs.add(members[i]!, members[j]!, {
@@ -38,8 +38,13 @@ export function pairByComponents(terms: readonly Term[], pairs: PairCollector): 
   }
 }
 
-function linkOfParts(left: string, right: string, isHead: boolean): LexicalLink | undefined {
-  const noun = lexicalLink(left, right, 'noun');
+function linkOfParts(
+  left: string,
+  right: string,
+  isHead: boolean,
+  keyOf: (word: string) => string,
+): LexicalLink | undefined {
+  const noun = lexicalLink(left, right, 'noun', keyOf);
   if (noun !== undefined || isHead) return noun;
-  return lexicalLink(left, right, 'adjective') ?? lexicalLink(left, right, 'verb');
+  return lexicalLink(left, right, 'adjective', keyOf) ?? lexicalLink(left, right, 'verb', keyOf);
 }

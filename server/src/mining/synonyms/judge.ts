@@ -42,7 +42,7 @@ const LEAST_ALONE = 0.15;
 /** From this share of capitalised uses a term is a proper name. */
 const PROPER = 0.5;
 /** So many pairs at most that can only be asked about on request are compared with all other terms, which costs most. */
-const MOST_ON_REQUEST = 150;
+const MOST_ON_REQUEST = 90;
 /** Least score of a pair that is asked about by default, … */
 export const THRESHOLD = 0.3;
 /** … and of one that is asked about on request. */
@@ -171,7 +171,8 @@ export class Judge {
   private isProper(term: number): boolean {
     let proper = this.proper.get(term);
     if (proper === undefined) {
-      proper = properShare(this.corpus.stream, this.corpus.vocabulary, this.occurrences.usesOf(term)) >= PROPER;
+      const { stream, vocabulary } = this.corpus;
+      proper = properShare(stream, vocabulary, this.segments, this.occurrences.of(term)) >= PROPER;
       this.proper.set(term, proper);
     }
     return proper;

@@ -6,8 +6,9 @@ import type { Term } from './terms.js';
 /** Adds the pairs of terms that stand in one set of equivalents, or share a sense in the dictionary. */
 export function pairByLists(terms: readonly Term[], pairs: PairCollector): void {
   const texts = terms.map(({ words }) => words.join(' '));
-  new Meanings(['noun']).forEachRelated(texts, (a, b) => {
-    const link = lexicalLink(texts[a]!, texts[b]!, 'noun');
+  const meanings = new Meanings(['noun']);
+  meanings.forEachRelated(texts, (a, b) => {
+    const link = lexicalLink(texts[a]!, texts[b]!, 'noun', meanings.keyOf);
     if (link === undefined) return;
     const text =
       link.source === 'list'

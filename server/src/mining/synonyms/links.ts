@@ -1,5 +1,5 @@
 // How our list of equivalents and the general dictionary relate two words or phrases.
-import { areEquivalent, equivalentSets } from '../../lexicon/equivalents.js';
+import { equivalentByKeys, equivalentSets } from '../../lexicon/equivalents.js';
 import type { EquivalentPos } from '../../lexicon/equivalents.js';
 import { synonymy } from '../../lexicon/synonyms.js';
 import { termKey } from '../../lexicon/termKey.js';
@@ -15,9 +15,17 @@ export interface LexicalLink {
 /** A dictionary's synonyms in rarer senses than this (sum of both places) say nothing of technical prose. */
 export const RAREST_SENSES = 3;
 
-/** The relation that our list knows, else the dictionary's, or undefined. */
-export function lexicalLink(a: string, b: string, pos: EquivalentPos): LexicalLink | undefined {
-  const set = areEquivalent(a, b, pos);
+/**
+ * The relation that our list knows, else the dictionary's, or undefined.
+ * @param keyOf gives a term's key; who asks about many pairs of the same words keeps them
+ */
+export function lexicalLink(
+  a: string,
+  b: string,
+  pos: EquivalentPos,
+  keyOf: (word: string) => string = termKey,
+): LexicalLink | undefined {
+  const set = equivalentByKeys(keyOf(a), keyOf(b), pos);
   if (set !== undefined) return { source: 'list', strength: set.distinct === undefined ? 1 : 0.65 };
   const relation = synonymy(a, b, pos);
   if (typeof relation !== 'object' || relation.rankSum > RAREST_SENSES) return undefined;
@@ -28,6 +36,7 @@ export function lexicalLink(a: string, b: string, pos: EquivalentPos): LexicalLi
 export class Meanings {
   private readonly known = new Map<string, readonly number[]>();
   private readonly setsOf = new Map<string, number[]>();
+  private readonly keys = new Map<string, string>();
 
   constructor(private readonly parts: readonly EquivalentPos[]) {
     equivalentSets().forEach(({ pos, terms }, index) => {
@@ -39,6 +48,13 @@ export class Meanings {
       }
     });
   }
+
+  /** A word's {@link termKey}, found once. */
+  readonly keyOf = (word: string): string => {
+    let key = this.keys.get(word);
+    if (key === undefined) this.keys.set(word, (key = termKey(word)));
+    return key;
+  };
 
   of(word: string): readonly number[] {
     let found = this.known.get(word);
@@ -69,7 +85,7 @@ export class Meanings {
   }
 
   private find(word: string): number[] {
-    const found = [...(this.setsOf.get(termKey(word)) ?? [])];
+    const found = [...(this.setsOf.get(this.keyOf(word)) ?? [])];
     this.parts.forEach((part, place) => {
       const table = wordNetTable(part);
       const lemma = table.numberOf(word);

@@ -8,7 +8,7 @@ import { confidenceOf } from './score.js';
 /** Below so many uses, likeness in use is chance. */
 const FEWEST_USES = 100;
 /** All pairs of terms are compared, of the most used ones. */
-const MOST_TERMS = 200;
+const MOST_TERMS = 120;
 /** Each must be among so many nearest neighbours of the other. */
 const NEAREST = 2;
 /** Least share of the similarity that two names of one thing have. */

@@ -13,49 +13,58 @@ export interface Destinations {
   of(uri: string, target: string): readonly Passage[];
 }
 
-/** Reads the titles and headings of all documents. */
+/** Reads the titles and headings of all documents; anchors are made of those headings alone that some link may lead to. */
 export function readDestinations(corpus: Corpus): Destinations {
   const { stream, documents } = corpus;
   const pages = new Map<string, number>();
   /** Pages by the last steps of their path; −1 where two share them. */
   const byEnding = new Map<string, number>();
   const names: Passage[][] = [];
-  const headings: Map<string, Passage>[] = [];
-  const anywhere = new Map<string, Passage | undefined>();
+  const headings: Passage[][] = [];
   let block = 0;
   documents.forEach(({ uri, facts }, document) => {
     const place = resolveTarget(uri, '');
     pages.set(place, document);
     for (const ending of endingsOf(place)) byEnding.set(ending, byEnding.has(ending) ? -1 : document);
-    const named: Passage[] = [];
-    const own = new Map<string, Passage>();
-    let hasHeading = false;
+    const titles: Passage[] = [];
+    const own: Passage[] = [];
     for (let at = 0; at < facts.blockKind.length; at++, block++) {
+      const kind = facts.blockKind[at]!;
+      if (kind !== TITLE && kind !== HEADING) continue;
       const passage = { first: stream.blockFirst[block]!, end: stream.blockFirst[block + 1]! };
-      if (facts.blockKind[at] === TITLE) named.push(passage);
-      if (facts.blockKind[at] !== HEADING) continue;
-      if (!hasHeading) named.push(passage);
-      hasHeading = true;
-      const anchor = anchorOf(textOf(corpus, passage));
-      if (!own.has(anchor)) own.set(anchor, passage);
-      if (anchor.length > 0) anywhere.set(anchor, anywhere.has(anchor) ? undefined : passage);
+      (kind === TITLE ? titles : own).push(passage);
     }
-    names.push(named);
+    names.push([...titles, ...own.slice(0, 1)]);
     headings.push(own);
   });
+  const anchors: (ReadonlyMap<string, Passage> | undefined)[] = [];
+  const anchorsOf = (document: number): ReadonlyMap<string, Passage> =>
+    (anchors[document] ??= new Map(
+      [...headings[document]!].reverse().map((heading) => [anchorOf(textOf(corpus, heading)), heading]),
+    ));
+  let anywhere: Map<string, Passage | undefined> | undefined;
+  const findAnywhere = (label: string): Passage | undefined => {
+    if (anywhere === undefined) {
+      anywhere = new Map();
+      for (const heading of headings.flat()) {
+        const anchor = anchorOf(textOf(corpus, heading));
+        anywhere.set(anchor, anywhere.has(anchor) ? undefined : heading);
+      }
+    }
+    return label === '' ? undefined : anywhere.get(label);
+  };
   return {
     of: (uri, target) => {
       const [path = '', anchor = ''] = target.replace(/\{\{[^}]*\}\}/g, '').split('#', 2);
       if (/^[a-z][a-z\d+.-]*:/i.test(path)) return [];
-      const place = resolveTarget(uri, path);
-      const document = pages.get(place) ?? ofEnding(byEnding, path);
+      const document = pages.get(resolveTarget(uri, path)) ?? ofEnding(byEnding, path);
       if (anchor !== '') {
-        const found = document === undefined ? undefined : headings[document]!.get(anchorOf(anchor));
+        const found = document === undefined ? undefined : anchorsOf(document).get(anchorOf(anchor));
         return found === undefined ? [] : [found];
       }
       if (document !== undefined) return names[document]!;
       // A label without a path, as cross-references have it, names a heading by its words.
-      const labelled = /[/.]/.test(path) ? undefined : anywhere.get(anchorOf(path));
+      const labelled = /[/.]/.test(path) ? undefined : findAnywhere(anchorOf(path));
       return labelled === undefined ? [] : [labelled];
     },
   };

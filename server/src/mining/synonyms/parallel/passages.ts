@@ -60,13 +60,19 @@ export class PassageReader {
     private readonly segments: Segments,
   ) {}
 
+  /** Where the last passage ended among the occurrences of terms: passages mostly follow one another. */
+  private next = 0;
+
   /** The units of a passage; a term counts where it lies wholly inside. */
   read({ first, end }: Passage): Reading {
     const { stream } = this.corpus;
     const { segments } = this;
     const units: number[] = [];
     const rows: number[] = [];
-    let at = firstAtOrAfter(segments.first, first);
+    let at = this.next;
+    const isBehind = at === 0 || segments.first[at - 1]! < first;
+    if (!isBehind || (at < segments.count && first - segments.first[at]! > NEARBY))
+      at = firstAtOrAfter(segments.first, first);
     for (let row = first; row < end;) {
       while (at < segments.count && segments.first[at]! < row) at++;
       const isTerm = at < segments.count && segments.first[at] === row && row + segments.length[at]! <= end;
@@ -76,9 +82,13 @@ export class PassageReader {
       }
       row += isTerm ? segments.length[at]! : 1;
     }
+    this.next = at;
     return { units, rows };
   }
 }
+
+/** Fewer rows than this are walked, not searched. */
+const NEARBY = 200;
 
 /** Content words; numbers and stand-ins for code tell passages apart as words do. */
 function tellsApart(flags: number, tag: number): boolean {

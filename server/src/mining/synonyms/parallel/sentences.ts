@@ -1,4 +1,5 @@
 // Near-duplicate sentences: two that are alike but for one term put one for the other.
+import { PairTable } from '../../../base/pairTable.js';
 import type { Work } from '../../../base/work.js';
 import type { TokenStream } from '../../../corpus/stream.js';
 import { TAG, TokenFlag } from '../../../tokens/tokens.js';
@@ -32,7 +33,7 @@ export function* findNearSentences(reader: PassageReader): Work<Substitution[]> 
 function fileUnder(stream: TokenStream, { units, rows }: Reading, frames: FrameIndex): void {
   const n = units.length;
   if (n <= FEWEST_COMMON || n > LONGEST) return;
-  const suffix = new Int32Array(n + 1);
+  suffix[n] = 0;
   for (let at = n - 1; at >= 0; at--) suffix[at] = mix(suffix[at + 1]!, units[at]!);
   let prefix = n;
   for (let at = 0; at < n; at++) {
@@ -42,17 +43,22 @@ function fileUnder(stream: TokenStream, { units, rows }: Reading, frames: FrameI
   }
 }
 
+/** The hashes of what stands from each unit of a sentence to its end; one column for all sentences, read from the last unit on. */
+const suffix = new Int32Array(LONGEST + 1);
+
 /** Units by the frame that they fill, in order of their rows; columns, since there are as many as words. */
 class FrameIndex {
-  private readonly last = new Map<number, number>();
+  /** Frames by two hashes of 31 bits, of what stands before and behind the gap. */
+  private readonly frames = new PairTable();
+  private readonly last: number[] = [];
   private readonly unit: number[] = [];
   private readonly row: number[] = [];
   private readonly before: number[] = [];
 
   add(prefix: number, suffix: number, unit: number, row: number): void {
-    const key = (prefix >>> 0) * 0x200000 + (suffix >>> 11);
-    const before = this.last.get(key) ?? -1;
-    this.last.set(key, this.unit.length);
+    const frame = this.frames.idOf(prefix >>> 1, suffix >>> 1);
+    const before = frame < this.last.length ? this.last[frame]! : -1;
+    this.last[frame] = this.unit.length;
     this.unit.push(unit);
     this.row.push(row);
     this.before.push(before);
@@ -60,7 +66,7 @@ class FrameIndex {
 
   substitutions(): Substitution[] {
     const found: Substitution[] = [];
-    for (const last of this.last.values()) {
+    for (const last of this.last) {
       if (this.before[last]! < 0) continue;
       const rowOf = new Map<number, number>();
       for (let at = last; at >= 0; at = this.before[at]!) rowOf.set(this.unit[at]!, this.row[at]!);
