@@ -17,7 +17,8 @@ export function readApiDescription(source: SourceText): Reading {
   const { texts, problems } = /^\uFEFF?\s*\{/.test(text) ? textsOfJson(text) : textsOfYaml(text);
   const blocks = texts.flatMap(({ key, embedded }): ProseBlock[] => {
     // CommonMark may be used in descriptions (OpenAPI 3.1.0, “Rich Text Formatting”).
-    const { prose } = readMarkdown({ ...source, format: 'markdown', text: embedded.text });
+    const markdown = { ...source, format: 'markdown', text: embedded.text } as const;
+    const { prose } = readMarkdown(markdown, { frontMatter: false, glossary: false });
     const kind = KINDS[key];
     return liftBlocks(prose.blocks, embedded).map(({ start, content }) => ({
       start,
