@@ -110,6 +110,18 @@ describe('nouns', () => {
     ).toEqual([]);
   });
 
+  it.each(['is not to be confused with', 'is different from', 'differs from', ', unlike', ', as opposed to'])(
+    'takes “%s” for two things',
+    (words) => {
+      const apart = ['In spring', 'At sea', 'On land'].map(
+        (where) => `${where} the search bar ${words} the search box.`,
+      );
+      expect(
+        idsOf(ask(...pagesOf('search bar'), ...pagesOf('search box').map((text) => `Note. ${text}`), ...apart)),
+      ).toEqual([]);
+    },
+  );
+
   it('takes separate headings for two things', () => {
     const pages = [...pagesOf('search bar'), ...pagesOf('search box').map((text) => `Note. ${text}`)];
     const separate = ['one', 'two', 'three'].map(

@@ -32,7 +32,9 @@ const COORDINATING = new Set([
 ]);
 const CONTRASTING = new Set(
   `to|into|than|versus|vs|vs.|rather than|, not|not|but not|instead of|, rather than|, instead of|over|in contrast to|
-  |unlike|, unlike|, whereas|, while|from|with|by`
+  |unlike|, unlike|, whereas|, while|from|with|by|as opposed to|, as opposed to|compared to|compared with|differs from|differ from
+  |is different from|are different from|is not|are not|is not to be confused with|are not to be confused with
+  |not to be confused with|, not to be confused with|, which is not|( not|( not to be confused with`
     .split('|')
     .map((words) => words.trim()),
 );
@@ -57,7 +59,7 @@ const PASSING = new Set([
   'new',
 ]);
 /** Most tokens between two terms that are looked at. */
-const REACH = 5;
+const REACH = 8;
 /** Longest run of coordinated terms that is followed. */
 const LONGEST_LIST = 12;
 
