@@ -22,7 +22,7 @@ export function askGlossary(corpus: Corpus, glossary: Glossary, asked: readonly 
   const questions = new Map<string, Question>();
   for (const link of glossary.links) {
     // A short form and what it is short for are no mix where they are explained; another engine asks about the rest.
-    if (link.kind === 'short' || known.has(pairKey(link.fromKey, link.toKey))) continue;
+    if (link.kind === 'short' || link.kind === 'beside' || known.has(pairKey(link.fromKey, link.toKey))) continue;
     known.add(pairKey(link.fromKey, link.toKey));
     const question = questionOf(corpus, link, inEntries);
     if (question !== undefined) questions.set(question.id, question);

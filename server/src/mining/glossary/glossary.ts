@@ -11,8 +11,11 @@ export interface GlossaryLink {
   /** Keys of both names. */
   readonly fromKey: string;
   readonly toKey: string;
-  /** `see`: the entry sends on to the other, preferred name. `also`: the other is a further name of what the entry is about. */
-  readonly kind: 'see' | 'also' | 'short';
+  /**
+   * `see`: the entry sends on to the other, preferred name. `also`: the other is a further name of what the entry is about.
+   * `short`: the headword is short for it. `beside`: both stand over one entry, which lists of entries without definitions do too.
+   */
+  readonly kind: 'see' | 'also' | 'short' | 'beside';
   /** Index of the document in the corpus. */
   readonly document: number;
 }
@@ -97,7 +100,7 @@ export class Glossary {
         if (!this.explained.has(key)) this.explained.set(key, { name, document, entry });
       }
     }
-    const others: { kind: GlossaryLink['kind']; to: string }[] = names.slice(1).map((to) => ({ kind: 'also', to }));
+    const others: { kind: GlossaryLink['kind']; to: string }[] = names.slice(1).map((to) => ({ kind: 'beside', to }));
     if (entry.see !== undefined) others.push({ kind: 'see', to: this.textOf(document, entry.see) });
     for (const range of entry.alsoCalled) others.push({ kind: 'also', to: this.textOf(document, range) });
     for (const range of entry.shortFor) others.push({ kind: 'short', to: this.textOf(document, range) });

@@ -28,7 +28,7 @@ function withGlossary(corpus: Corpus, glossary: Glossary, question: Question): Q
   const { terms } = question;
   const link = glossary.links.find(
     ({ kind, fromKey, toKey }) =>
-      kind !== 'short' && keysOf(terms, glossary).has(fromKey) && keysOf(terms, glossary).has(toKey),
+      (kind === 'see' || kind === 'also') && keysOf(terms, glossary).has(fromKey) && keysOf(terms, glossary).has(toKey),
   );
   if (link !== undefined) {
     const preferred = termOfKey(terms, glossary, preferredKey(link))!;
