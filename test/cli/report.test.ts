@@ -35,7 +35,7 @@ async function run(words: readonly string[], termbase?: string): Promise<{ code:
         : Promise.resolve({ snapshot: snapshotOf(PAGES, termbase), rootUri: ROOT, leftOut: [] }),
     now: () => '2024-05-31',
   };
-  const code = await runCli(words, host, '0');
+  const code = await runCli(words, host);
   return { code, out, notes };
 }
 

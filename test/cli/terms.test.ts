@@ -36,7 +36,7 @@ async function run(...words: string[]): Promise<{ code: number; out: string; not
     emphasise: (text: string) => text,
     faint: (text: string) => text,
   };
-  const code = await runCli(words, host, '0.0.0');
+  const code = await runCli(words, host);
   return { code, out, notes };
 }
 

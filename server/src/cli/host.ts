@@ -30,6 +30,8 @@ export interface SurveyRequest {
 
 /** The world as the command line sees it. */
 export interface CliHost {
+  /** The version of this program, as Semantic Versioning writes it. */
+  readonly version: string;
   /** Writes the result: standard output. */
   write(text: string): void;
   /** Writes a note to standard error; one of the weight `error` says why a run ends, and is written even where notes are not wanted. */

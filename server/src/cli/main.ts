@@ -18,14 +18,14 @@ const COMMON: Readonly<Record<string, OptionRule>> = {
 };
 
 /** Runs one command line and gives the exit code: 0 clean, 1 findings, 2 cannot run. */
-export async function runCli(words: readonly string[], host: CliHost, version: string): Promise<number> {
+export async function runCli(words: readonly string[], host: CliHost): Promise<number> {
   const [name, ...rest] = words;
   if (name === undefined || name === '--help' || name === '-h' || name === 'help') {
     host.write(overview());
     return name === undefined ? Exit.cannotRun : Exit.clean;
   }
   if (name === '--version') {
-    host.write(`${version}\n`);
+    host.write(`${host.version}\n`);
     return Exit.clean;
   }
   const command = Object.hasOwn(SUBCOMMANDS, name) ? SUBCOMMANDS[name] : undefined;

@@ -52,7 +52,7 @@ export const verify: Subcommand = {
     sayProblems(host, snapshot, snapshot.documents.keys());
     const pages = new Set(found.map(({ uri }) => uri)).size;
     if (options.get('format') === 'sarif') {
-      host.write(toSarif(found, survey.rootUri));
+      host.write(toSarif(found, survey.rootUri, host.version));
     } else if (options.get('format') === 'json') {
       host.write(
         `${JSON.stringify({ documents: snapshot.documents.size, findings: found.map(toJson) }, undefined, 2)}\n`,

@@ -12,7 +12,7 @@ if (!serveAsWorker()) {
     if (error.code === 'EPIPE') process.exit(0);
     throw error;
   });
-  runCli(process.argv.slice(2), nodeHost(EVENWORD_VERSION), EVENWORD_VERSION).then(
+  runCli(process.argv.slice(2), nodeHost(EVENWORD_VERSION)).then(
     (code) => (process.exitCode = code),
     (error: unknown) => {
       // Node's own exit code 1 would say that pages break a decision.

@@ -20,6 +20,7 @@ export function nodeHost(version: string): CliHost {
     shown = text.length;
   };
   return {
+    version,
     write: (text) => void process.stdout.write(text),
     note: (text) => void process.stderr.write(text),
     progress,

@@ -27,7 +27,7 @@ const LEVELS: Readonly<Record<Severity, 'note' | 'warning'>> = {
  * Writes findings as one SARIF run, results in the order given. Lines and columns count from 1, columns in UTF-16 units, the
  * end exclusive. The fingerprint `contextHash/v1` comes from the term and its sentence, so that it survives edits elsewhere.
  */
-export function toSarif(findings: readonly SarifFinding[], rootUri: string): string {
+export function toSarif(findings: readonly SarifFinding[], rootUri: string, version: string): string {
   const base = rootUri.endsWith('/') ? rootUri : `${rootUri}/`;
   const rules = Object.entries(RULES) as [FindingCode, (typeof RULES)[FindingCode]][];
   const seen = new Map<string, number>();
@@ -67,6 +67,7 @@ export function toSarif(findings: readonly SarifFinding[], rootUri: string): str
         tool: {
           driver: {
             name: 'Evenword',
+            semanticVersion: version,
             rules: rules.map(([id, { short, full, help, level }]) => ({
               id,
               shortDescription: { text: short },

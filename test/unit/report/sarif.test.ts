@@ -47,7 +47,7 @@ function findingsIn(snapshot: Snapshot): SarifFinding[] {
 }
 
 function runOf(pages: Readonly<Record<string, string>>): Log['runs'][number] {
-  return (JSON.parse(toSarif(findingsIn(snapshotOf(pages, TERMBASE)), ROOT)) as Log).runs[0]!;
+  return (JSON.parse(toSarif(findingsIn(snapshotOf(pages, TERMBASE)), ROOT, '1.2.3')) as Log).runs[0]!;
 }
 
 describe('findings as SARIF', () => {
@@ -56,10 +56,10 @@ describe('findings as SARIF', () => {
     addFormats(ajv);
     const validate = ajv.compile(JSON.parse(readFileSync(schemaFile, 'utf8')) as object);
     for (const pages of [PAGES, { 'a.md': 'Nothing.' }]) {
-      const log: unknown = JSON.parse(toSarif(findingsIn(snapshotOf(pages, TERMBASE)), ROOT));
+      const log: unknown = JSON.parse(toSarif(findingsIn(snapshotOf(pages, TERMBASE)), ROOT, '1.2.3'));
       expect(validate(log), JSON.stringify(validate.errors)).toBe(true);
     }
-    const broken = toSarif([], ROOT).replace('utf16CodeUnits', 'utf8CodeUnits');
+    const broken = toSarif([], ROOT, '1.2.3').replace('utf16CodeUnits', 'utf8CodeUnits');
     expect(validate(JSON.parse(broken))).toBe(false);
   });
 
