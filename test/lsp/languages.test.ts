@@ -30,7 +30,9 @@ describe('a workspace in two languages', () => {
     await client.open(page, BILINGUAL_PAGES['fr/debut.md']!);
     await eventually('hints in French', () => client.shown(page).length > 0);
     expect(
-      client.shown(page).every(({ code, message }) => code === 'mixed-terms' && /mot.clé/.test(JSON.stringify(message))),
+      client
+        .shown(page)
+        .every(({ code, message }) => code === 'mixed-terms' && /mot.clé/.test(JSON.stringify(message))),
     ).toBe(true);
     // Only the English paragraph may be asked about the datalogger.
     expect(client.shown(notes).filter(({ range }) => range.start.line > 0)).toEqual([]);
