@@ -71,6 +71,22 @@ describe('nouns', () => {
     expect(questions[0]!.reasons[0]!.text).toContain('“host”');
   });
 
+  it('says of three terms once what they differ in and where all are used', () => {
+    const [question] = ask(
+      ...pagesOf('remote machine'),
+      ...pagesOf('remote host').map((text) => `Note. ${text}`),
+      ...pagesOf('remote node').map((text) => `Hint. ${text}`),
+    );
+    expect(question!.terms).toHaveLength(3);
+    const texts = question!.reasons.map(({ text }) => text);
+    const told = texts.filter((text) => text.startsWith('they differ only in'));
+    expect(told).toHaveLength(1);
+    for (const word of ['machine', 'host', 'node']) expect(told[0]).toContain(`“${word}”`);
+    expect(texts.filter((text) => text.includes('are used in the same places'))).toEqual([
+      expect.stringMatching(/^all are used in the same places: /),
+    ]);
+  });
+
   it('asks what the documents themselves say: “A, also called B”', () => {
     const questions = ask(
       'The thrash pen, also called the holding cell, is closed at night.',

@@ -32,6 +32,7 @@ export function pairByComponents(terms: readonly Term[], pairs: PairCollector): 
         // A differing head makes two kinds of thing more easily than a differing modifier.
         strength: link.strength * (isHead ? 0.8 : 1),
         text: `they differ only in “${words[i]!}” and “${words[j]!}”, which ${says}`,
+        parts: { words: [words[i]!, words[j]!], says },
         value: link.strength,
       });
     });

@@ -22,6 +22,8 @@ export interface Evidence {
   readonly text: string;
   /** The figure behind it. */
   readonly value: number;
+  /** For a differing part: the two words, and how the sentence ends. */
+  readonly parts?: { readonly words: readonly [string, string]; readonly says: string };
 }
 
 /** Two terms by their index, the smaller first. */

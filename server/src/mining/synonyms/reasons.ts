@@ -17,8 +17,18 @@ export function reasonsOf(pairs: readonly JudgedPair[], contexts: Contexts): Rea
     said.add(reason.text);
     reasons.push(reason);
   };
-  for (const { evidence } of pairs) for (const { kind, text, value } of evidence) say({ kind, text, value });
-  for (const { a, b } of pairs) say(sharedFrames(contexts, contexts.vectors[a]!, contexts.vectors[b]!));
+  for (const { evidence } of pairs) {
+    for (const { kind, text, value, parts } of evidence) {
+      say(parts === undefined || pairs.length === 1 ? { kind, text, value } : differingParts(pairs));
+    }
+  }
+  const terms = [...new Set(pairs.flatMap(({ a, b }) => [a, b]))];
+  say(
+    sharedFrames(
+      contexts,
+      terms.map((term) => contexts.vectors[term]!),
+    ),
+  );
   for (const { known } of pairs) {
     const { rankOfA, rankOfB } = known.likeness;
     if (rankOfA <= NEAREST && rankOfB <= NEAREST) {
@@ -33,4 +43,13 @@ export function reasonsOf(pairs: readonly JudgedPair[], contexts: Contexts): Rea
       say({ kind: 'side-by-side', text: `against it: both stand side by side ${times(beside)}`, value: beside });
   }
   return reasons;
+}
+
+/** What three or more terms differ in, said once. */
+function differingParts(pairs: readonly JudgedPair[]): Reason {
+  const parts = pairs.flatMap(({ evidence }) => evidence.filter((each) => each.parts !== undefined));
+  const words = [...new Set(parts.flatMap((each) => each.parts!.words))].map((word) => `“${word}”`);
+  const listed = `${words.slice(0, -1).join(', ')} and ${words.at(-1)!}`;
+  const value = Math.min(...parts.map((each) => each.value));
+  return { kind: 'component', text: `they differ only in ${listed}, which ${parts[0]!.parts!.says}`, value };
 }
