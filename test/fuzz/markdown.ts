@@ -115,6 +115,7 @@ export const MARKDOWN_PARTS = [
     'export const d = {\n',
     '{/* ',
   ],
+  ...['# Glossary\n\n', '**term** 🙂**: said ', '- **one** – `two` &amp; '],
 ];
 
 /** Mixtures of up to forty pieces. */

@@ -4,109 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { OPAQUE, SourceCursor, sourceEnd, sourceStart } from '../../server/src/prose/prose.js';
 import { read } from '../../server/src/prose/read.js';
 import type { Format } from '../../server/src/text/sourceText.js';
-
-const PARTS = [
-  ...['word', 'two words', 'naïve', '漢字', '🙂', '\u0301', '"a b c d"', '“e f g h”', '.', ', '],
-  ...[
-    ' ',
-    '  ',
-    '\t',
-    '\n',
-    '\n\n',
-    '\r\n',
-    '\r',
-    '  \n',
-    '\\\n',
-    '*',
-    '**',
-    '_',
-    '~~',
-    '`',
-    '``',
-    '[',
-    ']',
-    '](x)',
-    '![',
-    '[^a]',
-    '<b>',
-  ],
-  ...[
-    '</b>',
-    '<kbd>',
-    '</kbd>',
-    '<q>',
-    '<a href="y">',
-    '</a>',
-    '<code>',
-    '</code>',
-    '<br>',
-    '&amp;',
-    '&#65;',
-    '&no;',
-    '\\*',
-    '\\',
-  ],
-  ...[
-    '# ',
-    '> ',
-    '> [!WARNING]\n',
-    '- ',
-    '1. ',
-    '    ',
-    '| ',
-    '|-|-|\n',
-    '```\n',
-    '---\n',
-    '===\n',
-    '!!! note\n    ',
-    ':::tip x\n',
-    ':::\n',
-  ],
-  ...[
-    '{{ a }}',
-    '{% b',
-    '${c}',
-    ':d:',
-    'https://e.f',
-    'g@h.i',
-    '[j]: k\n',
-    '---\ntitle: "l \\" m"\n---\n',
-    '\uFEFF',
-    '\uFFFC',
-    '\0',
-    '\ud800',
-  ],
-  ...[
-    '```{note} a *b*\n:c: d\n',
-    '{{< warning >}}\n',
-    '{: .danger}\n',
-    '# Glossary\n\n',
-    '**term** 🙂**: said ',
-    '- **one** – `two` &amp; ',
-    'Term\n: ',
-    '{% highlight %}\n',
-    '{% endhighlight %}\n',
-    '<div>\n',
-    '</div>\n\n',
-    '<table><tr><td>',
-    '<p title="n o">',
-    '> <blockquote>\n> ',
-  ],
-  ...[
-    '{x}',
-    "{' '}",
-    '{',
-    '}',
-    '<A b="c &lt; d" title="e f">',
-    '</A>',
-    '<B/>',
-    'import C from "d"\n\n',
-    '<td>',
-    '</td>',
-  ],
-];
-
-const soups = fc.array(fc.constantFrom(...PARTS), { maxLength: 40 }).map((parts) => parts.join(''));
+import { markdownSoup } from '../fuzz/markdown.js';
 
 function expectSoundMap(text: string, format: Format): void {
   let before = 0;
@@ -145,7 +43,7 @@ function expectSoundMap(text: string, format: Format): void {
 describe.each<Format>(['markdown', 'mdx', 'plaintext'])('the prose of any %s', (format) => {
   it('maps unit by unit to its source', () => {
     fc.assert(
-      fc.property(soups, (text) => expectSoundMap(text, format)),
+      fc.property(markdownSoup, (text) => expectSoundMap(text, format)),
       { numRuns: 600 },
     );
   });

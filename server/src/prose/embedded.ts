@@ -1,5 +1,5 @@
 // Prose that stands inside the strings of another format: a decoded text with a map to the source, and its blocks lifted out.
-import { OPAQUE, sourceEnd, sourceStart, type ProseBlock } from './prose.js';
+import { OPAQUE, pieceAt, sourceEnd, sourceStart, type ProseBlock } from './prose.js';
 
 /**
  * A text decoded from a source. `pieces` holds triples (offset in `text`, offset in the source, length in the source),
@@ -83,23 +83,11 @@ class SourceMap {
   /** Visits the pieces that `[from, to)` of the text touches, cut to it: offset in the text, place and length in the source. */
   steps(from: number, to: number, visit: (offset: number, source: number, sourceLength: number) => void): void {
     const { text, pieces } = this.block.content;
-    for (let i = this.pieceAt(from); i < pieces.length && pieces[i]! < to; i += 3) {
+    for (let i = pieceAt(pieces, from); i < pieces.length && pieces[i]! < to; i += 3) {
       const at = Math.max(from, pieces[i]!);
       const end = Math.min(to, pieces[i + 3] ?? text.length);
       const source = this.start(at);
       visit(at, source, this.end(end) - source);
     }
-  }
-
-  private pieceAt(offset: number): number {
-    const { pieces } = this.block.content;
-    let low = 0;
-    let high = pieces.length / 3 - 1;
-    while (low < high) {
-      const middle = (low + high + 1) >>> 1;
-      if (pieces[middle * 3]! <= offset) low = middle;
-      else high = middle - 1;
-    }
-    return low * 3;
   }
 }

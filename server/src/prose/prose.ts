@@ -133,7 +133,7 @@ function inStep(pieces: Uint32Array, at: number, text: string): boolean {
 }
 
 /** Index into `pieces` of the triple that covers a text offset. */
-function pieceAt(pieces: Uint32Array, offset: number): number {
+export function pieceAt(pieces: Uint32Array, offset: number): number {
   let low = 0;
   let high = pieces.length / 3 - 1;
   while (low < high) {
