@@ -1,13 +1,14 @@
 // Pairs of whole numbers to small whole numbers: a hash table over typed arrays, append-only.
 import { invariant } from './invariant.js';
 
-const EMPTY = -1;
+const EMPTY = 0;
 
 /** Gives each distinct pair `(left, right)` of numbers below 2^31 a number of its own, in order of arrival. */
 export class PairTable {
   private lefts = new Int32Array(1024);
   private rights = new Int32Array(1024);
-  private slots = new Int32Array(2048).fill(EMPTY);
+  /** Numbers of pairs plus one, at the places that their hashes give. */
+  private slots = new Int32Array(2048);
   private count = 0;
 
   get size(): number {
@@ -18,12 +19,12 @@ export class PairTable {
   idOf(left: number, right: number): number {
     const slot = this.slotOf(left, right);
     const found = this.slots[slot]!;
-    if (found !== EMPTY) return found;
+    if (found !== EMPTY) return found - 1;
     if (this.count === this.lefts.length) this.growRows();
     const id = this.count++;
     this.lefts[id] = left;
     this.rights[id] = right;
-    this.slots[slot] = id;
+    this.slots[slot] = id + 1;
     if (this.count * 2 > this.slots.length) this.growSlots();
     return id;
   }
@@ -31,7 +32,7 @@ export class PairTable {
   /** The number of a pair, or undefined where it was never seen. */
   find(left: number, right: number): number | undefined {
     const found = this.slots[this.slotOf(left, right)]!;
-    return found === EMPTY ? undefined : found;
+    return found === EMPTY ? undefined : found - 1;
   }
 
   leftOf(id: number): number {
@@ -46,8 +47,8 @@ export class PairTable {
     const mask = this.slots.length - 1;
     let slot = mix(left, right) & mask;
     for (;;) {
-      const id = this.slots[slot]!;
-      if (id === EMPTY || (this.lefts[id] === left && this.rights[id] === right)) return slot;
+      const found = this.slots[slot]!;
+      if (found === EMPTY || (this.lefts[found - 1] === left && this.rights[found - 1] === right)) return slot;
       slot = (slot + 1) & mask;
     }
   }
@@ -63,8 +64,14 @@ export class PairTable {
   }
 
   private growSlots(): void {
-    this.slots = new Int32Array(this.slots.length * 2).fill(EMPTY);
-    for (let id = 0; id < this.count; id++) this.slots[this.slotOf(this.lefts[id]!, this.rights[id]!)] = id;
+    const slots = (this.slots = new Int32Array(this.slots.length * 2));
+    const mask = slots.length - 1;
+    // All pairs differ: a free place is all that is looked for.
+    for (let id = 0; id < this.count; id++) {
+      let slot = mix(this.lefts[id]!, this.rights[id]!) & mask;
+      while (slots[slot] !== EMPTY) slot = (slot + 1) & mask;
+      slots[slot] = id + 1;
+    }
   }
 }
 

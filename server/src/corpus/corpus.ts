@@ -123,10 +123,11 @@ export class Corpus {
     const blockUses = this.blockUses.edit();
     const columns = { words: this.wordUses.edit(), grams: this.gramUses.edit() };
     const count = (document: CorpusDocument, sign: 1 | -1): void => {
-      document.blocks.forEach((block, index) => {
-        const uses = blockUses.add(block, sign);
+      const { blocks } = document;
+      for (let index = 0; index < blocks.length; index++) {
+        const uses = blockUses.add(blocks[index]!, sign);
         if (uses === (sign === 1 ? 1 : 0)) countBlock(document, index, sign, this.tables, columns);
-      });
+      }
     };
     const documents: CorpusDocument[] = [];
     for (const document of this.documents) {
@@ -146,14 +147,16 @@ export class Corpus {
 
   private number(uri: string, facts: DocumentFacts): CorpusDocument {
     const { vocabulary, blockIds } = this.tables;
-    const ids = Uint32Array.from(facts.words, (word) => vocabulary.idOf(word));
-    const words = Array.from(ids, (id) => vocabulary.textOf(id));
+    const ids = new Uint32Array(facts.words.length);
+    // The vocabulary's own strings: documents share them, and let go of those that came with the facts.
+    const words = facts.words.map((word, index) => vocabulary.textOf((ids[index] = vocabulary.idOf(word))));
     const blocks = new Uint32Array(facts.blockHash.length);
-    facts.blockHash.forEach((hash, index) => {
+    for (let index = 0; index < blocks.length; index++) {
+      const hash = facts.blockHash[index]!;
       let id = blockIds.get(hash);
       if (id === undefined) blockIds.set(hash, (id = blockIds.size));
       blocks[index] = id;
-    });
+    }
     return { uri, facts: { ...facts, words }, ids, blocks };
   }
 }

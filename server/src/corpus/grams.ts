@@ -11,7 +11,7 @@ export const LONGEST_GRAM = 4;
 export class GramTable {
   private readonly pairs = new PairTable();
   /** The length in words of each gram. */
-  private readonly lengths: number[] = [];
+  private lengths = new Uint8Array(1024);
 
   get size(): number {
     return this.pairs.size;
@@ -20,7 +20,12 @@ export class GramTable {
   /** The id of `prefix` followed by `word`; `length` is the length of the whole. A prefix of one word is its word id. */
   extend(prefix: number, word: number, length: number): number {
     const id = this.pairs.idOf(leftKey(prefix, length), word);
-    if (id === this.lengths.length) this.lengths.push(length);
+    if (id >= this.lengths.length) {
+      const longer = new Uint8Array(id * 2);
+      longer.set(this.lengths);
+      this.lengths = longer;
+    }
+    this.lengths[id] = length;
     return id;
   }
 

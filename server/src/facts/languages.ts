@@ -28,15 +28,24 @@ const MOST_JOINED = 3000;
  * the document's. That is what the document states, else what its blocks are mostly in, else what its path names, else English.
  * Equal prose and equal paths have equal languages.
  * @param pathLanguage what the document's path names, where it names a language
- * @param told keeps what blocks are told to be: worth its memory for documents that are being edited alone
+ * @param kept keeps what blocks are told to be: worth its memory for documents that are being edited alone
  */
-export function languagesOf(prose: Prose, pathLanguage?: string, told?: ToldBlocks): ProseLanguages {
+export function languagesOf(prose: Prose, pathLanguage?: string, kept?: ToldBlocks): ProseLanguages {
   const tell: Tell = (content, expected) =>
-    told === undefined ? languageOfText(content.text, expected) : told.of(content, expected);
+    kept === undefined ? languageOfText(content.text, expected) : kept.of(content, expected);
   const contents = prose.blocks.map(({ content }) => content);
-  const document = primaryLanguage(prose.language) ?? documentLanguage(contents, pathLanguage, tell);
+  const sampled = new Map<BlockContent, string | undefined>();
+  const sample: Tell = (content, expected) => {
+    const language = tell(content, expected);
+    sampled.set(content, language);
+    return language;
+  };
+  const document = primaryLanguage(prose.language) ?? documentLanguage(contents, pathLanguage, sample);
+  // Samples were taken with the default expected: where the document is in that, they need not be told again.
+  const told = (content: BlockContent): string | undefined =>
+    document === DEFAULT_LANGUAGE && sampled.has(content) ? sampled.get(content) : tell(content, document);
   const ofBlock = (content: BlockContent): string =>
-    primaryLanguage(content.language) ?? (isOpen(content.zones) ? tell(content, document) : undefined) ?? document;
+    primaryLanguage(content.language) ?? (isOpen(content.zones) ? told(content) : undefined) ?? document;
   return { document, blocks: contents.map(ofBlock) };
 }
 

@@ -11,6 +11,7 @@ const MOST_WORDS = 150;
 /** … and so many at the start where their share of English grammar is as high as English prose has it. */
 const FIRST_WORDS = 24;
 const PLAINLY_ENGLISH = 0.35;
+const FIRST_GRAMMAR = Math.ceil(PLAINLY_ENGLISH * FIRST_WORDS);
 /** So many UTF-16 units are shown to the detector. */
 const MOST_UNITS = 1000;
 /** From this share of words of grammar up a text is English: in other languages look-alikes (in, die, a) make up a tenth. */
@@ -81,10 +82,11 @@ function atFirstSight(text: string): 'short' | 'en' | 'open' {
       if (unit > 0x7f && (unit < 0x2000 || unit > 0x206f) && unit !== OPAQUE_UNIT) isAscii = false;
     } else {
       words++;
+      if (grammar >= FIRST_GRAMMAR) continue;
       if (isStopWord(text.slice(start, at).toLowerCase(), 'en')) grammar++;
     }
   }
-  if (words === FIRST_WORDS && grammar >= PLAINLY_ENGLISH * words) return 'en';
+  if (words === FIRST_WORDS && grammar >= FIRST_GRAMMAR) return 'en';
   return isAscii && words < FEWEST_WORDS ? 'short' : 'open';
 }
 
