@@ -65,6 +65,13 @@ describe('evenword ask', () => {
     expect(err).toContain('noise.md');
     const quiet = await evenword(['ask', folder.path, '--quiet']);
     expect(quiet).toEqual({ code: 0, out, err: '' });
+    expect(err).toContain('write the answers into termbase.yaml');
+  });
+
+  it('says how many questions are open where it lists fewer', async () => {
+    const { out } = await evenword(['ask', 'samples/buoys', '--most', '2', '--quiet', '--no-history']);
+    expect(out).toMatch(/: \d+ open questions, of which 2 are listed\.\n/);
+    expect(out.match(/^ *\d+\. /gm)).toHaveLength(2);
   });
 
   it('says by name what it left out, and why', async () => {
@@ -122,6 +129,9 @@ describe('what cannot run', () => {
       expect(code).toBe(0);
       expect(out).toMatch(/evenword/);
     }
+    const help = (await evenword(['ask', '--help'])).out;
+    expect(help, 'a short option').toMatch(/^ {2}--most N {20}list no more/m);
+    expect(help, 'one too long for its column').toMatch(/^ {2}--weighting \S+\n {30}how much a context/m);
     expect((await evenword(['--version'])).out).toMatch(/^\d+\.\d+\.\d+\n$/);
   });
 });

@@ -100,6 +100,37 @@ describe('evenword compare', () => {
     expect(out).toMatch(/Evenword asks about them \(variant, \d+ % sure\)\.\n$/);
   });
 
+  it('takes no question about one term for a question about two forms of it', async () => {
+    const own = await temporaryFolder({
+      ...PAGES,
+      'spares.md':
+        '# Spares\n\nTwo data loggers lie in the hut. The data loggers are charged. Count the data loggers.\n',
+    });
+    try {
+      expect((await run('compare', 'data loggers', 'datalogger', own.path)).out).toContain('Evenword asks about them');
+      const { code, out } = await run('compare', 'data logger', 'data loggers', own.path);
+      expect(code).toBe(0);
+      expect(out).not.toContain('Evenword asks');
+    } finally {
+      await own.dispose();
+    }
+  });
+
+  it('says of two ways of writing, one of them a name in code, why they are not asked about', async () => {
+    const own = await temporaryFolder({
+      ...PAGES,
+      ...Object.fromEntries(
+        THINGS.map((thing) => [`reference/${thing}.md`, `${PAGES[`reference/${thing}.md`]!}Run \`datalogger\`.\n`]),
+      ),
+    });
+    try {
+      const { out } = await run('compare', 'data logger', 'datalogger', own.path);
+      expect(out).toMatch(/Evenword does not ask: they are two ways of writing/);
+    } finally {
+      await own.dispose();
+    }
+  });
+
   it('gives everything as JSON', async () => {
     const { out } = await run('compare', 'data logger', 'datalogger', folder.path, '--format', 'json');
     const found = JSON.parse(out) as {
@@ -155,12 +186,12 @@ describe('evenword compare', () => {
 describe('what cannot run', () => {
   it.each([
     [['companions'], /Name a term, then a folder/],
-    [['companions', 'logger'], /Name a folder/],
+    [['companions', 'logger'], /Name a term, then a folder/],
     [['companions', 'logger', '.', '--segment', 'page'], /--segment takes window, sentence/],
     [['companions', 'logger', '.', '--relation', 'rhyme'], /There is no relation “rhyme”/],
     [['companions', 'logger', '.', '--most', '0'], /--most takes a whole number from 1/],
     [['compare', 'logger'], /Name two terms/],
-    [['compare', 'logger', 'recorder'], /Name a folder/],
+    [['compare', 'logger', 'recorder'], /Name two terms, then a folder/],
     [['compare', 'a', 'b', '.', '--weighting', 'heavy'], /--weighting takes tf-idf, ppmi/],
     [['compare', 'a', 'b', '.', '--window', '3'], /--window goes with --context window/],
     [['ask', '.', '--context', 'window', '--window', '0'], /--window takes a whole number from 1 to 50/],

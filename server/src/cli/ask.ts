@@ -30,9 +30,13 @@ export const ask: Subcommand = {
     const survey = await surveyOrStop(host, given, true);
     if (survey === undefined) return Exit.cannotRun;
     const snapshot = kinds === undefined ? survey.snapshot : survey.snapshot.asking(kinds);
-    const open = snapshot.agendaAt(survey.rootUri).open.slice(0, most);
-    if (options.get('format') === 'json') host.write(`${JSON.stringify(toJson(snapshot, open), undefined, 2)}\n`);
-    else host.write(renderQuestions(snapshot, open, host));
+    const { open } = snapshot.agendaAt(survey.rootUri);
+    const shown = open.slice(0, most);
+    if (options.get('format') === 'json') host.write(`${JSON.stringify(toJson(snapshot, shown), undefined, 2)}\n`);
+    else {
+      host.write(renderQuestions(snapshot, shown, host, open.length));
+      if (shown.length > 0) host.note(`\nAnswer in VS Code, or write the answers into termbase.yaml.\n`);
+    }
     return Exit.clean;
   },
 };

@@ -36,7 +36,7 @@ export function renderCompanions(found: TermCompanions, host: CliHost): string {
   const { kind, all, withTerm } = segments;
   const share = kind === 'window' ? 'Words near it' : `Words that share its ${kind}s`;
   parts.push(`\n${host.emphasise(share)} ${host.faint(saysFloor(segments.floor))}\n`);
-  parts.push(...segments.companions.map((each) => renderCoOccurring(each, kind, withTerm, host)));
+  parts.push(...segments.companions.map((each) => renderCoOccurring(each, term, { kind, withTerm }, host)));
   if (segments.companions.length === 0) parts.push('  None more often than chance.\n');
   const units = kind === 'window' ? 'words of content near it' : `${kind}s with it`;
   parts.push(
@@ -62,14 +62,14 @@ function renderRelated(
 
 function renderCoOccurring(
   { word, count: times, documents, strength, lift, mutualInformation, ...rest }: WithExample<CoOccurring>,
-  kind: string,
-  withTerm: number,
+  term: string,
+  { kind, withTerm }: { readonly kind: string; readonly withTerm: number },
   host: CliHost,
 ): string {
   const held = kind === 'window' ? `${times} times` : `in ${times} of ${withTerm}`;
   const bits = `${lift.toFixed(1)} bits more than chance`;
   const told = rest.entropy > 0 ? Math.round((100 * mutualInformation) / rest.entropy) : 0;
-  const telling = told >= 1 ? `; the term settles ${told} % of whether it is there` : '';
+  const telling = told >= 1 ? `; where “${term}” stands settles ${told} % of where it does` : '';
   return `  ${host.emphasise(word)}  ${held}, on ${count(documents, 'page')}, strength ${strength.toFixed(1)}, ${bits}${telling}\n${sentence(rest.example, host)}`;
 }
 

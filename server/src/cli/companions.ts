@@ -27,7 +27,8 @@ export const companions: Subcommand = {
     ...FILE_OPTIONS,
   },
   async run({ options, operands: [term, ...operands] }, host) {
-    if (term === undefined || term.trim() === '') throw new UsageError('Name a term, then a folder of documentation.');
+    if (term === undefined || term.trim() === '' || operands.length === 0)
+      throw new UsageError('Name a term, then a folder of documentation.');
     const relations = readList<CompanionRelation>(options.get('relation'), COMPANION_RELATIONS, 'relation');
     const most = readMost(options.get('most')) ?? USUAL_MOST;
     const segment = (options.get('segment') ?? 'sentence') as SegmentKind;

@@ -21,7 +21,7 @@ export const compare: Subcommand = {
     ...FILE_OPTIONS,
   },
   async run({ options, operands: [a, b, ...operands] }, host) {
-    if (a === undefined || b === undefined || a.trim() === '' || b.trim() === '')
+    if (a === undefined || b === undefined || a.trim() === '' || b.trim() === '' || operands.length === 0)
       throw new UsageError('Name two terms, then a folder of documentation.');
     const survey = await surveyOrStop(host, { options, operands }, true);
     if (survey === undefined) return Exit.cannotRun;

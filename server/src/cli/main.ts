@@ -17,6 +17,10 @@ const COMMON: Readonly<Record<string, OptionRule>> = {
   help: { help: 'show this help' },
 };
 
+/** Where the help of an option or subcommand begins, behind the indentation of two. */
+const HELP_COLUMN = 28;
+const INDENT = ' '.repeat(HELP_COLUMN + 2);
+
 /** Runs one command line and gives the exit code: 0 clean, 1 findings, 2 cannot run. */
 export async function runCli(words: readonly string[], host: CliHost): Promise<number> {
   const [name, ...rest] = words;
@@ -49,7 +53,7 @@ export async function runCli(words: readonly string[], host: CliHost): Promise<n
 
 function overview(): string {
   const lines = Object.entries(SUBCOMMANDS).map(
-    ([name, { operands, summary }]) => `  ${`${name} ${operands}`.padEnd(28)}${summary}`,
+    ([name, { operands, summary }]) => `  ${`${name} ${operands}`.padEnd(HELP_COLUMN)}${summary}`,
   );
   return `evenword: one concept, one term
 
@@ -63,7 +67,8 @@ Exit codes: 0 clean, 1 findings, 2 cannot run.
 function helpOf(name: string, { summary, operands, options }: Subcommand): string {
   const rows = Object.entries({ ...options, ...COMMON }).map(([option, { value, choices, help }]) => {
     const left = `--${option}${value === undefined ? '' : ` ${choices === undefined ? value : choices.join('|')}`}`;
-    return `  ${left.padEnd(28)}${help}`;
+    // What is too long for its column has the help on a line of its own.
+    return left.length < HELP_COLUMN ? `  ${left.padEnd(HELP_COLUMN)}${help}` : `  ${left}\n${INDENT}${help}`;
   });
   return `evenword ${name} ${operands}\n${summary}\n\n${rows.join('\n')}\n`;
 }

@@ -5,10 +5,17 @@ import type { Snapshot } from '../engine/snapshot.js';
 import type { Question } from '../mining/question.js';
 import type { CliHost } from './host.js';
 
-/** The list of open questions, for a person. */
-export function renderQuestions(snapshot: Snapshot, questions: readonly Question[], host: CliHost): string {
+/** The list of questions, for a person, and how many are open in all. */
+export function renderQuestions(
+  snapshot: Snapshot,
+  questions: readonly Question[],
+  host: CliHost,
+  open: number,
+): string {
   const { documents, words } = snapshot.relations.size;
-  const head = `${plural(documents, 'page')}, ${plural(words, 'word')}: ${plural(questions.length, 'open question')}.\n`;
+  const few =
+    questions.length < open ? `, of which ${questions.length} ${questions.length === 1 ? 'is' : 'are'} listed` : '';
+  const head = `${plural(documents, 'page')}, ${plural(words, 'word')}: ${plural(open, 'open question')}${few}.\n`;
   if (questions.length === 0) return head;
   const examples = new ExampleFinder(snapshot);
   return (

@@ -7,9 +7,9 @@ import { UsageError } from './options.js';
 
 export const report: Subcommand = {
   summary: 'writes report.html, report.md and report.json: the state, open questions, decided concepts',
-  operands: 'DIR…',
+  operands: 'DIR… --out FOLDER',
   options: {
-    out: { value: 'FOLDER', help: 'where to write; made where it is missing' },
+    out: { value: 'FOLDER', help: 'where to write, made where it is missing; has to be given' },
     ...FILE_OPTIONS,
   },
   async run(given, host) {

@@ -100,9 +100,12 @@ function decisionAbout(snapshot: Snapshot, uri: string, { terms }: Comparison): 
 
 /** The surest question of any kind that asks about both. */
 function questionAbout(questions: readonly Question[], a: string, b: string): Question | undefined {
-  const names = (question: Question, text: string): boolean =>
-    question.terms.some((term) => [term, ...term.forms].some((form) => termKey(form.text) === termKey(text)));
-  const asking = questions.filter((question) => names(question, a) && names(question, b));
+  const named = ({ terms }: Question, text: string): number[] =>
+    terms.flatMap((term, at) => ([term, ...term.forms].some((form) => termKey(form.text) === termKey(text)) ? at : []));
+  // Two forms of one of its terms, such as singular and plural, are not what a question asks about.
+  const asking = questions.filter((question) =>
+    named(question, a).some((at) => named(question, b).some((other) => other !== at)),
+  );
   return asking.sort((x, y) => y.confidence - x.confidence || (x.id < y.id ? -1 : 1))[0];
 }
 

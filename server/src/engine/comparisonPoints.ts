@@ -112,11 +112,14 @@ function pointsAgainst({ terms, usage, companions, pastEdits }: Comparison, apar
     add('companions-alone', alone.length, `only “${terms[side].text}” goes with ${named}`);
   }
   const share = usage.similarity / usage.yardstick;
+  const percent = Math.round(share * 100);
   if (share < UNLIKE)
     add(
       'unlike',
       share,
-      `they are used only ${Math.round(share * 100)} % as alike as two halves of one term's own uses`,
+      percent === 0
+        ? 'the sentences around them have nothing telling in common'
+        : `they are used only ${percent} % as alike as two halves of one term's own uses`,
     );
   return points;
 }

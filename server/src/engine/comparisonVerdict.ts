@@ -6,7 +6,8 @@ import type { Refusal } from '../mining/synonyms/judge.js';
 import type { EngineSettings } from './snapshot.js';
 
 /** The stage that a pair of terms comes to on its way to a question. */
-export type Stage = 'decided' | 'asked' | 'asked-on-request' | Refusal | 'not-grounded' | 'too-weak' | 'verbs';
+export type Stage =
+  'decided' | 'asked' | 'asked-on-request' | Refusal | 'not-grounded' | 'too-weak' | 'verbs' | 'writing';
 
 /** What the tool would do about two terms. */
 export interface Verdict {
@@ -23,6 +24,9 @@ const REFUSED: Readonly<Record<Refusal, string>> = {
   usage: 'they are not used alike enough for what speaks for them',
   lexicon: 'they are opposites, members of one list, or forms that another kind of question asks about',
 };
+
+/** A term's letters and digits alone: what is left of it in every way of joining its words. */
+const letters = (text: string): string => text.toLowerCase().replace(/[^\p{L}\p{N}]/gu, '');
 
 /** The verdict; a decision in force comes before everything. */
 export function verdictOf(
@@ -49,6 +53,11 @@ export function verdictOf(
         : `Evenword asks about them on request alone (${kind}, ${sure}).`,
       question: { id, kind, confidence },
     };
+  }
+  if (letters(terms[0].text) === letters(terms[1].text)) {
+    const text =
+      'Evenword does not ask: they are two ways of writing, and too few places could take either. A word that the code on a page has as well counts as a name there.';
+    return { stage: 'writing', text };
   }
   if (terms.some(({ partOfSpeech }) => partOfSpeech === 'verb')) {
     const text =
