@@ -4,7 +4,6 @@ import type { Agenda } from '../decisions/decide.js';
 import type { CheckedTerm } from '../findings/checkedTerm.js';
 import type { Question, QuestionTerm } from '../mining/question.js';
 import { languageOfConcept } from '../termbase/language.js';
-import { primaryLanguage } from '../text/language.js';
 import { termKey } from '../termbase/termKey.js';
 
 /**
@@ -41,15 +40,11 @@ function decidedTerms(agenda: Agenda): CheckedTerm[] {
 
 function apartTerms({ decisions }: Agenda): CheckedTerm[] {
   const known = new Map<string, CheckedTerm>();
-  for (const { apart, language: stated } of decisions.chain) {
-    const language = primaryLanguage(stated);
+  for (const { apart } of decisions.chain) {
     for (const { terms } of apart) {
       for (const { text, key } of terms) {
         if (decisions.termsOf(text).length > 0 || known.has(key)) continue;
-        known.set(key, {
-          ...{ id: `apart ${key}`, text, status: 'apart', conceptId: `apart ${key}` },
-          ...(language !== undefined && { language }),
-        });
+        known.set(key, { id: `apart ${key}`, text, status: 'apart', conceptId: `apart ${key}` });
       }
     }
   }

@@ -1,4 +1,4 @@
-// Which entries of a termbase hold for a language: those that state it, and those that state none.
+// Which concepts of a termbase hold for a language: those that state it, and those that state none.
 import { primaryLanguage } from '../text/language.js';
 import type { ConceptEntry, Termbase } from './termbase.js';
 
@@ -7,12 +7,15 @@ export function languageOfConcept(concept: ConceptEntry, termbase: Termbase): st
   return primaryLanguage(concept.language ?? termbase.language);
 }
 
-/** A termbase without what it says of other languages; the same object where all of it holds. Without a language all does. */
+/**
+ * A termbase without the concepts of other languages; the same object where all of them hold. Without a language all do. What is
+ * kept apart or put off states no language: it is about its spellings wherever they stand, so that no answer is lost.
+ */
 export function inLanguage(termbase: Termbase, language: string | undefined): Termbase {
   if (language === undefined) return termbase;
-  const holds = (stated: string | undefined): boolean => stated === undefined || stated === language;
-  const concepts = termbase.concepts.filter((concept) => holds(languageOfConcept(concept, termbase)));
-  const isWhole = holds(primaryLanguage(termbase.language));
-  if (isWhole && concepts.length === termbase.concepts.length) return termbase;
-  return { ...termbase, concepts, ...(!isWhole && { apart: [], later: [] }) };
+  const concepts = termbase.concepts.filter((concept) => {
+    const stated = languageOfConcept(concept, termbase);
+    return stated === undefined || stated === language;
+  });
+  return concepts.length === termbase.concepts.length ? termbase : { ...termbase, concepts };
 }

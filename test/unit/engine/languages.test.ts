@@ -113,6 +113,16 @@ describe('an answer about another language than the file’s', () => {
     expect(found(after, '0.md')).toEqual(['Log-Datei', 'Log-Datei']);
   });
 
+  it.each(['apart', 'later'] as const)('settles the question where it is “%s”, which no language limits', (kind) => {
+    const { engine, ids } = ask('evenword: 1\nlanguage: en\n');
+    const answer = answerQuestion(engine.snapshot, root, '', ids[0]!, { kind });
+    if (answer.kind !== 'edit') throw new Error(answer.message);
+    const text = engine.snapshot.termbases[0]!.text + answer.edits.map(({ newText }) => newText).join('');
+    const after = engine.apply({ termbases: [{ uri: `${root}termbase.yaml`, text }] });
+    expect(after.termbases[0]!.problems).toEqual([]);
+    expect(after.agendaAt(root).open).toEqual([]);
+  });
+
   it('needs no language where the file states it, and is no longer asked for', () => {
     expect(
       ask('evenword: 1\nlanguage: de\nconcepts:\n  - preferred: Logdatei\n    deprecated: [Log-Datei]\n').ids,
