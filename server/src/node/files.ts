@@ -17,7 +17,7 @@ import { saysGenerated } from './generated.js';
 import { newerCopy } from './versions.js';
 
 /** Files larger than this are left out: prose is never so long, data often is. In bytes. */
-export const LARGEST_FILE = 4 * 1024 * 1024;
+const LARGEST_FILE = 4 * 1024 * 1024;
 
 const TERMBASE = 'termbase.yaml';
 
@@ -138,10 +138,9 @@ export async function whyLeftOut(root: string, path: string, policy = DEFAULT_FI
     existsSync(other) && (await reasonByRules(root, other, policy)) === undefined;
   const newer = await newerCopy(root, path, namesIn, isDocument);
   if (newer !== undefined) return olderCopy(root, newer);
+  if (formatOf(path) === 'apiDescription' && !(await startDescribesInterface(path))) return DATA;
   const file = await readText(path);
-  if (!('text' in file)) return undefined;
-  if (formatOf(path) === 'apiDescription' && !describesInterface(file.text)) return DATA;
-  return saysGenerated(file.text) ? GENERATED : undefined;
+  return 'text' in file && saysGenerated(file.text) ? GENERATED : undefined;
 }
 
 async function reasonByRules(root: string, path: string, policy: FilePolicy): Promise<string | undefined> {
