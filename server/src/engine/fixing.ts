@@ -3,9 +3,9 @@ import { languagesIn } from './languages.js';
 import type { Finding } from '../findings/finding.js';
 import { isRefusal, replaceTerm } from '../rewrite/replaceTerm.js';
 import { sourceEdits } from '../rewrite/sourceEdits.js';
-import type { BlockKind } from '../prose/prose.js';
+import type { ProseBlock } from '../prose/prose.js';
 import type { TextEdit } from '../text/edits.js';
-import type { Format } from '../text/sourceText.js';
+import type { Format, SourceText } from '../text/sourceText.js';
 import type { Snapshot } from './snapshot.js';
 
 /** The edits of a fix, or why there is none, as a sentence for the writer. Not certain: a person should look first. */
@@ -37,7 +37,7 @@ export function preferredEdits(snapshot: Snapshot, uri: string, finding: Finding
   if (isRefusal(replaced)) return { kind: 'refused', reason: replaced.refused };
   const edits = sourceEdits(block, replaced.span, replaced.edits, reading.source.text);
   if (isRefusal(edits)) return { kind: 'refused', reason: edits.refused };
-  const broken = brokenLayout(reading.source.format, block.content.kind, edits);
+  const broken = brokenLayout(reading.source, block, edits);
   if (broken !== undefined) return { kind: 'refused', reason: broken };
   return { kind: 'edits', edits, certain: replaced.certain };
 }
@@ -53,15 +53,39 @@ const SIGNS: Readonly<Partial<Record<Format, RegExp>>> = {
 };
 
 /** Why edits would break the format: signs that act as markup, columns of a drawn table, the line under a title. */
-function brokenLayout(format: Format, kind: BlockKind, edits: readonly TextEdit[]): string | undefined {
+function brokenLayout(
+  { format, text }: SourceText,
+  { content: { kind }, start }: ProseBlock,
+  edits: readonly TextEdit[],
+): string | undefined {
   const signs = SIGNS[format];
   if (signs !== undefined && edits.some(({ newText }) => signs.test(newText))) {
     return 'The preferred term has signs that act as markup here: change it by hand.';
   }
   if (format !== 'restructuredtext') return undefined;
   const grown = edits.reduce((sum, { span, newText }) => sum + newText.length - (span.end - span.start), 0);
-  if (kind === 'tableCell' && grown !== 0)
+  if (kind === 'tableCell' && grown !== 0 && !isInListTable(text, start))
     return 'A word of another length would shift the columns of the drawn table.';
   if (kind === 'heading' && grown > 0) return 'The line under the title would be too short: change both by hand.';
   return undefined;
+}
+
+/** A line that draws a table in reStructuredText: a border, or a row of a grid. */
+const DRAWN = /^\s*(?:\||\+[-=+]|=+[\s=]*$)/;
+
+/** Whether a place of reStructuredText stands in a table written as a list, with nothing drawn in between. */
+function isInListTable(text: string, at: number): boolean {
+  const lineEnd = text.indexOf('\n', at);
+  let margin = Number.POSITIVE_INFINITY;
+  for (const line of text
+    .slice(0, lineEnd < 0 ? undefined : lineEnd)
+    .split('\n')
+    .reverse()) {
+    const indentation = line.search(/\S/);
+    if (indentation < 0) continue;
+    if (/^\s*\.\. list-table::/.test(line)) return indentation < margin;
+    if (indentation === 0 || DRAWN.test(line)) return false;
+    margin = Math.min(margin, indentation);
+  }
+  return false;
 }

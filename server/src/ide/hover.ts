@@ -1,5 +1,7 @@
 // The hover: a term's card as Markdown.
 import type { Span } from '../base/span.js';
+import { overlaps } from '../base/span.js';
+import { preferredEdits } from '../engine/fixing.js';
 import { definedAt, definitionOf } from '../engine/glossaryCard.js';
 import type { DefinedAtPlace, GlossaryDefinition } from '../engine/glossaryCard.js';
 import { cardOf, termAt } from '../engine/termCard.js';
@@ -25,7 +27,18 @@ export function hoverAt(snapshot: Snapshot, uri: string, offset: number): HoverC
     card.definition === undefined && defined !== undefined && names.some((name) => isSameName(name, defined.name))
       ? definitionOf(snapshot, defined.name, defined.language)
       : undefined;
-  return { span: found.span, markdown: render(card, definition) };
+  const refused = whyNoFix(snapshot, uri, found.span);
+  const parts = [render(card, definition), ...(refused === undefined ? [] : [`No quick fix here: ${escape(refused)}`])];
+  return { span: found.span, markdown: parts.join('\n\n') };
+}
+
+/** Why a term that should be replaced has no quick fix, as a sentence; undefined where it has one or needs none. */
+function whyNoFix(snapshot: Snapshot, uri: string, span: Span): string | undefined {
+  const finding = snapshot
+    .findingsIn(uri)
+    .find((each) => each.code === 'deprecated-term' && each.preferred !== undefined && overlaps(each.span, span));
+  const fix = finding && preferredEdits(snapshot, uri, finding);
+  return fix?.kind === 'refused' ? fix.reason : undefined;
 }
 
 /** The hover of a term that nothing is decided or asked about: its definition in the documents' own glossary. */

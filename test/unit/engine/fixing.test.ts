@@ -42,6 +42,44 @@ describe('a fix in reStructuredText', () => {
   });
 });
 
+describe('a fix in a table of reStructuredText that is written as a list', () => {
+  it('may be of any length, unless a drawn table stands in the cell', () => {
+    const text = `.. list-table:: Names
+   :header-rows: 1
+
+   * - Name
+     - Use
+   * - API token
+     - one
+
+       The API token again.
+   * - two
+     - +-----------+
+       | API token |
+       +-----------+
+
++-----------+
+| API token |
++-----------+
+`;
+    const engine = new Engine(new Profiles());
+    const uri = 'file:///docs/list.rst';
+    const snapshot = engine.apply({
+      documents: [{ uri, source: { uri, format: 'restructuredtext', text } }],
+      termbases: [{ uri: 'file:///docs/termbase.yaml', text: TERMBASE }],
+    });
+    const fixes = snapshot
+      .findingsIn(uri)
+      .map((each) => [text.slice(0, each.span.start).split('\n').length, preferredEdits(snapshot, uri, each).kind]);
+    expect(fixes).toEqual([
+      [6, 'edits'],
+      [9, 'edits'],
+      [12, 'refused'],
+      [16, 'refused'],
+    ]);
+  });
+});
+
 describe('a fix in XML', () => {
   it('writes no sign that acts as markup', () => {
     const engine = new Engine(new Profiles());

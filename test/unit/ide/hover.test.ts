@@ -48,6 +48,19 @@ describe('the hover', () => {
     expect(hover('connecting.md', 'access key')).toMatch(/^\*\*access key\*\* is the preferred term\./);
   });
 
+  it('says why a deprecated term has no quick fix, and nothing where it has one', () => {
+    const text = 'Store the API key.\n\n+---------+\n| API key |\n+---------+\n';
+    const uri = `${root}drawn.rst`;
+    const own = new Engine(new Profiles());
+    const snapshot = own.apply({
+      documents: [{ uri, source: { uri, format: 'restructuredtext', text } }],
+      termbases: [{ uri: `${root}termbase.yaml`, text: termbase }],
+    });
+    const drawn = hoverAt(snapshot, uri, text.lastIndexOf('API key') + 1)?.markdown;
+    expect(drawn).toMatch(/\n\nNo quick fix here: A word of another length would shift the columns/);
+    expect(hoverAt(snapshot, uri, text.indexOf('API key') + 1)?.markdown).not.toContain('No quick fix');
+  });
+
   it('asks where nobody has decided, with the reasons', () => {
     const card = hover('installing.md', 'datalogger')!;
     expect(card).toMatch(/^\*\*datalogger\*\*: one thing with \*\*data logger\*\*\? Nobody has decided yet\./);
