@@ -51,7 +51,7 @@ function toJson(snapshot: Snapshot, questions: readonly Question[]): object {
     questions: questions.map((question) => ({
       id: question.id,
       kind: question.kind,
-      // English goes without saying, as it did before other languages were mined.
+      // English goes without saying.
       ...(question.language !== undefined && question.language !== 'en' && { language: question.language }),
       confidence: Math.round(question.confidence * 1000) / 1000,
       terms: question.terms.map(({ text, uses, documents: pages, forms }) => ({

@@ -28,6 +28,8 @@ export const compare: Subcommand = {
     const found = compareTwoTerms(survey.snapshot, survey.rootUri, a, b);
     if (found.kind === 'unknown') return refuseUnknown(host, 'compare', found);
     if (found.kind === 'same') throw new UsageError(`“${a}” and “${b}” are forms of one term.`);
+    if (found.kind === 'within')
+      throw new UsageError(`“${found.term}” stands within “${found.whole}” alone: there is nothing to compare.`);
     if (found.kind === 'two-languages') throw new UsageError(`No language of the pages has both “${a}” and “${b}”.`);
     if (options.get('format') === 'json')
       host.write(`${JSON.stringify(toJson(found, survey.rootUri), undefined, 2)}\n`);

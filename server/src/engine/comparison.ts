@@ -1,14 +1,16 @@
 // Two terms side by side, as a snapshot tells it: what speaks for one concept and what against, with sentences and figures.
+import { compareCodeUnits } from '../base/order.js';
 import { finish } from '../base/work.js';
 import type { Relation } from '../decisions/decisions.js';
 import { mustStayApart } from '../lexicon/opposites.js';
+import { usesOfForms } from '../mining/companions/companions.js';
 import { compareInCorpus } from '../mining/comparison/comparison.js';
 import type { ComparedTerm, Comparison } from '../mining/comparison/comparison.js';
 import type { MiningOptions } from '../mining/options.js';
 import type { Question, Reason } from '../mining/question.js';
 import type { Use } from '../mining/places.js';
 import { tellingPlaces } from '../mining/synonyms/tellingPlaces.js';
-import { termKey } from '../termbase/termKey.js';
+import { termKey, termText } from '../termbase/termKey.js';
 import { pointsOf } from './comparisonPoints.js';
 import { verdictOf } from './comparisonVerdict.js';
 import type { Verdict } from './comparisonVerdict.js';
@@ -36,8 +38,12 @@ export interface TermComparison {
   readonly figures: Comparison;
 }
 
-/** The two cannot be compared: one is unknown, they are one term, or no language has both. */
-export type NoComparison = UnknownTerm | { readonly kind: 'same' } | { readonly kind: 'two-languages' };
+/** The two cannot be compared: one is unknown or stands within the other alone, they are one term, or no language has both. */
+export type NoComparison =
+  | UnknownTerm
+  | { readonly kind: 'within'; readonly term: string; readonly whole: string }
+  | { readonly kind: 'same' }
+  | { readonly kind: 'two-languages' };
 
 /** Sentences that are shown of those that hold both. */
 const SHOWN_TOGETHER = 4;
@@ -50,29 +56,25 @@ const SHOWN_TOGETHER = 4;
 export function compareTwoTerms(
   snapshot: Snapshot,
   uri: string,
-  a: string,
-  b: string,
+  one: string,
+  other: string,
   options: MiningOptions = snapshot.relations.mining,
 ): TermComparison | NoComparison {
-  const forms = [spellingsOf(snapshot, a), spellingsOf(snapshot, b)] as const;
+  const [a, b] = [termText(one), termText(other)];
   if (termKey(a) === termKey(b)) return { kind: 'same' };
+  const forms = [spellingsOf(snapshot, a), spellingsOf(snapshot, b)] as const;
   for (const [side, text] of [a, b].entries())
     if (languageOf(snapshot, forms[side]!) === undefined) return unknownTerm(snapshot, text);
-  const language = snapshot.relations.languages.find((each) =>
-    forms.every((some) => languageOf(snapshot, some) === each),
-  );
+  const language = languageOf(snapshot, ...forms);
   if (language === undefined) return { kind: 'two-languages' };
-  const figures = finish(
-    compareInCorpus(
-      language.corpus,
-      [
-        { text: a, forms: withoutSharedForms(forms[0], b, forms[1]) },
-        { text: b, forms: withoutSharedForms(forms[1], a, forms[0]) },
-      ],
-      options,
-    ),
-  );
-  if (figures.terms.some(({ uses }) => uses.length === 0)) return { kind: 'same' };
+  const pair = [
+    { text: a, forms: withoutSharedForms(forms[0], b, forms[1]) },
+    { text: b, forms: withoutSharedForms(forms[1], a, forms[0]) },
+  ] as const;
+  if (pair.some((term) => usesOfForms(language.corpus, term.forms).length === 0)) return { kind: 'same' };
+  const figures = finish(compareInCorpus(language.corpus, pair, options));
+  const inner = figures.terms.findIndex(({ uses }) => uses.length === 0);
+  if (inner >= 0) return { kind: 'within', term: pair[inner]!.text, whole: pair[1 - inner]!.text };
   const question = questionAbout(snapshot.relations.questions, a, b);
   const apart = mustStayApart(a.toLowerCase(), b.toLowerCase());
   const { speaksFor, speaksAgainst } = pointsOf(figures, apart, question?.reasons ?? []);
@@ -106,7 +108,7 @@ function questionAbout(questions: readonly Question[], a: string, b: string): Qu
   const asking = questions.filter((question) =>
     named(question, a).some((at) => named(question, b).some((other) => other !== at)),
   );
-  return asking.sort((x, y) => y.confidence - x.confidence || (x.id < y.id ? -1 : 1))[0];
+  return asking.sort((x, y) => y.confidence - x.confidence || compareCodeUnits(x.id, y.id))[0];
 }
 
 function examplesOf(

@@ -1,5 +1,5 @@
 // Terms as a person types them: their spellings in the documents, and the nearest known names where there are none.
-import { compareCodeUnits } from '../base/order.js';
+import { byCountThenText } from '../base/order.js';
 import { usesOfForms } from '../mining/companions/companions.js';
 import { termForms } from '../rewrite/inflect.js';
 import { nearestName } from '../termbase/nearestName.js';
@@ -31,13 +31,20 @@ export function spellingsOf(snapshot: Snapshot, term: string): string[] {
   return [...new Set(forms.map((form) => form.toLowerCase()))];
 }
 
-/** The language whose documents use some spellings most, ties by its tag; undefined where none does. */
-export function languageOf(snapshot: Snapshot, forms: readonly string[]): LanguageRelations | undefined {
+/**
+ * Of the languages whose documents use each of some terms the one that uses them most, ties by its tag; undefined where there
+ * is none.
+ * @param terms each by its lower-case spellings
+ */
+export function languageOf(
+  snapshot: Snapshot,
+  ...terms: readonly (readonly string[])[]
+): LanguageRelations | undefined {
   const used = snapshot.relations.languages
-    .map((each) => ({ each, uses: usesOfForms(each.corpus, forms).length }))
-    .filter(({ uses }) => uses > 0);
-  used.sort((a, b) => b.uses - a.uses || compareCodeUnits(a.each.language, b.each.language));
-  return used[0]?.each;
+    .map((each) => ({ each, uses: terms.map((forms) => usesOfForms(each.corpus, forms).length) }))
+    .filter(({ uses }) => !uses.includes(0))
+    .map(({ each, uses }) => ({ each, text: each.language, count: uses.reduce((sum, some) => sum + some, 0) }));
+  return used.sort(byCountThenText)[0]?.each;
 }
 
 /** What a term that nothing uses may be a slip of: a decided or asked-about name, else the nearest words in its place. */

@@ -173,6 +173,26 @@ describe('what cannot be compared', () => {
     expect(compareTwoTerms(snapshot, ROOT, 'search bar', 'Search  Bar').kind).toBe('same');
   });
 
+  it('is a term that stands within the other alone', () => {
+    const within = snapshotOf({ 'a.md': 'Rotate the access key. The access key expires. Store the access key.' });
+    expect(compareTwoTerms(within, ROOT, 'key', 'access key')).toEqual({
+      ...{ kind: 'within', term: 'key', whole: 'access key' },
+    });
+  });
+
+  it('is not a term that another language uses more', () => {
+    const pages = snapshotOf({
+      'a.md':
+        'Put the badge of the harbour on the mast of the buoy, and keep the insigne dry. You can find a badge in the box that came with it. The insigne is there.',
+      'b.md':
+        'La station a une insigne, et cette insigne est sur le mât de la bouée. Il y a une insigne dans la boîte, et une insigne dans le port de la ville.',
+    });
+    expect(pages.relations.languages.map(({ language }) => language)).toEqual(['en', 'fr']);
+    const found = compare(pages, 'badge', 'insigne');
+    expect([found.language, ...found.terms.map(({ uses }) => uses.length)]).toEqual(['en', 2, 2]);
+    expect(compareTwoTerms(pages, ROOT, 'badge', 'bouée').kind).toBe('two-languages');
+  });
+
   it('is not a verb, and not a term too rare to be asked about', () => {
     const verbs = snapshotOf({
       ...MIXED,

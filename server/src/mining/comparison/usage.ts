@@ -1,4 +1,5 @@
 // How alike two terms are used, against the yardstick of one term's own halves, with the evidence that mining sees.
+import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import type { SparseVector } from '../../corpus/statistics/similarity.js';
@@ -98,7 +99,7 @@ function framesOf(contexts: Contexts, a: SparseVector, b: SparseVector): Frames 
       if (text !== undefined && saysSomething(text)) texts.set(text, Math.max(weight, texts.get(text) ?? 0));
     }
     return [...texts]
-      .sort(([x, m], [y, n]) => n - m || (x < y ? -1 : 1))
+      .sort(([x, m], [y, n]) => n - m || compareCodeUnits(x, y))
       .slice(0, TOLD)
       .map(([text]) => text);
   };
