@@ -9,7 +9,8 @@ import { findDefinitions } from '../../server/src/mining/abbreviations/definitio
 import { groupDefinitions } from '../../server/src/mining/abbreviations/explained.js';
 import type { Explained } from '../../server/src/mining/abbreviations/explained.js';
 import { formsOfLong, formsOfShort } from '../../server/src/mining/abbreviations/longForms.js';
-import { freeUses, usesOf as formUses } from '../../server/src/mining/abbreviations/shortAndLong.js';
+import { freeUses } from '../../server/src/mining/abbreviations/freeUses.js';
+import { usesOf as formUses } from '../../server/src/mining/abbreviations/shortAndLong.js';
 import { lexicalLink } from '../../server/src/mining/synonyms/links.js';
 import { numberForms } from '../../server/src/mining/wording.js';
 import { verbForms } from '../../server/src/rewrite/verb.js';

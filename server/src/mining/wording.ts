@@ -16,6 +16,14 @@ export function singularKey(word: string): string {
   return singular.length > 4 && singular.endsWith('ie') ? `${singular.slice(0, -2)}y` : singular;
 }
 
+/** Nouns after the text of a control or the name of a product: what stands before in capitals is such a name. */
+export const LABELLED_THINGS = new Set(
+  `plugin plugins page pages tab tabs menu button buttons panel pane screen window dialog option options section field view
+  app application box link icon list dropdown setting settings checkbox radio column project framework editor`.split(
+    /\s+/,
+  ),
+);
+
 /** "once", "twice", "31 times". */
 export function times(count: number): string {
   return count === 1 ? 'once' : count === 2 ? 'twice' : `${count} times`;

@@ -6,6 +6,11 @@ import { finish } from '../../../server/src/base/work.js';
 import { Corpus } from '../../../server/src/corpus/corpus.js';
 import { aligns, longestAlignment } from '../../../server/src/mining/abbreviations/alignment.js';
 import { askAbbreviations } from '../../../server/src/mining/abbreviations/ask.js';
+import { groupDefinitions } from '../../../server/src/mining/abbreviations/explained.js';
+import type { Explained } from '../../../server/src/mining/abbreviations/explained.js';
+import { freeUses } from '../../../server/src/mining/abbreviations/freeUses.js';
+import { formsOfLong, formsOfShort } from '../../../server/src/mining/abbreviations/longForms.js';
+import { usesOf } from '../../../server/src/mining/abbreviations/shortAndLong.js';
 import { findDefinitions, partsOf, shortFormOf } from '../../../server/src/mining/abbreviations/definitions.js';
 import type { Question } from '../../../server/src/mining/question.js';
 import { corpusOf } from '../../support/corpusOf.js';
@@ -111,10 +116,14 @@ describe('a short and a long form', () => {
 
   it('are asked where most pages leave the short form unexplained and both stand beside the same words', () => {
     const short = ['Open a CR today. The CR waits.', 'Delete a CR. The CR goes.', 'Read each CR, then the CR list.'];
-    const long = ['Open a custom resource. Delete a custom resource. Read each custom resource.'];
+    const long = ['Open a custom resource.', 'Delete a custom resource.', 'Read each custom resource.'];
     expect(ask(explained, ...short, ...long).map(({ id }) => id)).toEqual(['abbreviation:CR|custom resource']);
     // Comma-separated values are seldom a file in that format: what has no neighbour in common may be two things.
-    const other = ['These are custom resources of ours. Those were custom resources too. Our custom resources ended.'];
+    const other = [
+      'These are custom resources of ours.',
+      'Those were custom resources too.',
+      'Our custom resources ended.',
+    ];
     expect(ask(explained, ...short, ...other)).toEqual([]);
   });
 
@@ -154,6 +163,67 @@ describe('a short and a long form', () => {
   });
 });
 
+describe('a free long form', () => {
+  const explained = 'A pressure relief valve (PRV) sits in the hatch. Open the PRV.';
+  const short = [1, 2, 3].map((buoy) => `Check the PRV of buoy ${buoy}. The PRV opens by itself.`);
+  const withLong = (long: (buoy: number) => string): string[] =>
+    ask(explained, ...short, ...[1, 2, 3].map(long)).map(({ id }) => id);
+
+  it('stands in a sentence, on pages other than those that leave the short form unexplained', () => {
+    const asked = withLong((buoy) => `Check the pressure relief valve of buoy ${buoy}.`);
+    expect(asked).toEqual(['abbreviation:PRV|pressure relief valve']);
+  });
+
+  /** How many free uses a page has beside one that explains the short form. */
+  function freeIn(page: string): number {
+    const corpus = corpusOf([explained, page]);
+    const [{ short: name, expansions }] = groupDefinitions(findDefinitions(corpus)) as [Explained];
+    const long = usesOf(formsOfLong(corpus, expansions[0]!.words));
+    return freeUses(corpus, long, usesOf(formsOfShort(corpus, name)), expansions[0]!).all.length;
+  }
+
+  it.each([
+    ['in a sentence', 'Check the pressure relief valve first.', 1],
+    ['in a heading', '# Check the pressure relief valve', 0],
+    ['in the text of a link', 'See [check the pressure relief valve](valve.md) first.', 0],
+    ['in an image description', '![The pressure relief valve](valve.png)', 0],
+    ['in a cell of a table', '| Part | Buoy |\n|---|---|\n| Check the pressure relief valve | 7 |', 0],
+    ['alone in an item', '- Pressure relief valve', 0],
+    ['as the label of an item', '- Pressure relief valve: in the hatch', 0],
+    ['as the name of a page', 'Open the Pressure Relief Valve page first.', 0],
+    ['first on a page with the short form', 'Check the pressure relief valve. Then wait. Open the PRV.', 0],
+    ['again on it', 'A pressure relief valve opens. Open the PRV. Check the pressure relief valve.', 1],
+    ['beside the short form', 'A pressure relief valve opens. Check the pressure relief valve, or PRV, first.', 0],
+  ])('%s: %s', (_, page, count) => {
+    expect(freeIn(page)).toBe(count);
+  });
+
+  it('is not the one in capitals where most are not', () => {
+    const plain = (buoy: number): string => `Check the pressure relief valve of buoy ${buoy}.`;
+    const capitals = (buoy: number): string => `Check the Pressure Relief Valve of buoy ${buoy}.`;
+    expect(withLong((buoy) => (buoy === 1 ? capitals(buoy) : plain(buoy)))).toEqual([]);
+    expect(withLong(capitals)).toHaveLength(1);
+  });
+
+  it('comes back more than once on a page that explains the short form', () => {
+    const back = 'Clean the pressure relief valve of this buoy.';
+    const page = (buoy: number, returns: number): string =>
+      `${explained} Test the PRV of buoy ${buoy}. ${Array.from({ length: returns }, () => back).join(' Then wait. ')}`;
+    expect(ask(page(1, 1), page(2, 1), page(3, 1))).toEqual([]);
+    expect(ask(page(1, 3), page(2, 3), page(3, 3))).toHaveLength(1);
+  });
+
+  it('needs no neighbour in common where it is a name', () => {
+    const atlas = [
+      'The Coastal Wave Atlas (CWA) is free.',
+      ...[1, 2, 3].map((i) => `Our CWA has sheet ${i}. A CWA is big.`),
+    ];
+    const named = [1, 2, 3].map((i) => `Waves of bay ${i} are in the Coastal Wave Atlas.`);
+    expect(ask(...atlas, ...named).map(({ id }) => id)).toEqual(['abbreviation:CWA|Coastal Wave Atlas']);
+    expect(ask(...atlas, ...named.map((text) => text.replace(/Coastal.*/, 'coastal wave atlas.')))).toEqual([]);
+  });
+});
+
 describe('a short form with two explanations', () => {
   it('is asked about as ambiguous', () => {
     const [question] = ask(
@@ -184,6 +254,31 @@ describe('clipped words', () => {
     );
     expect(question).toMatchObject({ kind: 'abbreviation', id: 'abbreviation:config|configuration' });
     expect(question!.reasons[1]!.text).toContain('“___ change”, “check ___”');
+  });
+
+  const clipped = (short: string, full: string): string[] => [
+    `Open the ${short} file. Check ${short} values. A ${short} change is logged. The ${short} list is here.`,
+    `Open the ${full} file. Check ${full} values. A ${full} change is logged. Each ${full} list waits.`,
+    `The ${short} file and the ${full} list.`,
+  ];
+
+  it('are a free choice where the dictionary has them as words of their own', () => {
+    expect(ask(...clipped('config', 'configuration')).map(({ confidence }) => confidence >= 0.5)).toEqual([true]);
+    expect(ask(...clipped('spec', 'specification')).map(({ confidence }) => confidence >= 0.5)).toEqual([false]);
+  });
+
+  it('come after words that are written in two ways', () => {
+    const [{ worth, terms, confidence } = { worth: 0, terms: [], confidence: 0 }] = ask(
+      ...clipped('config', 'configuration'),
+    );
+    expect(worth).toBeGreaterThan(0);
+    expect(worth).toBeLessThan((confidence * terms[1]!.uses) / 2);
+  });
+
+  it('are slips of style where a larger set has few of them', () => {
+    const much = Array.from({ length: 4000 }, (_, i) => `Buoy ${i} sends its waves to the shore by noon.`).join('\n\n');
+    const [question] = ask(...clipped('config', 'configuration'), much);
+    expect(question!.confidence).toBeLessThan(0.5);
   });
 
   it('are left where they stand among other words', () => {

@@ -184,6 +184,89 @@ describe('a few slips', () => {
   });
 });
 
+describe('a hyphen', () => {
+  const hyphened = [1, 2, 3].map((buoy) => `Read the shore-station log of buoy ${buoy}. A shore-station alarm starts.`);
+  const before = 'Send the shore station log. A shore station alarm waits. Keep the shore station data.';
+
+  it('that is kept before nouns alone is grammar, whatever strays there are', () => {
+    const nouns = [1, 2, 3].map((buoy) => `Buoy ${buoy} calls the shore station. It is seen from the shore station.`);
+    expect(ask(...hyphened, before, `${before} Again.`, ...nouns)).toEqual([]);
+  });
+
+  it('is asked about where the open form is as much at home before nouns', () => {
+    expect(idsOf(ask(...hyphened, before, `${before} Again.`))).toEqual(['variant:shore station|shore-station']);
+  });
+
+  it('may be the habit of one page', () => {
+    const page = 'Read the tide-gauge log. A tide-gauge alarm starts. Keep tide-gauge data.';
+    const open = [1, 2].map(
+      (buoy) => `Send the tide gauge log of buoy ${buoy}. A tide gauge alarm waits. Keep tide gauge data.`,
+    );
+    expect(ask(page, ...open)).toEqual([]);
+    expect(idsOf(ask(page, `${page} Wait.`, ...open))).toEqual(['variant:tide gauge|tide-gauge']);
+  });
+
+  it('makes a verb, which is no way of writing the noun', () => {
+    expect(
+      ask(
+        'The server reads the waves and bulk-loads them. You can bulk-load the tides. Then it writes and bulk-loads into store.',
+        'It reads and bulk-loads into the archive. We bulk-load every tide and bulk-loads them.',
+        'The bulk load is slow. Start a bulk load. After the bulk load it waits.',
+      ),
+    ).toEqual([]);
+  });
+
+  it('is no count', () => {
+    const text = (way: string, i: number): string =>
+      `Show the ${way} neighbors of buoy ${i}. It finds ${way} neighbors.`;
+    const asked = (open: string): string[] =>
+      idsOf(ask(text('k-way', 1), text('k-way', 2), text(open, 3), text(open, 4)));
+    expect(asked('top k way')).toEqual([]);
+    const one = (way: string, i: number): string => `Show the ${way} label of buoy ${i}. It finds one ${way} label.`;
+    expect(idsOf(ask(one('k-way', 1), one('k-way', 2), one('k way', 3), one('k way', 4)))).toEqual([
+      'variant:k way|k-way',
+    ]);
+  });
+
+  it('that a parenthesis holds alone tells nothing', () => {
+    const text = (way: string, buoy: number): string => `Names (${way}) of buoy ${buoy}. Its codes (${way}), too.`;
+    const asked = ask(
+      text('tide-sensitive', 1),
+      text('tide-sensitive', 2),
+      text('tide sensitive', 3),
+      text('tide sensitive', 4),
+    );
+    expect(asked).toEqual([]);
+  });
+});
+
+describe('a camel name', () => {
+  const pages = (closed: string, open: string): string[] => [
+    `Write ${closed} here. Wait for ${closed}. Look at ${closed}.`,
+    `Then wait for ${closed}. Look at ${closed} again.`,
+    `Write ${open} here. Wait for ${open}. Look at ${open}.`,
+    `Then wait for ${open}. Look at ${open} again.`,
+  ];
+
+  it('that is a name without articles is one with the name in two words', () => {
+    const [question] = ask(...pages('PortEllish', 'Port Ellish'));
+    expect(question).toMatchObject({ id: 'variant:Port Ellish|PortEllish', confidence: 0.75 });
+  });
+
+  it('of a kind stands beside the component that it is made of', () => {
+    const kinds = 'Make a SanderlingSource. The SanderlingSource waits for a SanderlingSource.';
+    const [question] = ask(...pages('SanderlingSource', 'Sanderling Source'), kinds);
+    expect(question).toMatchObject({ id: 'variant:Sanderling Source|SanderlingSource', confidence: 0.45 });
+  });
+});
+
+it('takes no title of a link for a way of writing a name', () => {
+  const right = [1, 2, 3, 4].map((buoy) => `Buoy ${buoy} calls WaveDeck by noon. Then WaveDeck draws it.`);
+  const wrong = (text: string): string[] => [1, 2].map((buoy) => `Read of buoy ${buoy} in ${text} of last year.`);
+  expect(idsOf(ask(...right, ...wrong('our Wavedeck book')))).toEqual(['variant:WaveDeck|Wavedeck']);
+  expect(ask(...right, ...wrong('[our Wavedeck book](https://example.org/)'))).toEqual([]);
+});
+
 describe('a question', () => {
   const documents = {
     'file:///a.md': 'Load the dataset from disk. The dataset is large.',

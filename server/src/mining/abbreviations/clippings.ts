@@ -3,6 +3,7 @@ import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { fullFormsOf } from '../../lexicon/clippings.js';
+import { isKnown } from '../../lexicon/synonyms.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
 import { endRowOfBlock, followsOn, isContent } from '../../corpus/stream.js';
 import { countDocuments, examplePlacesOf } from '../places.js';
@@ -22,12 +23,15 @@ import { termOf, usesOf } from './shortAndLong.js';
  */
 const LEAST = { uses: 3, documents: 2, kinds: 3, share: 0.33, usesInFew: 4, shareInFew: 0.6 } as const;
 
+/** In a corpus of so many words, the least uses and pages of a clipping that are no names of code; fewer are a slip of style. */
+const WIDESPREAD = { words: 30_000, uses: 10, documents: 8 } as const;
+
 /**
  * How sure it is, by the share of the rarer form's uses in frames that both have; least where the clipping is mostly a name of
- * code or one frame says it all. Adjectives, which labels and names of features clip (max size, auto mode), are for those who
- * want to see more.
+ * code or one frame says it all. A free choice, for those who want to see more, are adjectives, which labels and names of features
+ * clip (max size, auto mode), clippings that are seldom used, and those that the dictionary has as words of their own (info, demo).
  */
-const CONFIDENCE = { modifier: 0.45, least: 0.5, shared: 0.4 } as const;
+const CONFIDENCE = { choice: 0.45, least: 0.5, shared: 0.4 } as const;
 
 /** From this share of uses on pages where the code has the word, a clipping is mostly a name there. */
 const MOSTLY_NAME = 0.58;
@@ -87,10 +91,14 @@ function askClipping(corpus: Corpus, clipping: string): Question | undefined {
   if (!standAlike(shared) || countDocuments(corpus.stream, words) < LEAST.documents) return undefined;
   const isMostlyName = short.uses.length - words.length > MOSTLY_NAME * short.uses.length;
   const isSure = !isMostlyName && shared.kinds.length > 1;
-  const confidence = isModifier(corpus, best.long.uses)
-    ? CONFIDENCE.modifier
-    : CONFIDENCE.least + (isSure ? CONFIDENCE.shared * shared.share : 0);
+  const isChoice = isRare(corpus, words) || isModifier(corpus, best.long.uses) || isKnown(clipping, 'noun');
+  const confidence = isChoice ? CONFIDENCE.choice : CONFIDENCE.least + (isSure ? CONFIDENCE.shared * shared.share : 0);
   return makeQuestion(corpus, short, words, best.long, shared, confidence);
+}
+
+function isRare({ stream }: Corpus, words: readonly Use[]): boolean {
+  if (stream.length < WIDESPREAD.words) return false;
+  return words.length < WIDESPREAD.uses || countDocuments(stream, words) < WIDESPREAD.documents;
 }
 
 function standAlike({ kinds, uses, share }: SharedFrames): boolean {
@@ -155,7 +163,8 @@ function makeQuestion(
     ),
     kind: 'abbreviation',
     confidence,
-    worth: confidence * Math.min(words.length, long.uses.length),
+    // A choice of style, settled once for all its uses: it comes after words that are written in two ways.
+    worth: confidence * Math.log(1 + Math.min(words.length, long.uses.length)),
     terms: sides.map(({ term }) => term),
     reasons: [
       {

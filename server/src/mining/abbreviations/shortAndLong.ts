@@ -1,6 +1,5 @@
 // A short form and its one expansion, both in free use: asked where the long form goes on after it was explained.
 import type { Corpus } from '../../corpus/corpus.js';
-import { Zone } from '../../prose/zones.js';
 import { countDocuments, examplePlacesOf } from '../places.js';
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
@@ -8,35 +7,31 @@ import type { Question, QuestionTerm, Reason } from '../question.js';
 import { byUses, displayText, makeTerm, pages, times } from '../wording.js';
 import type { Explained, Expansion } from './explained.js';
 import { framesOf, sharedFrames } from './frames.js';
+import { freeUses, isCapitalised } from './freeUses.js';
+import type { FreeUse } from './freeUses.js';
 import { formsOfLong, formsOfShort } from './longForms.js';
 import type { FormUses } from './longForms.js';
 
 /**
- * The least that is asked about: uses of the short form, and free uses of the long one or the
- * pages that have them. A mix is plain where so many of the
- * pages with the short form, and such a share of them, either never explain it or go on with the long form; or where half of
- * them go on with the long form so often, and in such a share of what they say; else slips on a few pages, which are
- * worth no more than these pages, are left.
+ * The least that is asked about. *Alternating*: so many pages go on with the long form so often, and of the pages with the
+ * short form such a share is mixed, that is goes on or leaves it unexplained; *widely* where so many pages spell it out.
+ * *Unexplained*: such a share of pages is mixed while so many, and so many others, spell it out; *plainly* where it is more of both. *Falling back*: such
+ * a share of the pages goes on, so often, with so many short forms beside.
  */
 const LEAST = {
   short: 2,
-  free: 3,
-  freePages: 2,
-  mixed: { pages: 3, share: 0.55 },
-  goingOn: { uses: 6, share: 0.3 },
-  slips: { uses: 3, pages: 2 },
+  widely: 6,
+  alternating: { pages: 2, uses: 6, share: 0.35 },
+  unexplained: { pages: 3, share: 0.35, free: 3, freePages: 3, otherPages: 2 },
+  plainly: { share: 0.55, freePages: 8 },
+  fallingBack: { share: 0.25, uses: 3, beside: 2 },
 } as const;
 
-/** How sure it is that the two forms are mixed and not explained where they need be. */
-const CONFIDENCE = { onItsPages: 0.92, onOtherPages: 0.8, onFewPages: 0.75, slips: 0.5 } as const;
+/** On so many pages the documents explain a short form where it has no other meaning for their readers. */
+const WELL_KNOWN = 3;
 
-/** How the long form is used beside the short one. */
-export interface FreeUse {
-  /** Free uses on pages that use the short form, and the number of these pages. */
-  readonly onItsPages: readonly Use[];
-  /** Free uses on any page. */
-  readonly all: readonly Use[];
-}
+/** How sure it is that the two forms are mixed and not explained where they need be. */
+const CONFIDENCE = { widely: 0.92, plainly: 0.8, alternating: 0.75, unexplained: 0.6, fallingBack: 0.5 } as const;
 
 /** The question about a short form and its expansion, or undefined where the documents explain it and go on with it. */
 export function askExplained(
@@ -52,7 +47,7 @@ export function askExplained(
   const written = usesOf(longForms);
   const longUses = withoutLonger(corpus, written, expansion, others);
   const free = freeUses(corpus, longUses, shortUses, expansion);
-  const mix = mixOf(corpus, shortUses, written, free);
+  const mix = mixOf(corpus, shortUses, written, free, expansion);
   if (mix === undefined) return undefined;
   const kept = new Set(longUses.map((use) => use.row));
   const shortRows = new Set(expansion.definitions.map((definition) => definition.shortRow));
@@ -86,59 +81,51 @@ export function askExplained(
   };
 }
 
-/** How sure a mix is, and the uses that an answer would settle; undefined where the forms are right as they are. */
+/**
+ * How sure a mix is, and what an answer would settle; undefined where the forms are right as they are. A short form beside its
+ * long form is seldom a mistake: the root of the uses is what it is worth, and one page where few pages mix them.
+ */
 function mixOf(
   corpus: Corpus,
   short: readonly Use[],
   long: readonly Use[],
-  free: FreeUse,
+  { all, onItsPages, goingOn }: FreeUse,
+  expansion: Expansion,
 ): { readonly confidence: number; readonly settles: number } | undefined {
-  const { stream } = corpus;
-  const pageOf = ({ row }: Use): number => stream.documentOf(row);
+  const pageOf = ({ row }: Use): number => corpus.stream.documentOf(row);
   const shortPages = new Set(short.map(pageOf));
   const longPages = new Set(long.map(pageOf));
-  const goingOn = new Set(free.onItsPages.map(pageOf));
   const mixed = [...shortPages].filter((page) => goingOn.has(page) || !longPages.has(page)).length;
-  const slips = free.onItsPages.length;
-  const isPlain = mixed >= LEAST.mixed.pages && mixed >= LEAST.mixed.share * shortPages.size;
-  const freePages = new Set(free.all.map(pageOf)).size;
-  const isFree = free.all.length >= LEAST.free || freePages >= LEAST.freePages;
-  if (isPlain && isFree && (goingOn.size > 0 || areAlike(corpus, short, free.all))) {
-    const confidence = goingOn.size > 1 ? CONFIDENCE.onItsPages : CONFIDENCE.onOtherPages;
-    return { confidence, settles: Math.min(free.all.length, short.length) };
-  }
+  const share = mixed / shortPages.size;
+  const uses = onItsPages.filter((use) => goingOn.has(pageOf(use))).length;
+  const freePages = new Set(all.map(pageOf)).size;
+  const settles = Math.sqrt(Math.min(all.length, short.length));
+  const { alternating, unexplained, plainly, fallingBack } = LEAST;
+  if (goingOn.size >= alternating.pages && uses >= alternating.uses && share >= alternating.share)
+    return { confidence: freePages >= LEAST.widely ? CONFIDENCE.widely : CONFIDENCE.alternating, settles };
+  const areLeft = mixed >= unexplained.pages && share >= unexplained.share;
+  const otherPages = new Set(all.map(pageOf).filter((page) => !shortPages.has(page))).size;
+  const isSpelledOut =
+    all.length >= unexplained.free && freePages >= unexplained.freePages && otherPages >= unexplained.otherPages;
+  if (areLeft && isSpelledOut && (goingOn.size > 0 || areOne(corpus, short, all, expansion)))
+    return share >= plainly.share && freePages >= plainly.freePages
+      ? { confidence: CONFIDENCE.plainly, settles }
+      : { confidence: CONFIDENCE.unexplained, settles: 1 };
   const beside = short.filter((use) => goingOn.has(pageOf(use))).length;
-  const isFallingBack = slips >= LEAST.goingOn.uses && slips >= LEAST.goingOn.share * (slips + beside);
-  if (isFallingBack && goingOn.size * 2 >= shortPages.size)
-    return { confidence: CONFIDENCE.onFewPages, settles: Math.min(slips, beside) };
-  const areSeveral = slips >= LEAST.slips.uses && goingOn.size >= LEAST.slips.pages;
-  return areSeveral ? { confidence: CONFIDENCE.slips, settles: goingOn.size } : undefined;
+  const isFallingBack = uses >= fallingBack.uses && beside >= fallingBack.beside;
+  return isFallingBack && goingOn.size >= fallingBack.share * shortPages.size
+    ? { confidence: CONFIDENCE.fallingBack, settles: 1 }
+    : undefined;
 }
 
-/** True where both stand beside a like word: where no page has both, the long form may mean another thing. */
-function areAlike(corpus: Corpus, short: readonly Use[], long: readonly Use[]): boolean {
+/**
+ * Where no page has both, the long form may mean another thing: not so where many pages explain one by the other, where the long
+ * form is a name in capitals, or where both stand beside a like word.
+ */
+function areOne(corpus: Corpus, short: readonly Use[], long: readonly Use[], { definitions }: Expansion): boolean {
+  const explaining = new Set(definitions.map(({ longRow }) => corpus.stream.documentOf(longRow)));
+  if (explaining.size >= WELL_KNOWN || long.every((use) => isCapitalised(corpus, use))) return true;
   return sharedFrames(corpus, framesOf(corpus, short, true), framesOf(corpus, long, true)).kinds.length > 0;
-}
-
-/** Uses that are no explanation, nor right after a parenthesis, not the first on a page with the short form, in no heading. */
-export function freeUses(corpus: Corpus, long: readonly Use[], short: readonly Use[], expansion: Expansion): FreeUse {
-  const { stream } = corpus;
-  const explained = new Set(expansion.definitions.map((definition) => definition.longRow));
-  const shortPages = new Set(short.map((use) => stream.documentOf(use.row)));
-  const opening = corpus.vocabulary.find('(');
-  const introduced = new Set<number>();
-  const onItsPages: Use[] = [];
-  const all: Use[] = [];
-  for (const use of long) {
-    if ((stream.zones[use.row]! & (Zone.heading | Zone.frontMatter)) !== 0) continue;
-    const page = stream.documentOf(use.row);
-    const first = shortPages.has(page) && !introduced.has(page);
-    introduced.add(page);
-    if (first || explained.has(use.row) || stream.spelling[use.row - 1] === opening) continue;
-    all.push(use);
-    if (shortPages.has(page)) onItsPages.push(use);
-  }
-  return { onItsPages, all };
 }
 
 /** Uses that are not part of a longer long form that has a short form of its own (custom resource definition). */
@@ -196,12 +183,12 @@ function reasonsOf(
       value: free.all.length,
     },
   ];
-  if (free.onItsPages.length > 0) {
-    const mixed = countDocuments(stream, free.onItsPages);
+  if (free.goingOn.size > 0) {
+    const mixed = free.goingOn.size;
     reasons.push({
       kind: 'mixed-page',
       text: `${pages(mixed)} ${mixed === 1 ? 'writes' : 'write'} “${short}” and then “${long}” again`,
-      value: free.onItsPages.length,
+      value: free.onItsPages.filter((use) => free.goingOn.has(stream.documentOf(use.row))).length,
     });
   }
   return reasons;

@@ -2,6 +2,7 @@
 import { compareCodeUnits } from '../../base/order.js';
 import type { Work } from '../../base/work.js';
 import type { Corpus } from '../../corpus/corpus.js';
+import { Zone } from '../../prose/zones.js';
 import { isKnown } from '../../lexicon/synonyms.js';
 import { countDocuments, examplePlacesOf, isInsideSentence } from '../places.js';
 import type { Use } from '../places.js';
@@ -108,9 +109,10 @@ function isMix(corpus: Corpus, lead: Way, way: Way, share: number, lower: Way | 
     const enough = uses.length >= leastUses && countDocuments(corpus.stream, uses) >= leastDocuments;
     return share >= leastShare && enough && lead.uses.length >= leading;
   }
-  const documents = countDocuments(corpus.stream, way.uses);
-  if (way.uses.length < LEAST.inner.uses || documents < LEAST.inner.documents || share < LEAST.inner.share)
-    return false;
+  // A link may be the title of another's page.
+  const own = way.uses.filter(({ row }) => (corpus.stream.zones[row]! & Zone.linkText) === 0);
+  const documents = countDocuments(corpus.stream, own);
+  if (own.length < LEAST.inner.uses || documents < LEAST.inner.documents || share < LEAST.inner.share) return false;
   if (lower !== undefined && lower.uses.length > way.uses.length) return false;
   // DNs beside DNS is a plural.
   if (isShouted(lead.text) && way.text === `${lead.text.slice(0, -1)}s`) return false;

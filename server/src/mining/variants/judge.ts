@@ -5,7 +5,7 @@ import type { Slot } from './slots.js';
 import type { Style } from './styles.js';
 
 /** What the two ways differ in. */
-export type Lane = 'spelling' | 'joining' | 'hyphen' | 'space' | 'name';
+export type Lane = 'spelling' | 'joining' | 'hyphen' | 'space' | 'name' | 'kind';
 
 /** A mix of two ways of writing. */
 export interface Mix {
@@ -37,7 +37,22 @@ const LIKE_SLOTS: readonly Slot[] = ['attributive', 'predicate', 'noun', 'verb']
 const QUANTIFIED_SHARE = 4;
 
 /** At most so many places, and less than such a share of the rarer way's uses, are slips. */
-const SLIPS = { most: 3, share: 0.25 } as const;
+const SLIPS = { most: 4, share: 0.3 } as const;
+
+/**
+ * A hyphen that stands before nouns in at least such a share of its uses, while the open form does in at most such a share of its
+ * own, is grammar (command-line options on the command line). Common practice, no source.
+ */
+const GRAMMAR = { hyphened: 0.75, open: 0.5 } as const;
+
+/**
+ * A camel name with articles or a plural in this share of its uses is a kind or class; from the second share on it is used as a
+ * noun like any other.
+ */
+const KIND = { least: 0.1, noun: 0.5 } as const;
+
+/** A form that is mostly a name of code must stand in so many places that are none. */
+const LEAST_OF_NAME = 4;
 
 /** Judges two ways of writing one key, or returns undefined where they are right as they are. */
 export function judge(a: Style, b: Style): Mix | undefined {
@@ -55,11 +70,13 @@ function judgeChunks(a: Style, b: Style): Mix | undefined {
   const sameShape = a.shape === b.shape;
   const byPart = sameShape && differsByPartOfSpeech(a.text, b.text);
   const particle = !sameShape && endsInParticle(a.shape === 'hyphened' ? a : b);
-  const exchangeable =
-    byPart || particle
-      ? shared(a, b, ['attributive', 'predicate', 'noun', 'unclear']) + (byPart ? shared(a, b, ['verb']) : 0)
+  const exchangeable = byPart
+    ? shared(a, b, ['attributive', 'predicate', 'noun', 'unclear', 'verb'])
+    : particle
+      ? shared(a, b, ['attributive', 'predicate', 'noun'])
       : Math.min(counted(a), counted(b));
   if (exchangeable === 0) return undefined;
+  if (!sameShape && (a.isMostlyName || b.isMostlyName) && exchangeable < LEAST_OF_NAME) return undefined;
   if (!sameShape && (isCamel(a) || isCamel(b))) return undefined;
   return { lane: sameShape ? 'spelling' : 'joining', exchangeable };
 }
@@ -69,22 +86,37 @@ function judgeOpen(chunk: Style, open: Style): Mix | undefined {
   if (parts.some((part, i) => i > 0 && PARTICLES.has(part)) || PARTICLES.has(parts[0]!)) return undefined;
   if (isVerbNounPair(open.text, chunk.text)) return undefined;
   if (isLowerCamel(chunk) || isShouted(chunk)) return undefined;
-  if (namesOf(open) > 0.6 && namesOf(chunk) < 0.4) return undefined;
+  if (namesOf(open) > 0.6 && namesOf(chunk) < 0.6) return undefined;
   if (isCamel(chunk)) return judgeCamel(chunk, open);
   const phrase = parts.some((part) => LINKS.has(part));
-  const slots = phrase ? (['attributive'] as const) : LIKE_SLOTS;
+  const slots = phrase ? (['attributive'] as const) : isMostlyVerb(chunk) ? (['verb'] as const) : LIKE_SLOTS;
   if (QUANTIFIERS.has(parts[0]!) && open.slots.attributive * QUANTIFIED_SHARE < chunk.slots.attributive)
     return undefined;
   // Lone uses in two slots are as easily two misread sentences.
   if (Math.max(...slots.map((slot) => shared(chunk, open, [slot]))) < 2) return undefined;
   const exchangeable = shared(chunk, open, slots);
-  if (chunk.shape === 'hyphened' && areSlips(exchangeable, chunk, open)) return undefined;
+  if (chunk.isMostlyName && exchangeable < LEAST_OF_NAME) return undefined;
+  if (chunk.shape === 'hyphened' && (isGrammar(chunk, open) || areSlips(exchangeable, chunk, open))) return undefined;
   return { lane: chunk.shape === 'hyphened' ? 'hyphen' : 'space', exchangeable };
 }
 
 /** A hyphen before a noun and none elsewhere is the rule: a few places where it is not kept are slips of it, no mix. */
 function areSlips(exchangeable: number, a: Style, b: Style): boolean {
   return exchangeable <= SLIPS.most && exchangeable < SLIPS.share * Math.min(a.uses.length, b.uses.length);
+}
+
+/** The hyphen is kept before nouns and left elsewhere, save for strays. */
+function isGrammar(chunk: Style, open: Style): boolean {
+  return attributiveShare(chunk) >= GRAMMAR.hyphened && attributiveShare(open) <= GRAMMAR.open;
+}
+
+function attributiveShare({ slots: { attributive, predicate, noun } }: Style): number {
+  return attributive / Math.max(1, attributive + predicate + noun);
+}
+
+/** A verb made of two words (to bulk-load) is no way of writing the noun, wherever a reading of its slot goes wrong. */
+function isMostlyVerb({ shape, slots: { attributive, predicate, noun, verb } }: Style): boolean {
+  return shape === 'hyphened' && verb > 0 && verb >= attributive + predicate + noun;
 }
 
 /** A kind or class beside the concept it stands for: a mix only where prose uses the joined form as a noun of its own. */
@@ -99,9 +131,13 @@ function judgeCamel(chunk: Style, open: Style): Mix | undefined {
   // A part of one longer name beside a name of its own: Horizontal Pod Autoscaler, PodAutoscaler.
   if (open.afterName > 0.5 * open.inside && chunk.afterName < 0.25 * chunk.inside) return undefined;
   const exchangeable = shared(chunk, open, ['predicate', 'noun']);
-  return exchangeable < 2
-    ? undefined
-    : { lane: 'name', exchangeable: exchangeable + shared(chunk, open, ['attributive']) };
+  if (exchangeable < 2) return undefined;
+  // A kind beside a component that is named alike, or told by a name; what takes no articles at all is one proper name.
+  const { predicate, noun, unclear } = chunk.slots;
+  const asNoun = chunk.determined / Math.max(1, predicate + noun + unclear);
+  const isKind = asNoun >= KIND.least && (open.beginsWithName || (asName && asNoun < KIND.noun));
+  const together = exchangeable + shared(chunk, open, ['attributive']);
+  return { lane: isKind ? 'kind' : 'name', exchangeable: together };
 }
 
 function shared(a: Style, b: Style, slots: readonly Slot[]): number {

@@ -12,24 +12,17 @@ import { countDocuments, examplePlacesOf, isInsideSentence } from '../places.js'
 import type { Use } from '../places.js';
 import { questionId } from '../question.js';
 import type { Question } from '../question.js';
-import { byUses, makeTerm, numberForms, pages, singularKey, spelledAt, times } from '../wording.js';
+import { byUses, LABELLED_THINGS, makeTerm, numberForms, pages, singularKey, spelledAt, times } from '../wording.js';
 
 const CONFIDENCE = 0.85;
 
 /** The least of either way: uses, documents, and its share of both; below it a capital is a slip or a title. */
 const LEAST = { uses: 4, documents: 3, share: 0.25 } as const;
 
-/** Verbs before the text of a control, and nouns after it or after a product's name: capitals are right there. */
+/** Verbs before the text of a control: capitals are right there. */
 const BEFORE_LABELS = new Set(
   'select selects choose click press tap open enter named called titled see go pick'.split(' '),
 );
-const AFTER_NAMES = new Set(
-  `plugin plugins page pages tab tabs menu button buttons panel pane screen window dialog option options section field view
-  app application box link icon list dropdown setting settings checkbox radio column project framework editor`.split(
-    /\s+/,
-  ),
-);
-
 /** Rows between two resting points. */
 const STRIDE = 200_000;
 
@@ -88,7 +81,7 @@ function isPlainUse(corpus: Corpus, row: number, end: number): boolean {
   if (!isInsideSentence(stream, row) || (stream.zones[row]! & Zone.linkText) !== 0) return false;
   if (end >= endRowOfBlock(stream, row)) return false;
   const [before, after] = [vocabulary.textOf(stream.spelling[row - 1]!), vocabulary.textOf(stream.spelling[end]!)];
-  if (BEFORE_LABELS.has(before.toLowerCase()) || AFTER_NAMES.has(after)) return false;
+  if (BEFORE_LABELS.has(before.toLowerCase()) || LABELLED_THINGS.has(after)) return false;
   if (/^[,>]$/.test(before) && /^[,>]$/.test(after)) return false;
   const beforeArticle = vocabulary.textOf(stream.spelling[row - 2] ?? stream.spelling[row]!).toLowerCase();
   if (/^(?:the|on)$/i.test(before) && BEFORE_LABELS.has(beforeArticle)) return false;

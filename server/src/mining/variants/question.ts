@@ -17,6 +17,7 @@ const CONFIDENCE: Readonly<Record<Lane, number>> = {
   hyphen: 0.9,
   space: 0.9,
   name: 0.75,
+  kind: 0.45,
 };
 
 /** The least number of uses in which two ways could be exchanged. */
@@ -39,8 +40,8 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
   const { mix } = family;
   if (mix.exchangeable < LEAST_EXCHANGEABLE) return undefined;
   const sides = sideTerms(corpus, family);
-  const least = Math.min(...sides.map(({ term }) => term.documents));
-  if (least < 2 && mix.exchangeable < leastOnOnePage(mix.lane)) return undefined;
+  if (sides.some((side) => side.term.documents < 2 && mix.exchangeable < leastOnOnePage(mix.lane, side)))
+    return undefined;
   const slot = commonSlot(sides);
   const terms = sides.map(({ term }) => term);
   const confidence = areSlips(corpus, mix, terms) ? SLIPS.confidence : confidenceOf(mix);
@@ -59,9 +60,14 @@ export function makeQuestion(corpus: Corpus, family: Family): Question | undefin
   };
 }
 
-/** A way of writing that one page alone has may be that page's own: it takes more of it, save for a plain spelling. */
-function leastOnOnePage(lane: Lane): number {
-  return lane === 'spelling' ? 2 : 3;
+/**
+ * A way of writing that one page alone has may be that page's own: it takes more of it, save for a plain spelling, and still more
+ * of a hyphen that stands before nouns only.
+ */
+function leastOnOnePage(lane: Lane, { side }: SideTerm): number {
+  if (lane === 'spelling') return 2;
+  const isBeforeNouns = slotCount(side, 'noun') + slotCount(side, 'predicate') === 0;
+  return lane === 'hyphen' && side.name === 'hyphened' && isBeforeNouns ? 6 : 3;
 }
 
 function areSlips(corpus: Corpus, { lane, exchangeable }: Mix, terms: readonly QuestionTerm[]): boolean {
@@ -149,7 +155,7 @@ const SLOT_WORDS: Readonly<Record<Slot, string>> = {
 };
 
 function kindOf(lane: Lane): string {
-  return lane === 'spelling' || lane === 'name' ? lane : 'compound';
+  return lane === 'spelling' ? lane : lane === 'name' || lane === 'kind' ? 'name' : 'compound';
 }
 
 function wayOf({ name, styles }: Side, text: string): string {

@@ -5,7 +5,8 @@ import type { Vocabulary } from '../../corpus/vocabulary.js';
 import { FactFlag } from '../../facts/flags.js';
 import { Zone } from '../../prose/zones.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
-import { endRowOfBlock, firstRowOfBlock, followsOn } from '../../corpus/stream.js';
+import { endRowOfBlock, firstRowOfBlock, followsOn, isContent } from '../../corpus/stream.js';
+import { singularKey } from '../wording.js';
 
 /** The slots, by code. `lone`: nothing but the form stands there; `unclear`: its neighbours do not tell. */
 export const SLOTS = ['attributive', 'predicate', 'noun', 'verb', 'unclear', 'lone'] as const;
@@ -24,6 +25,7 @@ const LISTS = {
     configured designed likely you users them us ability way time used ready whether when where what attempting
     wish wishes choose decide forget forgot sure`,
   be: `is are was were be been being as not becomes become remains remain stays stay seems`,
+  object: `it them him us me`,
   objectStart: `a an the this that these those your its their our my all any each every some it them both`,
 } as const;
 type WordClass = keyof typeof LISTS;
@@ -33,6 +35,7 @@ export class SlotReader {
   private readonly classes: Readonly<Record<WordClass, ReadonlySet<number>>>;
   private readonly to: number | undefined;
   private readonly comma: number | undefined;
+  private readonly opening: number | undefined;
   private readonly stream: TokenStream;
   private readonly vocabulary: Vocabulary;
 
@@ -41,6 +44,7 @@ export class SlotReader {
     this.vocabulary = corpus.vocabulary;
     this.to = corpus.vocabulary.find('to');
     this.comma = corpus.vocabulary.find(',');
+    this.opening = corpus.vocabulary.find('(');
     this.classes = Object.fromEntries(
       Object.entries(LISTS).map(([name, words]) => [name, idsOf(corpus.vocabulary, words)]),
     ) as Record<WordClass, ReadonlySet<number>>;
@@ -55,6 +59,8 @@ export class SlotReader {
     const starts = row === blockStart || (stream.flags[row]! & TokenFlag.sentenceStart) !== 0;
     if (row === blockStart && (end === blockEnd || this.isColon(end, blockEnd))) return 'lone';
     if (this.isLabel(row, blockStart, blockEnd)) return 'lone';
+    if (this.isCounted(row, end, blockEnd)) return 'lone';
+    if (this.isEnclosed(row, end, blockStart, blockEnd)) return 'unclear';
     if (this.isVerb(row, end, starts, blockEnd)) return 'verb';
     if (end < blockEnd) {
       const next = this.afterwards(end);
@@ -62,6 +68,17 @@ export class SlotReader {
     }
     if (!starts && this.follows(row) && this.is('be', row - 1)) return 'predicate';
     return 'noun';
+  }
+
+  /** True where a determiner stands right before. */
+  hasDeterminer(row: number): boolean {
+    return row > firstRowOfBlock(this.stream, row) && this.follows(row) && this.is('determiner', row - 1);
+  }
+
+  /** True where a determiner or a word of content that it follows on stands right before: it is used as a noun. */
+  isDetermined(row: number): boolean {
+    if (row === firstRowOfBlock(this.stream, row) || !this.follows(row)) return false;
+    return this.hasDeterminer(row) || isContent(this.stream, row - 1);
   }
 
   private isVerb(row: number, end: number, starts: boolean, blockEnd: number): boolean {
@@ -72,6 +89,8 @@ export class SlotReader {
       return starts || !this.follows(row) || !this.isBeforeNouns(row - 1);
     }
     if (starts) return takesObject;
+    // "… and bulk-loads them": nothing but a verb stands before a pronoun.
+    if (end < blockEnd && followsOn(stream, end) && this.is('object', end)) return true;
     if (!this.follows(row)) return false;
     const before = stream.fold[row - 1]!;
     if (this.is('modal', row - 1) || this.is('pronoun', row - 1)) return true;
@@ -92,6 +111,22 @@ export class SlotReader {
     let end = row;
     while (end < blockEnd && (stream.zones[end]! & Zone.linkText) !== 0) end++;
     return end === blockEnd || (stream.flags[end]! & TokenFlag.word) === 0;
+  }
+
+  /** Of several words, the first a single letter, before a plural: how many there are (the top k nearest neighbors). */
+  private isCounted(row: number, end: number, blockEnd: number): boolean {
+    const { stream, vocabulary } = this;
+    if (end === row + 1 || end >= blockEnd || !followsOn(stream, end)) return false;
+    if (vocabulary.textOf(stream.fold[row]!).length !== 1) return false;
+    const next = vocabulary.textOf(stream.fold[end]!);
+    return singularKey(next) !== next;
+  }
+
+  /** All that stands in a parenthesis may be a noun or what is said of one. */
+  private isEnclosed(row: number, end: number, blockStart: number, blockEnd: number): boolean {
+    const { stream, vocabulary } = this;
+    if (row === blockStart || end >= blockEnd || stream.fold[row - 1] !== this.opening) return false;
+    return /^[),;]/.test(vocabulary.textOf(stream.fold[end]!));
   }
 
   /** What the following word makes of a use, or undefined where it leaves the question open. */

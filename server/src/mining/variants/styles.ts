@@ -39,10 +39,16 @@ export interface Style {
   readonly shouted: number;
   /** A capitalised content word stands right before: the form may be a part of a longer name. */
   readonly afterName: number;
+  /** Uses as a noun that are a plural or have a determiner right before. */
+  readonly determined: number;
+  /** The first of several words is a name of its own (Kafka source): it is written with a capital wherever it stands. */
+  readonly beginsWithName: boolean;
+  /** Most uses may be a name of the page's code. */
+  readonly isMostlyName: boolean;
 }
 
 type Cases = Record<
-  'inside' | 'capitalised' | 'withCapital' | 'camel' | 'lowerCamel' | 'shouted' | 'afterName',
+  'inside' | 'capitalised' | 'withCapital' | 'camel' | 'lowerCamel' | 'shouted' | 'afterName' | 'determined',
   number
 >;
 
@@ -74,43 +80,76 @@ function beginAlike(forms: readonly Form[]): boolean {
   return new Set(forms.map((form) => form.text.slice(0, 3))).size === 1;
 }
 
+/** From so many uses as a verb on, a hyphened form without a determiner is as likely one more. */
+const LEAST_VERBS = 2;
+
+/** Of a name, such a share of uses at most is in small letters. */
+const SMALL_SHARE = 0.1;
+
+function beginsWithName(corpus: Corpus, { shape, folds }: Form): boolean {
+  const [first] = folds as [number];
+  return shape === 'open' && corpus.usesOfWord(first) <= SMALL_SHARE * corpus.stream.rowsOf(first).length;
+}
+
 /** From this share of uses on pages whose code has it, a form is mostly a name of code. */
 const MOSTLY_NAME = 0.5;
 
 function makeStyle(corpus: Corpus, readers: Readers, text: string, forms: readonly Form[]): Style {
   const slots: Record<Slot, number> = { attributive: 0, predicate: 0, noun: 0, verb: 0, unclear: 0, lone: 0 };
   const uses: SlottedUse[] = [];
-  const cases: Cases = { inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0, afterName: 0 };
+  const cases: Cases = {
+    ...{ inside: 0, capitalised: 0, withCapital: 0, camel: 0, lowerCamel: 0, shouted: 0 },
+    ...{ afterName: 0, determined: 0 },
+  };
   const found = forms.flatMap((form) => usesOf(corpus, readers, form));
   const named = found.filter(({ isNamed }) => isNamed).length;
   const isMostlyName = named > 0 && named >= MOSTLY_NAME * found.length;
-  for (const { form, row, isNamed } of found) {
-    const length = form.folds.length;
-    const read = isMostlyName && isNamed ? 'lone' : readers.slots.slotOf(row, length);
-    const slot = read === 'attributive' && form.plural ? beforeNoun(form) : read;
+  const read = found.map((use) => (isMostlyName && use.isNamed ? 'lone' : slotOf(readers.slots, use)));
+  const isAlsoVerb = read.filter((slot) => slot === 'verb').length >= LEAST_VERBS;
+  found.forEach(({ form, row }, index) => {
+    const isBare = read[index] === 'noun' && form.shape !== 'open' && !readers.slots.isDetermined(row);
+    const isBareName = isBare && named > 0 && !form.plural && isSmall(corpus, row);
+    const isBareVerb = isBare && isAlsoVerb && form.shape === 'hyphened';
+    const slot = isBareName ? 'lone' : isBareVerb ? 'unclear' : read[index]!;
     slots[slot]++;
-    uses.push({ row, length, slot });
-    countCase(corpus, row, length, cases);
-  }
+    uses.push({ row, length: form.folds.length, slot });
+    countCase(corpus, row, form.folds.length, cases);
+    const isNoun = slot === 'noun' || slot === 'predicate' || slot === 'unclear';
+    if (isNoun && (form.plural || readers.slots.hasDeterminer(row))) cases.determined++;
+  });
   uses.sort((a, b) => a.row - b.row);
-  return { shape: forms[0]!.shape, text, forms, uses, slots, ...cases };
-}
-
-function usesOf(corpus: Corpus, readers: Readers, form: Form): { form: Form; row: number; isNamed: boolean }[] {
-  return form.rows
-    .filter((row) => !readers.mentions.isMention(row, form.folds.length))
-    .map((row) => ({ form, row, isNamed: isName(corpus, row, form) }));
+  const startsWithName = beginsWithName(corpus, forms[0]!);
+  return { shape: forms[0]!.shape, text, forms, uses, slots, beginsWithName: startsWithName, isMostlyName, ...cases };
 }
 
 /** A plural is no modifier: "two elements follow" leaves it open, "it bulk-loads data" is a verb, "the webservers group" a name. */
-function beforeNoun({ shape }: Form): Slot {
-  return shape === 'open' ? 'unclear' : shape === 'hyphened' ? 'verb' : 'attributive';
+function slotOf(slots: SlotReader, { form, row }: Found): Slot {
+  const slot = slots.slotOf(row, form.folds.length);
+  if (slot !== 'attributive' || !form.plural) return slot;
+  return form.shape === 'open' ? 'unclear' : form.shape === 'hyphened' ? 'verb' : 'attributive';
+}
+
+interface Found {
+  readonly form: Form;
+  readonly row: number;
+  /** It may be a name of its page's code. */
+  readonly isNamed: boolean;
+}
+
+function usesOf(corpus: Corpus, readers: Readers, form: Form): Found[] {
+  return form.rows
+    .filter((row) => !readers.mentions.isMention(row, form.folds.length))
+    .map((row) => ({ form, row, isNamed: isName(corpus, row, form) }));
 }
 
 /** A word in small letters, or with a first capital alone, that the code of its page has too; kinds and classes are judged by their capitals. */
 function isName({ stream, vocabulary }: Corpus, row: number, { shape }: Form): boolean {
   if (shape === 'open' || !stream.isNameInCode(row)) return false;
   return stream.spelling[row] === stream.fold[row] || !/^.+\p{Lu}/u.test(vocabulary.textOf(stream.spelling[row]!));
+}
+
+function isSmall({ stream }: Corpus, row: number): boolean {
+  return stream.spelling[row] === stream.fold[row];
 }
 
 function countCase(corpus: Corpus, row: number, length: number, cases: Cases): void {
