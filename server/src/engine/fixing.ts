@@ -62,12 +62,29 @@ function brokenLayout(
   if (signs !== undefined && edits.some(({ newText }) => signs.test(newText))) {
     return 'The preferred term has signs that act as markup here: change it by hand.';
   }
-  if (format !== 'restructuredtext') return undefined;
   const grown = edits.reduce((sum, { span, newText }) => sum + newText.length - (span.end - span.start), 0);
-  if (kind === 'tableCell' && grown !== 0 && !isInListTable(text, start))
-    return 'A word of another length would shift the columns of the drawn table.';
-  if (kind === 'heading' && grown > 0) return 'The line under the title would be too short: change both by hand.';
+  if (format === 'restructuredtext' && kind === 'tableCell' && grown !== 0 && !isInListTable(text, start))
+    return 'A word of another length could break the columns of the table: change it by hand.';
+  if (kind === 'heading' && !lineUnderFits(format, text, start, grown))
+    return 'The line under the title would not fit: change both by hand.';
   return undefined;
+}
+
+/** Letters that may be wider than one column, or have no width. */
+const OF_OTHER_WIDTH = /[^\0-\u02ff]/;
+
+/**
+ * Whether a title that grows by so many letters still fits the line of marks under it, if there is one: no longer than it in
+ * reStructuredText, as long give or take one in AsciiDoc.
+ */
+function lineUnderFits(format: Format, text: string, at: number, grown: number): boolean {
+  const title = text.slice(text.lastIndexOf('\n', at - 1) + 1).split('\n', 2);
+  const [above, under] = title.map((line) => line.trim());
+  if (under === undefined || !/^([^\p{L}\p{N}\s])\1*$/u.test(under)) return true;
+  const room = under.length - above!.length - grown;
+  if (format === 'asciidoc') return Math.abs(room) < 2;
+  if (format !== 'restructuredtext') return true;
+  return grown <= 0 || (room >= 0 && !OF_OTHER_WIDTH.test(above!));
 }
 
 /** A line that draws a table in reStructuredText: a border, or a row of a grid. */

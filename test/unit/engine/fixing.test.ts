@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { Engine } from '../../../server/src/engine/engine.js';
 import { Profiles } from '../../../server/src/engine/factsOf.js';
 import { preferredEdits } from '../../../server/src/engine/fixing.js';
+import { formatOf } from '../../../server/src/text/sourceText.js';
 
 const TERMBASE =
   'evenword: 1\nconcepts:\n  - preferred: access token\n    deprecated: [API token]\n  - preferred: hut\n    deprecated: [hat]\n';
@@ -34,9 +35,9 @@ describe('a fix in reStructuredText', () => {
       return [PAGE.slice(0, finding.span.start).split('\n').length, fix.kind === 'edits' ? fix.kind : fix.reason];
     });
     expect(fixes).toEqual([
-      [1, 'The line under the title would be too short: change both by hand.'],
+      [1, 'The line under the title would not fit: change both by hand.'],
       [4, 'edits'],
-      [9, 'A word of another length would shift the columns of the drawn table.'],
+      [9, 'A word of another length could break the columns of the table: change it by hand.'],
       [10, 'edits'],
     ]);
   });
@@ -77,6 +78,31 @@ describe('a fix in a table of reStructuredText that is written as a list', () =>
       [12, 'refused'],
       [16, 'refused'],
     ]);
+  });
+});
+
+describe('a fix in a title with a line of marks under it', () => {
+  // Docutils: “the title underline must be at least as long as the title text”; Asciidoctor: as long, give or take one.
+  it.each([
+    ['rst', 'API token\n=========\n', 'refused'],
+    ['rst', '============\n API token\n============\n', 'edits'],
+    ['rst', 'API token\n============\n', 'edits'],
+    ['rst', 'API token 令\n=============\n', 'refused'],
+    ['adoc', 'API token\n---------\n', 'refused'],
+    ['adoc', 'API token\n----------\n', 'refused'],
+    ['adoc', 'API token now\n--------------\n', 'refused'],
+    ['adoc', 'The hat\n-------\n', 'edits'],
+    ['adoc', '== API token\n', 'edits'],
+    ['md', 'API token\n---------\n', 'edits'],
+  ])('%s: %j is %s', (extension, heading, kind) => {
+    const engine = new Engine(new Profiles());
+    const uri = `file:///docs/page.${extension}`;
+    const format = formatOf(uri)!;
+    const snapshot = engine.apply({
+      documents: [{ uri, source: { uri, format, text: `${heading}\nText.\n` } }],
+      termbases: [{ uri: 'file:///docs/termbase.yaml', text: TERMBASE }],
+    });
+    expect(snapshot.findingsIn(uri).map((finding) => preferredEdits(snapshot, uri, finding).kind)).toEqual([kind]);
   });
 });
 

@@ -57,7 +57,7 @@ describe('the hover', () => {
       termbases: [{ uri: `${root}termbase.yaml`, text: termbase }],
     });
     const drawn = hoverAt(snapshot, uri, text.lastIndexOf('API key') + 1)?.markdown;
-    expect(drawn).toMatch(/\n\nNo quick fix here: A word of another length would shift the columns/);
+    expect(drawn).toMatch(/\n\nNo quick fix here: A word of another length could break the columns/);
     expect(hoverAt(snapshot, uri, text.indexOf('API key') + 1)?.markdown).not.toContain('No quick fix');
   });
 
