@@ -25,7 +25,7 @@ export interface ContextTotals {
  */
 export function weigher(
   weighting: Weighting,
-  cells: PairTable,
+  cells: Pick<PairTable, 'size' | 'leftOf' | 'rightOf'>,
   countOf: (cell: number) => number,
   totals: ContextTotals,
 ): (cell: number) => number {

@@ -9,6 +9,8 @@ import type { TokenStream } from '../../corpus/stream.js';
 import { TAG, TokenFlag } from '../../tokens/tokens.js';
 import { usageMeasures } from '../options.js';
 import type { UsageMeasures, Weighting } from '../options.js';
+import { MetFeatures, addUp } from './contextCells.js';
+import type { ContextCells } from './contextCells.js';
 import { weigher } from './contextWeights.js';
 import type { Segments } from './segment.js';
 
@@ -32,6 +34,8 @@ const EDGE = 0;
 const COMMONEST = 0.1;
 /** In a small corpus so many terms may share a feature all the same. */
 const ALWAYS_TOLD = 25;
+/** Adjacent and syntactic contexts of one occurrence, at most. */
+const MOST_RELATIONS = 8;
 /** How far to the left of a noun its verb may stand, in words. */
 const REACH = 5;
 
@@ -55,43 +59,62 @@ export function* gatherContexts(
   halved: readonly number[] = [],
   measures: UsageMeasures = usageMeasures({}),
 ): Work<Contexts> {
-  const { stream, vocabulary } = corpus;
-  const isAdjacent = measures.contexts === 'all' || measures.contexts === 'adjacent';
-  const isSyntactic = measures.contexts === 'all' || measures.contexts === 'syntactic';
+  const { stream } = corpus;
   const features = new PairTable();
   const pairs = new PairTable();
-  const cells = new PairTable();
-  const counts = new CountColumn();
-  const put = (term: number, relation: number, word: number): void => {
-    counts.add(cells.idOf(term, features.idOf(relation, word)));
-  };
-  const gather = (term: number, first: number, end: number): void => {
-    if (isAdjacent) gatherAdjacent(term, first, end);
-    if (isSyntactic) relate(stream, first, end, (relation, word) => put(term, relation, word));
-    if (measures.contexts === 'window')
-      visitWindow(stream, first, end, measures.windowWords, (word) => put(term, Relation.near, word));
-  };
-  const gatherAdjacent = (term: number, first: number, end: number): void => {
-    const before = neighbour(stream, first, -1);
-    const after = neighbour(stream, end - 1, 1);
-    put(term, Relation.before, before);
-    put(term, Relation.after, after);
-    if (before !== EDGE) put(term, Relation.twoBefore, pairs.idOf(neighbour(stream, first - 1, -1), before));
-    if (after !== EDGE) put(term, Relation.twoAfter, pairs.idOf(after, neighbour(stream, end, 1)));
-  };
+  const met = yield* readFeatures(stream, segments, features, pairs, measures);
   const halves = halvesOf(stream, segments, terms, halved);
+  const cells = addUp(met, features.size, segments, terms + 2 * halved.length, (i) => halves.of(i));
+  yield;
+  const vectors = weigh(cells, features.size, terms, measures.weighting);
+  yield;
+  return { vectors, describe: describer(corpus, features, pairs) };
+}
+
+/**
+ * Reads what stands around every occurrence.
+ * @param features takes each feature: its relation and its word, or its pair of words
+ * @param pairs takes each pair of neighbouring words
+ */
+function* readFeatures(
+  stream: TokenStream,
+  segments: Segments,
+  features: PairTable,
+  pairs: PairTable,
+  measures: UsageMeasures,
+): Work<MetFeatures> {
+  const isAdjacent = measures.contexts === 'all' || measures.contexts === 'adjacent';
+  const isSyntactic = measures.contexts === 'all' || measures.contexts === 'syntactic';
+  const isWindow = measures.contexts === 'window';
+  const met = new MetFeatures(segments.count, isWindow ? measures.windowWords : MOST_RELATIONS);
+  const put = (relation: number, word: number): void => met.add(features.idOf(relation, word));
+  const putNear = (word: number): void => put(Relation.near, word);
   for (let i = 0; i < segments.count; i++) {
-    const term = segments.term[i]!;
     const first = segments.first[i]!;
     const end = first + segments.length[i]!;
-    gather(term, first, end);
-    const half = halves.of(i);
-    if (half !== undefined) gather(half, first, end);
+    if (isAdjacent) {
+      const before = neighbour(stream, first, -1);
+      const after = neighbour(stream, end - 1, 1);
+      put(Relation.before, before);
+      put(Relation.after, after);
+      if (before !== EDGE) put(Relation.twoBefore, pairs.idOf(neighbour(stream, first - 1, -1), before));
+      if (after !== EDGE) put(Relation.twoAfter, pairs.idOf(after, neighbour(stream, end, 1)));
+    }
+    if (isSyntactic) relate(stream, first, end, put);
+    if (isWindow) visitWindow(stream, first, end, measures.windowWords, putNear);
+    met.endOccurrence();
     if (i % 20_000 === 0) yield;
   }
-  const shown = commonForms(corpus);
-  const word = (id: number): string => (id === EDGE ? '' : vocabulary.textOf(shown[id - 1]!));
-  const describe = (feature: number): string | undefined => {
+  return met;
+}
+
+function describer(corpus: Corpus, features: PairTable, pairs: PairTable): Contexts['describe'] {
+  let shown: Uint32Array | undefined;
+  const word = (id: number): string => {
+    shown ??= commonForms(corpus);
+    return id === EDGE ? '' : corpus.vocabulary.textOf(shown[id - 1]!);
+  };
+  return (feature) => {
     const relation = features.leftOf(feature);
     const code = features.rightOf(feature);
     switch (relation) {
@@ -109,8 +132,6 @@ export function* gatherContexts(
         return frame(word(code), '');
     }
   };
-  const vectors = weigh(cells, counts, features.size, terms, terms + 2 * halved.length, measures.weighting);
-  return { vectors, describe };
 }
 
 /** The commonest written form of each dictionary form: readers know “qualified”, not “qualify”, where that is what stands. */
@@ -228,67 +249,31 @@ function isPhrasePart(tag: number): boolean {
   return tag === TAG.DET || tag === TAG.ADJ || tag === TAG.NUM || tag === TAG.PRON || isNoun(tag);
 }
 
-/**
- * Weighs the cells of `all` rows, of which the first `terms` are terms and make the df. Cells are visited in order of
- * their features, so that every vector comes out sorted.
- */
-function weigh(
-  cells: PairTable,
-  counts: CountColumn,
-  features: number,
-  terms: number,
-  all: number,
-  weighting: Weighting,
-): SparseVector[] {
+/** Weighs the cells row by row; the first `terms` rows are terms and make the df. */
+function weigh(cells: ContextCells, features: number, terms: number, weighting: Weighting): SparseVector[] {
+  const { rowFirst } = cells;
+  const rows = rowFirst.length - 1;
   const df = new Uint32Array(features);
-  const sizes = new Uint32Array(all);
-  const isMet = new Uint8Array(terms);
-  const first = new Uint32Array(features + 1);
-  for (let cell = 0; cell < cells.size; cell++) {
-    const feature = cells.rightOf(cell);
-    first[feature + 1]!++;
-    if (cells.leftOf(cell) >= terms) continue;
-    df[feature]!++;
-    isMet[cells.leftOf(cell)] = 1;
-  }
-  const met = isMet.reduce((sum, each) => sum + each, 0);
+  for (let cell = 0; cell < rowFirst[terms]!; cell++) df[cells.rightOf(cell)]!++;
+  let met = 0;
+  for (let term = 0; term < terms; term++) if (rowFirst[term + 1]! > rowFirst[term]!) met++;
   // A feature of one term alone is shared by no two; one that most terms have says next to nothing and costs the most.
-  const says = (feature: number): boolean =>
-    df[feature]! >= 2 && df[feature]! <= Math.max(ALWAYS_TOLD, met * COMMONEST);
-  for (let feature = 0; feature < features; feature++) first[feature + 1]! += first[feature]!;
-  const byFeature = new Uint32Array(cells.size);
-  for (let cell = 0; cell < cells.size; cell++) {
-    byFeature[first[cells.rightOf(cell)]!++] = cell;
-    if (says(cells.rightOf(cell))) sizes[cells.leftOf(cell)]!++;
-  }
-  const rows = Array.from(sizes, (size) => ({ ids: new Uint32Array(size), weights: new Float64Array(size) }));
-  const filled = new Uint32Array(all);
-  const weight = weigher(weighting, cells, (cell) => counts.get(cell), { features, terms, rows: all, df, met });
-  for (const cell of byFeature) {
-    const feature = cells.rightOf(cell);
-    if (!says(feature)) continue;
-    const row = cells.leftOf(cell);
-    const at = filled[row]!++;
-    rows[row]!.ids[at] = feature;
-    rows[row]!.weights[at] = weight(cell);
-  }
-  return rows;
-}
-
-/** Counts of cells in a column that grows with them. */
-class CountColumn {
-  private counts = new Uint32Array(4096);
-
-  add(cell: number): void {
-    if (cell >= this.counts.length) {
-      const wider = new Uint32Array(cell * 2);
-      wider.set(this.counts);
-      this.counts = wider;
+  const most = Math.max(ALWAYS_TOLD, met * COMMONEST);
+  const says = (feature: number): boolean => df[feature]! >= 2 && df[feature]! <= most;
+  const weight = weigher(weighting, cells, (cell) => cells.countOf(cell), { features, terms, rows, df, met });
+  const vectors: SparseVector[] = [];
+  for (let row = 0; row < rows; row++) {
+    let size = 0;
+    for (let cell = rowFirst[row]!; cell < rowFirst[row + 1]!; cell++) if (says(cells.rightOf(cell))) size++;
+    const vector = { ids: new Uint32Array(size), weights: new Float64Array(size) };
+    let at = 0;
+    for (let cell = rowFirst[row]!; cell < rowFirst[row + 1]!; cell++) {
+      const feature = cells.rightOf(cell);
+      if (!says(feature)) continue;
+      vector.ids[at] = feature;
+      vector.weights[at++] = weight(cell);
     }
-    this.counts[cell]!++;
+    vectors.push(vector);
   }
-
-  get(cell: number): number {
-    return this.counts[cell]!;
-  }
+  return vectors;
 }

@@ -2,6 +2,7 @@
 import type { Corpus } from '../../corpus/corpus.js';
 import type { TokenStream } from '../../corpus/stream.js';
 import { TokenFlag } from '../../tokens/tokens.js';
+import type { Vocabulary } from '../../corpus/vocabulary.js';
 import type { Segments } from './segment.js';
 import type { Term } from './terms.js';
 
@@ -80,6 +81,7 @@ export function countSideBySide(
     counts.set(key, found);
   };
   const elliptic = ellipticTerms(terms);
+  const kinds = kindsBetween(vocabulary);
   const involved = new Uint8Array(terms.length);
   for (const key of wanted) involved[Math.floor(key / terms.length)] = involved[key % terms.length] = 1;
   let list: number[] = [];
@@ -87,10 +89,7 @@ export function countSideBySide(
     const end = segments.first[i - 1]! + segments.length[i - 1]!;
     const start = segments.first[i]!;
     const concerns = list.length > 0 || involved[segments.term[i - 1]!] === 1 || involved[segments.term[i]!] === 1;
-    const between =
-      concerns && start - end <= REACH
-        ? wordsBetween(stream, vocabulary.textOf.bind(vocabulary), end, start)
-        : undefined;
+    const between = concerns && start - end <= REACH ? wordsBetween(stream, vocabulary, kinds, end, start) : undefined;
     if (between === undefined || !(COORDINATING.has(between) || CONTRASTING.has(between))) {
       list = [];
       continue;
@@ -124,20 +123,36 @@ function ellipticTerms(terms: readonly Term[]): (left: Term, right: Term) => num
   };
 }
 
-/** The lower-case words and signs between two rows without passing words, or undefined across a sentence's end. */
+/** The lower-case words and signs between two rows without passing words; undefined where they set nothing side by side. */
 function wordsBetween(
   stream: TokenStream,
-  textOf: (word: number) => string,
+  vocabulary: Vocabulary,
+  kinds: Uint8Array,
   from: number,
   until: number,
 ): string | undefined {
-  const words: string[] = [];
-  for (let row = from; row <= until; row++) {
-    if ((stream.flags[row]! & TokenFlag.sentenceStart) !== 0) return undefined;
-    if (row === until) break;
-    const text = textOf(stream.fold[row]!);
-    if (text === '\uFFFC') return undefined;
-    if (!PASSING.has(text)) words.push(text);
-  }
-  return words.join(' ');
+  const { flags, fold } = stream;
+  for (let row = from; row < until; row++)
+    if (kinds[fold[row]!] === OTHER || (flags[row]! & TokenFlag.sentenceStart) !== 0) return undefined;
+  if ((flags[until]! & TokenFlag.sentenceStart) !== 0) return undefined;
+  let words = '';
+  for (let row = from; row < until; row++)
+    if (kinds[fold[row]!] === JOINING) words += `${words === '' ? '' : ' '}${vocabulary.textOf(fold[row]!)}`;
+  return words;
+}
+
+/** Kinds of words by what they do between two terms: no more than divide them, part of what sets them side by side, or passing. */
+const OTHER = 0;
+const JOINING = 1;
+const PASSED = 2;
+
+function kindsBetween(vocabulary: Vocabulary): Uint8Array {
+  const kinds = new Uint8Array(vocabulary.size);
+  const mark = (text: string, kind: number): void => {
+    const word = vocabulary.find(text);
+    if (word !== undefined) kinds[word] = kind;
+  };
+  for (const between of [...COORDINATING, ...CONTRASTING]) for (const text of between.split(' ')) mark(text, JOINING);
+  for (const text of PASSING) mark(text, PASSED);
+  return kinds;
 }

@@ -10,11 +10,12 @@ import { gatherContexts } from './contexts.js';
 import type { Contexts } from './contexts.js';
 import { countSideBySide } from './coordination.js';
 import type { Pair } from './evidence.js';
+import { formulaShare } from './formulas.js';
 import { isGeneralNoun } from './generalWords.js';
 import { SIMILARITY_OF, selfSimilarity, termsToHalve } from './likeness.js';
-import { compareTerms } from './neighbours.js';
+import { compareTerms, invert } from './neighbours.js';
 import type { SparseVector } from '../../corpus/statistics/similarity.js';
-import type { Neighbours } from './neighbours.js';
+import type { Neighbours, VectorIndex } from './neighbours.js';
 import type { Occurrences } from './occurrences.js';
 import { properShare } from './properNames.js';
 import { bestScoreOf, confidenceOf, isGrounded, scoreOf } from './score.js';
@@ -41,6 +42,8 @@ const FEWEST_USES = 3;
 const LEAST_ALONE = 0.15;
 /** From this share of capitalised uses a term is a proper name. */
 const PROPER = 0.5;
+/** From this share of uses between the same two words a term stands in a formula. */
+const FORMULA = 0.75;
 /** So many pairs at most that can only be asked about on request are compared with all other terms, which costs most. */
 const MOST_ON_REQUEST = 90;
 /** Least score of a pair that is asked about by default, … */
@@ -53,8 +56,10 @@ const EMPTY: SparseVector = { ids: new Uint32Array(0), weights: new Float64Array
 /** Judges pairs of one corpus; contexts are gathered once, with the first call. */
 export class Judge {
   private gathered: Contexts | undefined;
+  private index: VectorIndex | undefined;
   private readonly separations: Separations;
   private readonly proper = new Map<number, boolean>();
+  private readonly formulas = new Map<number, boolean>();
   private self: (uses: number) => number = () => 1;
 
   constructor(
@@ -88,7 +93,8 @@ export class Judge {
       const words = this.wordsOf(pair);
       const score = pair.evidence[0]?.kind === 'neighbours' ? 0 : bestScoreOf(words, this.shareOf(pair.a, pair.b));
       const fewest = Math.min(this.segments.uses[pair.a]!, this.segments.uses[pair.b]!);
-      const maySure = score >= THRESHOLD && isGrounded({ ...words, likeness: nearest, self: 1 });
+      const maySure =
+        score >= THRESHOLD && isGrounded({ ...words, likeness: nearest, self: 1, fewest, formula: false });
       return { pair, at, maySure, worth: confidenceOf(score) * fewest };
     });
     const onRequest = bounded.filter(({ maySure }) => !maySure).sort((x, y) => y.worth - x.worth || x.at - y.at);
@@ -99,7 +105,9 @@ export class Judge {
   /** All that is known of pairs, in their order, of refused ones too. */
   *weighUp(pairs: readonly Pair[]): Work<JudgedPair[]> {
     if (this.gathered === undefined) yield* this.gather();
-    const { likeness } = yield* compareTerms(this.vectors, pairs, [], 0, this.measures.similarity);
+    const { vectors } = this.gathered!;
+    this.index ??= invert(vectors);
+    const { likeness } = yield* compareTerms(vectors, pairs, [], 0, this.measures.similarity, this.index);
     const wanted = new Set(pairs.map((pair) => this.keyOf(pair)));
     const sideBySide = countSideBySide(this.corpus, this.segments, this.terms, wanted);
     yield;
@@ -114,6 +122,7 @@ export class Judge {
         siblings: this.separations.siblings(pair.a, pair.b) + this.siblings.ofTerms(pair.a, pair.b),
         properNames: Number(this.isProper(pair.a)) + Number(this.isProper(pair.b)),
         fewest,
+        formula: this.isFormula(pair.a) || this.isFormula(pair.b),
       };
       return { ...pair, known, score: scoreOf(known) };
     });
@@ -123,7 +132,7 @@ export class Judge {
   *nearestAmong(some: readonly number[], keep: number): Work<Neighbours['nearest']> {
     if (this.gathered === undefined) yield* this.gather();
     const wanted = new Set(some);
-    const vectors = this.vectors.map((vector, term) => (wanted.has(term) ? vector : EMPTY));
+    const vectors = this.gathered!.vectors.map((vector, term) => (wanted.has(term) ? vector : EMPTY));
     return (yield* compareTerms(vectors, [], some, keep, this.measures.similarity)).nearest;
   }
 
@@ -132,10 +141,6 @@ export class Judge {
     const { vectors } = this.gathered!;
     const similarity = SIMILARITY_OF[this.measures.similarity];
     return similarity(vectors[a]!, vectors[b]!) / this.self(Math.min(this.segments.uses[a]!, this.segments.uses[b]!));
-  }
-
-  private get vectors(): readonly SparseVector[] {
-    return this.gathered!.vectors.slice(0, this.terms.length);
   }
 
   private *gather(): Work<void> {
@@ -147,7 +152,7 @@ export class Judge {
       halved.map((term, at) => ({ one: half(2 * at), other: half(2 * at + 1), uses: segments.uses[term]! })),
       SIMILARITY_OF[this.measures.similarity],
     );
-    this.gathered = contexts;
+    this.gathered = { ...contexts, vectors: contexts.vectors.slice(0, terms.length) };
   }
 
   /** Why a pair is not judged, or undefined where it is; once contexts are gathered. */
@@ -176,6 +181,15 @@ export class Judge {
       this.proper.set(term, proper);
     }
     return proper;
+  }
+
+  private isFormula(term: number): boolean {
+    let formula = this.formulas.get(term);
+    if (formula === undefined) {
+      formula = formulaShare(this.corpus, this.segments, this.occurrences.of(term)) >= FORMULA;
+      this.formulas.set(term, formula);
+    }
+    return formula;
   }
 
   private wordsOf({ a, b, evidence }: Pair): Pick<Known, 'evidence' | 'shape' | 'general' | 'sharesWord'> {

@@ -24,6 +24,7 @@ export interface Neighbours {
  * Compares pairs of terms against all other terms, usually by Lin's measure (Lin 1998, eq. 4), one row a term that some pair holds.
  * Terms must come in an order that depends on their texts alone, since ties are broken by it.
  * @param listed terms for which the `keep` nearest neighbours are wanted
+ * @param index the vectors inverted, where that was done before
  */
 export function* compareTerms(
   vectors: readonly SparseVector[],
@@ -31,9 +32,9 @@ export function* compareTerms(
   listed: readonly number[],
   keep: number,
   similarity: SimilarityName = 'lin',
+  index: VectorIndex = invert(vectors),
 ): Work<Neighbours> {
-  const totals = vectors.map(({ weights }) => sizeOf(weights, similarity));
-  const index = invert(vectors);
+  const totals = Float64Array.from(vectors, ({ weights }) => sizeOf(weights, similarity));
   const shared = new Float64Array(vectors.length);
   const partners = new Map<number, number[]>();
   for (const { a, b } of pairs) {
@@ -121,7 +122,15 @@ function mostAlike(touched: Uint32Array, score: Float64Array, keep: number): num
   return best;
 }
 
-function invert(vectors: readonly SparseVector[]): { first: Uint32Array; terms: Uint32Array; weights: Float64Array } {
+/** Which vectors have a feature, and with what weight: feature `f` has the entries `[first[f], first[f + 1])`. */
+export interface VectorIndex {
+  readonly first: Uint32Array;
+  readonly terms: Uint32Array;
+  readonly weights: Float64Array;
+}
+
+/** Sorts the features of vectors by feature. */
+export function invert(vectors: readonly SparseVector[]): VectorIndex {
   const largest = vectors.reduce((max, { ids }) => Math.max(max, ids[ids.length - 1] ?? 0), 0);
   const first = new Uint32Array(largest + 2);
   for (const { ids } of vectors) for (const id of ids) first[id + 1]!++;
@@ -130,11 +139,11 @@ function invert(vectors: readonly SparseVector[]): { first: Uint32Array; terms: 
   const terms = new Uint32Array(first[largest + 1]!);
   const weights = new Float64Array(terms.length);
   vectors.forEach((vector, term) => {
-    vector.ids.forEach((id, i) => {
-      const at = next[id]!++;
+    for (let i = 0; i < vector.ids.length; i++) {
+      const at = next[vector.ids[i]!]!++;
       terms[at] = term;
       weights[at] = vector.weights[i]!;
-    });
+    }
   });
   return { first, terms, weights };
 }

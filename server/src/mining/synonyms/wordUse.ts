@@ -22,7 +22,8 @@ const ARTICLES = new Set(['a', 'an', 'the', 'this', 'that', 'each', 'every', 'no
 export function readUses(corpus: Corpus): Uint8Array {
   const { stream, vocabulary } = corpus;
   const { tag, flags, fold } = stream;
-  const uses = Uint8Array.from(tag, (each) => USE_OF_TAG[each]!);
+  const uses = new Uint8Array(tag.length);
+  for (let row = 0; row < tag.length; row++) uses[row] = USE_OF_TAG[tag[row]!]!;
   const nouns = new Int8Array(vocabulary.size);
   const isNoun = (word: number): boolean => {
     if (nouns[word] === 0) nouns[word] = isKnown(vocabulary.textOf(word), 'noun') ? 1 : -1;

@@ -50,26 +50,47 @@ const suffix = new Int32Array(LONGEST + 1);
 class FrameIndex {
   /** Frames by two hashes of 31 bits, of what stands before and behind the gap. */
   private readonly frames = new PairTable();
-  private readonly last: number[] = [];
-  private readonly unit: number[] = [];
-  private readonly row: number[] = [];
-  private readonly before: number[] = [];
+  /** By frame: its last filling plus one. */
+  private last = new Uint32Array(1024);
+  /** By filling: its unit, its row, and the filling of its frame before it, plus one. */
+  private unit = new Int32Array(1024);
+  private row = new Uint32Array(1024);
+  private before = new Uint32Array(1024);
+  private count = 0;
 
   add(prefix: number, suffix: number, unit: number, row: number): void {
+    if (this.count === this.unit.length) this.grow();
+    const at = this.count++;
     const frame = this.frames.idOf(prefix >>> 1, suffix >>> 1);
-    const before = frame < this.last.length ? this.last[frame]! : -1;
-    this.last[frame] = this.unit.length;
-    this.unit.push(unit);
-    this.row.push(row);
-    this.before.push(before);
+    this.unit[at] = unit;
+    this.row[at] = row;
+    this.before[at] = this.last[frame]!;
+    this.last[frame] = at + 1;
+  }
+
+  /** There are at most as many frames as fillings. */
+  private grow(): void {
+    const wide = (old: Uint32Array<ArrayBuffer>): Uint32Array<ArrayBuffer> => {
+      const longer = new Uint32Array(old.length * 2);
+      longer.set(old);
+      return longer;
+    };
+    const unit = new Int32Array(this.unit.length * 2);
+    unit.set(this.unit);
+    this.unit = unit;
+    this.last = wide(this.last);
+    this.row = wide(this.row);
+    this.before = wide(this.before);
   }
 
   substitutions(): Substitution[] {
     const found: Substitution[] = [];
-    for (const last of this.last) {
-      if (this.before[last]! < 0) continue;
+    for (let frame = 0; frame < this.frames.size; frame++) {
+      const last = this.last[frame]!;
+      if (this.before[last - 1] === 0) continue;
       const rowOf = new Map<number, number>();
-      for (let at = last; at >= 0; at = this.before[at]!) rowOf.set(this.unit[at]!, this.row[at]!);
+      for (let next = last; next > 0; next = this.before[next - 1]!)
+        rowOf.set(this.unit[next - 1]!, this.row[next - 1]!);
       if (rowOf.size < 2 || rowOf.size > MOST_FILLERS) continue;
       const fillers = [...rowOf].sort((x, y) => x[1] - y[1]);
       const [[one, rowOfOne], [other, rowOfOther]] = fillers as [[number, number], [number, number]];
