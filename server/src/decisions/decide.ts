@@ -4,7 +4,7 @@ import type { Question } from '../mining/question.js';
 import { inLanguage } from '../termbase/language.js';
 import type { Termbase } from '../termbase/termbase.js';
 import { Decisions } from './decisions.js';
-import { byHabit, habitOf } from './habits.js';
+import { byHabit, habitKeyOf } from './habits.js';
 import { Precedents } from './precedents.js';
 import { narrow, type Settlement } from './narrow.js';
 
@@ -53,7 +53,7 @@ export function decide(chain: readonly Termbase[], questions: readonly Question[
     else settled.push({ question, settled: rest.settled });
   }
   open.sort(byWorth);
-  const putOff = settled.flatMap(({ question, settled: how }) => (how === 'later' ? (habitOf(question) ?? []) : []));
+  const putOff = settled.flatMap(({ question, settled: how }) => (how === 'later' ? (habitKeyOf(question) ?? []) : []));
   const asked = byHabit(open, new Set(putOff));
   return {
     ...{ decisions, decisionsFor, precedents: new Precedents(decisions.concepts), settled, waiting: asked.waiting },

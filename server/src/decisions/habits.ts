@@ -13,7 +13,8 @@ const ENDINGS: readonly { readonly letters: string; readonly around: RegExp; rea
   { letters: 's/z', around: /is(?:e|es|ed|ing|ers?|able|ations?|ational)$/, name: '-ise and -ize' },
   { letters: '/u', around: /o(?:r|rs|red|ring|rite|rites|rful|rable|ral)$/, name: '-or and -our' },
   { letters: '/l', around: /l(?:ed|ing|ers?|able|ations?)$/, name: '-l- and -ll-' },
-  { letters: 'er/re', around: /er(?:s|ed)?$/, name: '-er and -re' },
+  { letters: 'er/re', around: /ers?$/, name: '-er and -re' },
+  { letters: '/e', around: /ered$/, name: '-er and -re' },
   { letters: 'c/s', around: /[aeiou]n?[cs](?:e|es)$/, name: '-ce and -se' },
 ];
 
@@ -22,6 +23,12 @@ export function habitOf({ kind, terms }: Question): string | undefined {
   if (kind !== 'variant' || terms.length !== 2) return undefined;
   const [a, b] = terms.map(({ text }) => text.toLowerCase()).sort() as [string, string];
   return hyphenHabit(a, b) ?? hyphenHabit(b, a) ?? spellingHabit(a, b);
+}
+
+/** A key of the habit: two languages have habits of their own, though they write a prefix alike. */
+export function habitKeyOf(question: Question): string | undefined {
+  const habit = habitOf(question);
+  return habit === undefined ? undefined : `${question.language ?? 'en'} ${habit}`;
 }
 
 function hyphenHabit(hyphened: string, closed: string): string | undefined {
@@ -48,7 +55,7 @@ export interface ByHabit {
 
 /**
  * Keeps the first question about each habit; the others wait, and the first one names their words and is worth what they are
- * worth together. Habits in `putOff` wait altogether.
+ * worth together. Those of which `putOff` has the key wait altogether.
  * @param questions the worthiest first
  */
 export function byHabit(questions: readonly Question[], putOff: ReadonlySet<string>): ByHabit {
@@ -56,7 +63,7 @@ export function byHabit(questions: readonly Question[], putOff: ReadonlySet<stri
   const followers = new Map<string, Question[]>();
   const waiting: Question[] = [];
   for (const question of questions) {
-    const habit = habitOf(question);
+    const habit = habitKeyOf(question);
     const group = habit === undefined ? undefined : followers.get(habit);
     if (habit === undefined) open.push(question);
     else if (putOff.has(habit)) waiting.push(question);
@@ -69,7 +76,7 @@ export function byHabit(questions: readonly Question[], putOff: ReadonlySet<stri
     }
   }
   return {
-    open: open.map((question) => withFollowers(question, followers.get(habitOf(question) ?? '') ?? [])),
+    open: open.map((question) => withFollowers(question, followers.get(habitKeyOf(question) ?? '') ?? [])),
     waiting,
   };
 }

@@ -15,6 +15,7 @@ describe('a habit', () => {
     ['behavioural', 'behavioral', '-or and -our'],
     ['labelled', 'labeled', '-l- and -ll-'],
     ['centres', 'centers', '-er and -re'],
+    ['centred', 'centered', '-er and -re'],
     ['defence', 'defense', '-ce and -se'],
     ['re-use', 'reuse', '“re-” with and without a hyphen'],
     ['subpage', 'sub-page', '“sub-” with and without a hyphen'],
@@ -65,6 +66,12 @@ describe('questions about one habit', () => {
     expect(open[0]!.reasons.map(({ text }) => text)).toEqual([
       '-ise and -ize in another word: “recognised” and “recognized”',
     ]);
+  });
+
+  it('are asked in each language', () => {
+    const english = { ...variant('anti-virus×4', 'antivirus×3'), language: 'en' };
+    const french = { ...variant('anti-gel×2', 'antigel×2'), language: 'fr' };
+    expect(decide([termbase('')], [english, french])).toMatchObject({ open: [english, french], waiting: [] });
   });
 
   it('wait together when the first is put off', () => {
