@@ -16,7 +16,7 @@ export function checkConsistency(reading: Reading, termbase: Termbase): void {
     checkNames(reading, concept.with, 'object');
     for (const term of concept.terms) {
       const earlier = places.get(term.key) ?? [];
-      checkTerm(reading, earlier, { term, concept });
+      checkTerm(reading, earlier, { term, concept }, termbase.language);
       earlier.push({ term, concept });
       places.set(term.key, earlier);
     }
@@ -38,7 +38,7 @@ function checkId(reading: Reading, ids: Map<string, ConceptEntry>, concept: Conc
   }
 }
 
-function checkTerm(reading: Reading, earlier: readonly Place[], place: Place): void {
+function checkTerm(reading: Reading, earlier: readonly Place[], place: Place, usual: string | undefined): void {
   const { term, concept } = place;
   const within = earlier.find((other) => other.concept === concept && other.term.text === term.text);
   if (within !== undefined) {
@@ -50,7 +50,7 @@ function checkTerm(reading: Reading, earlier: readonly Place[], place: Place): v
     }
     return;
   }
-  const across = earlier.find((other) => other.concept !== concept && !areHomonyms(other, place));
+  const across = earlier.find((other) => other.concept !== concept && !areHomonyms(other, place, usual));
   if (across === undefined) return;
   const message =
     `“${term.text}” already belongs to the concept “${across.concept.preferred.text}” (${across.term.status} there), so it is not clear what it names. ` +

@@ -1,5 +1,6 @@
 // The termbase as data: concepts with their terms by status, pairs kept apart, and questions put off.
 import type { Span } from '../base/span.js';
+import { primaryLanguage } from '../text/language.js';
 
 /** The version of the file format that this program reads and writes. */
 export const FORMAT_VERSION = 1;
@@ -122,17 +123,20 @@ export function emptyTermbase(uri: string): Termbase {
 
 /**
  * Whether two entries of one spelling may stand side by side as homonyms (ISO 1087): their languages differ; both give a part
- * of speech or a subject, and these differ; or both are case-sensitive and spelt differently; or they are verbs decided for different
- * objects, where a decision for some objects is an exception to one for all.
+ * of speech or a subject, and these differ; or both are case-sensitive and spelt differently; or they are verbs decided for
+ * different objects, where a decision for some objects is an exception to one for all.
+ * @param usual the language of concepts that state none (BCP 47)
  */
 export function areHomonyms(
   a: { readonly term: TermEntry; readonly concept: ConceptEntry },
   b: { readonly term: TermEntry; readonly concept: ConceptEntry },
+  usual?: string,
 ): boolean {
+  const languageOf = ({ language = usual }: ConceptEntry): string | undefined => primaryLanguage(language);
   const differ = (x: string | undefined, y: string | undefined): boolean =>
     x !== undefined && y !== undefined && x !== y;
   if (differ(a.term.partOfSpeech, b.term.partOfSpeech)) return true;
-  if (differ(a.concept.subject, b.concept.subject) || a.concept.language !== b.concept.language) return true;
+  if (differ(a.concept.subject, b.concept.subject) || languageOf(a.concept) !== languageOf(b.concept)) return true;
   if (a.term.caseSensitive && b.term.caseSensitive && a.term.text !== b.term.text) return true;
   if (a.concept.with.length === 0 && b.concept.with.length === 0) return false;
   return !a.concept.with.some((object) => b.concept.with.some((other) => other.key === object.key));

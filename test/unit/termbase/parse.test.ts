@@ -210,9 +210,17 @@ describe('homonyms and capitals', () => {
       'a name and a word',
       '- { preferred: { term: Job, caseSensitive: true } }\n- { preferred: { term: job, caseSensitive: true } }',
     ],
+    ['different languages', '- { preferred: chat, language: en }\n- { preferred: chat, language: fr }'],
     ['capitals within one concept', '- { preferred: GitHub, deprecated: [Github, github] }'],
   ])('%s may stand side by side', (_, concepts) => {
     expect(problemsOf(`concepts:\n${concepts}\n`)).toEqual([]);
+  });
+
+  it.each([
+    ['two tags of one language', 'en', '- { preferred: chat, language: fr }\n- { preferred: chat, language: fr-CA }'],
+    ['the language of the file, stated and not', 'fr-CA', '- { preferred: chat }\n- { preferred: chat, language: fr }'],
+  ])('%s may not', (_, language, concepts) => {
+    expect(problemsOf(`language: ${language}\nconcepts:\n${concepts}\n`)).toEqual(['4:16 error duplicate-term']);
   });
 });
 
