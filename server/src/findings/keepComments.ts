@@ -12,17 +12,17 @@ export interface CommentSyntax {
   readonly isNothing?: (beside: string) => boolean;
 }
 
-const MARKUP = /<!--\s*evenword:\s*([^]*?)\s*-->/g;
+const MARKUP = /<!--\s*evenword:([^]*?)-->/g;
 
 const SYNTAXES: Readonly<Partial<Record<Format, CommentSyntax>>> = {
   markdown: { comment: MARKUP, reach: toBlankLine },
-  mdx: { comment: /\{\/\*\s*evenword:\s*([^]*?)\s*\*\/\}|<!--\s*evenword:\s*([^]*?)\s*-->/g, reach: toBlankLine },
+  mdx: { comment: /\{\/\*\s*evenword:([^]*?)\*\/\}|<!--\s*evenword:([^]*?)-->/g, reach: toBlankLine },
   html: { comment: MARKUP, reach: toElementEnd },
   xml: { comment: MARKUP, reach: toElementEnd },
-  restructuredtext: { comment: /^[ \t]*\.\.[ \t]+evenword:(?!:)[ \t]*(.*?)[ \t]*$/gm, reach: toBlankLine },
-  asciidoc: { comment: /^\/\/(?!\/)[ \t]*evenword:(?!:)[ \t]*(.*?)[ \t]*$/gm, reach: toBlankLine },
-  latex: { comment: /(?<!\\)%[ \t]*evenword:[ \t]*(.*?)[ \t]*$/gm, reach: toBlankLine },
-  apiDescription: { comment: /(?<=^|\s)#[ \t]*evenword:[ \t]*(.*?)[ \t]*$/gm, reach: toNodeEnd },
+  restructuredtext: { comment: /^[ \t]*\.\.[ \t]+evenword:(?!:)(.*)$/gm, reach: toBlankLine },
+  asciidoc: { comment: /^\/\/(?!\/)[ \t]*evenword:(?!:)(.*)$/gm, reach: toBlankLine },
+  latex: { comment: /(?<!\\)%[ \t]*evenword:(.*)$/gm, reach: toBlankLine },
+  apiDescription: { comment: /(?<=^|\s)#[ \t]*evenword:(.*)$/gm, reach: toNodeEnd },
   // A line of a cell is a JSON string of its own.
   notebook: { comment: MARKUP, reach: toEmptyString, isNothing: (beside) => /^\s*"?(?:\\n)?"?,?\s*$/.test(beside) },
 };

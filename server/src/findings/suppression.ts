@@ -42,8 +42,8 @@ export function readKept({ text, format }: SourceText): Kept {
   const problems: KeepProblem[] = [];
   for (const match of text.matchAll(syntax.comment)) {
     const span = { start: match.index, end: match.index + match[0].length };
-    const request = (match[1] ?? match[2] ?? '').replaceAll('\\"', '"');
-    const keep = /^keep(?:\s+((?:["“][^"”]+["”]\s*,?\s*)+))?$/.exec(request);
+    const request = (match[1] ?? match[2] ?? '').replaceAll('\\"', '"').trim();
+    const keep = /^keep(?:\s+((?:["“][^"”]+["”]\s*(?:,\s*)?)+))?$/.exec(request);
     if (!keep) {
       problems.push({
         span,

@@ -74,6 +74,12 @@ describe('a comment that keeps', () => {
     expect(keptLines('asciidoc', lines, 'float')).toEqual([]);
   });
 
+  it('is told to be wrong where a slip follows many names, without trying every way to part them', () => {
+    const text = `<!-- evenword: keep ${'"buoy" '.repeat(60)}slip -->\n`;
+    const { problems } = readKept({ uri: 'a', format: 'markdown', text });
+    expect(problems.map(({ span }) => [span.start, span.end])).toEqual([[0, text.length - 1]]);
+  });
+
   it('is no directive, no escaped sign and nothing in plain text', () => {
     expect(keptLines('restructuredtext', ['.. evenword:: keep', 'b'])).toEqual([]);
     expect(keptLines('latex', ['5\\% evenword: keep', 'b'])).toEqual([]);
