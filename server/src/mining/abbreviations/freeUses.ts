@@ -46,8 +46,8 @@ export function freeUses(corpus: Corpus, long: readonly Use[], short: readonly U
     if (isFirst || explained.has(use.row) || isBeside(corpus, use, shortRows) || isNamed(corpus, use)) continue;
     found.push(use);
   }
-  const capitalised = found.filter((use) => isCapitalised(corpus, use));
-  const all = capitalised.length * 2 < found.length ? found.filter((use) => !capitalised.includes(use)) : found;
+  const plain = found.filter((use) => !isCapitalised(corpus, use));
+  const all = plain.length * 2 > found.length ? plain : found;
   const onItsPages = all.filter((use) => shortPages.has(stream.documentOf(use.row)));
   const explaining = new Set(expansion.definitions.map((definition) => stream.documentOf(definition.longRow)));
   const returns = new Map<number, number>();
