@@ -136,6 +136,7 @@ describe('the score', () => {
     properNames: 0,
     general: 0,
     fewest: 20,
+    formula: false,
   };
 
   it('asks where list and usage agree, and not without evidence of identity', () => {
@@ -162,7 +163,27 @@ describe('the score', () => {
     expect(isGrounded({ ...known, shape: 'contained' })).toBe(false);
     expect(isGrounded({ ...known, general: 2 })).toBe(false);
     expect(isGrounded({ ...known, likeness: { similarity: 0.05, rankOfA: 2, rankOfB: 3 } })).toBe(false);
-    expect(isGrounded({ ...known, evidence: [{ ...statement, kind: 'renaming' }] })).toBe(true);
+    expect(isGrounded({ ...known, formula: true })).toBe(false);
+  });
+
+  it('holds a renaming to what the old name means today', () => {
+    const renamed: Known = { ...known, evidence: [{ kind: 'renaming', strength: 0.9, text: '', value: 1 }] };
+    expect(isGrounded(renamed)).toBe(true);
+    expect(isGrounded({ ...renamed, likeness: { similarity: 0.05, rankOfA: 90, rankOfB: 80 } })).toBe(false);
+  });
+
+  it('holds what a list itself doubts to more uses, and single words to a second place', () => {
+    const doubtful: Known = { ...known, evidence: [{ kind: 'list', strength: 0.65, text: '', value: 0.65 }] };
+    expect(isGrounded(doubtful)).toBe(true);
+    expect(isGrounded({ ...doubtful, fewest: 9 })).toBe(false);
+    expect(isGrounded({ ...known, fewest: 9 })).toBe(true);
+    const said = (value: number): Known => ({
+      ...doubtful,
+      shape: 'words',
+      evidence: [...doubtful.evidence, { kind: 'definition', strength: 0.3, text: '', value }],
+    });
+    expect(isGrounded(said(1))).toBe(false);
+    expect(isGrounded(said(2))).toBe(true);
   });
 
   it('counts a template once, and siblings of a template not at all', () => {

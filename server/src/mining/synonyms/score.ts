@@ -25,6 +25,8 @@ export interface Known {
   readonly general: number;
   /** Uses of the rarer term. */
   readonly fewest: number;
+  /** Whether one of the two stands in one formula nearly always. */
+  readonly formula: boolean;
 }
 
 /** Two unrelated terms, before any evidence. */
@@ -40,8 +42,10 @@ const HABIT = 0.5;
 /** More places than this are those of a template, and say no more. */
 const MOST_PLACES = 3;
 
-/** Least share of the similarity that two names of one thing have, where a list alone speaks for terms of several words. */
+/** Least share of the similarity that two names of one thing have, where a list or word of a renaming speaks alone. */
 const LEAST_CONFIRMED = 0.5;
+/** Fewest uses of the rarer term, where all lists that speak for it know the two as different things as well. */
+const FEWEST_OF_DOUBTFUL = 10;
 
 const LEXICAL: readonly EvidenceKind[] = ['list', 'dictionary', 'component'];
 
@@ -72,20 +76,29 @@ export function bestScoreOf(
 }
 
 /**
- * Whether a pair may be asked about by default. The documents say so outright in two places; or a list agrees with them;
- * or two terms of several words differ in words that a list calls one, which use confirms. Single words of a list are as
- * often sisters as twins.
+ * Whether a pair may be asked about by default. The documents say so outright in two places, or of a renaming that use
+ * confirms; or a list agrees with them; or two terms of several words differ in words that a list calls one, which use
+ * confirms. Single words of a list are as often sisters as twins.
  */
-export function isGrounded(known: Pick<Known, 'evidence' | 'shape' | 'general' | 'likeness' | 'self'>): boolean {
-  const { evidence, shape, general, likeness, self } = known;
-  if (isRenamed(known) || strongest(evidence, ['past-edit']) >= HABIT) return true;
-  // A choice between two words of general English is one of style.
-  if (general === 2) return false;
+export function isGrounded(
+  known: Pick<Known, 'evidence' | 'shape' | 'general' | 'likeness' | 'self' | 'fewest' | 'formula'>,
+): boolean {
+  const { evidence, shape, general, likeness, self, fewest } = known;
+  if (strongest(evidence, ['past-edit']) >= HABIT) return true;
+  const isConfirmed = likeness.similarity / self >= LEAST_CONFIRMED;
+  // A name that was given up is free for another thing: use tells whether it still means the first.
+  if (isRenamed(known) && isConfirmed) return true;
+  // A choice between two words of general English is one of style; use in a formula confirms nothing.
+  if (general === 2 || known.formula) return false;
   if (evidence.some(({ kind, strength }) => kind === 'definition' && strength >= (shape === 'multiword' ? 0.9 : 1)))
     return true;
   if (strongest(evidence, LEXICAL) === 0) return false;
-  if (shape === 'multiword') return likeness.similarity / self >= LEAST_CONFIRMED;
-  return evidence.some(({ kind, value }) => isOfDocuments(kind) && (kind !== 'near-sentence' || value > 1));
+  const isDoubtful = evidence.every(({ kind, value }) => !LEXICAL.includes(kind) || value < 1);
+  if (isDoubtful && fewest < FEWEST_OF_DOUBTFUL) return false;
+  if (shape === 'multiword') return isConfirmed;
+  return evidence.some(
+    ({ kind, value }) => isOfDocuments(kind) && ((kind !== 'near-sentence' && !isDoubtful) || value > 1),
+  );
 }
 
 function isOfDocuments(kind: EvidenceKind): boolean {
