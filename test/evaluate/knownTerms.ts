@@ -28,8 +28,7 @@ export function knownTermsOf(corpus: Corpus): KnownTerms {
   terms.forEach(({ words }, index) => outside.set(nounKey(words.join(' '), 'open'), uses[index]!));
   const read = finish(readVerbUses(corpus, classes));
   const verbs = new Set<string>();
-  read.uses.forEach(({ length }, pair) => {
-    if (length > 0) verbs.add(verbKey(read.verbs.textOf(read.pairs.leftOf(pair)), 'open'));
-  });
+  for (let pair = 0; pair < read.pairs.size; pair++)
+    verbs.add(verbKey(read.verbs.textOf(read.pairs.leftOf(pair)), 'open'));
   return { outside, verbs };
 }

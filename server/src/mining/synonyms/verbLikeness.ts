@@ -23,7 +23,11 @@ export function* compareVerbs(
   return likeness;
 }
 
-function* vectorsOf({ stream }: Corpus, { verbs, pairs, uses }: VerbUses, weighting: Weighting): Work<SparseVector[]> {
+function* vectorsOf(
+  { stream }: Corpus,
+  { verbs, pairs, timesOf, usesOf }: VerbUses,
+  weighting: Weighting,
+): Work<SparseVector[]> {
   const features = new PairTable();
   const cells = new PairTable();
   const counts: number[] = [];
@@ -31,10 +35,10 @@ function* vectorsOf({ stream }: Corpus, { verbs, pairs, uses }: VerbUses, weight
     const cell = cells.idOf(verb, feature);
     counts[cell] = (counts[cell] ?? 0) + count;
   };
-  for (let pair = 0; pair < uses.length; pair++) {
+  for (let pair = 0; pair < pairs.size; pair++) {
     const verb = pairs.leftOf(pair);
-    add(verb, features.idOf(0, pairs.rightOf(pair)), uses[pair]!.length);
-    for (const { object } of uses[pair]!) {
+    add(verb, features.idOf(0, pairs.rightOf(pair)), timesOf(pair));
+    for (const { object } of usesOf(pair)) {
       const next = object + 1;
       if (next < stream.length && stream.tag[next] === TAG.ADP) add(verb, features.idOf(1, stream.fold[next]!), 1);
     }
@@ -43,7 +47,8 @@ function* vectorsOf({ stream }: Corpus, { verbs, pairs, uses }: VerbUses, weight
   const df = new Uint32Array(features.size);
   const rows: [feature: number, weight: number][][] = Array.from({ length: verbs.size }, () => []);
   for (let cell = 0; cell < cells.size; cell++) df[cells.rightOf(cell)]!++;
-  const met = new Set(uses.map((_, pair) => pairs.leftOf(pair))).size;
+  // A verb is numbered with its first object.
+  const met = verbs.size;
   const totals = { features: features.size, terms: verbs.size, rows: verbs.size, df, met };
   const weight = weigher(weighting, cells, (cell) => counts[cell]!, totals);
   for (let cell = 0; cell < cells.size; cell++) {

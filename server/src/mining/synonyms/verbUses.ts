@@ -33,8 +33,10 @@ export interface VerbUses {
   readonly objects: Interner;
   /** The number of each (verb, object) that was met. */
   readonly pairs: PairTable;
-  /** The uses of each pair. */
-  readonly uses: readonly (readonly VerbUse[])[];
+  /** How often a pair was met. */
+  readonly timesOf: (pair: number) => number;
+  /** The uses of a pair, in order. */
+  readonly usesOf: (pair: number) => VerbUse[];
   /** "create or update", "find and fix": how often two verbs are set side by side, by their texts in order. */
   coordinated(one: string, other: string): number;
 }
@@ -48,33 +50,86 @@ export function* readVerbUses(corpus: Corpus, classes: Uint8Array): Work<VerbUse
   const verbs = new Interner();
   const objects = new Interner();
   const pairs = new PairTable();
-  const uses: VerbUse[][] = [];
+  const met = new UseColumns();
   const sideBySide = new Map<string, number>();
   const textAt = (row: number): string => vocabulary.textOf(stream.fold[row]!);
-  const put = (verb: string, object: number, use: Omit<VerbUse, 'object'>): void => {
-    const pair = pairs.idOf(verbs.idOf(verb), objects.idOf(singularOf(textAt(object))));
-    if (pair === uses.length) uses.push([{ ...use, object }]);
-    else uses[pair]!.push({ ...use, object });
+  const singulars = new Int32Array(vocabulary.size);
+  const objectAt = (row: number): number => {
+    const word = stream.fold[row]!;
+    if (singulars[word] === 0) singulars[word] = objects.idOf(singularOf(vocabulary.textOf(word))) + 1;
+    return singulars[word]! - 1;
   };
+  const put = (verb: string, row: number, length: number, object: number): void =>
+    met.add(pairs.idOf(verbs.idOf(verb), objectAt(object)), row, length, object);
   for (let row = 0; row < stream.length; row++) {
     if (row % 50_000 === 0) yield;
     if (stream.tag[row] !== TAG.VERB || classes[row] === NOUN || !isWord(stream, row)) continue;
     const lemma = vocabulary.textOf(stream.lemma[row]!);
     const particle = row + 1 < stream.length && joins(stream, row + 1) && isParticle(lemma, textAt(row + 1));
     const verb = particle ? `${lemma} ${textAt(row + 1)}` : lemma;
-    const use = { row, length: particle ? 2 : 1 };
-    const other = coordinatedVerb(stream, textAt, row + use.length);
+    const length = particle ? 2 : 1;
+    const other = coordinatedVerb(stream, textAt, row + length);
     if (other !== undefined) count(sideBySide, lemma, vocabulary.textOf(stream.lemma[other]!));
-    const after = objectAfter(stream, classes, textAt, row + use.length);
-    if (after !== undefined) put(verb, after, use);
+    const after = objectAfter(stream, classes, textAt, row + length);
+    if (after !== undefined) put(verb, row, length, after);
     else {
       const before = subjectOfPassive(stream, classes, textAt, row);
-      if (before !== undefined) put(verb, before, use);
+      if (before !== undefined) put(verb, row, length, before);
     }
   }
   const coordinated = (one: string, other: string): number =>
     sideBySide.get(keyOf(one.split(' ')[0]!, other.split(' ')[0]!)) ?? 0;
-  return { verbs, objects, pairs, uses, coordinated };
+  return { verbs, objects, pairs, ...met.byPair(pairs.size), coordinated };
+}
+
+/** Uses in the order in which they are met, then sorted by their pair. */
+class UseColumns {
+  private count = 0;
+  private pair = new Uint32Array(1024);
+  private row = new Uint32Array(1024);
+  private object = new Uint32Array(1024);
+  private length = new Uint8Array(1024);
+
+  add(pair: number, row: number, length: number, object: number): void {
+    if (this.count === this.pair.length) this.grow();
+    const at = this.count++;
+    this.pair[at] = pair;
+    this.row[at] = row;
+    this.object[at] = object;
+    this.length[at] = length;
+  }
+
+  byPair(pairs: number): Pick<VerbUses, 'timesOf' | 'usesOf'> {
+    const { row, object, length } = this;
+    const first = new Uint32Array(pairs + 1);
+    for (let at = 0; at < this.count; at++) first[this.pair[at]! + 1]!++;
+    for (let pair = 0; pair < pairs; pair++) first[pair + 1]! += first[pair]!;
+    const next = first.slice();
+    const sorted = new Uint32Array(this.count);
+    for (let at = 0; at < this.count; at++) sorted[next[this.pair[at]!]!++] = at;
+    return {
+      timesOf: (pair) => first[pair + 1]! - first[pair]!,
+      usesOf: (pair) =>
+        Array.from(sorted.subarray(first[pair], first[pair + 1]), (at) => {
+          return { row: row[at]!, length: length[at]!, object: object[at]! };
+        }),
+    };
+  }
+
+  private grow(): void {
+    const size = this.count * 2;
+    const wide = (old: Uint32Array<ArrayBuffer>): Uint32Array<ArrayBuffer> => {
+      const longer = new Uint32Array(size);
+      longer.set(old);
+      return longer;
+    };
+    const length = new Uint8Array(size);
+    length.set(this.length);
+    this.length = length;
+    this.pair = wide(this.pair);
+    this.row = wide(this.row);
+    this.object = wide(this.object);
+  }
 }
 
 function isParticle(verb: string, word: string): boolean {
