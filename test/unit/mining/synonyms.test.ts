@@ -31,6 +31,7 @@ function pagesWith(verb: string, object: string): string[] {
     `Before you leave the yard, ${verb} the ${object} once. The crew notes the time.`,
     `They ${verb} the ${object} when the weather is calm. It takes an hour.`,
     `We ${verb} the ${object} in spring. The report says who was there.`,
+    `Guests never ${verb} the ${object} themselves. The watch tells them why.`,
   ];
 }
 
@@ -160,8 +161,8 @@ describe('verbs with their object', () => {
       objects: ['error'],
     });
     expect(questions[0]!.terms.map(({ text, uses, partOfSpeech }) => [text, uses, partOfSpeech])).toEqual([
-      ['raise', 4, 'verb'],
-      ['throw', 4, 'verb'],
+      ['raise', 5, 'verb'],
+      ['throw', 5, 'verb'],
     ]);
     expect(questions[0]!.reasons[0]!.text).toContain('“throw … error”');
   });

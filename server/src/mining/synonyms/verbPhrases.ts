@@ -9,6 +9,8 @@ export interface SharedPhrases {
   readonly share: number;
   /** Sentences in which both verbs have the object: steps of one procedure. */
   readonly sameSentence: number;
+  /** Pages on which both verbs have the object with the same modifiers. */
+  readonly pages: number;
 }
 
 /** Compares two verbs by the phrases that their uses have as object (“an RDB file” is no “configuration file”). */
@@ -17,10 +19,14 @@ export function compareObjects(corpus: Corpus, one: readonly VerbUse[], other: r
   const right = countBy(other, (use) => phraseOf(corpus, use));
   let shared = 0;
   for (const [phrase, count] of left) shared += Math.min(count, right.get(phrase) ?? 0);
+  const onPage = (use: VerbUse): string => `${corpus.stream.documentOf(use.row)} ${phraseOf(corpus, use)}`;
+  const ofOther = new Set(other.map(onPage));
+  const together = new Set(one.map(onPage).filter((phrase) => ofOther.has(phrase)));
   const sentences = new Set(one.map(({ row }) => sentenceOf(corpus, row)));
   return {
     share: shared / Math.min(one.length, other.length),
     sameSentence: other.filter(({ row }) => sentences.has(sentenceOf(corpus, row))).length,
+    pages: new Set([...together].map((phrase) => phrase.slice(0, phrase.indexOf(' ')))).size,
   };
 }
 

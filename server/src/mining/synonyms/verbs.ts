@@ -23,6 +23,12 @@ import type { VerbUse, VerbUses } from './verbUses.js';
 
 /** Fewest uses of a verb with the object. */
 const FEWEST_USES = 3;
+/** From so many uses of each verb with the object on, … */
+const ENOUGH_USES = 5;
+/** … or so many pages on which both have the very same object, … */
+const ENOUGH_PAGES = 2;
+/** … and so large a share of the rarer verb's uses with such objects, the object is proof enough of one operation. */
+const ENOUGH_SHARED = 0.6;
 /** Least attraction between a verb and the object, PMI in bits. */
 const LEAST_PMI = 0.3;
 /** Verbs that are set side by side so often ("create or update") are two operations. */
@@ -55,6 +61,14 @@ interface Operation {
   readonly object: string;
   readonly score: number;
   readonly links: readonly VerbLink[];
+  /** Whether the object alone is proof enough; if not, the verbs have one that is. */
+  readonly isSure: boolean;
+}
+
+interface JudgedVerbs {
+  readonly link: VerbLink;
+  readonly score: number;
+  readonly isSure: boolean;
 }
 
 /** Asks about verbs that are said of the same object. */
@@ -94,25 +108,29 @@ export function* askVerbs(
   const operations: Operation[] = [];
   for (const { object, verbs, links } of linked) {
     if (links.size === 0) continue;
-    const judge = (one: VerbWithObject, other: VerbWithObject): { link: VerbLink; score: number } | undefined => {
+    const judge = (one: VerbWithObject, other: VerbWithObject): JudgedVerbs | undefined => {
       const key = keyOf(one.verb, other.verb, read.verbs.size);
       const link = links.get(key);
       if (link === undefined) return undefined;
-      const { share, sameSentence } = compareObjects(corpus, one.uses, other.uses);
+      const { share, sameSentence, pages } = compareObjects(corpus, one.uses, other.uses);
       if (share < LEAST_SHARED || sameSentence > MOST_IN_ONE_SENTENCE) return undefined;
+      const fewest = Math.min(one.uses.length, other.uses.length);
       const score = scoreOfVerbs(one.text, other.text, object, {
         link,
         likeness: likeness.get(key)!,
-        fewest: Math.min(one.uses.length, other.uses.length),
+        fewest,
         sharedPhrases: share,
         substitutions: substituted(one.text, other.text),
       });
-      return { link, score };
+      const isSure = share >= ENOUGH_SHARED && (fewest >= ENOUGH_USES || pages >= ENOUGH_PAGES);
+      return { link, score, isSure };
     };
     operations.push(...operationsOn(object, verbs, judge));
   }
   yield;
-  return groupByVerbs(operations).map((same) => questionOf(corpus, same));
+  return groupByVerbs(operations)
+    .filter((same) => same.some(({ isSure }) => isSure))
+    .map((same) => questionOf(corpus, same));
 }
 
 function keyOf(one: number, other: number, verbs: number): number {
@@ -122,19 +140,23 @@ function keyOf(one: number, other: number, verbs: number): number {
 function operationsOn(
   object: string,
   verbs: readonly VerbWithObject[],
-  judge: (one: VerbWithObject, other: VerbWithObject) => { link: VerbLink; score: number } | undefined,
+  judge: (one: VerbWithObject, other: VerbWithObject) => JudgedVerbs | undefined,
 ): Operation[] {
-  const holding: { a: number; b: number; score: number; link: VerbLink }[] = [];
+  const holding: (JudgedVerbs & { a: number; b: number })[] = [];
   forEachPair([...verbs.keys()], (a, b) => {
     const judged = judge(verbs[a]!, verbs[b]!);
     if (judged !== undefined && judged.score >= THRESHOLD) holding.push({ a, b, ...judged });
   });
-  return clusterPairs(holding, verbs.length).map(({ members, weakest }) => ({
-    verbs: members.map((at) => verbs[at]!),
-    object,
-    score: weakest,
-    links: holding.filter(({ a, b }) => members.includes(a) && members.includes(b)).map(({ link }) => link),
-  }));
+  return clusterPairs(holding, verbs.length).map(({ members, weakest }) => {
+    const within = holding.filter(({ a, b }) => members.includes(a) && members.includes(b));
+    return {
+      verbs: members.map((at) => verbs[at]!),
+      object,
+      score: weakest,
+      links: within.map(({ link }) => link),
+      isSure: within.every(({ isSure }) => isSure),
+    };
+  });
 }
 
 interface ObjectVerbs {
@@ -144,26 +166,25 @@ interface ObjectVerbs {
 }
 
 /** Objects with at least two verbs that are used and attracted enough, in order of their texts. */
-function byObject({ verbs, objects, pairs, timesOf, usesOf }: VerbUses): ObjectVerbs[] {
+function byObject({ verbs, objects, pairs, uses }: VerbUses): ObjectVerbs[] {
   const verbTotals = new Float64Array(verbs.size);
   const objectTotals = new Float64Array(objects.size);
   let all = 0;
-  for (let pair = 0; pair < pairs.size; pair++) {
-    verbTotals[pairs.leftOf(pair)]! += timesOf(pair);
-    objectTotals[pairs.rightOf(pair)]! += timesOf(pair);
-    all += timesOf(pair);
-  }
+  uses.forEach(({ length }, pair) => {
+    verbTotals[pairs.leftOf(pair)]! += length;
+    objectTotals[pairs.rightOf(pair)]! += length;
+    all += length;
+  });
   const found = new Map<number, VerbWithObject[]>();
-  for (let pair = 0; pair < pairs.size; pair++) {
-    if (timesOf(pair) < FEWEST_USES) continue;
+  uses.forEach((rows, pair) => {
+    if (rows.length < FEWEST_USES) return;
     const verb = pairs.leftOf(pair);
     const object = pairs.rightOf(pair);
-    if (pmi({ c1: verbTotals[verb]!, c2: objectTotals[object]!, c12: timesOf(pair), n: all }) < LEAST_PMI)
-      continue;
+    if (pmi({ c1: verbTotals[verb]!, c2: objectTotals[object]!, c12: rows.length, n: all }) < LEAST_PMI) return;
     const list = found.get(object) ?? [];
-    list.push({ verb, text: verbs.textOf(verb), uses: usesOf(pair) });
+    list.push({ verb, text: verbs.textOf(verb), uses: rows });
     found.set(object, list);
-  }
+  });
   return [...found]
     .filter(([, list]) => list.length > 1)
     .map(([object, list]) => ({
