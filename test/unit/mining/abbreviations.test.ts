@@ -192,6 +192,7 @@ describe('a free long form', () => {
     ['as the label of an item', '- Pressure relief valve: in the hatch', 0],
     ['as the name of a page', 'Open the Pressure Relief Valve page first.', 0],
     ['first on a page with the short form', 'Check the pressure relief valve. Then wait. Open the PRV.', 0],
+    ['after the short form on it', 'Open the PRV. Check the pressure relief valve.', 1],
     ['again on it', 'A pressure relief valve opens. Open the PRV. Check the pressure relief valve.', 1],
     ['beside the short form', 'A pressure relief valve opens. Check the pressure relief valve, or PRV, first.', 0],
   ])('%s: %s', (_, page, count) => {

@@ -36,13 +36,18 @@ export function freeUses(corpus: Corpus, long: readonly Use[], short: readonly U
   const explained = new Set(expansion.definitions.map((definition) => definition.longRow));
   const shortRows = new Set(short.map((use) => use.row));
   const shortPages = new Set(short.map((use) => stream.documentOf(use.row)));
-  const introduced = new Set<number>();
+  // A page is introduced to the concept by the first long form before which no sentence has the short one.
+  const introduced = new Map<number, number>();
+  for (const use of short) {
+    const page = stream.documentOf(use.row);
+    if (!introduced.has(page) && isProse(corpus, use)) introduced.set(page, use.row);
+  }
   const found: Use[] = [];
   for (const use of long) {
     if (!isProse(corpus, use)) continue;
     const page = stream.documentOf(use.row);
-    const isFirst = shortPages.has(page) && !introduced.has(page);
-    introduced.add(page);
+    const isFirst = shortPages.has(page) && use.row < (introduced.get(page) ?? Infinity);
+    if (isFirst) introduced.set(page, use.row);
     if (isFirst || explained.has(use.row) || isBeside(corpus, use, shortRows) || isNamed(corpus, use)) continue;
     found.push(use);
   }
