@@ -196,7 +196,7 @@ describe('objects of verbs', () => {
       'Save the log file and write the log file.',
     ]);
     const read = finish(readVerbUses(corpus, readUses(corpus)));
-    const usesOf = (verb: string) => read.uses[read.pairs.find(read.verbs.find(verb)!, read.objects.find('file')!)!]!;
+    const usesOf = (verb: string) => read.usesOf(read.pairs.find(read.verbs.find(verb)!, read.objects.find('file')!)!);
     expect(compareObjects(corpus, usesOf('save'), usesOf('write'))).toEqual({
       share: 2 / 3,
       sameSentence: 1,

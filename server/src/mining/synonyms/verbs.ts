@@ -166,25 +166,25 @@ interface ObjectVerbs {
 }
 
 /** Objects with at least two verbs that are used and attracted enough, in order of their texts. */
-function byObject({ verbs, objects, pairs, uses }: VerbUses): ObjectVerbs[] {
+function byObject({ verbs, objects, pairs, timesOf, usesOf }: VerbUses): ObjectVerbs[] {
   const verbTotals = new Float64Array(verbs.size);
   const objectTotals = new Float64Array(objects.size);
   let all = 0;
-  uses.forEach(({ length }, pair) => {
-    verbTotals[pairs.leftOf(pair)]! += length;
-    objectTotals[pairs.rightOf(pair)]! += length;
-    all += length;
-  });
+  for (let pair = 0; pair < pairs.size; pair++) {
+    verbTotals[pairs.leftOf(pair)]! += timesOf(pair);
+    objectTotals[pairs.rightOf(pair)]! += timesOf(pair);
+    all += timesOf(pair);
+  }
   const found = new Map<number, VerbWithObject[]>();
-  uses.forEach((rows, pair) => {
-    if (rows.length < FEWEST_USES) return;
+  for (let pair = 0; pair < pairs.size; pair++) {
+    if (timesOf(pair) < FEWEST_USES) continue;
     const verb = pairs.leftOf(pair);
     const object = pairs.rightOf(pair);
-    if (pmi({ c1: verbTotals[verb]!, c2: objectTotals[object]!, c12: rows.length, n: all }) < LEAST_PMI) return;
+    if (pmi({ c1: verbTotals[verb]!, c2: objectTotals[object]!, c12: timesOf(pair), n: all }) < LEAST_PMI) continue;
     const list = found.get(object) ?? [];
-    list.push({ verb, text: verbs.textOf(verb), uses: rows });
+    list.push({ verb, text: verbs.textOf(verb), uses: usesOf(pair) });
     found.set(object, list);
-  });
+  }
   return [...found]
     .filter(([, list]) => list.length > 1)
     .map(([object, list]) => ({
