@@ -8,6 +8,7 @@ import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
 import { renderQuestions } from './questionText.js';
+import { rounded } from './rounded.js';
 import { USAGE_OPTIONS } from './usageOptions.js';
 
 export const ask: Subcommand = {
@@ -53,7 +54,7 @@ function toJson(snapshot: Snapshot, questions: readonly Question[]): object {
       kind: question.kind,
       // English goes without saying.
       ...(question.language !== undefined && question.language !== 'en' && { language: question.language }),
-      confidence: Math.round(question.confidence * 1000) / 1000,
+      confidence: rounded(question.confidence),
       terms: question.terms.map(({ text, uses, documents: pages, forms }) => ({
         ...{ text, uses, documents: pages },
         forms: forms.map((form) => form.text),
@@ -61,7 +62,7 @@ function toJson(snapshot: Snapshot, questions: readonly Question[]): object {
       reasons: question.reasons.map(({ kind, text, value }) => ({
         kind,
         text,
-        value: Math.round(value * 1000) / 1000,
+        value: rounded(value),
       })),
       examples: examples.of(question).map(({ term, uri, line, text }) => ({ term, uri, line, text })),
     })),

@@ -20,8 +20,8 @@ const TITLES: Readonly<Record<CompanionRelation, string>> = {
 export function renderCompanions(found: TermCompanions, host: CliHost): string {
   const { term, uses, documents, related, floor, segments, whole, heldIn } = found;
   const parts = [`“${host.emphasise(term)}”: ${count(uses, 'use')} on ${count(documents, 'page')}.\n`];
-  for (const { text, uses: outside } of heldIn)
-    parts.push(`Not counted: ${count(outside, 'use')} inside “${text}”, which names a thing of its own.\n`);
+  for (const { text, uses: held } of heldIn)
+    parts.push(`Not counted: ${count(held, 'use')} inside “${text}”, which names a thing of its own.\n`);
   if (whole?.keptWhole === true)
     parts.push(
       `Kept whole: its words attract one another (${whole.attraction.toFixed(2)} of 1), and it is used unlike them (${Math.round(whole.predicted * 100)} % of its use is what its parts predict).\n`,

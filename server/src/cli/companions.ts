@@ -7,6 +7,7 @@ import { renderCompanions } from './companionText.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
+import { rounded } from './rounded.js';
 import { readList, readMost, refuseUnknown } from './termOperands.js';
 
 /** Companions of each relation that are listed unless more are asked for. */
@@ -64,8 +65,4 @@ function toJson(found: TermCompanions): object {
     ...(whole && { whole: { ...whole, attraction: rounded(whole.attraction), predicted: rounded(whole.predicted) } }),
     heldIn: heldIn.map(({ text, uses: count }) => ({ text, uses: count })),
   };
-}
-
-function rounded(value: number): number {
-  return Math.round(value * 1000) / 1000;
 }

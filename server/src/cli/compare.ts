@@ -5,10 +5,11 @@ import type { Example } from '../engine/examples.js';
 import type { ComparedCompanion } from '../mining/comparison/sharedCompanions.js';
 import type { Reason } from '../mining/question.js';
 import { FILE_OPTIONS, surveyOrStop } from './common.js';
-import { renderComparison } from './compareText.js';
+import { below, renderComparison } from './compareText.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
+import { rounded } from './rounded.js';
 import { refuseUnknown } from './termOperands.js';
 import { USAGE_OPTIONS } from './usageOptions.js';
 
@@ -81,14 +82,4 @@ function toJson(
       ...(pastEdits && { pastEdits }),
     },
   };
-}
-
-/** A folder as it stands below the root; the root itself is `.`. */
-export function below(folder: string, root: string): string {
-  const path = folder.startsWith(root) ? folder.slice(root.length) : folder;
-  return path === '' ? '.' : path;
-}
-
-function rounded(value: number): number {
-  return Math.round(value * 1000) / 1000;
 }

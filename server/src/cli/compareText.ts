@@ -2,7 +2,6 @@
 import type { TermComparison } from '../engine/comparison.js';
 import type { Example } from '../engine/examples.js';
 import type { Reason } from '../mining/question.js';
-import { below } from './compare.js';
 import type { CliHost } from './host.js';
 import { count, exampleLines } from './words.js';
 
@@ -61,6 +60,12 @@ function folders({ terms, figures: { choice } }: TermComparison, root: string): 
     lines.push(`    The folder settles ${share} % of the choice: two teams may name one thing, or write about two.\n`);
   }
   return lines;
+}
+
+/** A folder as it stands below the root; the root itself is `.`. */
+export function below(folder: string, root: string): string {
+  const path = folder.startsWith(root) ? folder.slice(root.length) : folder;
+  return path === '' ? '.' : path;
 }
 
 function figures({ figures: { choice, usage, together, companions } }: TermComparison): string[] {

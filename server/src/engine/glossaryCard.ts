@@ -45,12 +45,12 @@ export function definedAt(snapshot: Snapshot, uri: string, offset: number): Defi
       isOpen(content.zones, closed) && touches({ start, end: start + content.sourceLength }, offset),
   );
   if (at < 0) return undefined;
-  const { content } = reading.prose.blocks[at]!;
+  const block = reading.prose.blocks[at]!;
+  const { content } = block;
   if (content.glossary === 'headword') return undefined;
   const language = languagesIn(reading).blocks[at]!;
   const names = headwordsOf(snapshot, language);
   if (names === undefined) return undefined;
-  const block = reading.prose.blocks[at]!;
   let found: DefinedAtPlace | undefined;
   names.matcher.scan(content.text, 0, content.text.length, (index, start, end) => {
     const span = { start: sourceStart(block, start), end: sourceEnd(block, end) };

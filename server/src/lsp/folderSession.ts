@@ -121,7 +121,7 @@ export class FolderSession {
     const zones = settings.read?.zones;
     this.engine.apply({
       settings: { ...DEFAULT_SETTINGS, ...(least !== undefined && { leastConfidence: least }) },
-      mining: { ...this.engine.snapshot.mining, closedZones: zones && closedZones(zones) },
+      mining: { ...this.engine.snapshot.mining, closedZones: zones ? closedZones(zones) : undefined },
     });
     this.showDecisions();
     this.settleWhenIdle();

@@ -164,6 +164,16 @@ describe('against one concept', () => {
   });
 });
 
+describe('a sentence that is repeated', () => {
+  it('counts once among all sentences, as it does among those with a term', () => {
+    const repeated = { ...MIXED, 'copy.md': `${MIXED['web/page0.md']!}\n` };
+    const { together } = compare(snapshotOf(repeated), 'search bar', 'search box').figures;
+    expect(together).toEqual(compare(snapshotOf(MIXED), 'search bar', 'search box').figures.together);
+    const sentences = Object.values(MIXED).flatMap((text) => text.match(/\.(?= |$)/g)!);
+    expect(together.sentences).toBe(sentences.length);
+  });
+});
+
 describe('what cannot be compared', () => {
   const snapshot = snapshotOf(MIXED);
   it('is an unknown term, with names that are near, and forms of one term', () => {

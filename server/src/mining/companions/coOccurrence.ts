@@ -94,7 +94,7 @@ function bySegmentOf(
   kind: Exclude<SegmentKind, 'window'>,
 ): SegmentCompanions {
   const { stream } = corpus;
-  const { of } = cutInto(stream, kind);
+  const of = cutInto(stream, kind);
   const useIn = new Map<number, number>();
   for (const { row } of uses) if (!useIn.has(of[row]!)) useIn.set(of[row]!, row);
   const totals = new Map<number, number>();

@@ -7,17 +7,14 @@ import { TokenFlag } from '../../tokens/tokens.js';
 export const SEGMENT_KINDS = ['window', 'sentence', 'paragraph', 'section', 'document'] as const;
 export type SegmentKind = (typeof SEGMENT_KINDS)[number];
 
-/** The segments of a stream of one kind: every row's number, from 0, rising with the rows. */
-export interface Segmentation {
-  readonly of: Uint32Array;
-  readonly count: number;
-}
-
 const HEADING = BLOCK_KINDS.indexOf('heading');
 const TITLE = BLOCK_KINDS.indexOf('title');
 
-/** Cuts a stream into sentences, paragraphs (blocks), sections (from heading to heading) or documents. */
-export function cutInto(stream: TokenStream, kind: Exclude<SegmentKind, 'window'>): Segmentation {
+/**
+ * Cuts a stream into sentences, paragraphs (blocks), sections (from heading to heading) or documents: the number of each row's
+ * segment, from 0, rising with the rows.
+ */
+export function cutInto(stream: TokenStream, kind: Exclude<SegmentKind, 'window'>): Uint32Array {
   const starts = new Uint8Array(stream.length + 1);
   for (const first of stream.documentFirst) starts[first] = 1;
   for (let block = 0; block < stream.blockKind.length && kind !== 'document'; block++) {
@@ -32,7 +29,19 @@ export function cutInto(stream: TokenStream, kind: Exclude<SegmentKind, 'window'
     if (starts[row] === 1 || opensSentence) number++;
     of[row] = number;
   }
-  return { of, count: number + 1 };
+  return of;
+}
+
+/** How many segments hold a word that counts: a repeated or closed one is none. */
+export function countSegments({ counted }: TokenStream, of: Uint32Array): number {
+  let count = 0;
+  let last = -1;
+  for (let row = 0; row < of.length; row++) {
+    if (counted[row] === 0 || of[row] === last) continue;
+    last = of[row]!;
+    count++;
+  }
+  return count;
 }
 
 function opensSection(blockKind: number): boolean {

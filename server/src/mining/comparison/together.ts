@@ -3,7 +3,7 @@ import { compareCodeUnits } from '../../base/order.js';
 import type { Corpus } from '../../corpus/corpus.js';
 import { presenceInformation } from '../../corpus/statistics/probability.js';
 import { FactFlag } from '../../facts/flags.js';
-import { cutInto } from '../companions/segments.js';
+import { countSegments, cutInto } from '../companions/segments.js';
 import { resolveTarget } from '../synonyms/linkTargets.js';
 import type { ComparedTerm } from './comparison.js';
 
@@ -16,7 +16,7 @@ export interface SharedTarget {
 
 /** Where both terms stand together. */
 export interface Together {
-  /** Sentences of the corpus, those with each of the two, and those with both. */
+  /** Sentences of the corpus that count, those with each of the two, and those with both. */
   readonly sentences: number;
   readonly withA: number;
   readonly withB: number;
@@ -31,14 +31,15 @@ export interface Together {
 
 /** Reads the sentences and links of a corpus for two terms. */
 export function readTogether(corpus: Corpus, terms: readonly [ComparedTerm, ComparedTerm]): Together {
-  const { of, count } = cutInto(corpus.stream, 'sentence');
+  const of = cutInto(corpus.stream, 'sentence');
+  const sentences = countSegments(corpus.stream, of);
   const sentencesOf = terms.map(({ uses }) => new Set(uses.map(({ row }) => of[row]!)));
   const rows = terms[0].uses.map(({ row }) => row).filter((row) => sentencesOf[1]!.has(of[row]!));
   const [c1, c2] = [sentencesOf[0]!.size, sentencesOf[1]!.size];
   const c12 = new Set(rows.map((row) => of[row]!)).size;
-  const { mutual } = presenceInformation({ c1, c2, c12, n: Math.max(1, count) });
+  const { mutual } = presenceInformation({ c1, c2, c12, n: Math.max(1, sentences) });
   return {
-    ...{ sentences: count, withA: c1, withB: c2, withBoth: c12, mutualInformation: mutual, rows },
+    ...{ sentences, withA: c1, withB: c2, withBoth: c12, mutualInformation: mutual, rows },
     targets: sharedTargets(corpus, terms),
   };
 }
