@@ -99,6 +99,11 @@ describe('LaTeX blocks', () => {
 });
 
 describe('LaTeX text', () => {
+  it('takes no brace in a comment for an argument', () => {
+    expect(latex('Some \\emph % of {many}\n\nkeys.')).toEqual(['paragraph: Some', 'paragraph: keys.']);
+    expect(latex('Some \\emph % of {many}\n% and [more]\n{old keys}.')).toEqual(['paragraph: Some old keys.']);
+  });
+
   it('runs on through commands of style, and has zones and links', () => {
     expect(
       latex(

@@ -38,8 +38,8 @@ const COMMANDS: readonly Line<Command>[] = [
   [command('inline', 'omt'), 'textcolor colorbox'],
   [command('inline', 'ommt'), 'fcolorbox'],
   [command('inline', 'oot'), 'framebox makebox'],
-  [command('inline', 't'), 'fbox centerline leftline rightline mbox sphinxstyleemphasis'],
-  [command('inline', 't'), 'sphinxstylestrong sphinxtitleref sphinxstylestrong'],
+  [command('inline', 't'), 'fbox centerline leftline rightline sphinxstyleemphasis'],
+  [command('inline', 't'), 'sphinxstylestrong sphinxtitleref'],
   [command('inline', 'omt'), 'rotatebox scalebox'],
   [command('inline', 'moot'), 'raisebox'],
   [command('inline', '*mmt'), 'resizebox'],
@@ -165,7 +165,6 @@ const COMMANDS: readonly Line<Command>[] = [
   [{ ...block('mgt', ['definition']), glossary: ['definition'] }, 'longnewglossaryentry'],
   [acronym('omtt'), 'newacronym newabbreviation'],
   // Of the package acronym: in `\acro{label}[short]{long}` the label is the short form where none is given.
-  [{ ...acronym('mot'), kinds: ['paragraph'], glossary: ['alsoCalled'] }, 'acrodef'],
   [acronym('tot'), 'acro acrodef'],
 ];
 

@@ -14,16 +14,17 @@ export interface Definitions {
   readonly verbatimMarks: string;
 }
 
+// Below, what may be missing takes the blanks before it along: two runs of blanks side by side would cost their square.
 const COMMAND =
-  /\\(?:newcommand|renewcommand|providecommand|DeclareRobustCommand|NewDocumentCommand|RenewDocumentCommand|ProvideDocumentCommand|DeclareDocumentCommand)\*?\s*\{?\s*\\([A-Za-z@]+)\s*\}?\s*/g;
+  /\\(?:newcommand|renewcommand|providecommand|DeclareRobustCommand|NewDocumentCommand|RenewDocumentCommand|ProvideDocumentCommand|DeclareDocumentCommand)\*?(?:\s*\{)?\s*\\([A-Za-z@]+)\s*\}?\s*/g;
 const ENVIRONMENT = /\\(?:newenvironment|renewenvironment|NewDocumentEnvironment)\*?\s*\{([^{}]{1,60})\}\s*/g;
 const LISTING =
-  /\\(?:newtcblisting|lstnewenvironment|DefineVerbatimEnvironment|RecustomVerbatimEnvironment|newtcbinputlisting)\s*(?:\[[^\]]{0,200}\])?\s*\{([^{}]{1,60})\}|\\newminted\s*(?:\[([^\]]{1,60})\]\s*)?\{([^{}]{1,60})\}/g;
+  /\\(?:newtcblisting|lstnewenvironment|DefineVerbatimEnvironment|RecustomVerbatimEnvironment|newtcbinputlisting)(?:\s*\[[^\]]{0,200}\])?\s*\{([^{}]{1,60})\}|\\newminted\s*(?:\[([^\]]{1,60})\]\s*)?\{([^{}]{1,60})\}/g;
 const INLINE_LISTING = /\\newmintinline\s*(?:\[([^\]]{1,60})\]\s*)?\{([^{}]{1,60})\}/g;
 const VERBATIM_MARK =
-  /\\(?:MakeShortVerb|lstMakeShortInline)\*?\s*(?:\[[^\]]{0,200}\])?\s*\{?\\?([^\sA-Za-z\\{}%])\}?/g;
+  /\\(?:MakeShortVerb|lstMakeShortInline)\*?(?:\s*\[[^\]]{0,200}\])?\s*\{?\\?([^\sA-Za-z\\{}%])\}?/g;
 /** Classes of LaTeX's own documentation, which make `|` such a mark. */
-const MARKING_CLASS = /\\documentclass\s*(?:\[[^\]]{0,200}\])?\s*\{(?:ltxguide|ltxdoc|ltnews|l3doc)\}/;
+const MARKING_CLASS = /\\documentclass(?:\s*\[[^\]]{0,200}\])?\s*\{(?:ltxguide|ltxdoc|ltnews|l3doc)\}/;
 const COUNT = /\[(\d)\]\s*(\[)?/y;
 const XPARSE = /\{([^{}]{0,60})\}/y;
 const CALL = /\\([A-Za-z@]+)\*?(?:\s*(?:\[[^[\]]{0,200}\]|\{[^{}]{0,200}\}))*/g;

@@ -10,7 +10,7 @@ const FRAME: Environment = {
 
 const ENVIRONMENTS: readonly Line<Environment>[] = [
   [environment('blocks'), 'abstract document center flushleft flushright titlepage frontmatter appendices landscape'],
-  [environment('blocks'), 'small footnotesize large Large raggedright sloppypar spacing subequations subappendices'],
+  [environment('blocks'), 'small footnotesize large Large raggedright sloppypar subequations subappendices'],
   [environment('blocks', 'o'), 'figure figure* table table* wrapfigure* marginfigure sidewaysfigure sidewaystable'],
   [environment('blocks', 'o'), 'algorithm proof theorem lemma corollary proposition definition remark example note'],
   [

@@ -46,10 +46,10 @@ export function isSameLanguage(a: string, b: string): boolean {
 
 const COMMENT = /(?<!\\)%.*/g;
 const STATED = [
-  /\\(?:setdefaultlanguage|setmainlanguage)\s*(?:\[[^\]]{0,200}\])?\s*\{([^{}]{1,40})\}/,
+  /\\(?:setdefaultlanguage|setmainlanguage)(?:\s*\[[^\]]{0,200}\])?\s*\{([^{}]{1,40})\}/,
   /\\babelprovide\s*\[[^\]]{0,200}\bmain\b[^\]]{0,200}\]\s*\{([^{}]{1,40})\}/,
 ];
-const BABEL = /\\usepackage\s*(?:\[([^\]]{0,500})\])?\s*\{[^{}]{0,200}\bbabel\b/;
+const BABEL = /\\usepackage(?:\s*\[([^\]]{0,500})\])?\s*\{[^{}]{0,200}\bbabel\b/;
 const CLASS = /\\documentclass\s*\[([^\]]{0,500})\]/;
 const MAIN = /\bmain\s*=\s*([A-Za-z-]+)/;
 

@@ -53,12 +53,14 @@ export class LatexReader {
   private readPreamble(): void {
     const { page } = this;
     let done = 0;
+    let uncommentedTo = 0;
     for (const { index } of this.text.slice(0, this.bodyFrom).matchAll(IN_PREAMBLE)) {
       if (index < done) continue;
-      if (isCommented(this.text, index)) {
-        done = lineEnd(this.text, index);
+      if (isCommented(this.text, index, uncommentedTo)) {
+        uncommentedTo = done = lineEnd(this.text, index);
         continue;
       }
+      uncommentedTo = index;
       let at = this.controlSequence(index);
       while (page.frames.length > 1 && at < this.bodyFrom) at = this.step(at, this.bodyFrom);
       page.closeTo(1);
@@ -282,8 +284,10 @@ function uncommented(text: string, what: string, from: number): number {
   return -1;
 }
 
-function isCommented(text: string, at: number): boolean {
-  return /(?<!\\)%/.test(text.slice(text.lastIndexOf('\n', at) + 1, at));
+/** True in a comment; there is none at `from`, at or before `at`. */
+function isCommented(text: string, at: number, from = 0): boolean {
+  const before = text.slice(from, at);
+  return /(?<!\\)%/.test(before.slice(before.lastIndexOf('\n') + 1));
 }
 
 function lineEnd(text: string, at: number): number {

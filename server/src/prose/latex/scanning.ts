@@ -5,7 +5,7 @@ const LONGEST_ARGUMENT = 20_000;
 const LONGEST_OPTION = 3_000;
 /** After so many arguments that nothing closes, the reader looks for ends no further than the line. */
 const MOST_FAILURES = 30;
-const BLANKS = /(?:[ \t]*(?:%.*)?\n?[ \t]*)(?=[[{(<*])/y;
+const BLANKS = /[ \t]*(?:(?:%.*)?\n[ \t]*)?(?=[[{(<*])/y;
 const BLANK_LINE = /\n[ \t]*\n/g;
 const CONTROL_WORD = /[A-Za-z@]+/y;
 
@@ -84,7 +84,7 @@ export class Scanner {
     return i >= text.length || text[i] === '\n';
   }
 
-  /** Behind verbatim text that begins at `at` with its delimiter, on one line; -1 where it has no end. */
+  /** Behind verbatim text that begins at `at` with its delimiter, on one line; -1 where it has no end near by. */
   verbatimEnd(at: number): number {
     const { text } = this;
     const delimiter = text[at];
@@ -97,9 +97,8 @@ export class Scanner {
       }
       return -1;
     }
-    const line = this.find('\n', at);
-    const end = text.indexOf(delimiter, at + 1);
-    return end < 0 || (line >= 0 && end > line) ? -1 : end + 1;
+    const length = text.slice(at + 1, Math.min(this.lineEnd(at), at + LONGEST_OPTION)).indexOf(delimiter);
+    return length < 0 ? -1 : at + length + 2;
   }
 
   /** Where `what` stands at or behind `from`, or -1. */

@@ -10,7 +10,7 @@ const PLAIN_TEX_DEFINITION = /^(?:[gex]def|def)$/;
 export const DIMENSION =
   /^(?:[hv]skip|[m]?kern|parindent|parskip|baselineskip|[hv]size|tabcolsep|itemsep|topsep|textwidth|advance)$/;
 const GLUE =
-  /[ \t]*(?:\\[A-Za-z@]+[ \t]*)?=?[ \t]*(?:by[ \t]*)?-?(?:[\d.,]+[ \t]*(?:true[ \t]*)?(?:pt|em|ex|cm|mm|in|bp|pc|dd|cc|sp|mu|fil+|\\[A-Za-z@]+)?|\\[A-Za-z@]+)(?:[ \t]*(?:plus|minus)[ \t]*-?[\d.]*[ \t]*(?:pt|em|ex|cm|mm|in|fil+)?)*[ \t]?/y;
+  /[ \t]*(?:\\[A-Za-z@]+[ \t]*)?(?:=[ \t]*)?(?:by[ \t]*)?-?(?:[\d.,]+[ \t]*(?:true[ \t]*)?(?:pt|em|ex|cm|mm|in|bp|pc|dd|cc|sp|mu|fil+|\\[A-Za-z@]+)?|\\[A-Za-z@]+)(?:[ \t]*(?:plus|minus)[ \t]*-?[\d.]*[ \t]*(?:pt|em|ex|cm|mm|in|fil+)?)*[ \t]?/y;
 /** What is defined, where it stands without braces: a control sequence, or a unit that is to mark verbatim text. */
 const DEFINED = /[ \t]*(?:\\(?:[A-Za-z@]+|.)|[|!+"/@])/y;
 const LET = /[ \t]*\\[A-Za-z@]+[ \t]*=?[ \t]*(?:\\(?:[A-Za-z@]+|.)|.)/y;
