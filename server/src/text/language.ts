@@ -42,6 +42,14 @@ export function primaryLanguage(tag: string | undefined): string | undefined {
   return Object.hasOwn(SAME, subtag) ? SAME[subtag] : subtag;
 }
 
+const TAG = /^[A-Za-z]{2,3}(?:[-_][A-Za-z0-9]{1,8})*$/;
+
+/** The language tag that is written, with hyphens for underscores; undefined for what has not the form of one (BCP 47, RFC 5646, section 2.1). */
+export function writtenTag(written: string): string | undefined {
+  const tag = written.trim();
+  return TAG.test(tag) ? tag.replaceAll('_', '-') : undefined;
+}
+
 /**
  * The language that the path of a document names, by the suffix of the file before its extension, else by the outermost folder
  * that is a language tag. A hint and no more: `cs/` may as well be about C#.

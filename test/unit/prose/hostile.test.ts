@@ -58,6 +58,9 @@ const HOSTILE: Record<string, string> = {
   'attributes that never end': fill('<div "\n'),
   'elements in elements': fill('<div><b>'),
   'end tags': fill('</div>\n\n'),
+  'elements around blocks':
+    fill('<div class="warning">\n\na\n\n').slice(0, SIZE * 0.75) + fill('</div>\n\n').slice(0, SIZE * 0.25),
+  'end tags among blocks': `<div>\n${fill('</x><p>a</p>\n')}`,
   cells: fill('<td>a'),
   braces: fill('{'),
   'braces on lines': fill('{\n\n'),
@@ -82,6 +85,20 @@ function milliseconds(text: string, format: Format): number {
   const { user, system } = process.cpuUsage(before);
   return (user + system) / 1000;
 }
+
+describe('reading a notebook', () => {
+  const cell = '{"cell_type":"markdown","source":"two words"';
+  const nested = (depth: number): string => `${'[{"a":'.repeat(depth)}1${'}]'.repeat(depth)}`;
+
+  it('of deep data takes about as long as of shallow data', () => {
+    const deep = `{"cells":[${cell},"metadata":${nested(20_000)}}]}`;
+    const shallow = `{"cells":[${cell},"metadata":[${Array.from({ length: 2000 }, () => nested(10)).join(',')}]}]}`;
+    const [taken, usual] = [deep, shallow].map((text) =>
+      Math.min(...Array.from({ length: 4 }, () => milliseconds(text, 'notebook'))),
+    );
+    expect(taken! / Math.max(4, usual!)).toBeLessThan(MOST);
+  });
+});
 
 describe.each<Format>(['markdown', 'mdx', 'plaintext'])('reading 100 KB as %s', (format) => {
   for (let i = 0; i < 10; i++) milliseconds(PROSE, format);

@@ -1,5 +1,6 @@
 // Markdown: definition lists, template blocks, HTML blocks, and elements that close in another block.
 import { describe, expect, it } from 'vitest';
+import { Zone } from '../../../server/src/prose/zones.js';
 import { outline, prose, sourceOf } from './reading.js';
 
 describe('definition lists', () => {
@@ -123,6 +124,18 @@ describe('elements around blocks', () => {
   it('close at the tag that is theirs', () => {
     const text = '<div class="danger">\n\n<div>\n\na\n\n</div>\n\nb\n\n</p></div>\n\nc\n';
     expect(outline(text)).toEqual(['paragraph[safetyMessage]: a', 'paragraph[safetyMessage]: b', 'paragraph: c']);
+  });
+
+  it('add up where they lie in each other, and the inner one tells the language', () => {
+    const text =
+      '<div class="danger" lang="fr">\n\na\n\n<blockquote lang="de_CH">\n\nb\n\n</blockquote>\n<blockquote>\n\nc\n\n</blockquote>\n\nd\n\n</div>\n\ne\n';
+    expect(prose(text).blocks.map(({ content: { text: said, zones, language } }) => [said, zones, language])).toEqual([
+      ['a', Zone.safetyMessage, 'fr'],
+      ['b', Zone.safetyMessage | Zone.quotation, 'de-CH'],
+      ['c', Zone.safetyMessage | Zone.quotation, 'fr'],
+      ['d', Zone.safetyMessage, 'fr'],
+      ['e', 0, undefined],
+    ]);
   });
 });
 

@@ -102,4 +102,12 @@ describe('entities that a document defines', () => {
       `<article ${DOCBOOK}><para>caf&eacute; &mdash; &zcaron; &prod; &lt;</para></article>`;
     expect(outline(page, 'xml')).toEqual(['paragraph: café — ž @ <']);
   });
+
+  // XML 1.0, section 4.2: of several declarations of one entity the first is binding.
+  it('are what they are first declared to be', () => {
+    const page =
+      '<!DOCTYPE article [<!ENTITY a "é"><!ENTITY a "ž"><!ENTITY b "Evenword"><!ENTITY b "x">]>' +
+      `<article ${DOCBOOK}><para>caf&a; &b; now</para></article>`;
+    expect(outline(page, 'xml')).toEqual(['paragraph: café @ now']);
+  });
 });

@@ -92,6 +92,10 @@ describe('languages', () => {
     ]);
   });
 
+  it('are not stated for the next element by the class of another', () => {
+    expect(languages('.. autoclass:: Key\n   :class: language-fr\n\nText.\n')).toEqual(['-: Text.']);
+  });
+
   // docutils, "reStructuredText Directives", "Metadata": `:description lang=en: …`.
   it('are stated in a description', () => {
     expect(languages('.. meta::\n   :description lang=fr: Une clé.\n   :description: A key.\n')).toEqual([

@@ -1,6 +1,6 @@
 // Tags and paths: one form for each language, and the language that a page's path names.
 import { describe, expect, test } from 'vitest';
-import { languageOfPath, primaryLanguage, withPathLanguage } from '../../../server/src/text/language.js';
+import { languageOfPath, primaryLanguage, withPathLanguage, writtenTag } from '../../../server/src/text/language.js';
 
 describe('a language tag', () => {
   // Primary subtags as RFC 5646 (BCP 47) gives them in appendix A; `iw` and `in` are the registry's old codes of `he` and `id`.
@@ -20,6 +20,21 @@ describe('a language tag', () => {
     ['English', undefined],
   ])('%s is of %s', (tag, language) => {
     expect(primaryLanguage(tag)).toBe(language);
+  });
+});
+
+describe('a written tag', () => {
+  // Forms of RFC 5646, appendix A; generators write underscores too (common practice, no source).
+  test.each([
+    ['pt_BR', 'pt-BR'],
+    [' zh-Hant ', 'zh-Hant'],
+    ['en-US-u-islamcal', 'en-US-u-islamcal'],
+    ['en us', undefined],
+    ['english', undefined],
+    ['{{ lang }}', undefined],
+    ['', undefined],
+  ])('“%s” is %s', (written, tag) => {
+    expect(writtenTag(written)).toBe(tag);
   });
 });
 

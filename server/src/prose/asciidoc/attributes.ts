@@ -11,6 +11,8 @@ export interface BlockAttributes {
 /** Of a block that no line says anything of. */
 export const NO_ATTRIBUTES: BlockAttributes = { style: '', written: '' };
 
+/** Beyond this length no more of what is written is kept: each look costs its length. */
+const LONGEST_WRITTEN = 4096;
 const STYLE = /^[ "']*([\p{L}\p{N}_-]*)/u;
 
 /** The attributes with those of one more line, given without its brackets. */
@@ -21,6 +23,7 @@ export function withAttributes(before: BlockAttributes, list: string): BlockAttr
   const named = list.startsWith('=', list.indexOf(first) + first.length);
   const implied = behind?.[1]?.trim() ? 'source' : '';
   const style = (named ? '' : first) || implied || before.style;
+  if (before.written.length > LONGEST_WRITTEN) return { style, written: before.written };
   return { style, written: before.written === '' ? list : `${before.written},${list}` };
 }
 

@@ -1,4 +1,5 @@
 // From lines to prose blocks: which lines are which kind of block, in which zones.
+import { writtenTag } from '../../text/language.js';
 import type { BlockRole } from '../content.js';
 import { isGlossaryTitle, sendsOn } from '../glossary.js';
 import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
@@ -29,7 +30,6 @@ import { cellsOf } from './tables.js';
 export const DEEPEST = 24;
 
 const QUESTIONS = '?';
-const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:[-_][A-Za-z0-9]{1,8})*$/;
 
 const CODE_STYLES = new Set(
   (
@@ -66,8 +66,7 @@ export class BlockReader {
     const entry = first === 58 ? attributeEntry(text, line) : undefined;
     if (!entry) return at;
     if (entry.name === 'lang') {
-      const tag = text.slice(entry.value, line.end).trim();
-      if (LANGUAGE_TAG.test(tag)) this.language ??= tag.replaceAll('_', '-');
+      this.language ??= writtenTag(text.slice(entry.value, line.end));
     }
     let last = at;
     while (last + 1 < to && endsWithContinuation(text, lines[last]!)) last++;
@@ -278,7 +277,7 @@ export class Stretch implements KnownInStretch {
   /** The language that the lines above a block give it. */
   private ownLanguage(): string | undefined {
     const tag = this.attributes.written === '' ? undefined : namedAttribute(this.attributes.written, 'lang');
-    return tag !== undefined && LANGUAGE_TAG.test(tag) ? tag.replaceAll('_', '-') : undefined;
+    return tag === undefined ? undefined : writtenTag(tag);
   }
 
   private delimited(at: number, kind: Delimited): number {

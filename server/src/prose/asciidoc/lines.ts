@@ -10,8 +10,9 @@ export interface Line {
 export type Delimited = 'verbatim' | 'comment' | 'example' | 'sidebar' | 'open' | 'quote' | 'table';
 
 /**
- * The lines of `[from, to)` of a text, which stand at a line's start or at the text's end. Preprocessor conditionals (`ifdef::`, `endif::` …) are left out, so that every
- * branch is read; of the one-line form `ifdef::name[content]` the content is left.
+ * The lines of `[from, to)` of a text, which stand at a line's start or at the text's end. Preprocessor conditionals
+ * (`ifdef::`, `endif::` …) are left out, so that every branch is read; of the one-line form `ifdef::name[content]` the content
+ * is left.
  */
 export function linesOf(text: string, from: number, to: number): Line[] {
   const lines: Line[] = [];

@@ -1,4 +1,5 @@
 // Front matter in YAML (`---`) or TOML (`+++`), cut by hand: its title and description are prose, its keys are not.
+import { writtenTag } from '../../text/language.js';
 import { ContentBuilder } from '../content.js';
 import type { BlockKind, ProseBlock } from '../prose.js';
 import { Zone } from '../zones.js';
@@ -17,7 +18,6 @@ const KINDS: Partial<Record<string, BlockKind>> = {
   summary: 'description',
 };
 const LANGUAGE_KEYS = new Set(['lang', 'language', 'locale']);
-const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:[-_][A-Za-z0-9]{2,8})*$/;
 const YAML_KEY = /^(?:"([\w .-]+)"|'([\w .-]+)'|([\w.-][\w .-]*?))[ \t]*:(?=[ \t]|$)[ \t]*/;
 const TOML_KEY = /^[ \t]*(?:"([\w .-]+)"|'([\w .-]+)'|([\w-]+))[ \t]*=[ \t]*/;
 const LONGEST = 65536;
@@ -67,7 +67,7 @@ function readFields(text: string, lines: readonly number[], end: number, yaml: b
     if (kind !== undefined) readTo = readField(text, from, end, yaml, kind, blocks);
     else if (LANGUAGE_KEYS.has(key.toLowerCase())) {
       const value = line.slice(match[0].length).replace(/^["']|["']$/g, '');
-      if (LANGUAGE_TAG.test(value)) language ??= value.replaceAll('_', '-');
+      language ??= writtenTag(value);
     }
   }
   return { blocks, language };

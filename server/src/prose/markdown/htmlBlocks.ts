@@ -6,8 +6,7 @@ import { MarkupStream } from '../markup/stream.js';
 import type { BlockContent, BlockKind, ProseBlock } from '../prose.js';
 import { addZone } from '../quotations.js';
 import { Zone, type ZoneSet } from '../zones.js';
-import type { Step } from './wrappers.js';
-import { effectOf } from './wrappers.js';
+import { effectOf, type Step } from './wrappers.js';
 
 /** What is code or a link's target to a writer of Markdown stands as it is written in HTML. */
 const MARKDOWN_CODE = /`[^`\n]+`/g;
@@ -30,8 +29,8 @@ export function readHtmlBlock(
     starts.push(start);
     cx.blocks.push({ start: start + from, content: inMarkdown(content, zones, kind) });
   }
+  let count = 0;
   for (const { at, ...step } of unpaired(text)) {
-    let count = 0;
     while (count < starts.length && starts[count]! < at) count++;
     cx.steps.push({ ...step, at: before + count });
   }

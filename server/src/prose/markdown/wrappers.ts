@@ -1,4 +1,5 @@
 // Elements that open in one block of Markdown and close in another: what they make of the blocks between.
+import { writtenTag } from '../../text/language.js';
 import type { BlockContent, ProseBlock } from '../prose.js';
 import { ADMONITION_CLASSES, SAFETY_CLASSES } from '../markup/htmlElements.js';
 import { Zone, type ZoneSet } from '../zones.js';
@@ -25,7 +26,6 @@ const CODE = /^(?:pre|code|samp|script|style|svg|math|template|textarea|noscript
 /** Components of MDX whose children are code or drawings. */
 const CODE_COMPONENT =
   /^(?:Inline)?(?:Code|CodeBlock|CodeSnippet|Pre|Math|Tex|Mermaid|Diagram|Terminal|Script|Style|Snippet)$/;
-const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/;
 
 /** True for components of MDX whose children, attributes included, are no prose. */
 export function holdsCode(name: string): boolean {
@@ -42,7 +42,7 @@ export function effectOf(
   component: boolean,
 ): Effect | undefined {
   const lang = attribute('lang');
-  const language = lang !== undefined && LANGUAGE_TAG.test(lang) ? lang : undefined;
+  const language = lang === undefined ? undefined : writtenTag(lang);
   let zones: ZoneSet = 0;
   if (isSafety(name, attribute, component)) zones |= Zone.safetyMessage;
   if (name === 'blockquote' || name === 'q' || (component && name === 'Quote')) zones |= Zone.quotation;
@@ -68,6 +68,29 @@ function isSafety(name: string, attribute: (name: string) => string | undefined,
  */
 export function wrap(blocks: ProseBlock[], steps: readonly Step[]): void {
   if (!steps.some(({ effect }) => effect !== undefined)) return;
+  const ends = endsOf(steps);
+  const around: { readonly to: number; readonly effect: Effect }[] = [];
+  let at = 0;
+  const passTo = (end: number): void => {
+    for (; at < end; at++) {
+      while (around.length > 0 && around.at(-1)!.to <= at) around.pop();
+      const inner = around.at(-1);
+      if (inner) blocks[at] = within(blocks[at]!, inner.effect);
+    }
+  };
+  for (const step of steps) {
+    const to = ends.get(step);
+    if (to === undefined || to <= step.at) continue;
+    passTo(step.at);
+    while (around.length > 0 && around.at(-1)!.to <= at) around.pop();
+    around.push({ to, effect: both(step.effect!, around.at(-1)?.effect) });
+  }
+  passTo(blocks.length);
+}
+
+/** Of each opening step with an effect that another closes, how many blocks stand before that one. */
+function endsOf(steps: readonly Step[]): ReadonlyMap<Step, number> {
+  const ends = new Map<Step, number>();
   const open: Step[] = [];
   const openBy = new Map<string, number>();
   for (const step of steps) {
@@ -80,10 +103,16 @@ export function wrap(blocks: ProseBlock[], steps: readonly Step[]): void {
       let last = open.pop()!;
       for (; last.name !== name; last = open.pop()!) openBy.set(last.name, openBy.get(last.name)! - 1);
       openBy.set(name, count - 1);
-      const { effect } = last;
-      if (effect) for (let i = last.at; i < step.at; i++) blocks[i] = within(blocks[i]!, effect);
+      if (last.effect) ends.set(last, step.at);
     }
   }
+  return ends;
+}
+
+/** The effect of an element together with that of those around it. */
+function both(inner: Effect, outer: Effect | undefined): Effect {
+  if (!outer) return inner;
+  return { zones: inner.zones | outer.zones, language: inner.language ?? outer.language };
 }
 
 /** Contents by what they were made of, so that what an edit leaves alone stays the same object. */

@@ -65,7 +65,8 @@ function readSubset(text: string, from: number): Omit<Prolog, 'doctype'> {
     else if (text.startsWith('<!', at)) {
       ENTITY.lastIndex = at;
       const found = ENTITY.exec(text);
-      if (found) {
+      // The first declaration of a name is the one that binds (XML 1.0, section 4.2).
+      if (found && !entities.has(found[1]!)) {
         entities.add(found[1]!);
         const character = characterOf(found[2] ?? found[3] ?? '');
         if (character !== undefined) characters.set(found[1]!, character);

@@ -1,9 +1,9 @@
 // A start tag's attributes by their places, and the role of the element that it starts.
 import { ADMONITION_CLASSES, HTML, LABEL_CLASSES, SAFETY_CLASSES } from './htmlElements.js';
+import { writtenTag } from '../../text/language.js';
 import { Zone, type ZoneSet } from '../zones.js';
 import { CLOSED, CONTAINER, Flow, INLINE, OPAQUE_INLINE, type ElementRole, type Vocabulary } from './roles.js';
 
-const LANGUAGE_TAG = /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/;
 /** The tag of a language that is not known (BCP 47); so HTML and XML mean an empty one. */
 export const UNDETERMINED = 'und';
 /** Words in the names of custom elements that hold code; those of the second kind are displayed. */
@@ -80,8 +80,7 @@ export class StartTag {
     if (this.names.length === 0) return undefined;
     const written = this.attribute('xml:lang') ?? this.attribute('lang');
     if (written === undefined) return undefined;
-    const tag = written.trim().replaceAll('_', '-');
-    return tag === '' ? UNDETERMINED : LANGUAGE_TAG.test(tag) ? tag : undefined;
+    return written.trim() === '' ? UNDETERMINED : writtenTag(written);
   }
 
   /** True where the element is not to be translated (HTML; ITS 2.0, section 8.1), such as a name: no prose of ours. */

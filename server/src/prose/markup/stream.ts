@@ -1,5 +1,6 @@
 // Follows the tokenizer through one document: which element each tag opens or closes, and in which vocabulary.
 import { Tokenizer } from 'htmlparser2';
+import { writtenTag } from '../../text/language.js';
 import type { ProseBlock, ReadingProblem } from '../prose.js';
 import { isSameState, lastUpTo, LEAST_DISTANCE, type Checkpoint } from './checkpoints.js';
 import { Elements } from './elements.js';
@@ -255,6 +256,5 @@ function ownLanguage(tag: StartTag): string | undefined {
 /** The language that a page's head states for want of an attribute (HTML Standard, "Pragma directives"). */
 function metaLanguage(tag: StartTag): string | undefined {
   if (tag.attribute('http-equiv')?.toLowerCase() !== 'content-language') return undefined;
-  const content = tag.attribute('content')?.trim();
-  return content !== undefined && /^[A-Za-z]{2,3}(?:-[A-Za-z0-9]{2,8})*$/.test(content) ? content : undefined;
+  return writtenTag(tag.attribute('content') ?? '');
 }

@@ -39,15 +39,15 @@ export function findCells(text: string): Notebook {
     switch (text[i]) {
       case '{':
       case '[':
-        if (text[i] === '[' && isCellList(open)) hasCells = true;
-        else if (text[i] === '{' && top?.isArray === true && isCellList(open.slice(0, -1)))
+        if (text[i] === '[' && isCellList(open, open.length)) hasCells = true;
+        else if (text[i] === '{' && top?.isArray === true && isCellList(open, open.length - 1))
           cell = { type: '', level: 0, source: [] };
         open.push({ isArray: text[i] === '[', key: '' });
         break;
       case '}':
       case ']':
         open.pop();
-        if (cell !== undefined && text[i] === '}' && isCellList(open.slice(0, -1))) {
+        if (cell !== undefined && text[i] === '}' && isCellList(open, open.length - 1)) {
           cells.push(cell);
           cell = undefined;
         }
@@ -62,17 +62,17 @@ export function findCells(text: string): Notebook {
         break;
       }
       default:
-        if (cell !== undefined && top?.key === 'level' && isCellList(open.slice(0, -2)) && /[1-6]/.test(text[i]!))
+        if (cell !== undefined && top?.key === 'level' && isCellList(open, open.length - 2) && /[1-6]/.test(text[i]!))
           cell.level = Number(text[i]);
     }
   }
   return { cells: hasCells ? cells : undefined, title };
 }
 
-/** True where the innermost of the open containers is about to hold the list of cells. */
-function isCellList(open: readonly Frame[]): boolean {
-  if (open.at(-1)?.key !== 'cells') return false;
-  return open.length === 1 || (open.length === 3 && open[0]!.key === 'worksheets' && open[1]!.isArray);
+/** True where the innermost of the first `depth` open containers holds the list of cells. */
+function isCellList(open: readonly Frame[], depth: number): boolean {
+  if (depth === 1) return open[0]!.key === 'cells';
+  return depth === 3 && open[0]!.key === 'worksheets' && open[1]!.isArray && open[2]!.key === 'cells';
 }
 
 /** A string that is a value right in the cell, or an item of a list that is. */
@@ -84,7 +84,7 @@ function takeString(
 ): void {
   const top = open[open.length - 1]!;
   const owner = top.isArray ? open[open.length - 2]! : top;
-  if (!isCellList(open.slice(0, top.isArray ? -3 : -2))) return;
+  if (!isCellList(open, open.length - (top.isArray ? 3 : 2))) return;
   if (owner.key === 'source') cell.source.push({ start, end });
   else if (owner.key === 'cell_type' && !top.isArray) cell.type = text.slice(start + 1, end - 1);
 }

@@ -1,4 +1,5 @@
 // One directive: its argument, its options and its body, each read for what it is.
+import { writtenTag } from '../../text/language.js';
 import { Zone } from '../zones.js';
 import { inside, roleOf, type DocumentContext, type Setting } from './context.js';
 import { readRecords } from './csvTable.js';
@@ -61,7 +62,8 @@ export function readDirective(
   if (kind.options) readOptions(cx, lines, options, headEnd, kind.options, within);
   const from = skipBlank(lines, kind.body === 'meta' || kind.body === 'glossary' ? options : headEnd, to);
   // Classes without a body are those of the element that follows.
-  if (from >= to && name.endsWith('class') && language !== setting.language) cx.nextLanguage = language;
+  if (from >= to && kind.argument === 'classes' && name !== 'container' && language !== setting.language)
+    cx.nextLanguage = language;
   if (from >= to || (!known && !looksLikeProse(text, lines, from))) return;
   readDirectiveBody(cx, kind, { lines, line: from, to, margin: base }, within);
 }
@@ -192,7 +194,7 @@ function readMeta(cx: DocumentContext, lines: Lines, from: number, to: number, s
     let start = colon + 1;
     while (start < lines.end[line]! && isBlank(cx.text.charCodeAt(start))) start++;
     const role = roleOf(setting, 'description', Zone.frontMatter);
-    const tag = /\slang=([\w-]+)/.exec(cx.text.slice(at, colon))?.[1];
+    const tag = writtenTag(/\slang=([\w-]+)/.exec(cx.text.slice(at, colon))?.[1] ?? '');
     readPhrase(cx, start, lines.end[line]!, { ...role, language: tag ?? role.language });
   }
 }

@@ -1,8 +1,8 @@
 // The interpreted text roles of docutils, Sphinx and its common extensions: what of them is prose.
 
 /**
- * What interpreted text is: text; the title of a work; a user interface's label; a term where it is defined or used; a reference or the name of
- * an object in code, prose only where they carry a text of their own; or code.
+ * What interpreted text is: text; the title of a work; a user interface's label; a term where it is defined or used; a
+ * reference or the name of an object in code, prose only where they carry a text of their own; or code.
  */
 export type RoleKind = 'text' | 'work' | 'uiLabel' | 'definedTerm' | 'term' | 'reference' | 'object' | 'code';
 
