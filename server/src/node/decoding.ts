@@ -31,7 +31,7 @@ export function decode(bytes: Uint8Array): Decoded {
   );
 }
 
-/** Decodes UTF-8 alone: for files that we write ourselves. */
+/** Decodes UTF-8 alone: for files that we write ourselves, and for earlier versions of pages. */
 export function decodeUtf8(bytes: Uint8Array): Decoded {
   return decodeAs('utf-8', bytes) ?? { reason: `is not in UTF-8 (line ${brokenLine(bytes)}); save it as UTF-8` };
 }

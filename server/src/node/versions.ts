@@ -1,6 +1,7 @@
 // Copies of pages that are kept for earlier versions of a product: which page is an older copy of which.
 import { readFile } from 'node:fs/promises';
 import { sep } from 'node:path';
+import { compareCodeUnits } from '../base/order.js';
 import { decode } from './decoding.js';
 
 /** Names of folders that hold one version, the newest of several first (common practice, no source). */
@@ -32,7 +33,7 @@ export async function newerCopy(
   for (const { family, version, rest } of versionedParts(root, path)) {
     const newer = (await namesIn(family))
       .filter((name) => isVersion(name) && compareVersions(name, version) > 0)
-      .sort((a, b) => compareVersions(b, a));
+      .sort((a, b) => compareVersions(b, a) || compareCodeUnits(a, b));
     for (const name of newer) {
       const candidate = [family, name, rest].join(sep);
       if ((await isDocument(candidate)) && (await shareLines(path, candidate))) return candidate;

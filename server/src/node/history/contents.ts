@@ -1,5 +1,6 @@
 // Contents of a repository's objects, read one after the other from one run of git.
 import type { Readable } from 'node:stream';
+import { decodeUtf8 } from '../decoding.js';
 import type { Git } from './git.js';
 
 /** What was read of an object: its text; undefined where there is none, it is too large, or it is no UTF-8. */
@@ -35,15 +36,8 @@ async function nextObject(bytes: ByteReader, largest: number): Promise<ReadObjec
   if (digits === undefined || !Number.isSafeInteger(size)) return { contents: undefined, bytes: 0 };
   const body = size <= largest && kind === 'blob' ? await bytes.take(size) : undefined;
   await bytes.skip(body === undefined ? size + 1 : 1);
-  return { contents: body && decode(body), bytes: size };
-}
-
-function decode(bytes: Buffer): Contents {
-  try {
-    return new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes);
-  } catch {
-    return undefined;
-  }
+  const decoded = body && decodeUtf8(body);
+  return { contents: decoded !== undefined && 'text' in decoded ? decoded.text : undefined, bytes: size };
 }
 
 /** Takes bytes from a stream by lines and by counts. */
