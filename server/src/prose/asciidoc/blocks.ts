@@ -1,7 +1,7 @@
 // From lines to prose blocks: which lines are which kind of block, in which zones.
 import { writtenTag } from '../../text/language.js';
 import type { BlockRole } from '../content.js';
-import { isGlossaryTitle, sendsOn } from '../glossary.js';
+import { definitionOrSee, glossaryLevelBehind } from '../glossary.js';
 import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
 import { Zone, type ZoneSet } from '../zones.js';
 import { namedAttribute, NO_ATTRIBUTES, withAttributes, type BlockAttributes } from './attributes.js';
@@ -226,8 +226,8 @@ export class Stretch implements KnownInStretch {
     this.reader.add([title], { ...this.role('heading'), level, zones: zones | Zone.heading });
     if (depth > 0) return;
     const { style } = this.attributes;
-    if (style === 'glossary' || isGlossaryTitle(this.text.slice(title.start, title.end))) this.glossaryLevel = level;
-    else if (level <= this.glossaryLevel) this.glossaryLevel = 0;
+    const written = this.text.slice(title.start, title.end);
+    this.glossaryLevel = style === 'glossary' ? level : glossaryLevelBehind(written, level, this.glossaryLevel);
   }
 
   /** Adds a paragraph. The first that is said of a glossary's term may be no more than another term to look at. */
@@ -235,8 +235,7 @@ export class Stretch implements KnownInStretch {
     const at = this.reader.blocks.length;
     this.reader.add(lines, role);
     const block = this.reader.blocks[at];
-    if (!first || block?.content.glossary !== 'definition' || !sendsOn(block.content.text)) return;
-    this.reader.blocks[at] = { ...block, content: { ...block.content, glossary: 'see' } };
+    if (first && block) this.reader.blocks[at] = { ...block, content: definitionOrSee(block.content) };
   }
 
   /** One item's first paragraph; what follows it may belong to it too. */

@@ -1,7 +1,7 @@
 // The blocks that a reader of LaTeX makes: the one that text is added to now, and those that footnotes interrupt.
 import { ContentBuilder, type BlockRole } from '../content.js';
-import { isGlossaryTitle, sendsOn } from '../glossary.js';
-import type { BlockContent, ProseBlock } from '../prose.js';
+import { definitionOrSee, glossaryLevelBehind } from '../glossary.js';
+import type { ProseBlock } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import type { ZoneSet } from '../zones.js';
 
@@ -97,15 +97,9 @@ export class Blocks {
     this.pending = undefined;
     const content = pending.out.finish(pending.role, pending.end);
     if (!content) return;
-    if (content.kind === 'heading') this.enterSection(content);
-    const isReference = content.glossary === 'definition' && sendsOn(content.text);
-    const block = isReference ? { ...content, glossary: 'see' as const } : content;
-    this.finished.push({ start: pending.out.start, content: markQuotations(block) });
-  }
-
-  private enterSection({ text, level }: BlockContent): void {
-    if (isGlossaryTitle(text)) this.glossaryLevel = level;
-    else if (level <= this.glossaryLevel) this.glossaryLevel = 0;
+    const { kind, text, level } = content;
+    if (kind === 'heading') this.glossaryLevel = glossaryLevelBehind(text, level, this.glossaryLevel);
+    this.finished.push({ start: pending.out.start, content: markQuotations(definitionOrSee(content)) });
   }
 
   private begin(at: number, role: () => BlockRole, zones: ZoneSet): Pending {

@@ -1,8 +1,8 @@
 // From a stream of tags and text to blocks of prose: which elements are open, and which block their text belongs to.
 import { primaryLanguage } from '../../text/language.js';
 import { ContentBuilder, type BlockRole } from '../content.js';
-import { isGlossaryTitle, sendsOn } from '../glossary.js';
-import type { BlockContent, ProseBlock } from '../prose.js';
+import { definitionOrSee, glossaryLevelBehind } from '../glossary.js';
+import type { ProseBlock } from '../prose.js';
 import { markQuotations } from '../quotations.js';
 import { Zone } from '../zones.js';
 import type { Checkpoint } from './checkpoints.js';
@@ -240,15 +240,9 @@ export class Elements {
     this.pending = undefined;
     const content = pending.out.finish(pending.role, pending.end);
     if (!content) return;
-    if (content.kind === 'heading') this.enterSection(content);
-    const isReference = content.glossary === 'definition' && sendsOn(content.text);
-    const block = isReference ? { ...content, glossary: 'see' as const } : content;
-    this.blocks.push({ start: pending.out.start, content: markQuotations(block) });
-  }
-
-  private enterSection({ text, level }: BlockContent): void {
-    if (isGlossaryTitle(text)) this.glossaryLevel = level;
-    else if (level <= this.glossaryLevel) this.glossaryLevel = 0;
+    const { kind, text, level } = content;
+    if (kind === 'heading') this.glossaryLevel = glossaryLevelBehind(text, level, this.glossaryLevel);
+    this.blocks.push({ start: pending.out.start, content: markQuotations(definitionOrSee(content)) });
   }
 
   private zones(): number {

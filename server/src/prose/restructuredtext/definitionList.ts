@@ -1,5 +1,5 @@
 // Definition lists and glossaries: terms with their definitions indented below.
-import { sendsOn } from '../glossary.js';
+import { definitionOrSee } from '../glossary.js';
 import { Zone } from '../zones.js';
 import { inside, roleOf, type DocumentContext, type Setting } from './context.js';
 import { readPhrase } from './leaf.js';
@@ -41,7 +41,7 @@ function readMeaning(
   const first = cx.blocks.length;
   cx.readBody(lines, from, to, margin, inside(setting, { kind: 'definition', glossary: 'definition' }));
   const only = cx.blocks.length === first + 1 ? cx.blocks[first]! : undefined;
-  if (only && sendsOn(only.content.text)) cx.blocks[first] = { ...only, content: { ...only.content, glossary: 'see' } };
+  if (only) cx.blocks[first] = { ...only, content: definitionOrSee(only.content) };
 }
 
 /** Reads a `glossary` directive's body: one or more terms, each on a line, above each definition. */

@@ -1,6 +1,6 @@
 // Section titles: a line with an adornment under it, or over and under it; and lines that merely divide.
 import { Zone } from '../zones.js';
-import { isGlossaryTitle } from '../glossary.js';
+import { glossaryLevelBehind } from '../glossary.js';
 import { roleOf, type DocumentContext, type Setting } from './context.js';
 import { readLeaf } from './leaf.js';
 import { widthOf, type Lines } from './lines.js';
@@ -57,6 +57,5 @@ function readTitle(cx: DocumentContext, lines: Lines, line: number, style: strin
   readLeaf(cx, lines, line, line + 1, { ...roleOf(setting, 'heading', Zone.heading), level });
   if (setting.depth > 0) return;
   const title = cx.blocks[length]?.content.text;
-  if (title !== undefined && isGlossaryTitle(title)) cx.glossaryLevel = level;
-  else if (level <= cx.glossaryLevel) cx.glossaryLevel = 0;
+  cx.glossaryLevel = glossaryLevelBehind(title ?? '', level, cx.glossaryLevel);
 }
