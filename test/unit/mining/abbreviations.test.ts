@@ -166,12 +166,11 @@ describe('a short and a long form', () => {
 describe('a free long form', () => {
   const explained = 'A pressure relief valve (PRV) sits in the hatch. Open the PRV.';
   const short = [1, 2, 3].map((buoy) => `Check the PRV of buoy ${buoy}. The PRV opens by itself.`);
-  const withLong = (long: (buoy: number) => string): string[] =>
-    ask(explained, ...short, ...[1, 2, 3].map(long)).map(({ id }) => id);
+  const withLong = (long: (buoy: number) => string): Question[] => ask(explained, ...short, ...[1, 2, 3].map(long));
 
   it('stands in a sentence, on pages other than those that leave the short form unexplained', () => {
     const asked = withLong((buoy) => `Check the pressure relief valve of buoy ${buoy}.`);
-    expect(asked).toEqual(['abbreviation:PRV|pressure relief valve']);
+    expect(asked.map(({ id }) => id)).toEqual(['abbreviation:PRV|pressure relief valve']);
   });
 
   /** How many free uses a page has beside one that explains the short form. */
@@ -202,8 +201,11 @@ describe('a free long form', () => {
   it('is not the one in capitals where most are not', () => {
     const plain = (buoy: number): string => `Check the pressure relief valve of buoy ${buoy}.`;
     const capitals = (buoy: number): string => `Check the Pressure Relief Valve of buoy ${buoy}.`;
-    expect(withLong((buoy) => (buoy === 1 ? capitals(buoy) : plain(buoy)))).toEqual([]);
-    expect(withLong(capitals)).toHaveLength(1);
+    const [few] = withLong((buoy) => (buoy === 1 ? capitals(buoy) : plain(buoy)));
+    const [many] = withLong(capitals);
+    // What few pages mix is asked after all else.
+    expect(few!.confidence).toBe(0.5);
+    expect(few!.worth).toBeLessThan(many!.worth / 5);
   });
 
   it('comes back more than once on a page that explains the short form', () => {

@@ -16,7 +16,7 @@ import type { FormUses } from './longForms.js';
  * The least that is asked about. *Alternating*: so many pages go on with the long form so often, and of the pages with the
  * short form such a share is mixed, that is goes on or leaves it unexplained; *widely* where so many pages spell it out.
  * *Unexplained*: such a share of pages is mixed while so many, and so many others, spell it out; *plainly* where it is more of both. *Falling back*: such
- * a share of the pages goes on, so often, with so many short forms beside.
+ * a share of the pages goes on, so often, with so many short forms beside. *Seldom*: so few pages are mixed, and so few spell it out.
  */
 const LEAST = {
   short: 2,
@@ -25,13 +25,24 @@ const LEAST = {
   unexplained: { pages: 3, share: 0.35, free: 3, freePages: 3, otherPages: 2 },
   plainly: { share: 0.55, freePages: 8 },
   fallingBack: { share: 0.25, uses: 3, beside: 2 },
+  seldom: { pages: 2, free: 2, freePages: 2 },
 } as const;
 
 /** On so many pages the documents explain a short form where it has no other meaning for their readers. */
 const WELL_KNOWN = 3;
 
 /** How sure it is that the two forms are mixed and not explained where they need be. */
-const CONFIDENCE = { widely: 0.92, plainly: 0.8, alternating: 0.75, unexplained: 0.6, fallingBack: 0.5 } as const;
+const CONFIDENCE = {
+  widely: 0.92,
+  plainly: 0.8,
+  alternating: 0.75,
+  unexplained: 0.6,
+  fallingBack: 0.5,
+  seldom: 0.5,
+} as const;
+
+/** What the least mixes are worth: maintainers do decide them, but after all else. */
+const LAST = 0.1;
 
 /** The question about a short form and its expansion, or undefined where the documents explain it and go on with it. */
 export function askExplained(
@@ -100,22 +111,24 @@ function mixOf(
   const uses = onItsPages.filter((use) => goingOn.has(pageOf(use))).length;
   const freePages = new Set(all.map(pageOf)).size;
   const settles = Math.sqrt(Math.min(all.length, short.length));
-  const { alternating, unexplained, plainly, fallingBack } = LEAST;
+  const { alternating, unexplained, plainly, fallingBack, seldom } = LEAST;
   if (goingOn.size >= alternating.pages && uses >= alternating.uses && share >= alternating.share)
     return { confidence: freePages >= LEAST.widely ? CONFIDENCE.widely : CONFIDENCE.alternating, settles };
   const areLeft = mixed >= unexplained.pages && share >= unexplained.share;
   const otherPages = new Set(all.map(pageOf).filter((page) => !shortPages.has(page))).size;
   const isSpelledOut =
     all.length >= unexplained.free && freePages >= unexplained.freePages && otherPages >= unexplained.otherPages;
-  if (areLeft && isSpelledOut && (goingOn.size > 0 || areOne(corpus, short, all, expansion)))
+  const isOne = goingOn.size > 0 || areOne(corpus, short, all, expansion);
+  if (areLeft && isSpelledOut && isOne)
     return share >= plainly.share && freePages >= plainly.freePages
       ? { confidence: CONFIDENCE.plainly, settles }
       : { confidence: CONFIDENCE.unexplained, settles: 1 };
   const beside = short.filter((use) => goingOn.has(pageOf(use))).length;
   const isFallingBack = uses >= fallingBack.uses && beside >= fallingBack.beside;
-  return isFallingBack && goingOn.size >= fallingBack.share * shortPages.size
-    ? { confidence: CONFIDENCE.fallingBack, settles: 1 }
-    : undefined;
+  if (isFallingBack && goingOn.size >= fallingBack.share * shortPages.size)
+    return { confidence: CONFIDENCE.fallingBack, settles: 1 };
+  const isSeldom = mixed >= seldom.pages && all.length >= seldom.free && freePages >= seldom.freePages;
+  return isSeldom && isOne ? { confidence: CONFIDENCE.seldom, settles: LAST } : undefined;
 }
 
 /**
