@@ -3,7 +3,7 @@ import type { BlockContent, ZoneMark } from './prose.js';
 import { Zone, type ZoneSet } from './zones.js';
 
 /** Quoted words from which on a stretch counts as a quotation; fewer are usually a term. */
-export const QUOTATION_WORDS = 4;
+const QUOTATION_WORDS = 4;
 
 const ANY_MARK = /["“„«]/;
 const BEFORE_OPENING = /[\s([{—–/\-:,;'‘]/;

@@ -59,7 +59,7 @@ export function keepContents(previous: readonly ProseBlock[], next: readonly Pro
 }
 
 /** True where two contents are the same in all their parts. */
-export function sameContent(a: BlockContent, b: BlockContent): boolean {
+function sameContent(a: BlockContent, b: BlockContent): boolean {
   return (
     a === b ||
     (a.text === b.text &&

@@ -150,7 +150,7 @@ function listItem(
 }
 
 /** Reads a body whose first line goes on behind a mark, and whose other lines have a margin of their own. */
-export function readIndentedFrom(
+function readIndentedFrom(
   cx: DocumentContext,
   lines: Lines,
   line: number,
