@@ -95,6 +95,7 @@ describe('evenword compare', () => {
     expect(out).toMatch(/both go with .*“restart ___” \(16 and 8 times\)/);
     expect(out).toMatch(/guides\/ +data logger 24, datalogger 0\n/);
     expect(out).toMatch(/reference\/ +data logger 0, datalogger 16\n/);
+    expect(out).toContain('    No page has both.\n');
     expect(out).toContain('The folder settles 100 % of the choice');
     expect(out).toContain('H(term | folder)');
     expect(out).toMatch(/Evenword asks about them \(variant, \d+ % sure\)\.\n$/);

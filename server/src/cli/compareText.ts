@@ -54,7 +54,8 @@ function folders({ terms, figures: { choice } }: TermComparison, root: string): 
   });
   const more = choice.folders.length - shown.length;
   if (more > 0) lines.push(`    and ${count(more, 'more folder')}\n`);
-  lines.push(`    Both stand on ${count(choice.documentsWithBoth, 'page')}.\n`);
+  const both = choice.documentsWithBoth;
+  lines.push(both === 0 ? '    No page has both.\n' : `    Both stand on ${count(both, 'page')}.\n`);
   if (choice.entropy > 0 && choice.byFolder >= MOSTLY_FOLDERS * choice.entropy) {
     const share = Math.round((100 * choice.byFolder) / choice.entropy);
     lines.push(`    The folder settles ${share} % of the choice: two teams may name one thing, or write about two.\n`);
