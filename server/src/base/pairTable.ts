@@ -5,11 +5,19 @@ const EMPTY = 0;
 
 /** Gives each distinct pair `(left, right)` of numbers below 2^31 a number of its own, in order of arrival. */
 export class PairTable {
-  private lefts = new Int32Array(1024);
-  private rights = new Int32Array(1024);
+  private lefts: Int32Array;
+  private rights: Int32Array;
   /** Numbers of pairs plus one, at the places that their hashes give. */
-  private slots = new Int32Array(2048);
+  private slots: Int32Array;
   private count = 0;
+
+  /** @param expected how many pairs there will be: a table that need not grow leaves nothing behind */
+  constructor(expected = 1024) {
+    const rows = Math.max(16, expected);
+    this.lefts = new Int32Array(rows);
+    this.rights = new Int32Array(rows);
+    this.slots = new Int32Array(2 ** Math.ceil(Math.log2(rows * 2)));
+  }
 
   get size(): number {
     return this.count;

@@ -19,7 +19,7 @@ const MOST_FILLERS = 2;
  */
 export function* findNearSentences(reader: PassageReader): Work<Substitution[]> {
   const { stream } = reader.corpus;
-  const frames = new FrameIndex();
+  const frames = new FrameIndex((stream.length * 3) >> 3);
   for (let first = 0; first < stream.length;) {
     let end = first + 1;
     while (end < stream.length && (stream.flags[end]! & TokenFlag.sentenceStart) === 0) end++;
@@ -49,14 +49,24 @@ const suffix = new Int32Array(LONGEST + 1);
 /** Units by the frame that they fill, in order of their rows; columns, since there are as many as words. */
 class FrameIndex {
   /** Frames by two hashes of 31 bits, of what stands before and behind the gap. */
-  private readonly frames = new PairTable();
+  private readonly frames: PairTable;
   /** By frame: its last filling plus one. */
-  private last = new Uint32Array(1024);
+  private last: Uint32Array<ArrayBuffer>;
   /** By filling: its unit, its row, and the filling of its frame before it, plus one. */
-  private unit = new Int32Array(1024);
-  private row = new Uint32Array(1024);
-  private before = new Uint32Array(1024);
+  private unit: Int32Array<ArrayBuffer>;
+  private row: Uint32Array<ArrayBuffer>;
+  private before: Uint32Array<ArrayBuffer>;
   private count = 0;
+
+  /** @param expected about as many fillings as there will be */
+  constructor(expected: number) {
+    const size = Math.max(1024, expected);
+    this.frames = new PairTable(size);
+    this.last = new Uint32Array(size);
+    this.unit = new Int32Array(size);
+    this.row = new Uint32Array(size);
+    this.before = new Uint32Array(size);
+  }
 
   add(prefix: number, suffix: number, unit: number, row: number): void {
     if (this.count === this.unit.length) this.grow();
