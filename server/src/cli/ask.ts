@@ -3,7 +3,7 @@ import { QUESTION_KINDS } from '../engine/engine.js';
 import { ExampleFinder } from '../engine/examples.js';
 import type { Snapshot } from '../engine/snapshot.js';
 import type { Question, QuestionKind } from '../mining/question.js';
-import { FILE_OPTIONS, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, MINING_OPTIONS, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
@@ -23,6 +23,7 @@ export const ask: Subcommand = {
     most: { value: 'N', help: 'list no more than N questions (all by default)' },
     ...USAGE_OPTIONS,
     ...FILE_OPTIONS,
+    ...MINING_OPTIONS,
   },
   async run(given, host) {
     const { options } = given;

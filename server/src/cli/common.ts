@@ -22,8 +22,12 @@ export const FILE_OPTIONS: Readonly<Record<string, OptionRule>> = {
     value: 'ZONES',
     help: `open or close zones, by commas: quotation=on,heading=off; of ${SWITCHED_ZONES.join(', ')}`,
   },
-  'no-history': { help: 'do not read in the git history what writers replaced' },
   'explain-files': { help: 'say which files were left out, and why' },
+};
+
+/** The options of a subcommand that mines. */
+export const MINING_OPTIONS: Readonly<Record<string, OptionRule>> = {
+  'no-history': { help: 'do not read in the git history what writers replaced' },
 };
 
 /** The operands of a subcommand that takes folders. @throws UsageError where none is named. */

@@ -2,7 +2,7 @@
 import { COMPANION_RELATIONS, SEGMENT_KINDS, companionsOfTerm } from '../engine/companions.js';
 import type { TermCompanions } from '../engine/companions.js';
 import type { CompanionRelation, SegmentKind } from '../mining/companions/companions.js';
-import { FILE_OPTIONS, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, MINING_OPTIONS, surveyOrStop } from './common.js';
 import { renderCompanions } from './companionText.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
@@ -26,6 +26,7 @@ export const companions: Subcommand = {
     relation: { value: 'RELATIONS', help: `only these relations, by commas: ${COMPANION_RELATIONS.join(', ')}` },
     most: { value: 'N', help: `list no more than N companions of each relation (${USUAL_MOST} by default)` },
     ...FILE_OPTIONS,
+    ...MINING_OPTIONS,
   },
   async run({ options, operands: [term, ...operands] }, host) {
     if (term === undefined || term.trim() === '' || operands.length === 0)

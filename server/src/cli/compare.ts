@@ -4,7 +4,7 @@ import type { TermComparison } from '../engine/comparison.js';
 import type { Example } from '../engine/examples.js';
 import type { ComparedCompanion } from '../mining/comparison/sharedCompanions.js';
 import type { Reason } from '../mining/question.js';
-import { FILE_OPTIONS, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, MINING_OPTIONS, surveyOrStop } from './common.js';
 import { below, renderComparison } from './compareText.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
@@ -20,6 +20,7 @@ export const compare: Subcommand = {
     format: { value: 'FORMAT', choices: ['text', 'json'], help: 'text for people (default), json for programs' },
     ...USAGE_OPTIONS,
     ...FILE_OPTIONS,
+    ...MINING_OPTIONS,
   },
   async run({ options, operands: [a, b, ...operands] }, host) {
     if (a === undefined || b === undefined || a.trim() === '' || b.trim() === '' || operands.length === 0)

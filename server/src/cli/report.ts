@@ -1,6 +1,6 @@
 // evenword report: the state of a documentation set's wording, written as files to keep and to forward.
 import { makeReport } from '../report/report.js';
-import { FILE_OPTIONS, surveyOrStop } from './common.js';
+import { FILE_OPTIONS, MINING_OPTIONS, surveyOrStop } from './common.js';
 import { Exit } from './host.js';
 import type { Subcommand } from './subcommand.js';
 import { UsageError } from './options.js';
@@ -11,6 +11,7 @@ export const report: Subcommand = {
   options: {
     out: { value: 'FOLDER', help: 'where to write, made where it is missing; has to be given' },
     ...FILE_OPTIONS,
+    ...MINING_OPTIONS,
   },
   async run(given, host) {
     const out = given.options.get('out');
