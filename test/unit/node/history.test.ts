@@ -15,6 +15,7 @@ import { delimiter, join } from 'node:path';
 import { afterEach, describe, expect, it } from 'vitest';
 import { Git } from '../../../server/src/node/history/git.js';
 import { readRawChanges } from '../../../server/src/node/history/commits.js';
+import { readContents } from '../../../server/src/node/history/contents.js';
 import { DEFAULT_BOUNDS, readHistory } from '../../../server/src/node/history/history.js';
 import { nodeServerHost } from '../../../server/src/node/serverHost.js';
 import type { HistoryOptions, ReadHistory } from '../../../server/src/node/history/history.js';
@@ -60,6 +61,21 @@ describe.skipIf(!hasGit)('the history of a repository (skipped where there is no
     const history = await read(repository(['folder', 'directory', 'catalogue']));
     expect(found(history)).toEqual(['directory → catalogue', 'folder → directory']);
     expect(history).toMatchObject({ commits: 3, readNow: 3, leftOver: 0 });
+  });
+
+  it('is over where a reader has enough, whatever git has still to say', async () => {
+    const folder = repository(['folder']);
+    writeFileSync(join(folder, 'large.md'), 'Check the mooring.\n'.repeat(50_000));
+    run(folder, 'add', '--all');
+    const name = run(folder, 'rev-parse', ':large.md').trim();
+    const names = Array.from({ length: 50 }, () => name);
+    const git = Git.find(folder)!;
+    const read: number[] = [];
+    const two = async (next: () => Promise<{ bytes: number }>): Promise<void> => {
+      for (let i = 0; i < 2; i++) read.push((await next()).bytes);
+    };
+    await readContents(git, names, 2 ** 20, two, new AbortController().signal);
+    expect(read).toEqual([950_000, 950_000]);
   });
 
   it('is that of the folder alone, whatever its pages are called', async () => {

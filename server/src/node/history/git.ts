@@ -116,8 +116,11 @@ export class Git {
     try {
       await take(run.stdout);
       const hadEnough = !run.stdout.readableEnded;
-      if (hadEnough) stop();
-      run.stdout.resume();
+      if (hadEnough) {
+        stop();
+        // What was not read is thrown away: a run is over when its output is, and nobody else would take it.
+        run.stdout.destroy();
+      }
       const code = await ended;
       signal?.throwIfAborted();
       if (!hadEnough && code !== 0) throw new GitFailed(said.trim() || `git ended with ${String(code)}`);
