@@ -56,7 +56,7 @@ export interface Question {
   readonly language?: string;
   /** From 0 to 1: how sure the evidence is that the terms name one concept. */
   readonly confidence: number;
-  /** What answering settles: confidence × uses outside the leading term. Orders the questions. */
+  /** What answering settles, by which questions are ordered: confidence × uses outside the leading term, damped for short forms. */
   readonly worth: number;
   /** For verbs: the objects (nouns in their dictionary form) with which they name one operation. */
   readonly objects?: readonly string[];
