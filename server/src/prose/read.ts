@@ -44,7 +44,7 @@ const READERS: Readonly<Record<Format, Reader>> = {
   html: markup,
   xml: markup,
   latex: reader(readLatex, rereadLatex),
-  apiDescription: reader(readApiDescription, rereadApiDescription),
+  apiDescription: reader((source) => readApiDescription(source), rereadApiDescription, 'byText'),
   plaintext: reader(readPlaintext, rereadPlaintext),
 };
 
