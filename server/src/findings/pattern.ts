@@ -15,7 +15,7 @@ export interface Pattern {
 }
 
 /** The ranges of the words of a text, as flat pairs of start and end. */
-export function wordRanges(text: string): number[] {
+function wordRanges(text: string): number[] {
   const ranges: number[] = [];
   for (let at = 0; at < text.length;) {
     if (!isWordUnit(text, at)) {

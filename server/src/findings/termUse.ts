@@ -22,7 +22,7 @@ export interface TermUse {
 const CAPITALISED_ZONES = Zone.heading | Zone.tableCell | Zone.definedTerm;
 
 /** All zones that a range of a block's text touches, the block's own among them. */
-export function zonesOf(content: BlockContent, start: number, end: number): ZoneSet {
+function zonesOf(content: BlockContent, start: number, end: number): ZoneSet {
   let zones = content.zones;
   for (const mark of content.marks) {
     if (mark.start >= end) break;

@@ -19,7 +19,7 @@ export function plainWords(term: string): string[] {
 }
 
 /** The same, and all in one spelling. */
-export function termWords(term: string): string[] {
+function termWords(term: string): string[] {
   return plainWords(term).map(spellingKey);
 }
 

@@ -13,3 +13,8 @@ export function normalise(source: string): string {
     .replaceAll('\r', '\n')
     .replace(/[\0\uFFFC]/g, '\uFFFD');
 }
+
+/** Where a document's text begins: behind a byte order mark, where there is one. */
+export function textStart(text: string): number {
+  return text.charCodeAt(0) === 0xfeff ? 1 : 0;
+}

@@ -10,10 +10,10 @@ import {
   type UnitWalk,
 } from './blockwise.js';
 import { ContentBuilder, type BlockRole } from './content.js';
-import { normalise } from './normalise.js';
+import { normalise, textStart } from './normalise.js';
 import type { ProseBlock } from './prose.js';
 import { markQuotations } from './quotations.js';
-import { changeBetween, type Reading } from './reading.js';
+import { changeBetween } from './reading.js';
 import { Zone } from './zones.js';
 
 const LIST_MARK = /^[ \t]*(?:[-*+•]|\(?(?:\d{1,3}|[a-zA-Z])[.)])[ \t]+(?=\S)/;
@@ -56,8 +56,7 @@ export function readPlaintext(source: SourceText): PlaintextReading {
 }
 
 /** Reads a text again after an edit, with the same result as {@link readPlaintext} gives for the new one. */
-export function rereadPlaintext(previous: Reading, source: SourceText): PlaintextReading {
-  if (!isOurs(previous)) return readPlaintext(source);
+export function rereadPlaintext(previous: PlaintextReading, source: SourceText): PlaintextReading {
   const text = normalise(source.text);
   const change = changeBetween(previous.text, text);
   if (!change) return { ...previous, source };
@@ -66,15 +65,6 @@ export function rereadPlaintext(previous: Reading, source: SourceText): Plaintex
   const same = margin === previous.margin && start === textStart(previous.text);
   const reread = same ? rereadUnits(new Paragraphs(text, margin), previous, text, change, start) : undefined;
   return assemble(source, text, margin, reread ?? readPlaintext(source), previous);
-}
-
-/** False for what stands in the place of a reading that failed. */
-function isOurs(reading: Reading): reading is PlaintextReading {
-  return 'units' in reading;
-}
-
-function textStart(text: string): number {
-  return text.charCodeAt(0) === 0xfeff ? 1 : 0;
 }
 
 function assemble(

@@ -39,13 +39,13 @@ const READERS: Readonly<Record<Format, Reader>> = {
   markdown,
   mdx: markdown,
   notebook: reader(readNotebook, rereadNotebook, 'cells'),
-  restructuredtext: reader(readRestructuredText, rereadRestructuredText),
-  asciidoc: reader(readAsciidoc, rereadAsciidoc),
+  restructuredtext: reader(readRestructuredText, rereadRestructuredText, 'units'),
+  asciidoc: reader(readAsciidoc, rereadAsciidoc, 'units'),
   html: markup,
   xml: markup,
   latex: reader(readLatex, rereadLatex),
   apiDescription: reader((source) => readApiDescription(source), rereadApiDescription, 'byText'),
-  plaintext: reader(readPlaintext, rereadPlaintext),
+  plaintext: reader(readPlaintext, rereadPlaintext, 'units'),
 };
 
 /** The prose of a document. Never throws: what cannot be read is left out and said in `problems`. */

@@ -62,7 +62,7 @@ function spelling({ term, object }: TermPlace): string {
 }
 
 /** True where the concept lists another spelling of the term that differs in capitals alone (`GitHub`, not `Github`). */
-export function isToldApartByCapitals(term: TermEntry, concept: ConceptEntry): boolean {
+function isToldApartByCapitals(term: TermEntry, concept: ConceptEntry): boolean {
   return concept.terms.some((other) => other.key === term.key && other.text !== term.text);
 }
 

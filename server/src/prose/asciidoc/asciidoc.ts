@@ -2,8 +2,8 @@
 import type { SourceText } from '../../text/sourceText.js';
 import { gathered, readUnits, rereadUnits, type BlockwiseReading } from '../blockwise.js';
 import { readFrontMatter, type FrontMatter } from '../markdown/frontMatter.js';
-import { normalise } from '../normalise.js';
-import { changeBetween, type Reading } from '../reading.js';
+import { normalise, textStart } from '../normalise.js';
+import { changeBetween } from '../reading.js';
 import { AT_HEAD, Outermost, type Known } from './outermost.js';
 
 /** A document read. */
@@ -24,16 +24,7 @@ export function readAsciidoc(source: SourceText): AsciidocReading {
 }
 
 /** Reads a document again after an edit, with the same result as {@link readAsciidoc} gives for the new text. */
-export function rereadAsciidoc(previous: Reading, source: SourceText): AsciidocReading {
-  return isOurs(previous) ? rereadOurs(previous, source) : readAsciidoc(source);
-}
-
-/** False for what stands in the place of a reading that failed. */
-function isOurs(reading: Reading): reading is AsciidocReading {
-  return 'units' in reading;
-}
-
-function rereadOurs(previous: AsciidocReading, source: SourceText): AsciidocReading {
+export function rereadAsciidoc(previous: AsciidocReading, source: SourceText): AsciidocReading {
   const text = normalise(source.text);
   const change = changeBetween(previous.text, text);
   if (!change) return { ...previous, source };
@@ -45,10 +36,6 @@ function rereadOurs(previous: AsciidocReading, source: SourceText): AsciidocRead
   if (reread) return assemble(source, text, frontMatter, reread, previous);
   const reading = readAsciidoc(source);
   return assemble(source, text, frontMatter, reading, previous);
-}
-
-function textStart(text: string): number {
-  return text.charCodeAt(0) === 0xfeff ? 1 : 0;
 }
 
 function assemble(

@@ -1,4 +1,5 @@
 // Follows LaTeX from token to token: what each opens, closes or puts into the text.
+import { textStart } from '../normalise.js';
 import type { ProseBlock, ReadingProblem } from '../prose.js';
 import { ArgumentReader } from './argumentReader.js';
 import type { Command } from './command.js';
@@ -268,7 +269,7 @@ export class LatexReader {
  * others take in.
  */
 function bodyStart(text: string): number {
-  const start = text.charCodeAt(0) === 0xfeff ? 1 : 0;
+  const start = textStart(text);
   const classAt = uncommented(text, '\\document', 0);
   if (classAt < 0 || !/^(?:class|style)/.test(text.slice(classAt + 9, classAt + 14))) return start;
   const bodyAt = uncommented(text, BODY, classAt);

@@ -1,6 +1,6 @@
 // Reads Markdown and MDX: the whole document, or what an edit touched.
 import type { SourceText } from '../../text/sourceText.js';
-import { normalise } from '../normalise.js';
+import { normalise, textStart } from '../normalise.js';
 import type { Prose, ProseBlock, ReadingProblem } from '../prose.js';
 import { changeBetween, keepContents, type Change, type Reading } from '../reading.js';
 import { readFrontMatter, type FrontMatter } from './frontMatter.js';
@@ -31,7 +31,7 @@ export interface MarkdownOptions {
 /** Reads a whole document. */
 export function readMarkdown(source: SourceText, options: MarkdownOptions = {}): MarkdownReading {
   const text = normalise(source.text);
-  const bodyStart = text.charCodeAt(0) === 0xfeff ? 1 : 0;
+  const bodyStart = textStart(text);
   const frontMatter = options.frontMatter === false ? undefined : readFrontMatter(text, bodyStart);
   const stretch = parseStretch(text, source.format, frontMatter?.end ?? bodyStart, text.length);
   const definitions = definitionTable(stretch.definitions);
@@ -52,10 +52,10 @@ export function rereadMarkdown(previous: MarkdownReading, source: SourceText): M
   const change = changeBetween(previous.text, text);
   if (!change) return { ...previous, source };
   const shift = change.newEnd - change.oldEnd;
-  const bodyStart = text.charCodeAt(0) === 0xfeff ? 1 : 0;
+  const bodyStart = textStart(text);
   const frontMatter = readFrontMatter(text, bodyStart);
   const from = frontMatter?.end ?? bodyStart;
-  const oldFrom = previous.frontMatter?.end ?? (previous.text.charCodeAt(0) === 0xfeff ? 1 : 0);
+  const oldFrom = previous.frontMatter?.end ?? textStart(previous.text);
   const insideFrontMatter = change.oldEnd < oldFrom && from === oldFrom + shift;
   const behindFrontMatter = change.start >= oldFrom && from === oldFrom;
   if (!insideFrontMatter && !behindFrontMatter) return rereadWhole(previous, source);

@@ -1,7 +1,7 @@
 // Reads HTML and XML documentation: what stands before the root, then the stream of its tags and text; again from where it changed.
 import type { SourceText } from '../../text/sourceText.js';
 import { readFrontMatter } from '../markdown/frontMatter.js';
-import { normalise } from '../normalise.js';
+import { normalise, textStart } from '../normalise.js';
 import type { ProseBlock } from '../prose.js';
 import { changeBetween, keepContents, type Change, type Reading } from '../reading.js';
 import { lastUpTo, type Checkpoint } from './checkpoints.js';
@@ -61,7 +61,7 @@ function readWhole(source: SourceText, text: string): MarkupReading {
 
 /** Pages that a generator fills in can begin with front matter, as those in Markdown do. */
 function readHead(source: SourceText, text: string): Head {
-  const start = text.charCodeAt(0) === 0xfeff ? 1 : 0;
+  const start = textStart(text);
   if (source.format === 'xml') return { prolog: readProlog(text, start), blocks: [], language: undefined };
   const matter = readFrontMatter(text, start);
   const prolog = { end: matter?.end ?? start, doctype: '', entities: new Set<string>() };

@@ -5,7 +5,7 @@ import type { SourceText } from '../../text/sourceText.js';
 import { liftBlocks } from '../embedded.js';
 import { withGlossary } from '../markdown/glossary.js';
 import { readMarkdown, type MarkdownOptions } from '../markdown/markdown.js';
-import { normalise } from '../normalise.js';
+import { normalise, textStart } from '../normalise.js';
 import type { BlockKind, ProseBlock, ReadingProblem } from '../prose.js';
 import { keepContents, type Reading } from '../reading.js';
 import { Zone } from '../zones.js';
@@ -27,7 +27,7 @@ export interface NotebookReading extends Reading {
 /** Reads a notebook. Where the file is no valid JSON nothing is read, since the places of its cells are not certain. */
 export function readNotebook(source: SourceText, previous?: NotebookReading): NotebookReading {
   const text = normalise(source.text);
-  const start = text.charCodeAt(0) === 0xfeff ? 1 : 0;
+  const start = textStart(text);
   const broken = brokenJson(text.slice(start), start);
   if (broken) return failed(source, broken);
   const { cells, title } = findCells(text);

@@ -1,4 +1,5 @@
 // The language that a document states in the field list at its top (docutils, "Bibliographic Fields").
+import { textStart } from '../normalise.js';
 import { isAdornment } from './markers.js';
 
 const FIELD = /^:(?:lang|language): +([A-Za-z]{2}(?:[-_][A-Za-z0-9]{1,8})*)$/;
@@ -9,7 +10,7 @@ export function docinfoLanguage(text: string): string | undefined {
   /** The lines since the last blank one: those of a title hold an adornment. */
   let title: string[] = [];
   let inFields = false;
-  for (let at = text.charCodeAt(0) === 0xfeff ? 1 : 0, line = 0; at < text.length && line < MOST_LINES; line++) {
+  for (let at = textStart(text), line = 0; at < text.length && line < MOST_LINES; line++) {
     let end = text.indexOf('\n', at);
     if (end < 0) end = text.length;
     const written = text.slice(at, Math.min(end, at + 300)).trimEnd();
